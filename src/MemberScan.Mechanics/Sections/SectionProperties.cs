@@ -1,0 +1,53 @@
+namespace MemberScan.Mechanics.Sections;
+
+/// <summary>Properties of a cross-section about its centroid; warping is left out.</summary>
+public sealed record SectionProperties
+{
+    /// <summary>Area [m²].</summary>
+    public required double Area { get; init; }
+
+    /// <summary>Second moment <c>∫z² dA</c> about y [m⁴].</summary>
+    public required double Iy { get; init; }
+
+    /// <summary>Second moment <c>∫y² dA</c> about z [m⁴].</summary>
+    public required double Iz { get; init; }
+
+    /// <summary>Product of inertia <c>+∫yz dA</c> [m⁴].</summary>
+    public required double Iyz { get; init; }
+
+    /// <summary>Saint-Venant torsion constant [m⁴]; null where no model in use gives it.</summary>
+    public required double? J { get; init; }
+
+    /// <summary>Where J comes from, in words.</summary>
+    public required string JSource { get; init; }
+
+    /// <summary>Elastic modulus about y at the nearer extreme fibre: the smaller one [m³].</summary>
+    public required double WelY { get; init; }
+
+    /// <summary>Elastic modulus about z at the nearer extreme fibre: the smaller one [m³].</summary>
+    public required double WelZ { get; init; }
+
+    /// <summary>Plastic modulus about y [m³].</summary>
+    public required double WplY { get; init; }
+
+    /// <summary>Plastic modulus about z [m³].</summary>
+    public required double WplZ { get; init; }
+
+    /// <summary>Torsion modulus: largest torsional shear stress = T/Wt [m³]; null where J is.</summary>
+    public required double? Wt { get; init; }
+
+    /// <summary>Thin-wall torsion constant of a closed wall, <c>4·Am²·t/p</c> [m⁴]; null for solid sections.</summary>
+    public required double? JThinWall { get; init; }
+
+    /// <summary>Shear centre, distance from the centroid along y [m].</summary>
+    public required double ShearCentreY { get; init; }
+
+    /// <summary>Shear centre, distance from the centroid along z [m].</summary>
+    public required double ShearCentreZ { get; init; }
+
+    /// <summary>The smaller of the two second moments about principal axes [m⁴].</summary>
+    public double IMin => 0.5 * (Iy + Iz) - Math.Sqrt(0.25 * (Iy - Iz) * (Iy - Iz) + Iyz * Iyz);
+
+    /// <summary>Properties of a section by closed form.</summary>
+    public static SectionProperties Of(CrossSection section) => throw new NotImplementedException();
+}

@@ -1,0 +1,57 @@
+using MemberScan.Mechanics.Forces;
+using MemberScan.Mechanics.Sections;
+
+namespace MemberScan.Mechanics.Stress;
+
+/// <summary>The stresses of one cross-section in one shear model, for any section forces.</summary>
+/// <remarks>Immutable and safe for several threads: made once per section, shared by all members that have it.</remarks>
+public abstract class StressField
+{
+    private protected StressField(CrossSection section, ShearModel model, double poisson, SectionProperties properties) =>
+        (Section, Model, Poisson, Properties) = (section, model, poisson, properties);
+
+    /// <summary>The section.</summary>
+    public CrossSection Section { get; }
+
+    /// <summary>The shear model.</summary>
+    public ShearModel Model { get; }
+
+    /// <summary>Poisson's ratio ν [-], in [0, 0.5); of no effect in the elementary model.</summary>
+    public double Poisson { get; }
+
+    /// <summary>Properties of the section.</summary>
+    public SectionProperties Properties { get; }
+
+    /// <summary>Whether the model has an answer for T ≠ 0.</summary>
+    public virtual bool CarriesTorsion => true;
+
+    /// <summary>How well the field gives back the six section forces.</summary>
+    public abstract Closure Closure { get; }
+
+    /// <summary>Makes the field of a section; false with a sentence when the model has none for it.</summary>
+    /// <param name="section">The section.</param>
+    /// <param name="model">The shear model.</param>
+    /// <param name="poisson">Poisson's ratio ν [-], in [0, 0.5).</param>
+    /// <param name="field">The field.</param>
+    /// <param name="whyNot">Why there is none, such as "elasticity not available for a box".</param>
+    /// <exception cref="ArgumentOutOfRangeException"><paramref name="poisson"/> is outside [0, 0.5).</exception>
+    public static bool TryCreate(
+        CrossSection section, ShearModel model, double poisson,
+        [System.Diagnostics.CodeAnalysis.NotNullWhen(true)] out StressField? field,
+        [System.Diagnostics.CodeAnalysis.NotNullWhen(false)] out string? whyNot) => throw new NotImplementedException();
+
+    /// <summary>The stresses at a point of the material.</summary>
+    /// <param name="forces">Section forces; finite.</param>
+    /// <param name="y">Distance from the centroid along y [m].</param>
+    /// <param name="z">Distance from the centroid along z [m].</param>
+    /// <returns>The state; of no meaning for points outside the material (<see cref="Contains"/>).</returns>
+    public abstract StressState At(in SectionForces forces, double y, double z);
+
+    /// <summary>Whether a point lies in the material or on its edge (within 1e-9 of the largest extent).</summary>
+    public abstract bool Contains(double y, double z);
+
+    /// <summary>The place of the section where a measure is largest.</summary>
+    /// <returns>A point of the material; its value is within 0.1 % of the true supremum of this field.</returns>
+    /// <exception cref="ArgumentException">T ≠ 0 where <see cref="CarriesTorsion"/> is false, or forces not finite.</exception>
+    public abstract GoverningPoint Govern(in SectionForces forces, StressMeasure measure);
+}

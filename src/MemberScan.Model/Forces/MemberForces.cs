@@ -1,0 +1,27 @@
+using System.Collections.Immutable;
+using MemberScan.Mechanics.Forces;
+using MemberScan.Model.Verdicts;
+
+namespace MemberScan.Model.Forces;
+
+/// <summary>The section forces of one candidate in one situation, in its local axes.</summary>
+public sealed record MemberForces
+{
+    /// <summary>Key of the candidate.</summary>
+    public required string MemberKey { get; init; }
+
+    /// <summary>The situation.</summary>
+    public required Situation Situation { get; init; }
+
+    /// <summary>Stations along the member, in the order of the source; SI, positive-face, about the centroid.</summary>
+    public required ImmutableArray<ForceStation> Stations { get; init; }
+
+    /// <summary>File and lines, or STEP ids, in words.</summary>
+    public required string Source { get; init; }
+
+    /// <summary>How the values were turned into local axes and this convention, in words; empty when they were so already.</summary>
+    public string Conversion { get; init; } = "";
+
+    /// <summary>Why the values cannot be used; null when they can.</summary>
+    public Reason? Unusable { get; init; }
+}

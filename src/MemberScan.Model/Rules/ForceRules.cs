@@ -1,0 +1,33 @@
+using System.Collections.Frozen;
+using System.Collections.Immutable;
+using MemberScan.Model.Forces;
+
+namespace MemberScan.Model.Rules;
+
+/// <summary>How forces are read from model and tables.</summary>
+public sealed record ForceRules
+{
+    /// <summary>Convention of results in the model.</summary>
+    public ForceConvention Convention { get; init; } = ForceConvention.PositiveFace;
+
+    /// <summary>Axes of results in the model.</summary>
+    public ForceComponents Components { get; init; } = ForceComponents.AsFlagged;
+
+    /// <summary>Turn about x from the member's own axes to the axes of the stored components [degree].</summary>
+    public double TurnDegrees { get; init; }
+
+    /// <summary>Turns that differ for single members, by key, GlobalId or name [degree].</summary>
+    public FrozenDictionary<string, double> TurnDegreesByMember { get; init; } = FrozenDictionary<string, double>.Empty;
+
+    /// <summary>Whether components that results leave out count as zero; otherwise such forces are incomplete.</summary>
+    public bool MissingComponentsAreZero { get; init; }
+
+    /// <summary>Whether table rows of unknown members are listed instead of refused.</summary>
+    public bool ListUnknownMembers { get; init; }
+
+    /// <summary>Kinds by patterns on situation names; the first that fits wins.</summary>
+    public ImmutableArray<KindPattern> Kinds { get; init; } = [];
+
+    /// <summary>Kind of every situation that nothing else tells; from the command line.</summary>
+    public SituationKind KindOfAll { get; init; } = SituationKind.Unknown;
+}

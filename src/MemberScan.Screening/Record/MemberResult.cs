@@ -1,0 +1,78 @@
+using System.Collections.Immutable;
+using MemberScan.Foundation.Geometry;
+using MemberScan.Model.Verdicts;
+
+namespace MemberScan.Screening.Record;
+
+/// <summary>How one candidate ended, with all that is known of it. Values are SI; what is not known is null or empty.</summary>
+public sealed record MemberResult
+{
+    /// <summary>GlobalId, for an item <c>GlobalId/2</c>.</summary>
+    public required string Key { get; init; }
+
+    /// <summary>GlobalId of the element.</summary>
+    public required string GlobalId { get; init; }
+
+    /// <summary>Number of the item, from 1; 0 when the element is the candidate.</summary>
+    public required int ItemNumber { get; init; }
+
+    /// <summary>Number of items of the element.</summary>
+    public required int ItemCount { get; init; }
+
+    /// <summary>Number after '#' of the element.</summary>
+    public required ulong StepId { get; init; }
+
+    /// <summary>Tag; empty if none.</summary>
+    public required string Tag { get; init; }
+
+    /// <summary>Name; empty if none.</summary>
+    public required string Name { get; init; }
+
+    /// <summary>Class, such as <c>IfcMember</c>.</summary>
+    public required string Class { get; init; }
+
+    /// <summary>Guess of the role.</summary>
+    public required string Role { get; init; }
+
+    /// <summary>Storey or other container; empty if none.</summary>
+    public required string Storey { get; init; }
+
+    /// <summary>Section in words; empty if none.</summary>
+    public required string Section { get; init; }
+
+    /// <summary>Where the section comes from, in words; empty if none.</summary>
+    public required string SectionSource { get; init; }
+
+    /// <summary>Material name; empty if none.</summary>
+    public required string Material { get; init; }
+
+    /// <summary>Yield strength [Pa].</summary>
+    public required double? Strength { get; init; }
+
+    /// <summary>Where the strength comes from; empty if there is none.</summary>
+    public required string StrengthSource { get; init; }
+
+    /// <summary>Length along the sweep [m].</summary>
+    public required double? Length { get; init; }
+
+    /// <summary>Where the length comes from; empty if there is none.</summary>
+    public required string LengthSource { get; init; }
+
+    /// <summary>Local axes in project coordinates.</summary>
+    public required MemberAxes? Axes { get; init; }
+
+    /// <summary>The verdict.</summary>
+    public required Verdict Verdict { get; init; }
+
+    /// <summary>Why the candidate was not checked; null otherwise.</summary>
+    public required Reason? Reason { get; init; }
+
+    /// <summary>The governing check; null when nothing could be evaluated. Present on unchecked candidates too, where a figure is known.</summary>
+    public required Governing? Governing { get; init; }
+
+    /// <summary>The worst of each situation, worst first.</summary>
+    public required ImmutableArray<SituationResult> Situations { get; init; }
+
+    /// <summary>What a reader must know.</summary>
+    public required ImmutableArray<string> Notes { get; init; }
+}

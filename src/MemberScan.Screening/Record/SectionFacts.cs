@@ -1,0 +1,18 @@
+namespace MemberScan.Screening.Record;
+
+/// <summary>A section in use: its properties (SI) and how well its stress fields give back the six section forces.</summary>
+/// <param name="Designation">Kind and dimensions.</param>
+/// <param name="Members">Number of candidates that have it.</param>
+/// <param name="Area">Area [m²].</param>
+/// <param name="Iy">Second moment about y [m⁴].</param>
+/// <param name="Iz">Second moment about z [m⁴].</param>
+/// <param name="WelY">Elastic modulus about y [m³].</param>
+/// <param name="WelZ">Elastic modulus about z [m³].</param>
+/// <param name="J">Torsion constant [m⁴]; null if no model gives it.</param>
+/// <param name="JSource">Where J comes from.</param>
+/// <param name="Wt">Torsion modulus [m³]; null where J is.</param>
+/// <param name="ElementaryClosure">Closure of the elementary model in words with numbers.</param>
+/// <param name="ElasticityClosure">Closure of the elasticity model in words with numbers, or why there is none.</param>
+public sealed record SectionFacts(
+    string Designation, int Members, double Area, double Iy, double Iz, double WelY, double WelZ, double? J, string JSource, double? Wt,
+    string ElementaryClosure, string ElasticityClosure);
