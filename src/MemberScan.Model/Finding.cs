@@ -1,3 +1,4 @@
+using System.Diagnostics.CodeAnalysis;
 using MemberScan.Model.Verdicts;
 
 namespace MemberScan.Model;
@@ -8,6 +9,14 @@ public abstract record Finding<T>
 {
     private Finding()
     {
+    }
+
+    /// <summary>Takes the finding apart: the value with its source, or the reason.</summary>
+    public bool TryGet([NotNullWhen(true)] out Found? found, [NotNullWhen(false)] out Reason? why)
+    {
+        found = this as Found;
+        why = (this as Missing)?.Why;
+        return found is not null;
     }
 
     /// <summary>The value and where it comes from.</summary>

@@ -22,6 +22,12 @@ public sealed record MemberForces
     /// <summary>How the values were turned into local axes and this convention, in words; empty when they were so already.</summary>
     public string Conversion { get; init; } = "";
 
+    /// <summary>Where the stations must begin [m]; the member's start, or that of its analytical line when it reaches beyond.</summary>
+    public double From { get; init; }
+
+    /// <summary>Where the stations must end [m]; null for the member's end.</summary>
+    public double? To { get; init; }
+
     /// <summary>Why the values cannot be used; null when they can.</summary>
     public Reason? Unusable { get; init; }
 }

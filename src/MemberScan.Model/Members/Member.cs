@@ -33,6 +33,12 @@ public sealed record Member
     /// <summary>The material.</summary>
     public required Material Material { get; init; }
 
+    /// <summary>Radii of the bends along the member [m]; empty for a straight one.</summary>
+    public ImmutableArray<double> BendRadii { get; init; } = [];
+
+    /// <summary>Whether the centre line is one straight line.</summary>
+    public bool IsStraight { get; init; } = true;
+
     /// <summary>What a reader must know about the reading of this member.</summary>
     public ImmutableArray<string> Notes { get; init; } = [];
 }

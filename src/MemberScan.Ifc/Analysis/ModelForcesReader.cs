@@ -1,0 +1,236 @@
+using System.Collections.Immutable;
+using System.Globalization;
+using MemberScan.Foundation.Diagnostics;
+using MemberScan.Foundation.Geometry;
+using MemberScan.Mechanics.Forces;
+using MemberScan.Mechanics.Sections;
+using MemberScan.Model;
+using MemberScan.Model.Forces;
+using MemberScan.Model.Members;
+using MemberScan.Model.Verdicts;
+using MemberScan.Part21;
+
+namespace MemberScan.Ifc.Analysis;
+
+/// <summary>Section forces of the candidates from the result groups of a model, in each candidate's own axes.</summary>
+internal sealed class ModelForcesReader(
+    Instances instances, Relations relations, AnalyticalMemberReader analytical, ReactionReader reactions, SituationReader situations, DiagnosticList diagnostics)
+{
+    /// <summary>Largest sine of the angle between an analytical member and the body that it stands for.</summary>
+    private const double ParallelTolerance = 0.02;
+
+    /// <summary>Share of the length, or one section extent if more, by which a body may stick out beyond its analytical line.</summary>
+    private const double StickOut = 0.02;
+
+    private sealed record Part(AnalyticalMember Line, Part21Record Reaction, ReactionReader.Samples Samples);
+
+    /// <summary>Reads the forces of all candidates, in candidate order and then in the order of the result groups.</summary>
+    public ImmutableArray<MemberForces> Read(ImmutableArray<Member> members)
+    {
+        var forces = ImmutableArray.CreateBuilder<MemberForces>();
+        foreach (var group in members.GroupBy(m => m.Element.StepId))
+        {
+            var items = group.ToList();
+            foreach (var (member, lines) in Assign(items, LinesOf(items[0]))) AddForces(member, lines, forces);
+            ReportDirectActivities(items[0], forces);
+        }
+
+        ReportUnassigned();
+        return forces.ToImmutable();
+    }
+
+    private List<AnalyticalMember> LinesOf(Member member)
+    {
+        IEnumerable<ulong> ids = member.Element.Class.StartsWith("IfcStructuralCurveMember", StringComparison.Ordinal)
+            ? [member.Element.StepId]
+            : relations.AnalyticalOf(member.Element.StepId);
+        return [.. ids.Select(analytical.Read).OfType<AnalyticalMember>()];
+    }
+
+    /// <summary>Gives each analytical member to the item whose body it runs along; all of them to the element that is its own candidate.</summary>
+    private List<(Member Member, List<AnalyticalMember> Lines)> Assign(List<Member> items, List<AnalyticalMember> lines)
+    {
+        if (items.Count == 1) return [(items[0], lines)];
+
+        var assigned = items.ConvertAll(item => (Member: item, Lines: new List<AnalyticalMember>()));
+        foreach (var line in lines)
+        {
+            var nearest = -1;
+            var least = double.PositiveInfinity;
+            for (var i = 0; i < items.Count; i++)
+            {
+                var distance = Distance(items[i], line);
+                if (distance < least) (nearest, least) = (i, distance);
+            }
+
+            if (nearest >= 0) assigned[nearest].Lines.Add(line);
+            else diagnostics.Add("IFC-0022", Severity.Warning, "An analytical member runs along none of the bodies of the element that it is linked to; its forces are not used.", Span(line.Id));
+        }
+
+        return assigned;
+    }
+
+    /// <summary>Distance of an analytical member's middle from a body's line [m]; infinite when they do not run together.</summary>
+    private static double Distance(Member item, AnalyticalMember line)
+    {
+        if (!item.Axes.TryGet(out var axes, out _) || !item.Length.TryGet(out var length, out _) || !line.Line.TryGet(out var ends, out _)) return double.PositiveInfinity;
+        if (!(ends.Value.End - ends.Value.Start).TryNormalize(out var x) || x.Cross(axes.Value.X).Length > ParallelTolerance) return double.PositiveInfinity;
+
+        var middle = 0.5 * (ends.Value.Start + ends.Value.End) - axes.Value.Origin;
+        var along = middle.Dot(axes.Value.X);
+        var beside = (middle - along * axes.Value.X).Length;
+        var reach = item.Section is Finding<SectionFinding>.Found section ? Largest(section.Value.Shape) : 0;
+        var within = along > 0 && along < length.Value && beside <= Math.Max(reach, StickOut * length.Value);
+        return within ? beside : double.PositiveInfinity;
+    }
+
+    private void AddForces(Member member, List<AnalyticalMember> lines, ImmutableArray<MemberForces>.Builder forces)
+    {
+        var bySituation = new List<(Part21Record Group, List<Part> Parts)>();
+        foreach (var line in lines)
+            foreach (var id in relations.ActivitiesOn(line.Id))
+            {
+                if (!instances.File.TryFind(id, out var reaction) || reaction.Keyword is not ("IFCSTRUCTURALCURVEREACTION" or "IFCSTRUCTURALPOINTREACTION")) continue;
+
+                foreach (var group in relations.GroupsOf(id).Select(g => instances.File.TryFind(g, out var r) ? r : default).Where(r => r.Keyword == "IFCSTRUCTURALRESULTGROUP"))
+                {
+                    var index = bySituation.FindIndex(s => s.Group.Id == group.Id);
+                    if (index < 0)
+                    {
+                        index = bySituation.Count;
+                        bySituation.Add((group, []));
+                    }
+
+                    bySituation[index].Parts.Add(new Part(line, reaction, reactions.Read(reaction, line)));
+                }
+            }
+
+        foreach (var (group, parts) in bySituation.OrderBy(s => s.Group.Span.Offset)) forces.Add(Join(member, situations.Read(group), parts));
+    }
+
+    /// <summary>Joins the samples of all analytical members of a candidate, turned into its axes and shifted along it.</summary>
+    private static MemberForces Join(Member member, Situation situation, List<Part> parts)
+    {
+        var source = string.Join(", ", parts.Select(p => string.Create(CultureInfo.InvariantCulture, $"{p.Reaction.Keyword} #{p.Reaction.Id} on #{p.Line.Id}")));
+        MemberForces Unusable(Reason why) => new() { MemberKey = member.Key, Situation = situation, Stations = [], Source = source, Unusable = why };
+        if (parts.Find(p => p.Samples.Unusable is not null) is { Samples.Unusable: { } bad }) return Unusable(bad);
+
+        var isOwnLine = member.Element.StepId == parts[0].Line.Id;
+        if (isOwnLine)
+        {
+            var stations = parts.SelectMany(p => p.Samples.Stations).ToImmutableArray();
+            return new MemberForces { MemberKey = member.Key, Situation = situation, Stations = stations, Source = source, Conversion = parts[0].Samples.Conversion };
+        }
+
+        if (!member.IsStraight) return Unusable(new Reason(ReasonCode.AxesUnknown, "the member is bent; forces of a straight analytical member cannot be laid along it"));
+        if (!member.Axes.TryGet(out var own, out var noAxes)) return Unusable(noAxes);
+        if (!member.Length.TryGet(out var length, out var noLength)) return Unusable(noLength);
+
+        var joined = new List<ForceStation>();
+        var words = new List<string>();
+        var (from, to) = (double.PositiveInfinity, double.NegativeInfinity);
+
+        // From start to end, so that at a shared node the left value stands before the right one.
+        foreach (var part in parts.OrderBy(p => p.Line.Line is Finding<(Vector3 Start, Vector3 End)>.Found f ? Along(own.Value, f.Value.Start) + Along(own.Value, f.Value.End) : 0))
+        {
+            if (!part.Line.Line.TryGet(out var line, out var noLine)) return Unusable(noLine);
+            if (!LineAxes(part.Line, member, out var lineAxes, out var noLineAxes)) return Unusable(noLineAxes!);
+            if (lineAxes.X.Cross(own.Value.X).Length > ParallelTolerance)
+                return Unusable(new Reason(ReasonCode.AxesUnknown, $"the analytical member #{part.Line.Id} does not run along the member"));
+
+            var reversed = lineAxes.X.Dot(own.Value.X) < 0;
+            var (a, b) = (Along(own.Value, line.Value.Start), Along(own.Value, line.Value.End));
+            (from, to) = (Math.Min(from, Math.Min(a, b)), Math.Max(to, Math.Max(a, b)));
+            var stations = part.Samples.Stations.Select(s => new ForceStation(a + (reversed ? -s.X : s.X), Turned(s.Forces, lineAxes, own.Value, reversed))).ToList();
+            if (reversed) stations.Reverse();
+            joined.AddRange(stations);
+            words.Add(Words(part, lineAxes, own.Value, reversed, a));
+        }
+
+        // The body may stick out a little beyond its analytical line; farther than that its ends are not covered.
+        var slack = Math.Max(StickOut * length.Value, member.Section is Finding<SectionFinding>.Found section ? Largest(section.Value.Shape) : 0);
+        return new MemberForces
+        {
+            MemberKey = member.Key,
+            Situation = situation,
+            Stations = [.. joined.OrderBy(s => s.X)],
+            Source = source,
+            Conversion = string.Join("; ", words.Distinct(StringComparer.Ordinal)),
+            From = from > slack ? 0 : from,
+            To = to < length.Value - slack ? length.Value : to,
+        };
+    }
+
+    /// <summary>Axes of the analytical member; where its Axis is missing and the section has no preferred axes, any axes along it do.</summary>
+    private static bool LineAxes(AnalyticalMember line, Member member, out MemberAxes axes, out Reason? why)
+    {
+        if (line.Axes.TryGet(out var found, out why))
+        {
+            axes = found.Value;
+            return true;
+        }
+
+        axes = null!;
+        var isIsotropic = member.Section is Finding<SectionFinding>.Found { Value.Shape: Round or Tube };
+        if (!isIsotropic || line.Line is not Finding<(Vector3 Start, Vector3 End)>.Found ends || member.Axes is not Finding<MemberAxes>.Found own) return false;
+
+        axes = MemberAxes.From(ends.Value.Start, ends.Value.End - ends.Value.Start, own.Value.Z)!;
+        return axes is not null;
+    }
+
+    private static double Along(MemberAxes axes, Vector3 point) => (point - axes.Origin).Dot(axes.X);
+
+    /// <summary>
+    /// The same section forces in other axes along the same line. Where x is reversed the cut face is the opposite one:
+    /// force and moment vectors change sign before they are taken along the new axes.
+    /// </summary>
+    private static SectionForces Turned(in SectionForces forces, MemberAxes from, MemberAxes to, bool reversed)
+    {
+        var sign = reversed ? -1 : 1;
+        var force = to.Components(sign * (forces.N * from.X + forces.Vy * from.Y + forces.Vz * from.Z));
+        var moment = to.Components(sign * (forces.T * from.X + forces.My * from.Y + forces.Mz * from.Z));
+        return new SectionForces(force.X, force.Y, force.Z, moment.X, moment.Y, moment.Z);
+    }
+
+    private static string Words(Part part, MemberAxes line, MemberAxes own, bool reversed, double start)
+    {
+        var angle = Math.Atan2(own.Z.Dot(line.Y), own.Z.Dot(line.Z)) * 180 / Math.PI;
+        var turn = Math.Abs(angle) < 0.01 ? "axes alike" : string.Create(CultureInfo.InvariantCulture, $"member z lies {angle:0.##}° from the analytical z towards its y");
+        var sense = reversed ? ", x reversed" : "";
+        return string.Create(CultureInfo.InvariantCulture, $"{part.Samples.Conversion}; analytical member #{part.Line.Id}: {turn}{sense}, starts at {Math.Round(start, 6):0.######} m of the member");
+    }
+
+    /// <summary>Reactions hung on an element itself: no axes say how its components lie.</summary>
+    private void ReportDirectActivities(Member member, ImmutableArray<MemberForces>.Builder forces)
+    {
+        if (member.Element.Class.StartsWith("IfcStructural", StringComparison.Ordinal)) return;
+
+        foreach (var id in relations.ActivitiesOn(member.Element.StepId))
+        {
+            if (!instances.File.TryFind(id, out var reaction) || reaction.Keyword is not ("IFCSTRUCTURALCURVEREACTION" or "IFCSTRUCTURALPOINTREACTION")) continue;
+
+            foreach (var group in relations.GroupsOf(id))
+                if (instances.File.TryFind(group, out var record) && record.Keyword == "IFCSTRUCTURALRESULTGROUP")
+                    forces.Add(new MemberForces
+                    {
+                        MemberKey = member.Key,
+                        Situation = situations.Read(record),
+                        Stations = [],
+                        Source = string.Create(CultureInfo.InvariantCulture, $"{reaction.Keyword} #{reaction.Id}"),
+                        Unusable = new Reason(ReasonCode.AxesUnknown, $"the reaction #{reaction.Id} hangs on the element itself; no analytical member says how its axes lie"),
+                    });
+        }
+    }
+
+    private void ReportUnassigned()
+    {
+        foreach (var keyword in new[] { "IFCSTRUCTURALCURVEREACTION" })
+            foreach (var reaction in instances.File.RecordsOf(keyword))
+                if (!relations.GroupsOf(reaction.Id).Any(g => instances.File.TryFind(g, out var r) && r.Keyword == "IFCSTRUCTURALRESULTGROUP"))
+                    diagnostics.Add("IFC-0023", Severity.Warning, "A curve reaction belongs to no result group, so its load situation is not known; it is not used.", reaction.Span);
+    }
+
+    private SourceSpan? Span(ulong id) => instances.File.TryFind(id, out var record) ? record.Span : null;
+
+    private static double Largest(CrossSection shape) => Math.Max(shape.ExtentY, shape.ExtentZ);
+}

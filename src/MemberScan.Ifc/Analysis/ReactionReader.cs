@@ -1,0 +1,214 @@
+using System.Collections.Immutable;
+using System.Globalization;
+using MemberScan.Foundation.Diagnostics;
+using MemberScan.Foundation.Geometry;
+using MemberScan.Ifc.Geometry;
+using MemberScan.Ifc.Units;
+using MemberScan.Mechanics.Forces;
+using MemberScan.Model.Rules;
+using MemberScan.Model.Verdicts;
+using MemberScan.Part21;
+
+namespace MemberScan.Ifc.Analysis;
+
+/// <summary>Samples of curve and point reactions in the analytical member's axes, positive face, SI.</summary>
+internal sealed class ReactionReader(Instances instances, PlacementReader placements, ModelUnits units, ForceRules rules, DiagnosticList diagnostics)
+{
+    /// <summary>Most samples of one reaction.</summary>
+    public const int MaxSamples = 1_000_000;
+
+    /// <summary>Samples along the analytical member, or why they cannot be used.</summary>
+    /// <param name="Stations">Distance from its start and section forces in its own axes.</param>
+    /// <param name="Conversion">How the stored values were turned, in words.</param>
+    /// <param name="Unusable">Why they cannot be used; null when they can.</param>
+    public sealed record Samples(ImmutableArray<ForceStation> Stations, string Conversion, Reason? Unusable);
+
+    /// <summary>Reads the samples of a reaction on an analytical member.</summary>
+    public Samples Read(Part21Record reaction, AnalyticalMember member)
+    {
+        if (!member.Length.TryGet(out var length, out var why)) return Unusable(why);
+        if (!instances.TryFollow(reaction[7], out var load)) return Unusable(ReasonCode.DamagedRecord, $"the reaction #{reaction.Id} has no values");
+
+        var loads = load.Keyword == "IFCSTRUCTURALLOADCONFIGURATION" ? instances.FollowAll(load[1]).Take(MaxSamples + 1).ToList() : [load];
+        if (loads.Count > MaxSamples) return Unusable(ReasonCode.ForcesIncomplete, $"the reaction #{reaction.Id} has more than {MaxSamples} samples");
+        if (loads.Exists(l => l.Keyword is not ("IFCSTRUCTURALLOADSINGLEFORCE" or "IFCSTRUCTURALLOADSINGLEFORCEWARPING")))
+            return Unusable(ReasonCode.ForcesIncomplete, $"the reaction #{reaction.Id} holds something other than section forces");
+
+        if (Places(reaction, load, loads.Count, length.Value, member, out var whyNoPlaces) is not { } places) return Unusable(whyNoPlaces!);
+
+        var stations = ImmutableArray.CreateBuilder<ForceStation>(places.Length);
+        for (var i = 0; i < places.Length; i++)
+        {
+            var values = Values(loads[Math.Min(i, loads.Count - 1)], out var whyNoValues);
+            if (values is not { } stored) return Unusable(whyNoValues!);
+            if (!InMemberAxes(reaction, member, stored, out var own, out var whyNoAxes)) return Unusable(whyNoAxes!);
+
+            stations.Add(new ForceStation(places[i], own));
+        }
+
+        return rules.Convention == ForceConvention.EndForces
+            ? FromEndForces(reaction, member, stations, length.Value)
+            : new Samples(stations.ToImmutable(), Words(reaction, member), null);
+    }
+
+    private double[]? Places(Part21Record reaction, Part21Record load, int count, double length, AnalyticalMember member, out Reason? why)
+    {
+        why = null;
+        if (reaction.Keyword == "IFCSTRUCTURALPOINTREACTION")
+        {
+            if (PlaceOf(reaction, member) is { } place) return [place];
+
+            why = new Reason(ReasonCode.StationsTooCoarse, $"the point reaction #{reaction.Id} does not say where on the member it acts");
+            return null;
+        }
+
+        var type = Instances.Literal(reaction[9]);
+        if (load.Keyword != "IFCSTRUCTURALLOADCONFIGURATION")
+        {
+            if (type == "CONST") return [0, length];
+
+            why = new Reason(ReasonCode.StationsTooCoarse, $"the reaction #{reaction.Id} of type {type} has one sample only");
+            return null;
+        }
+
+        if (type == "EQUIDISTANT" && load[2].IsEmpty)
+        {
+            if (count >= 2) return [.. Enumerable.Range(0, count).Select(i => length * i / (count - 1))];
+
+            why = new Reason(ReasonCode.StationsTooCoarse, $"the reaction #{reaction.Id} has one sample only");
+            return null;
+        }
+
+        if (units.Length is not { } metre)
+        {
+            why = new Reason(ReasonCode.UnitMissing, "the model names no length unit (LENGTHUNIT)");
+            return null;
+        }
+
+        var places = load[2].Items.Select(item => Instances.Reals(item) is { Length: 1 } place ? metre * place[0] : double.NaN).ToArray();
+        if (places.Length != count || Array.Exists(places, double.IsNaN) || count == 0)
+        {
+            why = new Reason(ReasonCode.ForcesIncomplete, $"the reaction #{reaction.Id} has {count} samples at {places.Length} locations");
+            return null;
+        }
+
+        if (Array.Exists(places, p => p > length * (1 + 1e-6) || p < -1e-6 * length))
+        {
+            why = new Reason(ReasonCode.ForcesIncomplete, string.Create(CultureInfo.InvariantCulture, $"the reaction #{reaction.Id} has a sample at {places.Max():0.####} m on an analytical member of {length:0.####} m"));
+            return null;
+        }
+
+        if (places.Max() <= metre * 1.0000001 && Math.Abs(places.Max() / metre - 1) < 1e-9 && Math.Abs(length / metre - 1) > 1e-6)
+            diagnostics.Add("IFC-0021", Severity.Warning, "Locations of a reaction run from 0 to 1 as if they were shares; they are read as lengths, as the schema says.", reaction.Span);
+        return places;
+    }
+
+    private double? PlaceOf(Part21Record reaction, AnalyticalMember member)
+    {
+        if (!instances.TryFollow(reaction[6], out var shape) || !member.Line.TryGet(out var line, out _)) return null;
+
+        foreach (var representation in instances.FollowAll(shape[2]))
+            foreach (var item in instances.FollowAll(representation[3]))
+                if (item.Keyword == "IFCVERTEXPOINT" && instances.TryFollow(item[0], out var record) && placements.Point(record) is { } point
+                    && (line.Value.End - line.Value.Start).TryNormalize(out var x))
+                    return (member.ToProject.Point(point) - line.Value.Start).Dot(x);
+        return null;
+    }
+
+    private SectionForces? Values(Part21Record load, out Reason? why)
+    {
+        why = null;
+        Span<double> six = stackalloc double[6];
+        for (var i = 0; i < 6; i++)
+        {
+            var value = load[i + 1];
+            if (value.IsEmpty)
+            {
+                if (rules.MissingComponentsAreZero) continue;
+
+                why = new Reason(ReasonCode.ForcesIncomplete, $"#{load.Id} leaves out force components, and the settings do not say that these are zero");
+                return null;
+            }
+
+            if (Instances.Real(value) is not { } real)
+            {
+                why = new Reason(ReasonCode.DamagedRecord, $"#{load.Id} holds something other than a number");
+                return null;
+            }
+
+            var (factor, unitType) = i < 3 ? (units.Force, "FORCEUNIT") : (units.Torque, "TORQUEUNIT");
+            if (real != 0 && factor is null)
+            {
+                why = new Reason(ReasonCode.UnitMissing, $"the model names no unit for {(i < 3 ? "forces" : "moments")} ({unitType}); the settings can");
+                return null;
+            }
+
+            six[i] = real == 0 ? 0 : real * factor!.Value;
+        }
+
+        var forces = new SectionForces(six[0], six[1], six[2], six[3], six[4], six[5]);
+        if (forces.IsFinite) return forces;
+
+        why = new Reason(ReasonCode.ForcesIncomplete, $"#{load.Id} holds numbers beyond any range");
+        return null;
+    }
+
+    private bool InMemberAxes(Part21Record reaction, AnalyticalMember member, SectionForces stored, out SectionForces own, out Reason? why)
+    {
+        own = stored;
+        why = null;
+        if (!IsGlobal(reaction))
+        {
+            own = Turn(member) is var turn and not 0 ? stored.Turned(-turn * Math.PI / 180) : stored;
+            return true;
+        }
+
+        if (!member.Axes.TryGet(out var axes, out why)) return false;
+
+        var force = axes.Value.Components(member.ToProject.Direction(new Vector3(stored.N, stored.Vy, stored.Vz)));
+        var moment = axes.Value.Components(member.ToProject.Direction(new Vector3(stored.T, stored.My, stored.Mz)));
+        own = new SectionForces(force.X, force.Y, force.Z, moment.X, moment.Y, moment.Z);
+        return true;
+    }
+
+    private bool IsGlobal(Part21Record reaction) => rules.Components switch
+    {
+        ForceComponents.MemberAxes => false,
+        ForceComponents.GlobalAxes => true,
+        _ => Instances.Literal(reaction[8]) != "LOCAL_COORDS",
+    };
+
+    private double Turn(AnalyticalMember member) =>
+        rules.TurnDegreesByMember.TryGetValue(member.GlobalId, out var byId) ? byId
+        : rules.TurnDegreesByMember.TryGetValue(member.Name, out var byName) ? byName
+        : rules.TurnDegrees;
+
+    /// <summary>Forces on the two ends of the member: at its start they are the opposite of those on the +x face.</summary>
+    private Samples FromEndForces(Part21Record reaction, AnalyticalMember member, ImmutableArray<ForceStation>.Builder stations, double length)
+    {
+        for (var i = 0; i < stations.Count; i++)
+        {
+            var station = stations[i];
+            var isStart = Math.Abs(station.X) <= 1e-6 * length;
+            if (!isStart && Math.Abs(station.X - length) > 1e-6 * length)
+                return Unusable(ReasonCode.ConventionUnknown, $"the reaction #{reaction.Id} has samples between the ends, which end forces cannot have");
+
+            if (isStart) stations[i] = station with { Forces = -1 * station.Forces };
+        }
+
+        return new Samples(stations.ToImmutable(), Words(reaction, member) + "; end forces: values at the start reversed", null);
+    }
+
+    private string Words(Part21Record reaction, AnalyticalMember member)
+    {
+        var flag = Instances.Literal(reaction[8]);
+        var axes = IsGlobal(reaction) ? "global axes" : "the analytical member's axes";
+        var overruled = rules.Components == ForceComponents.AsFlagged ? "" : $" by the settings (flag {flag})";
+        var turn = !IsGlobal(reaction) && Turn(member) is var degrees and not 0 ? string.Create(CultureInfo.InvariantCulture, $", which are turned by {degrees:R}° about x from its own") : "";
+        return $"components in {axes}{overruled}{turn}";
+    }
+
+    private static Samples Unusable(ReasonCode code, string message) => Unusable(new Reason(code, message));
+
+    private static Samples Unusable(Reason why) => new([], "", why);
+}

@@ -1,0 +1,82 @@
+using System.Collections.Immutable;
+using MemberScan.Foundation.Diagnostics;
+using MemberScan.Ifc.Analysis;
+using MemberScan.Ifc.Geometry;
+using MemberScan.Ifc.Materials;
+using MemberScan.Ifc.Members;
+using MemberScan.Ifc.Schema;
+using MemberScan.Ifc.Sections;
+using MemberScan.Ifc.Units;
+using MemberScan.Model.Forces;
+using MemberScan.Model.Members;
+using MemberScan.Model.Rules;
+using MemberScan.Part21;
+
+namespace MemberScan.Ifc;
+
+/// <summary>A building model: what its records mean. Reads candidates and their section forces on demand.</summary>
+public sealed class IfcModel
+{
+    private readonly Instances _instances;
+    private readonly Relations _relations;
+    private readonly PlacementReader _placements;
+    private readonly UnitReader _unitReader;
+    private readonly AnalyticalMemberReader _analytical;
+    private readonly ReadingRules _rules;
+    private readonly DiagnosticList _diagnostics;
+
+    private IfcModel(Part21File file, SchemaVersion schema, ReadingRules rules, DiagnosticList diagnostics)
+    {
+        (File, Schema, _rules, _diagnostics) = (file, schema, rules, diagnostics);
+        _instances = new Instances(file);
+        _unitReader = new UnitReader(_instances, diagnostics);
+        Units = ModelUnits.Read(_instances, _unitReader, rules, diagnostics);
+        _relations = new Relations(_instances);
+        _placements = new PlacementReader(_instances, Units);
+        _analytical = new AnalyticalMemberReader(_instances, _relations, _placements, Units, schema, diagnostics);
+    }
+
+    /// <summary>The text that the model is read from.</summary>
+    public Part21File File { get; }
+
+    /// <summary>The schema it is read by.</summary>
+    public SchemaVersion Schema { get; }
+
+    /// <summary>Identifier of the schema it is read by.</summary>
+    public string SchemaText => SchemaName.Text(Schema);
+
+    /// <summary>Its units.</summary>
+    public ModelUnits Units { get; }
+
+    /// <summary>Name of its project; empty if none.</summary>
+    public string ProjectName => File.RecordsOf("IFCPROJECT").Select(p => Instances.Text(p[2])).FirstOrDefault() ?? "";
+
+    /// <summary>Opens a model; null, with an error in <paramref name="diagnostics"/>, when its schema is not read.</summary>
+    public static IfcModel? Open(Part21File file, ReadingRules rules, DiagnosticList diagnostics)
+    {
+        ArgumentNullException.ThrowIfNull(file);
+        ArgumentNullException.ThrowIfNull(rules);
+        ArgumentNullException.ThrowIfNull(diagnostics);
+        return SchemaName.Resolve(file.Header.Schemas, diagnostics) is { } schema ? new IfcModel(file, schema, rules, diagnostics) : null;
+    }
+
+    /// <summary>Reads all candidates.</summary>
+    /// <param name="isNamed">Whether a table names the element; that makes elements of some classes candidates.</param>
+    public MemberCatalog ReadMembers(Func<ElementIdentity, bool> isNamed)
+    {
+        var profiles = new ProfileReader(_placements, Units);
+        var directrices = new DirectrixReader(_instances, _placements, Units);
+        var bodies = new BodyReader(_instances, _placements, profiles, directrices, Units);
+        var facts = new MaterialFactsReader(_instances, Units, _unitReader);
+        var materials = new MaterialReader(_instances, _relations, facts, profiles, _rules);
+        return new MemberReader(_instances, _relations, _placements, bodies, profiles, materials, _analytical, Schema, _rules.Candidates, _diagnostics).Read(isNamed);
+    }
+
+    /// <summary>Reads the section forces of candidates from the model's result groups.</summary>
+    public ImmutableArray<MemberForces> ReadForces(ImmutableArray<Member> members)
+    {
+        var reactions = new ReactionReader(_instances, _placements, Units, _rules.Forces, _diagnostics);
+        var situations = new SituationReader(_instances, _rules.Forces);
+        return new ModelForcesReader(_instances, _relations, _analytical, reactions, situations, _diagnostics).Read(members);
+    }
+}

@@ -1,0 +1,197 @@
+using System.Collections.Immutable;
+using System.Globalization;
+using System.Text.RegularExpressions;
+using MemberScan.Ifc.Sections;
+using MemberScan.Mechanics.Sections;
+using MemberScan.Model;
+using MemberScan.Model.Members;
+using MemberScan.Model.Rules;
+using MemberScan.Model.Verdicts;
+using MemberScan.Part21;
+
+namespace MemberScan.Ifc.Materials;
+
+/// <summary>Material and section that an object's material association gives, and the material's values with their sources.</summary>
+/// <remarks>Order: the occurrence's own association, then its type's; values from property entities, then from a grade by name. Nothing is defaulted but ν, marked so.</remarks>
+internal sealed class MaterialReader(
+    Instances instances, Relations relations, MaterialFactsReader facts, ProfileReader profiles, ReadingRules rules)
+{
+    /// <summary>Yield strengths outside this range [Pa] cannot be meant.</summary>
+    private const double LeastYield = 20e6, LargestYield = 2500e6;
+
+    /// <summary>Moduli outside this range [Pa] cannot be meant.</summary>
+    private const double LeastModulus = 0.5e9, LargestModulus = 1000e9;
+
+    private static readonly string[] s_notCovered =
+        ["concrete", "beton", "hormig", "wood", "timber", "holz", "madera", "bois", "glass", "glas", "masonry", "mauerwerk", "brick", "gypsum", "plaster"];
+
+    private readonly Dictionary<string, Grade?> _gradeOf = new(StringComparer.Ordinal);
+
+    /// <summary>Profiles that the association of an object (or its type) names; empty if none.</summary>
+    public ImmutableArray<Finding<ProfileShape>> ProfilesOf(ulong id)
+    {
+        foreach (var definition in Associated(id))
+        {
+            var found = Profiles(definition, []).ToImmutableArray();
+            if (!found.IsEmpty) return found;
+        }
+
+        return [];
+    }
+
+    /// <summary>Whether the association names a profile set that tapers to another.</summary>
+    public bool IsTapering(ulong id) => Associated(id).Any(d => d.Keyword == "IFCMATERIALPROFILESETUSAGETAPERING");
+
+    /// <summary>The material of an object and its values.</summary>
+    /// <param name="id">STEP id of the object.</param>
+    /// <param name="section">Its section, for the thickness ranges of grades; null if none.</param>
+    public Material Read(ulong id, SectionFinding? section)
+    {
+        var materials = Associated(id).Select(d => Materials(d, []).ToList()).FirstOrDefault(list => list.Count > 0) ?? [];
+        var read = materials.Select(facts.Read).ToList();
+        var names = read.Select(m => m.Name).Distinct(StringComparer.Ordinal).ToList();
+        if (names.Count == 0) return Unknown("", "no material is associated with the member or its type");
+        if (names.Count > 1) return Unknown(string.Join(" + ", names), $"several materials are associated: {string.Join(", ", names)}");
+
+        return With(read[0], section);
+    }
+
+    private Material With(MaterialFacts material, SectionFinding? section)
+    {
+        var grade = GradeOf(material.Name) ?? GradeOf(material.Category);
+        var isSteel = grade?.IsSteel ?? (material.IsSteelByProperties
+            || material.Category.Contains("steel", StringComparison.OrdinalIgnoreCase) || material.Modulus is { Value: > 170e9 and < 230e9 });
+        return new Material(material.Name, Yield(material, grade, section), Modulus(material, grade), Poisson(material, grade), isSteel);
+    }
+
+    private static Finding<double> Yield(MaterialFacts material, Grade? grade, SectionFinding? section)
+    {
+        if (IsNotCovered(material)) return Missing(ReasonCode.MaterialNotCovered, $"material '{material.Name}' is outside the scope of the limits");
+
+        Finding<double>? byProperty = material.Yield switch
+        {
+            null => null,
+            { Value: null } p => Missing(ReasonCode.UnitMissing, $"{p.Source} {p.Fault}"),
+            { Value: < LeastYield or > LargestYield } p => Missing(ReasonCode.StrengthImplausible, string.Create(CultureInfo.InvariantCulture, $"{p.Source} is {p.Value.Value / 1e6:0.####} MPa; outside {LeastYield / 1e6:0} to {LargestYield / 1e6:0} MPa it is taken for a slip of the unit")),
+            var p => new Finding<double>.Found(p.Value.Value, p.Source),
+        };
+        if (byProperty is Finding<double>.Missing) return byProperty;
+
+        Finding<double>? byGrade = grade is null ? null : YieldOf(grade, section);
+        return (byProperty, byGrade) switch
+        {
+            (Finding<double>.Found p, Finding<double>.Found g) when g.Value < p.Value * (1 - 1e-6) => g with
+            {
+                Source = string.Create(CultureInfo.InvariantCulture, $"{g.Source}; the smaller of two, {p.Source} says {p.Value / 1e6:0.####} MPa"),
+            },
+            (Finding<double>.Found p, _) => p,
+            (_, not null) => byGrade,
+            _ => Missing(ReasonCode.NoStrength, $"material '{material.Name}' has no yield strength in its properties and is no known grade"),
+        };
+    }
+
+    private static Finding<double> YieldOf(Grade grade, SectionFinding? section)
+    {
+        var thickness = section is null ? 0 : section.Shapes.Max(Thickness);
+        foreach (var range in grade.Yields)
+            if (thickness <= range.UpTo * (1 + 1e-9))
+                return new Finding<double>.Found(range.Yield, string.Create(CultureInfo.InvariantCulture, $"by name: grade {grade.Name} of {grade.Standard}, thickness {thickness * 1e3:0.###} mm{(grade.FromMemory ? " (from memory)" : "")}"));
+        return Missing(ReasonCode.NoStrength, string.Create(CultureInfo.InvariantCulture, $"grade {grade.Name} of {grade.Standard} gives no strength for a thickness of {thickness * 1e3:0.###} mm"));
+    }
+
+    private static double Thickness(CrossSection shape) => shape switch
+    {
+        Tube tube => tube.Wall,
+        Box box => box.Wall,
+        _ => Math.Min(shape.ExtentY, shape.ExtentZ),
+    };
+
+    private static Finding<double> Modulus(MaterialFacts material, Grade? grade)
+    {
+        if (material.Modulus is { Value: >= LeastModulus and <= LargestModulus } found) return new Finding<double>.Found(found.Value.Value, found.Source);
+
+        var why = material.Modulus switch
+        {
+            null => $"material '{material.Name}' has no modulus of elasticity in its properties",
+            { Value: { } value } p => string.Create(CultureInfo.InvariantCulture, $"{p.Source} is {value / 1e6:0.####} MPa, which is taken for a slip of the unit"),
+            var p => $"{p.Source} {p.Fault}",
+        };
+        return grade is not null
+            ? new Finding<double>.Found(grade.Modulus, $"by name: grade {grade.Name} of {grade.Standard}{(grade.FromMemory ? " (from memory)" : "")}{(material.Modulus is null ? "" : "; " + why)}")
+            : Missing(ReasonCode.StabilityNotChecked, why + " and is no known grade");
+    }
+
+    private Finding<double> Poisson(MaterialFacts material, Grade? grade)
+    {
+        if (material.Poisson is { Value: >= 0 and < 0.5 } found) return new Finding<double>.Found(found.Value.Value, found.Source);
+        if (grade is not null) return new Finding<double>.Found(grade.Poisson, $"by name: grade {grade.Name}");
+
+        return DefaultPoisson();
+    }
+
+    private Material Unknown(string name, string why) => new(
+        name, Missing(ReasonCode.NoStrength, why), Missing(ReasonCode.StabilityNotChecked, why), DefaultPoisson(), IsSteel: false);
+
+    private Finding<double>.Found DefaultPoisson() => new(rules.DefaultPoisson, "default");
+
+    private static bool IsNotCovered(MaterialFacts material) => material.IsConcreteByProperties
+        || Array.Exists(s_notCovered, word => material.Name.Contains(word, StringComparison.OrdinalIgnoreCase) || material.Category.Contains(word, StringComparison.OrdinalIgnoreCase));
+
+    private Grade? GradeOf(string name)
+    {
+        if (name.Length is 0 or > 200) return null;
+        if (_gradeOf.TryGetValue(name, out var known)) return known;
+
+        return _gradeOf[name] = rules.Grades.FirstOrDefault(grade =>
+            Regex.IsMatch(name, $"^(?:{grade.Pattern})$", RegexOptions.IgnoreCase | RegexOptions.CultureInvariant, TimeSpan.FromMilliseconds(100)));
+    }
+
+    /// <summary>Material definitions of the occurrence, then of its type.</summary>
+    private IEnumerable<Part21Record> Associated(ulong id)
+    {
+        foreach (var material in relations.MaterialsOf(id))
+            if (instances.File.TryFind(material, out var record))
+                yield return record;
+
+        if (relations.TypeOf(id) is var type and not 0)
+            foreach (var material in relations.MaterialsOf(type))
+                if (instances.File.TryFind(material, out var record))
+                    yield return record;
+    }
+
+    private IEnumerable<Finding<ProfileShape>> Profiles(Part21Record definition, HashSet<ulong> visited)
+    {
+        if (!visited.Add(definition.Id)) return [];
+
+        switch (definition.Keyword)
+        {
+            case "IFCMATERIALPROFILESETUSAGE" or "IFCMATERIALPROFILESETUSAGETAPERING":
+                return instances.TryFollow(definition[0], out var set) ? Profiles(set, visited) : [];
+            case "IFCMATERIALPROFILESET":
+                return instances.FollowAll(definition[2]).SelectMany(part => Profiles(part, visited));
+            case "IFCMATERIALPROFILE" or "IFCMATERIALPROFILEWITHOFFSETS":
+                return instances.TryFollow(definition[3], out var profile) ? [profiles.Read(profile)] : [];
+            default:
+                return [];
+        }
+    }
+
+    private IEnumerable<Part21Record> Materials(Part21Record definition, HashSet<ulong> visited)
+    {
+        IEnumerable<Part21Record> From(Part21Value list) => instances.FollowAll(list).SelectMany(part => Materials(part, visited));
+        if (!visited.Add(definition.Id)) return [];
+
+        return definition.Keyword switch
+        {
+            "IFCMATERIAL" => [definition],
+            "IFCMATERIALLIST" => From(definition[0]),
+            "IFCMATERIALPROFILESETUSAGE" or "IFCMATERIALPROFILESETUSAGETAPERING" => From(definition[0]),
+            "IFCMATERIALPROFILESET" or "IFCMATERIALCONSTITUENTSET" => From(definition[2]),
+            "IFCMATERIALPROFILE" or "IFCMATERIALPROFILEWITHOFFSETS" or "IFCMATERIALCONSTITUENT" => From(definition[2]),
+            "IFCMATERIALLAYERSETUSAGE" or "IFCMATERIALLAYERSET" or "IFCMATERIALLAYER" => From(definition[0]),
+            _ => [],
+        };
+    }
+
+    private static Finding<double> Missing(ReasonCode code, string message) => new Finding<double>.Missing(new Reason(code, message));
+}

@@ -1,0 +1,7 @@
+namespace MemberScan.Ifc.Materials;
+
+/// <summary>A number of a property in SI, or why its unit is not known.</summary>
+/// <param name="Value">Value in SI; null when its unit is missing or it is no number.</param>
+/// <param name="Source">Property, set and STEP id, in words.</param>
+/// <param name="Fault">What is missing; empty when nothing is.</param>
+internal sealed record PropertyValue(double? Value, string Source, string Fault);

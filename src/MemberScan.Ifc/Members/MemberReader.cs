@@ -1,0 +1,308 @@
+using System.Collections.Immutable;
+using System.Globalization;
+using MemberScan.Foundation.Diagnostics;
+using MemberScan.Foundation.Geometry;
+using MemberScan.Ifc.Analysis;
+using MemberScan.Ifc.Geometry;
+using MemberScan.Ifc.Materials;
+using MemberScan.Ifc.Schema;
+using MemberScan.Ifc.Sections;
+using MemberScan.Mechanics.Sections;
+using MemberScan.Model;
+using MemberScan.Model.Members;
+using MemberScan.Model.Rules;
+using MemberScan.Model.Verdicts;
+using MemberScan.Part21;
+
+namespace MemberScan.Ifc.Members;
+
+/// <summary>Finds the candidates of a model and reads each: section, length, axes, material, or the reason why not.</summary>
+internal sealed class MemberReader(
+    Instances instances, Relations relations, PlacementReader placements, BodyReader bodies, ProfileReader profiles, MaterialReader materials,
+    AnalyticalMemberReader analytical, SchemaVersion schema, CandidateRules rules, DiagnosticList diagnostics)
+{
+    private const string NoBar = "no bar-like body of a covered section, and no forces";
+
+    private readonly HashSet<string> _keys = new(StringComparer.Ordinal);
+    private readonly Dictionary<(string Class, string Why), int> _passedOver = [];
+
+    /// <summary>Reads all candidates in the order of the file.</summary>
+    /// <param name="isNamed">Whether a table names the element, which makes it a candidate.</param>
+    public MemberCatalog Read(Func<ElementIdentity, bool> isNamed)
+    {
+        var always = rules.Always.SelectMany(ClassNames.KeywordsOf).ToHashSet(StringComparer.Ordinal);
+        var conditional = rules.WithBarBodyOrForces.SelectMany(ClassNames.KeywordsOf).ToHashSet(StringComparer.Ordinal);
+        if (always.Contains("IFCSTRUCTURALCURVEMEMBER")) always.Add("IFCSTRUCTURALCURVEMEMBERVARYING");
+
+        var members = ImmutableArray.CreateBuilder<Member>();
+        foreach (var record in instances.File.Records)
+        {
+            var isPartOfRailing = relations.WholeOf(record.Id) is var whole and not 0
+                && instances.File.TryFind(whole, out var parent) && parent.Keyword == "IFCRAILING";
+            var isAlways = always.Contains(record.Keyword) || isPartOfRailing;
+            if (!isAlways && !conditional.Contains(record.Keyword)) continue;
+
+            if (record.Keyword is "IFCSTRUCTURALCURVEMEMBER" or "IFCSTRUCTURALCURVEMEMBERVARYING")
+                AddAnalytical(record, members, always);
+            else
+                AddPhysical(record, isAlways, isNamed, members);
+        }
+
+        var passed = _passedOver.OrderBy(p => p.Key.Class, StringComparer.Ordinal).ThenBy(p => p.Key.Why, StringComparer.Ordinal)
+            .Select(p => new ClassCount(p.Key.Class, p.Value, p.Key.Why));
+        return new MemberCatalog(members.ToImmutable(), [.. passed]);
+    }
+
+    private void AddPhysical(Part21Record record, bool isAlways, Func<ElementIdentity, bool> isNamed, ImmutableArray<Member>.Builder members)
+    {
+        var element = Identity(record);
+        if (record.Keyword == "IFCRAILING" && record[6].IsEmpty && relations.PartsOf(record.Id).Count > 0)
+        {
+            PassOver(element.Class, "its parts are the candidates");
+            return;
+        }
+
+        var placed = placements.Placement(record[5]);
+        var toProject = placed is Finding<Transform3>.Found found ? found.Value : Transform3.Identity;
+        var read = record.IsDamaged ? [] : bodies.Read(record[6], toProject);
+        var bars = read.OfType<Finding<BarBody>.Found>().ToList();
+        var isCandidate = isAlways || bars.Exists(b => b.Value.IsBarLike)
+            || relations.AnalyticalOf(record.Id).Count > 0 || relations.ActivitiesOn(record.Id).Count > 0 || isNamed(element);
+        if (!isCandidate)
+        {
+            PassOver(element.Class, NoBar);
+            return;
+        }
+
+        var key = KeyOf(element, record);
+        if (bars.Count >= 2)
+        {
+            for (var i = 0; i < bars.Count; i++)
+                members.Add(FromBar(record, element, $"{key}/{(i + 1).ToString(CultureInfo.InvariantCulture)}", i + 1, bars.Count, bars[i], read, placed));
+        }
+        else if (bars.Count == 1)
+        {
+            members.Add(WithProfileSet(record, FromBar(record, element, key, 0, 1, bars[0], read, placed)));
+        }
+        else
+        {
+            members.Add(WithoutBar(record, element, key, read));
+        }
+    }
+
+    private Member FromBar(
+        Part21Record record, ElementIdentity element, string key, int number, int count, Finding<BarBody>.Found bar,
+        ImmutableArray<Finding<BarBody>> read, Finding<Transform3> placed)
+    {
+        var body = bar.Value;
+        var section = body.Profile.Section;
+        var notes = body.Notes;
+        var others = read.OfType<Finding<BarBody>.Missing>().ToList();
+        if (others.Count > 0)
+            notes = notes.Add(string.Create(CultureInfo.InvariantCulture, $"the element has {others.Count} further bodies that are no bars and are not checked ({others[0].Why.Message})"));
+
+        return new Member
+        {
+            Key = key,
+            Element = element,
+            ItemNumber = number,
+            ItemCount = count,
+            Role = RoleGuess.Of(element),
+            Section = new Finding<SectionFinding>.Found(section, body.Source),
+            Length = new Finding<double>.Found(body.Length, body.LengthSource),
+            Axes = placed.TryGet(out var map, out var why)
+                ? new Finding<MemberAxes>.Found(InProject(body.Axes, map.Value, ref notes), "body")
+                : new Finding<MemberAxes>.Missing(why),
+            Material = materials.Read(record.Id, section),
+            BendRadii = body.BendRadii,
+            IsStraight = body.IsStraight,
+            Notes = notes,
+        };
+    }
+
+    /// <summary>Maps axes to project coordinates; a placement that mirrors would make them left-handed, so y is turned round then.</summary>
+    private static MemberAxes InProject(MemberAxes axes, Transform3 toProject, ref ImmutableArray<string> notes)
+    {
+        var (x, z) = (toProject.Direction(axes.X), toProject.Direction(axes.Z));
+        if (toProject.Determinant < 0) notes = notes.Add("y is reversed: the placement mirrors");
+        return new MemberAxes(toProject.Point(axes.Origin), x, z.Cross(x), z);
+    }
+
+    /// <summary>Adds the section of the material profile set where it differs from the body's: the less favourable decides.</summary>
+    private Member WithProfileSet(Part21Record record, Member member)
+    {
+        var sets = materials.ProfilesOf(record.Id);
+        if (sets.IsEmpty || member.Section is not Finding<SectionFinding>.Found body) return member;
+        if (sets.Length > 1) return member with { Notes = member.Notes.Add("the material profile set has several profiles; the body's section is used") };
+        if (sets[0] is not Finding<ProfileShape>.Found set)
+            return member with { Notes = member.Notes.Add($"the profile of the material profile set is not read ({((Finding<ProfileShape>.Missing)sets[0]).Why.Message}); the body's section is used") };
+
+        var own = body.Value.Shapes;
+        var different = set.Value.Section.Shapes.Where(s => !own.Any(o => Alike(s, o))).ToImmutableArray();
+        if (different.IsEmpty) return member with { Section = body with { Source = $"{body.Source}; material profile set agrees" } };
+
+        var note = $"body and material profile set differ ({own[0].Designation} against {different[0].Designation}); the less favourable decides";
+        var both = body.Value with { Shapes = own.AddRange(different), Notes = body.Value.Notes.Add(note) };
+        return member with
+        {
+            Section = new Finding<SectionFinding>.Found(both, $"{body.Source}; material profile set, {set.Source}"),
+            Material = materials.Read(record.Id, both),
+            Notes = member.Notes.Add(note),
+        };
+    }
+
+    private static bool Alike(CrossSection a, CrossSection b)
+    {
+        static bool Near(double p, double q) => Math.Abs(p - q) <= 1e-4 * Math.Max(Math.Abs(p), Math.Abs(q)) + 1e-9;
+        return (a, b) switch
+        {
+            (Round p, Round q) => Near(p.Radius, q.Radius),
+            (Tube p, Tube q) => Near(p.OuterRadius, q.OuterRadius) && Near(p.Wall, q.Wall),
+            (Rectangle p, Rectangle q) => Near(p.Width, q.Width) && Near(p.Depth, q.Depth),
+            (RoundedRectangle p, RoundedRectangle q) => Near(p.Width, q.Width) && Near(p.Depth, q.Depth) && Near(p.CornerRadius, q.CornerRadius),
+            (Box p, Box q) => Near(p.Width, q.Width) && Near(p.Depth, q.Depth) && Near(p.Wall, q.Wall) && Near(p.OuterRadius, q.OuterRadius) && Near(p.InnerRadius, q.InnerRadius),
+            _ => false,
+        };
+    }
+
+    private Member WithoutBar(Part21Record record, ElementIdentity element, string key, ImmutableArray<Finding<BarBody>> read)
+    {
+        var notes = ImmutableArray<string>.Empty;
+        var section = record.IsDamaged
+            ? new Finding<SectionFinding>.Missing(new Reason(ReasonCode.DamagedRecord, $"the record of the element #{record.Id} is damaged"))
+            : SectionOfSet(record, read, ref notes);
+        var lines = relations.AnalyticalOf(record.Id).Select(analytical.Read).OfType<AnalyticalMember>().ToList();
+        return new Member
+        {
+            Key = key,
+            Element = element,
+            ItemNumber = 0,
+            ItemCount = 1,
+            Role = RoleGuess.Of(element),
+            Section = section,
+            Length = lines.Count == 1 ? lines[0].Length : NoLength("the member has no swept body that gives its length"),
+            Axes = lines.Count == 1 ? lines[0].Axes : NoAxes("the member has no swept body that gives its axes"),
+            Material = materials.Read(record.Id, (section as Finding<SectionFinding>.Found)?.Value),
+            Notes = notes,
+        };
+    }
+
+    private Finding<SectionFinding> SectionOfSet(Part21Record record, ImmutableArray<Finding<BarBody>> read, ref ImmutableArray<string> notes)
+    {
+        var sets = materials.ProfilesOf(record.Id);
+        if (materials.IsTapering(record.Id)) return NoSection(ReasonCode.SectionNotCovered, "the material profile set tapers to another");
+        if (sets.Length > 1) return NoSection(ReasonCode.SectionNotCovered, "the material profile set has several profiles");
+        if (sets.Length == 1)
+        {
+            if (!sets[0].TryGet(out var set, out var whyNoSet)) return new Finding<SectionFinding>.Missing(whyNoSet);
+
+            if (!read.IsEmpty) notes = notes.Add($"the body gives no section ({((Finding<BarBody>.Missing)read[0]).Why.Message}); the material profile set does");
+            notes = notes.AddRange(set.Value.Section.Notes);
+            return new Finding<SectionFinding>.Found(set.Value.Section, $"material profile set, {set.Source}");
+        }
+
+        return read.IsEmpty
+            ? NoSection(ReasonCode.NoSection, $"{element(record)} has no body and no material profile set")
+            : new Finding<SectionFinding>.Missing(((Finding<BarBody>.Missing)read[0]).Why);
+
+        static string element(Part21Record record) => $"{ClassNames.Spell(record.Keyword)} #{record.Id}";
+    }
+
+    private void AddAnalytical(Part21Record record, ImmutableArray<Member>.Builder members, HashSet<string> always)
+    {
+        var isRepresented = relations.PhysicalOf(record.Id).Any(id =>
+            instances.File.TryFind(id, out var physical) && (always.Contains(physical.Keyword) || IsConditional(physical.Keyword)));
+        if (isRepresented)
+        {
+            PassOver(ClassNames.Spell(record.Keyword), "its physical element is the candidate");
+            return;
+        }
+
+        if (record.Keyword == "IFCSTRUCTURALCURVEMEMBERVARYING" && relations.PartsOf(record.Id).Count > 0)
+        {
+            PassOver(ClassNames.Spell(record.Keyword), "its parts are the candidates");
+            return;
+        }
+
+        var element = Identity(record);
+        var line = analytical.Read(record.Id)!;
+        var notes = ImmutableArray<string>.Empty;
+        var section = record.IsDamaged
+            ? NoSection(ReasonCode.DamagedRecord, $"the record of the analytical member #{record.Id} is damaged")
+            : record.Keyword == "IFCSTRUCTURALCURVEMEMBERVARYING" ? NoSection(ReasonCode.SectionNotCovered, "the analytical member varies along its length")
+            : AnalyticalSection(record, ref notes);
+        members.Add(new Member
+        {
+            Key = KeyOf(element, record),
+            Element = element,
+            ItemNumber = 0,
+            ItemCount = 1,
+            Role = RoleGuess.Of(element),
+            Section = section,
+            Length = line.Length,
+            Axes = line.Axes,
+            Material = materials.Read(record.Id, (section as Finding<SectionFinding>.Found)?.Value),
+            Notes = notes,
+        });
+    }
+
+    private bool IsConditional(string keyword) => rules.WithBarBodyOrForces.SelectMany(ClassNames.KeywordsOf).Contains(keyword, StringComparer.Ordinal);
+
+    private Finding<SectionFinding> AnalyticalSection(Part21Record record, ref ImmutableArray<string> notes)
+    {
+        foreach (var (properties, _) in relations.ProfilePropertiesOf(record.Id))
+        {
+            if (!instances.File.TryFind(properties, out var p) || !instances.TryFollow(p[1], out var profile)) continue;
+            if (!profiles.Read(profile).TryGet(out var found, out var why)) return new Finding<SectionFinding>.Missing(why);
+
+            notes = notes.AddRange(found.Value.Section.Notes);
+            return new Finding<SectionFinding>.Found(found.Value.Section, $"profile properties #{properties}, {found.Source}");
+        }
+
+        return SectionOfSet(record, [], ref notes);
+    }
+
+    private ElementIdentity Identity(Part21Record record)
+    {
+        var type = relations.TypeOf(record.Id) is var id and not 0 && instances.File.TryFind(id, out var found) ? found : default;
+        var predefined = PredefinedTypeIndex(record.Keyword) is var index and > 0 ? Instances.Literal(record[index]) : "";
+        if (predefined is "" or "NOTDEFINED" && type.Id != 0) predefined = Instances.Literal(type[9]);
+
+        var container = relations.ContainerOf(record.Id) is var c and not 0 && instances.File.TryFind(c, out var storey) ? Instances.Text(storey[2]) : "";
+        var tag = record.Keyword.StartsWith("IFCSTRUCTURAL", StringComparison.Ordinal) ? "" : Instances.Text(record[7]);
+        return new ElementIdentity(
+            record.Id, Instances.Text(record[0]), ClassNames.Spell(record.Keyword), predefined is "NOTDEFINED" ? "" : predefined,
+            Instances.Text(record[2]), tag, type.Id != 0 ? Instances.Text(type[2]) : "", container);
+    }
+
+    private int PredefinedTypeIndex(string keyword) => keyword switch
+    {
+        "IFCRAILING" => 8,
+        "IFCREINFORCINGBAR" => 12,
+        "IFCTENDON" => 9,
+        "IFCMECHANICALFASTENER" => 10,
+        "IFCBEAM" or "IFCBEAMSTANDARDCASE" or "IFCCOLUMN" or "IFCCOLUMNSTANDARDCASE" or "IFCMEMBER" or "IFCMEMBERSTANDARDCASE"
+            or "IFCBUILDINGELEMENTPROXY" or "IFCDISCRETEACCESSORY" or "IFCPIPESEGMENT" or "IFCCABLESEGMENT" or "IFCPLATE" => schema == SchemaVersion.Ifc2x3 ? 0 : 8,
+        _ => 0,
+    };
+
+    private string KeyOf(ElementIdentity element, Part21Record record)
+    {
+        var key = element.GlobalId.Length > 0 ? element.GlobalId : string.Create(CultureInfo.InvariantCulture, $"#{record.Id}");
+        if (_keys.Add(key)) return key;
+
+        diagnostics.Add("IFC-0010", Severity.Warning, "Two elements have the same GlobalId; the later one is keyed by GlobalId and STEP id.", record.Span);
+        key = string.Create(CultureInfo.InvariantCulture, $"{key}#{record.Id}");
+        _keys.Add(key);
+        return key;
+    }
+
+    private void PassOver(string className, string why) =>
+        _passedOver[(className, why)] = _passedOver.GetValueOrDefault((className, why)) + 1;
+
+    private static Finding<SectionFinding> NoSection(ReasonCode code, string message) => new Finding<SectionFinding>.Missing(new Reason(code, message));
+
+    private static Finding<double> NoLength(string message) => new Finding<double>.Missing(new Reason(ReasonCode.LengthAmbiguous, message));
+
+    private static Finding<MemberAxes> NoAxes(string message) => new Finding<MemberAxes>.Missing(new Reason(ReasonCode.AxesUnknown, message));
+}

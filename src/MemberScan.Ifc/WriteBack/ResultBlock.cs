@@ -1,0 +1,73 @@
+using System.Buffers;
+using System.Globalization;
+using System.Security.Cryptography;
+using System.Text;
+
+namespace MemberScan.Ifc.WriteBack;
+
+/// <summary>The block of instances that this program appends to a model, between two comments just before the last <c>ENDSEC</c>.</summary>
+public static class ResultBlock
+{
+    private const string Begin = "/* MemberScan block 1 sha256=";
+    private const string End = "/* MemberScan block end */";
+    private const int HashLength = 64;
+
+    /// <summary>What stripping found.</summary>
+    /// <param name="Base">The text without a block of ours; the text itself when it has none.</param>
+    /// <param name="HadBlock">Whether there was a block.</param>
+    /// <param name="IsIntact">Whether the text without it still has the hash that the block names.</param>
+    public readonly record struct Stripped(ReadOnlyMemory<byte> Base, bool HadBlock, bool IsIntact);
+
+    /// <summary>Takes a block of ours out of a text.</summary>
+    public static Stripped Strip(ReadOnlyMemory<byte> text)
+    {
+        var bytes = text.Span;
+        var begin = bytes.LastIndexOf(Encoding.ASCII.GetBytes(Begin));
+        if (begin < 0) return new Stripped(text, false, true);
+
+        var endMark = Encoding.ASCII.GetBytes(End);
+        var end = bytes[begin..].IndexOf(endMark);
+        if (end < 0) return new Stripped(text, false, true);
+
+        end += begin + endMark.Length;
+        if (bytes[end..].StartsWith("\r\n"u8)) end += 2;
+        else if (bytes[end..].StartsWith("\n"u8)) end += 1;
+
+        // Only where the closing ENDSEC follows is it the block; the same words in a string are content.
+        if (!bytes[end..].StartsWith("ENDSEC"u8) && !bytes[end..].StartsWith("endsec"u8)) return new Stripped(text, false, true);
+
+        var stripped = new byte[bytes.Length - (end - begin)];
+        bytes[..begin].CopyTo(stripped);
+        bytes[end..].CopyTo(stripped.AsSpan(begin));
+        var declared = Encoding.ASCII.GetString(bytes.Slice(begin + Begin.Length, Math.Min(HashLength, bytes.Length - begin - Begin.Length)));
+        return new Stripped(stripped, true, string.Equals(declared, Sha256(stripped), StringComparison.Ordinal));
+    }
+
+    /// <summary>SHA-256 in lower-case hexadecimal.</summary>
+    public static string Sha256(ReadOnlySpan<byte> bytes) => Convert.ToHexStringLower(SHA256.HashData(bytes));
+
+    /// <summary>Writes a text with a block before the <c>E</c> of its last <c>ENDSEC</c>; nothing else changes.</summary>
+    /// <param name="output">Receives the text.</param>
+    /// <param name="baseText">The text without a block.</param>
+    /// <param name="insertionOffset">Offset of that <c>E</c>.</param>
+    /// <param name="lines">Instances, one per line, without line ends.</param>
+    /// <param name="lineEnd">Line end of the text.</param>
+    public static void Write(IBufferWriter<byte> output, ReadOnlySpan<byte> baseText, long insertionOffset, IEnumerable<string> lines, string lineEnd)
+    {
+        ArgumentNullException.ThrowIfNull(output);
+        ArgumentNullException.ThrowIfNull(lines);
+        ArgumentOutOfRangeException.ThrowIfNegative(insertionOffset);
+        var at = checked((int)insertionOffset);
+        output.Write(baseText[..at]);
+        Line(string.Create(CultureInfo.InvariantCulture, $"{Begin}{Sha256(baseText)} */"));
+        foreach (var line in lines) Line(line);
+        Line(End);
+        output.Write(baseText[at..]);
+
+        void Line(string text)
+        {
+            output.Write(Encoding.ASCII.GetBytes(text));
+            output.Write(Encoding.ASCII.GetBytes(lineEnd));
+        }
+    }
+}
