@@ -1,0 +1,27 @@
+namespace MemberScan.Cli.Files;
+
+/// <summary>Where the outputs of a model go.</summary>
+internal sealed record OutputNames(string CheckedModel, string Report, string MembersTable, string RunRecord)
+{
+    private static readonly string[] s_endings = [".gz", ".zip", ".ifczip", ".ifc"];
+
+    /// <summary>Paths beside the model or in another folder; the base name drops the model's endings and one <c>.checked</c>.</summary>
+    public static OutputNames For(string modelPath, string? folder)
+    {
+        var name = Path.GetFileName(modelPath);
+        foreach (var ending in s_endings)
+            if (name.EndsWith(ending, StringComparison.OrdinalIgnoreCase) && name.Length > ending.Length)
+                name = name[..^ending.Length];
+        if (name.EndsWith(".checked", StringComparison.OrdinalIgnoreCase) && name.Length > ".checked".Length) name = name[..^".checked".Length];
+
+        var root = Path.Combine(folder ?? Path.GetDirectoryName(Path.GetFullPath(modelPath))!, name);
+        return new OutputNames(root + ".checked.ifc", root + ".report.html", root + ".members.csv", root + ".run.json");
+    }
+
+    /// <summary>The outputs that would be one of the inputs.</summary>
+    public IEnumerable<string> Clashes(IEnumerable<string> inputs)
+    {
+        var taken = inputs.Select(Path.GetFullPath).ToHashSet(StringComparer.OrdinalIgnoreCase);
+        return new[] { CheckedModel, Report, MembersTable, RunRecord }.Where(path => taken.Contains(Path.GetFullPath(path)));
+    }
+}

@@ -1,0 +1,40 @@
+using System.Globalization;
+using MemberScan.Mechanics.Stress;
+
+namespace MemberScan.Cli.Sections;
+
+/// <summary>The result of the section command as plain lines: mm, kN, kN·m, MPa.</summary>
+internal static class SectionPrint
+{
+    /// <summary>Writes it.</summary>
+    public static void Write(TextWriter output, string designation, SectionResult result, StressField field)
+    {
+        void Line(FormattableString text) => output.WriteLine(text.ToString(CultureInfo.InvariantCulture));
+
+        var p = result.Properties;
+        Line($"{designation}{(designation.StartsWith("box", StringComparison.Ordinal) && !designation.Contains("ro", StringComparison.Ordinal) ? ", sharp corners" : "")}");
+        Line($"A    {p.Area * 1e6:0.###} mm²");
+        Line($"Iy   {p.Iy * 1e12:0.#} mm⁴    Iz   {p.Iz * 1e12:0.#} mm⁴    Iyz {p.Iyz * 1e12:0.#} mm⁴");
+        Line($"WelY {p.WelY * 1e9:0.##} mm³    WelZ {p.WelZ * 1e9:0.##} mm³");
+        Line($"WplY {p.WplY * 1e9:0.##} mm³    WplZ {p.WplZ * 1e9:0.##} mm³");
+        Line($"J    {Or(p.J, 1e12, "0.#", "mm⁴")} ({p.JSource}){(p.JThinWall is { } thin ? $", thin wall {(thin * 1e12).ToString("0.#", CultureInfo.InvariantCulture)} mm⁴" : "")}    Wt {Or(p.Wt, 1e9, "0.##", "mm³")}");
+        Line($"shear model {result.Shear}{(field.Model == ShearModel.Elasticity ? string.Create(CultureInfo.InvariantCulture, $", ν = {result.Poisson:0.###}") : "")}; warping left out");
+
+        var f = result.Forces;
+        Line($"N {f.N / 1e3:0.####} kN, Vy {f.Vy / 1e3:0.####} kN, Vz {f.Vz / 1e3:0.####} kN, T {f.T / 1e3:0.#####} kN·m, My {f.My / 1e3:0.#####} kN·m, Mz {f.Mz / 1e3:0.#####} kN·m");
+        foreach (var point in result.Points)
+        {
+            Line($"at y {point.Y * 1e3:0.###} mm, z {point.Z * 1e3:0.###} mm: σ {point.Sigma / 1e6:0.##} MPa, τxy {point.TauXY / 1e6:0.##} MPa, τxz {point.TauXZ / 1e6:0.##} MPa, τ {point.Tau / 1e6:0.##} MPa, von Mises {point.VonMises / 1e6:0.##} MPa, Tresca {point.Tresca / 1e6:0.##} MPa, σ1 {point.Sigma1 / 1e6:0.##} MPa, σ3 {point.Sigma3 / 1e6:0.##} MPa");
+        }
+
+        var g = result.Governing;
+        foreach (var (name, measure) in new[] { ("von Mises", g.VonMises), ("Tresca", g.Tresca), ("|σ|", g.AbsSigma), ("τ", g.Tau), ("σ1", g.Sigma1), ("σ3", g.Sigma3) })
+            Line($"largest {name}: {measure.Value / 1e6:0.##} MPa at y {measure.Y * 1e3:0.###} mm, z {measure.Z * 1e3:0.###} mm ({measure.Place})");
+        var c = result.Closure;
+        Line($"closure: N {c.N:0.######}, Vy {c.Vy:0.######}, Vz {c.Vz:0.######}, T {c.T:0.######}, My {c.My:0.######}, Mz {c.Mz:0.######}");
+        if (result.Utilization is { } utilization) Line($"utilization (von Mises / fy): {utilization:0.000}");
+    }
+
+    private static string Or(double? value, double factor, string format, string unit) =>
+        value is { } v ? $"{(v * factor).ToString(format, CultureInfo.InvariantCulture)} {unit}" : "not available";
+}

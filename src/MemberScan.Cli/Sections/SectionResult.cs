@@ -1,0 +1,110 @@
+using System.Text.Json.Serialization;
+using MemberScan.Mechanics.Forces;
+using MemberScan.Mechanics.Stress;
+
+namespace MemberScan.Cli.Sections;
+
+/// <summary>What the section command gives, in SI, under keys that stay as they are.</summary>
+internal sealed record SectionResult(
+    [property: JsonPropertyName("section")] string Section,
+    [property: JsonPropertyName("properties")] SectionResult.Values Properties,
+    [property: JsonPropertyName("shear")] string Shear,
+    [property: JsonPropertyName("poisson")] double Poisson,
+    [property: JsonPropertyName("forces")] SectionResult.Forces6 Forces,
+    [property: JsonPropertyName("utilization"), JsonIgnore(Condition = JsonIgnoreCondition.WhenWritingNull)] double? Utilization,
+    [property: JsonPropertyName("points")] IReadOnlyList<SectionResult.Point> Points,
+    [property: JsonPropertyName("governing")] SectionResult.Measures Governing,
+    [property: JsonPropertyName("closure")] SectionResult.ClosureValues Closure)
+{
+    /// <summary>The result of a field under given forces.</summary>
+    public static SectionResult Of(StressField field, in SectionForces forces, IReadOnlyList<Point> points, double? yield)
+    {
+        var p = field.Properties;
+        var f = forces;
+        Measure Most(StressMeasure measure)
+        {
+            var point = field.Govern(f, measure);
+            return new Measure(point.Value, point.Y, point.Z, point.Place);
+        }
+
+        var governing = new Measures(
+            Most(StressMeasure.VonMises), Most(StressMeasure.Tresca), Most(StressMeasure.AbsoluteSigma), Most(StressMeasure.Tau),
+            Most(StressMeasure.Sigma1), Most(StressMeasure.Sigma3));
+        var c = field.Closure;
+        return new SectionResult(
+            field.Section.Designation,
+            new Values(p.Area, p.Iy, p.Iz, p.Iyz, p.J, p.WelY, p.WelZ, p.WplY, p.WplZ, p.Wt, p.JThinWall, p.ShearCentreY, p.ShearCentreZ, p.JSource),
+            field.Model == ShearModel.Elasticity ? "elasticity" : "elementary", field.Poisson,
+            new Forces6(f.N, f.Vy, f.Vz, f.T, f.My, f.Mz), yield is { } fy ? governing.VonMises.Value / fy : null, points, governing,
+            new ClosureValues(c.N, c.Vy, c.Vz, c.T, c.My, c.Mz, c.LargestCross));
+    }
+
+    /// <summary>Properties of the section.</summary>
+    internal sealed record Values(
+        [property: JsonPropertyName("area")] double Area,
+        [property: JsonPropertyName("Iy")] double Iy,
+        [property: JsonPropertyName("Iz")] double Iz,
+        [property: JsonPropertyName("Iyz")] double Iyz,
+        [property: JsonPropertyName("J")] double? J,
+        [property: JsonPropertyName("WelY")] double WelY,
+        [property: JsonPropertyName("WelZ")] double WelZ,
+        [property: JsonPropertyName("WplY")] double WplY,
+        [property: JsonPropertyName("WplZ")] double WplZ,
+        [property: JsonPropertyName("Wt")] double? Wt,
+        [property: JsonPropertyName("JThinWall")] double? JThinWall,
+        [property: JsonPropertyName("yS")] double ShearCentreY,
+        [property: JsonPropertyName("zS")] double ShearCentreZ,
+        [property: JsonPropertyName("JSource")] string JSource);
+
+    /// <summary>The six section forces.</summary>
+    internal sealed record Forces6(
+        [property: JsonPropertyName("N")] double N,
+        [property: JsonPropertyName("Vy")] double Vy,
+        [property: JsonPropertyName("Vz")] double Vz,
+        [property: JsonPropertyName("T")] double T,
+        [property: JsonPropertyName("My")] double My,
+        [property: JsonPropertyName("Mz")] double Mz);
+
+    /// <summary>The stresses at a point that was asked for.</summary>
+    internal sealed record Point(
+        [property: JsonPropertyName("y")] double Y,
+        [property: JsonPropertyName("z")] double Z,
+        [property: JsonPropertyName("sigma")] double Sigma,
+        [property: JsonPropertyName("tauXY")] double TauXY,
+        [property: JsonPropertyName("tauXZ")] double TauXZ,
+        [property: JsonPropertyName("tau")] double Tau,
+        [property: JsonPropertyName("vonMises")] double VonMises,
+        [property: JsonPropertyName("tresca")] double Tresca,
+        [property: JsonPropertyName("sigma1")] double Sigma1,
+        [property: JsonPropertyName("sigma3")] double Sigma3)
+    {
+        public static Point Of(double y, double z, in StressState s) =>
+            new(y, z, s.Sigma, s.TauXY, s.TauXZ, s.Tau, s.VonMises, s.Tresca, s.Sigma1, s.Sigma3);
+    }
+
+    /// <summary>Where each measure is largest.</summary>
+    internal sealed record Measures(
+        [property: JsonPropertyName("vonMises")] Measure VonMises,
+        [property: JsonPropertyName("tresca")] Measure Tresca,
+        [property: JsonPropertyName("absSigma")] Measure AbsSigma,
+        [property: JsonPropertyName("tau")] Measure Tau,
+        [property: JsonPropertyName("sigma1")] Measure Sigma1,
+        [property: JsonPropertyName("sigma3")] Measure Sigma3);
+
+    /// <summary>A largest value and its place.</summary>
+    internal sealed record Measure(
+        [property: JsonPropertyName("value")] double Value,
+        [property: JsonPropertyName("y")] double Y,
+        [property: JsonPropertyName("z")] double Z,
+        [property: JsonPropertyName("place")] string Place);
+
+    /// <summary>Section forces got back by integrating the field, for a unit of each.</summary>
+    internal sealed record ClosureValues(
+        [property: JsonPropertyName("N")] double N,
+        [property: JsonPropertyName("Vy")] double Vy,
+        [property: JsonPropertyName("Vz")] double Vz,
+        [property: JsonPropertyName("T")] double T,
+        [property: JsonPropertyName("My")] double My,
+        [property: JsonPropertyName("Mz")] double Mz,
+        [property: JsonPropertyName("largestCross")] double LargestCross);
+}

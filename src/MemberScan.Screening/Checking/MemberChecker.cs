@@ -1,0 +1,174 @@
+using System.Collections.Immutable;
+using System.Globalization;
+using MemberScan.Foundation.Geometry;
+using MemberScan.Mechanics.Forces;
+using MemberScan.Model;
+using MemberScan.Model.Forces;
+using MemberScan.Model.Limits;
+using MemberScan.Model.Members;
+using MemberScan.Model.Verdicts;
+using MemberScan.Screening.Record;
+
+namespace MemberScan.Screening.Checking;
+
+/// <summary>The verdict of one candidate out of its section, material and forces.</summary>
+internal sealed class MemberChecker(SectionLibrary library, Basis basis, double lengthFactor)
+{
+    /// <summary>Utilizations above this are over the limit.</summary>
+    public const double OverLimit = 1 + 1e-9;
+
+    /// <summary>Difference of the two shear models from which the result says so.</summary>
+    private const double ModelDifference = 0.05;
+
+    /// <summary>Bend radius over depth below which a straight-bar stress supports no verdict within the limit.</summary>
+    private const double SharpBend = 10;
+
+    private readonly SituationChecker _situations = new(library, basis, lengthFactor);
+
+    /// <summary>Checks a candidate.</summary>
+    /// <param name="member">The candidate.</param>
+    /// <param name="forces">Its forces, one entry per situation.</param>
+    /// <param name="notes">Notes about the choice of forces.</param>
+    public MemberResult Check(Member member, IReadOnlyList<MemberForces> forces, IReadOnlyList<string> notes)
+    {
+        var all = ImmutableArray.CreateBuilder<string>();
+        all.AddRange(member.Notes);
+        all.AddRange(notes);
+
+        var section = member.Section as Finding<SectionFinding>.Found;
+        var strength = member.Material.Yield as Finding<double>.Found;
+        var length = member.Length as Finding<double>.Found;
+        var poisson = (Finding<double>.Found)member.Material.Poisson;
+        if (strength is not null && poisson.Source == "default")
+            all.Add(string.Create(CultureInfo.InvariantCulture, $"Poisson's ratio {poisson.Value:0.0##} is the default; the model gives none"));
+
+        Reason? first = (member.Section as Finding<SectionFinding>.Missing)?.Why
+            ?? (member.Material.Yield as Finding<double>.Missing)?.Why
+            ?? (forces.Count == 0 ? new Reason(ReasonCode.NoForces, "no section forces for this member in any source") : null)
+            ?? (member.Length as Finding<double>.Missing)?.Why;
+
+        var findings = new List<SituationFindings>();
+        if (first is null)
+        {
+            var subject = new SituationChecker.Subject(section!.Value, length!.Value, strength!.Value, poisson.Value, member.Material);
+            for (var i = 0; i < forces.Count; i++) findings.Add(_situations.Check(subject, forces[i], i));
+            first = Barred(member, section.Value, findings);
+        }
+        else
+        {
+            findings.AddRange(forces.Select(f => new SituationFindings(f)));
+        }
+
+        var decisive = Decisive(findings, all, out var other);
+        var overstressed = decisive is { Utilization: > OverLimit };
+        var verdict = overstressed ? Verdict.Overstressed : first is not null ? Verdict.NotChecked : Verdict.WithinLimit;
+        if (overstressed && first is not null) all.Add($"beside the verdict: {first.Message}");
+        foreach (var note in findings.SelectMany(f => f.Notes)) if (!all.Contains(note)) all.Add(note);
+
+        return new MemberResult
+        {
+            Key = member.Key,
+            GlobalId = member.Element.GlobalId,
+            ItemNumber = member.ItemNumber,
+            ItemCount = member.ItemCount,
+            StepId = member.Element.StepId,
+            Tag = member.Element.Tag,
+            Name = member.Element.Name,
+            Class = member.Element.Class,
+            Role = member.Role,
+            Storey = member.Element.Storey,
+            Section = section?.Value.Shape.Designation ?? "",
+            SectionSource = section?.Source ?? "",
+            Material = member.Material.Name,
+            Strength = strength?.Value,
+            StrengthSource = strength?.Source ?? "",
+            Length = length?.Value,
+            LengthSource = length?.Source ?? "",
+            Axes = (member.Axes as Finding<MemberAxes>.Found)?.Value,
+            Verdict = verdict,
+            Reason = verdict == Verdict.NotChecked ? first : null,
+            Governing = decisive is null ? null : Governing(decisive, other, findings, strength!.Value, strength.Source),
+            Situations = Ranked(findings),
+            Notes = all.ToImmutable(),
+        };
+    }
+
+    /// <summary>The first thing that bars a verdict within the limit.</summary>
+    private static Reason? Barred(Member member, SectionFinding section, List<SituationFindings> findings)
+    {
+        foreach (var finding in findings)
+            if (finding.Blockers.Count > 0)
+                return finding.Blockers[0];
+
+        if (!findings.Exists(f => f.Forces.Situation.ActsInFull))
+            return new Reason(ReasonCode.NoCombination, "only single load cases and no combination of them; within the limit in each says nothing about both together");
+
+        var depth = Math.Max(section.Shape.ExtentY, section.Shape.ExtentZ);
+        if (member.BendRadii.Any(radius => radius < SharpBend * depth))
+            return new Reason(ReasonCode.CheckNotEvaluated, string.Create(CultureInfo.InvariantCulture, $"a bend of radius {member.BendRadii.Min() * 1e3:0.###} mm is under {SharpBend} depths; the curved-bar stress is not evaluated"));
+
+        return null;
+    }
+
+    /// <summary>
+    /// The stress that decides: by the elementary model, unless only the elasticity model is over the limit or the elementary one has no answer.
+    /// </summary>
+    private static Found? Decisive(List<SituationFindings> findings, ImmutableArray<string>.Builder notes, out Found? other)
+    {
+        var elementary = findings.Select(f => f.Elementary).Aggregate((Found?)null, Found.Larger);
+        var elasticity = findings.Select(f => f.Elasticity).Aggregate((Found?)null, Found.Larger);
+        if (elementary is null || elasticity is null)
+        {
+            other = null;
+            var only = elementary ?? elasticity;
+            if (elementary is not null) notes.Add($"elasticity not available for a {elementary.Field.Section.Kind}; decided by the elementary model");
+            return only;
+        }
+
+        var elasticityDecides = elasticity.Utilization > OverLimit && elementary.Utilization <= OverLimit;
+        var (decisive, beside) = elasticityDecides ? (elasticity, elementary) : (elementary, elasticity);
+        other = beside;
+        var difference = Math.Abs(elasticity.Utilization - elementary.Utilization) / Math.Max(elasticity.Utilization, elementary.Utilization);
+        if (difference > ModelDifference)
+            notes.Add(string.Create(CultureInfo.InvariantCulture, $"the shear models differ by {100 * difference:0.0} %: elementary {elementary.Utilization:0.000}, elasticity {elasticity.Utilization:0.000}, each at its own point"));
+        if (elasticityDecides)
+            notes.Add("over the limit by the elasticity model only, which decides");
+        return decisive;
+    }
+
+    private static Governing Governing(Found decisive, Found? other, List<SituationFindings> findings, double yield, string yieldSource)
+    {
+        var finding = findings[decisive.Situation];
+        var limit = finding.Limit!;
+        var check = LimitInForce.Check(limit, decisive.Point.State, yield);
+        return new Governing
+        {
+            Utilization = check.Utilization,
+            Criterion = LimitInForce.Words(limit),
+            Clause = LimitInForce.Clause(limit),
+            Limit = LimitInForce.Stress(limit, yield),
+            Stress = decisive.Point.Value,
+            Situation = finding.Forces.Situation.Name,
+            Kind = KindWord(finding.Forces.Situation.Kind),
+            Station = decisive.X,
+            Forces = decisive.Forces,
+            ForcesSource = finding.Forces.Source,
+            Point = decisive.Point,
+            Section = decisive.Field.Section.Designation,
+            ShearModel = decisive.Field.Model.ToString().ToLowerInvariant(),
+            OtherModelUtilization = other?.Utilization,
+            Trace = [.. Derivation.Lines(decisive, finding.Forces.Source), .. check.Trace.Select(line => line.Symbol is "fy" or "f_y" ? line with { Source = yieldSource } : line)],
+        };
+    }
+
+    private static ImmutableArray<SituationResult> Ranked(List<SituationFindings> findings) =>
+    [
+        .. findings.Select(f => new SituationResult(
+                f.Forces.Situation.Name, KindWord(f.Forces.Situation.Kind), f.Forces.Situation.ActsInFull, f.Largest?.Utilization,
+                string.Join("; ", f.Blockers.Select(b => $"{b.Code.Text()}: {b.Message}").Concat(f.Notes)),
+                f.Forces.Source, f.Forces.Conversion, f.Forces.Stations))
+            .OrderByDescending(s => s.Utilization ?? -1),
+    ];
+
+    private static string KindWord(SituationKind kind) => kind.ToString().ToLowerInvariant();
+}

@@ -1,0 +1,33 @@
+using System.Buffers;
+using MemberScan.Ifc;
+using MemberScan.Ifc.WriteBack;
+using MemberScan.Screening.Record;
+
+namespace MemberScan.Screening;
+
+/// <summary>A finished screening: its record, and what is needed to write the checked model.</summary>
+public sealed class ScreeningOutcome
+{
+    private readonly IfcModel? _model;
+    private readonly long _creationDate;
+
+    internal ScreeningOutcome(ScreeningRecord record, IfcModel? model, long creationDate) =>
+        (Record, _model, _creationDate) = (record, model, creationDate);
+
+    /// <summary>The record.</summary>
+    public ScreeningRecord Record { get; }
+
+    /// <summary>Whether a checked model can be written: the text was read to its end and has a data section.</summary>
+    public bool CanWriteModel => _model is { File: { ReadToEnd: true, InsertionOffset: >= 0 } };
+
+    /// <summary>Writes the checked model: the base model's bytes with one property set per element of a candidate appended.</summary>
+    /// <exception cref="InvalidOperationException"><see cref="CanWriteModel"/> is false.</exception>
+    public void WriteModel(IBufferWriter<byte> output)
+    {
+        if (!CanWriteModel) throw new InvalidOperationException("the model was not read to its end; no checked model is written");
+
+        var file = _model!.File;
+        var lines = PropertySetWriter.Lines(_model, StressCheckSets.From(Record), _creationDate, Record.Version);
+        ResultBlock.Write(output, file.Bytes.Span, file.InsertionOffset, lines, file.LineEnd);
+    }
+}

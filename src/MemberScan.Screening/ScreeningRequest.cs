@@ -1,0 +1,33 @@
+using System.Collections.Immutable;
+using MemberScan.Inputs.ForcesTables;
+using MemberScan.Inputs.SettingsFiles;
+
+namespace MemberScan.Screening;
+
+/// <summary>Everything that one screening works from; no files, no clock.</summary>
+public sealed record ScreeningRequest
+{
+    /// <summary>Name of the model's file, without folder.</summary>
+    public required string ModelName { get; init; }
+
+    /// <summary>"out of x.ifczip", or empty.</summary>
+    public string Container { get; init; } = "";
+
+    /// <summary>The text of the model, with or without a block of ours.</summary>
+    public required ReadOnlyMemory<byte> ModelBytes { get; init; }
+
+    /// <summary>The settings in force.</summary>
+    public required Settings Settings { get; init; }
+
+    /// <summary>Forces tables, in the order given.</summary>
+    public ImmutableArray<ForcesTable> Tables { get; init; } = [];
+
+    /// <summary>Time of the run, ISO 8601.</summary>
+    public required string Timestamp { get; init; }
+
+    /// <summary>Whether the time was given for the run rather than read off the clock; only then it is written into the model.</summary>
+    public bool TimestampIsGiven { get; init; }
+
+    /// <summary>Version of the program.</summary>
+    public required string Version { get; init; }
+}
