@@ -47,6 +47,14 @@ public static class Figures
         return Grouped(value.ToString("F" + decimals, CultureInfo.InvariantCulture));
     }
 
+    /// <summary>A conversion factor to ten significant digits, without trailing zeros and grouping.</summary>
+    /// <exception cref="ArgumentOutOfRangeException">The value is not finite.</exception>
+    public static string Plain(double value)
+    {
+        ThrowUnlessFinite(value);
+        return Signed(value.ToString("G10", CultureInfo.InvariantCulture));
+    }
+
     /// <summary>A count.</summary>
     public static string Count(long count) => Grouped(count.ToString(CultureInfo.InvariantCulture));
 

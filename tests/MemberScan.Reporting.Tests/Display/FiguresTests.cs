@@ -39,6 +39,13 @@ public sealed class FiguresTests
     public void Prints_fixed_decimals_and_no_sign_on_what_rounds_to_nothing(double value, string expected) =>
         Assert.Equal(expected, Figures.Fixed(value, 3));
 
+    // 1 lbf = 4.448 221 615 260 5 N (international pound, standard gravity).
+    [Theory]
+    [InlineData(4.4482216152605, "4.448221615")]
+    [InlineData(0.001, "0.001")]
+    [InlineData(1e6, "1000000")]
+    public void Prints_a_conversion_factor_to_ten_digits(double factor, string expected) => Assert.Equal(expected, Figures.Plain(factor));
+
     [Theory]
     [InlineData(double.NaN)]
     [InlineData(double.PositiveInfinity)]
