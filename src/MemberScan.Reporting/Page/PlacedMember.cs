@@ -1,0 +1,12 @@
+using MemberScan.Screening.Record;
+
+namespace MemberScan.Reporting.Page;
+
+/// <summary>A candidate with its place in the page.</summary>
+/// <param name="Member">The candidate.</param>
+/// <param name="Anchor">Name of its place, such as <c>member-2O2Fr$t4X7Zf8NOew3FLOH</c>.</param>
+public sealed record PlacedMember(MemberResult Member, string Anchor)
+{
+    /// <summary>Largest utilization known [-]; null when nothing could be evaluated.</summary>
+    public double? Utilization => Member.Governing?.Utilization;
+}

@@ -1,0 +1,220 @@
+using System.Globalization;
+using System.Security.Cryptography;
+using System.Text;
+using AngleSharp.Dom;
+using AngleSharp.Html.Parser;
+using MemberScan.Model.Verdicts;
+using MemberScan.Reporting.Page;
+using MemberScan.Screening.Record;
+
+namespace MemberScan.Reporting.Tests;
+
+/// <summary>The page is read back with an independent HTML parser.</summary>
+public sealed class HtmlReportTests
+{
+    [Fact]
+    public void Prints_the_three_counts_with_their_sum()
+    {
+        var page = Parse(FerryLanding.Small());
+
+        Assert.Equal("3 within limit + 2 overstressed + 4 not checked = 9 candidates", page.QuerySelector(".sum")!.TextContent);
+    }
+
+    [Fact]
+    public void Has_exactly_one_place_for_every_candidate_and_every_link_leads_to_a_place()
+    {
+        var record = FerryLanding.Small();
+
+        var page = Parse(record);
+
+        Assert.Equal(record.Members.Length, page.QuerySelectorAll("[id^='member-']").Length);
+        Assert.All(record.Members, m => Assert.NotNull(page.GetElementById("member-" + m.Key.Replace('/', '-'))));
+        Assert.All(page.QuerySelectorAll("a[href]"), a => Assert.NotNull(page.GetElementById(a.GetAttribute("href")![1..])));
+        Assert.Equal(page.All.Count(e => e.HasAttribute("id")), page.All.Where(e => e.HasAttribute("id")).Select(e => e.Id).Distinct().Count());
+    }
+
+    [Fact]
+    public void Asks_nothing_of_the_network_and_runs_no_script()
+    {
+        var page = Parse(FerryLanding.Small());
+
+        Assert.Empty(page.QuerySelectorAll("script, link, img, iframe, object, embed, base, form, [src], [style], [srcset]"));
+        Assert.All(page.QuerySelectorAll("[href]"), e => Assert.StartsWith("#", e.GetAttribute("href"), StringComparison.Ordinal));
+        Assert.DoesNotContain(page.All.SelectMany(e => e.Attributes), a => a.Name.StartsWith("on", StringComparison.OrdinalIgnoreCase));
+        Assert.DoesNotContain("://", page.Source.Text, StringComparison.Ordinal);
+        Assert.DoesNotContain("@import", page.QuerySelector("style")!.TextContent, StringComparison.Ordinal);
+    }
+
+    // The policy's hash is that of the style element's text (Content Security Policy Level 3, hash-source).
+    [Fact]
+    public void Allows_its_own_style_sheet_by_hash_and_nothing_else()
+    {
+        var page = Parse(FerryLanding.Small());
+
+        var style = Assert.Single(page.QuerySelectorAll("style")).TextContent;
+        var hash = Convert.ToBase64String(SHA256.HashData(Encoding.UTF8.GetBytes(style)));
+        Assert.Equal(
+            $"default-src 'none'; style-src 'sha256-{hash}'; base-uri 'none'; form-action 'none'",
+            page.QuerySelector("meta[http-equiv='Content-Security-Policy']")!.GetAttribute("content"));
+    }
+
+    [Fact]
+    public void Groups_what_was_not_checked_by_reason_the_most_frequent_first_with_count_and_request()
+    {
+        var page = Parse(FerryLanding.Small());
+
+        var headings = page.QuerySelectorAll(".reason h3").Select(h => h.TextContent.Trim());
+        Assert.Equal(["◇ no-forces: 2", "◇ section-not-parametric: 1", "◇ thread-unknown: 1"], headings);
+        Assert.EndsWith(ReasonCode.NoForces.Request(), page.QuerySelector(".request")!.TextContent, StringComparison.Ordinal);
+        var stay = page.GetElementById("member-2O2Fr$t4X7Zf8NOew3FL06")!;
+        Assert.Contains("0.883 in Full deck (service)", stay.TextContent, StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void Lists_the_largest_utilizations_first_whatever_their_verdict()
+    {
+        var page = Parse(FerryLanding.Small());
+
+        var rows = page.GetElementById("worst")!.ParentElement!.QuerySelectorAll("tbody tr");
+        Assert.Equal(6, rows.Length);
+        Assert.StartsWith("1.286", rows[0].TextContent.Trim(), StringComparison.Ordinal);
+        Assert.Contains("◇ NOT CHECKED", rows[2].TextContent, StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void Shows_the_calculation_of_an_overstressed_member_line_by_line_in_shown_units()
+    {
+        var sheet = Parse(FerryLanding.Small()).GetElementById("member-" + FerryLanding.RailKey)!;
+
+        var lines = sheet.QuerySelectorAll(".trace tbody tr").Select(r => string.Join(" | ", r.Children.Select(c => c.TextContent)));
+        Assert.Contains("A | input | 453.4\u00A0mm² | closed form of the section", lines);
+        Assert.Contains("Iy | input | 115\u202F900\u00A0mm⁴ | closed form of the section", lines);
+        Assert.Contains("σ | N/A + My·z/Iy − Mz·y/Iz | 273.4\u00A0MPa | beam theory", lines);
+        Assert.Contains("fy/Ω | fy/1.67 | 212.6\u00A0MPa | allowable stress", lines);
+        Assert.NotNull(sheet.QuerySelector("svg path.material"));
+        Assert.True(sheet.QuerySelector("details")!.HasAttribute("open"));
+    }
+
+    [Fact]
+    public void Prints_the_cautions_the_scope_and_marks_defaults()
+    {
+        var record = FerryLanding.Small();
+
+        var page = Parse(record);
+
+        var cautions = page.QuerySelectorAll(".cautions li").Select(c => c.TextContent);
+        Assert.Equal(record.Cautions, cautions);
+        Assert.Contains("IfcBuildingElementProxy12no bar-like body and no forces", page.GetElementById("scope")!.ParentElement!.TextContent, StringComparison.Ordinal);
+        Assert.Contains(page.GetElementById("settings")!.ParentElement!.QuerySelectorAll("tr"), r => r.TextContent == "basis.service.factor1.67default");
+        Assert.Contains(page.GetElementById("settings")!.ParentElement!.QuerySelectorAll("tr"), r => r.TextContent == "forces.conventionpositive-facegiven");
+    }
+
+    [Fact]
+    public void Says_it_where_nothing_was_found()
+    {
+        var page = Parse(FerryLanding.Record());
+
+        Assert.Equal("0 within limit + 0 overstressed + 0 not checked = 0 candidates", page.QuerySelector(".sum")!.TextContent);
+        Assert.Contains("No candidate was found in the model. Nothing was checked.", page.QuerySelector(".alarm")!.TextContent, StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void Says_it_where_the_model_is_damaged()
+    {
+        var small = FerryLanding.Small();
+
+        var page = Parse(small with { HasDamage = true, Model = small.Model with { ReadToEnd = false } });
+
+        var alarm = page.QuerySelector(".alarm")!.TextContent;
+        Assert.Contains("could not be read to its end", alarm, StringComparison.Ordinal);
+        Assert.Contains("Damaged records were passed over", alarm, StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void Never_gives_a_verdict_by_colour_alone()
+    {
+        var page = Parse(FerryLanding.Small());
+
+        Assert.All(page.QuerySelectorAll(".verdict"), v => Assert.Matches("^[●▲◇] ([A-Z ]+|[0-9.]+)$", v.TextContent.Trim()));
+    }
+
+    [Fact]
+    public void Gives_the_same_text_under_a_culture_with_a_decimal_comma()
+    {
+        var record = FerryLanding.Small();
+        var plain = HtmlReport.Render(record);
+        var before = CultureInfo.CurrentCulture;
+
+        string german;
+        try
+        {
+            CultureInfo.CurrentCulture = new CultureInfo("de-DE");
+            german = HtmlReport.Render(record);
+        }
+        finally
+        {
+            CultureInfo.CurrentCulture = before;
+        }
+
+        Assert.Equal(plain, german);
+    }
+
+    [Fact]
+    public void Gives_a_row_and_no_sheet_to_each_of_twenty_thousand_members_within_their_limit()
+    {
+        var record = FerryLanding.Large(20_000);
+
+        var text = HtmlReport.Render(record);
+
+        Assert.Equal(400, record.Counts.Overstressed);
+        Assert.Equal(record.Members.Length, text.Split("id=\"member-").Length - 1);
+        Assert.InRange(Encoding.UTF8.GetByteCount(text), 1, 20_000_000);
+    }
+
+    [Fact]
+    public void Stops_the_sheets_at_their_limit_and_says_so()
+    {
+        var members = Enumerable.Range(0, ReportView.LargestNumberOfSheets + 3)
+            .Select(i => FerryLanding.Rail("Rail" + i.ToString(CultureInfo.InvariantCulture), "Rail", 1.2e3 + i));
+
+        var page = Parse(FerryLanding.Record([.. members]));
+
+        Assert.Equal(ReportView.LargestNumberOfSheets, page.QuerySelectorAll(".sheet").Length);
+        Assert.Equal(ReportView.LargestNumberOfSheets + 3, page.QuerySelectorAll("[id^='member-']").Length);
+        Assert.Contains("Sheets follow for the 500 worst of them", page.Body!.TextContent, StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void Refuses_a_record_whose_counts_are_wrong()
+    {
+        var record = FerryLanding.Small() with { Counts = new VerdictCounts(4, 1, 4) };
+
+        Assert.Throws<ArgumentException>(() => HtmlReport.Render(record));
+    }
+
+    [Fact]
+    public void Refuses_a_number_that_is_not_finite()
+    {
+        var rail = FerryLanding.Rail("Rail", "Rail", 1.32e3);
+        var record = FerryLanding.Record(rail with { Governing = rail.Governing! with { Stress = double.NaN } });
+
+        Assert.Throws<ArgumentOutOfRangeException>(() => HtmlReport.Render(record));
+    }
+
+    [Fact]
+    public void Is_the_page_that_was_looked_at_and_kept()
+    {
+        var expected = File.ReadAllText(Path.Combine(AppContext.BaseDirectory, "Expectations", "HtmlReport", "Ferry_landing.approved.html"));
+
+        var actual = HtmlReport.Render(FerryLanding.Small());
+
+        if (actual != expected)
+        {
+            var received = Path.Combine(AppContext.BaseDirectory, "Expectations", "HtmlReport", "Ferry_landing.received.html");
+            File.WriteAllText(received, actual);
+            Assert.Fail($"The page differs from the kept one; look at {received} and, if it is right, keep it.");
+        }
+    }
+
+    private static IDocument Parse(ScreeningRecord record) => new HtmlParser().ParseDocument(HtmlReport.Render(record));
+}
