@@ -1,3 +1,5 @@
+using MemberScan.Part21.Containers;
+
 namespace MemberScan.Part21;
 
 /// <summary>The bytes of a model out of a plain file, a zip with one model inside, or a gzip.</summary>
@@ -15,5 +17,57 @@ public static class ModelContainer
     /// <exception cref="InvalidDataException">No model, two models, an encrypted or damaged archive, expansion beyond the limits,
     /// or another encoding (ifcXML, JSON, UTF-16): the message is one sentence with the remedy.</exception>
     /// <exception cref="IOException">The file cannot be read.</exception>
-    public static (byte[] Bytes, string Note) Read(string path) => throw new NotImplementedException();
+    public static (byte[] Bytes, string Note) Read(string path) => Read(path, MaxModelBytes, MaxExpansion);
+
+    internal static (byte[] Bytes, string Note) Read(string path, long maxBytes, int maxRatio)
+    {
+        ArgumentException.ThrowIfNullOrEmpty(path);
+        var name = Path.GetFileName(path);
+        using var file = Open(path);
+        try
+        {
+            return Read(file, name, maxBytes, maxRatio);
+        }
+        catch (RefusedContainer refusal)
+        {
+            throw new InvalidDataException(refusal.Message, refusal);
+        }
+    }
+
+    private static (byte[] Bytes, string Note) Read(FileStream file, string name, long maxBytes, int maxRatio)
+    {
+        Span<byte> magic = stackalloc byte[4];
+        var count = file.ReadAtLeast(magic, magic.Length, throwOnEndOfStream: false);
+        file.Position = 0;
+
+        var (bytes, note) = magic[..count] switch
+        {
+            [(byte)'P', (byte)'K', 3 or 5 or 7, ..] => ZipModel.Read(file, name, maxBytes, maxRatio),
+            [0x1F, 0x8B, ..] => (GzipModel.Read(file, name, maxBytes, maxRatio), $"out of {name}"),
+            _ => (ReadPlain(file, name, maxBytes), ""),
+        };
+        ForeignEncoding.Refuse(bytes, name);
+        return (bytes, note);
+    }
+
+    private static FileStream Open(string path)
+    {
+        try
+        {
+            return new FileStream(path, FileMode.Open, FileAccess.Read, FileShare.Read);
+        }
+        catch (UnauthorizedAccessException fault)
+        {
+            throw new IOException(fault.Message, fault);
+        }
+    }
+
+    private static byte[] ReadPlain(FileStream file, string name, long maxBytes)
+    {
+        if (file.Length > maxBytes) throw new RefusedContainer($"{name} has {file.Length} bytes, more than the {maxBytes} of the largest model read; split the model.");
+
+        var bytes = new byte[file.Length];
+        file.ReadExactly(bytes);
+        return bytes;
+    }
 }

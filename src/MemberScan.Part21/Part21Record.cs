@@ -1,31 +1,99 @@
 using MemberScan.Foundation.Diagnostics;
+using MemberScan.Part21.Index;
+using MemberScan.Part21.Tokens;
 
 namespace MemberScan.Part21;
 
 /// <summary>One instance such as <c>#12=IFCBEAM(…)</c>: a small handle, free to copy; the default value is no instance.</summary>
 public readonly record struct Part21Record
 {
-    /// <summary>The number after '#'; 0 for the default value.</summary>
-    public ulong Id => throw new NotImplementedException();
+    private readonly Part21File? _file;
+    private readonly int _row;
 
-    /// <summary>The keyword in upper case; empty for a complex instance.</summary>
-    public string Keyword => throw new NotImplementedException();
+    internal Part21Record(Part21File file, int row) => (_file, _row) = (file, row);
+
+    /// <summary>The number after '#'; 0 for the default value.</summary>
+    public ulong Id => _file is null ? 0 : _file.Row(_row).Id;
+
+    /// <summary>The keyword in upper case; empty for a complex instance and for a damaged one whose keyword is lost.</summary>
+    public string Keyword => _file is null ? "" : _file.KeywordOf(_row);
 
     /// <summary>Whether the instance is of the external mapping <c>#1=(A(…)B(…))</c>; it then has no arguments here.</summary>
-    public bool IsComplex => throw new NotImplementedException();
+    public bool IsComplex => Has(InstanceFlags.Complex);
 
     /// <summary>Whether its arguments cannot be told apart; they then read as absent.</summary>
-    public bool IsDamaged => throw new NotImplementedException();
+    public bool IsDamaged => Has(InstanceFlags.Damaged);
+
+    /// <summary>Whether an instance further up has the same number; references lead to that one.</summary>
+    public bool IsDuplicate => Has(InstanceFlags.Duplicate);
 
     /// <summary>Number of arguments.</summary>
-    public int ArgumentCount => throw new NotImplementedException();
+    public int ArgumentCount
+    {
+        get
+        {
+            var count = 0;
+            for (var list = new ParameterList(ArgumentText(out _)); list.MoveNext();) count++;
+            return count;
+        }
+    }
+
+    /// <summary>All arguments in order, found in one pass; none where they cannot be told apart.</summary>
+    public IReadOnlyList<Part21Value> Arguments()
+    {
+        var length = ArgumentText(out var start).Length;
+        return length == 0 ? [] : Part21Value.All(_file!.Source, start, length);
+    }
 
     /// <summary>An argument by its index from 0; a value of kind <see cref="Part21ValueKind.Absent"/> beyond the last.</summary>
-    public Part21Value this[int index] => throw new NotImplementedException();
+    /// <remarks>The arguments before it are passed over each time.</remarks>
+    public Part21Value this[int index]
+    {
+        get
+        {
+            ArgumentOutOfRangeException.ThrowIfNegative(index);
+            var list = new ParameterList(ArgumentText(out var start));
+            for (var i = 0; list.MoveNext(); i++)
+            {
+                if (i == index) return new Part21Value(_file!.Source, start + list.Start, list.End - list.Start, list.Kind);
+            }
 
-    /// <summary>From '#' to ';', both included.</summary>
-    public ReadOnlySpan<byte> Text => throw new NotImplementedException();
+            return default;
+        }
+    }
+
+    /// <summary>From '#' to ';', both included; a damaged instance reaches to where reading went on.</summary>
+    public ReadOnlySpan<byte> Text
+    {
+        get
+        {
+            if (_file is null) return default;
+            var row = _file.Row(_row);
+            return _file.Source.Slice(row.Start, row.Length);
+        }
+    }
 
     /// <summary>Where it stands.</summary>
-    public SourceSpan Span => throw new NotImplementedException();
+    public SourceSpan Span => _file is null ? new SourceSpan("", -1, 0, 0, 0) : _file.SpanAt(_file.Row(_row).Start, Id);
+
+    private bool Has(InstanceFlags flag) => _file is not null && (_file.Row(_row).Flags & flag) != 0;
+
+    // What stands between the brackets, and its offset in the file.
+    private ReadOnlySpan<byte> ArgumentText(out long start)
+    {
+        start = 0;
+        if (_file is null) return default;
+
+        var row = _file.Row(_row);
+        if ((row.Flags & (InstanceFlags.Damaged | InstanceFlags.Complex)) != 0) return default;
+
+        var text = _file.Source.Slice(row.Start, row.Length);
+        var numberEnd = 1;
+        _ = Numerals.TryRead(text, ref numberEnd, out _);
+        var word = Blanks.Skip(text, Blanks.Skip(text, numberEnd) + 1);
+        var bracket = Blanks.Skip(text, Words.End(text, word));
+        var end = Brackets.End(text, bracket);
+        start = row.Start + bracket + 1;
+        return text[(bracket + 1)..(end - 1)];
+    }
 }

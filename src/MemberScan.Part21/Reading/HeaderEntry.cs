@@ -1,0 +1,7 @@
+namespace MemberScan.Part21.Reading;
+
+/// <summary>One entry of the header such as <c>FILE_SCHEMA(('IFC4'))</c>.</summary>
+/// <param name="Keyword">In upper case.</param>
+/// <param name="Start">Offset of what stands between its brackets [byte].</param>
+/// <param name="Length">Its length [byte].</param>
+internal readonly record struct HeaderEntry(string Keyword, long Start, int Length);
