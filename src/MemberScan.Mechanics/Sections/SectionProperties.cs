@@ -49,5 +49,17 @@ public sealed record SectionProperties
     public double IMin => 0.5 * (Iy + Iz) - Math.Sqrt(0.25 * (Iy - Iz) * (Iy - Iz) + Iyz * Iyz);
 
     /// <summary>Properties of a section by closed form.</summary>
-    public static SectionProperties Of(CrossSection section) => throw new NotImplementedException();
+    /// <remarks>
+    /// A rounded rectangle has neither J nor Wt yet, not even where its radius makes it a circle; <see cref="JSource"/> says so.
+    /// </remarks>
+    public static SectionProperties Of(CrossSection section) => section switch
+    {
+        Round round => ClosedForms.Of(round),
+        Tube tube => ClosedForms.Of(tube),
+        Rectangle rectangle => ClosedForms.Of(rectangle),
+        RoundedRectangle rounded => ClosedForms.Of(rounded),
+        Box box => ClosedForms.Of(box),
+        null => throw new ArgumentNullException(nameof(section)),
+        _ => throw new ArgumentOutOfRangeException(nameof(section), section.Kind, "no closed form for this kind"),
+    };
 }

@@ -1,5 +1,7 @@
+using System.Diagnostics.CodeAnalysis;
 using MemberScan.Mechanics.Forces;
 using MemberScan.Mechanics.Sections;
+using MemberScan.Mechanics.Shear;
 
 namespace MemberScan.Mechanics.Stress;
 
@@ -37,8 +39,18 @@ public abstract class StressField
     /// <exception cref="ArgumentOutOfRangeException"><paramref name="poisson"/> is outside [0, 0.5).</exception>
     public static bool TryCreate(
         CrossSection section, ShearModel model, double poisson,
-        [System.Diagnostics.CodeAnalysis.NotNullWhen(true)] out StressField? field,
-        [System.Diagnostics.CodeAnalysis.NotNullWhen(false)] out string? whyNot) => throw new NotImplementedException();
+        [NotNullWhen(true)] out StressField? field, [NotNullWhen(false)] out string? whyNot)
+    {
+        ArgumentNullException.ThrowIfNull(section);
+        if (!(poisson is >= 0 and < 0.5))
+            throw new ArgumentOutOfRangeException(nameof(poisson), poisson, "Poisson's ratio must lie in [0, 0.5)");
+
+        var properties = SectionProperties.Of(section);
+        var shear = ShearSolutionOf(section, model, poisson, properties);
+        field = shear is null ? null : new SectionField(section, model, poisson, properties, shear);
+        whyNot = shear is null ? $"elasticity not available for a {section.Kind}" : null;
+        return shear is not null;
+    }
 
     /// <summary>The stresses at a point of the material.</summary>
     /// <param name="forces">Section forces; finite.</param>
@@ -54,4 +66,19 @@ public abstract class StressField
     /// <returns>A point of the material; its value is within 0.1 % of the true supremum of this field.</returns>
     /// <exception cref="ArgumentException">T ≠ 0 where <see cref="CarriesTorsion"/> is false, or forces not finite.</exception>
     public abstract GoverningPoint Govern(in SectionForces forces, StressMeasure measure);
+
+    private static ShearSolution? ShearSolutionOf(
+        CrossSection section, ShearModel model, double poisson, SectionProperties properties) => (section, model) switch
+        {
+            (Round round, ShearModel.Elementary) => new RoundElementary(round),
+            (Round round, ShearModel.Elasticity) => new RoundElasticity(round, poisson),
+            (Tube tube, ShearModel.Elementary) => new TubeElementary(tube),
+            (Tube tube, ShearModel.Elasticity) => new TubeElasticity(tube, poisson),
+            (Rectangle rectangle, ShearModel.Elementary) => new RectangleElementary(rectangle),
+            (Rectangle rectangle, ShearModel.Elasticity) => new RectangleElasticity(rectangle, poisson),
+            (RoundedRectangle rounded, ShearModel.Elementary) => new RoundedRectangleElementary(rounded, properties),
+            (Box box, ShearModel.Elementary) => new BoxElementary(box, properties),
+            (_, ShearModel.Elasticity) => null,
+            _ => throw new ArgumentOutOfRangeException(nameof(model), model, "unknown shear model"),
+        };
 }

@@ -1,0 +1,63 @@
+using MemberScan.Mechanics.Forces;
+using MemberScan.Mechanics.Sections;
+
+namespace MemberScan.Mechanics.Outlines;
+
+/// <summary>Where the material of a section lies, seen by a search: a chart, a lattice of nodes on it, edges and names of places.</summary>
+/// <remarks>
+/// A chart maps (p, q) to points of the section so that edges are folds: a step beyond an edge comes back inside, and a stress that is
+/// largest at an edge is a plain smooth maximum in (p, q). So one search without bounds serves inside and edge alike.
+/// </remarks>
+internal abstract class Outline
+{
+    /// <summary>Share of the largest extent within which a point counts as lying on an edge.</summary>
+    public const double OnEdge = 1e-9;
+
+    private protected Outline(CrossSection section, Lattice lattice)
+    {
+        Extent = Math.Max(section.ExtentY, section.ExtentZ);
+        Nodes = lattice;
+    }
+
+    /// <summary>Largest extent [m].</summary>
+    public double Extent { get; }
+
+    /// <summary>Nodes of the coarse search.</summary>
+    public Lattice Nodes { get; }
+
+    /// <summary>The point of the section at chart coordinates.</summary>
+    public abstract (double Y, double Z) Map(double p, double q);
+
+    /// <summary>Whether a point lies in the material or within a tolerance [m] of it.</summary>
+    public abstract bool Contains(double y, double z, double tolerance);
+
+    /// <summary>The point farthest in a direction, which need not be a unit vector but must not be zero.</summary>
+    public abstract (double Y, double Z) Farthest(double directionY, double directionZ);
+
+    /// <summary>The point of an inner edge farthest in a direction; false where there is none of interest.</summary>
+    public virtual bool TryFarthestInside(double directionY, double directionZ, out (double Y, double Z) point)
+    {
+        point = default;
+        return false;
+    }
+
+    /// <summary>Order of preference among places of equal stress: the outer edge first, the inside last.</summary>
+    public abstract int Rank(double y, double z);
+
+    /// <summary>The place in words, given what acts.</summary>
+    public abstract string NameOf(double y, double z, in SectionForces forces);
+
+    /// <summary>Points [m] and areas [m²] of a quadrature rule over the material.</summary>
+    public abstract IEnumerable<(double Y, double Z, double Area)> Quadrature();
+
+    /// <summary>The outline of a section.</summary>
+    public static Outline Of(CrossSection section) => section switch
+    {
+        Round round => new DiscOutline(round),
+        Tube tube => new AnnulusOutline(tube),
+        Rectangle rectangle => new RectangleOutline(rectangle, rectangle.Width, rectangle.Depth, 0),
+        RoundedRectangle rounded => new RectangleOutline(rounded, rounded.Width, rounded.Depth, rounded.CornerRadius),
+        Box box => new BoxOutline(box),
+        _ => throw new ArgumentOutOfRangeException(nameof(section), section.Kind, "no outline for this kind"),
+    };
+}

@@ -1,0 +1,77 @@
+using MemberScan.Mechanics.Forces;
+using MemberScan.Mechanics.Sections;
+using MemberScan.Mechanics.Series;
+
+namespace MemberScan.Mechanics.Outlines;
+
+/// <summary>A full rectangle with sharp or rounded corners. Chart: <c>z = (h/2)·sin q</c>, <c>y = w(z)·sin p</c>, w half the width at z.</summary>
+internal sealed class RectangleOutline(CrossSection section, double width, double depth, double radius)
+    : Outline(section, s_lattice)
+{
+    private const int Lines = 25;
+    private static readonly Lattice s_lattice = Lattice.Grid(
+        Lattice.Even(-Math.PI / 2, Math.PI / 2, Lines), Lattice.Even(-Math.PI / 2, Math.PI / 2, Lines), ring: false);
+
+    private readonly double _halfWidth = width / 2;
+    private readonly double _halfDepth = depth / 2;
+    private readonly double _radius = radius;
+
+    /// <inheritdoc/>
+    public override (double Y, double Z) Map(double p, double q)
+    {
+        var z = _halfDepth * Math.Sin(q);
+        return (HalfWidthAt(Math.Abs(z)) * Math.Sin(p), z);
+    }
+
+    /// <inheritdoc/>
+    public override bool Contains(double y, double z, double tolerance) =>
+        RoundedCorner.Contains(_halfWidth, _halfDepth, _radius, y, z, tolerance);
+
+    /// <inheritdoc/>
+    public override (double Y, double Z) Farthest(double directionY, double directionZ) =>
+        RoundedCorner.Farthest(_halfWidth, _halfDepth, _radius, directionY, directionZ);
+
+    /// <inheritdoc/>
+    public override int Rank(double y, double z) => RoundedCorner.Rank(_halfWidth, _halfDepth, _radius, y, z, OnEdge * Extent);
+
+    /// <inheritdoc/>
+    public override string NameOf(double y, double z, in SectionForces forces)
+    {
+        var tolerance = 1e-6 * Extent;
+        if (PlaceName.OnRectangle(y, z, _halfWidth, _halfDepth, _radius, forces, tolerance) is { } name) return name;
+
+        return double.Hypot(y, z) <= tolerance ? PlaceName.Centre : PlaceName.InsideTowards(y, z, tolerance);
+    }
+
+    /// <inheritdoc/>
+    public override IEnumerable<(double Y, double Z, double Area)> Quadrature()
+    {
+        var (flatY, flatZ) = (_halfWidth - _radius, _halfDepth - _radius);
+        foreach (var (u, wu) in GaussLegendre.UnitInterval)
+        {
+            foreach (var (v, wv) in GaussLegendre.UnitInterval)
+            {
+                foreach (var (signY, signZ) in RoundedCorner.Quadrants)
+                {
+                    yield return (signY * u * flatY, signZ * v * flatZ, wu * wv * flatY * flatZ);
+                    if (_radius == 0) continue;
+
+                    yield return (signY * (flatY + u * _radius), signZ * v * flatZ, wu * wv * _radius * flatZ);
+                    yield return (signY * u * flatY, signZ * (flatZ + v * _radius), wu * wv * flatY * _radius);
+
+                    // Quarter circle in strips: angle from the corner's horizontal, so that the strip's length is smooth.
+                    var (sin, cos) = Math.SinCos(v * Math.PI / 2);
+                    yield return (
+                        signY * (flatY + u * _radius * cos), signZ * (flatZ + _radius * sin),
+                        wu * wv * Math.PI / 2 * _radius * _radius * cos * cos);
+                }
+            }
+        }
+    }
+
+    private double HalfWidthAt(double level)
+    {
+        var rise = level - (_halfDepth - _radius);
+        return rise <= 0 ? _halfWidth : _halfWidth - _radius + Math.Sqrt(Math.Max(0, (_radius - rise) * (_radius + rise)));
+    }
+}

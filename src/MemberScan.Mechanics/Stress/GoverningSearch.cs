@@ -1,0 +1,226 @@
+using System.Buffers;
+using MemberScan.Mechanics.Forces;
+using MemberScan.Mechanics.Outlines;
+using MemberScan.Mechanics.Shear;
+
+namespace MemberScan.Mechanics.Stress;
+
+/// <summary>Finds the place of a section where a measure is largest.</summary>
+/// <remarks>
+/// All nodes of a lattice are evaluated, each peak among them that may hide the maximum is climbed on the true field, and the places
+/// that statics points at (in line with and square to the bending and shear resultants) are tried besides. Among equal places the
+/// outer edge comes first, then the larger z, then the larger y, so that the answer never hangs on rounding.
+/// </remarks>
+internal sealed class GoverningSearch(StressField field, ShearSolution shear, Outline outline)
+{
+    // Two places count as equal within this share of the target.
+    private const double Tie = 1e-9;
+
+    // A peak of the lattice below this share of the highest cannot hide the maximum: between nodes a target that is a polynomial of
+    // degree 4 along each edge or circle rises by less than 10 %.
+    private const double Worthwhile = 0.85;
+    private const int MaxPeaks = 16;
+
+    private readonly InfluenceTable _table = new(field.Properties, shear, outline);
+
+    /// <summary>The governing place; for no forces at all the centroid, or the topmost fibre where the centroid is hollow.</summary>
+    public GoverningPoint Find(in SectionForces forces, StressMeasure measure)
+    {
+        if (forces == default(SectionForces))
+        {
+            var (y, z) = outline.Contains(0, 0, 0) ? (0, 0) : outline.Farthest(0, 1);
+            return new GoverningPoint(measure, 0, y, z, default, PlaceName.Unstressed);
+        }
+
+        var best = new Choice(outline);
+        var count = _table.Points.Length;
+        var buffer = ArrayPool<double>.Shared.Rent(count);
+        try
+        {
+            var values = buffer.AsSpan(0, count);
+            _table.Evaluate(forces, measure, values);
+            Scan(forces, measure, values, ref best);
+        }
+        finally
+        {
+            ArrayPool<double>.Shared.Return(buffer);
+        }
+
+        TryNotable(forces, measure, ref best);
+        var state = field.At(forces, best.Y, best.Z);
+        return new GoverningPoint(measure, Target.Value(measure, state), best.Y, best.Z, state, Name(best.Y, best.Z, forces));
+    }
+
+    private void Scan(in SectionForces forces, StressMeasure measure, Span<double> values, ref Choice best)
+    {
+        var highest = 0.0;
+        foreach (var value in values) highest = Math.Max(highest, value);
+
+        Span<int> peaks = stackalloc int[MaxPeaks];
+        var found = 0;
+        for (var i = 0; i < values.Length; i++)
+        {
+            if (values[i] < Worthwhile * highest) continue;
+            if (values[i] >= highest * (1 - Tie)) best.Offer(values[i], _table.Points[i].Y, _table.Points[i].Z);
+            if (measure != StressMeasure.AbsoluteSigma && IsPeak(values, i)) found = Keep(peaks, found, values, i);
+        }
+
+        foreach (var node in peaks[..found]) Climb(forces, measure, node, values[node], ref best);
+    }
+
+    // On a ridge of equal nodes only the first is a peak: the others have an equal neighbour before them.
+    private bool IsPeak(Span<double> values, int node)
+    {
+        var value = values[node];
+        var neighbours = outline.Nodes.Neighbours.AsSpan(node * Lattice.NeighbourCount, Lattice.NeighbourCount);
+        foreach (var neighbour in neighbours)
+        {
+            if (neighbour < 0) continue;
+            var difference = values[neighbour] - value;
+            if (difference > 1e-12 * value || (neighbour < node && difference >= -1e-12 * value)) return false;
+        }
+
+        return true;
+    }
+
+    // The highest peaks, highest first.
+    private static int Keep(Span<int> peaks, int found, Span<double> values, int node)
+    {
+        var at = found;
+        while (at > 0 && values[peaks[at - 1]] < values[node]) at--;
+        if (at == MaxPeaks) return found;
+
+        found = Math.Min(found + 1, MaxPeaks);
+        for (var i = found - 1; i > at; i--) peaks[i] = peaks[i - 1];
+        peaks[at] = node;
+        return found;
+    }
+
+    // Newton's steps on the parabola through a stencil of nine places (three on a curve), each three times finer than the last.
+    private void Climb(in SectionForces forces, StressMeasure measure, int node, double value, ref Choice best)
+    {
+        const int MaxSteps = 12;
+        const double Coarsest = 0.6, Finest = 0.01, Refinement = 1.0 / 6, SameSpot = 1e-5;
+
+        var lattice = outline.Nodes;
+        var (p, q) = (lattice.P[node], lattice.Q[node]);
+        var isCurve = lattice.PitchQ == 0;
+        var scale = Coarsest;
+        Span<double> stencil = stackalloc double[9];
+        for (var pass = 0; pass < MaxSteps && scale >= Finest; pass++)
+        {
+            var (hp, hq) = (scale * lattice.PitchP, scale * lattice.PitchQ);
+            var top = 4;
+            stencil[4] = value;
+            for (var k = 0; k < 9; k++)
+            {
+                if (k == 4 || (isCurve && k / 3 != 1)) continue;
+                stencil[k] = At(forces, measure, p + (k % 3 - 1) * hp, q + (k / 3 - 1) * hq);
+                if (stencil[k] > stencil[top]) top = k;
+            }
+
+            var (dp, dq) = isCurve ? (Vertex(stencil[3], stencil[4], stencil[5]), 0) : Vertex(stencil);
+            var ahead = At(forces, measure, p + dp * hp, q + dq * hq);
+            if (ahead >= stencil[top])
+            {
+                (p, q, value) = (p + dp * hp, q + dq * hq, ahead);
+                if (Math.Abs(dp) < SameSpot && Math.Abs(dq) < SameSpot) break;
+                if (Math.Abs(dp) < 1 && Math.Abs(dq) < 1) scale *= Refinement;
+            }
+            else if (top == 4)
+            {
+                scale *= Refinement;
+            }
+            else
+            {
+                (p, q, value) = (p + (top % 3 - 1) * hp, q + (top / 3 - 1) * hq, stencil[top]);
+            }
+        }
+
+        var (y, z) = outline.Map(p, q);
+        best.Offer(value, y, z);
+    }
+
+    private static double Vertex(double before, double at, double after)
+    {
+        var bend = before - 2 * at + after;
+        return bend < 0 ? Math.Clamp(0.5 * (before - after) / bend, -1, 1) : 0;
+    }
+
+    // Summit of the quadratic through the stencil, in units of its step; 0 where it has none.
+    private static (double P, double Q) Vertex(ReadOnlySpan<double> f)
+    {
+        var (slopeP, slopeQ) = (0.5 * (f[5] - f[3]), 0.5 * (f[7] - f[1]));
+        var (pp, qq) = (f[3] - 2 * f[4] + f[5], f[1] - 2 * f[4] + f[7]);
+        var pq = 0.25 * (f[0] + f[8] - f[2] - f[6]);
+        var determinant = pp * qq - pq * pq;
+        if (pp >= 0 || qq >= 0 || determinant <= 1e-9 * pp * qq)
+            return (pp < 0 ? Math.Clamp(-slopeP / pp, -1, 1) : 0, qq < 0 ? Math.Clamp(-slopeQ / qq, -1, 1) : 0);
+
+        return (
+            Math.Clamp((pq * slopeQ - qq * slopeP) / determinant, -1, 1),
+            Math.Clamp((pq * slopeP - pp * slopeQ) / determinant, -1, 1));
+    }
+
+    private void TryNotable(in SectionForces forces, StressMeasure measure, ref Choice best)
+    {
+        TryAround(forces, measure, -forces.Mz / field.Properties.Iz, forces.My / field.Properties.Iy, ref best);
+        if (measure != StressMeasure.AbsoluteSigma) TryAround(forces, measure, forces.Vy, forces.Vz, ref best);
+    }
+
+    private void TryAround(in SectionForces forces, StressMeasure measure, double directionY, double directionZ, ref Choice best)
+    {
+        if (directionY == 0 && directionZ == 0) return;
+
+        for (var turn = 0; turn < 4; turn++)
+        {
+            Try(forces, measure, outline.Farthest(directionY, directionZ), ref best);
+            if (outline.TryFarthestInside(directionY, directionZ, out var inside)) Try(forces, measure, inside, ref best);
+            (directionY, directionZ) = (-directionZ, directionY);
+        }
+    }
+
+    private void Try(in SectionForces forces, StressMeasure measure, (double Y, double Z) point, ref Choice best) =>
+        best.Offer(Target.Of(measure, field.At(forces, point.Y, point.Z)), point.Y, point.Z);
+
+    private double At(in SectionForces forces, StressMeasure measure, double p, double q)
+    {
+        var (y, z) = outline.Map(p, q);
+        return Target.Of(measure, field.At(forces, y, z));
+    }
+
+    private string Name(double y, double z, in SectionForces forces) =>
+        forces.Vy == 0 && forces.Vz == 0 && forces.T == 0 && forces.My == 0 && forces.Mz == 0
+            ? PlaceName.Uniform
+            : outline.NameOf(y, z, forces);
+
+    /// <summary>The best place so far.</summary>
+    private struct Choice(Outline outline)
+    {
+        private double _highest = double.NegativeInfinity;
+        private double _value = double.NegativeInfinity;
+        private int _rank;
+
+        public double Y { get; private set; }
+
+        public double Z { get; private set; }
+
+        public void Offer(double value, double y, double z)
+        {
+            _highest = Math.Max(_highest, value);
+            var floor = _highest - Tie * Math.Abs(_highest);                       // against the highest: ties do not add up
+            if (value < floor) return;
+
+            var rank = outline.Rank(y, z);
+            if (_value < floor || IsPreferred(rank, y, z)) (_value, _rank, Y, Z) = (value, rank, y, z);
+        }
+
+        private readonly bool IsPreferred(int rank, double y, double z)
+        {
+            if (rank != _rank) return rank < _rank;
+
+            var tolerance = Outline.OnEdge * outline.Extent;
+            return Math.Abs(z - Z) > tolerance ? z > Z : y > Y;
+        }
+    }
+}

@@ -1,0 +1,55 @@
+using MemberScan.Mechanics.Forces;
+using MemberScan.Mechanics.Outlines;
+using MemberScan.Mechanics.Sections;
+using MemberScan.Mechanics.Shear;
+
+namespace MemberScan.Mechanics.Stress;
+
+/// <summary>Stresses at the nodes of a lattice: per unit of Vy, Vz and T where the shear solution is linear, else evaluated anew.</summary>
+internal sealed class InfluenceTable
+{
+    private readonly SectionProperties _properties;
+    private readonly ShearSolution _shear;
+    private readonly Unit[]? _units;
+
+    /// <summary>The table of a lattice.</summary>
+    public InfluenceTable(SectionProperties properties, ShearSolution shear, Outline outline)
+    {
+        (_properties, _shear) = (properties, shear);
+        var nodes = outline.Nodes;
+        Points = new (double, double)[nodes.Count];
+        for (var i = 0; i < Points.Length; i++) Points[i] = outline.Map(nodes.P[i], nodes.Q[i]);
+        if (shear.IsLinear)
+            _units = [.. Points.Select(at => new Unit(shear.At(1, 0, 0, at.Y, at.Z), shear.At(0, 1, 0, at.Y, at.Z), shear.At(0, 0, 1, at.Y, at.Z)))];
+    }
+
+    /// <summary>Places of the nodes [m].</summary>
+    public (double Y, double Z)[] Points { get; }
+
+    /// <summary>What is to be made largest, at every node.</summary>
+    public void Evaluate(in SectionForces forces, StressMeasure measure, Span<double> values)
+    {
+        var (n, my, mz) = (forces.N / _properties.Area, forces.My / _properties.Iy, forces.Mz / _properties.Iz);
+        var (vy, vz, t) = (forces.Vy, forces.Vz, forces.T);
+        for (var i = 0; i < values.Length; i++)
+        {
+            var (y, z) = Points[i];
+            ShearStress shear;
+            if (_units is null)
+            {
+                shear = _shear.At(vy, vz, t, y, z);
+            }
+            else
+            {
+                ref readonly var unit = ref _units[i];
+                shear = new ShearStress(
+                    vy * unit.Vy.XY + vz * unit.Vz.XY + t * unit.T.XY,
+                    vy * unit.Vy.XZ + vz * unit.Vz.XZ + t * unit.T.XZ);
+            }
+
+            values[i] = Target.Of(measure, n + my * z - mz * y, shear.XY * shear.XY + shear.XZ * shear.XZ);
+        }
+    }
+
+    private readonly record struct Unit(ShearStress Vy, ShearStress Vz, ShearStress T);
+}
