@@ -22,11 +22,11 @@ internal sealed class LandingBuilder(ModelWriter writer, string name, Transform3
     public IReadOnlyList<SampleMember> Members => _members;
 
     /// <summary>Starts the analysis model with result groups of two combinations of a permanent and an imposed case.</summary>
-    public void StartAnalysis(string serviceName, string designName)
+    public void StartAnalysis(string serviceName, string designName, string imposedName = "Q", string imposedSource = "LIVE_LOAD_Q")
     {
         _analysis = writer.StartAnalysis(AnalysisName, sharedFrame);
         var permanent = _analysis.LoadCase("G", "PERMANENT_G", "DEAD_LOAD_G");
-        var imposed = _analysis.LoadCase("Q");
+        var imposed = _analysis.LoadCase(imposedName, "VARIABLE_Q", imposedSource);
         _resultGroups[serviceName] = _analysis.ResultGroup("R " + serviceName, _analysis.LoadCombination(serviceName, "SLS", (permanent, 1), (imposed, 1)));
         _resultGroups[designName] = _analysis.ResultGroup("R " + designName, _analysis.LoadCombination(designName, "ULS", (permanent, 1.35), (imposed, 1.5)));
     }

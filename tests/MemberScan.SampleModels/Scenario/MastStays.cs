@@ -28,7 +28,7 @@ public static class MastStays
     public static SampleModel Write()
     {
         var builder = new LandingBuilder(new ModelWriter(SchemaVersion.Ifc4X3, ModelUnits.MetreNewton, Name), Name, s_foot, resultsInGlobalAxes: true);
-        builder.StartAnalysis(Service, Design);
+        builder.StartAnalysis(Service, Design, "W", "WIND_W");
         foreach (var member in Mast()) builder.Add(member);
         int[] stays = [.. Stays().Select(builder.Add)];
         foreach (var member in Arms()) builder.Add(member);
