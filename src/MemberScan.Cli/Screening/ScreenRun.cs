@@ -116,7 +116,7 @@ internal static class ScreenRun
             }
 
             files.Add(names.Report, Encoding.UTF8.GetBytes(HtmlReport.Render(outcome.Record)));
-            files.Add(names.MembersTable, Encoding.UTF8.GetBytes(MembersTable.Write(outcome.Record)));
+            files.Add(names.MembersTable, MembersTable.Write(outcome.Record));
             files.Add(names.RunRecord, RunRecord.Write(outcome.Record));
             files.Commit(outcome.CanWriteModel ? null : names.CheckedModel);
         }

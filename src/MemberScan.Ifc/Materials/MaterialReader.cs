@@ -25,6 +25,8 @@ internal sealed class MaterialReader(
     private static readonly string[] s_notCovered =
         ["concrete", "beton", "hormig", "wood", "timber", "holz", "madera", "bois", "glass", "glas", "masonry", "mauerwerk", "brick", "gypsum", "plaster"];
 
+    private static readonly char[] s_partMarks = ['/', ',', ';', ':', '|'];
+
     private readonly Dictionary<string, Grade?> _gradeOf = new(StringComparer.Ordinal);
 
     /// <summary>Profiles that the association of an object (or its type) names; empty if none.</summary>
@@ -137,14 +139,24 @@ internal sealed class MaterialReader(
     private static bool IsNotCovered(MaterialFacts material) => material.IsConcreteByProperties
         || Array.Exists(s_notCovered, word => material.Name.Contains(word, StringComparison.OrdinalIgnoreCase) || material.Category.Contains(word, StringComparison.OrdinalIgnoreCase));
 
+    /// <summary>The grade that a name stands for: the whole name, else the one grade among its parts (<c>STEEL/S235JR</c>).</summary>
     private Grade? GradeOf(string name)
     {
         if (name.Length is 0 or > 200) return null;
         if (_gradeOf.TryGetValue(name, out var known)) return known;
 
-        return _gradeOf[name] = rules.Grades.FirstOrDefault(grade =>
-            Regex.IsMatch(name, $"^(?:{grade.Pattern})$", RegexOptions.IgnoreCase | RegexOptions.CultureInvariant, TimeSpan.FromMilliseconds(100)));
+        var grade = Matching(name);
+        if (grade is null)
+        {
+            var parts = name.Split(s_partMarks, StringSplitOptions.RemoveEmptyEntries | StringSplitOptions.TrimEntries).Select(Matching).OfType<Grade>().Distinct().ToList();
+            if (parts.Count == 1) grade = parts[0];
+        }
+
+        return _gradeOf[name] = grade;
     }
+
+    private Grade? Matching(string name) => rules.Grades.FirstOrDefault(grade =>
+        Regex.IsMatch(name, $"^(?:{grade.Pattern})$", RegexOptions.IgnoreCase | RegexOptions.CultureInvariant, TimeSpan.FromMilliseconds(100)));
 
     /// <summary>Material definitions of the occurrence, then of its type.</summary>
     private IEnumerable<Part21Record> Associated(ulong id)

@@ -66,7 +66,7 @@ internal sealed class MemberReader(
         var toProject = placed is Finding<Transform3>.Found found ? found.Value : Transform3.Identity;
         var read = record.IsDamaged ? [] : bodies.Read(record[6], toProject);
         var bars = read.OfType<Finding<BarBody>.Found>().ToList();
-        var isCandidate = isAlways || bars.Exists(b => b.Value.IsBarLike)
+        var isCandidate = isAlways || bars.Exists(b => b.Value.IsBarLike) || read.Any(IsUnreadSweep)
             || relations.AnalyticalOf(record.Id).Count > 0 || relations.ActivitiesOn(record.Id).Count > 0 || isNamed(element);
         if (!isCandidate)
         {
@@ -89,6 +89,13 @@ internal sealed class MemberReader(
             members.Add(WithoutBar(record, element, key, read));
         }
     }
+
+    /// <summary>Whether a body is a sweep of a covered section that could not be read to its end: it may be a bar, so it is not passed over.</summary>
+    private static bool IsUnreadSweep(Finding<BarBody> body) => body is Finding<BarBody>.Missing
+    {
+        Why.Code: ReasonCode.LengthAmbiguous or ReasonCode.SectionInvalid or ReasonCode.WallOverRadius
+            or ReasonCode.UnitMissing or ReasonCode.PlacementNotSupported or ReasonCode.DamagedRecord,
+    };
 
     private Member FromBar(
         Part21Record record, ElementIdentity element, string key, int number, int count, Finding<BarBody>.Found bar,

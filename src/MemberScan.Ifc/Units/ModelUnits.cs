@@ -78,7 +78,7 @@ public sealed class ModelUnits
     private static void Add(Dictionary<string, ModelUnit> units, Part21Record unit, UnitReader reader, DiagnosticList diagnostics)
     {
         var type = Instances.Literal(unit[1]);
-        if (type.Length == 0 || unit.Keyword == "IFCMONETARYUNIT") return;
+        if (type.Length == 0 || type == "USERDEFINED" || unit.Keyword == "IFCMONETARYUNIT") return;
 
         if (units.ContainsKey(type))
         {
