@@ -7,27 +7,33 @@ public static class NearestName
     public const int LongestName = 64;
 
     private const int LongestList = 12;
+    private const int ShortestBeginning = 4;
 
     /// <summary>The known name nearest to the given one by edit distance, without regard to case.</summary>
     /// <param name="given">The name as written.</param>
     /// <param name="known">The right names; the first of equally near ones wins.</param>
-    /// <returns>The name, or null when none is near: one edit up to four letters, a third of the letters beyond.</returns>
+    /// <returns>
+    /// The name, or null when none is near: one edit up to four letters, a third of the letters beyond; failing that, the one
+    /// name that begins so, from four letters on.
+    /// </returns>
     public static string? Of(string given, IEnumerable<string> known)
     {
         ArgumentNullException.ThrowIfNull(given);
         ArgumentNullException.ThrowIfNull(known);
         if (given.Length is 0 or > LongestName) return null;
 
-        string? nearest = null;
-        var least = int.MaxValue;
+        string? nearest = null, begun = null;
+        var (least, beginnings) = (int.MaxValue, 0);
         foreach (var name in known)
         {
+            if (given.Length >= ShortestBeginning && name.StartsWith(given, StringComparison.OrdinalIgnoreCase)) (begun, beginnings) = (name, beginnings + 1);
+
             var distance = Distance(given.ToLowerInvariant(), name.ToLowerInvariant());
             if (distance > Reach(Math.Max(given.Length, name.Length)) || distance >= least) continue;
             (nearest, least) = (name, distance);
         }
 
-        return nearest;
+        return nearest ?? (beginnings == 1 ? begun : null);
     }
 
     /// <summary>The clause that follows "'…' is not a …;": the nearest name as a question, else the list of right names.</summary>

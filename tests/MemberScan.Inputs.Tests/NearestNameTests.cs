@@ -10,6 +10,7 @@ public sealed class NearestNameTests
     [InlineData("rectangel", "rectangle")]
     [InlineData("bxo", "box")]
     [InlineData("ruond", "round")]
+    [InlineData("rect", "rectangle")]
     public void A_slip_of_the_pen_finds_its_name(string given, string expected)
     {
         Assert.Equal(expected, NearestName.Of(given, s_kinds));

@@ -122,7 +122,7 @@ public sealed class ForcesTableTests
         { Rows("\"A\"x,B,,0,0,0,0,0,0,0"), "INP-0017", 2, 4, "text follows the closing quote of a field; double the quotes inside a quoted field" },
         { Rows("A\"x,B,,0,0,0,0,0,0,0"), "INP-0017", 2, 2, "a quote stands inside an unquoted field; put the whole field in quotes and double those inside" },
         { Rows("A,B,,0,0,0,0,0,0,0\rC,B,,0,0,0,0,0,0,0"), "INP-0018", 2, 19, "a carriage return stands without a line feed; save the table with line ends CR LF or LF" },
-        { "# convention: positive\n" + Rows("A,B,,0,0,0,0,0,0,0"), "INP-0019", 1, 1, "'positive' is not a value of the directive 'convention'; known are positive-face, end-forces" },
+        { "# convention: positive\n" + Rows("A,B,,0,0,0,0,0,0,0"), "INP-0019", 1, 1, "'positive' is not a value of the directive 'convention'; did you mean 'positive-face'?" },
         { "# torsion: shear-center\n" + Rows("A,B,,0,0,0,0,0,0,0"), "INP-0019", 1, 1, "'shear-center' is not a value of the directive 'torsion'; did you mean 'shear-centre'?" },
         { "# situation: load-cases\n" + Rows("A,B,,0,0,0,0,0,0,0"), "INP-0019", 1, 1, "'situation' is not a directive; did you mean 'situations'? A remark may not look like one" },
         { "# torsion: centroid\n# torsion: shear-centre\n" + Rows("A,B,,0,0,0,0,0,0,0"), "INP-0020", 2, 1, "the directive 'torsion' says shear-centre here and centroid above; keep one of the two" },
