@@ -8,7 +8,7 @@ namespace MemberScan.Inputs.Json;
 internal static class StrictJson
 {
     /// <summary>Largest file that is read [bytes].</summary>
-    public const int LargestFile = 16 * 1024 * 1024;
+    public const int LargestFile = 1024 * 1024;
 
     /// <summary>Deepest nesting of objects and lists.</summary>
     public const int DeepestNesting = 16;
@@ -18,7 +18,7 @@ internal static class StrictJson
     {
         if (source.Bytes.Length > LargestFile)
         {
-            source.Fail(InputCodes.SettingsLimit, 0, $"the file is larger than {LargestFile / (1024 * 1024)} MiB; settings are not that long");
+            source.Fail(InputCodes.SettingsLimit, 0, $"the file is larger than {LargestFile / 1024} KiB; take out what is not a setting");
             return null;
         }
 

@@ -27,7 +27,7 @@ internal static class GradePattern
         }
         catch (NotSupportedException)
         {
-            return "it looks around or back, which takes unbounded time; leave that out";
+            return "it looks around or back, or repeats too much, for a bounded time; simplify it";
         }
     }
 }

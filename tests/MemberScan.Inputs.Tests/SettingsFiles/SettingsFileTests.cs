@@ -141,7 +141,7 @@ public sealed class SettingsFileTests
         { "{\"materials\": {\"grades\": [" + Grade("[{\"yield\": \"235 MPa\"}]", "[]") + "]}}", "INP-0109", 1, 87, "materials.grades[1].yields is empty; give at least one yield strength" },
         { "{\"materials\": {\"grades\": [" + Grade("S9", "S(9") + "]}}", "INP-0110", 1, 52, "materials.grades[1].pattern: it is not a regular expression (InsufficientClosingParentheses after 3 characters); mend it" },
         { "{\"materials\": {\"grades\": [" + Grade("S9", "a)|(b") + "]}}", "INP-0110", 1, 52, "materials.grades[1].pattern: it is not a regular expression (InsufficientOpeningParentheses after 2 characters); mend it" },
-        { "{\"materials\": {\"grades\": [" + Grade("S9", "(?=S)S9") + "]}}", "INP-0110", 1, 52, "materials.grades[1].pattern: it looks around or back, which takes unbounded time; leave that out" },
+        { "{\"materials\": {\"grades\": [" + Grade("S9", "(?=S)S9") + "]}}", "INP-0110", 1, 52, "materials.grades[1].pattern: it looks around or back, or repeats too much, for a bounded time; simplify it" },
         { "{\"materials\": {\"grades\": [" + Grade("S9", ".*") + "]}}", "INP-0110", 1, 52, "materials.grades[1].pattern: it fits the empty name; let it demand at least one letter" },
         { "{\"candidates\": {\"always\": [\"IfcBeam\", \"ifcbeam\"]}}", "INP-0112", 1, 39, "'ifcbeam' stands in candidates.always already; keep it once" },
         { "{\"candidates\": {\"always\": [\"IfcBeam\"], \"withBarBodyOrForces\": [\"IfcBeam\"]}}", "INP-0112", 1, 64, "'IfcBeam' stands in candidates.always already; keep it once" },
@@ -174,6 +174,19 @@ public sealed class SettingsFileTests
         _ = SettingsFile.Read("{\"display\": \"x\",\n\"basis\": {\"service\": {\"omega\": 0}},\n\"nope\": 1}"u8.ToArray(), "s.json", diagnostics);
 
         Assert.Equal(["INP-0102", "INP-0105", "INP-0106"], diagnostics.Items.Select(found => found.Code).Order());
+    }
+
+    [Fact]
+    public void Only_the_first_50_errors_are_told_and_a_note_says_so()
+    {
+        var diagnostics = new DiagnosticList();
+        var keys = string.Join(",\n", Enumerable.Range(1, 60).Select(i => $"\"wrong{i}\": 1"));
+
+        var settings = SettingsFile.Read(Encoding.UTF8.GetBytes($"{{{keys}}}"), "s.json", diagnostics);
+
+        Assert.Null(settings);
+        Assert.Equal(JsonSource.MostErrors, diagnostics.Items.Count(found => found.Severity == Severity.Error));
+        Assert.Equal("INP-0023", diagnostics.Items[^1].Code);
     }
 
     [Fact]
