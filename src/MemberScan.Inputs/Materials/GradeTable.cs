@@ -1,0 +1,66 @@
+using System.Collections.Immutable;
+using System.Text.RegularExpressions;
+using MemberScan.Foundation.Diagnostics;
+using MemberScan.Inputs.Json;
+using MemberScan.Model.Rules;
+
+namespace MemberScan.Inputs.Materials;
+
+/// <summary>Material grades, found by the name that a model gives its material.</summary>
+public sealed class GradeTable
+{
+    /// <summary>Longer names are looked up by nobody [characters].</summary>
+    public const int LongestName = 256;
+
+    private static readonly Lazy<GradeTable> s_shipped = new(ReadShipped);
+
+    private readonly ImmutableArray<Regex> _patterns;
+
+    /// <summary>A table of grades, tried in their order.</summary>
+    /// <exception cref="ArgumentException">A pattern is not a regular expression.</exception>
+    public GradeTable(ImmutableArray<Grade> grades)
+    {
+        Grades = grades;
+        _patterns = [.. grades.Select(grade => GradePattern.Whole(grade.Pattern))];
+    }
+
+    /// <summary>The table in <c>config/materials/grades.json</c>, embedded in the program; every value is marked as from memory.</summary>
+    public static GradeTable Shipped => s_shipped.Value;
+
+    /// <summary>The grades, in the order of trial.</summary>
+    public ImmutableArray<Grade> Grades { get; }
+
+    /// <summary>The first grade whose pattern fits the whole name, without regard to case; null when none does.</summary>
+    /// <remarks>A plain word such as <c>Steel</c> names no grade.</remarks>
+    public Grade? Find(string materialName)
+    {
+        ArgumentNullException.ThrowIfNull(materialName);
+        var name = materialName.Trim();
+        if (name.Length is 0 or > LongestName) return null;
+
+        for (var i = 0; i < Grades.Length; i++)
+            if (_patterns[i].IsMatch(name)) return Grades[i];
+        return null;
+    }
+
+    internal static ImmutableArray<Grade> Read(ReadOnlyMemory<byte> bytes, string fileName, DiagnosticList diagnostics)
+    {
+        var source = new JsonSource(bytes, fileName, diagnostics);
+        if (StrictJson.Read(source) is not { } root) return [];
+
+        var values = new JsonValues(source);
+        var grades = ImmutableArray<Grade>.Empty;
+        _ = values.Has(root, "the file", "grades");
+        foreach (var (_, _, list) in values.Object(root, "", ["grades"])) grades = GradeReader.Read(list, "grades", values);
+        return grades;
+    }
+
+    private static GradeTable ReadShipped()
+    {
+        var diagnostics = new DiagnosticList();
+        var grades = Read(ShippedFiles.Read(ShippedFiles.Grades), ShippedFiles.Grades, diagnostics);
+        return diagnostics.HasErrors
+            ? throw new InvalidOperationException($"the shipped grades are damaged: {diagnostics.Items[0]}")
+            : new GradeTable(grades);
+    }
+}

@@ -1,0 +1,11 @@
+namespace MemberScan.Inputs.SettingsFiles;
+
+/// <summary>Units in which results are shown.</summary>
+public enum DisplayUnits
+{
+    /// <summary>mm, kN, kN·m, MPa.</summary>
+    Si,
+
+    /// <summary>in, kip, kip·in, ksi.</summary>
+    Us,
+}

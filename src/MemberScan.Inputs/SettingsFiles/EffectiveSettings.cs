@@ -1,0 +1,89 @@
+using System.Collections.Immutable;
+using System.Globalization;
+using System.Text.Encodings.Web;
+using System.Text.Json;
+using MemberScan.Foundation.Units;
+using MemberScan.Inputs.Materials;
+using MemberScan.Model.Forces;
+using MemberScan.Model.Limits;
+using MemberScan.Model.Rules;
+
+namespace MemberScan.Inputs.SettingsFiles;
+
+/// <summary>Lays settings out as lines of key and canonical text: numbers in shortest round-trip form, free text in quotes, maps in ordinal order.</summary>
+internal static class EffectiveSettings
+{
+    private const string None = "none";
+
+    public static ImmutableArray<EffectiveSetting> Of(Settings settings)
+    {
+        var lines = ImmutableArray.CreateBuilder<EffectiveSetting>();
+        var forces = settings.Reading.Forces;
+        AddLimit("basis.service", "omega", settings.Basis.Service, SettingKeys.ServiceCriteria);
+        AddLimit("basis.design", "gammaM0", settings.Basis.Design, SettingKeys.DesignCriteria);
+        Add("candidates.always", Listed(settings.Reading.Candidates.Always));
+        Add("candidates.withBarBodyOrForces", Listed(settings.Reading.Candidates.WithBarBodyOrForces));
+        Add("forces.convention", SettingKeys.Conventions.WordOf(forces.Convention));
+        Add("forces.components", SettingKeys.Components.WordOf(forces.Components));
+        Add("forces.turnDegrees", Number(forces.TurnDegrees));
+        AddAll("forces.turnDegreesByMember", forces.TurnDegreesByMember.OrderBy(turn => turn.Key, StringComparer.Ordinal)
+            .Select(turn => ($"[{Quoted(turn.Key)}]", Number(turn.Value))));
+        Add("forces.missingComponents", SettingKeys.MissingComponents.WordOf(forces.MissingComponentsAreZero));
+        Add("forces.unknownMembers", SettingKeys.UnknownMembers.WordOf(forces.ListUnknownMembers));
+        AddAll("forces.kinds", forces.Kinds.Select((kind, i) => ($"[{i + 1}]", $"{Quoted(kind.Pattern)} {SettingKeys.Kinds.WordOf(kind.Kind)}")));
+        lines.Add(new EffectiveSetting("forces.kindOfAll", KindOfAll(forces.KindOfAll), forces.KindOfAll == SituationKind.Unknown));
+        foreach (var type in SettingKeys.UnitTypes)
+            Add($"units.{type}", settings.Reading.MissingUnits.TryGetValue(type, out var factor) ? $"{Number(factor)} {SiUnit(type)}" : None);
+        AddAll("materials.grades", settings.Reading.Grades.Where(grade => !GradeTable.Shipped.Grades.Contains(grade))
+            .Select((grade, i) => ($"[{i + 1}]", OfGrade(grade))));
+        Add("materials.poisson", Number(settings.Reading.DefaultPoisson));
+        Add("stability.lengthFactor", Number(settings.LengthFactor));
+        Add("display", SettingKeys.Displays.WordOf(settings.Display));
+        return lines.ToImmutable();
+
+        void Add(string key, string value) => lines.Add(new EffectiveSetting(key, value, !settings.Given.Contains(key)));
+
+        void AddLimit(string key, string factor, StressLimit? limit, WordTable<Criterion> criteria)
+        {
+            if (limit is null)
+            {
+                Add(key, None);
+                return;
+            }
+
+            Add($"{key}.criterion", criteria.WordOf(limit.Criterion));
+            Add($"{key}.{factor}", Number(limit.Factor));
+        }
+
+        void AddAll(string key, IEnumerable<(string Suffix, string Value)> entries)
+        {
+            var count = lines.Count;
+            foreach (var (suffix, value) in entries) lines.Add(new EffectiveSetting(key + suffix, value, !settings.Given.Contains(key)));
+            if (lines.Count == count) Add(key, None);
+        }
+    }
+
+    private static string OfGrade(Grade grade)
+    {
+        var yields = string.Join(", ", grade.Yields.Select(range =>
+            (double.IsInfinity(range.UpTo) ? "" : $"up to {Number(range.UpTo)} m ") + $"{Number(range.Yield)} Pa"));
+        return $"{Quoted(grade.Name)}, pattern {Quoted(grade.Pattern)}, {Quoted(grade.Standard)}, {yields}, E {Number(grade.Modulus)} Pa, "
+            + $"ν {Number(grade.Poisson)}, {(grade.IsSteel ? "steel" : "no steel")}{(grade.FromMemory ? ", from memory" : "")}";
+    }
+
+    private static string Listed(ImmutableArray<string> names) => names.IsEmpty ? None : string.Join(", ", names);
+
+    private static string KindOfAll(SituationKind kind) => kind == SituationKind.Unknown ? None : SettingKeys.Kinds.WordOf(kind);
+
+    private static string SiUnit(string type) => SettingKeys.UnitQuantities[type] switch
+    {
+        Quantity.Length => "m",
+        Quantity.Force => "N",
+        Quantity.Moment => "N·m",
+        _ => "Pa",
+    };
+
+    private static string Number(double value) => value.ToString("R", CultureInfo.InvariantCulture);
+
+    private static string Quoted(string text) => $"\"{JsonEncodedText.Encode(text, JavaScriptEncoder.UnsafeRelaxedJsonEscaping)}\"";
+}

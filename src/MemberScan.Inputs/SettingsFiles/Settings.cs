@@ -1,0 +1,32 @@
+using System.Collections.Immutable;
+using MemberScan.Model.Limits;
+using MemberScan.Model.Rules;
+
+namespace MemberScan.Inputs.SettingsFiles;
+
+/// <summary>Everything that a reviewer may set for a run.</summary>
+public sealed record Settings
+{
+    private static readonly Lazy<Settings> s_default = new(SettingsFile.ReadShipped);
+
+    /// <summary>The shipped default settings, none of them given.</summary>
+    public static Settings Default => s_default.Value;
+
+    /// <summary>The limits.</summary>
+    public required Basis Basis { get; init; }
+
+    /// <summary>How models and tables are read; its grades are those of the settings, then the shipped ones.</summary>
+    public required ReadingRules Reading { get; init; }
+
+    /// <summary>Buckling length over member length, for the rule of 4 % of the Euler load [-], in [0.5, 100].</summary>
+    public required double LengthFactor { get; init; }
+
+    /// <summary>Units in which results are shown.</summary>
+    public required DisplayUnits Display { get; init; }
+
+    /// <summary>Keys that were given; the others are in force as defaults.</summary>
+    public required ImmutableHashSet<string> Given { get; init; }
+
+    /// <summary>Every setting in force, in a stable order and as canonical text; computed anew from the values at each call.</summary>
+    public ImmutableArray<EffectiveSetting> Effective => EffectiveSettings.Of(this);
+}

@@ -1,0 +1,164 @@
+using System.Collections.Frozen;
+using System.Collections.Immutable;
+using System.Text.Json;
+using MemberScan.Inputs.Json;
+using MemberScan.Inputs.Materials;
+using MemberScan.Inputs.Values;
+using MemberScan.Model.Limits;
+using MemberScan.Model.Rules;
+
+namespace MemberScan.Inputs.SettingsFiles;
+
+/// <summary>Turns the JSON of a settings file into settings, beginning with the defaults.</summary>
+internal sealed class SettingsReader(JsonValues values)
+{
+    /// <summary>Buckling length over member length of a cantilever: the cautious choice for a rail post or bracket [-].</summary>
+    public const double DefaultLengthFactor = 2.0;
+
+    private readonly ImmutableHashSet<string>.Builder _given = ImmutableHashSet.CreateBuilder<string>(StringComparer.Ordinal);
+    private Basis _basis = Basis.Default;
+    private ReadingRules _reading = new() { Grades = GradeTable.Shipped.Grades };
+    private double _lengthFactor = DefaultLengthFactor;
+    private DisplayUnits _display = DisplayUnits.Si;
+
+    /// <summary>Reads the settings; of meaning only when no error was added.</summary>
+    public Settings Read(JsonItem root)
+    {
+        foreach (var (key, _, item) in values.Object(root, "", SettingKeys.Root))
+        {
+            switch (key)
+            {
+                case "$schema": _ = values.Text(item, key); break;
+                case "basis": ReadBasis(item); break;
+                case "candidates": ReadCandidates(item); break;
+                case "forces": _reading = _reading with { Forces = new ForceRulesReader(values, _given).Read(item, _reading.Forces) }; break;
+                case "units": ReadUnits(item); break;
+                case "materials": ReadMaterials(item); break;
+                case "stability": ReadStability(item); break;
+                default: _display = Choose(item, key, SettingKeys.Displays, _display); break;
+            }
+        }
+
+        return new Settings { Basis = _basis, Reading = _reading, LengthFactor = _lengthFactor, Display = _display, Given = _given.ToImmutable() };
+    }
+
+    private void ReadBasis(JsonItem item)
+    {
+        foreach (var (key, _, value) in values.Object(item, "basis", SettingKeys.Basis))
+        {
+            _basis = key == "service"
+                ? _basis with { Service = Limit(value, "basis.service", Basis.Default.Service!, SettingKeys.Service, SettingKeys.ServiceCriteria) }
+                : _basis with { Design = Limit(value, "basis.design", Basis.Default.Design!, SettingKeys.Design, SettingKeys.DesignCriteria) };
+        }
+    }
+
+    // Null switches the limit off: situations of that kind are then not checked.
+    private StressLimit? Limit(JsonItem item, string path, StressLimit limit, ImmutableArray<string> keys, WordTable<Criterion> criteria)
+    {
+        if (item.Kind == JsonValueKind.Null)
+        {
+            _given.Add(path);
+            return null;
+        }
+
+        foreach (var (key, _, value) in values.Object(item, path, keys))
+        {
+            limit = key == "criterion"
+                ? limit with { Criterion = Choose(value, $"{path}.{key}", criteria, limit.Criterion) }
+                : limit with { Factor = Number(value, $"{path}.{key}", SettingKeys.Factor, limit.Factor) };
+        }
+
+        return limit;
+    }
+
+    private void ReadCandidates(JsonItem item)
+    {
+        var seen = new Dictionary<string, string>(StringComparer.OrdinalIgnoreCase);
+        var rules = _reading.Candidates;
+        foreach (var (key, _, list) in values.Object(item, "candidates", SettingKeys.Candidates))
+        {
+            var path = $"candidates.{key}";
+            var names = ClassNames(list, path, seen);
+            rules = key == "always" ? rules with { Always = names } : rules with { WithBarBodyOrForces = names };
+            _given.Add(path);
+        }
+
+        // A class given in one list leaves the default of the other.
+        if (!_given.Contains("candidates.always")) rules = rules with { Always = [.. rules.Always.Where(name => !seen.ContainsKey(name))] };
+        if (!_given.Contains("candidates.withBarBodyOrForces"))
+            rules = rules with { WithBarBodyOrForces = [.. rules.WithBarBodyOrForces.Where(name => !seen.ContainsKey(name))] };
+        _reading = _reading with { Candidates = rules };
+    }
+
+    private ImmutableArray<string> ClassNames(JsonItem list, string path, Dictionary<string, string> seen)
+    {
+        var known = CandidateRules.Default.Always.Concat(CandidateRules.Default.WithBarBodyOrForces).ToArray();
+        var names = ImmutableArray.CreateBuilder<string>();
+        foreach (var item in values.List(list, path))
+        {
+            if (values.Text(item, path) is not { } name) continue;
+            if (name.Length < 4 || !name.StartsWith("Ifc", StringComparison.OrdinalIgnoreCase) || !name.All(char.IsAsciiLetterOrDigit))
+                values.Fail(InputCodes.WordUnknown, item, $"{Excerpt.Of(name)} in {path} is not a class name; {Near(name, known)}");
+            else if (!seen.TryAdd(name, path))
+                values.Fail(InputCodes.EntryDoubled, item, $"{Excerpt.Of(name)} stands in {seen[name]} already; keep it once");
+            else
+                names.Add(name);
+        }
+
+        return names.ToImmutable();
+    }
+
+    private static string Near(string name, string[] known) => NearestName.Of(name, known) is { } nearest
+        ? $"did you mean '{nearest}'?"
+        : "write it as the schema does, such as IfcMember";
+
+    private void ReadUnits(JsonItem item)
+    {
+        var factors = new Dictionary<string, double>(StringComparer.Ordinal);
+        foreach (var (key, _, value) in values.Object(item, "units", SettingKeys.UnitTypes))
+        {
+            if (values.Text(value, $"units.{key}") is not { } symbol) continue;
+            if (UnitText.TryRead(symbol, SettingKeys.UnitQuantities[key], out var unit, out var error)) factors[key] = unit.Factor;
+            else values.Fail(InputCodes.ValueUnit, value, $"units.{key}: {error}");
+            _given.Add($"units.{key}");
+        }
+
+        _reading = _reading with { MissingUnits = factors.ToFrozenDictionary(StringComparer.Ordinal) };
+    }
+
+    private void ReadMaterials(JsonItem item)
+    {
+        foreach (var (key, _, value) in values.Object(item, "materials", SettingKeys.Materials))
+        {
+            var path = $"materials.{key}";
+            if (key == "grades")
+            {
+                _reading = _reading with { Grades = [.. GradeReader.Read(value, path, values), .. GradeTable.Shipped.Grades] };
+                _given.Add(path);
+            }
+            else
+            {
+                _reading = _reading with { DefaultPoisson = Number(value, path, (0, GradeReader.LargestPoisson), _reading.DefaultPoisson) };
+            }
+        }
+    }
+
+    private void ReadStability(JsonItem item)
+    {
+        foreach (var (key, _, value) in values.Object(item, "stability", SettingKeys.Stability))
+            _lengthFactor = Number(value, $"stability.{key}", SettingKeys.LengthFactor, _lengthFactor);
+    }
+
+    private double Number(JsonItem item, string path, (double Least, double Most) range, double otherwise)
+    {
+        _given.Add(path);
+        return values.Number(item, path, range.Least, range.Most) ?? otherwise;
+    }
+
+    private T Choose<T>(JsonItem item, string path, WordTable<T> table, T otherwise)
+        where T : struct
+    {
+        _given.Add(path);
+        return values.Word(item, path, table.Words) is { } word ? table.Of(word) : otherwise;
+    }
+}

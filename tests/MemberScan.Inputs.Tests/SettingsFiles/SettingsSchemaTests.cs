@@ -1,0 +1,123 @@
+using System.Text.Json;
+using MemberScan.Foundation.Diagnostics;
+using MemberScan.Foundation.Units;
+using MemberScan.Inputs.Materials;
+using MemberScan.Inputs.SettingsFiles;
+
+namespace MemberScan.Inputs.Tests.SettingsFiles;
+
+public sealed class SettingsSchemaTests
+{
+    private static readonly JsonDocumentOptions s_lenient = new() { CommentHandling = JsonCommentHandling.Skip, AllowTrailingCommas = true };
+    private readonly JsonElement _schema = JsonDocument.Parse(ShippedFiles.Read(ShippedFiles.SettingsSchema)).RootElement;
+
+    [Fact]
+    public void The_schema_has_the_keys_that_the_reader_knows()
+    {
+        Assert.Equal(SettingKeys.Root, Keys());
+        Assert.Equal(SettingKeys.Basis, Keys("basis"));
+        Assert.Equal(SettingKeys.Service, Keys("basis", "service"));
+        Assert.Equal(SettingKeys.Design, Keys("basis", "design"));
+        Assert.Equal(SettingKeys.Candidates, Keys("candidates"));
+        Assert.Equal(SettingKeys.Forces, Keys("forces"));
+        Assert.Equal(SettingKeys.KindEntry, Keys("forces", "kinds"));
+        Assert.Equal(SettingKeys.UnitTypes, Keys("units"));
+        Assert.Equal(SettingKeys.Materials, Keys("materials"));
+        Assert.Equal(GradeReader.Keys, Keys("materials", "grades"));
+        Assert.Equal(GradeReader.YieldKeys, Keys("materials", "grades", "yields"));
+        Assert.Equal(SettingKeys.Stability, Keys("stability"));
+    }
+
+    [Fact]
+    public void The_schema_has_the_words_that_the_reader_knows()
+    {
+        Assert.Equal(SettingKeys.ServiceCriteria.Words, Words("basis", "service", "criterion"));
+        Assert.Equal(SettingKeys.DesignCriteria.Words, Words("basis", "design", "criterion"));
+        Assert.Equal(SettingKeys.Conventions.Words, Words("forces", "convention"));
+        Assert.Equal(SettingKeys.Components.Words, Words("forces", "components"));
+        Assert.Equal(SettingKeys.MissingComponents.Words, Words("forces", "missingComponents"));
+        Assert.Equal(SettingKeys.UnknownMembers.Words, Words("forces", "unknownMembers"));
+        Assert.Equal(SettingKeys.Kinds.Words, Words("forces", "kinds", "kind"));
+        Assert.Equal(SettingKeys.Displays.Words, Words("display"));
+        foreach (var type in SettingKeys.UnitTypes) Assert.Equal(Unit.SymbolsOf(SettingKeys.UnitQuantities[type]), Words("units", type));
+    }
+
+    [Fact]
+    public void The_schema_has_the_ranges_that_the_reader_knows()
+    {
+        Assert.Equal(SettingKeys.Factor, Range(At("basis", "service", "omega")));
+        Assert.Equal(SettingKeys.Factor, Range(At("basis", "design", "gammaM0")));
+        Assert.Equal(SettingKeys.Turn, Range(At("forces", "turnDegrees")));
+        Assert.Equal(SettingKeys.Turn, Range(At("forces", "turnDegreesByMember").GetProperty("additionalProperties")));
+        Assert.Equal((0, GradeReader.LargestPoisson), Range(At("materials", "poisson")));
+        Assert.Equal((0, GradeReader.LargestPoisson), Range(At("materials", "grades", "poisson")));
+        Assert.Equal(SettingKeys.LengthFactor, Range(At("stability", "lengthFactor")));
+    }
+
+    [Fact]
+    public void Every_object_is_closed_and_every_key_described()
+    {
+        foreach (var node in All(_schema))
+        {
+            if (node.TryGetProperty("properties", out var properties))
+            {
+                Assert.False(node.GetProperty("additionalProperties").GetBoolean());
+                Assert.All(properties.EnumerateObject(), key => Assert.NotEmpty(key.Value.GetProperty("description").GetString()!));
+            }
+        }
+    }
+
+    [Fact]
+    public void The_defaults_of_the_schema_are_those_of_the_shipped_settings()
+    {
+        using var shipped = JsonDocument.Parse(ShippedFiles.Read(ShippedFiles.DefaultSettings), s_lenient);
+
+        AssertDefaults(_schema, shipped.RootElement);
+    }
+
+    [Fact]
+    public void The_shipped_settings_give_every_key()
+    {
+        var diagnostics = new DiagnosticList();
+        using var shipped = JsonDocument.Parse(ShippedFiles.Read(ShippedFiles.DefaultSettings), s_lenient);
+
+        var settings = SettingsFile.Read(ShippedFiles.Read(ShippedFiles.DefaultSettings), "settings.default.json", diagnostics)!;
+
+        Assert.Empty(diagnostics.Items);
+        Assert.Equal(SettingKeys.Root.Order(), shipped.RootElement.EnumerateObject().Select(key => key.Name).Order());
+        Assert.Equal(["forces.kindOfAll", "units.FORCEUNIT", "units.LENGTHUNIT", "units.MODULUSOFELASTICITYUNIT", "units.PRESSUREUNIT", "units.TORQUEUNIT"],
+            settings.Effective.Where(line => line.IsDefault).Select(line => line.Key).Order());
+    }
+
+    private static void AssertDefaults(JsonElement schema, JsonElement value)
+    {
+        if (schema.TryGetProperty("default", out var standard))
+            Assert.True(JsonElement.DeepEquals(standard, value) || SameNumber(standard, value), $"{standard} against {value}");
+        if (value.ValueKind != JsonValueKind.Object || !schema.TryGetProperty("properties", out var properties)) return;
+        foreach (var key in value.EnumerateObject()) AssertDefaults(properties.GetProperty(key.Name), key.Value);
+    }
+
+    private static bool SameNumber(JsonElement a, JsonElement b) =>
+        a.ValueKind == JsonValueKind.Number && b.ValueKind == JsonValueKind.Number && a.GetDouble().Equals(b.GetDouble());
+
+    private static IEnumerable<JsonElement> All(JsonElement node) => node.ValueKind switch
+    {
+        JsonValueKind.Object => node.EnumerateObject().SelectMany(key => All(key.Value)).Prepend(node),
+        JsonValueKind.Array => node.EnumerateArray().SelectMany(All),
+        _ => [],
+    };
+
+    private IEnumerable<string> Keys(params string[] path) =>
+        Inside(At(path)).GetProperty("properties").EnumerateObject().Select(key => key.Name);
+
+    private IEnumerable<string> Words(params string[] path) => At(path).GetProperty("enum").EnumerateArray().Select(word => word.GetString()!);
+
+    private static (double Least, double Most) Range(JsonElement node) =>
+        (node.GetProperty("minimum").GetDouble(), node.GetProperty("maximum").GetDouble());
+
+    private JsonElement At(params string[] path) =>
+        path.Aggregate(_schema, (node, key) => Inside(node).GetProperty("properties").GetProperty(key));
+
+    // A list's keys are those of its items.
+    private static JsonElement Inside(JsonElement node) => node.TryGetProperty("items", out var items) ? items : node;
+}
