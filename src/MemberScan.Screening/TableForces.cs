@@ -4,7 +4,6 @@ using System.Globalization;
 using MemberScan.Foundation.Diagnostics;
 using MemberScan.Inputs.ForcesTables;
 using MemberScan.Mechanics.Forces;
-using MemberScan.Model;
 using MemberScan.Model.Forces;
 using MemberScan.Model.Members;
 using MemberScan.Model.Rules;

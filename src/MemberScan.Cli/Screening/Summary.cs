@@ -1,7 +1,6 @@
 using System.Globalization;
 using MemberScan.Cli.Files;
 using MemberScan.Model.Verdicts;
-using MemberScan.Screening;
 using MemberScan.Screening.Record;
 using Spectre.Console;
 

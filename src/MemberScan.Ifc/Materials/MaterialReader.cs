@@ -156,7 +156,7 @@ internal sealed class MaterialReader(
     }
 
     private Grade? Matching(string name) => rules.Grades.FirstOrDefault(grade =>
-        Regex.IsMatch(name, $"^(?:{grade.Pattern})$", RegexOptions.IgnoreCase | RegexOptions.CultureInvariant, TimeSpan.FromMilliseconds(100)));
+        Regex.IsMatch(name, $@"\A(?:{grade.Pattern})\z", RegexOptions.IgnoreCase | RegexOptions.CultureInvariant | RegexOptions.NonBacktracking, TimeSpan.FromMilliseconds(100)));
 
     /// <summary>Material definitions of the occurrence, then of its type.</summary>
     private IEnumerable<Part21Record> Associated(ulong id)

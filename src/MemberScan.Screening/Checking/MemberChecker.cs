@@ -1,7 +1,6 @@
 using System.Collections.Immutable;
 using System.Globalization;
 using MemberScan.Foundation.Geometry;
-using MemberScan.Mechanics.Forces;
 using MemberScan.Model;
 using MemberScan.Model.Forces;
 using MemberScan.Model.Limits;
