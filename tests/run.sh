@@ -29,7 +29,7 @@ need chromium chromium
 need node nodejs
 need npm npm
 
-(cd tests/web-ifc && npm ci --silent --no-audit --no-fund --no-update-notifier)
+(cd tests/web-ifc && npm ci --loglevel=error --no-audit --no-fund --no-update-notifier)
 
 locked=()
 if [ "${CI:-}" = true ]; then locked=(--locked-mode); fi
