@@ -131,7 +131,7 @@ public sealed class SampleModelTests
         {
             var analytical = file.Of("IFCSTRUCTURALCURVEMEMBER").Single(m => m.Parameters[2] == $"'A {member.Tag}'");
             var axes = AxesOf(file, analytical.Parameters);
-            var reactions = file.Of("IFCRELCONNECTSSTRUCTURALACTIVITY").Where(r => r.Parameters[4] == $"#{analytical.Id}").Select(r => file.At(r.Parameters[5])).ToArray();
+            var reactions = Reactions(file, analytical.Id);
             Assert.Equal(2, reactions.Length);
             foreach (var (reaction, situation) in reactions.Zip(member.Situations))
             {
@@ -149,6 +149,37 @@ public sealed class SampleModelTests
         Assert.Equal(sample.Members.Sum(m => m.Situations.Sum(s => s.Stations.Length)), read);
     }
 
+    /// <summary>Components in the analytical member's axes (edge and Axis of the file) are the intended forces in the element's own axes, the turned bracket's too.</summary>
+    [Fact]
+    public void Local_components_follow_the_analytical_axes()
+    {
+        var sample = Samples.Named(GangwayRails.Name);
+        var file = new WrittenFile(sample.Model);
+        var read = 0;
+
+        foreach (var analytical in file.Of("IFCSTRUCTURALCURVEMEMBER"))
+        {
+            var member = sample.Members.Single(m => analytical.Parameters[2] == $"'A {m.Tag}'" || analytical.Parameters[0] == $"'{m.Key}'");
+            var axes = AxesOf(file, analytical.Parameters);
+            Assert.Equal(member.AnalysisIsTurned, Math.Abs(axes.Z.Dot(member.Axes.Z)) < 1e-9);
+            foreach (var (reaction, situation) in Reactions(file, analytical.Id).Zip(member.Situations))
+            {
+                Assert.Equal(".LOCAL_COORDS.", reaction[8]);
+                foreach (var (value, station) in WrittenFile.List(file.At(reaction[7])[1]).Zip(situation.Stations))
+                {
+                    double[] c = [.. file.At(value)[1..].Select(WrittenFile.Number)];
+                    var force = c[0] * axes.X + c[1] * axes.Y + c[2] * axes.Z;
+                    var moment = c[3] * axes.X + c[4] * axes.Y + c[5] * axes.Z;
+                    var turned = Turned(member.Axes, [force.X, force.Y, force.Z, moment.X / 1e3, moment.Y / 1e3, moment.Z / 1e3]);
+                    Assert.Equal(Numbers(station.Forces), Numbers(turned), (a, b) => Math.Abs(a - b) < 1e-6);
+                    read++;
+                }
+            }
+        }
+
+        Assert.Equal(sample.Members.Where(m => m.Body != SampleBody.RailingItem).Sum(m => m.Situations.Sum(s => s.Stations.Length)), read);
+    }
+
     [Fact]
     public void A_forces_table_names_members_by_key_and_by_tag()
     {
@@ -161,6 +192,9 @@ public sealed class SampleModelTests
         Assert.All(rows, r => Assert.Contains(sample.Members, m => m.Key == r || m.Tag == r));
         Assert.Equal(sample.Members.Count(m => !m.Situations.IsEmpty), rows.Length);
     }
+
+    private static string[][] Reactions(WrittenFile file, int analytical) =>
+        [.. file.Of("IFCRELCONNECTSSTRUCTURALACTIVITY").Where(r => r.Parameters[4] == $"#{analytical}").Select(r => file.At(r.Parameters[5]))];
 
     private static MemberAxes AxesOf(WrittenFile file, string[] member)
     {

@@ -2,7 +2,7 @@ using MemberScan.SampleModels.Writing;
 
 namespace MemberScan.SampleModels.Tests.Writing;
 
-/// <summary>GlobalIds against pairs of UUID and compressed text that a published IFC toolkit gives.</summary>
+/// <summary>GlobalIds against known pairs of UUID digits and compressed text (base 64 with the alphabet of the IFC documentation).</summary>
 public sealed class GlobalIdsTests
 {
     [Theory]
