@@ -37,7 +37,7 @@ internal static class SectionRun
 
         var points = options.Points.Select(point => Point(point, field, forces)).ToList();
         var result = SectionResult.Of(field, forces, points, yield);
-        if (options.Json) Console.Out.WriteLine(JsonSerializer.Serialize(result, SectionJson.Default.SectionResult));
+        if (options.Json) Console.Out.WriteLine(JsonSerializer.Serialize(result, SectionJson.Plain.SectionResult));
         else SectionPrint.Write(Console.Out, section.Designation, result, field);
         return result.Utilization > OverLimit ? ExitCodes.Overstressed : ExitCodes.WithinLimit;
     }

@@ -1,4 +1,5 @@
 using System.Collections.Immutable;
+using MemberScan.Model.Verdicts;
 
 namespace MemberScan.Screening.Record;
 

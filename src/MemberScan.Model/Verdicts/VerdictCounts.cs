@@ -1,4 +1,4 @@
-namespace MemberScan.Screening.Record;
+namespace MemberScan.Model.Verdicts;
 
 /// <summary>Candidates by verdict; the three add up to all of them.</summary>
 /// <param name="WithinLimit">Within their limit.</param>
