@@ -43,6 +43,23 @@ internal static class Derivation
                 yield return line;
     }
 
+    /// <summary>A line of the check with what it does not know: how the stresses came about, and where the strength comes from.</summary>
+    public static TraceLine Completed(TraceLine line, Found found, string yieldSource)
+    {
+        var hasShear = found.Forces.Vy != 0 || found.Forces.Vz != 0;
+        var hasTorsion = found.Forces.T != 0 && found.Field.CarriesTorsion;
+        return line.Symbol switch
+        {
+            "fy" or "f_y" => line with { Source = yieldSource },
+            "σ" => line with { Formula = "N/A + My·z/Iy − Mz·y/Iz" },
+            "τxy" or "τxz" when hasShear && hasTorsion => line with { Formula = $"{line.Symbol}(V) + {line.Symbol}(T)" },
+            "τxy" or "τxz" when hasShear => line with { Formula = $"{line.Symbol}(V)" },
+            "τxy" or "τxz" when hasTorsion => line with { Formula = $"{line.Symbol}(T)" },
+            "τxy" or "τxz" => line with { Formula = "no shear force, no torsion" },
+            _ => line,
+        };
+    }
+
     private static IEnumerable<TraceLine> Shear(StressField field, SectionForces forces, GoverningPoint point, string cause, string rule)
     {
         if (forces == default) yield break;

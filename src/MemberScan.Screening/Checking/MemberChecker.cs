@@ -156,7 +156,7 @@ internal sealed class MemberChecker(SectionLibrary library, Basis basis, double 
             Section = decisive.Field.Section.Designation,
             ShearModel = decisive.Field.Model.ToString().ToLowerInvariant(),
             OtherModelUtilization = other?.Utilization,
-            Trace = [.. Derivation.Lines(decisive, finding.Forces.Source), .. check.Trace.Select(line => line.Symbol is "fy" or "f_y" ? line with { Source = yieldSource } : line)],
+            Trace = [.. Derivation.Lines(decisive, finding.Forces.Source), .. check.Trace.Select(line => Derivation.Completed(line, decisive, yieldSource))],
         };
     }
 
