@@ -117,7 +117,7 @@ public sealed class PropertyTests
         foreach (var path in OpenModel.All)
         {
             var (bytes, _) = ModelContainer.Read(path);
-            var iterations = Math.Clamp(2_000_000 / bytes.Length, 2, 300);
+            var iterations = Math.Clamp(1_000_000 / bytes.Length, 1, 200);
 
             Mutation(bytes.Length).Sample(mutation => AssertSound(Mutated(bytes, mutation)), iter: iterations);
         }
