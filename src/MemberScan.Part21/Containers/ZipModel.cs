@@ -23,7 +23,7 @@ internal static class ZipModel
 
             return (bytes, Note(name, entry, ignored));
         }
-        catch (Exception fault) when (fault is InvalidDataException or NotSupportedException or ArgumentException or OverflowException or IOException)
+        catch (Exception fault) when (fault is InvalidDataException or NotSupportedException or ArgumentException or OverflowException or EndOfStreamException)
         {
             throw Damaged(name);
         }

@@ -6,6 +6,8 @@ namespace MemberScan.Part21.Findings;
 /// <summary>Tells findings with their places and remembers what they mean for the whole.</summary>
 internal sealed class FindingLog(SourceText source, DiagnosticList diagnostics)
 {
+    private readonly HashSet<FindingKind> _told = [];
+
     public bool HasDamage { get; private set; }
 
     public bool EndsReading { get; private set; }
@@ -17,6 +19,9 @@ internal sealed class FindingLog(SourceText source, DiagnosticList diagnostics)
     {
         HasDamage |= kind.IsDamage;
         EndsReading |= kind.EndsReading;
-        diagnostics.Add(kind.Code, kind.Severity, kind.Message, source.SpanAt(offset, id));
+
+        // Equal findings are counted and only the first place is kept: no line needs to be counted for the others.
+        var isFirst = _told.Add(kind);
+        diagnostics.Add(kind.Code, kind.Severity, kind.Message, isFirst ? source.SpanAt(offset, id) : null);
     }
 }

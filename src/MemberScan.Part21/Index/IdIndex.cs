@@ -5,8 +5,8 @@ internal sealed class IdIndex
 {
     // Row + 1 by number; 0 where there is none.
     private readonly int[] _dense = [];
-    private readonly ulong[] _ids = [];
-    private readonly int[] _rows = [];
+    private ulong[] _ids = [];
+    private int[] _rows = [];
 
     /// <summary>Builds it and marks the rows whose number stands further up already; of those the first is found.</summary>
     public IdIndex(Span<InstanceRow> rows)
@@ -35,15 +35,8 @@ internal sealed class IdIndex
         }
 
         var at = Array.BinarySearch(_ids, id);
-        if (at < 0)
-        {
-            row = -1;
-            return false;
-        }
-
-        while (at > 0 && _ids[at - 1] == id) at--;
-        row = _rows[at];
-        return true;
+        row = at < 0 ? -1 : _rows[at];
+        return at >= 0;
     }
 
     private void FillDense(Span<InstanceRow> rows)
@@ -69,6 +62,7 @@ internal sealed class IdIndex
         if (ascending) return;
 
         Array.Sort(_ids, _rows);
+        var kept = 0;
         for (var start = 0; start < _ids.Length;)
         {
             var end = start + 1;
@@ -79,7 +73,12 @@ internal sealed class IdIndex
                 for (var i = start + 1; i < end; i++) rows[_rows[i]] = rows[_rows[i]].With(InstanceFlags.Duplicate);
             }
 
+            _ids[kept] = _ids[start];
+            _rows[kept++] = _rows[start];
             start = end;
         }
+
+        Array.Resize(ref _ids, kept);
+        Array.Resize(ref _rows, kept);
     }
 }

@@ -1,11 +1,11 @@
 namespace MemberScan.Part21.Index;
 
-/// <summary>Which numbers are referred to: a bit each where they are small for the size of the file, a list of the others.</summary>
+/// <summary>Which numbers are referred to: a bit each where they are small for the size of the file, a plain list of the others.</summary>
 /// <remarks>Kept instead of every reference: a model has several references per instance, and nearly all of them lead somewhere.</remarks>
 internal sealed class ReferenceMarks
 {
     private readonly ulong _limit;
-    private readonly HashSet<ulong> _large = [];
+    private readonly List<ulong> _large = [];
     private ulong[] _bits = new ulong[64];
 
     /// <param name="textLength">Length of the text [byte]; the bits take half of it at most.</param>

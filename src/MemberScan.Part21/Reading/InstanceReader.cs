@@ -139,8 +139,9 @@ internal sealed class InstanceReader(FindingLog log, ReferenceMarks marks, Param
         var isCut = fault.Reached == windowLength && windowLength < all.Length - start;
         log.Tell(isCut ? FindingKinds.InstanceTooLong : fault.Kind, start + (isCut ? 0 : fault.At), draft.Id);
 
-        var resume = Resume(all, start + fault.ResumeFrom, start + fault.Reached);
-        var end = resume < 0 ? start + fault.ResumeFrom : resume;
+        var from = start + Math.Max(1, fault.ResumeFrom);
+        var resume = Resume(all, from, start + fault.Reached);
+        var end = resume < 0 ? from : resume;
         NoteNumbers(all[start..end]);
         while (end > start + 1 && Blanks.IsBlank(all[end - 1])) end--;
         if (draft.HasHead) _rows.Add(new InstanceRow(start, end - start, draft.Id, draft.Keyword, draft.Flags | InstanceFlags.Damaged));

@@ -144,7 +144,7 @@ internal sealed class ParameterScanner(FindingLog log, ReferenceMarks marks, Rea
             if (next < 0) return Fail(FindingKinds.UnterminatedComment, ~next, ~next, text.Length, out fault);
         }
 
-        var junk = Junk.End(text, start);
+        var junk = Junk.End(text, end);
         if (junk == text.Length) return FailAtEnd(junk, lastString, out fault);
         if (junk < 0) return FailBetween(text, ~junk, lastString, out fault);
 
@@ -188,9 +188,11 @@ internal sealed class ParameterScanner(FindingLog log, ReferenceMarks marks, Rea
     // '=' stands behind the number that makes it the head of another instance.
     private static int Before(ReadOnlySpan<byte> text, int at)
     {
+        var hash = at;
         if (text[at] != '=') return at;
-        var hash = text[..at].LastIndexOf((byte)'#');
-        return hash < 0 || !Numerals.IsInstanceHead(text, hash) ? at : hash;
+        while (Blanks.IsBlank(text[hash - 1])) hash--;
+        while (char.IsAsciiDigit((char)text[hash - 1])) hash--;
+        return text[hash - 1] == '#' && Numerals.IsInstanceHead(text, hash - 1) ? hash - 1 : at;
     }
 
     private static bool Fail(FindingKind kind, int at, int resumeFrom, int reached, out Fault fault)

@@ -20,6 +20,7 @@ internal static class Numerals
             at++;
         }
 
+        if (!fits) id = 0;
         return fits && at > first;
     }
 

@@ -45,7 +45,7 @@ internal static class ValueToken
         if (kind != TokenKind.Malformed && (next == text.Length || (next >= 0 && text[next] is (byte)',' or (byte)')'))) return end;
 
         kind = TokenKind.Malformed;
-        end = Junk.End(text, at);
+        end = Junk.End(text, end);
         if (end < 0) end = text.Length;
         while (end > at && Blanks.IsBlank(text[end - 1])) end--;
         return end;
