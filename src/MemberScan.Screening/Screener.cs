@@ -159,7 +159,7 @@ public static class Screener
         var uses = members
             .Where(m => m.Section is Finding<SectionFinding>.Found)
             .SelectMany(m => ((Finding<SectionFinding>.Found)m.Section).Value.Shapes.Select(shape => (Shape: shape, Poisson: ((Finding<double>.Found)m.Material.Poisson).Value)))
-            .Where(use => SectionLibrary.IsInRange(use.Shape))
+            .Where(use => NumberRange.Holds(use.Shape))
             .GroupBy(use => use.Shape)
             .OrderBy(group => group.Key.Designation, StringComparer.Ordinal);
         return [.. uses.Select(group => Facts(group.Key, group.Count(), group.First().Poisson, library))];

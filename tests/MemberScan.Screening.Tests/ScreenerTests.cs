@@ -108,20 +108,29 @@ public sealed class ScreenerTests
         Assert.ThrowsAny<OperationCanceledException>(Run);
     }
 
-    /// <summary>Sections without preferred axes need no note, and numbers beyond any range end as a reason, never as a crash.</summary>
     [Theory]
-    [InlineData("1.E305", "P-1,S,service,0,1,0,0,0,0,0\nP-1,S,service,1,1,0,0,0,0,0\n")]
-    [InlineData("1000.", "P-1,S,service,0,1e300,1e300,1e300,1e300,1e300,1e300\nP-1,S,service,1,1e300,1e300,1e300,1e300,1e300,1e300\n")]
-    [InlineData("1000.", "P-1,S,service,0,1e-320,0,0,0,1e-320,0\nP-1,S,service,1,1e-320,0,0,0,1e-320,0\n")]
-    public void Extreme_numbers_give_a_verdict_or_a_reason(string depth, string rows)
+    [InlineData("1e300,1e300,1e300,1e300,1e300,1e300", ReasonCode.CheckNotEvaluated)]
+    [InlineData("0,0,0,0,1e303,0", ReasonCode.CheckNotEvaluated)]
+    [InlineData("1e308,0,0,0,0,0", ReasonCode.CheckNotEvaluated)]
+    [InlineData("0,0,0,1e250,0,0", ReasonCode.CheckNotEvaluated)]
+    [InlineData("1e20,0,0,0,0,0", null)]
+    public void Forces_beyond_the_range_of_numbers_are_never_within_the_limit(string forces, ReasonCode? code)
     {
-        var text = System.Text.Encoding.ASCII.GetString(Landing.OnePost()).Replace(",1000.);", $",{depth});", StringComparison.Ordinal);
-        Assert.Contains($",{depth});", text, StringComparison.Ordinal);
+        var table = "member,situation,kind,station[m],N[N],Vy[N],Vz[N],T[Nm],My[Nm],Mz[Nm]\n" + $"P-1,S,service,0,{forces}\nP-1,S,service,1,{forces}\n";
 
-        var member = Landing.ScreenOne(System.Text.Encoding.ASCII.GetBytes(text), "member,situation,kind,station[m],N[N],Vy[N],Vz[N],T[Nm],My[Nm],Mz[Nm]\n" + rows);
+        var member = Landing.ScreenOne(Landing.OnePost(new Round(0.01)), table);
 
-        Assert.True(member.Governing is null || double.IsFinite(member.Governing.Utilization));
-        Assert.True(member.Verdict != Verdict.NotChecked || member.Reason is not null);
+        Assert.Equal(code is null ? Verdict.Overstressed : Verdict.NotChecked, member.Verdict);
+        Assert.Equal(code, member.Reason?.Code);
+    }
+
+    [Fact]
+    public void Forces_that_are_next_to_nothing_use_next_to_nothing()
+    {
+        var member = Landing.ScreenOne(Landing.OnePost(), Landing.Constant(new SectionForces(1e-320, 0, 0, 0, 1e-320, 0)));
+
+        Assert.Equal(Verdict.WithinLimit, member.Verdict);
+        Assert.Equal(0, member.Governing!.Utilization, 1e-300);
     }
 
     [Fact]
@@ -141,7 +150,7 @@ public sealed class ScreenerTests
     [InlineData(1e-110)]
     [InlineData(1e60)]
     [InlineData(1e150)]
-    public void Extreme_sections_give_a_verdict_or_a_reason(double radiusMm)
+    public void A_section_beyond_the_range_of_numbers_is_a_reason(double radiusMm)
     {
         var spelled = radiusMm.ToString("0.0###E0", System.Globalization.CultureInfo.InvariantCulture);
         var text = System.Text.Encoding.ASCII.GetString(Landing.OnePost(new Round(0.0123))).Replace("$,12.3)", $"$,{spelled})", StringComparison.Ordinal);
@@ -149,9 +158,8 @@ public sealed class ScreenerTests
 
         var member = Landing.ScreenOne(System.Text.Encoding.ASCII.GetBytes(text), Landing.Constant(new SectionForces(-10, 0, 10, 1, 1, 1)));
 
-        Assert.NotEqual(Verdict.WithinLimit, radiusMm < 1 ? member.Verdict : Verdict.NotChecked);
-        Assert.True(member.Governing is null || double.IsFinite(member.Governing.Utilization));
-        Assert.True(member.Verdict != Verdict.NotChecked || member.Reason is not null);
+        Assert.Equal((Verdict.NotChecked, ReasonCode.SectionInvalid), (member.Verdict, member.Reason!.Code));
+        Assert.Null(member.Governing);
     }
 
     internal static (byte[] Model, string Table) TenPosts()

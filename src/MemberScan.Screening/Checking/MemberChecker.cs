@@ -97,7 +97,7 @@ internal sealed class MemberChecker(SectionLibrary library, Basis basis, double 
     /// <summary>Dimensions of which a sound section is made, but whose powers leave the range of numbers.</summary>
     private static Reason? OutOfRange(Finding<SectionFinding>.Found? section)
     {
-        var shape = section?.Value.Shapes.FirstOrDefault(s => !SectionLibrary.IsInRange(s));
+        var shape = section?.Value.Shapes.FirstOrDefault(s => !NumberRange.Holds(s));
         return shape is null ? null : new Reason(ReasonCode.SectionInvalid, $"the section {shape.Designation} is so small or so large that its properties are beyond the range of numbers");
     }
 

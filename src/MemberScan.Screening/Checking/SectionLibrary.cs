@@ -11,19 +11,7 @@ internal sealed class SectionLibrary
     /// <summary>Largest closure error of closed forms and series [-].</summary>
     private const double ClosureTolerance = 1e-6;
 
-    /// <summary>Extents outside this range [m] are no section of a structure.</summary>
-    private const double LeastExtent = 1e-9, LargestExtent = 1e9;
-
     private readonly ConcurrentDictionary<(CrossSection Section, ShearModel Model, double Poisson), (StressField? Field, string WhyNot)> _fields = new();
-
-    /// <summary>Whether numbers can be calculated with: powers of a dimension leave the range of a double long before the dimension does.</summary>
-    public static bool IsInRange(CrossSection section)
-    {
-        if (Math.Min(section.ExtentY, section.ExtentZ) < LeastExtent || Math.Max(section.ExtentY, section.ExtentZ) > LargestExtent) return false;
-
-        var p = SectionProperties.Of(section);
-        return double.IsNormal(p.Area) && double.IsNormal(p.Iy) && double.IsNormal(p.Iz);
-    }
 
     /// <summary>The field of a section in a shear model, or why there is none.</summary>
     public (StressField? Field, string WhyNot) Field(CrossSection section, ShearModel model, double poisson)

@@ -126,10 +126,15 @@ internal sealed class SituationChecker(SectionLibrary library, Basis basis, doub
 
         double Try(double x, in SectionForces forces)
         {
+            if (!NumberRange.Holds(shape, forces))
+            {
+                findings.Bar(ReasonCode.CheckNotEvaluated, "the forces are so large that stresses are beyond the range of numbers");
+                return 0;
+            }
+
             var usable = Usable(findings, field, shape, forces);
             var point = field.Govern(usable, measure);
-            if (!double.IsFinite(point.Value)) findings.Bar(ReasonCode.CheckNotEvaluated, "the stresses are beyond any range");
-            else if (best is null || point.Value / allowed > best.Utilization) best = new Found(point.Value / allowed, from + x, usable, point, field, index);
+            if (best is null || point.Value / allowed > best.Utilization) best = new Found(point.Value / allowed, from + x, usable, point, field, index);
             return point.Value;
         }
 
