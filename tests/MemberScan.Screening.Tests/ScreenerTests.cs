@@ -97,6 +97,20 @@ public sealed class ScreenerTests
     }
 
     [Fact]
+    public void A_model_that_changed_since_its_block_was_written_says_so_and_one_that_did_not_says_nothing()
+    {
+        var written = new System.Buffers.ArrayBufferWriter<byte>();
+        Landing.Run(Landing.OnePost(), new DiagnosticList())!.WriteModel(written);
+        var changed = System.Text.Encoding.ASCII.GetString(written.WrittenSpan).Replace("Gangway post", "Gangway Post", StringComparison.Ordinal);
+
+        var untouched = Landing.Screen(written.WrittenSpan.ToArray());
+        var touched = Landing.Screen(System.Text.Encoding.ASCII.GetBytes(changed));
+
+        Assert.DoesNotContain(untouched.Findings, f => f.Code == "SCR-0006");
+        Assert.Equal(Severity.Warning, Assert.Single(touched.Findings, f => f.Code == "SCR-0006").Severity);
+    }
+
+    [Fact]
     public void A_cancelled_run_stops()
     {
         var sample = s_samples.Value[0];
