@@ -12,6 +12,9 @@ public static class NumberRange
     /// <summary>Nominal stress [Pa] from which on no search for the largest one is made; its square is still a number.</summary>
     private const double LargestStress = 1e100;
 
+    /// <summary>Forces [N] and moments [N·m] below this are none; their square would underflow.</summary>
+    public const double LeastForce = 1e-100;
+
     /// <summary>Whether the powers of a section's dimensions are numbers to calculate with.</summary>
     public static bool Holds(CrossSection section)
     {
@@ -32,6 +35,10 @@ public static class NumberRange
         var extent = Math.Max(section.ExtentY, section.ExtentZ);
         var nominal = (Math.Abs(forces.N) + Math.Abs(forces.Vy) + Math.Abs(forces.Vz)) / p.Area
             + (Math.Abs(forces.T) + Math.Abs(forces.My) + Math.Abs(forces.Mz)) * extent / Math.Min(p.Iy, p.Iz);
-        return nominal <= LargestStress;
+        return nominal <= LargestStress
+            && IsNoneOrMore(forces.N) && IsNoneOrMore(forces.Vy) && IsNoneOrMore(forces.Vz)
+            && IsNoneOrMore(forces.T) && IsNoneOrMore(forces.My) && IsNoneOrMore(forces.Mz);
+
+        static bool IsNoneOrMore(double force) => force == 0 || Math.Abs(force) >= LeastForce;
     }
 }

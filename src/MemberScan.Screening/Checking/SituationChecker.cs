@@ -126,7 +126,7 @@ internal sealed class SituationChecker(SectionLibrary library, Basis basis, doub
 
         double Try(double x, in SectionForces forces)
         {
-            if (!NumberRange.Holds(shape, forces))
+            if (!NumberRange.Holds(shape, Cleaned(forces, shape)))
             {
                 findings.Bar(ReasonCode.CheckNotEvaluated, "the forces are so large that stresses are beyond the range of numbers");
                 return 0;
@@ -213,7 +213,7 @@ internal sealed class SituationChecker(SectionLibrary library, Basis basis, doub
         var force = Math.Max(Math.Abs(forces.N), Math.Max(Math.Abs(forces.Vy), Math.Abs(forces.Vz)));
         var moment = Math.Max(Math.Abs(forces.T), Math.Max(Math.Abs(forces.My), Math.Abs(forces.Mz)));
         var (leastForce, leastMoment) = (ZeroShare * Math.Max(force, moment / extent), ZeroShare * Math.Max(moment, force * extent));
-        static double Clean(double value, double least) => Math.Abs(value) <= least ? 0 : value;
+        static double Clean(double value, double least) => Math.Abs(value) <= least || Math.Abs(value) < NumberRange.LeastForce ? 0 : value;
         return new SectionForces(
             Clean(forces.N, leastForce), Clean(forces.Vy, leastForce), Clean(forces.Vz, leastForce),
             Clean(forces.T, leastMoment), Clean(forces.My, leastMoment), Clean(forces.Mz, leastMoment));

@@ -128,6 +128,7 @@ public sealed class SectionRunTests
     [InlineData("round 20,5 mm", "", "", "", "")]
     [InlineData("round 1e-120 mm", "My=1kNm", "", "", "check their units")]
     [InlineData("round 20 mm", "My=1e300kNm", "", "", "check their units")]
+    [InlineData("round 20 mm", "N=1e-320kN", "", "", "check their units")]
     [InlineData("round 20 mm", "N=1", "", "", "")]
     [InlineData("round 20 mm", "N=1kNm", "", "", "")]
     [InlineData("round 20 mm", "Q=1kN", "", "", "")]
