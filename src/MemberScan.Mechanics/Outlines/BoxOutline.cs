@@ -4,44 +4,35 @@ using MemberScan.Mechanics.Series;
 
 namespace MemberScan.Mechanics.Outlines;
 
-/// <summary>The two edges of a rectangular tube. Chart: q numbers their sixteen pieces, sin p runs along one from −1 to 1.</summary>
-/// <remarks>
-/// Edges are enough: across the wall the shear stress of the elementary model is constant and σ is linear, so every measure is convex
-/// there and largest at an end.
-/// </remarks>
-internal sealed class BoxOutline(Box section) : Outline(section, s_lattice)
+/// <summary>The two edges of a rectangular tube, each in the pieces of <see cref="RoundedCorner"/>: first the outer ones, then the inner.</summary>
+internal sealed class BoxOutline : Outline
 {
-    private const int Pieces = 16;
-    private const int NodesPerPiece = 17;
-    private static readonly Lattice s_lattice = Lattice.Grid(
-        Lattice.Even(0, Pieces - 1, Pieces), Lattice.Even(-Math.PI / 2, Math.PI / 2, NodesPerPiece), ring: false, curves: true);
+    private static readonly Lattice s_lattice = Lattice.Curves(2 * RoundedCorner.Pieces, RoundedCorner.NodesPerPiece, ring: false);
 
-    private readonly double _halfWidth = section.Width / 2;
-    private readonly double _halfDepth = section.Depth / 2;
-    private readonly double _wall = section.Wall;
-    private readonly double _outerRadius = section.OuterRadius;
-    private readonly double _innerRadius = section.InnerRadius;
+    private readonly double _halfWidth;
+    private readonly double _halfDepth;
+    private readonly double _wall;
+    private readonly double _outerRadius;
+    private readonly double _innerRadius;
+
+    /// <summary>The outline of a box.</summary>
+    public BoxOutline(Box section)
+        : base(section)
+    {
+        (_halfWidth, _halfDepth, _wall) = (section.Width / 2, section.Depth / 2, section.Wall);
+        (_outerRadius, _innerRadius) = (section.OuterRadius, section.InnerRadius);
+        // A sharp middle line turns at once: beyond it the stress of the outer face stays as in the corner, which is a piece of its own.
+        var shortBy = _outerRadius == 0 && _innerRadius == 0 ? _wall / 2 : 0;
+        Edges = new Chart(s_lattice, (p, q) => q < RoundedCorner.Pieces
+            ? RoundedCorner.OnPiece(_halfWidth, _halfDepth, _outerRadius, shortBy, (int)q, p)
+            : RoundedCorner.OnPiece(_halfWidth - _wall, _halfDepth - _wall, _innerRadius, 0, (int)q - RoundedCorner.Pieces, p));
+    }
 
     /// <inheritdoc/>
-    public override (double Y, double Z) Map(double p, double q)
-    {
-        var piece = (int)q;
-        var inward = piece < 8 ? 0 : _wall;
-        var radius = piece < 8 ? _outerRadius : _innerRadius;
-        var (halfY, halfZ) = (_halfWidth - inward, _halfDepth - inward);
-        var share = Math.Sin(p);
-        switch (piece % 8)
-        {
-            case 0: return ((halfY - radius) * share, halfZ);
-            case 1: return ((halfY - radius) * share, -halfZ);
-            case 2: return (halfY, (halfZ - radius) * share);
-            case 3: return (-halfY, (halfZ - radius) * share);
-            default:
-                var (signY, signZ) = RoundedCorner.Quadrants[piece % 4];
-                var (sin, cos) = Math.SinCos(Math.PI / 4 * (1 + share));
-                return (signY * (halfY - radius + radius * cos), signZ * (halfZ - radius + radius * sin));
-        }
-    }
+    public override Chart Edges { get; }
+
+    /// <summary>None: no shear solution of a box needs it.</summary>
+    public override Chart? Inside => null;
 
     /// <inheritdoc/>
     public override bool Contains(double y, double z, double tolerance) =>

@@ -73,7 +73,7 @@ public sealed class ClosureTests
 
             Assert.InRange(closure.Vy, 0.97, 1.03);
             Assert.InRange(closure.Vz, 0.97, 1.03);
-            Assert.InRange(closure.T, 1, 1.15);
+            Assert.InRange(closure.T, 1, 1.2);
         }
     }
 
