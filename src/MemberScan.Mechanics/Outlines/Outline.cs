@@ -14,7 +14,7 @@ internal abstract class Outline
     /// <summary>Largest extent [m].</summary>
     public double Extent { get; }
 
-    /// <summary>The edges, outer and inner: curves.</summary>
+    /// <summary>The edges, outer and inner, and creases of the shear stress between them: curves.</summary>
     public abstract Chart Edges { get; }
 
     /// <summary>The inside, edges included; null where it is never needed.</summary>

@@ -10,8 +10,8 @@ internal abstract class ShearSolution
     public virtual bool CarriesTorsion => true;
 
     /// <summary>
-    /// Whether every measure is largest on an edge, whatever the forces: where through each point of the inside runs a line to two
-    /// edges along which σ is linear and the shear stresses are too, so that the measures are convex on it.
+    /// Whether every measure is largest on an edge or crease, whatever the forces: where through each point of the inside runs a line
+    /// between two of them along which σ is linear and the shear stresses are too, so that the measures are convex on it.
     /// </summary>
     public virtual bool EdgesGovern => false;
 

@@ -135,7 +135,8 @@ internal sealed class GoverningSearch(StressField field, ShearSolution shear, Ou
             if (ahead >= stencil[top])
             {
                 (p, q, value) = (p + dp * hp, q + dq * hq, ahead);
-                if (Math.Abs(dp) < SameSpot && Math.Abs(dq) < SameSpot) break;
+                // Not on the first stencil: at a fold it sees its own mirror image, however near a summit beside it.
+                if (scale < Coarsest && Math.Abs(dp) < SameSpot && Math.Abs(dq) < SameSpot) break;
                 if (Math.Abs(dp) < 1 && Math.Abs(dq) < 1) scale *= Refinement;
             }
             else if (top == 4)
