@@ -7,9 +7,10 @@ namespace MemberScan.Mechanics.Stress;
 
 /// <summary>Finds the place of a section where a measure is largest.</summary>
 /// <remarks>
-/// All nodes of the edges and, where it can matter, of the inside are evaluated, each peak among them that may hide the maximum is climbed on the true field, and the places
-/// that statics points at (in line with and square to the bending and shear resultants) are tried besides. Among equal places the
-/// outer edge comes first, then the larger z, then the larger y, so that the answer never hangs on rounding.
+/// All nodes of the edges and, where it can matter, of the inside are evaluated; each peak among them that may hide the maximum is
+/// climbed on the true field; the places that statics points at (in line with and square to the bending and shear resultants) are
+/// tried besides. Among equal places the outer edge comes first (on a rectangle the middle of a side), then the larger z, then the
+/// larger y, so that the answer never hangs on rounding.
 /// </remarks>
 internal sealed class GoverningSearch(StressField field, ShearSolution shear, Outline outline)
 {
