@@ -31,7 +31,7 @@ public static class ResultBlock
 
         end += begin + endMark.Length;
         if (bytes[end..].StartsWith("\r\n"u8)) end += 2;
-        else if (bytes[end..].StartsWith("\n"u8)) end += 1;
+        else if (bytes[end..] is [(byte)'\n' or (byte)'\r', ..]) end += 1;
 
         // Only where the closing ENDSEC follows is it the block; the same words in a string are content.
         if (!bytes[end..].StartsWith("ENDSEC"u8) && !bytes[end..].StartsWith("endsec"u8)) return new Stripped(text, false, true);
