@@ -168,7 +168,7 @@ public static class Screener
 
     private static SectionFacts Facts(CrossSection shape, int members, double poisson, SectionLibrary library)
     {
-        var p = SectionProperties.Of(shape);
+        var p = library.Properties(shape);
         return new SectionFacts(
             shape.Designation, members, p.Area, p.Iy, p.Iz, p.WelY, p.WelZ, p.J, p.JSource, p.Wt,
             Closure(library.Field(shape, ShearModel.Elementary, poisson)), Closure(library.Field(shape, ShearModel.Elasticity, poisson)));
