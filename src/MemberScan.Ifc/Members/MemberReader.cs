@@ -67,7 +67,10 @@ internal sealed class MemberReader(
         var placed = placements.Placement(record[5]);
         var toProject = placed is Finding<Transform3>.Found found ? found.Value : Transform3.Identity;
         var read = record.IsDamaged ? [] : bodies.Read(record[6], toProject);
-        var bars = read.OfType<Finding<BarBody>.Found>().ToList();
+        var sweeps = read.OfType<Finding<BarBody>.Found>().ToList();
+
+        // Beside a bar, short pieces such as base plates are no items.
+        var bars = sweeps.FindAll(s => s.Value.IsBarLike) is { Count: > 0 } longer ? longer : sweeps;
         var isCandidate = isAlways || bars.Exists(b => b.Value.IsBarLike) || read.Any(IsUnreadSweep)
             || relations.AnalyticalOf(record.Id).Count > 0 || relations.ActivitiesOn(record.Id).Count > 0 || isNamed(element);
         if (!isCandidate)
@@ -106,9 +109,11 @@ internal sealed class MemberReader(
         var body = bar.Value;
         var section = body.Profile.Section;
         var notes = body.Notes;
-        var others = read.OfType<Finding<BarBody>.Missing>().ToList();
-        if (others.Count > 0)
-            notes = notes.Add(string.Create(CultureInfo.InvariantCulture, $"the element has {others.Count} further bodies that are no bars and are not checked ({others[0].Why.Message})"));
+        if (read.Length > count)
+        {
+            var whyOther = read.OfType<Finding<BarBody>.Missing>().FirstOrDefault()?.Why.Message ?? "short against their section";
+            notes = notes.Add(string.Create(CultureInfo.InvariantCulture, $"the element has {read.Length - count} further bodies that are no bars and are not checked ({whyOther})"));
+        }
 
         return new Member
         {
