@@ -203,7 +203,6 @@ internal sealed class ReactionReader(Instances instances, PlacementReader placem
         if (samples < stations.Count)
             return Unusable(ReasonCode.ConventionUnknown, $"the reaction #{reaction.Id} has one sample for the whole member, which end forces cannot have");
 
-
         for (var i = 0; i < stations.Count; i++)
         {
             var station = stations[i];

@@ -82,6 +82,23 @@ public sealed class PlacementReaderTests
         Near.Vector(Vector3.Zero, Reading.Value(reading.Named("none").Axes).Origin);
     }
 
+    [Theory]
+    [InlineData(Instances.MaxDepth, true)]
+    [InlineData(Instances.MaxDepth + 2, false)]
+    public void A_chain_of_placements_longer_than_the_limit_is_not_supported(int links, bool isRead)
+    {
+        var model = Bars.Model(Release.Ifc4);
+        int? placement = null;
+        for (var i = 0; i < links; i++)
+            placement = model.LocalPlacement(new Transform3(new Vector3(0, 0, 1), Vector3.UnitX, Vector3.UnitY, Vector3.UnitZ), placement);
+        model.Element("IFCMEMBER", "R", placement, Shape(model));
+
+        var axes = Reading.Of(model).Only.Axes;
+
+        if (isRead) Near.Vector(new Vector3(0, 0, links), Reading.Value(axes).Origin);
+        else Assert.Equal(ReasonCode.PlacementNotSupported, Reading.Why(axes).Code);
+    }
+
     private static MemberAxes Place(ModelWriter model, string axis, string reference)
     {
         string Direction(string ratios) => ratios == "$" ? "$" : Bars.Ref(model.Add("IFCDIRECTION", ratios));

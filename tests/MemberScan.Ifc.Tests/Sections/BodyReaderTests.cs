@@ -246,6 +246,22 @@ public sealed class BodyReaderTests
         Assert.Contains(reading.Catalog.Members[0].Notes, n => n.Contains("nested references", StringComparison.Ordinal));
     }
 
+    [Fact]
+    public void Mapped_items_that_multiply_to_nothing_end_at_the_limit_of_steps_too()
+    {
+        // 40⁶ steps through maps whose innermost representation is empty: no body is ever found.
+        var model = Bars.Model(Release.Ifc4);
+        var item = model.Bodies.MappedItem(model.Bodies.Map(model.Bodies.Representation("MappedRepresentation")));
+        for (var level = 0; level < 6; level++)
+            item = model.Bodies.MappedItem(model.Bodies.Map(model.Bodies.Representation("MappedRepresentation", Enumerable.Repeat(item, 40))));
+        Add(model, "R", item);
+
+        var why = Reading.Why(Reading.Of(model).Only.Section);
+
+        Assert.Equal(ReasonCode.SectionNotCovered, why.Code);
+        Assert.Contains(FormattableString.Invariant($"{BodyReader.MaxSteps} nested references"), why.Message, StringComparison.Ordinal);
+    }
+
     [Theory]
     [MemberData(nameof(Schemas.All), MemberType = typeof(Schemas))]
     public void A_swept_disk_is_a_rod_or_a_tube_with_z_up_across_it(Release release)

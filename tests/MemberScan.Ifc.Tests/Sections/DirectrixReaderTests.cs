@@ -1,4 +1,5 @@
 using MemberScan.Foundation.Geometry;
+using MemberScan.Ifc.Sections;
 using MemberScan.Model.Members;
 using MemberScan.Model.Verdicts;
 
@@ -215,6 +216,18 @@ public sealed class DirectrixReaderTests
 
         Assert.Equal(ReasonCode.LengthAmbiguous, Reading.Why(spline.Section).Code);
         Assert.Equal(ReasonCode.LengthAmbiguous, Reading.Why(circle.Section).Code);
+    }
+
+    [Fact]
+    public void A_curve_of_more_pieces_than_the_limit_is_not_read()
+    {
+        var member = Disk(model =>
+        {
+            var (a, b) = (model.Point(Vector3.Zero), model.Point(Vector3.UnitX));
+            return (model.Add("IFCPOLYLINE", Spelling.References(Enumerable.Range(0, DirectrixReader.MaxPieces + 1).Select(i => i % 2 == 0 ? a : b))), "$", "$");
+        });
+
+        Assert.Equal(ReasonCode.LengthAmbiguous, Reading.Why(member.Section).Code);
     }
 
     private static Member Disk(Func<ModelWriter, (int Curve, string From, string To)> write, Release release = Release.Ifc4)
