@@ -31,7 +31,7 @@ internal sealed class AnalyticalMemberReader(
         var toProject = placed is Finding<Transform3>.Found found ? found.Value : Transform3.Identity;
         var line = Line(member, toProject);
         var axes = placed.TryGet(out _, out var notPlaced) ? Axes(member, line, toProject) : new Finding<MemberAxes>.Missing(notPlaced);
-        return new AnalyticalMember(member.Id, Instances.Text(member[2]), Instances.Text(member[0]), axes, line, toProject);
+        return new AnalyticalMember(member.Id, Instances.Text(member[2]), Instances.Text(member[0]), axes, line, toProject, schema == SchemaVersion.Ifc2x3 ? Transform3.Identity : toProject);
     }
 
     private Finding<(Vector3 Start, Vector3 End)> Line(Part21Record member, Transform3 toProject)
@@ -101,10 +101,9 @@ internal sealed class AnalyticalMemberReader(
     /// <summary>IFC2X3: z from the orientation of the profile properties; without one global Z, for a vertical member global X.</summary>
     private Finding<MemberAxes> Axes2x3(Part21Record member, Vector3 start, Vector3 along, Transform3 toProject)
     {
-        var up = toProject.Direction(Vector3.UnitZ);
-        var axes = along.TryNormalize(out var x) && x.Cross(up).Length < 1e-3
-            ? MemberAxes.From(start, along, toProject.Direction(Vector3.UnitX))
-            : MemberAxes.From(start, along, up);
+        var axes = along.TryNormalize(out var x) && x.Cross(Vector3.UnitZ).Length < 1e-3
+            ? MemberAxes.From(start, along, Vector3.UnitX)
+            : MemberAxes.From(start, along, Vector3.UnitZ);
         var orientation = relations.ProfilePropertiesOf(member.Id).Select(p => p.Orientation).FirstOrDefault(o => !o.IsEmpty);
         if (placements.Direction(orientation) is { } direction)
             axes = MemberAxes.From(start, along, toProject.Direction(direction));

@@ -74,7 +74,7 @@ internal sealed class DirectrixReader(Instances instances, PlacementReader place
 
         return curve.Keyword switch
         {
-            "IFCPOLYLINE" => Straight([.. instances.FollowAll(curve[0]).Select(placements.Point)]),
+            "IFCPOLYLINE" => instances.FollowEach(curve[0]) is { } points ? Straight([.. points.Select(placements.Point)]) : null,
             "IFCINDEXEDPOLYCURVE" => Indexed(curve),
             "IFCCOMPOSITECURVE" => Composite(curve, depth),
             "IFCTRIMMEDCURVE" => TrimmedCurve(curve),
@@ -162,8 +162,10 @@ internal sealed class DirectrixReader(Instances instances, PlacementReader place
 
     private List<Piece>? Composite(Part21Record curve, int depth)
     {
+        if (instances.FollowEach(curve[0]) is not { } segments) return null;
+
         var pieces = new List<Piece>();
-        foreach (var segment in instances.FollowAll(curve[0]))
+        foreach (var segment in segments)
         {
             if (segment.Keyword != "IFCCOMPOSITECURVESEGMENT" || !instances.TryFollow(segment[2], out var parent)) return null;
             if (Pieces(parent, depth + 1) is not { } inner || pieces.Count + inner.Count > MaxPieces) return null;
