@@ -6,6 +6,7 @@ namespace MemberScan.Ifc;
 internal sealed class Relations
 {
     private readonly Instances _instances;
+    private readonly HashSet<ulong> _voided = [];
     private readonly Dictionary<ulong, ulong> _typeOf = [];
     private readonly Dictionary<ulong, List<ulong>> _materialOf = [];
     private readonly Dictionary<ulong, ulong> _containerOf = [];
@@ -36,7 +37,11 @@ internal sealed class Relations
         Each("IFCRELCONNECTSSTRUCTURALELEMENT", r => Pair(r[4], r[5], Link));
         Each("IFCRELASSIGNSTOPRODUCT", r => Spread(r[4], r[6], (related, product) => LinkEitherWay(product, related)));
         Each("IFCRELASSOCIATESPROFILEPROPERTIES", AddProfileProperties);
+        Each("IFCRELVOIDSELEMENT", r => Pair(r[4], r[5], (element, _) => _voided.Add(element)));
     }
+
+    /// <summary>Whether openings are cut out of an element.</summary>
+    public bool HasOpenings(ulong id) => _voided.Contains(id);
 
     /// <summary>The type object of an occurrence; 0 if none.</summary>
     public ulong TypeOf(ulong id) => _typeOf.GetValueOrDefault(id);

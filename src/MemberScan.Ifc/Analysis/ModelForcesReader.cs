@@ -25,6 +25,9 @@ internal sealed class ModelForcesReader(
     /// <summary>Share of a length within which two places are one.</summary>
     private const double SamePlace = 1e-6;
 
+    /// <summary>Distance between the two lines from which the result says so [m].</summary>
+    private const double BesideNoted = 0.001;
+
     private sealed record Part(AnalyticalMember Line, Part21Record Reaction, ReactionReader.Samples Samples);
 
     /// <summary>Reads the forces of all candidates, in candidate order and then in the order of the result groups.</summary>
@@ -118,6 +121,8 @@ internal sealed class ModelForcesReader(
         MemberForces Unusable(Reason why) => new() { MemberKey = member.Key, Situation = situation, Stations = [], Source = source, Unusable = why };
         if (parts.Find(p => p.Samples.Unusable is not null) is { Samples.Unusable: { } bad }) return Unusable(bad);
         if (Overlap(parts) is { } overlap) return Unusable(overlap);
+        if (parts.Find(p => p.Line.EccentricCardinalPoint is not null) is { } eccentric)
+            return Unusable(new Reason(ReasonCode.AxesUnknown, $"the analytical member #{eccentric.Line.Id} runs along cardinal point {eccentric.Line.EccentricCardinalPoint} of its section, not its centroid; whether its forces are about the one or the other is not said"));
 
         var isOwnLine = member.Element.StepId == parts[0].Line.Id;
         if (isOwnLine)
@@ -227,18 +232,24 @@ internal sealed class ModelForcesReader(
         return axes is not null;
     }
 
+    /// <summary>Distance of an analytical member's line from a body's, where it is farther at its two ends [m].</summary>
+    private static double Offset(AnalyticalMember line, MemberAxes own)
+    {
+        double Beside(Vector3 point) => (point - own.Origin - Along(own, point) * own.X).Length;
+        return line.Line is Finding<(Vector3 Start, Vector3 End)>.Found ends ? Math.Max(Beside(ends.Value.Start), Beside(ends.Value.End)) : 0;
+    }
+
     private static double Along(MemberAxes axes, Vector3 point) => (point - axes.Origin).Dot(axes.X);
 
-    /// <summary>
-    /// The same section forces in other axes along the same line. Where x is reversed the cut face is the opposite one:
-    /// force and moment vectors change sign before they are taken along the new axes.
-    /// </summary>
+    /// <summary>The same section forces in other axes along the same line: reversed where x is, then turned about x.</summary>
+    /// <remarks>
+    /// With x reversed and y with it, the cut face is the opposite one: force and moment vectors change sign, so N, Vy, T and My stay and
+    /// Vz and Mz turn round. The lines may lie askew by the tolerance; nothing of N is laid into the shear forces for that.
+    /// </remarks>
     private static SectionForces Turned(in SectionForces forces, MemberAxes from, MemberAxes to, bool reversed)
     {
-        var sign = reversed ? -1 : 1;
-        var force = to.Components(sign * (forces.N * from.X + forces.Vy * from.Y + forces.Vz * from.Z));
-        var moment = to.Components(sign * (forces.T * from.X + forces.My * from.Y + forces.Mz * from.Z));
-        return new SectionForces(force.X, force.Y, force.Z, moment.X, moment.Y, moment.Z);
+        var along = reversed ? forces with { Vz = -forces.Vz, Mz = -forces.Mz } : forces;
+        return along.Turned(Math.Atan2(-to.Z.Dot(reversed ? -from.Y : from.Y), to.Z.Dot(from.Z)));
     }
 
     private static string Words(Part part, MemberAxes line, MemberAxes own, bool reversed, double start)
@@ -246,7 +257,9 @@ internal sealed class ModelForcesReader(
         var angle = Math.Atan2(own.Z.Dot(line.Y), own.Z.Dot(line.Z)) * 180 / Math.PI;
         var turn = Math.Abs(angle) < 0.01 ? "axes alike" : string.Create(CultureInfo.InvariantCulture, $"member z lies {angle:0.##}° from the analytical z towards its y");
         var sense = reversed ? ", x reversed" : "";
-        return string.Create(CultureInfo.InvariantCulture, $"{part.Samples.Conversion}; analytical member #{part.Line.Id}: {turn}{sense}, starts at {Math.Round(start, 6):0.######} m of the member");
+        var offset = Offset(part.Line, own);
+        var beside = offset < BesideNoted ? "" : string.Create(CultureInfo.InvariantCulture, $", its line lies {offset * 1e3:0.#} mm beside the body's; forces taken about the section's centroid");
+        return string.Create(CultureInfo.InvariantCulture, $"{part.Samples.Conversion}; analytical member #{part.Line.Id}: {turn}{sense}, starts at {Math.Round(start, 6):0.######} m of the member{beside}");
     }
 
     /// <summary>Reactions hung on an element itself: no axes say how its components lie.</summary>

@@ -54,9 +54,12 @@ internal sealed class ReactionReader(Instances instances, PlacementReader placem
             stations.Add(new ForceStation(places[i], own));
         }
 
+        var words = Words(reaction, turn);
+        if (loads.Exists(l => l.Keyword == "IFCSTRUCTURALLOADSINGLEFORCEWARPING" && Instances.Real(l[7]) is not (null or 0)))
+            words += "; the warping moment is left out";
         return rules.Convention == ForceConvention.EndForces
-            ? FromEndForces(reaction, loads.Count, stations, length.Value, Words(reaction, turn))
-            : new Samples(stations.ToImmutable(), Words(reaction, turn), null);
+            ? FromEndForces(reaction, loads.Count, stations, length.Value, words)
+            : new Samples(stations.ToImmutable(), words, null);
     }
 
     private double[]? Places(Part21Record reaction, Part21Record load, int count, double length, AnalyticalMember member, out Reason? why)

@@ -27,6 +27,9 @@ internal sealed class MaterialReader(
 
     private static readonly char[] s_partMarks = ['/', ',', ';', ':', '|'];
 
+    // Patterns are matched in linear time; this only bounds what a settings file could ask for.
+    private static readonly TimeSpan s_patience = TimeSpan.FromSeconds(10);
+
     private readonly Dictionary<string, Grade?> _gradeOf = new(StringComparer.Ordinal);
 
     /// <summary>Profiles that the association of an object (or its type) names; empty if none.</summary>
@@ -156,7 +159,7 @@ internal sealed class MaterialReader(
     }
 
     private Grade? Matching(string name) => rules.Grades.FirstOrDefault(grade =>
-        Regex.IsMatch(name, $@"\A(?:{grade.Pattern})\z", RegexOptions.IgnoreCase | RegexOptions.CultureInvariant | RegexOptions.NonBacktracking, TimeSpan.FromMilliseconds(100)));
+        Regex.IsMatch(name, $@"\A(?:{grade.Pattern})\z", RegexOptions.IgnoreCase | RegexOptions.CultureInvariant | RegexOptions.NonBacktracking, s_patience));
 
     /// <summary>Material definitions of the occurrence, then those of its type.</summary>
     private IEnumerable<IEnumerable<Part21Record>> Levels(ulong id)

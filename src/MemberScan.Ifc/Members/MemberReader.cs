@@ -115,6 +115,8 @@ internal sealed class MemberReader(
             notes = notes.Add(string.Create(CultureInfo.InvariantCulture, $"the element has {read.Length - count} further bodies that are no bars and are not checked ({whyOther})"));
         }
 
+        if (relations.HasOpenings(record.Id)) notes = notes.Add("openings are cut out of the element; the gross section is used");
+
         return new Member
         {
             Key = key,

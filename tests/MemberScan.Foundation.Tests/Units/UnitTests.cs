@@ -46,6 +46,9 @@ public sealed class UnitTests
     [InlineData("m2")]
     [InlineData("")]
     [InlineData(" ")]
+    [InlineData("kN·m·m")]
+    [InlineData("N-m-m")]
+    [InlineData("k·N")]
     [InlineData("kN/m")]
     public void Case_matters_and_other_units_are_not_known(string spelling) => Assert.False(Unit.TryParse(spelling, out _));
 

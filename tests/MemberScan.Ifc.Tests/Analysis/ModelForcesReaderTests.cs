@@ -105,6 +105,65 @@ public sealed class ModelForcesReaderTests
         Assert.Equal(1, ForceLine.Build(forces.Stations, s_length).Stations.Select(s => Math.Round(s.Forces.N, 6)).ToList().IndexOf(expected[1]));
     }
 
+    [Theory]
+    [InlineData(10, true)]
+    [InlineData(5, true)]
+    [InlineData(8, false)]
+    public void A_line_along_another_cardinal_point_than_the_centroid_leaves_open_what_its_forces_are_about(int cardinalPoint, bool isUsable)
+    {
+        var model = Bars.Model(Release.Ifc4);
+        var line = Lines.CurveMember(model, "L", Lines.Edge(model, Vector3.Zero, new Vector3(2, 0, 0)), Vector3.UnitZ);
+        var set = model.Materials.ProfileSet("flat", model.Materials.Material("S235JR"), model.Profiles.Of(Bars.Flat));
+        var usage = model.Add("IFCMATERIALPROFILESETUSAGE", Bars.Ref(set), cardinalPoint.ToString(System.Globalization.CultureInfo.InvariantCulture), "$");
+        model.Rooted("IFCRELASSOCIATESMATERIAL", "usage", null, Bars.Refs(line), Bars.Ref(usage));
+        Lines.CurveReaction(model, line, Lines.SingleForce(model, "1.", "0.", "0.", "0.", "0.", "0."), Combination(model.StartAnalysis("landing", Transform3.Identity)), "CONST");
+
+        var forces = Reading.Of(model).OnlyForces;
+
+        Assert.Equal(isUsable, forces.Unusable is null);
+        if (!isUsable) Assert.Contains("cardinal point 8", forces.Unusable!.Message, StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void A_line_beside_its_body_is_used_about_the_centroid_and_it_is_said()
+    {
+        var model = Bars.Model(Release.Ifc4);
+        var body = Bars.Add(model, "rail", Bars.Rail, 2);
+        var line = Lines.CurveMember(model, "L", Lines.Edge(model, new Vector3(0.012, 0, 0), new Vector3(0.012, 0, 2)), Vector3.UnitX);
+        model.Rooted("IFCRELASSIGNSTOPRODUCT", "link", "Context", Bars.Refs(line), "$", Bars.Ref(body));
+        Lines.CurveReaction(model, line, Lines.SingleForce(model, "5.", "0.", "0.", "0.", "0.", "0."), Combination(model.StartAnalysis("landing", Transform3.Identity)), "CONST");
+
+        var forces = Reading.Of(model).OnlyForces;
+
+        Assert.Contains("its line lies 12 mm beside the body's", forces.Conversion, StringComparison.Ordinal);
+        Assert.All(forces.Stations, s => Assert.Equal(5, s.Forces.N, 1e-12));
+    }
+
+    [Fact]
+    public void A_line_slightly_askew_lays_nothing_of_its_axial_force_into_shear()
+    {
+        var model = Bars.Model(Release.Ifc4);
+        var body = Bars.Add(model, "rail", Bars.Flat, 2);
+        var line = Lines.CurveMember(model, "L", Lines.Edge(model, Vector3.Zero, new Vector3(0.02, 0, 2)), Vector3.UnitY);
+        model.Rooted("IFCRELASSIGNSTOPRODUCT", "link", "Context", Bars.Refs(line), "$", Bars.Ref(body));
+        Lines.CurveReaction(model, line, Lines.SingleForce(model, "10000.", "0.", "0.", "0.", "0.", "0."), Combination(model.StartAnalysis("landing", Transform3.Identity)), "CONST");
+
+        var forces = Reading.Of(model).OnlyForces;
+
+        Assert.All(forces.Stations, s => Assert.Equal(new SectionForces(10000, 0, 0, 0, 0, 0), s.Forces));
+    }
+
+    [Fact]
+    public void A_warping_moment_is_left_out_and_it_is_said()
+    {
+        var model = Bars.Model(Release.Ifc4);
+        var line = Lines.CurveMember(model, "L", Lines.Edge(model, Vector3.Zero, new Vector3(2, 0, 0)), Vector3.UnitZ);
+        var load = model.Add("IFCSTRUCTURALLOADSINGLEFORCEWARPING", "$", "1.", "0.", "0.", "0.", "0.", "0.", "3.5");
+        Lines.CurveReaction(model, line, load, Combination(model.StartAnalysis("landing", Transform3.Identity)), "CONST");
+
+        Assert.Contains("the warping moment is left out", Reading.Of(model).OnlyForces.Conversion, StringComparison.Ordinal);
+    }
+
     [Fact]
     public void A_chain_with_a_link_that_has_no_results_is_not_used()
     {

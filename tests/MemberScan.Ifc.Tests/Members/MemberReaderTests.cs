@@ -363,4 +363,15 @@ public sealed class MemberReaderTests
 
         model.Associate(model.Materials.ProfileSetUsage(model.Materials.ProfileSet("flat", model.Materials.Material("S235"), profile)), members);
     }
+
+    [Fact]
+    public void Openings_in_an_element_are_noted()
+    {
+        var model = Bars.Model(Release.Ifc4);
+        var beam = Bars.Add(model, "beam", Bars.Flat, 2, keyword: "IFCBEAM");
+        var opening = model.Rooted("IFCOPENINGELEMENT", "hole", "hole", "$", "$", "$", "$", "$");
+        model.Rooted("IFCRELVOIDSELEMENT", "cut", null, Bars.Ref(beam), Bars.Ref(opening));
+
+        Assert.Contains(Reading.Of(model).Only.Notes, note => note.Contains("openings are cut out", StringComparison.Ordinal));
+    }
 }

@@ -134,13 +134,22 @@ public sealed class DirectrixReaderTests
     }
 
     [Theory]
-    [InlineData("0.", "1.", 1)]
+    [InlineData("0.2", "1.", 0.8)]
     [InlineData("0.5", "91.", 0.5 + 0.2 * Math.PI)]
     public void Parameters_of_a_composite_curve_run_through_its_segments(string from, string to, double length)
     {
         var text = Composite(Release.Ifc4, degrees: true, "IFCPARAMETERVALUE(-90.)", "IFCPARAMETERVALUE(0.)", ".T.", ".PARAMETER.", ".T.", from, to);
 
         Reading.AssertNear(length, Reading.Value(Reading.Of(text).Only.Length));
+    }
+
+    /// <summary>0 to 1 is the first piece by the standard; common practice among exporters is to mean the whole curve.</summary>
+    [Fact]
+    public void Parameters_0_to_1_on_a_longer_curve_are_ambiguous()
+    {
+        var text = Composite(Release.Ifc4, degrees: true, "IFCPARAMETERVALUE(-90.)", "IFCPARAMETERVALUE(0.)", ".T.", ".PARAMETER.", ".T.", "0.", "1.");
+
+        Assert.Equal(ReasonCode.LengthAmbiguous, Reading.Why(Reading.Of(text).Only.Section).Code);
     }
 
     [Fact]
