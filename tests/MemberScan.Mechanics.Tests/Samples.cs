@@ -13,6 +13,7 @@ internal static class Samples
         new Round(0.010),
         new Tube(0.02415, 0.0032),
         new Tube(0.030, 0.020),
+        new Tube(0.030, 0.0285),
         new Tube(0.100, 0.0005),
         new Rectangle(0.040, 0.080),
         new Rectangle(0.080, 0.012),
@@ -21,7 +22,9 @@ internal static class Samples
         new RoundedRectangle(0.050, 0.030, 0.006),
         new RoundedRectangle(0.040, 0.040, 0.020),
         new Box(0.050, 0.100, 0.005, 0.010, 0.005),
+        new RoundedRectangle(0.120, 0.010, 0.001),
         new Box(0.060, 0.060, 0.003),
+        new Box(0.080, 0.050, 0.012, 0.006, 0),
     ];
 
     /// <summary>Every section in every model that has it, ν = 0.3.</summary>

@@ -73,18 +73,18 @@ internal sealed class UnitReader(Instances instances, DiagnosticList diagnostics
 
     private double? DerivedFactor(Part21Record unit, int depth)
     {
+        if (instances.FollowEach(unit[0]) is not { Count: > 0 } elements) return null;
+
         var factor = 1.0;
-        var elements = 0;
-        foreach (var element in instances.FollowAll(unit[0]))
+        foreach (var element in elements)
         {
-            elements++;
             if (!element[1].TryInteger(out var exponent) || Math.Abs(exponent) > 12) return null;
             if (!instances.TryFollow(element[0], out var component) || Factor(component, depth + 1) is not { } inner) return null;
 
             factor *= Math.Pow(inner, exponent);
         }
 
-        return elements > 0 && double.IsFinite(factor) && factor > 0 ? factor : null;
+        return double.IsFinite(factor) && factor > 0 ? factor : null;
     }
 
     private string Words(Part21Record unit, int depth)

@@ -4,24 +4,44 @@ using MemberScan.Mechanics.Series;
 
 namespace MemberScan.Mechanics.Outlines;
 
-/// <summary>A ring. Chart: p is the angle from +y towards +z, sin q runs from −1 at the bore to 1 at the outer edge.</summary>
-internal sealed class AnnulusOutline(Tube section) : Outline(section, s_lattice)
+/// <summary>A ring. Inside: p is the angle from +y towards +z, sin q runs from −1 at the bore to 1 at the outer edge.</summary>
+internal sealed class AnnulusOutline : Outline
 {
     private const int Spokes = 32;
     private const int Rings = 9;
-    private static readonly Lattice s_lattice = Lattice.Grid(
+    private static readonly Lattice s_edges = Lattice.Curves(2, Spokes, ring: true);
+    private static readonly Lattice s_inside = Lattice.Grid(
         Lattice.Even(-Math.PI / 2, Math.PI / 2, Rings), Lattice.Even(0, 2 * Math.PI, Spokes + 1).AsSpan(0, Spokes), ring: true);
 
-    private readonly double _outer = section.OuterRadius;
-    private readonly double _inner = section.InnerRadius;
+    private readonly double _outer;
+    private readonly double _inner;
+
+    /// <summary>The outline of a tube.</summary>
+    public AnnulusOutline(Tube section)
+        : base(section)
+    {
+        (_outer, _inner) = (section.OuterRadius, section.InnerRadius);
+        Edges = new Chart(s_edges, (p, q) => OnCircle(q == 0 ? _outer : _inner, p));
+        Inside = new Chart(s_inside, (p, q) =>
+        {
+            var share = 0.5 * (1 + Math.Sin(q));
+            return OnCircle(_inner * (1 - share) + _outer * share, p);
+        });
+    }
 
     /// <inheritdoc/>
-    public override (double Y, double Z) Map(double p, double q)
+    public override Chart Edges { get; }
+
+    /// <inheritdoc/>
+    public override Chart Inside { get; }
+
+    /// <summary>The point of a circle at an angle from +y towards +z [rad].</summary>
+    public static (double Y, double Z) OnCircle(double radius, double angle)
     {
-        var share = 0.5 * (1 + Math.Sin(q));
-        var radius = _inner * (1 - share) + _outer * share;
-        var (sin, cos) = Math.SinCos(p);
-        return (radius * cos, radius * sin);
+        const double Rounding = 1e-15;
+
+        var (sin, cos) = Math.SinCos(angle);
+        return (Math.Abs(cos) < Rounding ? 0 : radius * cos, Math.Abs(sin) < Rounding ? 0 : radius * sin);
     }
 
     /// <inheritdoc/>

@@ -4,23 +4,34 @@ using MemberScan.Mechanics.Sections;
 
 namespace MemberScan.Mechanics.Outlines;
 
-/// <summary>A full disc. Chart: <c>(p, q)/√(p²+q²)</c> is the direction, <c>r·sin √(p²+q²)</c> the distance from the centre.</summary>
-internal sealed class DiscOutline(Round section) : Outline(section, s_lattice)
+/// <summary>A full disc. Inside: <c>(p, q)/√(p²+q²)</c> is the direction, <c>r·sin √(p²+q²)</c> the distance from the centre.</summary>
+internal sealed class DiscOutline : Outline
 {
     private const int Rings = 10;
     private const int Spokes = 40;
-    private static readonly Lattice s_lattice = BuildLattice();
-    private readonly double _radius = section.Radius;
+    private static readonly Lattice s_edge = Lattice.Curves(1, Spokes, ring: true);
+    private static readonly Lattice s_inside = BuildLattice();
+    private readonly double _radius;
+
+    /// <summary>The outline of a round bar.</summary>
+    public DiscOutline(Round section)
+        : base(section)
+    {
+        _radius = section.Radius;
+        Edges = new Chart(s_edge, (p, _) => AnnulusOutline.OnCircle(_radius, p));
+        Inside = new Chart(s_inside, (p, q) =>
+        {
+            var length = Math.Sqrt(p * p + q * q);
+            var scale = length == 0 ? 0 : _radius * Math.Sin(length) / length;
+            return (scale * p, scale * q);
+        });
+    }
 
     /// <inheritdoc/>
-    public override (double Y, double Z) Map(double p, double q)
-    {
-        var length = Math.Sqrt(p * p + q * q);
-        if (length == 0) return (0, 0);
+    public override Chart Edges { get; }
 
-        var scale = _radius * Math.Sin(length) / length;
-        return (scale * p, scale * q);
-    }
+    /// <inheritdoc/>
+    public override Chart Inside { get; }
 
     /// <inheritdoc/>
     public override bool Contains(double y, double z, double tolerance) => double.Hypot(y, z) <= _radius + tolerance;

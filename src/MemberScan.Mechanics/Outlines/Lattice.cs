@@ -14,6 +14,9 @@ internal sealed record Lattice(
     /// <summary>Places for neighbours kept for each node.</summary>
     public const int NeighbourCount = 8;
 
+    /// <summary>Whether q only numbers separate curves.</summary>
+    public bool AreCurves => PitchQ == 0;
+
     /// <summary>Number of nodes.</summary>
     public int Count => P.Length;
 
@@ -21,8 +24,29 @@ internal sealed record Lattice(
     /// <param name="rows">Values of q, one a row.</param>
     /// <param name="columns">Values of p, one a column.</param>
     /// <param name="ring">Whether the last column is the neighbour of the first.</param>
-    /// <param name="curves">Whether each row is a curve by itself, without neighbours in other rows.</param>
-    public static Lattice Grid(ReadOnlySpan<double> rows, ReadOnlySpan<double> columns, bool ring, bool curves = false)
+    public static Lattice Grid(ReadOnlySpan<double> rows, ReadOnlySpan<double> columns, bool ring) => Build(rows, columns, ring, curves: false);
+
+    /// <summary>Separate curves, numbered by q: sin p runs from −1 to 1 along each, or p once around.</summary>
+    public static Lattice Curves(int count, int nodesEach, bool ring) => Build(
+        [.. Enumerable.Range(0, count).Select(q => (double)q)],
+        ring ? Even(0, 2 * Math.PI, nodesEach + 1).AsSpan(0, nodesEach) : Even(-Math.PI / 2, Math.PI / 2, nodesEach),
+        ring, curves: true);
+
+    /// <summary>Values from one end to the other at equal distances, both ends included to the last bit.</summary>
+    public static double[] Even(double from, double to, int count)
+    {
+        var values = new double[count];
+        for (var i = 0; i < count; i++)
+        {
+            // From both ends towards the middle: symmetric values are exact opposites.
+            var share = (double)i / (count - 1);
+            values[i] = from * (1 - share) + to * share;
+        }
+
+        return values;
+    }
+
+    private static Lattice Build(ReadOnlySpan<double> rows, ReadOnlySpan<double> columns, bool ring, bool curves)
     {
         var (p, q) = (ImmutableArray.CreateBuilder<double>(), ImmutableArray.CreateBuilder<double>());
         var neighbours = ImmutableArray.CreateBuilder<int>();
@@ -48,19 +72,5 @@ internal sealed record Lattice(
         return new Lattice(
             p.ToImmutable(), q.ToImmutable(), neighbours.ToImmutable(),
             columns[1] - columns[0], curves ? 0 : rows[1] - rows[0]);
-    }
-
-    /// <summary>Values from one end to the other at equal distances, both ends included to the last bit.</summary>
-    public static double[] Even(double from, double to, int count)
-    {
-        var values = new double[count];
-        for (var i = 0; i < count; i++)
-        {
-            // From both ends towards the middle: symmetric values are exact opposites.
-            var share = (double)i / (count - 1);
-            values[i] = from * (1 - share) + to * share;
-        }
-
-        return values;
     }
 }

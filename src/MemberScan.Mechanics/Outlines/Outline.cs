@@ -3,30 +3,22 @@ using MemberScan.Mechanics.Sections;
 
 namespace MemberScan.Mechanics.Outlines;
 
-/// <summary>Where the material of a section lies, seen by a search: a chart, a lattice of nodes on it, edges and names of places.</summary>
-/// <remarks>
-/// A chart maps (p, q) to points of the section so that edges are folds: a step beyond an edge comes back inside, and a stress that is
-/// largest at an edge is a plain smooth maximum in (p, q). So one search without bounds serves inside and edge alike.
-/// </remarks>
+/// <summary>Where the material of a section lies, seen by a search: charts of its edges and its inside, and names of places.</summary>
 internal abstract class Outline
 {
     /// <summary>Share of the largest extent within which a point counts as lying on an edge.</summary>
     public const double OnEdge = 1e-9;
 
-    private protected Outline(CrossSection section, Lattice lattice)
-    {
-        Extent = Math.Max(section.ExtentY, section.ExtentZ);
-        Nodes = lattice;
-    }
+    private protected Outline(CrossSection section) => Extent = Math.Max(section.ExtentY, section.ExtentZ);
 
     /// <summary>Largest extent [m].</summary>
     public double Extent { get; }
 
-    /// <summary>Nodes of the coarse search.</summary>
-    public Lattice Nodes { get; }
+    /// <summary>The edges, outer and inner, and creases of the shear stress between them: curves.</summary>
+    public abstract Chart Edges { get; }
 
-    /// <summary>The point of the section at chart coordinates.</summary>
-    public abstract (double Y, double Z) Map(double p, double q);
+    /// <summary>The inside, edges included; null where it is never needed.</summary>
+    public abstract Chart? Inside { get; }
 
     /// <summary>Whether a point lies in the material or within a tolerance [m] of it.</summary>
     public abstract bool Contains(double y, double z, double tolerance);

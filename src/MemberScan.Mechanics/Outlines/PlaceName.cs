@@ -19,6 +19,8 @@ internal static class PlaceName
     private const double Negligible = 1e-9;
 
     private static readonly double s_halfDegree = Math.Sin(Math.PI / 360);
+    private static readonly string[] s_signs = ["+y", "−y", "+z", "−z"];
+    private static readonly string[] s_sides = NameSides();
 
     /// <summary>A point of the outer edge of a round section of the given radius [m].</summary>
     public static string OnOuterCircle(double y, double z, in SectionForces forces, double radius) => Relation(y, z, forces, radius) switch
@@ -27,7 +29,9 @@ internal static class PlaceName
             ? axis switch { "+y" => "extreme fibre, +y", "+z" => "extreme fibre, +z", "−y" => "extreme fibre, −y", _ => "extreme fibre, −z" }
             : "extreme fibre, " + Direction(y, z),
         2 => NeutralAxis(y, z),
-        _ => "outer edge, " + (AxisOf(y, z) ?? Direction(y, z)),
+        _ => AxisOf(y, z) is { } axis
+            ? axis switch { "+y" => "outer edge, +y", "+z" => "outer edge, +z", "−y" => "outer edge, −y", _ => "outer edge, −z" }
+            : "outer edge, " + Direction(y, z),
     };
 
     /// <summary>A point of the bore of a tube of the given outer radius [m].</summary>
@@ -44,17 +48,27 @@ internal static class PlaceName
 
     /// <summary>A point inside a rectangle, named by its quadrant or half axis.</summary>
     public static string InsideTowards(double y, double z, double tolerance) =>
-        "inside, towards " + (Math.Abs(y) <= tolerance ? SignedZ(z) : Math.Abs(z) <= tolerance ? SignedY(y) : Quadrant(y, z));
+        (Math.Abs(y) <= tolerance, Math.Abs(z) <= tolerance, y < 0, z < 0) switch
+        {
+            (true, _, _, false) => "inside, towards +z",
+            (true, _, _, true) => "inside, towards −z",
+            (_, true, false, _) => "inside, towards +y",
+            (_, true, true, _) => "inside, towards −y",
+            (_, _, false, false) => "inside, towards +y +z",
+            (_, _, true, false) => "inside, towards −y +z",
+            (_, _, true, true) => "inside, towards −y −z",
+            (_, _, false, true) => "inside, towards +y −z",
+        };
 
     /// <summary>A point of the outer edge of a rectangle by half sides and corner radius [m]; null when it is not on the edge.</summary>
     public static string? OnRectangle(
         double y, double z, double halfWidth, double halfDepth, double radius, in SectionForces forces, double tolerance)
     {
         if (RoundedCorner.Beyond(halfWidth, halfDepth, radius, y, z) < -tolerance) return null;
-        if (IsCorner(y, z, halfWidth, halfDepth, radius, tolerance)) return Corner(y, z);
+        if (IsCorner(y, z, halfWidth, halfDepth, radius, tolerance)) return Corner(y, z, inner: false);
 
         var onY = halfWidth - Math.Abs(y) <= tolerance;
-        if (Math.Abs(onY ? z : y) > tolerance) return SideTowards(y, z, onY, halfWidth, halfDepth);
+        if (Math.Abs(onY ? z : y) > tolerance) return SideTowards(y, z, onY, halfWidth, halfDepth, inner: false);
 
         // σ of bending is extreme over a whole side only when the other moment does not act.
         var (own, other) = onY
@@ -62,18 +76,18 @@ internal static class PlaceName
             : (Math.Abs(forces.My) / halfDepth, Math.Abs(forces.Mz) / halfWidth);
         return own > 0 && other <= Negligible * own && own > Negligible * Largest(forces, Math.Max(halfWidth, halfDepth))
             ? (onY ? (y > 0 ? "extreme fibre, +y" : "extreme fibre, −y") : z > 0 ? "extreme fibre, +z" : "extreme fibre, −z")
-            : MiddleOf(y, z, onY, halfWidth, halfDepth);
+            : MiddleOf(y, z, onY, halfWidth, halfDepth, inner: false);
     }
 
     /// <summary>A point of the inner edge of a rectangular tube, by half sides and corner radius of the hole [m].</summary>
     public static string OnInnerRectangle(double y, double z, double halfWidth, double halfDepth, double radius, double tolerance)
     {
-        if (IsCorner(y, z, halfWidth, halfDepth, radius, tolerance)) return "inner " + Corner(y, z);
+        if (IsCorner(y, z, halfWidth, halfDepth, radius, tolerance)) return Corner(y, z, inner: true);
 
         var onY = Math.Abs(halfWidth - Math.Abs(y)) <= tolerance;
-        return "inner face, " + (Math.Abs(onY ? z : y) <= tolerance
-            ? MiddleOf(y, z, onY, halfWidth, halfDepth)
-            : SideTowards(y, z, onY, halfWidth, halfDepth));
+        return Math.Abs(onY ? z : y) <= tolerance
+            ? MiddleOf(y, z, onY, halfWidth, halfDepth, inner: true)
+            : SideTowards(y, z, onY, halfWidth, halfDepth, inner: true);
     }
 
     // 1 in line with the bending (or, without it, the shear) resultant, 2 square to it, 0 neither.
@@ -119,32 +133,50 @@ internal static class PlaceName
             ? Math.Abs(halfWidth - Math.Abs(y)) <= tolerance && Math.Abs(halfDepth - Math.Abs(z)) <= tolerance
             : Math.Abs(y) > halfWidth - radius + tolerance && Math.Abs(z) > halfDepth - radius + tolerance;
 
-    private static string Corner(double y, double z) => (y > 0, z > 0) switch
+    private static string Corner(double y, double z, bool inner) => (y > 0, z > 0, inner) switch
     {
-        (true, true) => "corner +y +z",
-        (false, true) => "corner −y +z",
-        (false, false) => "corner −y −z",
-        (true, false) => "corner +y −z",
+        (true, true, false) => "corner +y +z",
+        (false, true, false) => "corner −y +z",
+        (false, false, false) => "corner −y −z",
+        (true, false, false) => "corner +y −z",
+        (true, true, true) => "inner corner +y +z",
+        (false, true, true) => "inner corner −y +z",
+        (false, false, true) => "inner corner −y −z",
+        (true, false, true) => "inner corner +y −z",
     };
 
-    private static string MiddleOf(double y, double z, bool onY, double halfWidth, double halfDepth) =>
-        $"middle of the {SideKind(onY, halfWidth, halfDepth)}, {(onY ? SignedY(y) : SignedZ(z))}";
+    private static string MiddleOf(double y, double z, bool onY, double halfWidth, double halfDepth, bool inner) =>
+        s_sides[Number(y, z, onY, halfWidth, halfDepth, 0, inner)];
 
-    private static string SideTowards(double y, double z, bool onY, double halfWidth, double halfDepth)
-    {
-        var kind = SideKind(onY, halfWidth, halfDepth);
-        return onY ? $"{kind}, {SignedY(y)}, towards {SignedZ(z)}" : $"{kind}, {SignedZ(z)}, towards {SignedY(y)}";
-    }
+    private static string SideTowards(double y, double z, bool onY, double halfWidth, double halfDepth, bool inner) =>
+        s_sides[Number(y, z, onY, halfWidth, halfDepth, (onY ? z : y) < 0 ? 1 : 2, inner)];
 
-    private static string SideKind(bool onY, double halfWidth, double halfDepth)
+    // Digits: inner face, kind of side, middle or which half, which side (+y −y +z −z).
+    private static int Number(double y, double z, bool onY, double halfWidth, double halfDepth, int part, bool inner)
     {
         var (own, other) = onY ? (halfDepth, halfWidth) : (halfWidth, halfDepth);
-        return Math.Abs(own - other) <= 1e-9 * own ? "side" : own > other ? "long side" : "short side";
+        var kind = Math.Abs(own - other) <= 1e-9 * own ? 0 : own > other ? 1 : 2;
+        var side = onY ? (y < 0 ? 1 : 0) : z < 0 ? 3 : 2;
+        return (((inner ? 3 : 0) + kind) * 3 + part) * 4 + side;
+    }
+
+    private static string[] NameSides()
+    {
+        var names = new List<string>();
+        foreach (var face in new[] { "", "inner face, " })
+        {
+            foreach (var kind in new[] { "side", "long side", "short side" })
+            {
+                names.AddRange(s_signs.Select(sign => $"{face}middle of the {kind}, {sign}"));
+                foreach (var (towardsZ, towardsY) in new[] { ("−z", "−y"), ("+z", "+y") })
+                    names.AddRange(s_signs.Select((sign, i) => $"{face}{kind}, {sign}, towards {(i < 2 ? towardsZ : towardsY)}"));
+            }
+        }
+
+        return [.. names];
     }
 
     private static string SignedY(double y) => y < 0 ? "−y" : "+y";
 
     private static string SignedZ(double z) => z < 0 ? "−z" : "+z";
-
-    private static string Quadrant(double y, double z) => $"{SignedY(y)} {SignedZ(z)}";
 }

@@ -4,24 +4,40 @@ using MemberScan.Mechanics.Series;
 
 namespace MemberScan.Mechanics.Outlines;
 
-/// <summary>A full rectangle with sharp or rounded corners. Chart: <c>z = (h/2)·sin q</c>, <c>y = w(z)·sin p</c>, w half the width at z.</summary>
-internal sealed class RectangleOutline(CrossSection section, double width, double depth, double radius)
-    : Outline(section, s_lattice)
+/// <summary>A full rectangle with sharp or rounded corners.</summary>
+/// <remarks>
+/// Inside: <c>z = (h/2)·sin q</c>, <c>y = w(z)·sin p</c>, w half the width at z. Edges: the pieces of <see cref="RoundedCorner"/>.
+/// </remarks>
+internal sealed class RectangleOutline : Outline
 {
     private const int Lines = 25;
-    private static readonly Lattice s_lattice = Lattice.Grid(
+    private static readonly Lattice s_sharp = Lattice.Curves(RoundedCorner.Sides, RoundedCorner.NodesPerPiece, ring: false);
+    private static readonly Lattice s_rounded = Lattice.Curves(RoundedCorner.Pieces, RoundedCorner.NodesPerPiece, ring: false);
+    private static readonly Lattice s_inside = Lattice.Grid(
         Lattice.Even(-Math.PI / 2, Math.PI / 2, Lines), Lattice.Even(-Math.PI / 2, Math.PI / 2, Lines), ring: false);
 
-    private readonly double _halfWidth = width / 2;
-    private readonly double _halfDepth = depth / 2;
-    private readonly double _radius = radius;
+    private readonly double _halfWidth;
+    private readonly double _halfDepth;
+    private readonly double _radius;
+
+    /// <summary>The outline of a section by width, depth and corner radius [m].</summary>
+    public RectangleOutline(CrossSection section, double width, double depth, double radius)
+        : base(section)
+    {
+        (_halfWidth, _halfDepth, _radius) = (width / 2, depth / 2, radius);
+        Edges = new Chart(radius > 0 ? s_rounded : s_sharp, (p, piece) => RoundedCorner.OnPiece(_halfWidth, _halfDepth, _radius, 0, (int)piece, p));
+        Inside = new Chart(s_inside, (p, q) =>
+        {
+            var z = _halfDepth * Math.Sin(q);
+            return (HalfWidthAt(Math.Abs(z)) * Math.Sin(p), z);
+        });
+    }
 
     /// <inheritdoc/>
-    public override (double Y, double Z) Map(double p, double q)
-    {
-        var z = _halfDepth * Math.Sin(q);
-        return (HalfWidthAt(Math.Abs(z)) * Math.Sin(p), z);
-    }
+    public override Chart Edges { get; }
+
+    /// <inheritdoc/>
+    public override Chart Inside { get; }
 
     /// <inheritdoc/>
     public override bool Contains(double y, double z, double tolerance) =>
@@ -47,14 +63,22 @@ internal sealed class RectangleOutline(CrossSection section, double width, doubl
     public override IEnumerable<(double Y, double Z, double Area)> Quadrature()
     {
         var (flatY, flatZ) = (_halfWidth - _radius, _halfDepth - _radius);
+        foreach (var (y, dy) in Panels(flatY, _halfDepth))
+        {
+            foreach (var (z, dz) in Panels(flatZ, _halfWidth))
+            {
+                foreach (var (signY, signZ) in RoundedCorner.Quadrants) yield return (signY * y, signZ * z, dy * dz);
+            }
+        }
+
+        if (_radius == 0) yield break;
+
         foreach (var (u, wu) in GaussLegendre.UnitInterval)
         {
             foreach (var (v, wv) in GaussLegendre.UnitInterval)
             {
                 foreach (var (signY, signZ) in RoundedCorner.Quadrants)
                 {
-                    yield return (signY * u * flatY, signZ * v * flatZ, wu * wv * flatY * flatZ);
-                    if (_radius == 0) continue;
 
                     yield return (signY * (flatY + u * _radius), signZ * v * flatZ, wu * wv * _radius * flatZ);
                     yield return (signY * u * flatY, signZ * (flatZ + v * _radius), wu * wv * flatY * _radius);
@@ -66,6 +90,18 @@ internal sealed class RectangleOutline(CrossSection section, double width, doubl
                         wu * wv * Math.PI / 2 * _radius * _radius * cos * cos);
                 }
             }
+        }
+    }
+
+    // A half side from its end inwards: the stresses of a flat bar change within some thicknesses of its ends.
+    private static IEnumerable<(double At, double Length)> Panels(double half, double otherHalf)
+    {
+        var from = 0.0;
+        foreach (var to in new[] { Math.Min(half, 2 * otherHalf), Math.Min(half, 10 * otherHalf), half })
+        {
+            if (to <= from) continue;
+            foreach (var (u, weight) in GaussLegendre.UnitInterval) yield return (half - from - (to - from) * u, weight * (to - from));
+            from = to;
         }
     }
 

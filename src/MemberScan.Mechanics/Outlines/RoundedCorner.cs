@@ -5,8 +5,35 @@ namespace MemberScan.Mechanics.Outlines;
 /// <summary>Geometry shared by the edges of rectangles with sharp or rounded corners, by half sides and corner radius [m].</summary>
 internal static class RoundedCorner
 {
+    /// <summary>Straight pieces of an edge.</summary>
+    public const int Sides = 4;
+
+    /// <summary>All pieces of an edge: the sides, then the corners.</summary>
+    public const int Pieces = 8;
+
+    /// <summary>Nodes of a coarse search on a piece; odd, so that its middle is one.</summary>
+    public const int NodesPerPiece = 17;
+
     /// <summary>Signs of the four quadrants.</summary>
     public static ImmutableArray<(int Y, int Z)> Quadrants { get; } = [(1, 1), (-1, 1), (-1, -1), (1, -1)];
+
+    /// <summary>The point of a piece where sin p runs from −1 to 1; sides stop short of their corners by a length [m].</summary>
+    public static (double Y, double Z) OnPiece(double halfWidth, double halfDepth, double radius, double shortBy, int piece, double p)
+    {
+        var share = Math.Sin(p);
+        var (flatY, flatZ) = (halfWidth - radius - shortBy, halfDepth - radius - shortBy);
+        switch (piece)
+        {
+            case 0: return (flatY * share, halfDepth);
+            case 1: return (flatY * share, -halfDepth);
+            case 2: return (halfWidth, flatZ * share);
+            case 3: return (-halfWidth, flatZ * share);
+            default:
+                var (signY, signZ) = Quadrants[piece - Sides];
+                var (sin, cos) = Math.SinCos(Math.PI / 4 * (1 + share));
+                return (signY * (halfWidth - radius + radius * cos), signZ * (halfDepth - radius + radius * sin));
+        }
+    }
 
     /// <summary>Whether a point lies in the closed outline or within a tolerance of it.</summary>
     public static bool Contains(double halfWidth, double halfDepth, double radius, double y, double z, double tolerance) =>

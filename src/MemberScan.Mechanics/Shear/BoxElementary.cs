@@ -29,6 +29,9 @@ internal sealed class BoxElementary : ShearSolution
         (_iy, _iz) = (properties.Iy, properties.Iz);
     }
 
+    /// <summary>True: along lines across the wall all stresses are linear.</summary>
+    public override bool EdgesGovern => true;
+
     /// <inheritdoc/>
     public override ShearStress At(double vy, double vz, double t, double y, double z)
     {

@@ -16,6 +16,9 @@ internal sealed class RoundElementary(Round section) : ShearSolution
     /// <inheritdoc/>
     public override bool IsLinear => false;
 
+    /// <summary>True: along chords square to V all stresses are linear.</summary>
+    public override bool EdgesGovern => true;
+
     /// <inheritdoc/>
     public override ShearStress At(double vy, double vz, double t, double y, double z)
     {

@@ -9,6 +9,12 @@ internal abstract class ShearSolution
     /// <summary>Whether the model has an answer for torsion.</summary>
     public virtual bool CarriesTorsion => true;
 
+    /// <summary>
+    /// Whether every measure is largest on an edge or crease, whatever the forces: where through each point of the inside runs a line
+    /// between two of them along which σ is linear and the shear stresses are too, so that the measures are convex on it.
+    /// </summary>
+    public virtual bool EdgesGovern => false;
+
     /// <summary>Shear stresses at a point of the material [m] for Vy, Vz [N] and T about the shear centre [N·m].</summary>
     public abstract ShearStress At(double vy, double vz, double t, double y, double z);
 }

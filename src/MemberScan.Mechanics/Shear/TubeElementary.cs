@@ -21,6 +21,9 @@ internal sealed class TubeElementary : ShearSolution
         _peak = (b * b + a * b + a * a) / (3 * inertia);                           // ⅔(b³ − a³)/(2·t·I), t = b − a
     }
 
+    /// <summary>True: along radii all stresses are linear.</summary>
+    public override bool EdgesGovern => true;
+
     /// <inheritdoc/>
     public override ShearStress At(double vy, double vz, double t, double y, double z)
     {

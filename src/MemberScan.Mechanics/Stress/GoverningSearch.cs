@@ -7,9 +7,10 @@ namespace MemberScan.Mechanics.Stress;
 
 /// <summary>Finds the place of a section where a measure is largest.</summary>
 /// <remarks>
-/// All nodes of a lattice are evaluated, each peak among them that may hide the maximum is climbed on the true field, and the places
-/// that statics points at (in line with and square to the bending and shear resultants) are tried besides. Among equal places the
-/// outer edge comes first, then the larger z, then the larger y, so that the answer never hangs on rounding.
+/// All nodes of the edges and, where it can matter, of the inside are evaluated; each peak among them that may hide the maximum is
+/// climbed on the true field; the places that statics points at (in line with and square to the bending and shear resultants) are
+/// tried besides. Among equal places the outer edge comes first (on a rectangle the middle of a side), then the larger z, then the
+/// larger y, so that the answer never hangs on rounding.
 /// </remarks>
 internal sealed class GoverningSearch(StressField field, ShearSolution shear, Outline outline)
 {
@@ -21,7 +22,9 @@ internal sealed class GoverningSearch(StressField field, ShearSolution shear, Ou
     private const double Worthwhile = 0.85;
     private const int MaxPeaks = 16;
 
-    private readonly InfluenceTable _table = new(field.Properties, shear, outline);
+    private readonly InfluenceTable _edges = new(field.Properties, shear, outline.Edges);
+    private readonly InfluenceTable? _inside = shear.EdgesGovern ? null
+        : new InfluenceTable(field.Properties, shear, outline.Inside ?? throw new ArgumentException("an inside is needed"));
 
     /// <summary>The governing place; for no forces at all the centroid, or the topmost fibre where the centroid is hollow.</summary>
     public GoverningPoint Find(in SectionForces forces, StressMeasure measure)
@@ -33,13 +36,18 @@ internal sealed class GoverningSearch(StressField field, ShearSolution shear, Ou
         }
 
         var best = new Choice(outline);
-        var count = _table.Points.Length;
-        var buffer = ArrayPool<double>.Shared.Rent(count);
+        var (edgeCount, insideCount) = (_edges.Points.Length, _inside?.Points.Length ?? 0);
+        var buffer = ArrayPool<double>.Shared.Rent(edgeCount + insideCount);
         try
         {
-            var values = buffer.AsSpan(0, count);
-            _table.Evaluate(forces, measure, values);
-            Scan(forces, measure, values, ref best);
+            var values = buffer.AsSpan(0, edgeCount + insideCount);
+            _edges.Evaluate(forces, measure, values[..edgeCount]);
+            _inside?.Evaluate(forces, measure, values[edgeCount..]);
+            var highest = 0.0;
+            foreach (var value in values) highest = Math.Max(highest, value);
+
+            Scan(_edges, forces, measure, values[..edgeCount], highest, ref best);
+            if (_inside is not null) Scan(_inside, forces, measure, values[edgeCount..], highest, ref best);
         }
         finally
         {
@@ -51,40 +59,44 @@ internal sealed class GoverningSearch(StressField field, ShearSolution shear, Ou
         return new GoverningPoint(measure, Target.Value(measure, state), best.Y, best.Z, state, Name(best.Y, best.Z, forces));
     }
 
-    private void Scan(in SectionForces forces, StressMeasure measure, Span<double> values, ref Choice best)
+    private void Scan(
+        InfluenceTable table, in SectionForces forces, StressMeasure measure, ReadOnlySpan<double> values, double highest, ref Choice best)
     {
-        var highest = 0.0;
-        foreach (var value in values) highest = Math.Max(highest, value);
-
+        var lattice = table.Chart.Nodes;
         Span<int> peaks = stackalloc int[MaxPeaks];
         var found = 0;
         for (var i = 0; i < values.Length; i++)
         {
             if (values[i] < Worthwhile * highest) continue;
-            if (values[i] >= highest * (1 - Tie)) best.Offer(values[i], _table.Points[i].Y, _table.Points[i].Z);
-            if (measure != StressMeasure.AbsoluteSigma && IsPeak(values, i)) found = Keep(peaks, found, values, i);
+            if (values[i] >= highest * (1 - Tie)) best.Offer(values[i], table.Points[i].Y, table.Points[i].Z);
+            if (measure != StressMeasure.AbsoluteSigma && IsPeak(lattice, values, i)) found = Keep(peaks, found, values, i);
         }
 
-        foreach (var node in peaks[..found]) Climb(forces, measure, node, values[node], ref best);
+        foreach (var node in peaks[..found]) Climb(table.Chart, forces, measure, node, values[node], ref best);
     }
 
-    // On a ridge of equal nodes only the first is a peak: the others have an equal neighbour before them.
-    private bool IsPeak(Span<double> values, int node)
+    // Of a stretch of equal nodes those in its middle are no peaks; on a flat ridge of the inside only the first is one.
+    private static bool IsPeak(Lattice lattice, ReadOnlySpan<double> values, int node)
     {
+        const double Equal = 1e-12;
+
         var value = values[node];
-        var neighbours = outline.Nodes.Neighbours.AsSpan(node * Lattice.NeighbourCount, Lattice.NeighbourCount);
-        foreach (var neighbour in neighbours)
+        var (equals, before) = (0, 0);
+        foreach (var neighbour in lattice.Neighbours.AsSpan(node * Lattice.NeighbourCount, Lattice.NeighbourCount))
         {
             if (neighbour < 0) continue;
             var difference = values[neighbour] - value;
-            if (difference > 1e-12 * value || (neighbour < node && difference >= -1e-12 * value)) return false;
+            if (difference > Equal * value) return false;
+            if (difference < -Equal * value) continue;
+            equals++;
+            if (neighbour < node) before++;
         }
 
-        return true;
+        return lattice.AreCurves ? equals < 2 || before == 0 : before == 0;
     }
 
     // The highest peaks, highest first.
-    private static int Keep(Span<int> peaks, int found, Span<double> values, int node)
+    private static int Keep(Span<int> peaks, int found, ReadOnlySpan<double> values, int node)
     {
         var at = found;
         while (at > 0 && values[peaks[at - 1]] < values[node]) at--;
@@ -96,15 +108,15 @@ internal sealed class GoverningSearch(StressField field, ShearSolution shear, Ou
         return found;
     }
 
-    // Newton's steps on the parabola through a stencil of nine places (three on a curve), each three times finer than the last.
-    private void Climb(in SectionForces forces, StressMeasure measure, int node, double value, ref Choice best)
+    // Newton's steps on the parabola through a stencil of nine places (three on a curve), each finer than the last.
+    private void Climb(Chart chart, in SectionForces forces, StressMeasure measure, int node, double value, ref Choice best)
     {
         const int MaxSteps = 12;
         const double Coarsest = 0.6, Finest = 0.01, Refinement = 1.0 / 6, SameSpot = 1e-5;
 
-        var lattice = outline.Nodes;
+        var lattice = chart.Nodes;
         var (p, q) = (lattice.P[node], lattice.Q[node]);
-        var isCurve = lattice.PitchQ == 0;
+        var isCurve = lattice.AreCurves;
         var scale = Coarsest;
         Span<double> stencil = stackalloc double[9];
         for (var pass = 0; pass < MaxSteps && scale >= Finest; pass++)
@@ -115,16 +127,17 @@ internal sealed class GoverningSearch(StressField field, ShearSolution shear, Ou
             for (var k = 0; k < 9; k++)
             {
                 if (k == 4 || (isCurve && k / 3 != 1)) continue;
-                stencil[k] = At(forces, measure, p + (k % 3 - 1) * hp, q + (k / 3 - 1) * hq);
+                stencil[k] = At(chart, forces, measure, p + (k % 3 - 1) * hp, q + (k / 3 - 1) * hq);
                 if (stencil[k] > stencil[top]) top = k;
             }
 
             var (dp, dq) = isCurve ? (Vertex(stencil[3], stencil[4], stencil[5]), 0) : Vertex(stencil);
-            var ahead = At(forces, measure, p + dp * hp, q + dq * hq);
+            var ahead = At(chart, forces, measure, p + dp * hp, q + dq * hq);
             if (ahead >= stencil[top])
             {
                 (p, q, value) = (p + dp * hp, q + dq * hq, ahead);
-                if (Math.Abs(dp) < SameSpot && Math.Abs(dq) < SameSpot) break;
+                // Not on the first stencil: at a fold it sees its own mirror image, however near a summit beside it.
+                if (scale < Coarsest && Math.Abs(dp) < SameSpot && Math.Abs(dq) < SameSpot) break;
                 if (Math.Abs(dp) < 1 && Math.Abs(dq) < 1) scale *= Refinement;
             }
             else if (top == 4)
@@ -137,7 +150,7 @@ internal sealed class GoverningSearch(StressField field, ShearSolution shear, Ou
             }
         }
 
-        var (y, z) = outline.Map(p, q);
+        var (y, z) = chart.Map(p, q);
         best.Offer(value, y, z);
     }
 
@@ -183,9 +196,9 @@ internal sealed class GoverningSearch(StressField field, ShearSolution shear, Ou
     private void Try(in SectionForces forces, StressMeasure measure, (double Y, double Z) point, ref Choice best) =>
         best.Offer(Target.Of(measure, field.At(forces, point.Y, point.Z)), point.Y, point.Z);
 
-    private double At(in SectionForces forces, StressMeasure measure, double p, double q)
+    private double At(Chart chart, in SectionForces forces, StressMeasure measure, double p, double q)
     {
-        var (y, z) = outline.Map(p, q);
+        var (y, z) = chart.Map(p, q);
         return Target.Of(measure, field.At(forces, y, z));
     }
 

@@ -5,23 +5,26 @@ using MemberScan.Mechanics.Shear;
 
 namespace MemberScan.Mechanics.Stress;
 
-/// <summary>Stresses at the nodes of a lattice: per unit of Vy, Vz and T where the shear solution is linear, else evaluated anew.</summary>
+/// <summary>Stresses at the nodes of a chart: per unit of Vy, Vz and T where the shear solution is linear, else evaluated anew.</summary>
 internal sealed class InfluenceTable
 {
     private readonly SectionProperties _properties;
     private readonly ShearSolution _shear;
     private readonly Unit[]? _units;
 
-    /// <summary>The table of a lattice.</summary>
-    public InfluenceTable(SectionProperties properties, ShearSolution shear, Outline outline)
+    /// <summary>The table of a chart.</summary>
+    public InfluenceTable(SectionProperties properties, ShearSolution shear, Chart chart)
     {
         (_properties, _shear) = (properties, shear);
-        var nodes = outline.Nodes;
-        Points = new (double, double)[nodes.Count];
-        for (var i = 0; i < Points.Length; i++) Points[i] = outline.Map(nodes.P[i], nodes.Q[i]);
+        Chart = chart;
+        Points = new (double, double)[chart.Nodes.Count];
+        for (var i = 0; i < Points.Length; i++) Points[i] = chart.Map(chart.Nodes.P[i], chart.Nodes.Q[i]);
         if (shear.IsLinear)
             _units = [.. Points.Select(at => new Unit(shear.At(1, 0, 0, at.Y, at.Z), shear.At(0, 1, 0, at.Y, at.Z), shear.At(0, 0, 1, at.Y, at.Z)))];
     }
+
+    /// <summary>The chart whose nodes these are.</summary>
+    public Chart Chart { get; }
 
     /// <summary>Places of the nodes [m].</summary>
     public (double Y, double Z)[] Points { get; }

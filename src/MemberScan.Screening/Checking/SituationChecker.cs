@@ -53,8 +53,8 @@ internal sealed class SituationChecker(SectionLibrary library, Basis basis, doub
         if (!line.ReachesBothEnds) findings.Bar(ReasonCode.StationsTooCoarse, $"the stations of '{forces.Situation.Name}' do not reach both ends of the member");
         foreach (var shape in subject.Section.Shapes)
         {
-            var properties = SectionProperties.Of(shape);
-            CheckStability(findings, line, properties, subject);
+            var properties = library.Properties(shape);
+            CheckStability(findings, line, properties, subject, Math.Max(subject.Length, (forces.To ?? 0) - forces.From));
             foreach (var station in line.Stations) CheckWalls(findings, shape, properties, Cleaned(station.Forces, shape), subject);
             if (findings.Limit is { } limit)
             {
@@ -91,11 +91,11 @@ internal sealed class SituationChecker(SectionLibrary library, Basis basis, doub
         return ForceLine.Build(forces.Stations.Select(s => s with { X = s.X - forces.From }), to - forces.From);
     }
 
-    private void CheckStability(SituationFindings findings, ForceLine line, SectionProperties properties, Subject subject)
+    private void CheckStability(SituationFindings findings, ForceLine line, SectionProperties properties, Subject subject, double length)
     {
         var least = line.Stations.Min(s => Cleaned(s.Forces, subject.Section.Shape).N);
         var (modulus, why) = subject.Material.Modulus.TryGet(out var found, out var reason) ? (found.Value, "") : ((double?)null, reason.Message);
-        switch (CompressionRule.Check(least, modulus, why, properties.IMin, subject.Length, lengthFactor))
+        switch (CompressionRule.Check(least, modulus, why, properties.IMin, length, lengthFactor))
         {
             case CheckResult.NotEvaluated barred:
                 findings.Bar(barred.Why);

@@ -19,7 +19,7 @@ public sealed class BruteForceTests
         var field = Samples.Fields.ElementAt(number);
         var cloud = new Cloud(field);
         var random = new Random(20_000 + number);
-        var worst = 0.0;
+        var (worst, where) = (0.0, "");
         for (var state = 0; state < States; state++)
         {
             var forces = Samples.Forces(field, random);
@@ -32,12 +32,13 @@ public sealed class BruteForceTests
                 Assert.Equal(Of(measure, field.At(forces, found.Y, found.Z)), found.Value);
                 Assert.Equal(field.At(forces, found.Y, found.Z), found.State);
                 var size = Math.Abs(found.Value);
-                if (brute[(int)measure] > 0) worst = Math.Max(worst, 1 - size / brute[(int)measure]);
+                var excess = brute[(int)measure] > 0 ? 1 - size / brute[(int)measure] : 0;
+                if (excess > worst) (worst, where) = (excess, $"{measure} for {forces}, found at {found.Y:G6}, {found.Z:G6} ({found.Place})");
             }
         }
 
         // The promise is 0.1 %; what the search really keeps is far tighter.
-        Assert.True(worst <= 1e-6, $"{Samples.Name(field)}: a point exceeds the governing one by {worst:E2}");
+        Assert.True(worst <= 1e-6, $"{Samples.Name(field)}: a point exceeds the governing one by {worst:E2}: {where}");
         Assert.True(cloud.Count >= 35_000, $"{cloud.Count} points");
     }
 
@@ -55,8 +56,8 @@ public sealed class BruteForceTests
     private sealed class Cloud
     {
         private readonly StressField _field;
-        private readonly List<(double Y, double Z)> _points;
-        private readonly (StressState Vy, StressState Vz, StressState T)[]? _units;
+        private readonly (double Y, double Z)[] _points;
+        private readonly Unit[]? _units;
 
         public Cloud(StressField field)
         {
@@ -66,38 +67,42 @@ public sealed class BruteForceTests
             if (field.Section is Round && field.Model == ShearModel.Elementary) return;
 
             var torsion = field.CarriesTorsion ? new SectionForces(0, 0, 0, 1, 0, 0) : default;
-            _units = [.. _points.Select(p => (
+            _units = [.. _points.Select(p => new Unit(
                 field.At(new SectionForces(0, 1, 0, 0, 0, 0), p.Y, p.Z),
                 field.At(new SectionForces(0, 0, 1, 0, 0, 0), p.Y, p.Z),
                 field.At(torsion, p.Y, p.Z)))];
         }
 
-        public int Count => _points.Count;
+        public int Count => _points.Length;
 
+        /// <summary>Largest magnitude of each measure, in the order of the enumeration.</summary>
         public double[] Largest(SectionForces f)
         {
-            var largest = new double[s_measures.Length];
-            for (var i = 0; i < _points.Count; i++)
+            var p = _field.Properties;
+            var (n, my, mz) = (f.N / p.Area, f.My / p.Iy, f.Mz / p.Iz);
+            var (mises, tresca, sigmaLargest, tauSquared, sigma1, sigma3) = (0.0, 0.0, 0.0, 0.0, 0.0, 0.0);
+            for (var i = 0; i < _points.Length; i++)
             {
-                var state = StateAt(i, f);
-                for (var m = 0; m < largest.Length; m++)
-                    largest[m] = Math.Max(largest[m], Math.Abs(Of(s_measures[m], state)));
+                var (y, z) = _points[i];
+                var (xy, xz) = _units is null ? Direct(f, y, z) : _units[i].Of(f.Vy, f.Vz, f.T);
+                var sigma = n + my * z - mz * y;
+                var square = xy * xy + xz * xz;
+                var twiceRadius = Math.Sqrt(sigma * sigma + 4 * square);
+                mises = Math.Max(mises, sigma * sigma + 3 * square);
+                tresca = Math.Max(tresca, twiceRadius);
+                sigmaLargest = Math.Max(sigmaLargest, Math.Abs(sigma));
+                tauSquared = Math.Max(tauSquared, square);
+                sigma1 = Math.Max(sigma1, 0.5 * (twiceRadius + sigma));
+                sigma3 = Math.Max(sigma3, 0.5 * (twiceRadius - sigma));
             }
 
-            return largest;
+            return [Math.Sqrt(mises), tresca, sigmaLargest, Math.Sqrt(tauSquared), sigma1, sigma3];
         }
 
-        private StressState StateAt(int i, SectionForces f)
+        private (double XY, double XZ) Direct(SectionForces f, double y, double z)
         {
-            var (y, z) = _points[i];
-            if (_units is null) return _field.At(f, y, z);
-
-            var (vy, vz, t) = _units[i];
-            var p = _field.Properties;
-            return new StressState(
-                f.N / p.Area + f.My * z / p.Iy - f.Mz * y / p.Iz,
-                f.Vy * vy.TauXY + f.Vz * vz.TauXY + f.T * t.TauXY,
-                f.Vy * vy.TauXZ + f.Vz * vz.TauXZ + f.T * t.TauXZ);
+            var state = _field.At(f, y, z);
+            return (state.TauXY, state.TauXZ);
         }
 
         private static IEnumerable<(double Y, double Z)> PointsOf(CrossSection section) => section switch
@@ -110,6 +115,13 @@ public sealed class BruteForceTests
                 .Concat(Edge(b.Width - 2 * b.Wall, b.Depth - 2 * b.Wall, b.InnerRadius)),
             _ => throw new ArgumentException(section.Kind),
         };
+
+        private readonly struct Unit(StressState vy, StressState vz, StressState t)
+        {
+            private readonly double _a = vy.TauXY, _b = vz.TauXY, _c = t.TauXY, _d = vy.TauXZ, _e = vz.TauXZ, _f = t.TauXZ;
+
+            public (double XY, double XZ) Of(double vy, double vz, double t) => (vy * _a + vz * _b + t * _c, vy * _d + vz * _e + t * _f);
+        }
 
         private static IEnumerable<(double Y, double Z)> Ring(double inner, double outer) =>
             from i in Enumerable.Range(0, 101)
