@@ -27,11 +27,12 @@ public static class NumberRange
 
     /// <summary>Whether the stresses of a section under given forces are numbers to calculate with.</summary>
     /// <param name="section">A section that <see cref="Holds(CrossSection)"/>.</param>
+    /// <param name="p">Its properties.</param>
     /// <param name="forces">The forces.</param>
-    public static bool Holds(CrossSection section, in SectionForces forces)
+    public static bool Holds(CrossSection section, SectionProperties p, in SectionForces forces)
     {
         ArgumentNullException.ThrowIfNull(section);
-        var p = SectionProperties.Of(section);
+        ArgumentNullException.ThrowIfNull(p);
         var extent = Math.Max(section.ExtentY, section.ExtentZ);
         var nominal = (Math.Abs(forces.N) + Math.Abs(forces.Vy) + Math.Abs(forces.Vz)) / p.Area
             + (Math.Abs(forces.T) + Math.Abs(forces.My) + Math.Abs(forces.Mz)) * extent / Math.Min(p.Iy, p.Iz);

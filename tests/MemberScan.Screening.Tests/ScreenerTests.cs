@@ -111,6 +111,18 @@ public sealed class ScreenerTests
     }
 
     [Fact]
+    public void A_model_whose_numbers_leave_no_room_for_ours_is_checked_but_not_written()
+    {
+        var text = System.Text.Encoding.ASCII.GetString(Landing.OnePost()).Replace("DATA;\n", "DATA;\n#18446744073709551000=IFCDIRECTION((0.,0.,1.));\n", StringComparison.Ordinal);
+
+        var outcome = Landing.Run(System.Text.Encoding.ASCII.GetBytes(text), new DiagnosticList(), tables: [Landing.Constant(new SectionForces(1000, 0, 0, 0, 0, 0))])!;
+
+        Assert.False(outcome.CanWriteModel);
+        Assert.Equal(Verdict.WithinLimit, Assert.Single(outcome.Record.Members).Verdict);
+        Assert.Contains(outcome.Record.Findings, f => f.Code == "SCR-0008");
+    }
+
+    [Fact]
     public void A_cancelled_run_stops()
     {
         var sample = s_samples.Value[0];

@@ -126,7 +126,7 @@ internal sealed class SituationChecker(SectionLibrary library, Basis basis, doub
 
         double Try(double x, in SectionForces forces)
         {
-            if (!NumberRange.Holds(shape, Cleaned(forces, shape)))
+            if (!NumberRange.Holds(shape, field.Properties, Cleaned(forces, shape)))
             {
                 findings.Bar(ReasonCode.CheckNotEvaluated, "the forces are so large that stresses are beyond the range of numbers");
                 return 0;
