@@ -83,8 +83,11 @@ public sealed class MaterialReaderTests
         var layers = model.Add("IFCMATERIALLAYERSET", Bars.Refs(model.Add("IFCMATERIALLAYER", Bars.Ref(material), "12.", "$", "$", "$", "$", "$")), "$", "$");
         var definitions = new Dictionary<string, int>
         {
-            ["set"] = set, ["usage"] = model.Materials.ProfileSetUsage(set), ["constituent"] = constituents,
-            ["layer"] = model.Add("IFCMATERIALLAYERSETUSAGE", Bars.Ref(layers), ".AXIS2.", ".POSITIVE.", "0.", "$"), ["list"] = model.Add("IFCMATERIALLIST", Bars.Refs(material, material)),
+            ["set"] = set,
+            ["usage"] = model.Materials.ProfileSetUsage(set),
+            ["constituent"] = constituents,
+            ["layer"] = model.Add("IFCMATERIALLAYERSETUSAGE", Bars.Ref(layers), ".AXIS2.", ".POSITIVE.", "0.", "$"),
+            ["list"] = model.Add("IFCMATERIALLIST", Bars.Refs(material, material)),
         };
         foreach (var (name, definition) in definitions) model.Associate(definition, Bars.Add(model, name, Bars.Rail, 2));
 

@@ -173,10 +173,29 @@ public sealed class PropertySetWriterTests
 
     private static StressCheckSet Full() => new()
     {
-        ElementId = 7, ElementKey = "2O2Fr$t4X7Zf8NOew3FLOH", Status = "OVERSTRESSED", Reason = "over the elastic limit", Utilization = 1.14, Criterion = "von Mises", StressLimit = 192e6,
-        EquivalentStress = 218.9e6, NormalStress = -210e6, ShearStress = 0, EquivalentStressText = "218.9 MPa", Situation = "CO1", Station = 1.25, PointY = 0, PointZ = -0.02415,
-        PointName = "extreme fibre, -z", ForcesSource = "model", SectionSource = "profile", ShearModel = "elementary", Item = "2O2Fr$t4X7Zf8NOew3FLOH/2", ItemCount = 3,
-        RunId = "0123456789abcdef", Program = "MemberScan 0.1.0",
+        ElementId = 7,
+        ElementKey = "2O2Fr$t4X7Zf8NOew3FLOH",
+        Status = "OVERSTRESSED",
+        Reason = "over the elastic limit",
+        Utilization = 1.14,
+        Criterion = "von Mises",
+        StressLimit = 192e6,
+        EquivalentStress = 218.9e6,
+        NormalStress = -210e6,
+        ShearStress = 0,
+        EquivalentStressText = "218.9 MPa",
+        Situation = "CO1",
+        Station = 1.25,
+        PointY = 0,
+        PointZ = -0.02415,
+        PointName = "extreme fibre, -z",
+        ForcesSource = "model",
+        SectionSource = "profile",
+        ShearModel = "elementary",
+        Item = "2O2Fr$t4X7Zf8NOew3FLOH/2",
+        ItemCount = 3,
+        RunId = "0123456789abcdef",
+        Program = "MemberScan 0.1.0",
     };
 
     private static (Part21File File, List<Part21Record> Added) Write(Release release, params StressCheckSet[] sets) => Write(release, FileUnits.MillimetreNewton, [], sets);
