@@ -1,4 +1,4 @@
-using MemberScan.Mechanics.Fields;
+using MemberScan.Mechanics.Meshes;
 using MemberScan.Mechanics.Forces;
 using MemberScan.Mechanics.Sections;
 

@@ -1,6 +1,6 @@
 using System.Globalization;
-using MemberScan.Mechanics.Fields;
 using MemberScan.Mechanics.Series;
+using MemberScan.Mechanics.Warping;
 
 namespace MemberScan.Mechanics.Sections;
 

@@ -1,8 +1,8 @@
 using System.Diagnostics.CodeAnalysis;
-using MemberScan.Mechanics.Fields;
 using MemberScan.Mechanics.Forces;
 using MemberScan.Mechanics.Sections;
 using MemberScan.Mechanics.Shear;
+using MemberScan.Mechanics.Warping;
 
 namespace MemberScan.Mechanics.Stress;
 
@@ -79,6 +79,18 @@ public abstract class StressField
     /// <returns>A point of the material; its value is within 0.1 % of the true supremum of this field.</returns>
     /// <exception cref="ArgumentException">Forces are not finite.</exception>
     public abstract GoverningPoint Govern(in SectionForces forces, StressMeasure measure);
+
+    /// <summary>The largest value of every measure over many states, such as all stations and situations of a member.</summary>
+    /// <param name="states">Section forces; at least one.</param>
+    /// <param name="largest">Receives six governing points, in the order of <see cref="StressMeasure"/>.</param>
+    /// <param name="which">Receives for each the number of its state; among equal ones the first.</param>
+    /// <remarks>
+    /// All states are scanned in blocks over the nodes of the section; those that may hold the largest value are then searched one
+    /// by one like <see cref="Govern(in SectionForces, StressMeasure)"/>, the most promising first. The result does not hang on
+    /// how the states are grouped. Allocates nothing but names of places.
+    /// </remarks>
+    /// <exception cref="ArgumentException">No states, forces not finite, or less room than six results.</exception>
+    public abstract void GovernAll(ReadOnlySpan<SectionForces> states, Span<GoverningPoint> largest, Span<int> which);
 
     private static ShearSolution ShearSolutionOf(
         CrossSection section, ShearModel model, double poisson, SectionProperties properties) => (section, model) switch

@@ -1,6 +1,6 @@
 using System.Collections.Concurrent;
 
-namespace MemberScan.Mechanics.Fields;
+namespace MemberScan.Mechanics.Warping;
 
 /// <summary>Polynomials of one degree on [−1, 1]: Lobatto's nodes, Gauss's quadrature, Legendre's basis.</summary>
 /// <remarks>Source: C. Canuto and others, Spectral Methods: Fundamentals in Single Domains (2006), section 2.3 (from memory).</remarks>

@@ -1,9 +1,9 @@
-using MemberScan.Mechanics.Fields;
 using MemberScan.Mechanics.Forces;
 using MemberScan.Mechanics.Sections;
 using MemberScan.Mechanics.Stress;
+using MemberScan.Mechanics.Warping;
 
-namespace MemberScan.Mechanics.Tests.Fields;
+namespace MemberScan.Mechanics.Tests.Warping;
 
 public sealed class NumericalFieldTests
 {

@@ -1,4 +1,6 @@
-namespace MemberScan.Mechanics.Fields;
+using MemberScan.Mechanics.Meshes;
+
+namespace MemberScan.Mechanics.Warping;
 
 /// <summary>The numerical field of a section: potentials, torsion constant and the error that is left, for every ν.</summary>
 internal sealed class WarpingSolution

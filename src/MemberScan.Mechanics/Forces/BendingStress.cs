@@ -1,7 +1,6 @@
-using MemberScan.Mechanics.Forces;
 using MemberScan.Mechanics.Sections;
 
-namespace MemberScan.Mechanics.Stress;
+namespace MemberScan.Mechanics.Forces;
 
 /// <summary>Normal stress by the bending formula, with the product of inertia where there is one.</summary>
 internal static class BendingStress

@@ -1,4 +1,6 @@
-namespace MemberScan.Mechanics.Fields;
+using MemberScan.Mechanics.Meshes;
+
+namespace MemberScan.Mechanics.Warping;
 
 /// <summary>Numbers for the nodes on the sides of patches: what lies at the same place has the same number.</summary>
 internal sealed class NodeNumbers

@@ -1,7 +1,7 @@
 using MathNet.Numerics.LinearAlgebra;
 using MathNet.Numerics.LinearAlgebra.Double;
 
-namespace MemberScan.Mechanics.Tests.Fields;
+namespace MemberScan.Mechanics.Tests.Warping;
 
 /// <summary>Saint-Venant's problem by a single layer on the edge: a route that shares nothing with the field under test.</summary>
 /// <remarks>

@@ -1,4 +1,6 @@
-namespace MemberScan.Mechanics.Fields;
+using MemberScan.Mechanics.Meshes;
+
+namespace MemberScan.Mechanics.Warping;
 
 /// <summary>Potentials of the five loads on a mesh, as polynomials of each patch.</summary>
 internal sealed class WarpingPotential

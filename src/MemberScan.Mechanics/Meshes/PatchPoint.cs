@@ -1,4 +1,4 @@
-namespace MemberScan.Mechanics.Fields;
+namespace MemberScan.Mechanics.Meshes;
 
 /// <summary>A point of a patch and the derivatives of its place by the two coordinates of the square.</summary>
 internal readonly record struct PatchPoint(double Y, double Z, double YXi, double ZXi, double YEta, double ZEta)

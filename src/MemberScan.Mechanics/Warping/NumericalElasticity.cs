@@ -1,7 +1,8 @@
-using MemberScan.Mechanics.Fields;
+using MemberScan.Mechanics.Meshes;
 using MemberScan.Mechanics.Sections;
+using MemberScan.Mechanics.Shear;
 
-namespace MemberScan.Mechanics.Shear;
+namespace MemberScan.Mechanics.Warping;
 
 /// <summary>Saint-Venant flexure and torsion from the numerical field of a section, for one ν.</summary>
 internal sealed class NumericalElasticity : ShearSolution

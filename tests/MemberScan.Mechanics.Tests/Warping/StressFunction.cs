@@ -1,6 +1,6 @@
 using MemberScan.Mechanics.Sections;
 
-namespace MemberScan.Mechanics.Tests.Fields;
+namespace MemberScan.Mechanics.Tests.Warping;
 
 /// <summary>Torsion constant of a box by Prandtl's stress function on bilinear elements: never above the true value.</summary>
 /// <remarks>

@@ -1,7 +1,8 @@
 using System.Collections.Concurrent;
+using MemberScan.Mechanics.Meshes;
 using MemberScan.Mechanics.Sections;
 
-namespace MemberScan.Mechanics.Fields;
+namespace MemberScan.Mechanics.Warping;
 
 /// <summary>Numerical fields by section, each solved once while it is among the latest in use.</summary>
 internal static class SolvedSections

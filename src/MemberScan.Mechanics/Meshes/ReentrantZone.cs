@@ -1,6 +1,6 @@
 using MemberScan.Mechanics.Sections;
 
-namespace MemberScan.Mechanics.Fields;
+namespace MemberScan.Mechanics.Meshes;
 
 /// <summary>The surroundings of re-entrant corners, whose peaks are told apart and do not decide.</summary>
 /// <remarks>

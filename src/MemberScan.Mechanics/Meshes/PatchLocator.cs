@@ -1,4 +1,4 @@
-namespace MemberScan.Mechanics.Fields;
+namespace MemberScan.Mechanics.Meshes;
 
 /// <summary>Finds the patch that a point lies in.</summary>
 internal sealed class PatchLocator

@@ -1,7 +1,7 @@
 using System.Runtime.InteropServices;
 using System.Runtime.Intrinsics;
 
-namespace MemberScan.Mechanics.Fields;
+namespace MemberScan.Mechanics.Warping;
 
 /// <summary>Loops over numbers in vectors of fixed width, so that every machine adds in the same order.</summary>
 internal static class Kernel

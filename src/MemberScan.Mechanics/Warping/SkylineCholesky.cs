@@ -1,4 +1,4 @@
-namespace MemberScan.Mechanics.Fields;
+namespace MemberScan.Mechanics.Warping;
 
 /// <summary>A symmetric positive definite matrix kept from the first entry of each row to the diagonal, and its factor L·Lᵀ in its place.</summary>
 internal sealed class SkylineCholesky

@@ -1,4 +1,6 @@
-namespace MemberScan.Mechanics.Fields;
+using MemberScan.Mechanics.Meshes;
+
+namespace MemberScan.Mechanics.Warping;
 
 /// <summary>Solves Saint-Venant's torsion and flexure of a section for the potential ψ of the shear stresses.</summary>
 /// <remarks>

@@ -1,4 +1,4 @@
-namespace MemberScan.Mechanics.Fields;
+namespace MemberScan.Mechanics.Meshes;
 
 /// <summary>Patches that cover a section or, where it has two axes of symmetry, its first quadrant.</summary>
 /// <param name="Patches">The patches, in an order in which neighbours stand close.</param>

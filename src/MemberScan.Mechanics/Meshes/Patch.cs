@@ -1,4 +1,4 @@
-namespace MemberScan.Mechanics.Fields;
+namespace MemberScan.Mechanics.Meshes;
 
 /// <summary>A piece of a section with four sides, straight or arcs, seen as the image of the square [−1, 1]².</summary>
 /// <remarks>

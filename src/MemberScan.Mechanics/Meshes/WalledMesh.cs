@@ -1,6 +1,6 @@
 using MemberScan.Mechanics.Sections;
 
-namespace MemberScan.Mechanics.Fields;
+namespace MemberScan.Mechanics.Meshes;
 
 /// <summary>Patches of sections made of straight sides and quarter circles: the first quadrant of a box or a rounded rectangle.</summary>
 internal static class WalledMesh

@@ -1,4 +1,6 @@
-namespace MemberScan.Mechanics.Fields;
+using MemberScan.Mechanics.Meshes;
+
+namespace MemberScan.Mechanics.Warping;
 
 /// <summary>Matrix and loads of the warping problem on one patch, with its inner nodes eliminated.</summary>
 /// <remarks>Nodes: the inner ones first, then the sides in the order of <see cref="NodeNumbers.Side"/>. Row-major, lower half.</remarks>
