@@ -23,6 +23,12 @@ internal abstract class Outline
     /// <summary>Whether a point lies in the material or within a tolerance [m] of it.</summary>
     public abstract bool Contains(double y, double z, double tolerance);
 
+    /// <summary>Whether a point of the material counts for the governing place: not in the surroundings of a re-entrant corner of a field with peaks.</summary>
+    public virtual bool Decides(double y, double z) => true;
+
+    /// <summary>Whether the whole section is searched, so that the places that statics points at are worth a try.</summary>
+    public virtual bool IsWhole => true;
+
     /// <summary>The point farthest in a direction, which need not be a unit vector but must not be zero.</summary>
     public abstract (double Y, double Z) Farthest(double directionY, double directionZ);
 
@@ -42,14 +48,14 @@ internal abstract class Outline
     /// <summary>Points [m] and areas [m²] of a quadrature rule over the material.</summary>
     public abstract IEnumerable<(double Y, double Z, double Area)> Quadrature();
 
-    /// <summary>The outline of a section.</summary>
-    public static Outline Of(CrossSection section) => section switch
+    /// <summary>The outline of a section for a field with or without peaks at re-entrant corners.</summary>
+    public static Outline Of(CrossSection section, bool hasPeaks) => section switch
     {
         Round round => new DiscOutline(round),
         Tube tube => new AnnulusOutline(tube),
         Rectangle rectangle => new RectangleOutline(rectangle, rectangle.Width, rectangle.Depth, 0),
         RoundedRectangle rounded => new RectangleOutline(rounded, rounded.Width, rounded.Depth, rounded.CornerRadius),
-        Box box => new BoxOutline(box),
+        Box box => hasPeaks ? new BoxFieldOutline(box) : new BoxOutline(box),
         _ => throw new ArgumentOutOfRangeException(nameof(section), section.Kind, "no outline for this kind"),
     };
 }

@@ -1,4 +1,6 @@
+using System.Globalization;
 using MemberScan.Mechanics.Series;
+using MemberScan.Mechanics.Warping;
 
 namespace MemberScan.Mechanics.Sections;
 
@@ -7,8 +9,6 @@ internal static class ClosedForms
 {
     public const string Exact = "exact";
     public const string TorsionSeries = "Saint-Venant series";
-    public const string HollowAnnex = "EN 10219-2 annex formula It (from memory)";
-    public const string NotAvailable = "not available: numerical field";
 
     public static SectionProperties Of(Round section)
     {
@@ -43,12 +43,13 @@ internal static class ClosedForms
     {
         var (b, h) = (section.Width, section.Depth);
         var corner = CornerSpandrel.Of(section.CornerRadius);
+        var torsion = SolvedSections.Torsion(section);
         var iy = b * h * h * h / 12 - corner.FourInertia(h);
         var iz = h * b * b * b / 12 - corner.FourInertia(b);
         return DoublySymmetric(
             b * h - 4 * corner.Area, iy, iz, 2 * iy / h, 2 * iz / b,
             b * h * h / 4 - corner.FourMoment(h), h * b * b / 4 - corner.FourMoment(b),
-            null, NotAvailable, null, null);
+            torsion.J, Numerical(torsion.Change), torsion.Wt, null);
     }
 
     /// <remarks>Source: EN 10210-2 and EN 10219-2, annex of section properties, with independent radii (from memory).</remarks>
@@ -65,13 +66,18 @@ internal static class ClosedForms
         var length = 2 * (b - t + h - t) - 2 * rc * (4 - Math.PI);                 // of the middle line
         var enclosed = (b - t) * (h - t) - rc * rc * (4 - Math.PI);                // inside the middle line
         var k = 2 * enclosed * t / length;
+        var torsion = SolvedSections.Torsion(section);
         var it = t * t * t * length / 3 + 2 * k * enclosed;
         return DoublySymmetric(
             2 * t * (b + h - 2 * t) - 4 * outer.Area + 4 * inner.Area, iy, iz, 2 * iy / h, 2 * iz / b,
             (b * h * h - bi * hi * hi) / 4 - outer.FourMoment(h) + inner.FourMoment(hi),
             (h * b * b - hi * bi * bi) / 4 - outer.FourMoment(b) + inner.FourMoment(bi),
-            it, HollowAnnex, it / (t + k / t), 4 * enclosed * enclosed * t / length);
+            torsion.J, Numerical(torsion.Change), it / (t + k / t), 4 * enclosed * enclosed * t / length) with
+        { JAnnex = it };
     }
+
+    private static string Numerical(double change) => string.Create(
+        CultureInfo.InvariantCulture, $"numerical field, change at the last refinement {change:0.0E+0}");
 
     private static SectionProperties DoublySymmetric(
         double area, double iy, double iz, double welY, double welZ, double wplY, double wplZ,

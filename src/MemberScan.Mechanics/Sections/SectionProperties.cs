@@ -15,7 +15,7 @@ public sealed record SectionProperties
     /// <summary>Product of inertia <c>+∫yz dA</c> [m⁴].</summary>
     public required double Iyz { get; init; }
 
-    /// <summary>Saint-Venant torsion constant [m⁴]; null where no model in use gives it.</summary>
+    /// <summary>Saint-Venant torsion constant [m⁴]: closed form, series, or the numerical field; every kind of today has one.</summary>
     public required double? J { get; init; }
 
     /// <summary>Where J comes from, in words.</summary>
@@ -33,8 +33,14 @@ public sealed record SectionProperties
     /// <summary>Plastic modulus about z [m³].</summary>
     public required double WplZ { get; init; }
 
-    /// <summary>Torsion modulus: largest torsional shear stress = T/Wt [m³]; null where J is.</summary>
+    /// <summary>
+    /// Torsion modulus: largest torsional shear stress = T/Wt [m³]; null where J is. Of a box that of the hand calculation,
+    /// <c>It/(t + K/t)</c> by the annex formula.
+    /// </summary>
     public required double? Wt { get; init; }
+
+    /// <summary>Torsion constant of a box by the annex formula It of EN 10210-2 and EN 10219-2 [m⁴]; null for other kinds.</summary>
+    public double? JAnnex { get; init; }
 
     /// <summary>Thin-wall torsion constant of a closed wall, <c>4·Am²·t/p</c> [m⁴]; null for solid sections.</summary>
     public required double? JThinWall { get; init; }
@@ -48,10 +54,7 @@ public sealed record SectionProperties
     /// <summary>The smaller of the two second moments about principal axes [m⁴].</summary>
     public double IMin => 0.5 * (Iy + Iz) - Math.Sqrt(0.25 * (Iy - Iz) * (Iy - Iz) + Iyz * Iyz);
 
-    /// <summary>Properties of a section by closed form.</summary>
-    /// <remarks>
-    /// A rounded rectangle has neither J nor Wt yet, not even where its radius makes it a circle; <see cref="JSource"/> says so.
-    /// </remarks>
+    /// <summary>Properties of a section by closed form; J of a box and a rounded rectangle from the numerical field, solved once.</summary>
     public static SectionProperties Of(CrossSection section) => section switch
     {
         Round round => ClosedForms.Of(round),

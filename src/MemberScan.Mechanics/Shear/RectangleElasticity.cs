@@ -1,4 +1,5 @@
 using MemberScan.Mechanics.Sections;
+using MemberScan.Mechanics.Series;
 
 namespace MemberScan.Mechanics.Shear;
 

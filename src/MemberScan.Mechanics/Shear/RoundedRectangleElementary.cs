@@ -2,25 +2,27 @@ using MemberScan.Mechanics.Sections;
 
 namespace MemberScan.Mechanics.Shear;
 
-/// <summary>Rounded rectangle by hand calculation: <c>τ = V·Q/(I·b)</c> for each shear force, b the width at the level; no torsion.</summary>
+/// <summary>Rounded rectangle by hand calculation: <c>τ = V·Q/(I·b)</c> for each shear force, b the width at the level; torsion from the numerical field.</summary>
 internal sealed class RoundedRectangleElementary : ShearSolution
 {
     private readonly Direction _alongY;
     private readonly Direction _alongZ;
+    private readonly ShearSolution _torsion;
 
-    /// <summary>The solution for a section with its properties.</summary>
-    public RoundedRectangleElementary(RoundedRectangle section, SectionProperties properties)
+    /// <summary>The solution for a section with its properties and a solution that has its torsion.</summary>
+    public RoundedRectangleElementary(RoundedRectangle section, SectionProperties properties, ShearSolution torsion)
     {
+        _torsion = torsion;
         _alongY = new Direction(section.Depth, section.Width, section.CornerRadius, properties.Iz);
         _alongZ = new Direction(section.Width, section.Depth, section.CornerRadius, properties.Iy);
     }
 
     /// <inheritdoc/>
-    public override bool CarriesTorsion => false;
-
-    /// <inheritdoc/>
-    public override ShearStress At(double vy, double vz, double t, double y, double z) =>
-        new(vy * _alongY.StressPerForce(y), vz * _alongZ.StressPerForce(z));
+    public override ShearStress At(double vy, double vz, double t, double y, double z)
+    {
+        var twist = _torsion.At(0, 0, t, y, z);
+        return new ShearStress(twist.XY + vy * _alongY.StressPerForce(y), twist.XZ + vz * _alongZ.StressPerForce(z));
+    }
 
     /// <summary>One direction of force: sides across and along it, corner radius, second moment.</summary>
     private sealed class Direction(double across, double depth, double radius, double inertia)

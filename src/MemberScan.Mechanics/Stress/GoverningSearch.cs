@@ -23,8 +23,8 @@ internal sealed class GoverningSearch(StressField field, ShearSolution shear, Ou
     private const int MaxPeaks = 16;
 
     private readonly InfluenceTable _edges = new(field.Properties, shear, outline.Edges);
-    private readonly InfluenceTable? _inside = shear.EdgesGovern ? null
-        : new InfluenceTable(field.Properties, shear, outline.Inside ?? throw new ArgumentException("an inside is needed"));
+    private readonly InfluenceTable? _inside = shear.EdgesGovern || outline.Inside is null ? null
+        : new InfluenceTable(field.Properties, shear, outline.Inside);
 
     /// <summary>The governing place; for no forces at all the centroid, or the topmost fibre where the centroid is hollow.</summary>
     public GoverningPoint Find(in SectionForces forces, StressMeasure measure)
@@ -54,7 +54,7 @@ internal sealed class GoverningSearch(StressField field, ShearSolution shear, Ou
             ArrayPool<double>.Shared.Return(buffer);
         }
 
-        TryNotable(forces, measure, ref best);
+        if (outline.IsWhole) TryNotable(forces, measure, ref best);
         var state = field.At(forces, best.Y, best.Z);
         return new GoverningPoint(measure, Target.Value(measure, state), best.Y, best.Z, state, Name(best.Y, best.Z, forces));
     }
@@ -177,7 +177,8 @@ internal sealed class GoverningSearch(StressField field, ShearSolution shear, Ou
 
     private void TryNotable(in SectionForces forces, StressMeasure measure, ref Choice best)
     {
-        TryAround(forces, measure, -forces.Mz / field.Properties.Iz, forces.My / field.Properties.Iy, ref best);
+        var (_, perY, perZ) = BendingStress.Plane(field.Properties, forces);
+        TryAround(forces, measure, perY, perZ, ref best);
         if (measure != StressMeasure.AbsoluteSigma) TryAround(forces, measure, forces.Vy, forces.Vz, ref best);
     }
 

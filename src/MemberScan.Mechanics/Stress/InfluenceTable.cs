@@ -10,7 +10,7 @@ internal sealed class InfluenceTable
 {
     private readonly SectionProperties _properties;
     private readonly ShearSolution _shear;
-    private readonly Unit[]? _units;
+    private readonly (ShearStress Vy, ShearStress Vz, ShearStress T)[]? _units;
 
     /// <summary>The table of a chart.</summary>
     public InfluenceTable(SectionProperties properties, ShearSolution shear, Chart chart)
@@ -20,7 +20,7 @@ internal sealed class InfluenceTable
         Points = new (double, double)[chart.Nodes.Count];
         for (var i = 0; i < Points.Length; i++) Points[i] = chart.Map(chart.Nodes.P[i], chart.Nodes.Q[i]);
         if (shear.IsLinear)
-            _units = [.. Points.Select(at => new Unit(shear.At(1, 0, 0, at.Y, at.Z), shear.At(0, 1, 0, at.Y, at.Z), shear.At(0, 0, 1, at.Y, at.Z)))];
+            _units = [.. Points.Select(at => shear.UnitsAt(at.Y, at.Z))];
     }
 
     /// <summary>The chart whose nodes these are.</summary>
@@ -32,7 +32,7 @@ internal sealed class InfluenceTable
     /// <summary>What is to be made largest, at every node.</summary>
     public void Evaluate(in SectionForces forces, StressMeasure measure, Span<double> values)
     {
-        var (n, my, mz) = (forces.N / _properties.Area, forces.My / _properties.Iy, forces.Mz / _properties.Iz);
+        var (n, perY, perZ) = BendingStress.Plane(_properties, forces);
         var (vy, vz, t) = (forces.Vy, forces.Vz, forces.T);
         for (var i = 0; i < values.Length; i++)
         {
@@ -50,9 +50,7 @@ internal sealed class InfluenceTable
                     vy * unit.Vy.XZ + vz * unit.Vz.XZ + t * unit.T.XZ);
             }
 
-            values[i] = Target.Of(measure, n + my * z - mz * y, shear.XY * shear.XY + shear.XZ * shear.XZ);
+            values[i] = Target.Of(measure, n + perY * y + perZ * z, shear.XY * shear.XY + shear.XZ * shear.XZ);
         }
     }
-
-    private readonly record struct Unit(ShearStress Vy, ShearStress Vz, ShearStress T);
 }

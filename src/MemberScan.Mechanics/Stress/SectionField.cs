@@ -1,3 +1,4 @@
+using System.Buffers;
 using MemberScan.Mechanics.Forces;
 using MemberScan.Mechanics.Outlines;
 using MemberScan.Mechanics.Sections;
@@ -8,10 +9,17 @@ namespace MemberScan.Mechanics.Stress;
 /// <summary>A stress field made of the bending formula for σ and a shear solution.</summary>
 internal sealed class SectionField : StressField
 {
+    // A state whose best node is below this share of the best state's cannot overtake it: between nodes a target that is a polynomial
+    // of degree 4 along each edge or circle rises by less than 4 %, between nodes twice as far apart by less than 16 %.
+    private const double Worthwhile = 0.93;
+    private const double WorthwhileWhenThin = 0.8;
+
     private readonly ShearSolution _shear;
     private readonly Outline _outline;
     private readonly GoverningSearch _search;
+    private readonly GoverningSearch? _fillets;
     private readonly Lazy<Closure> _closure;
+    private readonly Lazy<(BlockScan Thin, BlockScan Dense)> _scans;
 
     /// <summary>The field of a section with its shear solution.</summary>
     public SectionField(
@@ -19,13 +27,18 @@ internal sealed class SectionField : StressField
         : base(section, model, poisson, properties)
     {
         _shear = shear;
-        _outline = Outline.Of(section);
+        _outline = Outline.Of(section, shear.HasPeaks);
         _search = new GoverningSearch(this, shear, _outline);
-        _closure = new Lazy<Closure>(() => ClosureIntegral.Of(this, _outline));
+        if (shear.HasPeaks && section is Box { InnerRadius: > 0 } box) _fillets = new GoverningSearch(this, shear, new FilletOutline(box));
+        _scans = new Lazy<(BlockScan, BlockScan)>(() => (new BlockScan(properties, shear, _outline, true), new BlockScan(properties, shear, _outline, false)));
+        _closure = new Lazy<Closure>(() => ClosureIntegral.Of(this, shear, _outline));
     }
 
     /// <inheritdoc/>
-    public override bool CarriesTorsion => _shear.CarriesTorsion;
+    public override FieldError? NumericalError => _shear.NumericalError;
+
+    /// <summary>The tables for many states at a time.</summary>
+    public (BlockScan Thin, BlockScan Dense) Scans => _scans.Value;
 
     /// <inheritdoc/>
     public override Closure Closure => _closure.Value;
@@ -33,28 +46,118 @@ internal sealed class SectionField : StressField
     /// <inheritdoc/>
     public override StressState At(in SectionForces forces, double y, double z)
     {
-        if (forces.T != 0 && !CarriesTorsion) ThrowTorsion();
-
         var shear = _shear.At(forces.Vy, forces.Vz, forces.T, y, z);
-        return new StressState(SigmaAt(forces, y, z), shear.XY, shear.XZ);
+        return new StressState(BendingStress.At(Properties, forces, y, z), shear.XY, shear.XZ);
     }
 
     /// <inheritdoc/>
     public override bool Contains(double y, double z) => _outline.Contains(y, z, Outline.OnEdge * _outline.Extent);
 
     /// <inheritdoc/>
+    public override bool Decides(double y, double z) => _outline.Decides(y, z);
+
+    /// <inheritdoc/>
+    public override GoverningPoint? FilletPeak(in SectionForces forces, StressMeasure measure)
+    {
+        if (!forces.IsFinite) throw new ArgumentException("section forces must be finite numbers", nameof(forces));
+
+        return _fillets?.Find(forces, measure);
+    }
+
+    /// <inheritdoc/>
     public override GoverningPoint Govern(in SectionForces forces, StressMeasure measure)
     {
         if (!forces.IsFinite) throw new ArgumentException("section forces must be finite numbers", nameof(forces));
-        if (forces.T != 0 && !CarriesTorsion) ThrowTorsion();
 
         return _search.Find(forces, measure);
     }
 
-    // Principal axes: every section of closed form has two axes of symmetry.
-    private double SigmaAt(in SectionForces forces, double y, double z) =>
-        forces.N / Properties.Area + forces.My * z / Properties.Iy - forces.Mz * y / Properties.Iz;
+    /// <inheritdoc/>
+    public override void GovernAll(ReadOnlySpan<SectionForces> states, Span<GoverningPoint> largest, Span<int> which)
+    {
+        if (states.IsEmpty) throw new ArgumentException("at least one state is needed", nameof(states));
+        if (largest.Length < BlockScan.Measures || which.Length < BlockScan.Measures) throw new ArgumentException("six results need room", nameof(largest));
+        foreach (ref readonly var forces in states)
+            if (!forces.IsFinite) throw new ArgumentException("section forces must be finite numbers", nameof(states));
 
-    private void ThrowTorsion() =>
-        throw new ArgumentException($"the {(Model == ShearModel.Elementary ? "elementary" : "elasticity")} model of a {Section.Kind} carries no torsion");
+        var targetBuffer = ArrayPool<double>.Shared.Rent(states.Length * BlockScan.Measures);
+        var keyBuffer = ArrayPool<double>.Shared.Rent(states.Length);
+        var numberBuffer = ArrayPool<int>.Shared.Rent(2 * states.Length);
+        var keptBuffer = ArrayPool<SectionForces>.Shared.Rent(states.Length);
+        try
+        {
+            // Twice: over few nodes for all states, over all nodes for those that are left.
+            var targets = targetBuffer.AsSpan(0, states.Length * BlockScan.Measures);
+            Scans.Thin.Scan(states, targets);
+            var numbers = numberBuffer.AsSpan(0, states.Length);
+            var count = Promising(targets, numbers);
+            for (var k = 0; k < count; k++) keptBuffer[k] = states[numbers[k]];
+            var kept = keptBuffer.AsSpan(0, count);
+            Scans.Dense.Scan(kept, targets[..(count * BlockScan.Measures)]);
+            for (var measure = 0; measure < BlockScan.Measures; measure++)
+            {
+                (largest[measure], var at) = Largest(kept, targets, (StressMeasure)measure, keyBuffer, numberBuffer.AsSpan(states.Length, count));
+                which[measure] = numbers[at];
+            }
+        }
+        finally
+        {
+            ArrayPool<double>.Shared.Return(targetBuffer);
+            ArrayPool<double>.Shared.Return(keyBuffer);
+            ArrayPool<int>.Shared.Return(numberBuffer);
+            ArrayPool<SectionForces>.Shared.Return(keptBuffer);
+        }
+    }
+
+    // Numbers of the states that may be largest in some measure.
+    private static int Promising(ReadOnlySpan<double> targets, Span<int> numbers)
+    {
+        Span<double> floor = stackalloc double[BlockScan.Measures];
+        floor.Clear();
+        for (var i = 0; i < targets.Length; i += BlockScan.Measures)
+            for (var measure = 0; measure < floor.Length; measure++) floor[measure] = Math.Max(floor[measure], targets[i + measure]);
+        for (var measure = 0; measure < floor.Length; measure++) floor[measure] *= WorthwhileWhenThin;
+
+        var count = 0;
+        for (var s = 0; s < numbers.Length; s++)
+        {
+            var isKept = false;
+            for (var measure = 0; measure < floor.Length; measure++) isKept |= targets[s * BlockScan.Measures + measure] >= floor[measure];
+            if (isKept) numbers[count++] = s;
+        }
+
+        return count;
+    }
+
+    private (GoverningPoint Point, int State) Largest(
+        ReadOnlySpan<SectionForces> states, ReadOnlySpan<double> targets, StressMeasure measure, Span<double> keys, Span<int> order)
+    {
+        const double Tie = 1e-9;
+
+        var highest = 0.0;
+        for (var s = 0; s < states.Length; s++) highest = Math.Max(highest, targets[s * BlockScan.Measures + (int)measure]);
+        var count = 0;
+        for (var s = 0; s < states.Length; s++)
+        {
+            var target = targets[s * BlockScan.Measures + (int)measure];
+            if (target < Worthwhile * highest) continue;
+            (keys[count], order[count]) = (-target, s);
+            count++;
+        }
+
+        keys[..count].Sort(order[..count]);
+        var (best, bestState, bestTarget) = (default(GoverningPoint), -1, double.NegativeInfinity);
+        for (var k = 0; k < count; k++)
+        {
+            if (-keys[k] < Worthwhile * bestTarget) break;
+
+            var point = Govern(states[order[k]], measure);
+            var target = Target.Of(measure, point.State);
+            var isEqual = Math.Abs(target - bestTarget) <= Tie * Math.Abs(bestTarget);
+            if (bestState < 0 || (isEqual ? order[k] < bestState : target > bestTarget)) (best, bestState) = (point, order[k]);
+            bestTarget = Math.Max(bestTarget, target);
+        }
+
+        return (best, bestState);
+    }
 }

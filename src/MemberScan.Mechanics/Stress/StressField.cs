@@ -2,6 +2,7 @@ using System.Diagnostics.CodeAnalysis;
 using MemberScan.Mechanics.Forces;
 using MemberScan.Mechanics.Sections;
 using MemberScan.Mechanics.Shear;
+using MemberScan.Mechanics.Warping;
 
 namespace MemberScan.Mechanics.Stress;
 
@@ -24,8 +25,11 @@ public abstract class StressField
     /// <summary>Properties of the section.</summary>
     public SectionProperties Properties { get; }
 
-    /// <summary>Whether the model has an answer for T ≠ 0.</summary>
+    /// <summary>Whether the model has an answer for T ≠ 0; every field of today has one.</summary>
     public virtual bool CarriesTorsion => true;
+
+    /// <summary>The error that is left in a numerical field; null for closed forms and series.</summary>
+    public virtual FieldError? NumericalError => null;
 
     /// <summary>How well the field gives back the six section forces.</summary>
     public abstract Closure Closure { get; }
@@ -46,10 +50,9 @@ public abstract class StressField
             throw new ArgumentOutOfRangeException(nameof(poisson), poisson, "Poisson's ratio must lie in [0, 0.5)");
 
         var properties = SectionProperties.Of(section);
-        var shear = ShearSolutionOf(section, model, poisson, properties);
-        field = shear is null ? null : new SectionField(section, model, poisson, properties, shear);
-        whyNot = shear is null ? $"elasticity not available for a {section.Kind}" : null;
-        return shear is not null;
+        field = new SectionField(section, model, poisson, properties, ShearSolutionOf(section, model, poisson, properties));
+        whyNot = null;
+        return true;
     }
 
     /// <summary>The stresses at a point of the material.</summary>
@@ -62,12 +65,34 @@ public abstract class StressField
     /// <summary>Whether a point lies in the material or on its edge (within 1e-9 of the largest extent).</summary>
     public abstract bool Contains(double y, double z);
 
-    /// <summary>The place of the section where a measure is largest.</summary>
+    /// <summary>
+    /// Whether a point of the material counts for <see cref="Govern"/>. In a numerical field points nearer than half a wall to a
+    /// re-entrant corner do not: at a sharp one the stress is unbounded, at a rounded one it is a local peak.
+    /// </summary>
+    public virtual bool Decides(double y, double z) => true;
+
+    /// <summary>The largest value at the rounded re-entrant corners, which does not decide; null where there are none.</summary>
+    /// <exception cref="ArgumentException">Forces are not finite.</exception>
+    public virtual GoverningPoint? FilletPeak(in SectionForces forces, StressMeasure measure) => null;
+
+    /// <summary>The place of the section where a measure is largest, among those that decide.</summary>
     /// <returns>A point of the material; its value is within 0.1 % of the true supremum of this field.</returns>
-    /// <exception cref="ArgumentException">T ≠ 0 where <see cref="CarriesTorsion"/> is false, or forces not finite.</exception>
+    /// <exception cref="ArgumentException">Forces are not finite.</exception>
     public abstract GoverningPoint Govern(in SectionForces forces, StressMeasure measure);
 
-    private static ShearSolution? ShearSolutionOf(
+    /// <summary>The largest value of every measure over many states, such as all stations and situations of a member.</summary>
+    /// <param name="states">Section forces; at least one.</param>
+    /// <param name="largest">Receives six governing points, in the order of <see cref="StressMeasure"/>.</param>
+    /// <param name="which">Receives for each the number of its state; among equal ones the first.</param>
+    /// <remarks>
+    /// All states are scanned in blocks over the nodes of the section; those that may hold the largest value are then searched one
+    /// by one like <see cref="Govern(in SectionForces, StressMeasure)"/>, the most promising first. The result does not hang on
+    /// how the states are grouped. Allocates nothing but names of places.
+    /// </remarks>
+    /// <exception cref="ArgumentException">No states, forces not finite, or less room than six results.</exception>
+    public abstract void GovernAll(ReadOnlySpan<SectionForces> states, Span<GoverningPoint> largest, Span<int> which);
+
+    private static ShearSolution ShearSolutionOf(
         CrossSection section, ShearModel model, double poisson, SectionProperties properties) => (section, model) switch
         {
             (Round round, ShearModel.Elementary) => new RoundElementary(round),
@@ -76,9 +101,10 @@ public abstract class StressField
             (Tube tube, ShearModel.Elasticity) => new TubeElasticity(tube, poisson),
             (Rectangle rectangle, ShearModel.Elementary) => new RectangleElementary(rectangle),
             (Rectangle rectangle, ShearModel.Elasticity) => new RectangleElasticity(rectangle, poisson),
-            (RoundedRectangle rounded, ShearModel.Elementary) => new RoundedRectangleElementary(rounded, properties),
+            (RoundedRectangle rounded, ShearModel.Elementary) => new RoundedRectangleElementary(
+                rounded, properties, new NumericalElasticity(SolvedSections.Of(rounded), properties, 0)),
             (Box box, ShearModel.Elementary) => new BoxElementary(box, properties),
-            (_, ShearModel.Elasticity) => null,
+            (Box or RoundedRectangle, ShearModel.Elasticity) => new NumericalElasticity(SolvedSections.Of(section), properties, poisson),
             _ => throw new ArgumentOutOfRangeException(nameof(model), model, "unknown shear model"),
         };
 }

@@ -11,6 +11,9 @@ internal sealed class SectionLibrary
     /// <summary>Largest closure error of closed forms and series [-].</summary>
     private const double ClosureTolerance = 1e-6;
 
+    /// <summary>Largest closure error of numerical fields [-].</summary>
+    private const double NumericalClosureTolerance = 1e-3;
+
     private readonly ConcurrentDictionary<(CrossSection Section, ShearModel Model, double Poisson), (StressField? Field, string WhyNot)> _fields = new();
 
     /// <summary>Properties of a section.</summary>
@@ -28,7 +31,7 @@ internal sealed class SectionLibrary
 
     /// <summary>An elasticity field that does not give back its section forces is not used; elementary models need not close.</summary>
     private static (StressField? Field, string WhyNot) Closing(StressField field) =>
-        field.Model == ShearModel.Elementary || field.Closure.LargestError <= ClosureTolerance
+        field.Model == ShearModel.Elementary || field.Closure.LargestError <= (field.NumericalError is null ? ClosureTolerance : NumericalClosureTolerance)
             ? (field, "")
             : (null, string.Create(CultureInfo.InvariantCulture, $"elasticity not available: the field misses its section forces by {field.Closure.LargestError:0.0E+0}"));
 }

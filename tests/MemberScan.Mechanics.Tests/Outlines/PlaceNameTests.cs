@@ -20,7 +20,7 @@ public sealed class PlaceNameTests
     [InlineData(0, 4, "inside, +z")]
     [InlineData(3, -3, "inside, direction 45° from +y towards −z")]
     public void Places_of_a_round_bar_bent_about_y(double yMm, double zMm, string name) =>
-        Assert.Equal(name, Outline.Of(new Round(0.010)).NameOf(yMm / 1e3, zMm / 1e3, s_bending));
+        Assert.Equal(name, Outline.Of(new Round(0.010), hasPeaks: false).NameOf(yMm / 1e3, zMm / 1e3, s_bending));
 
     [Theory]
     [InlineData(0, 30, "extreme fibre, +z")]
@@ -28,13 +28,13 @@ public sealed class PlaceNameTests
     [InlineData(-26, 0, "bore, neutral axis, −y side")]
     [InlineData(28, 0, "inside the wall, +y")]
     public void Places_of_a_tube_bent_about_y(double yMm, double zMm, string name) =>
-        Assert.Equal(name, Outline.Of(new Tube(0.030, 0.004)).NameOf(yMm / 1e3, zMm / 1e3, s_bending));
+        Assert.Equal(name, Outline.Of(new Tube(0.030, 0.004), hasPeaks: false).NameOf(yMm / 1e3, zMm / 1e3, s_bending));
 
     // Without bending the shear resultant tells fibre from axis; without both there is only the edge.
     [Fact]
     public void Places_of_a_round_bar_without_bending()
     {
-        var bar = Outline.Of(new Round(0.010));
+        var bar = Outline.Of(new Round(0.010), hasPeaks: false);
 
         Assert.Equal("neutral axis, +z side", bar.NameOf(0, 0.010, new SectionForces(0, 5, 0, 0, 0, 0)));
         Assert.Equal("extreme fibre, +y", bar.NameOf(0.010, 0, new SectionForces(0, 5, 0, 0, 0, 0)));
@@ -44,7 +44,7 @@ public sealed class PlaceNameTests
     [Fact]
     public void Forces_that_are_rounding_noise_do_not_decide_a_name()
     {
-        var bar = Outline.Of(new Round(0.010));
+        var bar = Outline.Of(new Round(0.010), hasPeaks: false);
 
         Assert.Equal("outer edge, +z", bar.NameOf(0, 0.010, new SectionForces(0, 0, 0, 100, 1e-9, 0)));
     }
@@ -61,12 +61,12 @@ public sealed class PlaceNameTests
     [InlineData(7, 0, "inside, towards +y")]
     [InlineData(-7, 7, "inside, towards −y +z")]
     public void Places_of_a_rectangle_in_torsion(double yMm, double zMm, string name) =>
-        Assert.Equal(name, Outline.Of(new Rectangle(0.040, 0.080)).NameOf(yMm / 1e3, zMm / 1e3, s_torsion));
+        Assert.Equal(name, Outline.Of(new Rectangle(0.040, 0.080), hasPeaks: false).NameOf(yMm / 1e3, zMm / 1e3, s_torsion));
 
     [Fact]
     public void The_middle_of_a_side_is_the_extreme_fibre_when_the_section_bends_that_way_alone()
     {
-        var bar = Outline.Of(new Rectangle(0.040, 0.080));
+        var bar = Outline.Of(new Rectangle(0.040, 0.080), hasPeaks: false);
 
         Assert.Equal("extreme fibre, −z", bar.NameOf(0, -0.040, s_bending));
         Assert.Equal("middle of the long side, +y", bar.NameOf(0.020, 0, s_bending));
@@ -82,5 +82,5 @@ public sealed class PlaceNameTests
     [InlineData(22.0710678, 47.0710678, "corner +y +z")]
     [InlineData(-18.5355339, 43.5355339, "inner corner −y +z")]
     public void Places_of_a_box_in_torsion(double yMm, double zMm, string name) =>
-        Assert.Equal(name, Outline.Of(new Box(0.050, 0.100, 0.005, 0.010, 0.005)).NameOf(yMm / 1e3, zMm / 1e3, s_torsion));
+        Assert.Equal(name, Outline.Of(new Box(0.050, 0.100, 0.005, 0.010, 0.005), hasPeaks: false).NameOf(yMm / 1e3, zMm / 1e3, s_torsion));
 }

@@ -92,7 +92,7 @@ public sealed class HollowSectionTableTests
                 "A" => (properties.Area, 2),
                 "Iy" => (properties.Iy, 4),
                 "Iz" => (properties.Iz, 4),
-                "J" => (properties.J!.Value, 4),
+                "J" => ((properties.JAnnex ?? properties.J)!.Value, 4),
                 "JThinWall" => (properties.JThinWall!.Value, 4),
                 "WelY" => (properties.WelY, 3),
                 "WelZ" => (properties.WelZ, 3),

@@ -77,9 +77,9 @@ public sealed class SectionPropertiesTests
         Assert.Equal(circle.Iy, rounded.Iy, 1e-12);
         Assert.Equal(circle.Iz, rounded.Iz, 1e-12);
         Assert.Equal(circle.WplY, rounded.WplY, 1e-12);
-        Assert.Null(rounded.J);
-        Assert.Null(rounded.Wt);
-        Assert.Equal("not available: numerical field", rounded.JSource);
+        Assert.Equal(circle.J!.Value, rounded.J!.Value, 1e-9);
+        Assert.Equal(circle.Wt!.Value, rounded.Wt!.Value, 1e-7);
+        Assert.StartsWith("numerical field", rounded.JSource, StringComparison.Ordinal);
     }
 
     [Fact]
@@ -90,7 +90,7 @@ public sealed class SectionPropertiesTests
         Assert.Equal(0.06 * 0.1 - 0.05 * 0.09, p.Area, 1e-15);
         Assert.Equal((0.06 * 1e-3 - 0.05 * 0.09 * 0.09 * 0.09) / 12, p.Iy, 1e-18);
         Assert.Equal((0.06 * 0.01 - 0.05 * 0.0081) / 4, p.WplY, 1e-15);
-        Assert.Equal("EN 10219-2 annex formula It (from memory)", p.JSource);
+        Assert.StartsWith("numerical field", p.JSource, StringComparison.Ordinal);
         // Bredt: 4 Am² t/p with the middle line 55 × 95 mm.
         Assert.Equal(4 * Math.Pow(0.055 * 0.095, 2) * 0.005 / 0.3, p.JThinWall!.Value, 1e-15);
         Assert.True(p.J > p.JThinWall);
@@ -104,7 +104,7 @@ public sealed class SectionPropertiesTests
 
         Assert.Equal(p.Iy, turned.Iz, 1e-18);
         Assert.Equal(p.WplY, turned.WplZ, 1e-18);
-        Assert.Equal(p.J!.Value, turned.J!.Value, 1e-18);
+        Assert.Equal(p.J!.Value, turned.J!.Value, 1e-6 * p.J!.Value);
     }
 
     [Fact]

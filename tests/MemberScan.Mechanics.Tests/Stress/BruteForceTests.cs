@@ -28,7 +28,7 @@ public sealed class BruteForceTests
             {
                 var found = field.Govern(forces, measure);
 
-                Assert.True(field.Contains(found.Y, found.Z));
+                Assert.True(field.Contains(found.Y, found.Z) && field.Decides(found.Y, found.Z));
                 Assert.Equal(Of(measure, field.At(forces, found.Y, found.Z)), found.Value);
                 Assert.Equal(field.At(forces, found.Y, found.Z), found.State);
                 var size = Math.Abs(found.Value);
@@ -37,9 +37,9 @@ public sealed class BruteForceTests
             }
         }
 
-        // The promise is 0.1 %; what the search really keeps is far tighter.
-        Assert.True(worst <= 1e-6, $"{Samples.Name(field)}: a point exceeds the governing one by {worst:E2}: {where}");
-        Assert.True(cloud.Count >= 35_000, $"{cloud.Count} points");
+        // The promise is 0.1 %; what the search really keeps is far tighter. Numerical fields have small steps between their patches.
+        Assert.True(worst <= (field.NumericalError is null && field.Section is not RoundedRectangle ? 1e-6 : 1e-4), $"{Samples.Name(field)}: a point exceeds the governing one by {worst:E2}: {where}");
+        Assert.True(cloud.Count >= (field.NumericalError is null ? 35_000 : 25_000), $"{cloud.Count} points");
     }
 
     private static double Of(StressMeasure measure, StressState state) => measure switch
@@ -62,7 +62,7 @@ public sealed class BruteForceTests
         public Cloud(StressField field)
         {
             _field = field;
-            _points = [.. PointsOf(field.Section).Where(p => field.Contains(p.Y, p.Z))];
+            _points = [.. PointsOf(field.Section).Where(p => field.Contains(p.Y, p.Z) && field.Decides(p.Y, p.Z))];
             // The parabola along the resultant is the one field that does not superpose.
             if (field.Section is Round && field.Model == ShearModel.Elementary) return;
 

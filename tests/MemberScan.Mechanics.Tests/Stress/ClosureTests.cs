@@ -9,7 +9,7 @@ public sealed class ClosureTests
     public void Elasticity_gives_back_all_six_section_forces()
     {
         foreach (var field in Samples.Fields.Where(f => f.Model == ShearModel.Elasticity))
-            Assert.True(field.Closure.LargestError <= 1e-6, $"{Samples.Name(field)}: {field.Closure}");
+            Assert.True(field.Closure.LargestError <= (field.NumericalError is null ? 1e-6 : 1e-4), $"{Samples.Name(field)}: {field.Closure}");
     }
 
     [Theory]
@@ -18,11 +18,11 @@ public sealed class ClosureTests
     [InlineData(0.49)]
     public void Elasticity_closes_at_any_poisson_ratio(double poisson)
     {
-        foreach (var section in Samples.Sections.Where(s => s is Round or Tube or Rectangle))
+        foreach (var section in Samples.Sections)
         {
             var field = Samples.Field(section, ShearModel.Elasticity, poisson);
 
-            Assert.True(field.Closure.LargestError <= 1e-6, $"{Samples.Name(field)}: {field.Closure}");
+            Assert.True(field.Closure.LargestError <= (field.NumericalError is null ? 1e-6 : 1e-4), $"{Samples.Name(field)}: {field.Closure}");
         }
     }
 
@@ -36,7 +36,7 @@ public sealed class ClosureTests
             Assert.Equal(1, closure.N, 1e-7);
             Assert.Equal(1, closure.My, 1e-7);
             Assert.Equal(1, closure.Mz, 1e-7);
-            Assert.True(closure.LargestCross <= 1e-7, $"{Samples.Name(field)}: {closure}");
+            Assert.True(closure.LargestCross <= (field.NumericalError is null ? 1e-7 : 1e-4), $"{Samples.Name(field)}: {closure}");
         }
     }
 
@@ -75,14 +75,5 @@ public sealed class ClosureTests
             Assert.InRange(closure.Vz, 0.97, 1.03);
             Assert.InRange(closure.T, 1, 1.2);
         }
-    }
-
-    [Fact]
-    public void A_field_without_torsion_says_one_there()
-    {
-        var field = Samples.Field(new RoundedRectangle(0.05, 0.03, 0.006), ShearModel.Elementary);
-
-        Assert.False(field.CarriesTorsion);
-        Assert.Equal(1, field.Closure.T);
     }
 }

@@ -77,7 +77,7 @@ public sealed class FlexuralShearTests
     [Fact]
     public void Elasticity_is_in_equilibrium_along_the_member()
     {
-        foreach (var field in Samples.Fields.Where(f => f.Model == ShearModel.Elasticity))
+        foreach (var field in Samples.Fields.Where(f => f.Model == ShearModel.Elasticity && f.NumericalError is null))
         {
             var random = new Random(7);
             var p = field.Properties;
@@ -121,7 +121,7 @@ public sealed class FlexuralShearTests
     public void No_shear_stress_crosses_an_edge_in_elasticity()
     {
         var forces = new SectionForces(0, 3, 5, 0.02, 0, 0);
-        foreach (var field in Samples.Fields.Where(f => f.Model == ShearModel.Elasticity))
+        foreach (var field in Samples.Fields.Where(f => f.Model == ShearModel.Elasticity && f.NumericalError is null))
         {
             var scale = field.Govern(forces, StressMeasure.Tau).Value;
             if (field.Section is Rectangle r)

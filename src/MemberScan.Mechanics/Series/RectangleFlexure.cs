@@ -1,6 +1,4 @@
-using MemberScan.Mechanics.Series;
-
-namespace MemberScan.Mechanics.Shear;
+namespace MemberScan.Mechanics.Series;
 
 /// <summary>Shear stresses of a solid rectangle under a shear force along one side, by Saint-Venant flexure.</summary>
 /// <remarks>
