@@ -162,15 +162,6 @@ public sealed class SectionRunTests
         Assert.Contains("give a number from 0 to below 0.5", ran.Error, StringComparison.Ordinal);
     }
 
-    [Fact]
-    public void Elasticity_of_a_box_is_refused_with_the_remedy()
-    {
-        var failure = Assert.Throws<Failure>(() => SectionRun.Execute(new SectionRun.Options("box 50x30x3 mm", "N=1kN", [], "elasticity", 0.3, null, Json: true)));
-
-        Assert.Equal(64, failure.ExitCode);
-        Assert.EndsWith("use --shear elementary.", failure.Message, StringComparison.Ordinal);
-    }
-
     private static async Task<JsonDocument> Json(params string[] arguments)
     {
         var ran = await Memberscan.Run(["section", .. arguments, "--json"]);
