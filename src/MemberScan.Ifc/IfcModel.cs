@@ -64,8 +64,9 @@ public sealed class IfcModel
     /// <param name="isNamed">Whether a table names the element; that makes elements of some classes candidates.</param>
     public MemberCatalog ReadMembers(Func<ElementIdentity, bool> isNamed)
     {
-        var profiles = new ProfileReader(_placements, Units);
-        var directrices = new DirectrixReader(_instances, _placements, Units);
+        var curves = new CurveReader(_instances, _placements, Units);
+        var profiles = new ProfileReader(_instances, _placements, curves, Units);
+        var directrices = new DirectrixReader(_instances, curves, Units);
         var bodies = new BodyReader(_instances, _placements, profiles, directrices, Units);
         var facts = new MaterialFactsReader(_instances, Units, _unitReader);
         var materials = new MaterialReader(_instances, _relations, facts, profiles, _rules);

@@ -61,6 +61,26 @@ internal sealed class PlacementReader(Instances instances, ModelUnits units)
         return new Transform3(origin, s1 * u1, s2 * u2, s3 * u3);
     }
 
+    /// <summary>The mirror that turns x round in a plane, as of IfcMirroredProfileDef.</summary>
+    public static Transform3 MirrorX { get; } = new(Vector3.Zero, -Vector3.UnitX, Vector3.UnitY, Vector3.UnitZ);
+
+    /// <summary>A transformation operator in a plane; null when damaged. Unequal scales are kept as they are.</summary>
+    public Transform3? Operator2(Part21Record op)
+    {
+        if (!instances.TryFollow(op[2], out var originRecord) || Point(originRecord) is not { } origin) return null;
+
+        var axis1 = Direction(op[0]) is { } given1 && (given1 with { Z = 0 }).TryNormalize(out var unit1) ? unit1 : (Vector3?)null;
+        var axis2 = Direction(op[1]) is { } given2 && (given2 with { Z = 0 }).TryNormalize(out var unit2) ? unit2 : (Vector3?)null;
+        var u1 = axis1 ?? (axis2 is { } y ? new Vector3(y.Y, -y.X, 0) : Vector3.UnitX);
+        var u2 = new Vector3(-u1.Y, u1.X, 0);
+        if (axis2 is { } towards && towards.Dot(u2) < 0) u2 = -u2;
+
+        var scale1 = op[3].IsEmpty ? 1 : Instances.Real(op[3]);
+        var isUneven = op.Keyword == "IFCCARTESIANTRANSFORMATIONOPERATOR2DNONUNIFORM";
+        var scale2 = isUneven && !op[4].IsEmpty ? Instances.Real(op[4]) : scale1;
+        return scale1 is { } s1 && scale2 is { } s2 ? new Transform3(origin, s1 * u1, s2 * u2, Vector3.UnitZ) : null;
+    }
+
     /// <summary>Coordinates of an IfcCartesianPoint [m]; null when damaged or the length unit is missing.</summary>
     public Vector3? Point(Part21Record point)
     {

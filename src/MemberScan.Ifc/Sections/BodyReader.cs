@@ -141,6 +141,7 @@ internal sealed class BodyReader(
             return Missing(ReasonCode.SectionNotCovered, $"{Called(solid)} is extruded at an angle to its profile's normal");
         if (UniformScale(item.Map) is not { } scale)
             return Missing(ReasonCode.PlacementNotSupported, $"{Called(solid)} is mapped with unequal scales");
+        if (!double.IsFinite(scale * profile.Value.LargestExtent)) return Missing(ReasonCode.SectionInvalid, $"{Called(solid)} has no finite size");
 
         var frame = item.Map.After(position).After(profile.Value.Position);
         var notes = Notes(item);
@@ -151,7 +152,7 @@ internal sealed class BodyReader(
         if (y.Dot(frame.Direction(Vector3.UnitX)) < 0) notes = notes.Add("y is the reversed X axis of the profile (the sweep runs against its normal, or the placement mirrors)");
 
         var axes = new MemberAxes(frame.Origin, x, y, z);
-        var source = $"profile {profile.Source} of {Called(solid)}";
+        var source = $"{profile.Value.SourceWord} {profile.Source} of {Called(solid)}";
         return new Finding<BarBody>.Found(
             new BarBody(profile.Value.Scaled(scale), scale * depth * metre, $"depth of {Called(solid)}", axes, source, [], true, [.. notes, .. profile.Value.Section.Notes]), source);
     }
@@ -209,7 +210,7 @@ internal sealed class BodyReader(
     {
         var (sx, sy, sz) = (map.X.Length, map.Y.Length, map.Z.Length);
         var square = Math.Max(Math.Abs(map.X.Dot(map.Y)), Math.Max(Math.Abs(map.X.Dot(map.Z)), Math.Abs(map.Y.Dot(map.Z))));
-        var isUniform = sx > 0 && Math.Abs(sy / sx - 1) < 1e-6 && Math.Abs(sz / sx - 1) < 1e-6 && square < 1e-6 * sx * sx;
+        var isUniform = sx is >= ProfileShape.LeastScale and <= ProfileShape.MostScale && Math.Abs(sy / sx - 1) < 1e-6 && Math.Abs(sz / sx - 1) < 1e-6 && square < 1e-6 * sx * sx;
         return isUniform ? sx : null;
     }
 

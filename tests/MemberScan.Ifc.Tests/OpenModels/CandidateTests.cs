@@ -34,7 +34,7 @@ public sealed class CandidateTests
         { "newlines-in-strings-inch-ifc2x3.ifc", "IfcMember section-not-covered 1", "" },
         { "rounded-rectangle-csg-ifc4.ifc", "", "" },
         { "stair-railings-ifc2x3.ifczip", "IfcRailing section-not-parametric 13", "IfcBuildingElementProxy 1" },
-        { "steel-frame-drawn-sections-ifc2x3.ifc", "IfcBeam section-not-covered 43, IfcColumn rectangle 5, IfcColumn section-not-covered 37", "IfcBuildingElementProxy 4" },
+        { "steel-frame-drawn-sections-ifc2x3.ifc", "IfcBeam box 17, IfcBeam section-not-covered 26, IfcColumn rectangle 5, IfcColumn section-not-covered 37", "IfcBuildingElementProxy 4" },
         { "structural-beams-linked-ifc4.ifc", "IfcBeam box 2, IfcBeam section-not-covered 8, IfcBeam tube 2", "IfcStructuralCurveMember 12" },
         { "structural-portal-frame-results-ifc4.ifc", "IfcStructuralCurveMember section-not-covered 3", "" },
         { "structural-surface-member-ifc4x2.ifc", "", "" },
@@ -141,6 +141,17 @@ public sealed class CandidateTests
 
         Assert.Equal(6, tubes.Count);
         Assert.All(tubes, t => Assert.Contains((t.OuterRadius, t.Wall), written));
+    }
+
+    [Fact]
+    public void Drawn_square_hollow_sections_have_the_size_that_their_name_spells()
+    {
+        // "100x6.0SHS" in the file: 100 mm square, wall 6 mm; the arcs drawn there have radii 15 mm and 9 mm.
+        var named = Read("steel-frame-drawn-sections-ifc2x3.ifc").Catalog.Members
+            .Where(m => m.Section.TryGet(out var section, out _) && section.Value.Name == "100x6.0SHS").ToList();
+
+        Assert.Equal(17, named.Count);
+        Assert.All(named, m => Sections.ProfileReaderTests.AssertAlike(new Box(0.100, 0.100, 0.006, 0.015, 0.009), Reading.Shape(m), 1e-6));
     }
 
     private static Reading Read(string file) => Reading.Of(ModelContainer.Read(OpenModel.Path(file)).Bytes);

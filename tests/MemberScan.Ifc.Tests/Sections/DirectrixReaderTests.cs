@@ -233,7 +233,7 @@ public sealed class DirectrixReaderTests
         var member = Disk(model =>
         {
             var (a, b) = (model.Point(Vector3.Zero), model.Point(Vector3.UnitX));
-            return (model.Add("IFCPOLYLINE", Spelling.References(Enumerable.Range(0, DirectrixReader.MaxPieces + 1).Select(i => i % 2 == 0 ? a : b))), "$", "$");
+            return (model.Add("IFCPOLYLINE", Spelling.References(Enumerable.Range(0, CurveReader.MaxPieces + 1).Select(i => i % 2 == 0 ? a : b))), "$", "$");
         });
 
         Assert.Equal(ReasonCode.LengthAmbiguous, Reading.Why(member.Section).Code);
