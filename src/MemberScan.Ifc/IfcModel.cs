@@ -1,6 +1,8 @@
 using System.Collections.Immutable;
 using MemberScan.Foundation.Diagnostics;
 using MemberScan.Ifc.Analysis;
+using MemberScan.Ifc.Bodies;
+using MemberScan.Ifc.Curves;
 using MemberScan.Ifc.Geometry;
 using MemberScan.Ifc.Materials;
 using MemberScan.Ifc.Members;
@@ -67,7 +69,8 @@ public sealed class IfcModel
         var curves = new CurveReader(_instances, _placements, Units);
         var profiles = new ProfileReader(_instances, _placements, curves, Units);
         var directrices = new DirectrixReader(_instances, curves, Units);
-        var bodies = new BodyReader(_instances, _placements, profiles, directrices, Units);
+        var sweeps = new SweptBodyReader(_instances, _placements, profiles, directrices, Units);
+        var bodies = new BodyReader(_instances, _placements, sweeps, new DiskBodyReader(directrices, Units), new PrimitiveReader(_placements, Units));
         var facts = new MaterialFactsReader(_instances, Units, _unitReader);
         var materials = new MaterialReader(_instances, _relations, facts, profiles, _rules);
         return new MemberReader(_instances, _relations, _placements, bodies, profiles, materials, _analytical, Schema, _rules.Candidates, _diagnostics).Read(isNamed);

@@ -3,6 +3,7 @@ using System.Globalization;
 using MemberScan.Foundation.Diagnostics;
 using MemberScan.Foundation.Geometry;
 using MemberScan.Ifc.Analysis;
+using MemberScan.Ifc.Bodies;
 using MemberScan.Ifc.Geometry;
 using MemberScan.Ifc.Materials;
 using MemberScan.Ifc.Schema;
@@ -154,7 +155,7 @@ internal sealed class MemberReader(
             return member with { Notes = member.Notes.Add($"the profile of the material profile set is not read ({((Finding<ProfileShape>.Missing)sets[0]).Why.Message}); the body's section is used") };
 
         var own = body.Value.Shapes;
-        var different = set.Value.Section.Shapes.Where(s => !own.Any(o => Alike(s, o))).ToImmutableArray();
+        var different = set.Value.Section.Shapes.Where(s => !own.Any(o => SectionAlike.Of(s, o))).ToImmutableArray();
         if (different.IsEmpty) return member with { Section = body with { Source = $"{body.Source}; material profile set agrees" } };
 
         var note = $"body and material profile set differ ({own[0].Designation} against {different[0].Designation}); the less favourable decides";
@@ -164,20 +165,6 @@ internal sealed class MemberReader(
             Section = new Finding<SectionFinding>.Found(both, $"{body.Source}; material profile set, {set.Source}"),
             Material = materials.Read(record.Id, both),
             Notes = member.Notes.Add(note),
-        };
-    }
-
-    private static bool Alike(CrossSection a, CrossSection b)
-    {
-        static bool Near(double p, double q) => Math.Abs(p - q) <= 1e-4 * Math.Max(Math.Abs(p), Math.Abs(q)) + 1e-9;
-        return (a, b) switch
-        {
-            (Round p, Round q) => Near(p.Radius, q.Radius),
-            (Tube p, Tube q) => Near(p.OuterRadius, q.OuterRadius) && Near(p.Wall, q.Wall),
-            (Rectangle p, Rectangle q) => Near(p.Width, q.Width) && Near(p.Depth, q.Depth),
-            (RoundedRectangle p, RoundedRectangle q) => Near(p.Width, q.Width) && Near(p.Depth, q.Depth) && Near(p.CornerRadius, q.CornerRadius),
-            (Box p, Box q) => Near(p.Width, q.Width) && Near(p.Depth, q.Depth) && Near(p.Wall, q.Wall) && Near(p.OuterRadius, q.OuterRadius) && Near(p.InnerRadius, q.InnerRadius),
-            _ => false,
         };
     }
 

@@ -1,7 +1,7 @@
 using System.Collections.Immutable;
 using System.Globalization;
 using MemberScan.Foundation.Geometry;
-using MemberScan.Ifc.Sections;
+using MemberScan.Ifc.Curves;
 
 namespace MemberScan.Ifc.Outlines;
 

@@ -1,5 +1,5 @@
 using MemberScan.Foundation.Geometry;
-using MemberScan.Ifc.Sections;
+using MemberScan.Ifc.Curves;
 
 namespace MemberScan.Ifc.Outlines;
 

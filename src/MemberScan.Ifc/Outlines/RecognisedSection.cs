@@ -1,6 +1,5 @@
 using System.Collections.Immutable;
 using MemberScan.Foundation.Geometry;
-using MemberScan.Ifc.Sections;
 using MemberScan.Mechanics.Sections;
 
 namespace MemberScan.Ifc.Outlines;

@@ -1,6 +1,7 @@
 using System.Collections.Immutable;
 using System.Globalization;
 using MemberScan.Foundation.Geometry;
+using MemberScan.Ifc.Curves;
 using MemberScan.Ifc.Outlines;
 using MemberScan.Model;
 using MemberScan.Model.Members;

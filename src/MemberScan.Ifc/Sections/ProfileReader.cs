@@ -1,6 +1,8 @@
 using System.Collections.Immutable;
 using System.Globalization;
+using MemberScan.Ifc.Curves;
 using MemberScan.Ifc.Geometry;
+using MemberScan.Ifc.Outlines;
 using MemberScan.Ifc.Units;
 using MemberScan.Mechanics.Sections;
 using MemberScan.Model;

@@ -1,9 +1,9 @@
 using MemberScan.Foundation.Geometry;
-using MemberScan.Ifc.Sections;
+using MemberScan.Ifc.Curves;
 using MemberScan.Model.Members;
 using MemberScan.Model.Verdicts;
 
-namespace MemberScan.Ifc.Tests.Sections;
+namespace MemberScan.Ifc.Tests.Curves;
 
 /// <summary>Lengths and bend radii by hand; parameters of curves as in the IFC documentation (a polyline counts its segments, a circle its angle in the plane-angle unit).</summary>
 public sealed class DirectrixReaderTests

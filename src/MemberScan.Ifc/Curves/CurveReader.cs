@@ -3,7 +3,7 @@ using MemberScan.Ifc.Geometry;
 using MemberScan.Ifc.Units;
 using MemberScan.Part21;
 
-namespace MemberScan.Ifc.Sections;
+namespace MemberScan.Ifc.Curves;
 
 /// <summary>Straight and circular pieces of polylines, indexed poly-curves, composite curves, trimmed lines and trimmed circles.</summary>
 internal sealed class CurveReader(Instances instances, PlacementReader placements, ModelUnits units)

@@ -1,7 +1,7 @@
 using System.Collections.Immutable;
 using MemberScan.Mechanics.Sections;
 
-namespace MemberScan.Ifc.Sections;
+namespace MemberScan.Ifc.Outlines;
 
 /// <summary>The ways to read a box whose corner radii may be absent.</summary>
 internal static class BoxReadings

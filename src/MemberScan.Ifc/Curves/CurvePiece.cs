@@ -1,6 +1,6 @@
 using MemberScan.Foundation.Geometry;
 
-namespace MemberScan.Ifc.Sections;
+namespace MemberScan.Ifc.Curves;
 
 /// <summary>A straight or circular piece of a curve, with its range of curve parameter, in curve order.</summary>
 /// <param name="Start">Start [m].</param>

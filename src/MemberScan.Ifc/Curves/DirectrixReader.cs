@@ -5,7 +5,7 @@ using MemberScan.Model;
 using MemberScan.Model.Verdicts;
 using MemberScan.Part21;
 
-namespace MemberScan.Ifc.Sections;
+namespace MemberScan.Ifc.Curves;
 
 /// <summary>Centre lines from the pieces of their curves.</summary>
 internal sealed class DirectrixReader(Instances instances, CurveReader curves, ModelUnits units)
@@ -21,6 +21,12 @@ internal sealed class DirectrixReader(Instances instances, CurveReader curves, M
         if (!instances.TryFollow(curve, out var record)) return Missing(ReasonCode.DamagedRecord, "the centre line refers to nothing");
         if (curves.Pieces(record) is not { Count: > 0 } pieces)
             return Missing(ReasonCode.LengthAmbiguous, string.Create(CultureInfo.InvariantCulture, $"the centre line {record.Keyword} #{record.Id} is not read or is damaged"));
+
+        // Since IFC4X3 both ends may be lengths along the curve instead of its parameters.
+        var byLength = startParam.TypeName == "IFCLENGTHMEASURE" || endParam.TypeName == "IFCLENGTHMEASURE";
+        if (byLength && (startParam.TypeName == "IFCPARAMETERVALUE" || endParam.TypeName == "IFCPARAMETERVALUE"))
+            return Missing(ReasonCode.LengthAmbiguous, string.Create(CultureInfo.InvariantCulture, $"the centre line {record.Keyword} #{record.Id} is trimmed by a length and by a parameter; its length is ambiguous"));
+        if (byLength) pieces = [.. pieces.Select(p => p with { ParameterSpan = p.Length / units.Length.Value })];
         if (Trimmed(pieces, Instances.Real(startParam), Instances.Real(endParam)) is not { } kept)
             return Missing(ReasonCode.LengthAmbiguous, string.Create(CultureInfo.InvariantCulture, $"the centre line {record.Keyword} #{record.Id} is trimmed beyond its parameters, or from 0 to 1 although it has more; its length is ambiguous"));
 
