@@ -56,7 +56,8 @@ internal static class ScreenRun
         return ExitCodes.Of(outcome.Record);
     }
 
-    private static Settings ReadSettings(Options options, DiagnosticList diagnostics, FindingLog log)
+    /// <summary>The settings in force; a wrong file ends the run.</summary>
+    public static Settings ReadSettings(Options options, DiagnosticList diagnostics, FindingLog log)
     {
         var settings = Settings.Default;
         if (options.Settings is { } path)
@@ -75,7 +76,8 @@ internal static class ScreenRun
         return settings with { Reading = settings.Reading with { Forces = forces } };
     }
 
-    private static ImmutableArray<ForcesTable> ReadTables(Options options, DiagnosticList diagnostics, FindingLog log)
+    /// <summary>The forces tables; a wrong one ends the run.</summary>
+    public static ImmutableArray<ForcesTable> ReadTables(Options options, DiagnosticList diagnostics, FindingLog log)
     {
         var tables = ImmutableArray.CreateBuilder<ForcesTable>();
         var failed = false;
