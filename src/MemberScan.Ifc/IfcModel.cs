@@ -73,7 +73,7 @@ public sealed class IfcModel
         var bodies = new BodyReader(_instances, _placements, sweeps, new DiskBodyReader(directrices, Units), new PrimitiveReader(_placements, Units));
         var facts = new MaterialFactsReader(_instances, Units, _unitReader);
         var materials = new MaterialReader(_instances, _relations, facts, profiles, _rules);
-        return new MemberReader(_instances, _relations, _placements, bodies, profiles, materials, _analytical, Schema, _rules.Candidates, _diagnostics).Read(isNamed);
+        return new MemberReader(_instances, _relations, _placements, bodies, profiles, materials, _analytical, Schema, _rules.Candidates, new RoleGuess(_rules.Roles), _diagnostics).Read(isNamed);
     }
 
     /// <summary>Reads the section forces of candidates from the model's result groups.</summary>

@@ -20,7 +20,7 @@ namespace MemberScan.Ifc.Members;
 /// <summary>Finds the candidates of a model and reads each: section, length, axes, material, or the reason why not.</summary>
 internal sealed class MemberReader(
     Instances instances, Relations relations, PlacementReader placements, BodyReader bodies, ProfileReader profiles, MaterialReader materials,
-    AnalyticalMemberReader analytical, SchemaVersion schema, CandidateRules rules, DiagnosticList diagnostics)
+    AnalyticalMemberReader analytical, SchemaVersion schema, CandidateRules rules, RoleGuess roles, DiagnosticList diagnostics)
 {
     private const string NoBar = "no bar-like body of a covered section, and no forces";
 
@@ -118,18 +118,19 @@ internal sealed class MemberReader(
 
         if (relations.HasOpenings(record.Id)) notes = notes.Add("openings are cut out of the element; the gross section is used");
 
+        Finding<MemberAxes> axes = placed.TryGet(out var map, out var why)
+            ? new Finding<MemberAxes>.Found(InProject(body.Axes, map.Value, ref notes), "body")
+            : new Finding<MemberAxes>.Missing(why);
         return new Member
         {
             Key = key,
             Element = element,
             ItemNumber = number,
             ItemCount = count,
-            Role = RoleGuess.Of(element),
+            Role = roles.Of(element, (axes as Finding<MemberAxes>.Found)?.Value, body.Length / body.Profile.LargestExtent),
             Section = new Finding<SectionFinding>.Found(section, body.Source),
             Length = new Finding<double>.Found(body.Length, body.LengthSource),
-            Axes = placed.TryGet(out var map, out var why)
-                ? new Finding<MemberAxes>.Found(InProject(body.Axes, map.Value, ref notes), "body")
-                : new Finding<MemberAxes>.Missing(why),
+            Axes = axes,
             Material = materials.Read(record.Id, section),
             BendRadii = body.BendRadii,
             IsStraight = body.IsStraight,
@@ -181,7 +182,7 @@ internal sealed class MemberReader(
             Element = element,
             ItemNumber = 0,
             ItemCount = 1,
-            Role = RoleGuess.Of(element),
+            Role = roles.Of(element, lines.Count == 1 ? (lines[0].Axes as Finding<MemberAxes>.Found)?.Value : null, null),
             Section = section,
             Length = lines.Count == 1 ? lines[0].Length : NoLength("the member has no swept body that gives its length"),
             Axes = lines.Count == 1 ? lines[0].Axes : NoAxes("the member has no swept body that gives its axes"),
@@ -251,7 +252,7 @@ internal sealed class MemberReader(
             Element = element,
             ItemNumber = 0,
             ItemCount = 1,
-            Role = RoleGuess.Of(element),
+            Role = roles.Of(element, (line.Axes as Finding<MemberAxes>.Found)?.Value, null),
             Section = section,
             Length = line.Length,
             Axes = line.Axes,
