@@ -183,5 +183,38 @@ public sealed class CandidateTests
         Assert.All(named, m => Sections.ProfileReaderTests.AssertAlike(new Box(0.100, 0.100, 0.006, 0.015, 0.009), Reading.Shape(m), 1e-6));
     }
 
+    [Fact]
+    public void Lengths_agree_with_the_length_quantities_that_the_steel_job_carries()
+    {
+        // Quantity sets 'BaseQuantities' of the file, in mm; three walls modelled as beams carry a length of zero there.
+        var reading = Reading.Of(ModelContainer.Read(OpenModel.Path("carwash-steel-ifc2x3.ifc")).Bytes, new ReadingRules { RecogniseMeshes = true });
+        var lengths = LengthQuantities(reading.Model.File);
+
+        var compared = reading.Catalog.Members.Where(m => m.ItemNumber == 0 && m.Section.TryGet(out _, out _) && lengths.ContainsKey(m.Element.StepId))
+            .Select(m => (Read: Reading.Value(m.Length), Written: 1e-3 * lengths[m.Element.StepId])).ToList();
+
+        Assert.Equal(1941, compared.Count);
+        Assert.Equal(3, compared.Count(c => c.Written == 0));
+        Assert.All(compared.Where(c => c.Written > 0), c => Reading.AssertNear(c.Written, c.Read, 1e-4));
+    }
+
+    private static Dictionary<ulong, double> LengthQuantities(Part21File file)
+    {
+        var lengths = new Dictionary<ulong, double>();
+        foreach (var relation in file.RecordsOf("IFCRELDEFINESBYPROPERTIES"))
+        {
+            if (!relation[5].TryReference(out var setId) || !file.TryFind(setId, out var set) || set.Keyword != "IFCELEMENTQUANTITY") continue;
+
+            foreach (var item in set[5].Items)
+                if (item.TryReference(out var id) && file.TryFind(id, out var quantity) && quantity.Keyword == "IFCQUANTITYLENGTH"
+                    && quantity[0].TryText(out var name) && name == "Length" && quantity[3].TryReal(out var value))
+                    foreach (var element in relation[4].Items)
+                        if (element.TryReference(out var elementId))
+                            lengths.TryAdd(elementId, value);
+        }
+
+        return lengths;
+    }
+
     private static Reading Read(string file) => Reading.Of(ModelContainer.Read(OpenModel.Path(file)).Bytes);
 }
