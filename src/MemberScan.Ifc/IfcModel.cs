@@ -6,6 +6,7 @@ using MemberScan.Ifc.Curves;
 using MemberScan.Ifc.Geometry;
 using MemberScan.Ifc.Materials;
 using MemberScan.Ifc.Members;
+using MemberScan.Ifc.Meshes;
 using MemberScan.Ifc.Schema;
 using MemberScan.Ifc.Sections;
 using MemberScan.Ifc.Units;
@@ -70,7 +71,8 @@ public sealed class IfcModel
         var profiles = new ProfileReader(_instances, _placements, curves, Units);
         var directrices = new DirectrixReader(_instances, curves, Units);
         var sweeps = new SweptBodyReader(_instances, _placements, profiles, directrices, Units);
-        var bodies = new BodyReader(_instances, _placements, sweeps, new DiskBodyReader(directrices, Units), new PrimitiveReader(_placements, Units));
+        var meshes = new MeshBodyReader(new MeshReader(_instances, _placements, Units), _rules.RecogniseMeshes);
+        var bodies = new BodyReader(_instances, _placements, sweeps, new DiskBodyReader(directrices, Units), new PrimitiveReader(_placements, Units), meshes);
         var facts = new MaterialFactsReader(_instances, Units, _unitReader);
         var materials = new MaterialReader(_instances, _relations, facts, profiles, _rules);
         return new MemberReader(_instances, _relations, _placements, bodies, profiles, materials, _analytical, Schema, _rules.Candidates, new RoleGuess(_rules.Roles), _diagnostics).Read(isNamed);

@@ -25,7 +25,7 @@ public sealed class SampleModelTests
             var member = reading.Catalog.Members.Single(m => m.Key == meant.Key);
             if (meant.Body == SampleBody.Brep)
             {
-                Assert.Equal(ReasonCode.SectionNotParametric, Reading.Why(member.Section).Code);
+                Assert.Equal(ReasonCode.MeshNotAllowed, Reading.Why(member.Section).Code);
                 continue;
             }
 

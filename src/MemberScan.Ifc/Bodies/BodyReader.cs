@@ -10,7 +10,7 @@ namespace MemberScan.Ifc.Bodies;
 
 /// <summary>Bar-like bodies of an element: sweeps, swept disks, blocks and cylinders, mapped, clipped or plain.</summary>
 internal sealed class BodyReader(
-    Instances instances, PlacementReader placements, SweptBodyReader sweeps, DiskBodyReader disks, PrimitiveReader primitives)
+    Instances instances, PlacementReader placements, SweptBodyReader sweeps, DiskBodyReader disks, PrimitiveReader primitives, MeshBodyReader meshes)
 {
     /// <summary>Deepest nesting of mapped items, solids and operands that is followed.</summary>
     private const int MaxNesting = 16;
@@ -119,7 +119,7 @@ internal sealed class BodyReader(
             "IFCRIGHTCIRCULARCYLINDER" => primitives.Cylinder(item),
             "IFCFACETEDBREP" or "IFCFACETEDBREPWITHVOIDS" or "IFCADVANCEDBREP" or "IFCADVANCEDBREPWITHVOIDS" or "IFCTRIANGULATEDFACESET"
                 or "IFCPOLYGONALFACESET" or "IFCFACEBASEDSURFACEMODEL" or "IFCSHELLBASEDSURFACEMODEL" or "IFCTRIANGULATEDIRREGULARNETWORK" =>
-                Missing(ReasonCode.SectionNotParametric, $"the body {item.Called} is a mesh without a parametric section"),
+                meshes.Read(item, toProject),
             "IFCMAPPEDITEM" => Missing(ReasonCode.DamagedRecord, $"the mapped body {item.Called} is damaged or nested too deep"),
             _ => Missing(ReasonCode.SectionNotCovered, $"the body {item.Called} is not a sweep of a section, a swept disk, a block or a cylinder"),
         };

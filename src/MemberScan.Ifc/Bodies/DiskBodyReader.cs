@@ -35,7 +35,7 @@ internal sealed class DiskBodyReader(DirectrixReader directrices, ModelUnits uni
 
         var tangent = item.Map.Direction(line.Value.Tangent);
         var start = item.Map.Point(line.Value.Start);
-        var axes = UprightAxes(start, tangent, toProject);
+        var axes = UprightAxes.At(start, tangent, toProject);
         var notes = item.Notes;
         if (line.Value.Corners > 0)
             notes = notes.Add(string.Create(CultureInfo.InvariantCulture, $"the centre line has {line.Value.Corners} mitred corners; stresses local to a corner are not covered"));
@@ -48,18 +48,6 @@ internal sealed class DiskBodyReader(DirectrixReader directrices, ModelUnits uni
             new BarBody(profile, scale * line.Value.Length, $"centre line {line.Source} of {item.Called}", axes, source,
                 [.. line.Value.BendRadii.Select(b => scale * b)], line.Value.IsStraight, notes),
             source);
-    }
-
-    /// <summary>Axes of a swept disk: z = global +Z square to x, for an upright member global +X.</summary>
-    private static MemberAxes UprightAxes(Vector3 start, Vector3 tangent, Transform3 toProject)
-    {
-        // The global directions as seen from the object: its placement is a rotation, so the transposed map turns them back.
-        var up = new Vector3(toProject.X.Z, toProject.Y.Z, toProject.Z.Z);
-        var east = new Vector3(toProject.X.X, toProject.Y.X, toProject.Z.X);
-        _ = tangent.TryNormalize(out var x);
-        var isUpright = x.Cross(up).Length < 1e-3;
-        return MemberAxes.From(start, tangent, isUpright ? east : up)
-            ?? MemberAxes.From(start, tangent, Math.Abs(x.X) < 0.9 ? Vector3.UnitX : Vector3.UnitY)!;
     }
 
     private static Finding<BarBody> Missing(ReasonCode code, string message) => Missing(new Reason(code, message));

@@ -1,3 +1,5 @@
+using System.Collections.Immutable;
+
 namespace MemberScan.Ifc.Materials;
 
 /// <summary>What the records of one material say, before grades by name are tried.</summary>
@@ -10,4 +12,8 @@ namespace MemberScan.Ifc.Materials;
 /// <param name="IsConcreteByProperties">Whether properties of concrete are given.</param>
 internal sealed record MaterialFacts(
     string Name, string Category, PropertyValue? Yield, PropertyValue? Modulus, PropertyValue? Poisson,
-    bool IsSteelByProperties, bool IsConcreteByProperties);
+    bool IsSteelByProperties, bool IsConcreteByProperties)
+{
+    /// <summary>Identifications and names of the classification references of the material.</summary>
+    public ImmutableArray<string> Classifications { get; init; } = [];
+}

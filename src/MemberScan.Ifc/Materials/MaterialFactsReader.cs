@@ -11,11 +11,16 @@ internal sealed class MaterialFactsReader
     private readonly ModelUnits _units;
     private readonly UnitReader _unitReader;
     private readonly Dictionary<ulong, List<Part21Record>> _propertiesOf = [];
+    private readonly Dictionary<ulong, List<string>> _classificationsOf = [];
     private readonly Dictionary<ulong, MaterialFacts> _known = [];
 
     public MaterialFactsReader(Instances instances, ModelUnits units, UnitReader unitReader)
     {
         (_instances, _units, _unitReader) = (instances, units, unitReader);
+        foreach (var relation in instances.File.RecordsOf("IFCEXTERNALREFERENCERELATIONSHIP")) AddClassifications(relation[2], Instances.IdsOf(relation[3]));
+        foreach (var relation in instances.File.RecordsOf("IFCMATERIALCLASSIFICATIONRELATIONSHIP"))
+            if (relation[1].TryReference(out var classified))
+                AddClassifications(relation[0], [classified]);
         Index("IFCMATERIALPROPERTIES", materialIndex: 3);
         Index("IFCEXTENDEDMATERIALPROPERTIES", materialIndex: 0);
         Index("IFCMECHANICALMATERIALPROPERTIES", materialIndex: 0);
@@ -28,10 +33,25 @@ internal sealed class MaterialFactsReader
     {
         if (_known.TryGetValue(material.Id, out var known)) return known;
 
-        var facts = new MaterialFacts(Instances.Text(material[0]).Trim(), Instances.Text(material[2]).Trim(), null, null, null, false, false);
+        var facts = new MaterialFacts(Instances.Text(material[0]).Trim(), Instances.Text(material[2]).Trim(), null, null, null, false, false)
+        {
+            Classifications = [.. _classificationsOf.GetValueOrDefault(material.Id) ?? []],
+        };
         foreach (var record in _propertiesOf.GetValueOrDefault(material.Id) ?? [])
             facts = With(facts, record);
         return _known[material.Id] = facts;
+    }
+
+    // IfcClassificationReference: location, identification, name; in IFC2X3 the second is called ItemReference. IfcClassificationNotation is not read.
+    private void AddClassifications(Part21Value references, IEnumerable<ulong> materials)
+    {
+        var texts = _instances.FollowAll(references).Where(r => r.Keyword == "IFCCLASSIFICATIONREFERENCE")
+            .SelectMany(r => new[] { Instances.Text(r[1]).Trim(), Instances.Text(r[2]).Trim() }).Where(t => t.Length > 0).ToList();
+        foreach (var material in materials)
+        {
+            if (!_classificationsOf.TryGetValue(material, out var list)) _classificationsOf[material] = list = [];
+            list.AddRange(texts);
+        }
     }
 
     private MaterialFacts With(MaterialFacts facts, Part21Record record) => record.Keyword switch

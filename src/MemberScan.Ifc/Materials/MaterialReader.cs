@@ -52,18 +52,39 @@ internal sealed class MaterialReader(
     /// <param name="section">Its section, for the thickness ranges of grades; null if none.</param>
     public Material Read(ulong id, SectionFinding? section)
     {
-        var materials = Levels(id).Select(level => level.SelectMany(d => Materials(d, [])).ToList()).FirstOrDefault(list => list.Count > 0) ?? [];
-        var read = materials.Select(facts.Read).DistinctBy(m => (m.Name, m.Category, m.Yield?.Value, m.Modulus?.Value, m.IsConcreteByProperties)).ToList();
+        var levels = Levels(id).Select(Distinct).Where(list => list.Count > 0).ToList();
+        var read = levels.Count > 0 ? levels[0] : [];
         var names = read.Select(m => m.Name);
         if (read.Count == 0) return Unknown("", "no material is associated with the member or its type");
         if (read.Count > 1) return Unknown(string.Join(" + ", names.Distinct(StringComparer.Ordinal)), $"several materials are associated: {string.Join(", ", names)}");
 
-        return With(read[0], section);
+        var own = With(read[0], section);
+        return levels.Count > 1 && levels[1] is [var ofType] && !string.Equals(ofType.Name, read[0].Name, StringComparison.OrdinalIgnoreCase)
+            ? MoreCautious(own, With(ofType, section))
+            : own;
     }
+
+    private List<MaterialFacts> Distinct(IEnumerable<Part21Record> definitions) =>
+        [.. definitions.SelectMany(d => Materials(d, [])).Select(facts.Read).DistinctBy(m => (m.Name, m.Category, m.Yield?.Value, m.Modulus?.Value, m.IsConcreteByProperties))];
+
+    /// <summary>The occurrence's material, with the smaller strength where the type names another one; both are told.</summary>
+    private static Material MoreCautious(Material own, Material ofType) => (own.Yield, ofType.Yield) switch
+    {
+        (Finding<double>.Found a, Finding<double>.Found b) when b.Value < a.Value * (1 - 1e-6) => own with
+        {
+            Yield = b with { Source = string.Create(CultureInfo.InvariantCulture, $"{b.Source}, of the type's material '{ofType.Name}'; the smaller of two, the occurrence's '{own.Name}' says {a.Value / 1e6:0.####} MPa by {a.Source}") },
+        },
+        (Finding<double>.Found a, Finding<double>.Found b) => own with
+        {
+            Yield = a with { Source = string.Create(CultureInfo.InvariantCulture, $"{a.Source}; the type's material '{ofType.Name}' says {b.Value / 1e6:0.####} MPa") },
+        },
+        (Finding<double>.Found a, _) => own with { Yield = a with { Source = $"{a.Source}; the type names another material, '{ofType.Name}', without a strength" } },
+        _ => own,
+    };
 
     private Material With(MaterialFacts material, SectionFinding? section)
     {
-        var grade = GradeOf(material.Name) ?? GradeOf(material.Category);
+        var grade = GradeOf(material.Name) ?? GradeOf(material.Category) ?? material.Classifications.Select(GradeOf).FirstOrDefault(g => g is not null);
         var isSteel = grade?.IsSteel ?? (material.IsSteelByProperties
             || material.Category.Contains("steel", StringComparison.OrdinalIgnoreCase) || material.Modulus is { Value: > 170e9 and < 230e9 });
         return new Material(material.Name, Yield(material, grade, section), Modulus(material, grade), Poisson(material, grade), isSteel);

@@ -5,8 +5,8 @@ namespace MemberScan.Inputs.Materials;
 /// <summary>The pattern of a grade as a matcher of whole names, without regard to case.</summary>
 internal static class GradePattern
 {
-    /// <summary>Longest time for one name.</summary>
-    public static readonly TimeSpan MatchTimeout = TimeSpan.FromMilliseconds(250);
+    /// <summary>Longest time for one name; patterns are matched in linear time, so this only bounds what a settings file could ask for.</summary>
+    public static readonly TimeSpan MatchTimeout = TimeSpan.FromSeconds(10);
 
     // Linear in the length of the name whatever the pattern: material names come from models.
     private const RegexOptions Options = RegexOptions.NonBacktracking | RegexOptions.IgnoreCase | RegexOptions.CultureInvariant;

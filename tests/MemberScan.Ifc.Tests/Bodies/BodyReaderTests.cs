@@ -199,12 +199,12 @@ public sealed class BodyReaderTests
 
     [Theory]
     [MemberData(nameof(Schemas.All), MemberType = typeof(Schemas))]
-    public void A_faceted_body_has_no_parametric_section(Release release)
+    public void A_faceted_body_that_could_be_recognised_is_not_unless_the_settings_ask(Release release)
     {
         var model = Bars.Model(release);
         Bars.Add(model, "R", model.Bodies.FacetedBlock(0.05, 0.05, 2));
 
-        Assert.Equal(ReasonCode.SectionNotParametric, Reading.Why(Reading.Of(model).Only.Section).Code);
+        Assert.Equal(ReasonCode.MeshNotAllowed, Reading.Why(Reading.Of(model).Only.Section).Code);
     }
 
     [Fact]

@@ -342,4 +342,37 @@ public sealed class MaterialReaderTests
         model.Add("IFCMATERIALPROPERTIES", "'Pset_MaterialSteel'", "$", Bars.Refs(property), Bars.Ref(material));
         model.Associate(material, Bars.Add(model, name, Bars.Rail, 2));
     }
+
+    [Theory]
+    [InlineData("S235", "S355", 235, "the type's material 'S355' says 355 MPa")]
+    [InlineData("S355", "S235", 235, "of the type's material 'S235'; the smaller of two, the occurrence's 'S355' says 355 MPa")]
+    [InlineData("S355", "Steel", 355, "the type names another material, 'Steel', without a strength")]
+    public void Where_type_and_occurrence_disagree_both_are_told_and_the_smaller_strength_is_used(string own, string ofType, double expectedMPa, string words)
+    {
+        var model = Bars.Model(Release.Ifc4);
+        var member = Bars.Add(model, "R", Bars.Rail, 2);
+        model.Associate(model.Materials.Material(own), member);
+        model.Associate(model.Materials.Material(ofType), model.TypeObject("IFCMEMBERTYPE", "T", "MEMBER", null, [member]));
+
+        var material = Reading.Of(model, s_rules).Only.Material;
+
+        Assert.Equal(own, material.Name);
+        Reading.AssertNear(expectedMPa * 1e6, Reading.Value(material.Yield));
+        Assert.Contains(words, ((Finding<double>.Found)material.Yield).Source, StringComparison.Ordinal);
+    }
+
+    [Theory]
+    [MemberData(nameof(Schemas.All), MemberType = typeof(Schemas))]
+    public void A_classification_reference_of_the_material_names_its_grade(Release release)
+    {
+        var model = Bars.Model(release);
+        var material = model.Materials.Material("Steel, galvanised");
+        model.Associate(material, Bars.Add(model, "R", Bars.Rail, 2));
+        var reference = model.Add("IFCCLASSIFICATIONREFERENCE", "$", "'S235JR'", "'Landing steel'", "$");
+        _ = release == Release.Ifc2X3
+            ? model.Add("IFCMATERIALCLASSIFICATIONRELATIONSHIP", Bars.Refs(reference), Bars.Ref(material))
+            : model.Add("IFCEXTERNALREFERENCERELATIONSHIP", "$", "$", Bars.Ref(reference), Bars.Refs(material));
+
+        Reading.AssertNear(235e6, Reading.Value(Reading.Of(model, s_rules).Only.Material.Yield));
+    }
 }

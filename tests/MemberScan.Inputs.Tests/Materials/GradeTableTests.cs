@@ -49,6 +49,14 @@ public sealed class GradeTableTests
     [InlineData("ASTM A1085", "A1085")]
     [InlineData("A572 Gr 50", "A572 Gr 50")]
     [InlineData("A572-50", "A572 Gr 50")]
+    [InlineData("EN AW-6063 T6", "EN AW-6063 T6")]
+    [InlineData("EN AW-6063 T66", "EN AW-6063 T66")]
+    [InlineData("Aluminium EN AW-6060 T66", "EN AW-6060 T66")]
+    [InlineData("AW 6082-T6", "EN AW-6082 T6")]
+    [InlineData("EN AW-6082 T6 (unwelded)", "EN AW-6082 T6 unwelded")]
+    [InlineData("6061-T6", "6061-T6")]
+    [InlineData("Aluminum 6063-T5", "6063-T5")]
+    [InlineData("6061-T6 unwelded", "6061-T6 unwelded")]
     public void A_material_name_finds_its_grade(string name, string expected)
     {
         Assert.Equal(expected, GradeTable.Shipped.Find(name)?.Name);
@@ -72,6 +80,9 @@ public sealed class GradeTableTests
     [InlineData("A572 Gr 65")]
     [InlineData("A53 Gr A")]
     [InlineData("1a4301")]
+    [InlineData("Aluminium")]
+    [InlineData("EN AW-6063")]
+    [InlineData("6061")]
     [InlineData("Concrete C30/37")]
     [InlineData("S235JR\nS355")]
     public void A_plain_or_foreign_name_finds_none(string name)
@@ -98,6 +109,16 @@ public sealed class GradeTableTests
     [InlineData("A500 Gr B", 6, 42 * 6.894757)]
     [InlineData("A500 Gr C", 6, 46 * 6.894757)]
     [InlineData("A992", 6, 50 * 6.894757)]
+    // EN 1999-1-1:2007 table 3.2b, from memory: 6063 T6 160 and 65 MPa, 6082 T6 250 to 5 mm, 260 to 15 mm, 125 MPa in the welded zone.
+    [InlineData("EN AW-6063 T6 unwelded", 3, 160)]
+    [InlineData("EN AW-6063 T6", 3, 65)]
+    [InlineData("EN AW-6082 T6 unwelded", 5, 250)]
+    [InlineData("EN AW-6082 T6 unwelded", 6, 260)]
+    [InlineData("EN AW-6082 T6", 6, 125)]
+    // Aluminum Design Manual 2015 table A.4.3, from memory: 6061-T6 35 and 15 ksi, 6063-T5 16 and 8 ksi.
+    [InlineData("6061-T6 unwelded", 6, 35 * 6.8947573)]
+    [InlineData("6061-T6", 6, 15 * 6.8947573)]
+    [InlineData("6063-T5", 6, 8 * 6.8947573)]
     public void The_strength_follows_the_thickness(string name, double thicknessMm, double expectedMPa)
     {
         var grade = GradeTable.Shipped.Find(name)!;
@@ -116,12 +137,13 @@ public sealed class GradeTableTests
         Assert.All(grades, grade =>
         {
             Assert.True(grade.FromMemory);
-            Assert.True(grade.IsSteel);
-            Assert.InRange(grade.Modulus, Si.GPa(190), Si.GPa(211));
+            var isAluminium = grade.Standard.Contains("EN 1999", StringComparison.Ordinal) || grade.Standard.Contains("Aluminum", StringComparison.Ordinal);
+            Assert.Equal(!isAluminium, grade.IsSteel);
+            Assert.InRange(grade.Modulus, isAluminium ? Si.GPa(69) : Si.GPa(190), isAluminium ? Si.GPa(71) : Si.GPa(211));
             Assert.Equal(0.3, grade.Poisson);
             Assert.NotEmpty(grade.Standard);
             Assert.Equal(grade.Yields.OrderBy(range => range.UpTo), grade.Yields);
-            Assert.Equal(grade.Yields.OrderByDescending(range => range.Yield), grade.Yields);
+            if (grade.IsSteel) Assert.Equal(grade.Yields.OrderByDescending(range => range.Yield), grade.Yields);
         });
     }
 

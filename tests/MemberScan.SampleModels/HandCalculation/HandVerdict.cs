@@ -19,7 +19,7 @@ public static class HandVerdict
     /// <summary>Calculates a member.</summary>
     public static HandResult Of(SampleMember member)
     {
-        if (member.Body == SampleBody.Brep) return NotChecked("section-not-parametric", "the body is a faceted boundary");
+        if (member.Body == SampleBody.Brep) return NotChecked("mesh-not-allowed", "the body is a faceted boundary, and recognition of meshes is not asked for");
         if (member.Situations.IsEmpty) return NotChecked("no-forces", "no source has forces of it");
 
         var sections = HandSection.Of(member.Section);

@@ -42,6 +42,41 @@ public sealed class BodyWriter
         return _model.Add("IFCFACETEDBREP", Spelling.Reference(_model.Add("IFCCLOSEDSHELL", Spelling.References(shell))));
     }
 
+    /// <summary>A faceted boundary; each face is its outer loop and then its holes, as indices into the points.</summary>
+    public int FacetedBody(IReadOnlyList<Vector3> points, IEnumerable<IReadOnlyList<IReadOnlyList<int>>> faces) =>
+        _model.Add("IFCFACETEDBREP", Spelling.Reference(Shell("IFCCLOSEDSHELL", points, faces)));
+
+    /// <summary>A surface model of one shell.</summary>
+    public int SurfaceModel(IReadOnlyList<Vector3> points, IEnumerable<IReadOnlyList<IReadOnlyList<int>>> faces) =>
+        _model.Add("IFCSHELLBASEDSURFACEMODEL", Spelling.References([Shell("IFCCLOSEDSHELL", points, faces)]));
+
+    /// <summary>A set of triangles (not in IFC2X3).</summary>
+    public int Triangles(IReadOnlyList<Vector3> points, IEnumerable<IReadOnlyList<int>> triangles) => _model.Add("IFCTRIANGULATEDFACESET",
+        Spelling.Reference(PointList(points)), Spelling.Unset, Spelling.Boolean(true), Spelling.List(triangles.Select(FromOne)), Spelling.Unset);
+
+    /// <summary>A set of polygons (not in IFC2X3).</summary>
+    public int Polygons(IReadOnlyList<Vector3> points, IEnumerable<IReadOnlyList<IReadOnlyList<int>>> faces)
+    {
+        var written = faces.Select(face => face.Count == 1
+            ? _model.Add("IFCINDEXEDPOLYGONALFACE", FromOne(face[0]))
+            : _model.Add("IFCINDEXEDPOLYGONALFACEWITHVOIDS", FromOne(face[0]), Spelling.List(face.Skip(1).Select(FromOne)))).ToArray();
+        return _model.Add("IFCPOLYGONALFACESET", Spelling.Reference(PointList(points)), Spelling.Boolean(true), Spelling.References(written), Spelling.Unset);
+    }
+
+    private int Shell(string keyword, IReadOnlyList<Vector3> points, IEnumerable<IReadOnlyList<IReadOnlyList<int>>> faces)
+    {
+        int[] written = [.. points.Select(_model.Point)];
+        int[] all = [.. faces.Select(face => _model.Add("IFCFACE", Spelling.References(face.Select((loop, i) => _model.Add(
+            i == 0 ? "IFCFACEOUTERBOUND" : "IFCFACEBOUND",
+            Spelling.Reference(_model.Add("IFCPOLYLOOP", Spelling.References(loop.Select(p => written[p])))), Spelling.Boolean(true))))))];
+        return _model.Add(keyword, Spelling.References(all));
+    }
+
+    private int PointList(IReadOnlyList<Vector3> points) => _model.Add("IFCCARTESIANPOINTLIST3D", Spelling.List(points.Select(p =>
+        Spelling.List([_model.Units.LengthText(p.X), _model.Units.LengthText(p.Y), _model.Units.LengthText(p.Z)]))));
+
+    private static string FromOne(IReadOnlyList<int> indices) => Spelling.List(indices.Select(i => Spelling.Integer(i + 1)));
+
     /// <summary>The body representation of solids of one kind: <c>SweptSolid</c>, <c>AdvancedSweptSolid</c>, <c>Brep</c>, <c>MappedRepresentation</c>.</summary>
     public int Representation(string kind, params IEnumerable<int> items) =>
         _model.Add("IFCSHAPEREPRESENTATION", Spelling.Reference(_model.BodyContext), Spelling.Text("Body"), Spelling.Text(kind), Spelling.References(items));
