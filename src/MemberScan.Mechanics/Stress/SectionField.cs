@@ -1,8 +1,11 @@
 using System.Buffers;
 using MemberScan.Mechanics.Forces;
+using MemberScan.Mechanics.Meshes;
 using MemberScan.Mechanics.Outlines;
+using MemberScan.Mechanics.Profiles;
 using MemberScan.Mechanics.Sections;
 using MemberScan.Mechanics.Shear;
+using MemberScan.Mechanics.Warping;
 
 namespace MemberScan.Mechanics.Stress;
 
@@ -27,9 +30,10 @@ internal sealed class SectionField : StressField
         : base(section, model, poisson, properties)
     {
         _shear = shear;
-        _outline = Outline.Of(section, shear.HasPeaks);
+        _outline = OutlineOf(section, shear);
         _search = new GoverningSearch(this, shear, _outline);
-        if (shear.HasPeaks && section is Box { InnerRadius: > 0 } box) _fillets = new GoverningSearch(this, shear, new FilletOutline(box));
+        if (shear.HasPeaks && FilletsOf(section, _outline) is { Length: > 0 } arcs)
+            _fillets = new GoverningSearch(this, shear, new FilletOutline(section, _outline, arcs));
         _scans = new Lazy<(BlockScan, BlockScan)>(() => (new BlockScan(properties, shear, _outline, true), new BlockScan(properties, shear, _outline, false)));
         _closure = new Lazy<Closure>(() => ClosureIntegral.Of(this, shear, _outline));
     }
@@ -108,6 +112,25 @@ internal sealed class SectionField : StressField
             ArrayPool<SectionForces>.Shared.Return(keptBuffer);
         }
     }
+
+    private static Outline OutlineOf(CrossSection section, ShearSolution shear)
+    {
+        if (section is not (OutlineSection or OpenProfile)) return Outline.Of(section, shear.HasPeaks);
+
+        var shape = new OutlineShape(OutlineProperties.EdgesOf(section));
+        var walls = section is OpenProfile profile ? shear as OpenProfileElementary ?? new OpenProfileElementary(profile, OutlineProperties.Of(section, 0)) : null;
+        return new ProfileOutline(
+            section, shape, SolvedSections.Of(section).Potential.Mesh, shear.HasPeaks,
+            shear is OpenProfileElementary elementary ? elementary.Creases() : [],
+            walls is null ? (y, z) => ProfileOutline.PlainName(shape, y, z) : (y, z) => walls.NameOf(y, z));
+    }
+
+    private static EdgeCurve[] FilletsOf(CrossSection section, Outline outline) => (section, outline) switch
+    {
+        (Box { InnerRadius: > 0 } box, _) when ReentrantZone.ReachOf(box) > 0 => FilletOutline.ArcsOf(box),
+        (_, ProfileOutline profile) => [.. profile.Fillets],
+        _ => [],
+    };
 
     // Numbers of the states that may be largest in some measure.
     private static int Promising(ReadOnlySpan<double> targets, Span<int> numbers)

@@ -1,5 +1,6 @@
 using System.Diagnostics.CodeAnalysis;
 using MemberScan.Mechanics.Forces;
+using MemberScan.Mechanics.Profiles;
 using MemberScan.Mechanics.Sections;
 using MemberScan.Mechanics.Shear;
 using MemberScan.Mechanics.Warping;
@@ -39,7 +40,7 @@ public abstract class StressField
     /// <param name="model">The shear model.</param>
     /// <param name="poisson">Poisson's ratio ν [-], in [0, 0.5).</param>
     /// <param name="field">The field.</param>
-    /// <param name="whyNot">Why there is none, such as "elasticity not available for a box".</param>
+    /// <param name="whyNot">Why there is none, such as "there is no elementary rule for an outline".</param>
     /// <exception cref="ArgumentOutOfRangeException"><paramref name="poisson"/> is outside [0, 0.5).</exception>
     public static bool TryCreate(
         CrossSection section, ShearModel model, double poisson,
@@ -49,7 +50,13 @@ public abstract class StressField
         if (!(poisson is >= 0 and < 0.5))
             throw new ArgumentOutOfRangeException(nameof(poisson), poisson, "Poisson's ratio must lie in [0, 0.5)");
 
-        var properties = SectionProperties.Of(section);
+        if (section is OutlineSection && model == ShearModel.Elementary)
+        {
+            (field, whyNot) = (null, "there is no elementary rule for an outline; the elasticity model has it");
+            return false;
+        }
+
+        var properties = section is OutlineSection or OpenProfile ? OutlineProperties.Of(section, poisson) : SectionProperties.Of(section);
         field = new SectionField(section, model, poisson, properties, ShearSolutionOf(section, model, poisson, properties));
         whyNot = null;
         return true;
@@ -104,7 +111,8 @@ public abstract class StressField
             (RoundedRectangle rounded, ShearModel.Elementary) => new RoundedRectangleElementary(
                 rounded, properties, new NumericalElasticity(SolvedSections.Of(rounded), properties, 0)),
             (Box box, ShearModel.Elementary) => new BoxElementary(box, properties),
-            (Box or RoundedRectangle, ShearModel.Elasticity) => new NumericalElasticity(SolvedSections.Of(section), properties, poisson),
+            (OpenProfile profile, ShearModel.Elementary) => new OpenProfileElementary(profile, properties),
+            (Box or RoundedRectangle or OutlineSection or OpenProfile, ShearModel.Elasticity) => new NumericalElasticity(SolvedSections.Of(section), properties, poisson),
             _ => throw new ArgumentOutOfRangeException(nameof(model), model, "unknown shear model"),
         };
 }

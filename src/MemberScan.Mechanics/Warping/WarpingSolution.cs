@@ -6,8 +6,11 @@ namespace MemberScan.Mechanics.Warping;
 internal sealed class WarpingSolution
 {
     private const int FirstDegree = 6;
+    private const int FirstDegreeOfManyPatches = 4;
+    private const int LastDegreeOfManyPatches = 8;
+    private const int ManyPatches = 130;
     private const int LastDegree = 12;
-    private const double TorsionTolerance = 1e-6;
+    private const double TorsionTolerance = 1e-5;
     private const double StressTolerance = 2e-3;
     private const int Components = 10;
 
@@ -39,7 +42,8 @@ internal sealed class WarpingSolution
     {
         (WarpingPotential Potential, double J, double[] Stresses)? last = null;
         var (torsionError, stressError) = (1.0, 1.0);
-        for (var degree = FirstDegree; degree <= LastDegree; degree += 2)
+        var areMany = mesh.Patches.Count > ManyPatches;
+        for (var degree = areMany ? FirstDegreeOfManyPatches : FirstDegree; degree <= (areMany ? LastDegreeOfManyPatches : LastDegree); degree += 2)
         {
             if (WarpingSolver.TrySolve(mesh, degree) is not { } potential) break;
 
