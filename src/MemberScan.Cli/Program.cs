@@ -15,6 +15,9 @@ internal static class Program
     /// <summary>The only clock that is read.</summary>
     public static TimeProvider Clock => TimeProvider.System;
 
+    /// <summary>How long an interrupted run may take to its next stopping place, so that no half-written files stay.</summary>
+    private static readonly TimeSpan s_timeToStop = TimeSpan.FromSeconds(10);
+
     private static async Task<int> Main(string[] args)
     {
         Console.OutputEncoding = new UTF8Encoding(encoderShouldEmitUTF8Identifier: false);
@@ -32,7 +35,7 @@ internal static class Program
 
         try
         {
-            return await parsed.InvokeAsync(new InvocationConfiguration { EnableDefaultExceptionHandler = false });
+            return await parsed.InvokeAsync(new InvocationConfiguration { EnableDefaultExceptionHandler = false, ProcessTerminationTimeout = s_timeToStop });
         }
         catch (Failure failure)
         {

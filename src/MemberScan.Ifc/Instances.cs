@@ -32,6 +32,21 @@ internal sealed class Instances(Part21File file)
                 yield return record;
     }
 
+    /// <summary>The instances that a list of references names; null when any item names none. For lists whose meaning changes when one is missing.</summary>
+    public List<Part21Record>? FollowEach(Part21Value list)
+    {
+        var items = list.Inner.Items;
+        var records = new List<Part21Record>(items.Count);
+        foreach (var item in items)
+        {
+            if (!TryFollow(item, out var record)) return null;
+
+            records.Add(record);
+        }
+
+        return records;
+    }
+
     /// <summary>Numbers of the instances that a list of references names, whether they exist or not.</summary>
     public static IEnumerable<ulong> IdsOf(Part21Value list)
     {

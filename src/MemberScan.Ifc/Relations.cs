@@ -6,6 +6,7 @@ namespace MemberScan.Ifc;
 internal sealed class Relations
 {
     private readonly Instances _instances;
+    private readonly HashSet<ulong> _voided = [];
     private readonly Dictionary<ulong, ulong> _typeOf = [];
     private readonly Dictionary<ulong, List<ulong>> _materialOf = [];
     private readonly Dictionary<ulong, ulong> _containerOf = [];
@@ -14,6 +15,7 @@ internal sealed class Relations
     private readonly Dictionary<ulong, List<ulong>> _analyticalOf = [];
     private readonly Dictionary<ulong, List<ulong>> _physicalOf = [];
     private readonly Dictionary<ulong, List<ulong>> _activitiesOn = [];
+    private readonly HashSet<ulong> _connected = [];
     private readonly Dictionary<ulong, List<ulong>> _groupsOf = [];
     private readonly Dictionary<ulong, List<(ulong Properties, Part21Value Orientation)>> _profilePropertiesOf = [];
 
@@ -25,13 +27,21 @@ internal sealed class Relations
         Each("IFCRELCONTAINEDINSPATIALSTRUCTURE", r => Spread(r[4], r[5], (related, container) => _containerOf.TryAdd(related, container)));
         Each("IFCRELAGGREGATES", r => Spread(r[5], r[4], AddPart));
         Each("IFCRELNESTS", r => Spread(r[5], r[4], AddPart));
-        Each("IFCRELCONNECTSSTRUCTURALACTIVITY", r => Pair(r[4], r[5], (item, activity) => Add(_activitiesOn, item, activity)));
+        Each("IFCRELCONNECTSSTRUCTURALACTIVITY", r => Pair(r[4], r[5], (item, activity) =>
+        {
+            Add(_activitiesOn, item, activity);
+            _connected.Add(activity);
+        }));
         Each("IFCRELASSIGNSTOGROUP", r => Spread(r[4], r[6], (related, group) => Add(_groupsOf, related, group)));
         Each("IFCRELASSIGNSTOGROUPBYFACTOR", r => Spread(r[4], r[6], (related, group) => Add(_groupsOf, related, group)));
         Each("IFCRELCONNECTSSTRUCTURALELEMENT", r => Pair(r[4], r[5], Link));
         Each("IFCRELASSIGNSTOPRODUCT", r => Spread(r[4], r[6], (related, product) => LinkEitherWay(product, related)));
         Each("IFCRELASSOCIATESPROFILEPROPERTIES", AddProfileProperties);
+        Each("IFCRELVOIDSELEMENT", r => Pair(r[4], r[5], (element, _) => _voided.Add(element)));
     }
+
+    /// <summary>Whether openings are cut out of an element.</summary>
+    public bool HasOpenings(ulong id) => _voided.Contains(id);
 
     /// <summary>The type object of an occurrence; 0 if none.</summary>
     public ulong TypeOf(ulong id) => _typeOf.GetValueOrDefault(id);
@@ -53,6 +63,9 @@ internal sealed class Relations
 
     /// <summary>Actions and reactions on a structural item or element.</summary>
     public IReadOnlyList<ulong> ActivitiesOn(ulong id) => _activitiesOn.GetValueOrDefault(id) ?? [];
+
+    /// <summary>Whether an action or reaction acts on anything.</summary>
+    public bool IsOnSomething(ulong activity) => _connected.Contains(activity);
 
     /// <summary>Groups that an object is assigned to.</summary>
     public IReadOnlyList<ulong> GroupsOf(ulong id) => _groupsOf.GetValueOrDefault(id) ?? [];

@@ -38,6 +38,8 @@ public static class Screener
             diagnostics.Add("SCR-0006", Severity.Warning, "The model carries an earlier result block, but has changed since it was written; the block is replaced all the same.");
 
         var file = Part21File.Read(stripped.Base, request.ModelName, diagnostics);
+        if (file.HighestId > ScreeningOutcome.MaxInstanceId)
+            diagnostics.Add("SCR-0008", Severity.Error, "The model numbers its instances so high that there is no room for ours; no checked model is written. Export it with smaller numbers.");
         cancellation.ThrowIfCancellationRequested();
         var model = IfcModel.Open(file, request.Settings.Reading, diagnostics);
         var named = NamedInTables(request.Tables);
@@ -46,7 +48,7 @@ public static class Screener
         progress?.Report(new("forces", 0));
         var fromModel = model?.ReadForces(catalog.Members) ?? [];
         var (fromTables, files) = ReadTables(request, catalog, diagnostics);
-        if (diagnostics.Items.Any(d => d.Severity == Severity.Error && d.Code.StartsWith("SCR-", StringComparison.Ordinal))) return null;
+        if (diagnostics.Items.Any(d => d is { Severity: Severity.Error, Code: "SCR-0001" or "SCR-0002" or "SCR-0003" or "SCR-0004" or "SCR-0007" })) return null;
 
         cancellation.ThrowIfCancellationRequested();
         var library = new SectionLibrary();
@@ -159,6 +161,7 @@ public static class Screener
         var uses = members
             .Where(m => m.Section is Finding<SectionFinding>.Found)
             .SelectMany(m => ((Finding<SectionFinding>.Found)m.Section).Value.Shapes.Select(shape => (Shape: shape, Poisson: ((Finding<double>.Found)m.Material.Poisson).Value)))
+            .Where(use => NumberRange.Holds(use.Shape))
             .GroupBy(use => use.Shape)
             .OrderBy(group => group.Key.Designation, StringComparer.Ordinal);
         return [.. uses.Select(group => Facts(group.Key, group.Count(), group.First().Poisson, library))];
@@ -166,7 +169,7 @@ public static class Screener
 
     private static SectionFacts Facts(CrossSection shape, int members, double poisson, SectionLibrary library)
     {
-        var p = SectionProperties.Of(shape);
+        var p = library.Properties(shape);
         return new SectionFacts(
             shape.Designation, members, p.Area, p.Iy, p.Iz, p.WelY, p.WelZ, p.J, p.JSource, p.Wt,
             Closure(library.Field(shape, ShearModel.Elementary, poisson)), Closure(library.Field(shape, ShearModel.Elasticity, poisson)));

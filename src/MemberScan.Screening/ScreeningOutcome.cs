@@ -8,6 +8,9 @@ namespace MemberScan.Screening;
 /// <summary>A finished screening: its record, and what is needed to write the checked model.</summary>
 public sealed class ScreeningOutcome
 {
+    /// <summary>Highest instance number above which there is no sure room for ours.</summary>
+    internal const ulong MaxInstanceId = long.MaxValue;
+
     private readonly IfcModel? _model;
     private readonly long _creationDate;
 
@@ -17,8 +20,8 @@ public sealed class ScreeningOutcome
     /// <summary>The record.</summary>
     public ScreeningRecord Record { get; }
 
-    /// <summary>Whether a checked model can be written: the text was read to its end and has a data section.</summary>
-    public bool CanWriteModel => _model is { File: { ReadToEnd: true, InsertionOffset: >= 0 } };
+    /// <summary>Whether a checked model can be written: the text was read to its end, has a data section, and its numbers leave room for ours.</summary>
+    public bool CanWriteModel => _model is { File: { ReadToEnd: true, InsertionOffset: >= 0, HighestId: <= MaxInstanceId } };
 
     /// <summary>Writes the checked model: the base model's bytes with one property set per element of a candidate appended.</summary>
     /// <exception cref="InvalidOperationException"><see cref="CanWriteModel"/> is false.</exception>

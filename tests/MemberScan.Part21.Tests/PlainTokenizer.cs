@@ -37,7 +37,7 @@ internal static partial class PlainTokenizer
                 continue;
             }
 
-            if (inString || text[i] > ' ') kept.Append(text[i]);
+            if (inString || text[i] is > ' ' and not '\u007F') kept.Append(text[i]);
         }
 
         return kept.ToString();

@@ -21,7 +21,21 @@ internal sealed record OutputNames(string CheckedModel, string Report, string Me
     /// <summary>The outputs that would be one of the inputs.</summary>
     public IEnumerable<string> Clashes(IEnumerable<string> inputs)
     {
-        var taken = inputs.Select(Path.GetFullPath).ToHashSet(StringComparer.OrdinalIgnoreCase);
-        return new[] { CheckedModel, Report, MembersTable, RunRecord }.Where(path => taken.Contains(Path.GetFullPath(path)));
+        var taken = inputs.Select(Resolved).ToHashSet(StringComparer.OrdinalIgnoreCase);
+        return new[] { CheckedModel, Report, MembersTable, RunRecord }.Where(path => taken.Contains(Resolved(path)));
+    }
+
+    /// <summary>The path behind all links: a folder given by another name may be the folder of the model.</summary>
+    private static string Resolved(string path)
+    {
+        var full = Path.GetFullPath(path);
+        var resolved = Path.GetPathRoot(full)!;
+        foreach (var part in full[resolved.Length..].Split(Path.DirectorySeparatorChar, StringSplitOptions.RemoveEmptyEntries))
+        {
+            resolved = Path.Combine(resolved, part);
+            if (Path.Exists(resolved)) resolved = new FileInfo(resolved).ResolveLinkTarget(returnFinalTarget: true)?.FullName ?? resolved;
+        }
+
+        return resolved;
     }
 }

@@ -16,7 +16,7 @@ internal sealed class FindingLog : IDisposable
     public FindingLog(bool verbose) => _logger = new LoggerConfiguration()
         .MinimumLevel.Is(verbose ? LogEventLevel.Verbose : LogEventLevel.Warning)
         .WriteTo.Console(
-            outputTemplate: "{Level:w4}: {Message:l}{NewLine}", standardErrorFromLevel: LogEventLevel.Verbose,
+            outputTemplate: "{Level:w}: {Message:l}{NewLine}", standardErrorFromLevel: LogEventLevel.Verbose,
             formatProvider: CultureInfo.InvariantCulture, theme: Serilog.Sinks.SystemConsole.Themes.ConsoleTheme.None)
         .CreateLogger();
 

@@ -21,11 +21,15 @@ internal static class ScreenCommand
         {
             model, forces, settings, kind, output, timestamp, verbose,
         };
-        command.SetAction((parsed, cancellation) => Task.FromResult(ScreenRun.Execute(
-            new ScreenRun.Options(
-                parsed.GetValue(model)!, parsed.GetValue(forces) ?? [], parsed.GetValue(settings), parsed.GetValue(kind), parsed.GetValue(output),
-                parsed.GetValue(timestamp), parsed.GetValue(verbose)),
-            cancellation)));
+
+        // On a thread of its own: the parser listens for an interruption only once the action has given its task back.
+        command.SetAction((parsed, cancellation) => Task.Run(
+            () => ScreenRun.Execute(
+                new ScreenRun.Options(
+                    parsed.GetValue(model)!, parsed.GetValue(forces) ?? [], parsed.GetValue(settings), parsed.GetValue(kind), parsed.GetValue(output),
+                    parsed.GetValue(timestamp), parsed.GetValue(verbose)),
+                cancellation),
+            CancellationToken.None));
         return command;
     }
 }

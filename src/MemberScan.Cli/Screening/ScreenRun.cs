@@ -23,15 +23,22 @@ internal static class ScreenRun
     public static int Execute(Options options, CancellationToken cancellation)
     {
         using var log = new FindingLog(options.Verbose);
+        if (options.Forces.Append(options.Model).Append(options.Settings ?? "-").Append(options.Output ?? "-").Any(string.IsNullOrWhiteSpace))
+            throw new Failure(ExitCodes.Usage, "A path is empty; give the model, and what follows --forces, --settings and --out, a name.");
+
+        // All files are read before any is looked into: a file that cannot be read weighs more than one that is wrong.
+        var (bytes, container) = InputFile.ReadModel(options.Model);
+        var settingsText = options.Settings is { } settingsPath ? InputFile.Read(settingsPath) : null;
+        var tableTexts = options.Forces.Select(path => (Path.GetFileName(path), InputFile.Read(path))).ToList();
+
         var names = OutputNames.For(options.Model, options.Output);
         var inputs = new[] { options.Model }.Concat(options.Forces).Concat(options.Settings is { } path ? [path] : []);
         if (names.Clashes(inputs).FirstOrDefault() is { } clash)
             throw new Failure(ExitCodes.Usage, $"The output '{clash}' would be an input of this run; give another folder with --out DIR.");
 
         var diagnostics = new DiagnosticList();
-        var settings = ReadSettings(options, diagnostics, log);
-        var tables = ReadTables(options, diagnostics, log);
-        var (bytes, container) = InputFile.ReadModel(options.Model);
+        var settings = ReadSettings(options, settingsText, diagnostics, log);
+        var tables = ReadTables(tableTexts, diagnostics, log);
         var (timestamp, isGiven) = Time(options);
 
         var request = new ScreeningRequest
@@ -56,12 +63,12 @@ internal static class ScreenRun
         return ExitCodes.Of(outcome.Record);
     }
 
-    private static Settings ReadSettings(Options options, DiagnosticList diagnostics, FindingLog log)
+    private static Settings ReadSettings(Options options, byte[]? text, DiagnosticList diagnostics, FindingLog log)
     {
         var settings = Settings.Default;
-        if (options.Settings is { } path)
+        if (text is not null)
         {
-            settings = SettingsFile.Read(InputFile.Read(path), Path.GetFileName(path), diagnostics)!;
+            settings = SettingsFile.Read(text, Path.GetFileName(options.Settings!), diagnostics)!;
             if (settings is null)
             {
                 log.Write(diagnostics);
@@ -75,13 +82,13 @@ internal static class ScreenRun
         return settings with { Reading = settings.Reading with { Forces = forces } };
     }
 
-    private static ImmutableArray<ForcesTable> ReadTables(Options options, DiagnosticList diagnostics, FindingLog log)
+    private static ImmutableArray<ForcesTable> ReadTables(List<(string Name, byte[] Text)> texts, DiagnosticList diagnostics, FindingLog log)
     {
         var tables = ImmutableArray.CreateBuilder<ForcesTable>();
         var failed = false;
-        foreach (var path in options.Forces)
+        foreach (var (name, text) in texts)
         {
-            if (ForcesTable.Read(InputFile.Read(path), Path.GetFileName(path), diagnostics) is { } table) tables.Add(table);
+            if (ForcesTable.Read(text, name, diagnostics) is { } table) tables.Add(table);
             else failed = true;
         }
 

@@ -25,6 +25,7 @@ internal static class Summary
             Line($"not checked, {group.Key.Text()}: {group.Count()}. {group.Key.Request()}");
         if (record.HasDamage) Line($"The model is damaged: what was passed over stands in the report's findings.");
         if (!record.Model.ReadToEnd) Line($"The model could not be read to its end; no checked model is written.");
+        else if (!modelWritten) Line($"No checked model is written; the findings say why.");
         foreach (var caution in record.Cautions) Line($"{caution}");
 
         if (modelWritten) Line($"wrote {names.CheckedModel}");

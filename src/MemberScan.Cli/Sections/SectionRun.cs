@@ -2,7 +2,9 @@ using System.Globalization;
 using System.Text.Json;
 using MemberScan.Inputs.Values;
 using MemberScan.Mechanics.Forces;
+using MemberScan.Mechanics.Sections;
 using MemberScan.Mechanics.Stress;
+using MemberScan.Screening;
 
 namespace MemberScan.Cli.Sections;
 
@@ -20,6 +22,9 @@ internal static class SectionRun
         if (!SectionText.TryParse(options.Section, out var section, out var error)) throw Usage(error);
         var forces = default(SectionForces);
         if (options.Forces.Length > 0 && !ForcesText.TryParse(options.Forces, out forces, out error)) throw Usage(error);
+        if (!NumberRange.Holds(section) || !NumberRange.Holds(section, SectionProperties.Of(section), forces))
+            throw Usage($"The numbers of '{options.Section}' under '{options.Forces}' are beyond any structure; check their units.");
+
         double? yield = null;
         if (options.Yield is { } text)
         {

@@ -10,9 +10,8 @@ public sealed record Unit(string Symbol, Quantity Quantity, double Factor)
 {
     private static readonly (string Spelling, string Symbol)[] s_spellings =
     [
-        ("inch", "in"), ("\"", "in"), ("'", "ft"), ("lb", "lbf"), ("kips", "kip"), ("k", "kip"),
-        ("kipft", "kip·ft"), ("kipsft", "kip·ft"), ("kipsin", "kip·in"), ("lbfft", "lbf·ft"),
-        ("kipf", "kip"), ("lbin", "lbf·in"), ("lbft", "lbf·ft"), ("inlbf", "lbf·in"), ("ftlbf", "lbf·ft"),
+        ("inch", "in"), ("\"", "in"), ("'", "ft"), ("lb", "lbf"), ("kips", "kip"), ("k", "kip"), ("kipf", "kip"),
+        ("kips·ft", "kip·ft"), ("kips·in", "kip·in"), ("lb·in", "lbf·in"), ("lb·ft", "lbf·ft"), ("in·lbf", "lbf·in"), ("ft·lbf", "lbf·ft"),
     ];
 
     private static readonly FrozenDictionary<string, Unit> s_known = Known().ToFrozenDictionary(StringComparer.Ordinal);
@@ -26,20 +25,25 @@ public sealed record Unit(string Symbol, Quantity Quantity, double Factor)
     public static bool TryParse(string text, [System.Diagnostics.CodeAnalysis.NotNullWhen(true)] out Unit? unit)
     {
         ArgumentNullException.ThrowIfNull(text);
-        return s_known.TryGetValue(Squeeze(text), out unit);
+        return s_known.TryGetValue(Dotted(text), out unit);
     }
 
-    private static string Squeeze(string text) => text.Trim()
-        .Replace("·", "", StringComparison.Ordinal).Replace("⋅", "", StringComparison.Ordinal)
-        .Replace("*", "", StringComparison.Ordinal).Replace("-", "", StringComparison.Ordinal)
-        .Replace(" ", "", StringComparison.Ordinal).Replace("²", "2", StringComparison.Ordinal);
+    /// <summary>One spelling for every mark between the parts of a moment; no mark is dropped, so "kN·m·m" is not "kN·mm".</summary>
+    private static string Dotted(string text) => text.Trim()
+        .Replace('⋅', '·').Replace('*', '·').Replace('-', '·').Replace(' ', '·').Replace('²', '2');
 
     private static Dictionary<string, Unit> Known()
     {
         var known = new Dictionary<string, Unit>(StringComparer.Ordinal);
-        foreach (var unit in Basic()) known[Squeeze(unit.Symbol)] = unit;
-        foreach (var (spelling, symbol) in s_spellings) known[spelling] = known[Squeeze(symbol)];
+        foreach (var unit in Basic()) Add(unit.Symbol, unit);
+        foreach (var (spelling, symbol) in s_spellings) Add(spelling, known[symbol]);
         return known;
+
+        void Add(string spelling, Unit unit)
+        {
+            known[spelling] = unit;
+            known[spelling.Replace("·", "", StringComparison.Ordinal)] = unit;
+        }
     }
 
     private static Unit[] Basic() =>

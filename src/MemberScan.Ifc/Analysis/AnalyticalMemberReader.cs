@@ -31,7 +31,19 @@ internal sealed class AnalyticalMemberReader(
         var toProject = placed is Finding<Transform3>.Found found ? found.Value : Transform3.Identity;
         var line = Line(member, toProject);
         var axes = placed.TryGet(out _, out var notPlaced) ? Axes(member, line, toProject) : new Finding<MemberAxes>.Missing(notPlaced);
-        return new AnalyticalMember(member.Id, Instances.Text(member[2]), Instances.Text(member[0]), axes, line, toProject);
+        return new AnalyticalMember(member.Id, Instances.Text(member[2]), Instances.Text(member[0]), axes, line, toProject, schema == SchemaVersion.Ifc2x3 ? Transform3.Identity : toProject)
+        {
+            EccentricCardinalPoint = CardinalPoint(member.Id) is { } point and not (5 or 10 or 15) ? point : null,
+        };
+    }
+
+    // 5 mid-depth centre, 10 geometric centroid and 15 shear centre are one point in the sections that are read.
+    private long? CardinalPoint(ulong member)
+    {
+        foreach (var id in relations.MaterialsOf(member))
+            if (instances.File.TryFind(id, out var usage) && usage.Keyword.StartsWith("IFCMATERIALPROFILESETUSAGE", StringComparison.Ordinal) && usage[1].TryInteger(out var point))
+                return point;
+        return null;
     }
 
     private Finding<(Vector3 Start, Vector3 End)> Line(Part21Record member, Transform3 toProject)
@@ -101,10 +113,9 @@ internal sealed class AnalyticalMemberReader(
     /// <summary>IFC2X3: z from the orientation of the profile properties; without one global Z, for a vertical member global X.</summary>
     private Finding<MemberAxes> Axes2x3(Part21Record member, Vector3 start, Vector3 along, Transform3 toProject)
     {
-        var up = toProject.Direction(Vector3.UnitZ);
-        var axes = along.TryNormalize(out var x) && x.Cross(up).Length < 1e-3
-            ? MemberAxes.From(start, along, toProject.Direction(Vector3.UnitX))
-            : MemberAxes.From(start, along, up);
+        var axes = along.TryNormalize(out var x) && x.Cross(Vector3.UnitZ).Length < 1e-3
+            ? MemberAxes.From(start, along, Vector3.UnitX)
+            : MemberAxes.From(start, along, Vector3.UnitZ);
         var orientation = relations.ProfilePropertiesOf(member.Id).Select(p => p.Orientation).FirstOrDefault(o => !o.IsEmpty);
         if (placements.Direction(orientation) is { } direction)
             axes = MemberAxes.From(start, along, toProject.Direction(direction));

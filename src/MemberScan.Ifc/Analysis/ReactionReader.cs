@@ -5,6 +5,8 @@ using MemberScan.Foundation.Geometry;
 using MemberScan.Ifc.Geometry;
 using MemberScan.Ifc.Units;
 using MemberScan.Mechanics.Forces;
+using MemberScan.Model;
+using MemberScan.Model.Members;
 using MemberScan.Model.Rules;
 using MemberScan.Model.Verdicts;
 using MemberScan.Part21;
@@ -24,13 +26,19 @@ internal sealed class ReactionReader(Instances instances, PlacementReader placem
     public sealed record Samples(ImmutableArray<ForceStation> Stations, string Conversion, Reason? Unusable);
 
     /// <summary>Reads the samples of a reaction on an analytical member.</summary>
-    public Samples Read(Part21Record reaction, AnalyticalMember member)
+    /// <param name="reaction">The reaction.</param>
+    /// <param name="member">The analytical member.</param>
+    /// <param name="element">The candidate's element: a turn in the settings may name it instead of the analytical member.</param>
+    /// <param name="key">The candidate's key.</param>
+    public Samples Read(Part21Record reaction, AnalyticalMember member, ElementIdentity element, string key)
     {
+        var turn = Turn(member, element, key);
         if (!member.Length.TryGet(out var length, out var why)) return Unusable(why);
         if (!instances.TryFollow(reaction[7], out var load)) return Unusable(ReasonCode.DamagedRecord, $"the reaction #{reaction.Id} has no values");
 
-        var loads = load.Keyword == "IFCSTRUCTURALLOADCONFIGURATION" ? instances.FollowAll(load[1]).Take(MaxSamples + 1).ToList() : [load];
-        if (loads.Count > MaxSamples) return Unusable(ReasonCode.ForcesIncomplete, $"the reaction #{reaction.Id} has more than {MaxSamples} samples");
+        if (load[1].ItemCount > MaxSamples) return Unusable(ReasonCode.ForcesIncomplete, $"the reaction #{reaction.Id} has more than {MaxSamples} samples");
+        if ((load.Keyword == "IFCSTRUCTURALLOADCONFIGURATION" ? instances.FollowEach(load[1]) : [load]) is not { } loads)
+            return Unusable(ReasonCode.DamagedRecord, $"the reaction #{reaction.Id} has lost a sample");
         if (loads.Exists(l => l.Keyword is not ("IFCSTRUCTURALLOADSINGLEFORCE" or "IFCSTRUCTURALLOADSINGLEFORCEWARPING")))
             return Unusable(ReasonCode.ForcesIncomplete, $"the reaction #{reaction.Id} holds something other than section forces");
 
@@ -41,14 +49,17 @@ internal sealed class ReactionReader(Instances instances, PlacementReader placem
         {
             var values = Values(loads[Math.Min(i, loads.Count - 1)], out var whyNoValues);
             if (values is not { } stored) return Unusable(whyNoValues!);
-            if (!InMemberAxes(reaction, member, stored, out var own, out var whyNoAxes)) return Unusable(whyNoAxes!);
+            if (!InMemberAxes(reaction, member, turn, stored, out var own, out var whyNoAxes)) return Unusable(whyNoAxes!);
 
             stations.Add(new ForceStation(places[i], own));
         }
 
+        var words = Words(reaction, turn);
+        if (loads.Exists(l => l.Keyword == "IFCSTRUCTURALLOADSINGLEFORCEWARPING" && Instances.Real(l[7]) is not (null or 0)))
+            words += "; the warping moment is left out";
         return rules.Convention == ForceConvention.EndForces
-            ? FromEndForces(reaction, member, stations, length.Value)
-            : new Samples(stations.ToImmutable(), Words(reaction, member), null);
+            ? FromEndForces(reaction, loads.Count, stations, length.Value, words)
+            : new Samples(stations.ToImmutable(), words, null);
     }
 
     private double[]? Places(Part21Record reaction, Part21Record load, int count, double length, AnalyticalMember member, out Reason? why)
@@ -107,11 +118,13 @@ internal sealed class ReactionReader(Instances instances, PlacementReader placem
     {
         if (!instances.TryFollow(reaction[6], out var shape) || !member.Line.TryGet(out var line, out _)) return null;
 
+        var toProject = !reaction[5].IsEmpty && placements.Placement(reaction[5]) is Finding<Transform3>.Found own ? own.Value : member.ToProject;
+
         foreach (var representation in instances.FollowAll(shape[2]))
             foreach (var item in instances.FollowAll(representation[3]))
                 if (item.Keyword == "IFCVERTEXPOINT" && instances.TryFollow(item[0], out var record) && placements.Point(record) is { } point
                     && (line.Value.End - line.Value.Start).TryNormalize(out var x))
-                    return (member.ToProject.Point(point) - line.Value.Start).Dot(x);
+                    return (toProject.Point(point) - line.Value.Start).Dot(x);
         return null;
     }
 
@@ -153,20 +166,20 @@ internal sealed class ReactionReader(Instances instances, PlacementReader placem
         return null;
     }
 
-    private bool InMemberAxes(Part21Record reaction, AnalyticalMember member, SectionForces stored, out SectionForces own, out Reason? why)
+    private bool InMemberAxes(Part21Record reaction, AnalyticalMember member, double turn, SectionForces stored, out SectionForces own, out Reason? why)
     {
         own = stored;
         why = null;
         if (!IsGlobal(reaction))
         {
-            own = Turn(member) is var turn and not 0 ? stored.Turned(-turn * Math.PI / 180) : stored;
+            own = turn != 0 ? stored.Turned(-turn * Math.PI / 180) : stored;
             return true;
         }
 
         if (!member.Axes.TryGet(out var axes, out why)) return false;
 
-        var force = axes.Value.Components(member.ToProject.Direction(new Vector3(stored.N, stored.Vy, stored.Vz)));
-        var moment = axes.Value.Components(member.ToProject.Direction(new Vector3(stored.T, stored.My, stored.Mz)));
+        var force = axes.Value.Components(member.GlobalAxes.Direction(new Vector3(stored.N, stored.Vy, stored.Vz)));
+        var moment = axes.Value.Components(member.GlobalAxes.Direction(new Vector3(stored.T, stored.My, stored.Mz)));
         own = new SectionForces(force.X, force.Y, force.Z, moment.X, moment.Y, moment.Z);
         return true;
     }
@@ -178,14 +191,21 @@ internal sealed class ReactionReader(Instances instances, PlacementReader placem
         _ => Instances.Literal(reaction[8]) != "LOCAL_COORDS",
     };
 
-    private double Turn(AnalyticalMember member) =>
-        rules.TurnDegreesByMember.TryGetValue(member.GlobalId, out var byId) ? byId
-        : rules.TurnDegreesByMember.TryGetValue(member.Name, out var byName) ? byName
-        : rules.TurnDegrees;
+    /// <summary>The turn for a member, by the ids and names of its analytical side first, then by those of the candidate.</summary>
+    private double Turn(AnalyticalMember member, ElementIdentity element, string key)
+    {
+        foreach (var name in new[] { member.GlobalId, member.Name, key, element.GlobalId, element.Name })
+            if (rules.TurnDegreesByMember.TryGetValue(name, out var degrees))
+                return degrees;
+        return rules.TurnDegrees;
+    }
 
     /// <summary>Forces on the two ends of the member: at its start they are the opposite of those on the +x face.</summary>
-    private Samples FromEndForces(Part21Record reaction, AnalyticalMember member, ImmutableArray<ForceStation>.Builder stations, double length)
+    private static Samples FromEndForces(Part21Record reaction, int samples, ImmutableArray<ForceStation>.Builder stations, double length, string words)
     {
+        if (samples < stations.Count)
+            return Unusable(ReasonCode.ConventionUnknown, $"the reaction #{reaction.Id} has one sample for the whole member, which end forces cannot have");
+
         for (var i = 0; i < stations.Count; i++)
         {
             var station = stations[i];
@@ -196,15 +216,15 @@ internal sealed class ReactionReader(Instances instances, PlacementReader placem
             if (isStart) stations[i] = station with { Forces = -1 * station.Forces };
         }
 
-        return new Samples(stations.ToImmutable(), Words(reaction, member) + "; end forces: values at the start reversed", null);
+        return new Samples(stations.ToImmutable(), words + "; end forces: values at the start reversed", null);
     }
 
-    private string Words(Part21Record reaction, AnalyticalMember member)
+    private string Words(Part21Record reaction, double degrees)
     {
         var flag = Instances.Literal(reaction[8]);
         var axes = IsGlobal(reaction) ? "global axes" : "the analytical member's axes";
         var overruled = rules.Components == ForceComponents.AsFlagged ? "" : $" by the settings (flag {flag})";
-        var turn = !IsGlobal(reaction) && Turn(member) is var degrees and not 0 ? string.Create(CultureInfo.InvariantCulture, $", which are turned by {degrees:R}° about x from its own") : "";
+        var turn = !IsGlobal(reaction) && degrees != 0 ? string.Create(CultureInfo.InvariantCulture, $", which are turned by {degrees:R}° about x from its own") : "";
         return $"components in {axes}{overruled}{turn}";
     }
 

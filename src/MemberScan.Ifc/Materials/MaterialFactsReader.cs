@@ -89,6 +89,7 @@ internal sealed class MaterialFactsReader
         if (Instances.Real(property[2]) is not { } value) return new PropertyValue(null, source, "is no number");
         if (unitType.Length == 0) return new PropertyValue(value, source, "");
         if (_instances.TryFollow(property[3], out var own)) return InUnit(value, _unitReader.Factor(own), unitType, source);
+        if (!property[3].IsEmpty) return new PropertyValue(null, source, "has a unit of its own that the file does not hold");
 
         // Without a unit of its own the value is in the project's unit of the measure that it is written as.
         var measured = property[2].TypeName switch

@@ -27,14 +27,17 @@ internal sealed class MaterialReader(
 
     private static readonly char[] s_partMarks = ['/', ',', ';', ':', '|'];
 
+    // Patterns are matched in linear time; this only bounds what a settings file could ask for.
+    private static readonly TimeSpan s_patience = TimeSpan.FromSeconds(10);
+
     private readonly Dictionary<string, Grade?> _gradeOf = new(StringComparer.Ordinal);
 
     /// <summary>Profiles that the association of an object (or its type) names; empty if none.</summary>
     public ImmutableArray<Finding<ProfileShape>> ProfilesOf(ulong id)
     {
-        foreach (var definition in Associated(id))
+        foreach (var level in Levels(id))
         {
-            var found = Profiles(definition, []).ToImmutableArray();
+            var found = level.SelectMany(d => Profiles(d, [])).Distinct().ToImmutableArray();
             if (!found.IsEmpty) return found;
         }
 
@@ -42,18 +45,18 @@ internal sealed class MaterialReader(
     }
 
     /// <summary>Whether the association names a profile set that tapers to another.</summary>
-    public bool IsTapering(ulong id) => Associated(id).Any(d => d.Keyword == "IFCMATERIALPROFILESETUSAGETAPERING");
+    public bool IsTapering(ulong id) => Levels(id).Any(level => level.Any(d => d.Keyword == "IFCMATERIALPROFILESETUSAGETAPERING"));
 
     /// <summary>The material of an object and its values.</summary>
     /// <param name="id">STEP id of the object.</param>
     /// <param name="section">Its section, for the thickness ranges of grades; null if none.</param>
     public Material Read(ulong id, SectionFinding? section)
     {
-        var materials = Associated(id).Select(d => Materials(d, []).ToList()).FirstOrDefault(list => list.Count > 0) ?? [];
-        var read = materials.Select(facts.Read).ToList();
-        var names = read.Select(m => m.Name).Distinct(StringComparer.Ordinal).ToList();
-        if (names.Count == 0) return Unknown("", "no material is associated with the member or its type");
-        if (names.Count > 1) return Unknown(string.Join(" + ", names), $"several materials are associated: {string.Join(", ", names)}");
+        var materials = Levels(id).Select(level => level.SelectMany(d => Materials(d, [])).ToList()).FirstOrDefault(list => list.Count > 0) ?? [];
+        var read = materials.Select(facts.Read).DistinctBy(m => (m.Name, m.Category, m.Yield?.Value, m.Modulus?.Value, m.IsConcreteByProperties)).ToList();
+        var names = read.Select(m => m.Name);
+        if (read.Count == 0) return Unknown("", "no material is associated with the member or its type");
+        if (read.Count > 1) return Unknown(string.Join(" + ", names.Distinct(StringComparer.Ordinal)), $"several materials are associated: {string.Join(", ", names)}");
 
         return With(read[0], section);
     }
@@ -156,19 +159,21 @@ internal sealed class MaterialReader(
     }
 
     private Grade? Matching(string name) => rules.Grades.FirstOrDefault(grade =>
-        Regex.IsMatch(name, $@"\A(?:{grade.Pattern})\z", RegexOptions.IgnoreCase | RegexOptions.CultureInvariant | RegexOptions.NonBacktracking, TimeSpan.FromMilliseconds(100)));
+        Regex.IsMatch(name, $@"\A(?:{grade.Pattern})\z", RegexOptions.IgnoreCase | RegexOptions.CultureInvariant | RegexOptions.NonBacktracking, s_patience));
 
-    /// <summary>Material definitions of the occurrence, then of its type.</summary>
+    /// <summary>Material definitions of the occurrence, then those of its type.</summary>
+    private IEnumerable<IEnumerable<Part21Record>> Levels(ulong id)
+    {
+        yield return Associated(id);
+
+        if (relations.TypeOf(id) is var type and not 0) yield return Associated(type);
+    }
+
     private IEnumerable<Part21Record> Associated(ulong id)
     {
         foreach (var material in relations.MaterialsOf(id))
             if (instances.File.TryFind(material, out var record))
                 yield return record;
-
-        if (relations.TypeOf(id) is var type and not 0)
-            foreach (var material in relations.MaterialsOf(type))
-                if (instances.File.TryFind(material, out var record))
-                    yield return record;
     }
 
     private IEnumerable<Finding<ProfileShape>> Profiles(Part21Record definition, HashSet<ulong> visited)

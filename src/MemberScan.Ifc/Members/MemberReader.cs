@@ -42,7 +42,9 @@ internal sealed class MemberReader(
             var isAlways = always.Contains(record.Keyword) || isPartOfRailing;
             if (!isAlways && !conditional.Contains(record.Keyword)) continue;
 
-            if (record.Keyword is "IFCSTRUCTURALCURVEMEMBER" or "IFCSTRUCTURALCURVEMEMBERVARYING")
+            if (record.IsDuplicate)
+                PassOver(ClassNames.Spell(record.Keyword), "its instance number stands further up already; the first counts");
+            else if (record.Keyword is "IFCSTRUCTURALCURVEMEMBER" or "IFCSTRUCTURALCURVEMEMBERVARYING")
                 AddAnalytical(record, members, always);
             else
                 AddPhysical(record, isAlways, isNamed, members);
@@ -56,7 +58,7 @@ internal sealed class MemberReader(
     private void AddPhysical(Part21Record record, bool isAlways, Func<ElementIdentity, bool> isNamed, ImmutableArray<Member>.Builder members)
     {
         var element = Identity(record);
-        if (record.Keyword == "IFCRAILING" && record[6].IsEmpty && relations.PartsOf(record.Id).Count > 0)
+        if (IsItsParts(record))
         {
             PassOver(element.Class, "its parts are the candidates");
             return;
@@ -65,7 +67,10 @@ internal sealed class MemberReader(
         var placed = placements.Placement(record[5]);
         var toProject = placed is Finding<Transform3>.Found found ? found.Value : Transform3.Identity;
         var read = record.IsDamaged ? [] : bodies.Read(record[6], toProject);
-        var bars = read.OfType<Finding<BarBody>.Found>().ToList();
+        var sweeps = read.OfType<Finding<BarBody>.Found>().ToList();
+
+        // Beside a bar, short pieces such as base plates are no items.
+        var bars = sweeps.FindAll(s => s.Value.IsBarLike) is { Count: > 0 } longer ? longer : sweeps;
         var isCandidate = isAlways || bars.Exists(b => b.Value.IsBarLike) || read.Any(IsUnreadSweep)
             || relations.AnalyticalOf(record.Id).Count > 0 || relations.ActivitiesOn(record.Id).Count > 0 || isNamed(element);
         if (!isCandidate)
@@ -104,9 +109,13 @@ internal sealed class MemberReader(
         var body = bar.Value;
         var section = body.Profile.Section;
         var notes = body.Notes;
-        var others = read.OfType<Finding<BarBody>.Missing>().ToList();
-        if (others.Count > 0)
-            notes = notes.Add(string.Create(CultureInfo.InvariantCulture, $"the element has {others.Count} further bodies that are no bars and are not checked ({others[0].Why.Message})"));
+        if (read.Length > count)
+        {
+            var whyOther = read.OfType<Finding<BarBody>.Missing>().FirstOrDefault()?.Why.Message ?? "short against their section";
+            notes = notes.Add(string.Create(CultureInfo.InvariantCulture, $"the element has {read.Length - count} further bodies that are no bars and are not checked ({whyOther})"));
+        }
+
+        if (relations.HasOpenings(record.Id)) notes = notes.Add("openings are cut out of the element; the gross section is used");
 
         return new Member
         {
@@ -202,6 +211,7 @@ internal sealed class MemberReader(
         if (sets.Length == 1)
         {
             if (!sets[0].TryGet(out var set, out var whyNoSet)) return new Finding<SectionFinding>.Missing(whyNoSet);
+            if (IsMoved(set.Value)) return Moved(set);
 
             if (!read.IsEmpty) notes = notes.Add($"the body gives no section ({((Finding<BarBody>.Missing)read[0]).Why.Message}); the material profile set does");
             notes = notes.AddRange(set.Value.Section.Notes);
@@ -215,10 +225,20 @@ internal sealed class MemberReader(
         static string element(Part21Record record) => $"{ClassNames.Spell(record.Keyword)} #{record.Id}";
     }
 
+    /// <summary>Whether a profile is turned or shifted by its own position, which only a body can show in space.</summary>
+    private static bool IsMoved(ProfileShape profile)
+    {
+        var isTurned = (profile.Position.X - Vector3.UnitX).Length > 1e-6 && profile.Section.Shape is not (Round or Tube);
+        return isTurned || profile.Position.Origin.Length > 1e-6 * profile.LargestExtent;
+    }
+
+    private static Finding<SectionFinding> Moved(Finding<ProfileShape>.Found profile) =>
+        NoSection(ReasonCode.SectionNotCovered, $"{profile.Source} is turned or shifted by its position, and no body shows how it lies in the member");
+
     private void AddAnalytical(Part21Record record, ImmutableArray<Member>.Builder members, HashSet<string> always)
     {
         var isRepresented = relations.PhysicalOf(record.Id).Any(id =>
-            instances.File.TryFind(id, out var physical) && (always.Contains(physical.Keyword) || IsConditional(physical.Keyword)));
+            instances.File.TryFind(id, out var physical) && (always.Contains(physical.Keyword) || IsConditional(physical.Keyword)) && !IsItsParts(physical));
         if (isRepresented)
         {
             PassOver(ClassNames.Spell(record.Keyword), "its physical element is the candidate");
@@ -253,6 +273,9 @@ internal sealed class MemberReader(
         });
     }
 
+    /// <summary>Whether an element is a railing without a body of its own, whose parts are the candidates.</summary>
+    private bool IsItsParts(Part21Record record) => record.Keyword == "IFCRAILING" && record[6].IsEmpty && relations.PartsOf(record.Id).Count > 0;
+
     private bool IsConditional(string keyword) => rules.WithBarBodyOrForces.SelectMany(ClassNames.KeywordsOf).Contains(keyword, StringComparer.Ordinal);
 
     private Finding<SectionFinding> AnalyticalSection(Part21Record record, ref ImmutableArray<string> notes)
@@ -261,6 +284,7 @@ internal sealed class MemberReader(
         {
             if (!instances.File.TryFind(properties, out var p) || !instances.TryFollow(p[1], out var profile)) continue;
             if (!profiles.Read(profile).TryGet(out var found, out var why)) return new Finding<SectionFinding>.Missing(why);
+            if (IsMoved(found.Value)) return Moved(found);
 
             notes = notes.AddRange(found.Value.Section.Notes);
             return new Finding<SectionFinding>.Found(found.Value.Section, $"profile properties #{properties}, {found.Source}");

@@ -166,12 +166,8 @@ internal sealed class BodyReader(
         if (UniformScale(item.Map) is not { } scale) return Missing(ReasonCode.PlacementNotSupported, $"{Called(solid)} is mapped with unequal scales");
 
         var hollow = inner != 0;
-        var fault = hollow ? Tube.Fault(radius, radius - inner) : Round.Fault(radius);
-        if (fault is not null || inner < 0)
-        {
-            var code = fault?.Kind == SectionFaultKind.WallOverRadius ? ReasonCode.WallOverRadius : ReasonCode.SectionInvalid;
-            return Missing(code, $"{Called(solid)}: {fault?.Message ?? "the inner radius is negative"}");
-        }
+        if (inner < 0) return Missing(ReasonCode.SectionInvalid, $"{Called(solid)}: the inner radius is negative");
+        if ((hollow ? Tube.Fault(radius, radius - inner) : Round.Fault(radius)) is { } fault) return Missing(ReasonCode.SectionInvalid, $"{Called(solid)}: {fault.Message}");
 
         var fillet = solid.Keyword == "IFCSWEPTDISKSOLIDPOLYGONAL" && Instances.Real(solid[5]) is { } f ? metre * f : 0;
         if (!directrices.Read(solid[0], solid[3], solid[4], fillet).TryGet(out var line, out var why)) return Missing(why);

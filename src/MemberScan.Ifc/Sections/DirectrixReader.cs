@@ -35,7 +35,7 @@ internal sealed class DirectrixReader(Instances instances, PlacementReader place
         if (Pieces(record, depth: 0) is not { Count: > 0 } pieces)
             return Missing(ReasonCode.LengthAmbiguous, string.Create(CultureInfo.InvariantCulture, $"the centre line {record.Keyword} #{record.Id} is not read or is damaged"));
         if (Trimmed(pieces, Instances.Real(startParam), Instances.Real(endParam)) is not { } kept)
-            return Missing(ReasonCode.LengthAmbiguous, string.Create(CultureInfo.InvariantCulture, $"the centre line {record.Keyword} #{record.Id} is trimmed beyond its own parameters; its length is ambiguous"));
+            return Missing(ReasonCode.LengthAmbiguous, string.Create(CultureInfo.InvariantCulture, $"the centre line {record.Keyword} #{record.Id} is trimmed beyond its parameters, or from 0 to 1 although it has more; its length is ambiguous"));
 
         return new Finding<Directrix>.Found(Joined(kept, filletRadius), string.Create(CultureInfo.InvariantCulture, $"{record.Keyword} #{record.Id}"));
     }
@@ -74,7 +74,7 @@ internal sealed class DirectrixReader(Instances instances, PlacementReader place
 
         return curve.Keyword switch
         {
-            "IFCPOLYLINE" => Straight([.. instances.FollowAll(curve[0]).Select(placements.Point)]),
+            "IFCPOLYLINE" => instances.FollowEach(curve[0]) is { } points ? Straight([.. points.Select(placements.Point)]) : null,
             "IFCINDEXEDPOLYCURVE" => Indexed(curve),
             "IFCCOMPOSITECURVE" => Composite(curve, depth),
             "IFCTRIMMEDCURVE" => TrimmedCurve(curve),
@@ -162,8 +162,10 @@ internal sealed class DirectrixReader(Instances instances, PlacementReader place
 
     private List<Piece>? Composite(Part21Record curve, int depth)
     {
+        if (instances.FollowEach(curve[0]) is not { } segments) return null;
+
         var pieces = new List<Piece>();
-        foreach (var segment in instances.FollowAll(curve[0]))
+        foreach (var segment in segments)
         {
             if (segment.Keyword != "IFCCOMPOSITECURVESEGMENT" || !instances.TryFollow(segment[2], out var parent)) return null;
             if (Pieces(parent, depth + 1) is not { } inner || pieces.Count + inner.Count > MaxPieces) return null;
@@ -289,6 +291,9 @@ internal sealed class DirectrixReader(Instances instances, PlacementReader place
         var to = endParam ?? total;
         var slack = 1e-6 * Math.Max(1, total);
         if (from < -slack || to > total + slack || to - from <= slack) return null;
+
+        // 0 to 1 on a longer curve is its first piece by the standard and the whole of it by some exporters: not to be guessed.
+        if (startParam == 0 && endParam == 1 && total > 1 + slack) return null;
 
         var kept = new List<Piece>();
         var at = 0.0;

@@ -10,16 +10,42 @@ internal sealed class UnitReader(Instances instances, DiagnosticList diagnostics
 {
     private static readonly FrozenDictionary<string, double> s_prefixes = new Dictionary<string, double>(StringComparer.Ordinal)
     {
-        ["EXA"] = 1e18, ["PETA"] = 1e15, ["TERA"] = 1e12, ["GIGA"] = 1e9, ["MEGA"] = 1e6, ["KILO"] = 1e3, ["HECTO"] = 1e2, ["DECA"] = 1e1,
-        ["DECI"] = 1e-1, ["CENTI"] = 1e-2, ["MILLI"] = 1e-3, ["MICRO"] = 1e-6, ["NANO"] = 1e-9, ["PICO"] = 1e-12, ["FEMTO"] = 1e-15, ["ATTO"] = 1e-18,
+        ["EXA"] = 1e18,
+        ["PETA"] = 1e15,
+        ["TERA"] = 1e12,
+        ["GIGA"] = 1e9,
+        ["MEGA"] = 1e6,
+        ["KILO"] = 1e3,
+        ["HECTO"] = 1e2,
+        ["DECA"] = 1e1,
+        ["DECI"] = 1e-1,
+        ["CENTI"] = 1e-2,
+        ["MILLI"] = 1e-3,
+        ["MICRO"] = 1e-6,
+        ["NANO"] = 1e-9,
+        ["PICO"] = 1e-12,
+        ["FEMTO"] = 1e-15,
+        ["ATTO"] = 1e-18,
     }.ToFrozenDictionary(StringComparer.Ordinal);
 
     // What a name promises; the factor in the file counts, a difference is only told.
     private static readonly FrozenDictionary<string, double> s_promised = new Dictionary<string, double>(StringComparer.OrdinalIgnoreCase)
     {
-        ["inch"] = 0.0254, ["foot"] = 0.3048, ["yard"] = 0.9144, ["mile"] = 1609.344, ["square inch"] = 0.00064516, ["square foot"] = 0.09290304,
-        ["cubic inch"] = 0.000016387064, ["cubic foot"] = 0.028316846592, ["degree"] = Math.PI / 180, ["pound"] = 0.45359237,
-        ["lbf"] = 4.4482216152605, ["pound-force"] = 4.4482216152605, ["kip"] = 4448.2216152605, ["psi"] = 6894.757293168361, ["ksi"] = 6894757.293168361,
+        ["inch"] = 0.0254,
+        ["foot"] = 0.3048,
+        ["yard"] = 0.9144,
+        ["mile"] = 1609.344,
+        ["square inch"] = 0.00064516,
+        ["square foot"] = 0.09290304,
+        ["cubic inch"] = 0.000016387064,
+        ["cubic foot"] = 0.028316846592,
+        ["degree"] = Math.PI / 180,
+        ["pound"] = 0.45359237,
+        ["lbf"] = 4.4482216152605,
+        ["pound-force"] = 4.4482216152605,
+        ["kip"] = 4448.2216152605,
+        ["psi"] = 6894.757293168361,
+        ["ksi"] = 6894757.293168361,
         ["pound-force per square inch"] = 6894.757293168361,
     }.ToFrozenDictionary(StringComparer.OrdinalIgnoreCase);
 
@@ -73,18 +99,18 @@ internal sealed class UnitReader(Instances instances, DiagnosticList diagnostics
 
     private double? DerivedFactor(Part21Record unit, int depth)
     {
+        if (instances.FollowEach(unit[0]) is not { Count: > 0 } elements) return null;
+
         var factor = 1.0;
-        var elements = 0;
-        foreach (var element in instances.FollowAll(unit[0]))
+        foreach (var element in elements)
         {
-            elements++;
             if (!element[1].TryInteger(out var exponent) || Math.Abs(exponent) > 12) return null;
             if (!instances.TryFollow(element[0], out var component) || Factor(component, depth + 1) is not { } inner) return null;
 
             factor *= Math.Pow(inner, exponent);
         }
 
-        return elements > 0 && double.IsFinite(factor) && factor > 0 ? factor : null;
+        return double.IsFinite(factor) && factor > 0 ? factor : null;
     }
 
     private string Words(Part21Record unit, int depth)

@@ -12,6 +12,9 @@ public static class ResultBlock
     private const string End = "/* MemberScan block end */";
     private const int HashLength = 64;
 
+    // The words of a mark inside a string of the block would be taken for the mark; the escape decodes to the same text.
+    private const string OpeningWords = "/* MemberScan block", EscapedOpeningWords = @"\X2\002F\X0\* MemberScan block";
+
     /// <summary>What stripping found.</summary>
     /// <param name="Base">The text without a block of ours; the text itself when it has none.</param>
     /// <param name="HadBlock">Whether there was a block.</param>
@@ -22,25 +25,36 @@ public static class ResultBlock
     public static Stripped Strip(ReadOnlyMemory<byte> text)
     {
         var bytes = text.Span;
-        var begin = bytes.LastIndexOf(Encoding.ASCII.GetBytes(Begin));
-        if (begin < 0) return new Stripped(text, false, true);
-
-        var endMark = Encoding.ASCII.GetBytes(End);
-        var end = bytes[begin..].IndexOf(endMark);
-        if (end < 0) return new Stripped(text, false, true);
-
-        end += begin + endMark.Length;
-        if (bytes[end..].StartsWith("\r\n"u8)) end += 2;
-        else if (bytes[end..].StartsWith("\n"u8)) end += 1;
 
         // Only where the closing ENDSEC follows is it the block; the same words in a string are content.
-        if (!bytes[end..].StartsWith("ENDSEC"u8) && !bytes[end..].StartsWith("endsec"u8)) return new Stripped(text, false, true);
+        var end = EndOfBlock(bytes);
+        if (end < 0) return new Stripped(text, false, true);
+
+        var begin = bytes[..end].LastIndexOf(Encoding.ASCII.GetBytes(Begin));
+        if (begin < 0) return new Stripped(text, false, true);
 
         var stripped = new byte[bytes.Length - (end - begin)];
         bytes[..begin].CopyTo(stripped);
         bytes[end..].CopyTo(stripped.AsSpan(begin));
         var declared = Encoding.ASCII.GetString(bytes.Slice(begin + Begin.Length, Math.Min(HashLength, bytes.Length - begin - Begin.Length)));
         return new Stripped(stripped, true, string.Equals(declared, Sha256(stripped), StringComparison.Ordinal));
+    }
+
+    // Offset behind the end mark and its line end, where ENDSEC follows; −1 if nowhere.
+    private static int EndOfBlock(ReadOnlySpan<byte> bytes)
+    {
+        var mark = Encoding.ASCII.GetBytes(End);
+        for (var rest = bytes; rest.LastIndexOf(mark) is var at and >= 0; rest = rest[..at])
+        {
+            var end = at + mark.Length;
+            if (bytes[end..].StartsWith("\r\n"u8)) end += 2;
+            else if (bytes[end..].StartsWith("\n"u8) || bytes[end..].StartsWith("\r"u8)) end += 1;
+
+            var next = bytes.Slice(end, Math.Min(6, bytes.Length - end));
+            if (Ascii.EqualsIgnoreCase(next, "ENDSEC"u8)) return end;
+        }
+
+        return -1;
     }
 
     /// <summary>SHA-256 in lower-case hexadecimal.</summary>
@@ -60,7 +74,7 @@ public static class ResultBlock
         var at = checked((int)insertionOffset);
         output.Write(baseText[..at]);
         Line(string.Create(CultureInfo.InvariantCulture, $"{Begin}{Sha256(baseText)} */"));
-        foreach (var line in lines) Line(line);
+        foreach (var line in lines) Line(line.Replace(OpeningWords, EscapedOpeningWords, StringComparison.Ordinal));
         Line(End);
         output.Write(baseText[at..]);
 

@@ -42,9 +42,11 @@ internal sealed class MemberChecker(SectionLibrary library, Basis basis, double 
             all.Add(string.Create(CultureInfo.InvariantCulture, $"Poisson's ratio {poisson.Value:0.0##} is the default; the model gives none"));
 
         Reason? first = (member.Section as Finding<SectionFinding>.Missing)?.Why
+            ?? OutOfRange(section)
             ?? (member.Material.Yield as Finding<double>.Missing)?.Why
             ?? (forces.Count == 0 ? new Reason(ReasonCode.NoForces, "no section forces for this member in any source") : null)
-            ?? (member.Length as Finding<double>.Missing)?.Why;
+            ?? (member.Length as Finding<double>.Missing)?.Why
+            ?? (double.IsFinite(length!.Value) ? null : new Reason(ReasonCode.LengthAmbiguous, $"the length ({length.Source}) is beyond the range of numbers"));
 
         var findings = new List<SituationFindings>();
         if (first is null)
@@ -90,6 +92,13 @@ internal sealed class MemberChecker(SectionLibrary library, Basis basis, double 
             Situations = Ranked(findings),
             Notes = all.ToImmutable(),
         };
+    }
+
+    /// <summary>Dimensions of which a sound section is made, but whose powers leave the range of numbers.</summary>
+    private static Reason? OutOfRange(Finding<SectionFinding>.Found? section)
+    {
+        var shape = section?.Value.Shapes.FirstOrDefault(s => !NumberRange.Holds(s));
+        return shape is null ? null : new Reason(ReasonCode.SectionInvalid, $"the section {shape.Designation} is so small or so large that its properties are beyond the range of numbers");
     }
 
     /// <summary>The first thing that bars a verdict within the limit.</summary>

@@ -16,6 +16,10 @@ internal sealed class SectionLibrary
 
     private readonly ConcurrentDictionary<(CrossSection Section, ShearModel Model, double Poisson), (StressField? Field, string WhyNot)> _fields = new();
 
+    /// <summary>Properties of a section.</summary>
+    public SectionProperties Properties(CrossSection section) =>
+        Field(section, ShearModel.Elementary, 0).Field?.Properties ?? SectionProperties.Of(section);
+
     /// <summary>The field of a section in a shear model, or why there is none.</summary>
     public (StressField? Field, string WhyNot) Field(CrossSection section, ShearModel model, double poisson)
     {

@@ -53,8 +53,8 @@ internal sealed class SituationChecker(SectionLibrary library, Basis basis, doub
         if (!line.ReachesBothEnds) findings.Bar(ReasonCode.StationsTooCoarse, $"the stations of '{forces.Situation.Name}' do not reach both ends of the member");
         foreach (var shape in subject.Section.Shapes)
         {
-            var properties = SectionProperties.Of(shape);
-            CheckStability(findings, line, properties, subject);
+            var properties = library.Properties(shape);
+            CheckStability(findings, line, properties, subject, Math.Max(subject.Length, (forces.To ?? 0) - forces.From));
             foreach (var station in line.Stations) CheckWalls(findings, shape, properties, Cleaned(station.Forces, shape), subject);
             if (findings.Limit is { } limit)
             {
@@ -91,11 +91,11 @@ internal sealed class SituationChecker(SectionLibrary library, Basis basis, doub
         return ForceLine.Build(forces.Stations.Select(s => s with { X = s.X - forces.From }), to - forces.From);
     }
 
-    private void CheckStability(SituationFindings findings, ForceLine line, SectionProperties properties, Subject subject)
+    private void CheckStability(SituationFindings findings, ForceLine line, SectionProperties properties, Subject subject, double length)
     {
         var least = line.Stations.Min(s => Cleaned(s.Forces, subject.Section.Shape).N);
         var (modulus, why) = subject.Material.Modulus.TryGet(out var found, out var reason) ? (found.Value, "") : ((double?)null, reason.Message);
-        switch (CompressionRule.Check(least, modulus, why, properties.IMin, subject.Length, lengthFactor))
+        switch (CompressionRule.Check(least, modulus, why, properties.IMin, length, lengthFactor))
         {
             case CheckResult.NotEvaluated barred:
                 findings.Bar(barred.Why);
@@ -126,10 +126,15 @@ internal sealed class SituationChecker(SectionLibrary library, Basis basis, doub
 
         double Try(double x, in SectionForces forces)
         {
+            if (!NumberRange.Holds(shape, field.Properties, Cleaned(forces, shape)))
+            {
+                findings.Bar(ReasonCode.CheckNotEvaluated, "the forces are so large that stresses are beyond the range of numbers");
+                return 0;
+            }
+
             var usable = Usable(findings, field, shape, forces);
             var point = field.Govern(usable, measure);
-            if (!double.IsFinite(point.Value)) findings.Bar(ReasonCode.CheckNotEvaluated, "the stresses are beyond any range");
-            else if (best is null || point.Value / allowed > best.Utilization) best = new Found(point.Value / allowed, from + x, usable, point, field, index);
+            if (best is null || point.Value / allowed > best.Utilization) best = new Found(point.Value / allowed, from + x, usable, point, field, index);
             return point.Value;
         }
 
@@ -208,7 +213,7 @@ internal sealed class SituationChecker(SectionLibrary library, Basis basis, doub
         var force = Math.Max(Math.Abs(forces.N), Math.Max(Math.Abs(forces.Vy), Math.Abs(forces.Vz)));
         var moment = Math.Max(Math.Abs(forces.T), Math.Max(Math.Abs(forces.My), Math.Abs(forces.Mz)));
         var (leastForce, leastMoment) = (ZeroShare * Math.Max(force, moment / extent), ZeroShare * Math.Max(moment, force * extent));
-        static double Clean(double value, double least) => Math.Abs(value) <= least ? 0 : value;
+        static double Clean(double value, double least) => Math.Abs(value) <= least || Math.Abs(value) < NumberRange.LeastForce ? 0 : value;
         return new SectionForces(
             Clean(forces.N, leastForce), Clean(forces.Vy, leastForce), Clean(forces.Vz, leastForce),
             Clean(forces.T, leastMoment), Clean(forces.My, leastMoment), Clean(forces.Mz, leastMoment));

@@ -184,7 +184,19 @@ public sealed class SlenderWallTests
 
     private static SectionProperties PropertiesOf(double area, double iy, double iz) => new()
     {
-        Area = area, Iy = iy, Iz = iz, Iyz = 0, J = null, JSource = "not needed here", WelY = iy, WelZ = iz, WplY = iy, WplZ = iz,
-        Wt = null, JThinWall = null, ShearCentreY = 0, ShearCentreZ = 0,
+        Area = area,
+        Iy = iy,
+        Iz = iz,
+        Iyz = 0,
+        J = null,
+        JSource = "not needed here",
+        WelY = iy,
+        WelZ = iz,
+        WplY = iy,
+        WplZ = iz,
+        Wt = null,
+        JThinWall = null,
+        ShearCentreY = 0,
+        ShearCentreZ = 0,
     };
 }

@@ -22,6 +22,7 @@ public sealed class FindingTests
     [InlineData("P21-0017", 2, "#2=HANGER((1)‹2,3);")]
     [InlineData("P21-0017", 2, "#2=HANGER(1‹(2),3);")]
     [InlineData("P21-0017", 2, "#2=HANGER(1) ‹and more;")]
+    [InlineData("P21-0017", 2, "#2=HANGER((1 2‹/* ) */,3));")]
     [InlineData("P21-0018", 2, "‹#2 HANGER(1);")]
     [InlineData("P21-0018", 2, "#2=‹12;")]
     [InlineData("P21-0018", 2, "#2=HANGER‹;")]
@@ -119,10 +120,14 @@ public sealed class FindingTests
         Assert.Equal(99999999999UL, file.HighestId);
     }
 
-    [Fact]
-    public void Numbers_in_text_that_was_passed_over_stay_taken()
+    [Theory]
+    [InlineData("#1=POST();\ngarbage #900 more;\n#3=POST();")]
+    [InlineData("#1=POST();\n#3=POST('open #900,1);")]
+    [InlineData("#1=POST();\n#3=POST(1,(2,(#900;\n#4=POST();")]
+    [InlineData("#1=POST();\n#900 POST();\n#4=POST();")]
+    public void Numbers_in_text_that_was_passed_over_stay_taken(string data)
     {
-        var (file, _) = Sample.Read(Sample.Model("#1=POST(1,(2;\n#2=POST();\ngarbage #800 more;\n#3=POST('open #900,1);"));
+        var (file, _) = Sample.Read(Sample.Model(data));
 
         Assert.True(file.HasDamage);
         Assert.Equal(900UL, file.HighestId);

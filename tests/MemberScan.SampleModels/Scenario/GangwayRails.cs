@@ -20,6 +20,9 @@ public static class GangwayRails
 
     private static readonly SampleMaterial s_s235 = new("S235JR", Si.MPa(235), Si.GPa(210), InProperties: true);
     private static readonly SampleMaterial s_s355 = new("S355J2H", Si.MPa(355), Si.GPa(210), InProperties: true);
+    // Over 16 mm the grades have less (EN 10025-2:2004, Table 7, and EN 10210-1:2006, from memory).
+    private static readonly SampleMaterial s_thickS235 = new("S235JR, t > 16 mm", Si.MPa(225), Si.GPa(210), InProperties: true);
+    private static readonly SampleMaterial s_thickS355 = new("S355J2H, t > 16 mm", Si.MPa(345), Si.GPa(210), InProperties: true);
     private static readonly SampleMaterial s_s235ByName = new("S235JRH", Si.MPa(235), Si.GPa(210), InProperties: false);
     private static readonly SampleMaterial s_nameless = new("Stahl", null, null, InProperties: false);
 
@@ -86,7 +89,7 @@ public static class GangwayRails
         };
         yield return Rail(1, "Handlauf Nord", s_tube48, 3.0, 5, 0.5, 0);
         yield return Rail(2, "Handlauf Süd", s_tube48, 2.0, 3, 0.5, 0.2);
-        yield return Rail(3, "Handlauf 手摺", new RoundedRectangle(Si.Mm(60), Si.Mm(40), Si.Mm(8)), 2.0, 5, 0.5, 0.5, material: s_s235);
+        yield return Rail(3, "Handlauf 手摺", new RoundedRectangle(Si.Mm(60), Si.Mm(40), Si.Mm(8)), 2.0, 5, 0.5, 0.5, material: s_thickS235);
         yield return Rail(4, "Handlauf Kasse", s_tube42, 1.5, 5, 0.5, 0, SampleBody.SweptDisk);
         yield return Rail(5, "Knieleiste 1", s_tube33, 1.5, 3, 0.2, 0, SampleBody.SweptDisk);
         yield return Rail(6, "Knieleiste 2", s_tube33, 1.5, 3, 0.2, 0, SampleBody.SweptDisk);
@@ -161,7 +164,7 @@ public static class GangwayRails
             Name = "Zugstab Z9",
             Keyword = "IFCSTRUCTURALCURVEMEMBER",
             Section = new Round(Si.Mm(10)),
-            Material = s_s355,
+            Material = s_thickS355,
             Axes = Axes(new(9, 0, 0), new(0, 0.6, 0.8), Vector3.UnitX),
             Length = 2.5,
             Body = SampleBody.AnalyticalOnly,

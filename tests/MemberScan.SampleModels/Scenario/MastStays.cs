@@ -18,6 +18,8 @@ public static class MastStays
     private const string Design = "GZT: 1.35 G + 1.5 W";
 
     private static readonly SampleMaterial s_s355 = new("S355J2H", Si.MPa(355), Si.GPa(210), InProperties: true);
+    // Over 16 mm the grade has less (EN 10210-1:2006, from memory).
+    private static readonly SampleMaterial s_thickS355 = new("S355J2H, t > 16 mm", Si.MPa(345), Si.GPa(210), InProperties: true);
     private static readonly SampleMaterial s_s235 = new("S235JRH", Si.MPa(235), Si.GPa(210), InProperties: false);
 
     // Turned by 30° about the vertical, moved to the mast's foot.
@@ -89,7 +91,7 @@ public static class MastStays
 
         yield return Stay(1, "Abspannstab Bug 1", 6, 4, 16, 5, 20);
         yield return Stay(2, "Abspannstab Bug 2", 6, -4, 16, 5, 24);
-        yield return Stay(3, "Abspannstab Heck 1", -6, 4, 20, 5, 30);
+        yield return Stay(3, "Abspannstab Heck 1", -6, 4, 20, 5, 30, s_thickS355);
         yield return Stay(4, "Abspannstab Heck 2", -6, -4, 12, 5, 21);
         yield return Stay(5, "Abspannstab 'quer' 纜索 🚢", 0, 7, 16, 5, 12, s_s235);
     }

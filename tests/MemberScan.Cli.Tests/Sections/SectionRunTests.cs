@@ -1,0 +1,182 @@
+using System.Text.Json;
+using MemberScan.Cli.Sections;
+
+namespace MemberScan.Cli.Tests.Sections;
+
+public sealed class SectionRunTests
+{
+    private static readonly string[] s_combined = ["round 20 mm", "--forces", "N=10kN My=0.1kNm Mz=0.1kNm T=0.05kNm"];
+
+    [Fact]
+    public async Task The_keys_are_those_that_the_README_documents()
+    {
+        using var json = await Json([.. s_combined, "--at", "y=0mm z=10mm", "--yield", "235MPa"]);
+
+        var root = json.RootElement;
+        Assert.Equal(["section", "properties", "shear", "poisson", "forces", "utilization", "points", "governing", "closure"], Keys(root));
+        Assert.Equal(["area", "Iy", "Iz", "Iyz", "J", "WelY", "WelZ", "WplY", "WplZ", "Wt", "JThinWall", "yS", "zS", "JSource"], Keys(root.GetProperty("properties")));
+        Assert.Equal(["N", "Vy", "Vz", "T", "My", "Mz"], Keys(root.GetProperty("forces")));
+        Assert.Equal(["y", "z", "sigma", "tauXY", "tauXZ", "tau", "vonMises", "tresca", "sigma1", "sigma3"], Keys(root.GetProperty("points")[0]));
+        var governing = root.GetProperty("governing");
+        Assert.Equal(["vonMises", "tresca", "absSigma", "tau", "sigma1", "sigma3"], Keys(governing));
+        Assert.All(governing.EnumerateObject(), measure => Assert.Equal(["value", "y", "z", "place"], Keys(measure.Value)));
+        Assert.Equal(("elementary", 0.3, "round 20 mm"), (root.GetProperty("shear").GetString(), root.GetProperty("poisson").GetDouble(), root.GetProperty("section").GetString()));
+        Assert.DoesNotContain("utilization", Keys((await Json(s_combined)).RootElement));
+    }
+
+    /// <summary>
+    /// By hand: 10e3/314.16 + 32·√2·0.1e6/(π·20³) = 31.83 + 180.06 = 211.89 MPa, 16·0.05e6/(π·20³) = 31.83 MPa; √(σ² + 3τ²) and √(σ² + 4τ²).
+    /// Properties by Gere and Timoshenko, appendix (from memory).
+    /// </summary>
+    [Fact]
+    public async Task A_round_bar_under_all_but_shear()
+    {
+        using var json = await Json([.. s_combined, "--yield", "235MPa"]);
+
+        var root = json.RootElement;
+        double Most(string measure) => root.GetProperty("governing").GetProperty(measure).GetProperty("value").GetDouble() / 1e6;
+        Assert.Equal(218.95, Most("vonMises"), 0.005);
+        Assert.Equal(221.25, Most("tresca"), 0.005);
+        Assert.Equal(211.89, Most("absSigma"), 0.005);
+        Assert.Equal(31.83, Most("tau"), 0.005);
+        Assert.Equal(218.95 / 235, root.GetProperty("utilization").GetDouble(), 3e-5);
+        var place = root.GetProperty("governing").GetProperty("vonMises");
+        Assert.Equal(-7.071e-3, place.GetProperty("y").GetDouble(), 1e-5);          // σ = −Mz·y/Iz: tension at −y and at +z
+        Assert.Equal(7.071e-3, place.GetProperty("z").GetDouble(), 1e-5);
+        var p = root.GetProperty("properties");
+        Assert.Equal(
+            [Math.PI * 1e-4, Math.PI / 4 * 1e-8, Math.PI / 2 * 1e-8, Math.PI / 4 * 1e-6, 4.0 / 3 * 1e-6],
+            new[] { "area", "Iy", "J", "WelZ", "WplY" }.Select(k => p.GetProperty(k).GetDouble()), (a, b) => Math.Abs(a / b - 1) < 1e-9);
+        Assert.Equal(JsonValueKind.Null, p.GetProperty("JThinWall").ValueKind);
+    }
+
+    /// <summary>h/b = 2: J = 0.2287·80·40³ mm⁴ = 1.171e6, τ = T/(0.24588·80·40²) = 6.354 MPa (Timoshenko and Goodier, art. 109, from memory).</summary>
+    [Theory]
+    [InlineData("elementary")]
+    [InlineData("elasticity")]
+    public async Task A_rectangle_under_torsion(string shear)
+    {
+        using var json = await Json("rectangle 40x80 mm", "--forces", "T=0.2kNm", "--shear", shear);
+
+        var tau = json.RootElement.GetProperty("governing").GetProperty("tau");
+        Assert.Equal(1.171e-6, json.RootElement.GetProperty("properties").GetProperty("J").GetDouble(), 0.001e-6);
+        Assert.Equal(6.35e6, tau.GetProperty("value").GetDouble(), 0.01e6);
+        Assert.Equal((20e-3, 0.0), (Math.Abs(tau.GetProperty("y").GetDouble()), Math.Round(tau.GetProperty("z").GetDouble(), 9)));
+        Assert.Contains("middle of the long side", tau.GetProperty("place").GetString(), StringComparison.Ordinal);
+        Assert.Equal(shear, json.RootElement.GetProperty("shear").GetString());
+    }
+
+    [Fact]
+    public async Task The_largest_normal_stress_keeps_its_sign()
+    {
+        using var json = await Json("round 20 mm", "--forces", "N=-10kN My=0.1kNm");
+
+        var governing = json.RootElement.GetProperty("governing");
+        var expected = -(10e3 / 314.159265 + 32 * 0.1e6 / (Math.PI * 8000)) * 1e6;
+        Assert.Equal(expected, governing.GetProperty("absSigma").GetProperty("value").GetDouble(), 1e3);
+        Assert.Equal(expected, governing.GetProperty("sigma3").GetProperty("value").GetDouble(), 1e3);
+        Assert.True(governing.GetProperty("sigma1").GetProperty("value").GetDouble() > 0);
+    }
+
+    /// <summary>Rail post of 42 in, 200 lbf: 8400 lbf·in over 0.3262 in³ gives 25.75 ksi (published nominal wall of pipe 1 1/2, ASME B36.10, from memory).</summary>
+    [Theory]
+    [InlineData("35ksi", 0, 0.7358)]
+    [InlineData("25ksi", 1, 1.0300)]
+    public async Task Inches_and_pounds_are_read_and_over_the_yield_strength_is_1(string yield, int code, double utilization)
+    {
+        var ran = await Memberscan.Run("section", "tube 1.900x0.145 in", "--forces", "Vz=200lbf My=8400lbf·in", "--yield", yield, "--json");
+
+        Assert.True(code == ran.ExitCode, ran.All);
+        using var json = JsonDocument.Parse(ran.Output);
+        Assert.Equal(utilization, json.RootElement.GetProperty("utilization").GetDouble(), 1e-4);
+        Assert.Equal(25.75 * 6.894757e6, json.RootElement.GetProperty("governing").GetProperty("absSigma").GetProperty("value").GetDouble(), 0.005 * 6.894757e6);
+    }
+
+    [Fact]
+    public async Task Plain_text_gives_the_same_figures_with_their_units()
+    {
+        var ran = await Memberscan.Run(["section", .. s_combined, "--at", "y=0mm z=10mm"]);
+
+        Assert.True(ran.ExitCode == 0, ran.All);
+        Assert.Contains("largest von Mises: 218.95 MPa", ran.Output, StringComparison.Ordinal);
+        Assert.Contains("largest Tresca: 221.25 MPa", ran.Output, StringComparison.Ordinal);
+        Assert.Contains("A    314.159 mm²", ran.Output, StringComparison.Ordinal);
+        Assert.Contains("at y 0 mm, z 10 mm: σ 159.15 MPa", ran.Output, StringComparison.Ordinal);         // 31.83 + 127.32
+    }
+
+    [Theory]
+    [InlineData("N=1.5kN", "C")]
+    [InlineData("N=1.5kN", "de_DE.UTF-8")]
+    public async Task Numbers_have_a_point_in_every_language(string forces, string language)
+    {
+        var start = Memberscan.Start(["section", "round 20.5 mm", "--forces", forces, "--poisson", "0.25", "--at", "y=0mm z=1.5mm"]);
+        start.Environment["LC_ALL"] = start.Environment["LANG"] = language;
+        start.Environment.Remove("DOTNET_SYSTEM_GLOBALIZATION_INVARIANT");
+
+        var ran = await Memberscan.Run(start);
+
+        Assert.True(ran.ExitCode == 0, ran.All);
+        Assert.Contains("N 1.5 kN", ran.Output, StringComparison.Ordinal);
+        Assert.Contains("z 1.5 mm", ran.Output, StringComparison.Ordinal);
+    }
+
+    [Theory]
+    [InlineData("rund 20 mm", "", "", "", "")]
+    [InlineData("round 20", "", "", "", "")]
+    [InlineData("round 0 mm", "", "", "", "above zero")]
+    [InlineData("tube 20x10 mm", "", "", "", "")]
+    [InlineData("round 20,5 mm", "", "", "", "")]
+    [InlineData("round 1e-120 mm", "My=1kNm", "", "", "check their units")]
+    [InlineData("round 20 mm", "My=1e300kNm", "", "", "check their units")]
+    [InlineData("round 20 mm", "N=1e-320kN", "", "", "check their units")]
+    [InlineData("round 20 mm", "N=1", "", "", "")]
+    [InlineData("round 20 mm", "N=1kNm", "", "", "")]
+    [InlineData("round 20 mm", "Q=1kN", "", "", "")]
+    [InlineData("round 20 mm", "N=1kN N=2kN", "", "", "")]
+    [InlineData("round 20 mm", "N=1kN", "y=0mm z=11mm", "", "lies outside the material of round 20 mm")]
+    [InlineData("tube 48.3x3.2 mm", "N=1kN", "y=0mm z=0mm", "", "lies outside the material of tube 48.3x3.2 mm")]
+    [InlineData("round 20 mm", "N=1kN", "y=0mm z=1", "", "")]
+    [InlineData("round 20 mm", "N=1kN", "z=10mm", "", "give both")]
+    [InlineData("round 20 mm", "N=1kN", "", "0MPa", "above zero")]
+    [InlineData("round 20 mm", "N=1kN", "", "235", "")]
+    public void A_wrong_text_is_refused_with_a_remedy(string section, string forces, string point, string yield, string words)
+    {
+        var failure = Assert.Throws<Failure>(() => SectionRun.Execute(new SectionRun.Options(
+            section, forces, point.Length > 0 ? [point] : [], "elementary", 0.3, yield.Length > 0 ? yield : null, Json: true)));
+
+        Assert.Equal(64, failure.ExitCode);
+        Assert.Contains(words, failure.Message, StringComparison.Ordinal);
+        Assert.True(failure.Message.Length > 20, failure.Message);
+    }
+
+    [Theory]
+    [InlineData("0.5")]
+    [InlineData("-0.1")]
+    [InlineData("0,3")]
+    [InlineData("NaN")]
+    public async Task A_Poisson_ratio_out_of_range_is_refused(string poisson)
+    {
+        var ran = await Memberscan.Run("section", "round 20 mm", $"--poisson={poisson}");
+
+        Assert.True(ran.ExitCode == 64, ran.All);
+        Assert.Contains("give a number from 0 to below 0.5", ran.Error, StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void Elasticity_of_a_box_is_refused_with_the_remedy()
+    {
+        var failure = Assert.Throws<Failure>(() => SectionRun.Execute(new SectionRun.Options("box 50x30x3 mm", "N=1kN", [], "elasticity", 0.3, null, Json: true)));
+
+        Assert.Equal(64, failure.ExitCode);
+        Assert.EndsWith("use --shear elementary.", failure.Message, StringComparison.Ordinal);
+    }
+
+    private static async Task<JsonDocument> Json(params string[] arguments)
+    {
+        var ran = await Memberscan.Run(["section", .. arguments, "--json"]);
+        Assert.True(ran.ExitCode == 0 && ran.Error.Length == 0, ran.All);
+        return JsonDocument.Parse(ran.Output);
+    }
+
+    private static IEnumerable<string> Keys(JsonElement element) => element.EnumerateObject().Select(p => p.Name);
+}
