@@ -170,11 +170,11 @@ public sealed class ExitCodesTests
     }
 
     [Fact]
-    public void A_failure_of_the_section_command_is_64_or_2_by_its_cause()
+    public void A_failure_of_the_section_command_is_64_or_74_by_its_cause()
     {
         int CodeOf(string section, string forces) => Assert.Throws<Failure>(
             () => SectionRun.Execute(new SectionRun.Options(section, forces, [], "elementary", 0.3, null, false))).ExitCode;
 
-        Assert.Equal((64, 2), (CodeOf("round", ""), CodeOf("rectangle 40x60 mm r 8", "T=1kNm")));
+        Assert.Equal((64, 74), (CodeOf("round", ""), CodeOf("outline no-such-file.json", "T=1kNm")));
     }
 }

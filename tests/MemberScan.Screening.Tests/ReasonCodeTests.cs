@@ -53,10 +53,6 @@ public sealed class ReasonCodeTests
         ["compression over 4 % of the Euler load"] = () => Model(ReasonCode.StabilityNotChecked, w => Plain(w)) with { Table = Landing.Constant(new(-10e3, 0, 0, 0, 0, 0)) },
         ["compression without a modulus"] = () => Model(ReasonCode.StabilityNotChecked, w => WithMaterial(w, m => m.Material("Own steel", yield: 235e6))) with { Table = Landing.Constant(new(-1, 0, 0, 0, 0, 0)) },
         ["a compressed tube of d/t = 200"] = () => Model(ReasonCode.SlenderWall, w => Landing.Add(w, Landing.Shape(w, new Tube(0.1, 1e-3), 1))) with { Table = Landing.Constant(new(-100, 0, 0, 0, 0, 0)) },
-        ["a rounded rectangle under torsion"] = () => Model(ReasonCode.CheckNotEvaluated, w => Landing.Add(w, Landing.Shape(w, new RoundedRectangle(40e-3, 60e-3, 8e-3), 1))) with
-        {
-            Table = Landing.Constant(new(100, 0, 0, 10, 0, 0)),
-        },
         ["a bend of three depths"] = () => Model(ReasonCode.CheckNotEvaluated, w => Landing.Add(w, Bent(w, radius: 0.09))) with { Table = Shares(s_small) },
         ["a damaged profile"] = () => Damaged("IFCCIRCLEHOLLOWPROFILEDEF(.AREA.,$,$,24.15,3.2)", "IFCCIRCLEHOLLOWPROFILEDEF(.AREA.,$,$,24.15,3.2"),
         ["a damaged element"] = () => Damaged("'P-1',$);", "'P-1' $);"),

@@ -1,5 +1,4 @@
 using System.Collections.Immutable;
-using System.Globalization;
 using MemberScan.Mechanics.Meshes;
 using MemberScan.Mechanics.Sections;
 using MemberScan.Mechanics.Warping;
@@ -15,7 +14,7 @@ internal static class OutlineProperties
         var edges = EdgesOf(section);
         var integrals = OutlineIntegrals.Of(edges);
         var torsion = SolvedSections.Torsion(section);
-        var (y, z) = torsion.ShearCentre(integrals.Iy, integrals.Iz, integrals.Iyz, poisson);
+        var (y, z) = torsion?.ShearCentre(integrals.Iy, integrals.Iz, integrals.Iyz, poisson) ?? (double.NaN, double.NaN);
         var (farY, farZ) = (0.0, 0.0);
         foreach (var at in edges.SelectMany(edge => edge.Extremes())) (farY, farZ) = (Math.Max(farY, Math.Abs(at.Y)), Math.Max(farZ, Math.Abs(at.Z)));
         var walls = section is OpenProfile profile ? ProfileWalls.Of(profile) : [];
@@ -26,13 +25,13 @@ internal static class OutlineProperties
             Iy = integrals.Iy,
             Iz = integrals.Iz,
             Iyz = IsSymmetric(integrals) ? 0 : integrals.Iyz,
-            J = torsion.J,
-            JSource = string.Create(CultureInfo.InvariantCulture, $"numerical field, change at the last refinement {torsion.Change:0.0E+0}"),
+            J = torsion?.J,
+            JSource = ClosedForms.Numerical(torsion),
             WelY = integrals.Iy / farZ,
             WelZ = integrals.Iz / farY,
             WplY = OutlineIntegrals.Plastic(edges),
             WplZ = OutlineIntegrals.Plastic([.. edges.Select(edge => edge.Exchanged().Reversed())]),
-            Wt = thinWall is { } j ? j / walls.Max(wall => wall.Thickness) : torsion.Wt,
+            Wt = thinWall is { } j ? j / walls.Max(wall => wall.Thickness) : torsion?.Wt,
             JThinWall = thinWall,
             ShearCentreY = Math.Abs(y) <= Rounding * farY ? 0 : y,
             ShearCentreZ = Math.Abs(z) <= Rounding * farZ ? 0 : z,

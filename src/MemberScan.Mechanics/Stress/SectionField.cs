@@ -39,6 +39,9 @@ internal sealed class SectionField : StressField
     }
 
     /// <inheritdoc/>
+    public override bool CarriesTorsion => _shear.CarriesTorsion;
+
+    /// <inheritdoc/>
     public override FieldError? NumericalError => _shear.NumericalError;
 
     /// <summary>The tables for many states at a time.</summary>
@@ -50,6 +53,7 @@ internal sealed class SectionField : StressField
     /// <inheritdoc/>
     public override StressState At(in SectionForces forces, double y, double z)
     {
+        RefuseTorsion(forces);
         var shear = _shear.At(forces.Vy, forces.Vz, forces.T, y, z);
         return new StressState(BendingStress.At(Properties, forces, y, z), shear.XY, shear.XZ);
     }
@@ -73,6 +77,7 @@ internal sealed class SectionField : StressField
     {
         if (!forces.IsFinite) throw new ArgumentException("section forces must be finite numbers", nameof(forces));
 
+        RefuseTorsion(forces);
         return _search.Find(forces, measure);
     }
 
@@ -113,6 +118,11 @@ internal sealed class SectionField : StressField
         }
     }
 
+    private void RefuseTorsion(in SectionForces forces)
+    {
+        if (forces.T != 0 && !CarriesTorsion) throw new ArgumentException($"the elementary model of this {Section.Kind} carries no torsion");
+    }
+
     private static Outline OutlineOf(CrossSection section, ShearSolution shear)
     {
         if (section is not (OutlineSection or OpenProfile)) return Outline.Of(section, shear.HasPeaks);
@@ -120,7 +130,7 @@ internal sealed class SectionField : StressField
         var shape = new OutlineShape(OutlineProperties.EdgesOf(section));
         var walls = section is OpenProfile profile ? shear as OpenProfileElementary ?? new OpenProfileElementary(profile, OutlineProperties.Of(section, 0)) : null;
         return new ProfileOutline(
-            section, shape, SolvedSections.Of(section).Potential.Mesh, shear.HasPeaks,
+            section, shape, SolvedSections.TryOf(section)!.Potential.Mesh, shear.HasPeaks,
             shear is OpenProfileElementary elementary ? elementary.Creases() : [],
             walls is null ? (y, z) => ProfileOutline.PlainName(shape, y, z) : (y, z) => walls.NameOf(y, z));
     }

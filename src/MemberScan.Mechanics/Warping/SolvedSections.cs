@@ -15,27 +15,28 @@ internal static class SolvedSections
     public const int KeptConstants = 16384;
 
     private static readonly ConcurrentDictionary<CrossSection, TorsionConstants> s_torsion = new();
-    private static readonly ConcurrentDictionary<CrossSection, Lazy<WarpingSolution>> s_solutions = new();
+    private static readonly ConcurrentDictionary<CrossSection, Lazy<WarpingSolution?>> s_solutions = new();
     private static readonly ConcurrentQueue<CrossSection> s_order = new();
 
-    /// <summary>The numerical field of a box, a rounded rectangle, an outline or an open profile.</summary>
-    public static WarpingSolution Of(CrossSection section)
+    /// <summary>The numerical field of a box, a rounded rectangle, an outline or an open profile; null where its dimensions are too far apart to be solved.</summary>
+    public static WarpingSolution? TryOf(CrossSection section)
     {
         if (s_solutions.TryGetValue(section, out var known)) return known.Value;
 
-        var made = new Lazy<WarpingSolution>(() => Solve(section));
+        var made = new Lazy<WarpingSolution?>(() => Solve(section));
         var kept = s_solutions.GetOrAdd(section, made);
         if (ReferenceEquals(kept, made)) s_order.Enqueue(section);
         while (s_order.Count > Kept && s_order.TryDequeue(out var oldest)) s_solutions.TryRemove(oldest, out _);
         return kept.Value;
     }
 
-    /// <summary>What a section's numerical field gives for its properties.</summary>
-    public static TorsionConstants Torsion(CrossSection section)
+    /// <summary>What a section's numerical field gives for its properties; null where there is none.</summary>
+    public static TorsionConstants? Torsion(CrossSection section)
     {
         if (s_torsion.TryGetValue(section, out var known)) return known;
 
-        var solution = Of(section);
+        if (TryOf(section) is not { } solution) return null;
+
         var torsion = new TorsionConstants(solution.J, 1 / solution.LargestTwistStress(Counts(section)), solution.TorsionError, solution.Potential.FlexureMoments());
         if (s_torsion.Count >= KeptConstants) s_torsion.Clear();
         s_torsion[section] = torsion;
@@ -51,11 +52,11 @@ internal static class SolvedSections
 
     private static Func<double, double, bool> CountsIn(OutlineShape shape) => (y, z) => !shape.IsNearCorner(y, z, 0);
 
-    private static WarpingSolution Solve(CrossSection section) => section switch
+    private static WarpingSolution? Solve(CrossSection section) => section switch
     {
-        Box box => WarpingSolution.Of(WalledMesh.Of(box), Counts(box)),
-        RoundedRectangle rounded => WarpingSolution.Of(WalledMesh.Of(rounded), Counts(rounded)),
-        OutlineSection or OpenProfile => WarpingSolution.Of(OutlineMesh.Of(new OutlineShape(OutlineProperties.EdgesOf(section))), Counts(section)),
+        Box box => WarpingSolution.TryOf(WalledMesh.Of(box), Counts(box)),
+        RoundedRectangle rounded => WarpingSolution.TryOf(WalledMesh.Of(rounded), Counts(rounded)),
+        OutlineSection or OpenProfile => WarpingSolution.TryOf(OutlineMesh.Of(new OutlineShape(OutlineProperties.EdgesOf(section))), Counts(section)),
         _ => throw new ArgumentOutOfRangeException(nameof(section), section.Kind, "no numerical field for this kind"),
     };
 }
