@@ -17,6 +17,7 @@ internal sealed class OutlineMesh
     private const double GrowthFromCorner = 1.5;
     private const double LargestSweep = Math.PI / 6;
     private const int MostRounds = 12;
+    private const int MostEdgePoints = 600;
     private readonly OutlineShape _shape;
     private readonly List<(double Y, double Z)> _points = [];
     private readonly Dictionary<(double, double), int> _numbers = [];
@@ -24,13 +25,17 @@ internal sealed class OutlineMesh
 
     private OutlineMesh(OutlineShape shape) => _shape = shape;
 
-    /// <summary>The mesh of a shape.</summary>
-    /// <exception cref="ArgumentException">The outline is too intricate for the triangulation.</exception>
-    public static PatchMesh Of(OutlineShape shape) => new OutlineMesh(shape).Build();
+    /// <summary>The mesh of a shape; null where it would be too large, or the triangulation does not keep the edges.</summary>
+    public static PatchMesh? TryOf(OutlineShape shape) => new OutlineMesh(shape).Build();
 
-    private PatchMesh Build()
+    private PatchMesh? Build()
     {
-        foreach (var edge in _shape.Edges) CutEdge(edge);
+        foreach (var edge in _shape.Edges)
+        {
+            CutEdge(edge);
+            if (_points.Count > MostEdgePoints) return null;
+        }
+
         var onEdges = _points.Count;
         AddInside(onEdges);
         for (var round = 0; round < MostRounds; round++)
@@ -43,7 +48,7 @@ internal sealed class OutlineMesh
             foreach (var side in missing) Halve(side);
         }
 
-        throw new ArgumentException("the outline is too intricate for the triangulation");
+        return null;
     }
 
     private void CutEdge(EdgeCurve edge)
@@ -53,7 +58,7 @@ internal sealed class OutlineMesh
         // Pieces of equal share of ∫ds/size.
         var sum = new double[Samples + 1];
         for (var k = 1; k <= Samples; k++) sum[k] = sum[k - 1] + edge.Length / Samples / SizeAt(edge, (k - 0.5) / Samples);
-        var count = (int)Math.Ceiling(Math.Max(sum[^1], edge.IsArc ? Math.Abs(edge.Sweep) / LargestSweep : 1) - 1e-6);
+        var count = (int)Math.Ceiling(Math.Max(Math.Min(sum[^1], MostEdgePoints + 1), edge.IsArc ? Math.Abs(edge.Sweep) / LargestSweep : 1) - 1e-6);
         var cuts = new List<double> { 0 };
         for (var (k, piece) = (1, 1); piece < count; piece++)
         {

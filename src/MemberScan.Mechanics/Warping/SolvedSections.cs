@@ -56,7 +56,8 @@ internal static class SolvedSections
     {
         Box box => WarpingSolution.TryOf(WalledMesh.Of(box), Counts(box)),
         RoundedRectangle rounded => WarpingSolution.TryOf(WalledMesh.Of(rounded), Counts(rounded)),
-        OutlineSection or OpenProfile => WarpingSolution.TryOf(OutlineMesh.Of(new OutlineShape(OutlineProperties.EdgesOf(section))), Counts(section)),
+        OutlineSection or OpenProfile => OutlineMesh.TryOf(new OutlineShape(OutlineProperties.EdgesOf(section))) is { } mesh
+            ? WarpingSolution.TryOf(mesh, Counts(section)) : null,
         _ => throw new ArgumentOutOfRangeException(nameof(section), section.Kind, "no numerical field for this kind"),
     };
 }

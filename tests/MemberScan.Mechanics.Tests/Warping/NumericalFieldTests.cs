@@ -1,4 +1,5 @@
 using MemberScan.Mechanics.Forces;
+using MemberScan.Mechanics.Profiles;
 using MemberScan.Mechanics.Sections;
 using MemberScan.Mechanics.Stress;
 using MemberScan.Mechanics.Warping;
@@ -151,6 +152,20 @@ public sealed class NumericalFieldTests
         var rectangle = SectionProperties.Of(new Rectangle(0.04, 0.06));
 
         Assert.Equal(1, box.J!.Value / rectangle.J!.Value, 2e-3);
+    }
+
+    [Fact]
+    public void Sections_of_one_to_a_thousand_are_solved_and_those_beyond_reason_are_refused()
+    {
+        foreach (var section in new CrossSection[] { new RoundedRectangle(1, 0.001, 0.0001), new Box(1, 1, 0.001), new Box(10, 0.01, 0.0001, 0.0002, 0.0001) })
+            Assert.True(Samples.Field(section, ShearModel.Elasticity).Closure.LargestError <= 1e-3, section.Designation);
+
+        foreach (var section in new CrossSection[] { new RoundedRectangle(1e9, 1e-9, 1e-10), new Box(1e9, 1e-9, 1e-10), new OpenProfile(OpenShape.U, 1e6, 1, 1e-6, 1e-6) })
+        {
+            Assert.False(StressField.TryCreate(section, ShearModel.Elasticity, 0.3, out _, out var whyNot));
+            Assert.EndsWith("are too far apart for a numerical field", whyNot, StringComparison.Ordinal);
+            Assert.Null(SectionProperties.Of(section).J);
+        }
     }
 
     [Fact]
