@@ -1,6 +1,8 @@
 using System.Collections.Immutable;
 using MemberScan.Foundation.Diagnostics;
 using MemberScan.Ifc.Analysis;
+using MemberScan.Ifc.Bodies;
+using MemberScan.Ifc.Curves;
 using MemberScan.Ifc.Geometry;
 using MemberScan.Ifc.Materials;
 using MemberScan.Ifc.Members;
@@ -64,12 +66,14 @@ public sealed class IfcModel
     /// <param name="isNamed">Whether a table names the element; that makes elements of some classes candidates.</param>
     public MemberCatalog ReadMembers(Func<ElementIdentity, bool> isNamed)
     {
-        var profiles = new ProfileReader(_placements, Units);
-        var directrices = new DirectrixReader(_instances, _placements, Units);
-        var bodies = new BodyReader(_instances, _placements, profiles, directrices, Units);
+        var curves = new CurveReader(_instances, _placements, Units);
+        var profiles = new ProfileReader(_instances, _placements, curves, Units);
+        var directrices = new DirectrixReader(_instances, curves, Units);
+        var sweeps = new SweptBodyReader(_instances, _placements, profiles, directrices, Units);
+        var bodies = new BodyReader(_instances, _placements, sweeps, new DiskBodyReader(directrices, Units), new PrimitiveReader(_placements, Units));
         var facts = new MaterialFactsReader(_instances, Units, _unitReader);
         var materials = new MaterialReader(_instances, _relations, facts, profiles, _rules);
-        return new MemberReader(_instances, _relations, _placements, bodies, profiles, materials, _analytical, Schema, _rules.Candidates, _diagnostics).Read(isNamed);
+        return new MemberReader(_instances, _relations, _placements, bodies, profiles, materials, _analytical, Schema, _rules.Candidates, new RoleGuess(_rules.Roles), _diagnostics).Read(isNamed);
     }
 
     /// <summary>Reads the section forces of candidates from the model's result groups.</summary>

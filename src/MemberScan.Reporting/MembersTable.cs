@@ -37,6 +37,13 @@ public static class MembersTable
         return Encoding.UTF8.GetBytes(table.ToString());
     }
 
+    /// <summary>A text as one field: quoted where it must be, guarded against being taken for a formula, without control characters.</summary>
+    public static string Field(string text)
+    {
+        ArgumentNullException.ThrowIfNull(text);
+        return Text(text);
+    }
+
     private static IEnumerable<string> Fields(MemberResult member) =>
     [
         Text(member.Key), Text(member.GlobalId), member.ItemNumber > 0 ? member.ItemNumber.ToString(CultureInfo.InvariantCulture) : "",

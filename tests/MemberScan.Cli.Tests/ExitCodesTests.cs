@@ -2,7 +2,6 @@ using System.Diagnostics;
 using System.Globalization;
 using System.Text;
 using MemberScan.Cli.Screening;
-using MemberScan.Cli.Sections;
 
 namespace MemberScan.Cli.Tests;
 
@@ -167,14 +166,5 @@ public sealed class ExitCodesTests
         Assert.Equal((130, ""), (process.ExitCode, await output));
         Assert.Contains("Interrupted; nothing was written.", error, StringComparison.Ordinal);
         Assert.Equal(["posts.csv", "posts.ifc"], folder.Names);
-    }
-
-    [Fact]
-    public void A_failure_of_the_section_command_is_64_or_74_by_its_cause()
-    {
-        int CodeOf(string section, string forces) => Assert.Throws<Failure>(
-            () => SectionRun.Execute(new SectionRun.Options(section, forces, [], "elementary", 0.3, null, false))).ExitCode;
-
-        Assert.Equal((64, 74), (CodeOf("round", ""), CodeOf("outline no-such-file.json", "T=1kNm")));
     }
 }

@@ -43,7 +43,7 @@ public sealed class ReasonCodeTests
             w.Associate(w.Materials.ProfileSetUsage(w.Materials.ProfileSet("Tube", w.Materials.Material("S235JR"), w.Profiles.Of(Landing.PostTube))), post);
         }),
         ["an analytical axis along the member"] = () => Results(ReasonCode.AxesUnknown, section: s_flat, axis: Vector3.UnitZ),
-        ["a grid placement under results of the model"] = () => Results(ReasonCode.PlacementNotSupported, section: s_flat, onGrid: true),
+        ["a placement along a curve under results of the model"] = () => Results(ReasonCode.PlacementNotSupported, section: s_flat, alongCurve: true),
         ["a body mapped with unequal scales"] = () => Model(ReasonCode.PlacementNotSupported, w => Landing.Add(w, Uneven(w))),
         ["moments without a unit"] = () => Results(ReasonCode.UnitMissing, leftOut: ["TORQUEUNIT"], moment: 100),
         ["forces without a unit"] = () => Results(ReasonCode.UnitMissing, leftOut: ["FORCEUNIT", "TORQUEUNIT", "LINEARFORCEUNIT", "MODULUSOFELASTICITYUNIT"]),
@@ -90,7 +90,7 @@ public sealed class ReasonCodeTests
     [Fact]
     public void A_grid_placement_does_not_bar_forces_that_are_given_in_member_axes()
     {
-        var model = Results(ReasonCode.PlacementNotSupported, section: s_flat, onGrid: true).Model;
+        var model = Results(ReasonCode.PlacementNotSupported, section: s_flat, alongCurve: true).Model;
 
         var member = Landing.ScreenOne(model, Landing.Constant(s_small));
 
@@ -167,11 +167,11 @@ public sealed class ReasonCodeTests
 
     // One post of 1 m with results of one situation; all values small.
     private static Way Results(
-        ReasonCode code, CrossSection? section = null, Vector3? axis = null, bool isCase = false, bool onGrid = false, int stations = 2, double moment = 0,
+        ReasonCode code, CrossSection? section = null, Vector3? axis = null, bool isCase = false, bool alongCurve = false, int stations = 2, double moment = 0,
         string[]? omitted = null, string[]? leftOut = null)
     {
         var writer = Landing.Writer(SchemaVersion.Ifc4, leftOut ?? []);
-        int? placement = onGrid ? writer.Add("IFCGRIDPLACEMENT", "$", "$") : null;
+        int? placement = alongCurve ? writer.Add("IFCLINEARPLACEMENT", "$", "$", "$") : null;
         var post = Landing.Add(writer, Landing.Shape(writer, section ?? Landing.PostTube, 1), placement: placement);
         var analysis = writer.StartAnalysis("Landing analysis", Transform3.Identity);
         var line = analysis.CurveMember("A P-1", Vector3.Zero, Vector3.UnitZ, axis ?? Vector3.UnitY);

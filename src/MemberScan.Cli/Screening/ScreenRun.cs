@@ -1,10 +1,8 @@
 using System.Buffers;
-using System.Collections.Immutable;
 using System.Globalization;
 using System.Text;
 using MemberScan.Cli.Files;
 using MemberScan.Foundation.Diagnostics;
-using MemberScan.Inputs.ForcesTables;
 using MemberScan.Inputs.SettingsFiles;
 using MemberScan.Model.Forces;
 using MemberScan.Reporting;
@@ -23,31 +21,25 @@ internal static class ScreenRun
     public static int Execute(Options options, CancellationToken cancellation)
     {
         using var log = new FindingLog(options.Verbose);
-        if (options.Forces.Append(options.Model).Append(options.Settings ?? "-").Append(options.Output ?? "-").Any(string.IsNullOrWhiteSpace))
-            throw new Failure(ExitCodes.Usage, "A path is empty; give the model, and what follows --forces, --settings and --out, a name.");
+        if (options.Output is { } given && string.IsNullOrWhiteSpace(given))
+            throw new Failure(ExitCodes.Usage, "The path after --out is empty; give a folder.");
 
-        // All files are read before any is looked into: a file that cannot be read weighs more than one that is wrong.
-        var (bytes, container) = InputFile.ReadModel(options.Model);
-        var settingsText = options.Settings is { } settingsPath ? InputFile.Read(settingsPath) : null;
-        var tableTexts = options.Forces.Select(path => (Path.GetFileName(path), InputFile.Read(path))).ToList();
-
+        var diagnostics = new DiagnosticList();
+        var read = RunInputs.Read(options.Model, options.Forces, options.Settings, diagnostics, log.Write);
         var names = OutputNames.For(options.Model, options.Output);
         var inputs = new[] { options.Model }.Concat(options.Forces).Concat(options.Settings is { } path ? [path] : []);
         if (names.Clashes(inputs).FirstOrDefault() is { } clash)
             throw new Failure(ExitCodes.Usage, $"The output '{clash}' would be an input of this run; give another folder with --out DIR.");
 
-        var diagnostics = new DiagnosticList();
-        var settings = ReadSettings(options, settingsText, diagnostics, log);
-        var tables = ReadTables(tableTexts, diagnostics, log);
         var (timestamp, isGiven) = Time(options);
 
         var request = new ScreeningRequest
         {
-            ModelName = Path.GetFileName(options.Model),
-            Container = container,
-            ModelBytes = bytes,
-            Settings = settings,
-            Tables = tables,
+            ModelName = read.ModelName,
+            Container = read.Container,
+            ModelBytes = read.Model,
+            Settings = WithKind(read.Settings, options.Kind),
+            Tables = read.Tables,
             Timestamp = timestamp,
             TimestampIsGiven = isGiven,
             Version = Program.Version,
@@ -63,39 +55,12 @@ internal static class ScreenRun
         return ExitCodes.Of(outcome.Record);
     }
 
-    private static Settings ReadSettings(Options options, byte[]? text, DiagnosticList diagnostics, FindingLog log)
+    private static Settings WithKind(Settings settings, string? kind)
     {
-        var settings = Settings.Default;
-        if (text is not null)
-        {
-            settings = SettingsFile.Read(text, Path.GetFileName(options.Settings!), diagnostics)!;
-            if (settings is null)
-            {
-                log.Write(diagnostics);
-                throw new Failure(ExitCodes.Usage, "The settings file is wrong; nothing was read further.");
-            }
-        }
-
-        if (options.Kind is not { } kind) return settings;
+        if (kind is null) return settings;
 
         var forces = settings.Reading.Forces with { KindOfAll = kind == "service" ? SituationKind.Service : SituationKind.Design };
         return settings with { Reading = settings.Reading with { Forces = forces } };
-    }
-
-    private static ImmutableArray<ForcesTable> ReadTables(List<(string Name, byte[] Text)> texts, DiagnosticList diagnostics, FindingLog log)
-    {
-        var tables = ImmutableArray.CreateBuilder<ForcesTable>();
-        var failed = false;
-        foreach (var (name, text) in texts)
-        {
-            if (ForcesTable.Read(text, name, diagnostics) is { } table) tables.Add(table);
-            else failed = true;
-        }
-
-        if (!failed) return tables.ToImmutable();
-
-        log.Write(diagnostics);
-        throw new Failure(ExitCodes.Usage, "A forces table is wrong; nothing was written.");
     }
 
     private static (string Text, bool IsGiven) Time(Options options)

@@ -3,6 +3,7 @@ using System.Globalization;
 using MemberScan.Foundation.Diagnostics;
 using MemberScan.Foundation.Geometry;
 using MemberScan.Ifc.Analysis;
+using MemberScan.Ifc.Bodies;
 using MemberScan.Ifc.Geometry;
 using MemberScan.Ifc.Materials;
 using MemberScan.Ifc.Schema;
@@ -19,7 +20,7 @@ namespace MemberScan.Ifc.Members;
 /// <summary>Finds the candidates of a model and reads each: section, length, axes, material, or the reason why not.</summary>
 internal sealed class MemberReader(
     Instances instances, Relations relations, PlacementReader placements, BodyReader bodies, ProfileReader profiles, MaterialReader materials,
-    AnalyticalMemberReader analytical, SchemaVersion schema, CandidateRules rules, DiagnosticList diagnostics)
+    AnalyticalMemberReader analytical, SchemaVersion schema, CandidateRules rules, RoleGuess roles, DiagnosticList diagnostics)
 {
     private const string NoBar = "no bar-like body of a covered section, and no forces";
 
@@ -117,18 +118,19 @@ internal sealed class MemberReader(
 
         if (relations.HasOpenings(record.Id)) notes = notes.Add("openings are cut out of the element; the gross section is used");
 
+        Finding<MemberAxes> axes = placed.TryGet(out var map, out var why)
+            ? new Finding<MemberAxes>.Found(InProject(body.Axes, map.Value, ref notes), "body")
+            : new Finding<MemberAxes>.Missing(why);
         return new Member
         {
             Key = key,
             Element = element,
             ItemNumber = number,
             ItemCount = count,
-            Role = RoleGuess.Of(element),
+            Role = roles.Of(element, (axes as Finding<MemberAxes>.Found)?.Value, body.Length / body.Profile.LargestExtent),
             Section = new Finding<SectionFinding>.Found(section, body.Source),
             Length = new Finding<double>.Found(body.Length, body.LengthSource),
-            Axes = placed.TryGet(out var map, out var why)
-                ? new Finding<MemberAxes>.Found(InProject(body.Axes, map.Value, ref notes), "body")
-                : new Finding<MemberAxes>.Missing(why),
+            Axes = axes,
             Material = materials.Read(record.Id, section),
             BendRadii = body.BendRadii,
             IsStraight = body.IsStraight,
@@ -154,7 +156,7 @@ internal sealed class MemberReader(
             return member with { Notes = member.Notes.Add($"the profile of the material profile set is not read ({((Finding<ProfileShape>.Missing)sets[0]).Why.Message}); the body's section is used") };
 
         var own = body.Value.Shapes;
-        var different = set.Value.Section.Shapes.Where(s => !own.Any(o => Alike(s, o))).ToImmutableArray();
+        var different = set.Value.Section.Shapes.Where(s => !own.Any(o => SectionAlike.Of(s, o))).ToImmutableArray();
         if (different.IsEmpty) return member with { Section = body with { Source = $"{body.Source}; material profile set agrees" } };
 
         var note = $"body and material profile set differ ({own[0].Designation} against {different[0].Designation}); the less favourable decides";
@@ -164,20 +166,6 @@ internal sealed class MemberReader(
             Section = new Finding<SectionFinding>.Found(both, $"{body.Source}; material profile set, {set.Source}"),
             Material = materials.Read(record.Id, both),
             Notes = member.Notes.Add(note),
-        };
-    }
-
-    private static bool Alike(CrossSection a, CrossSection b)
-    {
-        static bool Near(double p, double q) => Math.Abs(p - q) <= 1e-4 * Math.Max(Math.Abs(p), Math.Abs(q)) + 1e-9;
-        return (a, b) switch
-        {
-            (Round p, Round q) => Near(p.Radius, q.Radius),
-            (Tube p, Tube q) => Near(p.OuterRadius, q.OuterRadius) && Near(p.Wall, q.Wall),
-            (Rectangle p, Rectangle q) => Near(p.Width, q.Width) && Near(p.Depth, q.Depth),
-            (RoundedRectangle p, RoundedRectangle q) => Near(p.Width, q.Width) && Near(p.Depth, q.Depth) && Near(p.CornerRadius, q.CornerRadius),
-            (Box p, Box q) => Near(p.Width, q.Width) && Near(p.Depth, q.Depth) && Near(p.Wall, q.Wall) && Near(p.OuterRadius, q.OuterRadius) && Near(p.InnerRadius, q.InnerRadius),
-            _ => false,
         };
     }
 
@@ -194,7 +182,7 @@ internal sealed class MemberReader(
             Element = element,
             ItemNumber = 0,
             ItemCount = 1,
-            Role = RoleGuess.Of(element),
+            Role = roles.Of(element, lines.Count == 1 ? (lines[0].Axes as Finding<MemberAxes>.Found)?.Value : null, null),
             Section = section,
             Length = lines.Count == 1 ? lines[0].Length : NoLength("the member has no swept body that gives its length"),
             Axes = lines.Count == 1 ? lines[0].Axes : NoAxes("the member has no swept body that gives its axes"),
@@ -264,7 +252,7 @@ internal sealed class MemberReader(
             Element = element,
             ItemNumber = 0,
             ItemCount = 1,
-            Role = RoleGuess.Of(element),
+            Role = roles.Of(element, (line.Axes as Finding<MemberAxes>.Found)?.Value, null),
             Section = section,
             Length = line.Length,
             Axes = line.Axes,

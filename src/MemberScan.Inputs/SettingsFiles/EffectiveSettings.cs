@@ -23,6 +23,9 @@ internal static class EffectiveSettings
         AddLimit("basis.design", "gammaM0", settings.Basis.Design, SettingKeys.DesignCriteria);
         Add("candidates.always", Listed(settings.Reading.Candidates.Always));
         Add("candidates.withBarBodyOrForces", Listed(settings.Reading.Candidates.WithBarBodyOrForces));
+        Add("sections.recogniseMeshes", settings.Reading.RecogniseMeshes ? "true" : "false");
+        if (settings.Reading.Roles.Select(OfRole).SequenceEqual(RoleRule.Default.Select(OfRole))) Add("roles", "the shipped rules");
+        else AddAll("roles", settings.Reading.Roles.Select((rule, i) => ($"[{i + 1}]", OfRole(rule))));
         Add("forces.convention", SettingKeys.Conventions.WordOf(forces.Convention));
         Add("forces.components", SettingKeys.Components.WordOf(forces.Components));
         Add("forces.turnDegrees", Number(forces.TurnDegrees));
@@ -69,6 +72,19 @@ internal static class EffectiveSettings
             (double.IsInfinity(range.UpTo) ? "" : $"up to {Number(range.UpTo)} m ") + $"{Number(range.Yield)} Pa"));
         return $"{Quoted(grade.Name)}, pattern {Quoted(grade.Pattern)}, {Quoted(grade.Standard)}, {yields}, E {Number(grade.Modulus)} Pa, "
             + $"ν {Number(grade.Poisson)}, {(grade.IsSteel ? "steel" : "no steel")}{(grade.FromMemory ? ", from memory" : "")}";
+    }
+
+    private static string OfRole(RoleRule rule)
+    {
+        string[] parts =
+        [
+            Quoted(rule.Role), rule.Classes.IsEmpty ? "" : $"classes {string.Join(' ', rule.Classes.Select(Quoted))}",
+            rule.PredefinedTypes.IsEmpty ? "" : $"predefined types {string.Join(' ', rule.PredefinedTypes.Select(Quoted))}",
+            rule.NamePattern.Length == 0 ? "" : $"name {Quoted(rule.NamePattern)}",
+            rule is { MinSlopeDegrees: <= 0, MaxSlopeDegrees: >= 90 } ? "" : $"slope {Number(rule.MinSlopeDegrees)} to {Number(rule.MaxSlopeDegrees)} degrees",
+            rule.MinSlenderness <= 0 ? "" : $"slenderness from {Number(rule.MinSlenderness)}",
+        ];
+        return string.Join(", ", parts.Where(part => part.Length > 0));
     }
 
     private static string Listed(ImmutableArray<string> names) => names.IsEmpty ? None : string.Join(", ", names);

@@ -10,11 +10,14 @@ namespace MemberScan.Inputs.SettingsFiles;
 /// <summary>The keys of a settings file and the words and ranges of their values; the published schema says the same.</summary>
 internal static class SettingKeys
 {
-    public static readonly ImmutableArray<string> Root = ["$schema", "basis", "candidates", "forces", "units", "materials", "stability", "display"];
+    public static readonly ImmutableArray<string> Root = ["$schema", "basis", "candidates", "sections", "roles", "forces", "units", "materials", "stability", "display"];
     public static readonly ImmutableArray<string> Basis = ["service", "design"];
     public static readonly ImmutableArray<string> Service = ["criterion", "omega"];
     public static readonly ImmutableArray<string> Design = ["criterion", "gammaM0"];
     public static readonly ImmutableArray<string> Candidates = ["always", "withBarBodyOrForces"];
+    public static readonly ImmutableArray<string> Sections = ["recogniseMeshes"];
+    public static readonly ImmutableArray<string> RoleEntry =
+        ["role", "classes", "predefinedTypes", "namePattern", "minSlopeDegrees", "maxSlopeDegrees", "minSlenderness"];
     public static readonly ImmutableArray<string> Forces =
         ["convention", "components", "turnDegrees", "turnDegreesByMember", "missingComponents", "unknownMembers", "kinds"];
     public static readonly ImmutableArray<string> KindEntry = ["pattern", "kind"];
@@ -23,6 +26,8 @@ internal static class SettingKeys
 
     public static readonly (double Least, double Most) Factor = (1, 100);
     public static readonly (double Least, double Most) Turn = (-360, 360);
+    public static readonly (double Least, double Most) Slope = (0, 90);
+    public static readonly (double Least, double Most) Slenderness = (0, 10_000);
     public static readonly (double Least, double Most) LengthFactor = (0.5, 100);
 
     public static readonly WordTable<Criterion> ServiceCriteria =

@@ -31,6 +31,8 @@ internal sealed class SettingsReader(JsonValues values)
                 case "$schema": _ = values.Text(item, key); break;
                 case "basis": ReadBasis(item); break;
                 case "candidates": ReadCandidates(item); break;
+                case "sections": ReadSections(item); break;
+                case "roles": ReadRoles(item); break;
                 case "forces": _reading = _reading with { Forces = new ForceRulesReader(values, _given).Read(item, _reading.Forces) }; break;
                 case "units": ReadUnits(item); break;
                 case "materials": ReadMaterials(item); break;
@@ -111,6 +113,22 @@ internal sealed class SettingsReader(JsonValues values)
     private static string Near(string name, string[] known) => NearestName.Of(name, known) is { } nearest
         ? $"did you mean '{nearest}'?"
         : "write it as the schema does, such as IfcMember";
+
+    private void ReadSections(JsonItem item)
+    {
+        foreach (var (key, _, value) in values.Object(item, "sections", SettingKeys.Sections))
+        {
+            _given.Add($"sections.{key}");
+            _reading = _reading with { RecogniseMeshes = values.Flag(value, $"sections.{key}") ?? false };
+        }
+    }
+
+    // The list takes the place of the shipped rules.
+    private void ReadRoles(JsonItem list)
+    {
+        _given.Add("roles");
+        _reading = _reading with { Roles = new RoleRulesReader(values).Read(list) };
+    }
 
     private void ReadUnits(JsonItem item)
     {

@@ -12,6 +12,12 @@ public sealed record ReadingRules
     /// <summary>How forces are read.</summary>
     public ForceRules Forces { get; init; } = new();
 
+    /// <summary>Whether meshes that are one straight prism of a covered section are recognised; otherwise they are not checked.</summary>
+    public bool RecogniseMeshes { get; init; }
+
+    /// <summary>How the role of a member is guessed; the first rule that fits wins.</summary>
+    public ImmutableArray<RoleRule> Roles { get; init; } = RoleRule.Default;
+
     /// <summary>Units that the settings name for unit types missing in the model: unit type → factor to SI.</summary>
     public FrozenDictionary<string, double> MissingUnits { get; init; } = FrozenDictionary<string, double>.Empty;
 

@@ -82,14 +82,16 @@ internal static class Derivation
         (Box, ShearModel.Elementary) => "V·Q/(I·2t) along the wall's middle line, zero at the axis of symmetry, each axis apart",
         (Round, _) => "Saint-Venant flexure, closed form (Timoshenko and Goodier)",
         (Tube, _) => "Saint-Venant flexure, closed form",
-        _ => "Saint-Venant flexure, series (Timoshenko and Goodier)",
+        (Rectangle, _) => "Saint-Venant flexure, series (Timoshenko and Goodier)",
+        _ => "Saint-Venant flexure, numerical field (finite elements)",
     };
 
-    private static string TorsionRule(StressField field) => field.Section switch
+    private static string TorsionRule(StressField field) => (field.Section, field.Model) switch
     {
-        Round or Tube => "T·r/J, tangential",
-        Rectangle => "Saint-Venant torsion, series (Timoshenko and Goodier)",
-        _ => "T/Wt, along the wall",
+        (Round or Tube, _) => "T·r/J, tangential",
+        (Rectangle, _) => "Saint-Venant torsion, series (Timoshenko and Goodier)",
+        (Box, ShearModel.Elementary) => "T/Wt, along the wall",
+        _ => "Saint-Venant torsion, numerical field (finite elements)",
     };
 
     private static string Text(FormattableString text) => text.ToString(CultureInfo.InvariantCulture);

@@ -19,6 +19,8 @@ public sealed class SettingsSchemaTests
         Assert.Equal(SettingKeys.Service, Keys("basis", "service"));
         Assert.Equal(SettingKeys.Design, Keys("basis", "design"));
         Assert.Equal(SettingKeys.Candidates, Keys("candidates"));
+        Assert.Equal(SettingKeys.Sections, Keys("sections"));
+        Assert.Equal(SettingKeys.RoleEntry, Keys("roles"));
         Assert.Equal(SettingKeys.Forces, Keys("forces"));
         Assert.Equal(SettingKeys.KindEntry, Keys("forces", "kinds"));
         Assert.Equal(SettingKeys.UnitTypes, Keys("units"));
@@ -52,6 +54,10 @@ public sealed class SettingsSchemaTests
         Assert.Equal((0, GradeReader.LargestPoisson), Range(At("materials", "poisson")));
         Assert.Equal((0, GradeReader.LargestPoisson), Range(At("materials", "grades", "poisson")));
         Assert.Equal(SettingKeys.LengthFactor, Range(At("stability", "lengthFactor")));
+        Assert.Equal(SettingKeys.Slope, Range(At("roles", "minSlopeDegrees")));
+        Assert.Equal(SettingKeys.Slope, Range(At("roles", "maxSlopeDegrees")));
+        Assert.Equal(SettingKeys.Slenderness, Range(At("roles", "minSlenderness")));
+        Assert.Equal(RoleRulesReader.MostRules, At("roles").GetProperty("maxItems").GetInt32());
     }
 
     [Fact]

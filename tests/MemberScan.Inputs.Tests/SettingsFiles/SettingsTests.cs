@@ -23,6 +23,9 @@ public sealed class SettingsTests
         Assert.Empty(settings.Reading.Forces.TurnDegreesByMember);
         Assert.Empty(settings.Reading.MissingUnits);
         Assert.Equal(GradeTable.Shipped.Grades, settings.Reading.Grades);
+        Assert.Equal("the shipped rules", Value(settings, "roles"));
+        Assert.Equal(rules.Roles.Length, settings.Reading.Roles.Length);
+        Assert.False(settings.Reading.RecogniseMeshes);
         Assert.Equal(rules.DefaultPoisson, settings.Reading.DefaultPoisson);
         Assert.Equal((2.0, DisplayUnits.Si), (settings.LengthFactor, settings.Display));
     }
@@ -38,6 +41,7 @@ public sealed class SettingsTests
             "basis.design.criterion=en-1993-1-1-elastic", "basis.design.gammaM0=1",
             "candidates.always=IfcBeam, IfcColumn, IfcMember, IfcRailing, IfcStructuralCurveMember",
             "candidates.withBarBodyOrForces=IfcBuildingElementProxy, IfcDiscreteAccessory, IfcMechanicalFastener, IfcReinforcingBar, IfcTendon, IfcFlowSegment, IfcPipeSegment, IfcCableSegment",
+            "sections.recogniseMeshes=false", "roles=the shipped rules",
             "forces.convention=positive-face", "forces.components=as-flagged", "forces.turnDegrees=0", "forces.turnDegreesByMember=none",
             "forces.missingComponents=refuse", "forces.unknownMembers=refuse", "forces.kinds=none", "forces.kindOfAll=none",
             "units.LENGTHUNIT=none", "units.FORCEUNIT=none", "units.PRESSUREUNIT=none", "units.TORQUEUNIT=none", "units.MODULUSOFELASTICITYUNIT=none",
@@ -78,6 +82,39 @@ public sealed class SettingsTests
 
         Assert.Equal("\"X\", pattern \"S\\\"9\", \"own\", up to 0.016 m 235000000 Pa, 225000000 Pa, E 210000000000 Pa, ν 0.3, steel, from memory",
             Value(settings, "materials.grades[1]"));
+    }
+
+    [Fact]
+    public void Roles_of_the_settings_take_the_place_of_the_shipped_ones()
+    {
+        var settings = Read("""
+            {"sections": {"recogniseMeshes": true}, "roles": [
+             {"role": "post", "classes": ["IfcRailing"], "minSlopeDegrees": 60, "minSlenderness": 5}, {"role": "gangway rail", "predefinedTypes": ["HANDRAIL"], "namePattern": "gangway|landgang"}]}
+            """);
+
+        Assert.True(settings.Reading.RecogniseMeshes);
+        Assert.Equal("true", Value(settings, "sections.recogniseMeshes"));
+        Assert.Equal("\"post\", classes \"IfcRailing\", slope 60 to 90 degrees, slenderness from 5", Value(settings, "roles[1]"));
+        Assert.Equal("\"gangway rail\", predefined types \"HANDRAIL\", name \"gangway|landgang\"", Value(settings, "roles[2]"));
+        Assert.Equal((60, 90, 5), (settings.Reading.Roles[0].MinSlopeDegrees, settings.Reading.Roles[0].MaxSlopeDegrees, settings.Reading.Roles[0].MinSlenderness));
+    }
+
+    [Theory]
+    [InlineData("""{"roles": [{"classes": ["IfcBeam"]}]}""", "lacks the key 'role'")]
+    [InlineData("""{"roles": [{"role": "post", "namePatern": "x"}]}""", "namePattern")]
+    [InlineData("""{"roles": [{"role": "post", "namePattern": "("}]}""", "roles[1].namePattern")]
+    [InlineData("""{"roles": [{"role": "post", "minSlopeDegrees": 91}]}""", "from 0 to 90")]
+    [InlineData("""{"roles": [{"role": "post", "minSlopeDegrees": 60, "maxSlopeDegrees": 30}]}""", "fits no slope")]
+    [InlineData("""{"roles": [{"role": "<b>"}]}""", "a word of letters")]
+    [InlineData("""{"roles": {}}""", "a list in square brackets")]
+    [InlineData("""{"sections": {"recogniseMeshes": "yes"}}""", "give true or false")]
+    [InlineData("""{"sections": {"recognizeMeshes": true}}""", "recogniseMeshes")]
+    public void Wrong_roles_and_section_rules_are_refused_with_the_remedy(string text, string words)
+    {
+        var diagnostics = new DiagnosticList();
+
+        Assert.Null(SettingsFile.Read(Encoding.UTF8.GetBytes(text), "s.json", diagnostics));
+        Assert.Contains(diagnostics.Items, d => d.Message.Contains(words, StringComparison.Ordinal));
     }
 
     [Fact]

@@ -52,6 +52,7 @@ public sealed class ModelWriter
         Profiles = new ProfileWriter(this);
         Materials = new MaterialWriter(this);
         Bodies = new BodyWriter(this);
+        Outlines = new OutlineWriter(this);
     }
 
     /// <summary>Schema release.</summary>
@@ -77,6 +78,9 @@ public sealed class ModelWriter
 
     /// <summary>Writes solids, mapped items and shapes.</summary>
     public BodyWriter Bodies { get; }
+
+    /// <summary>Writes drawn and derived profiles.</summary>
+    public OutlineWriter Outlines { get; }
 
     /// <summary>Adds an instance with its parameters already spelled; gives its number.</summary>
     public int Add(string keyword, params ReadOnlySpan<string> parameters)

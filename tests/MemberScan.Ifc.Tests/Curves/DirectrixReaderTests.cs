@@ -1,9 +1,9 @@
 using MemberScan.Foundation.Geometry;
-using MemberScan.Ifc.Sections;
+using MemberScan.Ifc.Curves;
 using MemberScan.Model.Members;
 using MemberScan.Model.Verdicts;
 
-namespace MemberScan.Ifc.Tests.Sections;
+namespace MemberScan.Ifc.Tests.Curves;
 
 /// <summary>Lengths and bend radii by hand; parameters of curves as in the IFC documentation (a polyline counts its segments, a circle its angle in the plane-angle unit).</summary>
 public sealed class DirectrixReaderTests
@@ -233,7 +233,7 @@ public sealed class DirectrixReaderTests
         var member = Disk(model =>
         {
             var (a, b) = (model.Point(Vector3.Zero), model.Point(Vector3.UnitX));
-            return (model.Add("IFCPOLYLINE", Spelling.References(Enumerable.Range(0, DirectrixReader.MaxPieces + 1).Select(i => i % 2 == 0 ? a : b))), "$", "$");
+            return (model.Add("IFCPOLYLINE", Spelling.References(Enumerable.Range(0, CurveReader.MaxPieces + 1).Select(i => i % 2 == 0 ? a : b))), "$", "$");
         });
 
         Assert.Equal(ReasonCode.LengthAmbiguous, Reading.Why(member.Section).Code);

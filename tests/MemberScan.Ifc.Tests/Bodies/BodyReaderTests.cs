@@ -1,9 +1,10 @@
 using MemberScan.Foundation.Geometry;
-using MemberScan.Ifc.Sections;
+using MemberScan.Ifc.Bodies;
+using MemberScan.Ifc.Tests.Sections;
 using MemberScan.Mechanics.Sections;
 using MemberScan.Model.Verdicts;
 
-namespace MemberScan.Ifc.Tests.Sections;
+namespace MemberScan.Ifc.Tests.Bodies;
 
 public sealed class BodyReaderTests
 {
@@ -183,17 +184,17 @@ public sealed class BodyReaderTests
     }
 
     [Fact]
-    public void A_union_and_a_primitive_are_not_covered()
+    public void A_union_and_a_sphere_are_not_covered()
     {
         var model = Bars.Model(Release.Ifc4);
         var solid = model.Bodies.Extrusion(model.Profiles.Of(Bars.Rail), 2);
         Bars.Add(model, "union", model.Add("IFCBOOLEANRESULT", ".UNION.", Bars.Ref(solid), Bars.Ref(solid)));
-        Bars.Add(model, "block", model.Add("IFCCSGSOLID", Bars.Ref(model.Add("IFCBLOCK", Bars.Ref(model.AxisPlacement(Transform3.Identity)), "1.", "1.", "9."))));
+        Bars.Add(model, "sphere", model.Add("IFCCSGSOLID", Bars.Ref(model.Add("IFCSPHERE", Bars.Ref(model.AxisPlacement(Transform3.Identity)), "9."))));
 
         var reading = Reading.Of(model);
 
         Assert.Equal(ReasonCode.SectionNotCovered, Reading.Why(reading.Named("union").Section).Code);
-        Assert.Equal(ReasonCode.SectionNotCovered, Reading.Why(reading.Named("block").Section).Code);
+        Assert.Equal(ReasonCode.SectionNotCovered, Reading.Why(reading.Named("sphere").Section).Code);
     }
 
     [Theory]

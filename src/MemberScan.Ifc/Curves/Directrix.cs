@@ -1,7 +1,7 @@
 using System.Collections.Immutable;
 using MemberScan.Foundation.Geometry;
 
-namespace MemberScan.Ifc.Sections;
+namespace MemberScan.Ifc.Curves;
 
 /// <summary>The centre line of a swept disk.</summary>
 /// <param name="Start">Start [m].</param>

@@ -1,0 +1,28 @@
+using System.CommandLine;
+
+namespace MemberScan.Cli.Members;
+
+/// <summary><c>memberscan members MODEL</c>: what is in a model and how ready it is.</summary>
+internal static class MembersCommand
+{
+    /// <summary>Builds the command.</summary>
+    public static Command Build()
+    {
+        var model = new Argument<string>("MODEL") { Description = "The model: .ifc, .ifczip or .gz (IFC2X3, IFC4, IFC4X3)." };
+        var forces = new Option<string[]>("--forces") { Description = "A forces table (CSV with units in its header); may be given several times.", HelpName = "FILE" };
+        var settings = new Option<string?>("--settings") { Description = "A settings file (JSON with comments).", HelpName = "FILE" };
+        var csv = new Option<string?>("--csv") { Description = "Also write the table as CSV.", HelpName = "FILE" };
+        var json = new Option<string?>("--json") { Description = "Also write the table as JSON.", HelpName = "FILE" };
+        var verbose = new Option<bool>("--verbose") { Description = "Log every finding, notes included." };
+
+        var command = new Command("members", "List every candidate with section, material, length and forces found, and what is missing.")
+        {
+            model, forces, settings, csv, json, verbose,
+        };
+        command.SetAction((parsed, cancellation) => Task.FromResult(MembersRun.Execute(
+            new MembersRun.Options(
+                parsed.GetValue(model)!, parsed.GetValue(forces) ?? [], parsed.GetValue(settings), parsed.GetValue(csv), parsed.GetValue(json), parsed.GetValue(verbose)),
+            Console.Out, Console.IsOutputRedirected, cancellation)));
+        return command;
+    }
+}

@@ -1,0 +1,73 @@
+using MemberScan.Cli.Files;
+using MemberScan.Cli.Screening;
+using MemberScan.Foundation.Diagnostics;
+using MemberScan.Screening;
+using MemberScan.Screening.Readiness;
+
+namespace MemberScan.Cli.Members;
+
+/// <summary>One run of the members command.</summary>
+internal static class MembersRun
+{
+    /// <summary>What was asked for on the command line.</summary>
+    public sealed record Options(string Model, IReadOnlyList<string> Forces, string? Settings, string? Csv, string? Json, bool Verbose);
+
+    /// <summary>Runs and returns the exit code: 0 all ready, 2 something missing or no candidate, 3 not read to its end.</summary>
+    /// <param name="options">What was asked for.</param>
+    /// <param name="output">Where the table goes.</param>
+    /// <param name="plain">Whether to write plain lines instead of a table for a terminal.</param>
+    /// <param name="cancellation">Stops the run.</param>
+    public static int Execute(Options options, TextWriter output, bool plain, CancellationToken cancellation)
+    {
+        string[] inputs = [options.Model, .. options.Forces, .. options.Settings is { } path ? new[] { path } : []];
+        string[] outputs = [.. new[] { options.Csv, options.Json }.OfType<string>()];
+        if (outputs.FirstOrDefault(o => inputs.Any(i => Path.GetFullPath(i) == Path.GetFullPath(o))) is { } clash)
+            throw new Failure(ExitCodes.Usage, $"The output '{clash}' would be an input of this run; give another file.");
+        if (outputs.Length == 2 && Path.GetFullPath(outputs[0]) == Path.GetFullPath(outputs[1]))
+            throw new Failure(ExitCodes.Usage, "--csv and --json name the same file; give two.");
+
+        using var log = new FindingLog(options.Verbose);
+        var diagnostics = new DiagnosticList();
+        var read = RunInputs.Read(options.Model, options.Forces, options.Settings, diagnostics, log.Write);
+        var request = new ScreeningRequest
+        {
+            ModelName = read.ModelName,
+            Container = read.Container,
+            ModelBytes = read.Model,
+            Settings = read.Settings,
+            Tables = read.Tables,
+            Timestamp = "",
+            Version = Program.Version,
+        };
+        ReadinessRecord? record;
+        using (var progress = ProgressDisplay.Start()) record = Inventory.Take(request, diagnostics, progress, cancellation);
+        log.Write(diagnostics);
+        if (record is null) throw new Failure(ExitCodes.Usage, "The forces table does not fit the model; nothing was written.");
+
+        cancellation.ThrowIfCancellationRequested();
+        Write(options, record);
+        MembersPrint.Write(output, record, plain);
+        foreach (var file in outputs) output.WriteLine($"wrote {file}");
+        return Code(record);
+    }
+
+    private static int Code(ReadinessRecord record) =>
+        !record.Model.ReadToEnd ? ExitCodes.NotReadToEnd
+        : record.Members.IsEmpty || record.Ready < record.Members.Length || record.HasDamage ? ExitCodes.NotChecked
+        : ExitCodes.WithinLimit;
+
+    private static void Write(Options options, ReadinessRecord record)
+    {
+        try
+        {
+            using var files = new OutputSet();
+            if (options.Csv is { } csv) files.Add(csv, ReadinessTable.Write(record));
+            if (options.Json is { } json) files.Add(json, ReadinessJson.Write(record));
+            files.Commit();
+        }
+        catch (Exception e) when (e is IOException or UnauthorizedAccessException)
+        {
+            throw new Failure(ExitCodes.InputOutput, $"The table cannot be written: {e.Message} Nothing was changed; give another file.", e);
+        }
+    }
+}
