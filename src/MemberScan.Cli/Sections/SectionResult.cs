@@ -16,20 +16,32 @@ internal sealed record SectionResult(
     [property: JsonPropertyName("governing")] SectionResult.Measures Governing,
     [property: JsonPropertyName("closure")] SectionResult.ClosureValues Closure)
 {
+    /// <summary>Number of the situation, from 1, that the result is for; only where several are given.</summary>
+    [JsonPropertyName("situation"), JsonIgnore(Condition = JsonIgnoreCondition.WhenWritingNull)]
+    public int? Situation { get; init; }
+
+    /// <summary>All situations, only where several are given.</summary>
+    [JsonPropertyName("situations"), JsonIgnore(Condition = JsonIgnoreCondition.WhenWritingNull)]
+    public IReadOnlyList<SituationLine>? Situations { get; init; }
+
+    /// <summary>The other shear model, where it is asked for.</summary>
+    [JsonPropertyName("comparison"), JsonIgnore(Condition = JsonIgnoreCondition.WhenWritingNull)]
+    public OtherModel? Comparison { get; init; }
+
+    /// <summary>Moments over the plastic moments, where they are asked for.</summary>
+    [JsonPropertyName("plastic"), JsonIgnore(Condition = JsonIgnoreCondition.WhenWritingNull)]
+    public PlasticShare? Plastic { get; init; }
+
+    /// <summary>Smallest sizes that would pass, where they are asked for.</summary>
+    [JsonPropertyName("smallestSize"), JsonIgnore(Condition = JsonIgnoreCondition.WhenWritingNull)]
+    public IReadOnlyList<SmallestSize>? SmallestSize { get; init; }
+
     /// <summary>The result of a field under given forces.</summary>
     public static SectionResult Of(StressField field, in SectionForces forces, IReadOnlyList<Point> points, double? yield)
     {
         var p = field.Properties;
         var f = forces;
-        Measure Most(StressMeasure measure)
-        {
-            var point = field.Govern(f, measure);
-            return new Measure(point.Value, point.Y, point.Z, point.Place);
-        }
-
-        var governing = new Measures(
-            Most(StressMeasure.VonMises), Most(StressMeasure.Tresca), Most(StressMeasure.AbsoluteSigma), Most(StressMeasure.Tau),
-            Most(StressMeasure.Sigma1), Most(StressMeasure.Sigma3));
+        var governing = Measures.Of(field, forces);
         var c = field.Closure;
         return new SectionResult(
             field.Section.Designation,
@@ -89,7 +101,47 @@ internal sealed record SectionResult(
         [property: JsonPropertyName("absSigma")] Measure AbsSigma,
         [property: JsonPropertyName("tau")] Measure Tau,
         [property: JsonPropertyName("sigma1")] Measure Sigma1,
-        [property: JsonPropertyName("sigma3")] Measure Sigma3);
+        [property: JsonPropertyName("sigma3")] Measure Sigma3)
+    {
+        public static Measures Of(StressField field, in SectionForces forces)
+        {
+            var f = forces;
+            Measure Most(StressMeasure measure)
+            {
+                var point = field.Govern(f, measure);
+                return new Measure(point.Value, point.Y, point.Z, point.Place);
+            }
+
+            return new Measures(
+                Most(StressMeasure.VonMises), Most(StressMeasure.Tresca), Most(StressMeasure.AbsoluteSigma), Most(StressMeasure.Tau),
+                Most(StressMeasure.Sigma1), Most(StressMeasure.Sigma3));
+        }
+    }
+
+    /// <summary>One situation of several.</summary>
+    internal sealed record SituationLine(
+        [property: JsonPropertyName("number")] int Number,
+        [property: JsonPropertyName("forces")] Forces6 Forces,
+        [property: JsonPropertyName("vonMises")] Measure VonMises,
+        [property: JsonPropertyName("utilization"), JsonIgnore(Condition = JsonIgnoreCondition.WhenWritingNull)] double? Utilization);
+
+    /// <summary>The other shear model beside the one of the result.</summary>
+    /// <param name="Shear">Its name.</param>
+    /// <param name="Governing">Its largest values.</param>
+    /// <param name="Difference">Its largest von Mises stress over that of the result, less 1 [-].</param>
+    /// <param name="FilletVonMises">Largest von Mises stress at rounded re-entrant corners of the elasticity model, which does not decide [Pa].</param>
+    /// <param name="StressChange">Largest change of a shear stress at the last refinement of a numerical field [-].</param>
+    internal sealed record OtherModel(
+        [property: JsonPropertyName("shear")] string Shear,
+        [property: JsonPropertyName("governing")] Measures Governing,
+        [property: JsonPropertyName("difference")] double Difference,
+        [property: JsonPropertyName("filletVonMises")] double? FilletVonMises,
+        [property: JsonPropertyName("stressChange")] double? StressChange);
+
+    /// <summary>Moments over the plastic moments Wpl·fy, magnitudes [-]; information beside an elastic value.</summary>
+    internal sealed record PlasticShare(
+        [property: JsonPropertyName("My")] double My,
+        [property: JsonPropertyName("Mz")] double Mz);
 
     /// <summary>A largest value and its place.</summary>
     internal sealed record Measure(

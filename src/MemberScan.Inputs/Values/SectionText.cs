@@ -1,6 +1,7 @@
 using System.Collections.Immutable;
 using System.Diagnostics.CodeAnalysis;
 using MemberScan.Foundation.Units;
+using MemberScan.Mechanics.Profiles;
 using MemberScan.Mechanics.Sections;
 
 namespace MemberScan.Inputs.Values;
@@ -8,11 +9,12 @@ namespace MemberScan.Inputs.Values;
 /// <summary>Cross-sections as people write them, such as <c>tube 48.3x3.2 mm</c>.</summary>
 /// <remarks>
 /// <c>round 25 mm</c> (diameter), <c>tube 48.3x3.2 mm</c> (outer diameter × wall), <c>rectangle 40x80 mm</c> (y × z), <c>rectangle 60x100 mm r 15</c>,
-/// <c>box 50x30x3 mm</c> (y × z × wall, sharp), <c>box 50x30x3 mm ro 6 ri 3</c>. A length without a unit has that of the last dimension.
+/// <c>box 50x30x3 mm</c> (y × z × wall, sharp), <c>box 50x30x3 mm ro 6 ri 3</c>; <c>L 100x80x8 mm</c> (z × y × legs),
+/// <c>I 200x100x5.6x8.5 mm r 12</c>, U and T alike (depth along z × width along y × web × flange, root radius). A length without a unit has that of the last dimension.
 /// </remarks>
 public static class SectionText
 {
-    private static readonly ImmutableArray<string> s_kinds = ["round", "tube", "rectangle", "box"];
+    private static readonly ImmutableArray<string> s_kinds = ["round", "tube", "rectangle", "box", "I", "L", "U", "T"];
 
     /// <summary>Reads a section.</summary>
     /// <param name="text">The text; at most 256 characters.</param>
@@ -29,7 +31,8 @@ public static class SectionText
         }
 
         var scanner = new ValueScanner(text);
-        var kind = scanner.Word().ToLowerInvariant();
+        var kind = scanner.Word();
+        kind = kind.Length == 1 ? kind.ToUpperInvariant() : kind.ToLowerInvariant();
         if (!s_kinds.Contains(kind))
         {
             error = kind.Length == 0
@@ -66,7 +69,7 @@ public static class SectionText
 
         if (dimensions.Count != Count(kind))
         {
-            error = $"a {kind} has {Meaning(kind)}, but {dimensions.Count} {(dimensions.Count == 1 ? "is" : "are")} given";
+            error = $"{(kind is "I" or "L" ? "an" : "a")} {kind} has {Meaning(kind)}, but {dimensions.Count} {(dimensions.Count == 1 ? "is" : "are")} given";
             return false;
         }
 
@@ -134,16 +137,19 @@ public static class SectionText
     {
         "rectangle" => ["r"],
         "box" => ["ro", "ri"],
+        "I" or "L" or "U" or "T" => ["r"],
         _ => [],
     };
 
-    private static int Count(string kind) => kind switch { "round" => 1, "box" => 3, _ => 2 };
+    private static int Count(string kind) => kind switch { "round" => 1, "box" or "L" => 3, "I" or "U" or "T" => 4, _ => 2 };
 
     private static string Meaning(string kind) => kind switch
     {
         "round" => "1 dimension (the diameter)",
         "tube" => "2 dimensions (outer diameter x wall)",
         "rectangle" => "2 dimensions (width along y x depth along z)",
+        "L" => "3 dimensions (leg along z x leg along y x thickness)",
+        "I" or "U" or "T" => "4 dimensions (depth along z x width along y x web x flange)",
         _ => "3 dimensions (width along y x depth along z x wall)",
     };
 
@@ -153,6 +159,7 @@ public static class SectionText
         "tube" => Tube.Fault(d[0] / 2, d[1]),
         "rectangle" when radii.TryGetValue("r", out var radius) => RoundedRectangle.Fault(d[0], d[1], radius),
         "rectangle" => Rectangle.Fault(d[0], d[1]),
+        "I" or "L" or "U" or "T" => OpenProfile.Fault(Shape(kind), d[0], d[1], d[2], d[^1], radii.GetValueOrDefault("r")),
         _ => Box.Fault(d[0], d[1], d[2], radii.GetValueOrDefault("ro"), radii.GetValueOrDefault("ri")),
     };
 
@@ -162,6 +169,9 @@ public static class SectionText
         "tube" => new Tube(d[0] / 2, d[1]),
         "rectangle" when radii.TryGetValue("r", out var radius) => new RoundedRectangle(d[0], d[1], radius),
         "rectangle" => new Rectangle(d[0], d[1]),
+        "I" or "L" or "U" or "T" => new OpenProfile(Shape(kind), d[0], d[1], d[2], d[^1], radii.GetValueOrDefault("r")),
         _ => new Box(d[0], d[1], d[2], radii.GetValueOrDefault("ro"), radii.GetValueOrDefault("ri")),
     };
+
+    private static OpenShape Shape(string kind) => kind switch { "I" => OpenShape.I, "L" => OpenShape.L, "U" => OpenShape.U, _ => OpenShape.T };
 }

@@ -1,5 +1,5 @@
-using MemberScan.Mechanics.Meshes;
 using MemberScan.Mechanics.Forces;
+using MemberScan.Mechanics.Meshes;
 using MemberScan.Mechanics.Sections;
 
 namespace MemberScan.Mechanics.Outlines;
@@ -37,7 +37,7 @@ internal sealed class BoxFieldOutline : Outline
         (_section, _whole) = (section, new BoxOutline(section));
         (_halfWidth, _halfDepth) = (section.Width / 2, section.Depth / 2);
         (_holeY, _holeZ) = (_halfWidth - section.Wall, _halfDepth - section.Wall);
-        _reach = ReentrantZone.Reach * section.Wall;
+        _reach = ReentrantZone.ReachOf(section);
         Edges = new Chart(s_edges, (p, q) => OnEdgePiece((int)q, p));
         Inside = new Chart(s_inside, AcrossTheWall);
     }
@@ -91,7 +91,7 @@ internal sealed class BoxFieldOutline : Outline
         var overTop = piece < Caps + 4;
         var straight = (overTop ? _holeY : _holeZ) - radius;
         // From the inner side, or from the axis where the zones of two corners meet, to square over the arc's end.
-        var from = Math.Acos(Math.Min(1, straight / _reach));
+        var from = straight < _reach ? Math.Acos(straight / _reach) : 0;
         var (sin, cos) = Math.SinCos(from + (Math.PI / 2 - from) * 0.5 * (1 + Math.Sin(p)));
         var (along, rise) = (Math.Max(0, straight - _reach * cos), _reach * sin);
         return overTop ? (signY * along, signZ * (_holeZ + rise)) : (signY * (_holeY + rise), signZ * along);

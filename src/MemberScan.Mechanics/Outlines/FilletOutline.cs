@@ -1,21 +1,28 @@
 using MemberScan.Mechanics.Forces;
+using MemberScan.Mechanics.Meshes;
 using MemberScan.Mechanics.Sections;
 
 namespace MemberScan.Mechanics.Outlines;
 
-/// <summary>The inner corners of a rectangular tube alone, each a fillet of radius above zero: where local peaks stand.</summary>
+/// <summary>The rounded re-entrant corners of a section alone: where local peaks stand.</summary>
 internal sealed class FilletOutline : Outline
 {
-    private static readonly Lattice s_arcs = Lattice.Curves(4, RoundedCorner.NodesPerPiece, ring: false);
-    private readonly BoxOutline _whole;
+    private readonly Outline _whole;
 
-    /// <summary>The fillets of a box.</summary>
-    public FilletOutline(Box section)
+    /// <summary>The given arcs of a section.</summary>
+    public FilletOutline(CrossSection section, Outline whole, EdgeCurve[] arcs)
         : base(section)
     {
-        _whole = new BoxOutline(section);
-        var (holeY, holeZ, radius) = (section.Width / 2 - section.Wall, section.Depth / 2 - section.Wall, section.InnerRadius);
-        Edges = new Chart(s_arcs, (p, corner) => RoundedCorner.OnPiece(holeY, holeZ, radius, 0, RoundedCorner.Sides + (int)corner, p));
+        _whole = whole;
+        Edges = new Chart(
+            Lattice.Curves(arcs.Length, RoundedCorner.NodesPerPiece, ring: false), (p, arc) => arcs[(int)arc].At(0.5 * (1 + Math.Sin(p))));
+    }
+
+    /// <summary>The arcs inside the corners of a box.</summary>
+    public static EdgeCurve[] ArcsOf(Box box)
+    {
+        var (y, z) = (box.Width / 2 - box.Wall - box.InnerRadius, box.Depth / 2 - box.Wall - box.InnerRadius);
+        return [.. RoundedCorner.Quadrants.Select((sign, i) => EdgeCurve.Arc((sign.Y * y, sign.Z * z), box.InnerRadius, i * Math.PI / 2, (i + 1) * Math.PI / 2))];
     }
 
     /// <inheritdoc/>

@@ -73,18 +73,17 @@ internal sealed class RectangleOutline : Outline
 
         if (_radius == 0) yield break;
 
-        foreach (var (u, wu) in GaussLegendre.UnitInterval)
+        foreach (var (v, wv) in GaussLegendre.UnitInterval)
         {
-            foreach (var (v, wv) in GaussLegendre.UnitInterval)
+            foreach (var (signY, signZ) in RoundedCorner.Quadrants)
             {
-                foreach (var (signY, signZ) in RoundedCorner.Quadrants)
+                foreach (var (y, dy) in Panels(flatY, _halfDepth)) yield return (signY * y, signZ * (flatZ + v * _radius), dy * wv * _radius);
+                foreach (var (z, dz) in Panels(flatZ, _halfWidth)) yield return (signY * (flatY + v * _radius), signZ * z, dz * wv * _radius);
+
+                // Quarter circle in strips: angle from the corner's horizontal, so that the strip's length is smooth.
+                var (sin, cos) = Math.SinCos(v * Math.PI / 2);
+                foreach (var (u, wu) in GaussLegendre.UnitInterval)
                 {
-
-                    yield return (signY * (flatY + u * _radius), signZ * v * flatZ, wu * wv * _radius * flatZ);
-                    yield return (signY * u * flatY, signZ * (flatZ + v * _radius), wu * wv * flatY * _radius);
-
-                    // Quarter circle in strips: angle from the corner's horizontal, so that the strip's length is smooth.
-                    var (sin, cos) = Math.SinCos(v * Math.PI / 2);
                     yield return (
                         signY * (flatY + u * _radius * cos), signZ * (flatZ + _radius * sin),
                         wu * wv * Math.PI / 2 * _radius * _radius * cos * cos);

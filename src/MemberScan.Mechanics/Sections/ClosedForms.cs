@@ -49,7 +49,7 @@ internal static class ClosedForms
         return DoublySymmetric(
             b * h - 4 * corner.Area, iy, iz, 2 * iy / h, 2 * iz / b,
             b * h * h / 4 - corner.FourMoment(h), h * b * b / 4 - corner.FourMoment(b),
-            torsion.J, Numerical(torsion.Change), torsion.Wt, null);
+            torsion?.J, Numerical(torsion), torsion?.Wt, null);
     }
 
     /// <remarks>Source: EN 10210-2 and EN 10219-2, annex of section properties, with independent radii (from memory).</remarks>
@@ -72,12 +72,14 @@ internal static class ClosedForms
             2 * t * (b + h - 2 * t) - 4 * outer.Area + 4 * inner.Area, iy, iz, 2 * iy / h, 2 * iz / b,
             (b * h * h - bi * hi * hi) / 4 - outer.FourMoment(h) + inner.FourMoment(hi),
             (h * b * b - hi * bi * bi) / 4 - outer.FourMoment(b) + inner.FourMoment(bi),
-            torsion.J, Numerical(torsion.Change), it / (t + k / t), 4 * enclosed * enclosed * t / length) with
+            torsion?.J, Numerical(torsion), it / (t + k / t), 4 * enclosed * enclosed * t / length) with
         { JAnnex = it };
     }
 
-    private static string Numerical(double change) => string.Create(
-        CultureInfo.InvariantCulture, $"numerical field, change at the last refinement {change:0.0E+0}");
+    /// <summary>Where a torsion constant comes from, in words.</summary>
+    public static string Numerical(TorsionConstants? torsion) => torsion is null
+        ? "not available: the dimensions are too far apart for a numerical field"
+        : string.Create(CultureInfo.InvariantCulture, $"numerical field, change at the last refinement {torsion.Change:0.0E+0}");
 
     private static SectionProperties DoublySymmetric(
         double area, double iy, double iz, double welY, double welZ, double wplY, double wplZ,

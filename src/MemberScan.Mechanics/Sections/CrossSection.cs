@@ -2,7 +2,8 @@ namespace MemberScan.Mechanics.Sections;
 
 /// <summary>A cross-section as a value: its kind and dimensions, centred on its centroid, y across and z up.</summary>
 /// <remarks>
-/// The kinds are <see cref="Round"/>, <see cref="Tube"/>, <see cref="Rectangle"/>, <see cref="RoundedRectangle"/> and <see cref="Box"/>.
+/// The kinds are <see cref="Round"/>, <see cref="Tube"/>, <see cref="Rectangle"/>, <see cref="RoundedRectangle"/>, <see cref="Box"/>,
+/// <see cref="Profiles.OpenProfile"/> and <see cref="Profiles.OutlineSection"/>.
 /// Each has a static <c>Fault</c> that says what is wrong with dimensions before a value is made; the constructor throws on the same.
 /// </remarks>
 public abstract record CrossSection
@@ -11,7 +12,7 @@ public abstract record CrossSection
     {
     }
 
-    /// <summary>The kind in one word: round, tube, rectangle, rounded rectangle, box.</summary>
+    /// <summary>The kind in words: round, tube, rectangle, rounded rectangle, box, I profile, outline.</summary>
     public abstract string Kind { get; }
 
     /// <summary>Largest extent along y [m].</summary>

@@ -11,4 +11,7 @@ public enum SectionFaultKind
 
     /// <summary>A corner radius is larger than half the side, or outer and inner radius do not fit the wall.</summary>
     RadiusTooLarge,
+
+    /// <summary>An outline crosses itself, has too many corners, or encloses nothing.</summary>
+    NotSimple,
 }

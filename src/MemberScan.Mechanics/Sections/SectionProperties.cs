@@ -1,3 +1,5 @@
+using MemberScan.Mechanics.Profiles;
+
 namespace MemberScan.Mechanics.Sections;
 
 /// <summary>Properties of a cross-section about its centroid; warping is left out.</summary>
@@ -35,14 +37,14 @@ public sealed record SectionProperties
 
     /// <summary>
     /// Torsion modulus: largest torsional shear stress = T/Wt [m³]; null where J is. Of a box that of the hand calculation,
-    /// <c>It/(t + K/t)</c> by the annex formula.
+    /// <c>It/(t + K/t)</c> by the annex formula, and of an open profile <c>JThinWall/t</c> of its thickest wall.
     /// </summary>
     public required double? Wt { get; init; }
 
     /// <summary>Torsion constant of a box by the annex formula It of EN 10210-2 and EN 10219-2 [m⁴]; null for other kinds.</summary>
     public double? JAnnex { get; init; }
 
-    /// <summary>Thin-wall torsion constant of a closed wall, <c>4·Am²·t/p</c> [m⁴]; null for solid sections.</summary>
+    /// <summary>Thin-wall torsion constant [m⁴]: <c>4·Am²·t/p</c> of a closed wall, <c>Σbt³/3</c> of open walls; null for other sections.</summary>
     public required double? JThinWall { get; init; }
 
     /// <summary>Shear centre, distance from the centroid along y [m].</summary>
@@ -51,10 +53,19 @@ public sealed record SectionProperties
     /// <summary>Shear centre, distance from the centroid along z [m].</summary>
     public required double ShearCentreZ { get; init; }
 
+    /// <summary>Poisson's ratio at which the shear centre is given where none is named [-].</summary>
+    public const double CustomaryPoisson = 0.3;
+
+    /// <summary>The larger of the two second moments about principal axes [m⁴].</summary>
+    public double IMax => 0.5 * (Iy + Iz) + Math.Sqrt(0.25 * (Iy - Iz) * (Iy - Iz) + Iyz * Iyz);
+
+    /// <summary>Angle from y towards z of the principal axis about which the second moment is <see cref="IMax"/> [rad], in (−π/2, π/2].</summary>
+    public double PrincipalAngle => Math.Abs(Iyz) <= 1e-12 * (Iy + Iz) ? (Iy >= Iz * (1 - 1e-12) ? 0 : Math.PI / 2) : 0.5 * Math.Atan2(-2 * Iyz, Iy - Iz);
+
     /// <summary>The smaller of the two second moments about principal axes [m⁴].</summary>
     public double IMin => 0.5 * (Iy + Iz) - Math.Sqrt(0.25 * (Iy - Iz) * (Iy - Iz) + Iyz * Iyz);
 
-    /// <summary>Properties of a section by closed form; J of a box and a rounded rectangle from the numerical field, solved once.</summary>
+    /// <summary>Properties of a section by closed form or exact integrals; J of all but round, tube and rectangle, and the shear centre, from the numerical field, solved once.</summary>
     public static SectionProperties Of(CrossSection section) => section switch
     {
         Round round => ClosedForms.Of(round),
@@ -62,6 +73,7 @@ public sealed record SectionProperties
         Rectangle rectangle => ClosedForms.Of(rectangle),
         RoundedRectangle rounded => ClosedForms.Of(rounded),
         Box box => ClosedForms.Of(box),
+        OutlineSection or OpenProfile => OutlineProperties.Of(section, CustomaryPoisson),
         null => throw new ArgumentNullException(nameof(section)),
         _ => throw new ArgumentOutOfRangeException(nameof(section), section.Kind, "no closed form for this kind"),
     };

@@ -7,10 +7,10 @@ internal sealed class RoundedRectangleElementary : ShearSolution
 {
     private readonly Direction _alongY;
     private readonly Direction _alongZ;
-    private readonly ShearSolution _torsion;
+    private readonly ShearSolution? _torsion;
 
-    /// <summary>The solution for a section with its properties and a solution that has its torsion.</summary>
-    public RoundedRectangleElementary(RoundedRectangle section, SectionProperties properties, ShearSolution torsion)
+    /// <summary>The solution for a section with its properties and a solution that has its torsion, if there is one.</summary>
+    public RoundedRectangleElementary(RoundedRectangle section, SectionProperties properties, ShearSolution? torsion)
     {
         _torsion = torsion;
         _alongY = new Direction(section.Depth, section.Width, section.CornerRadius, properties.Iz);
@@ -18,9 +18,12 @@ internal sealed class RoundedRectangleElementary : ShearSolution
     }
 
     /// <inheritdoc/>
+    public override bool CarriesTorsion => _torsion is not null;
+
+    /// <inheritdoc/>
     public override ShearStress At(double vy, double vz, double t, double y, double z)
     {
-        var twist = _torsion.At(0, 0, t, y, z);
+        var twist = _torsion?.At(0, 0, t, y, z) ?? default;
         return new ShearStress(twist.XY + vy * _alongY.StressPerForce(y), twist.XZ + vz * _alongZ.StressPerForce(z));
     }
 

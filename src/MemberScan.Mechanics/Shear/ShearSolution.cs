@@ -6,6 +6,9 @@ internal abstract class ShearSolution
     /// <summary>Whether stresses of two sets of forces add up; then unit forces say all.</summary>
     public virtual bool IsLinear => true;
 
+    /// <summary>Whether the model has an answer for torsion.</summary>
+    public virtual bool CarriesTorsion => true;
+
     /// <summary>Whether the shear stresses peak at re-entrant corners.</summary>
     public virtual bool HasPeaks => false;
 

@@ -1,8 +1,11 @@
 using System.Buffers;
 using MemberScan.Mechanics.Forces;
+using MemberScan.Mechanics.Meshes;
 using MemberScan.Mechanics.Outlines;
+using MemberScan.Mechanics.Profiles;
 using MemberScan.Mechanics.Sections;
 using MemberScan.Mechanics.Shear;
+using MemberScan.Mechanics.Warping;
 
 namespace MemberScan.Mechanics.Stress;
 
@@ -27,12 +30,16 @@ internal sealed class SectionField : StressField
         : base(section, model, poisson, properties)
     {
         _shear = shear;
-        _outline = Outline.Of(section, shear.HasPeaks);
+        _outline = OutlineOf(section, shear);
         _search = new GoverningSearch(this, shear, _outline);
-        if (shear.HasPeaks && section is Box { InnerRadius: > 0 } box) _fillets = new GoverningSearch(this, shear, new FilletOutline(box));
+        if (shear.HasPeaks && FilletsOf(section, _outline) is { Length: > 0 } arcs)
+            _fillets = new GoverningSearch(this, shear, new FilletOutline(section, _outline, arcs));
         _scans = new Lazy<(BlockScan, BlockScan)>(() => (new BlockScan(properties, shear, _outline, true), new BlockScan(properties, shear, _outline, false)));
         _closure = new Lazy<Closure>(() => ClosureIntegral.Of(this, shear, _outline));
     }
+
+    /// <inheritdoc/>
+    public override bool CarriesTorsion => _shear.CarriesTorsion;
 
     /// <inheritdoc/>
     public override FieldError? NumericalError => _shear.NumericalError;
@@ -46,6 +53,7 @@ internal sealed class SectionField : StressField
     /// <inheritdoc/>
     public override StressState At(in SectionForces forces, double y, double z)
     {
+        RefuseTorsion(forces);
         var shear = _shear.At(forces.Vy, forces.Vz, forces.T, y, z);
         return new StressState(BendingStress.At(Properties, forces, y, z), shear.XY, shear.XZ);
     }
@@ -69,6 +77,7 @@ internal sealed class SectionField : StressField
     {
         if (!forces.IsFinite) throw new ArgumentException("section forces must be finite numbers", nameof(forces));
 
+        RefuseTorsion(forces);
         return _search.Find(forces, measure);
     }
 
@@ -108,6 +117,30 @@ internal sealed class SectionField : StressField
             ArrayPool<SectionForces>.Shared.Return(keptBuffer);
         }
     }
+
+    private void RefuseTorsion(in SectionForces forces)
+    {
+        if (forces.T != 0 && !CarriesTorsion) throw new ArgumentException($"the elementary model of this {Section.Kind} carries no torsion");
+    }
+
+    private static Outline OutlineOf(CrossSection section, ShearSolution shear)
+    {
+        if (section is not (OutlineSection or OpenProfile)) return Outline.Of(section, shear.HasPeaks);
+
+        var shape = new OutlineShape(OutlineProperties.EdgesOf(section));
+        var walls = section is OpenProfile profile ? shear as OpenProfileElementary ?? new OpenProfileElementary(profile, OutlineProperties.Of(section, 0)) : null;
+        return new ProfileOutline(
+            section, shape, SolvedSections.TryOf(section)!.Potential.Mesh, shear.HasPeaks,
+            shear is OpenProfileElementary elementary ? elementary.Creases() : [],
+            walls is null ? (y, z) => ProfileOutline.PlainName(shape, y, z) : (y, z) => walls.NameOf(y, z));
+    }
+
+    private static EdgeCurve[] FilletsOf(CrossSection section, Outline outline) => (section, outline) switch
+    {
+        (Box { InnerRadius: > 0 } box, _) when ReentrantZone.ReachOf(box) > 0 => FilletOutline.ArcsOf(box),
+        (_, ProfileOutline profile) => [.. profile.Fillets],
+        _ => [],
+    };
 
     // Numbers of the states that may be largest in some measure.
     private static int Promising(ReadOnlySpan<double> targets, Span<int> numbers)

@@ -1,5 +1,6 @@
 using System.Diagnostics.CodeAnalysis;
 using MemberScan.Mechanics.Forces;
+using MemberScan.Mechanics.Profiles;
 using MemberScan.Mechanics.Sections;
 using MemberScan.Mechanics.Shear;
 using MemberScan.Mechanics.Warping;
@@ -25,7 +26,7 @@ public abstract class StressField
     /// <summary>Properties of the section.</summary>
     public SectionProperties Properties { get; }
 
-    /// <summary>Whether the model has an answer for T ≠ 0; every field of today has one.</summary>
+    /// <summary>Whether the model has an answer for T ≠ 0: not the elementary one of a rounded rectangle too slender for a numerical field.</summary>
     public virtual bool CarriesTorsion => true;
 
     /// <summary>The error that is left in a numerical field; null for closed forms and series.</summary>
@@ -39,7 +40,7 @@ public abstract class StressField
     /// <param name="model">The shear model.</param>
     /// <param name="poisson">Poisson's ratio ν [-], in [0, 0.5).</param>
     /// <param name="field">The field.</param>
-    /// <param name="whyNot">Why there is none, such as "elasticity not available for a box".</param>
+    /// <param name="whyNot">Why there is none, such as "there is no elementary rule for an outline".</param>
     /// <exception cref="ArgumentOutOfRangeException"><paramref name="poisson"/> is outside [0, 0.5).</exception>
     public static bool TryCreate(
         CrossSection section, ShearModel model, double poisson,
@@ -49,7 +50,19 @@ public abstract class StressField
         if (!(poisson is >= 0 and < 0.5))
             throw new ArgumentOutOfRangeException(nameof(poisson), poisson, "Poisson's ratio must lie in [0, 0.5)");
 
-        var properties = SectionProperties.Of(section);
+        if (section is OutlineSection && model == ShearModel.Elementary)
+        {
+            (field, whyNot) = (null, "there is no elementary rule for an outline; the elasticity model has it");
+            return false;
+        }
+
+        if (IsSolved(section, model) && SolvedSections.TryOf(section) is null)
+        {
+            (field, whyNot) = (null, $"the dimensions of the {section.Kind} are too far apart for a numerical field");
+            return false;
+        }
+
+        var properties = section is OutlineSection or OpenProfile ? OutlineProperties.Of(section, poisson) : SectionProperties.Of(section);
         field = new SectionField(section, model, poisson, properties, ShearSolutionOf(section, model, poisson, properties));
         whyNot = null;
         return true;
@@ -77,7 +90,7 @@ public abstract class StressField
 
     /// <summary>The place of the section where a measure is largest, among those that decide.</summary>
     /// <returns>A point of the material; its value is within 0.1 % of the true supremum of this field.</returns>
-    /// <exception cref="ArgumentException">Forces are not finite.</exception>
+    /// <exception cref="ArgumentException">T ≠ 0 where <see cref="CarriesTorsion"/> is false, or forces not finite.</exception>
     public abstract GoverningPoint Govern(in SectionForces forces, StressMeasure measure);
 
     /// <summary>The largest value of every measure over many states, such as all stations and situations of a member.</summary>
@@ -92,6 +105,10 @@ public abstract class StressField
     /// <exception cref="ArgumentException">No states, forces not finite, or less room than six results.</exception>
     public abstract void GovernAll(ReadOnlySpan<SectionForces> states, Span<GoverningPoint> largest, Span<int> which);
 
+    // Whether the shear model, or what is known of the section, hangs on a numerical field.
+    private static bool IsSolved(CrossSection section, ShearModel model) =>
+        section is OutlineSection or OpenProfile || (section is Box or RoundedRectangle && model == ShearModel.Elasticity);
+
     private static ShearSolution ShearSolutionOf(
         CrossSection section, ShearModel model, double poisson, SectionProperties properties) => (section, model) switch
         {
@@ -102,9 +119,10 @@ public abstract class StressField
             (Rectangle rectangle, ShearModel.Elementary) => new RectangleElementary(rectangle),
             (Rectangle rectangle, ShearModel.Elasticity) => new RectangleElasticity(rectangle, poisson),
             (RoundedRectangle rounded, ShearModel.Elementary) => new RoundedRectangleElementary(
-                rounded, properties, new NumericalElasticity(SolvedSections.Of(rounded), properties, 0)),
+                rounded, properties, SolvedSections.TryOf(rounded) is { } solved ? new NumericalElasticity(solved, properties, 0) : null),
             (Box box, ShearModel.Elementary) => new BoxElementary(box, properties),
-            (Box or RoundedRectangle, ShearModel.Elasticity) => new NumericalElasticity(SolvedSections.Of(section), properties, poisson),
+            (OpenProfile profile, ShearModel.Elementary) => new OpenProfileElementary(profile, properties),
+            (Box or RoundedRectangle or OutlineSection or OpenProfile, ShearModel.Elasticity) => new NumericalElasticity(SolvedSections.TryOf(section)!, properties, poisson),
             _ => throw new ArgumentOutOfRangeException(nameof(model), model, "unknown shear model"),
         };
 }

@@ -1,5 +1,6 @@
 using System.Collections.Concurrent;
 using MemberScan.Mechanics.Meshes;
+using MemberScan.Mechanics.Profiles;
 using MemberScan.Mechanics.Sections;
 
 namespace MemberScan.Mechanics.Warping;
@@ -13,29 +14,30 @@ internal static class SolvedSections
     /// <summary>Torsion constants kept.</summary>
     public const int KeptConstants = 16384;
 
-    private static readonly ConcurrentDictionary<CrossSection, (double J, double Wt, double Change)> s_torsion = new();
-    private static readonly ConcurrentDictionary<CrossSection, Lazy<WarpingSolution>> s_solutions = new();
+    private static readonly ConcurrentDictionary<CrossSection, TorsionConstants> s_torsion = new();
+    private static readonly ConcurrentDictionary<CrossSection, Lazy<WarpingSolution?>> s_solutions = new();
     private static readonly ConcurrentQueue<CrossSection> s_order = new();
 
-    /// <summary>The numerical field of a box or a rounded rectangle.</summary>
-    public static WarpingSolution Of(CrossSection section)
+    /// <summary>The numerical field of a box, a rounded rectangle, an outline or an open profile; null where its dimensions are too far apart to be solved.</summary>
+    public static WarpingSolution? TryOf(CrossSection section)
     {
         if (s_solutions.TryGetValue(section, out var known)) return known.Value;
 
-        var made = new Lazy<WarpingSolution>(() => Solve(section));
+        var made = new Lazy<WarpingSolution?>(() => Solve(section));
         var kept = s_solutions.GetOrAdd(section, made);
         if (ReferenceEquals(kept, made)) s_order.Enqueue(section);
         while (s_order.Count > Kept && s_order.TryDequeue(out var oldest)) s_solutions.TryRemove(oldest, out _);
         return kept.Value;
     }
 
-    /// <summary>J [m⁴], Wt [m³] and the change of J at the last refinement [-].</summary>
-    public static (double J, double Wt, double Change) Torsion(CrossSection section)
+    /// <summary>What a section's numerical field gives for its properties; null where there is none.</summary>
+    public static TorsionConstants? Torsion(CrossSection section)
     {
         if (s_torsion.TryGetValue(section, out var known)) return known;
 
-        var solution = Of(section);
-        var torsion = (solution.J, 1 / solution.LargestTwistStress(Counts(section)), solution.TorsionError);
+        if (TryOf(section) is not { } solution) return null;
+
+        var torsion = new TorsionConstants(solution.J, 1 / solution.LargestTwistStress(Counts(section)), solution.TorsionError, solution.Potential.FlexureMoments());
         if (s_torsion.Count >= KeptConstants) s_torsion.Clear();
         s_torsion[section] = torsion;
         return torsion;
@@ -44,13 +46,18 @@ internal static class SolvedSections
     private static Func<double, double, bool> Counts(CrossSection section) => section switch
     {
         Box box => (y, z) => !ReentrantZone.Covers(box, y, z),
+        OutlineSection or OpenProfile => CountsIn(new OutlineShape(OutlineProperties.EdgesOf(section))),
         _ => (_, _) => true,
     };
 
-    private static WarpingSolution Solve(CrossSection section) => section switch
+    private static Func<double, double, bool> CountsIn(OutlineShape shape) => (y, z) => !shape.IsNearCorner(y, z, 0);
+
+    private static WarpingSolution? Solve(CrossSection section) => section switch
     {
-        Box box => WarpingSolution.Of(WalledMesh.Of(box), Counts(box)),
-        RoundedRectangle rounded => WarpingSolution.Of(WalledMesh.Of(rounded), Counts(rounded)),
+        Box box => WarpingSolution.TryOf(WalledMesh.Of(box), Counts(box)),
+        RoundedRectangle rounded => WarpingSolution.TryOf(WalledMesh.Of(rounded), Counts(rounded)),
+        OutlineSection or OpenProfile => OutlineMesh.TryOf(new OutlineShape(OutlineProperties.EdgesOf(section))) is { } mesh
+            ? WarpingSolution.TryOf(mesh, Counts(section)) : null,
         _ => throw new ArgumentOutOfRangeException(nameof(section), section.Kind, "no numerical field for this kind"),
     };
 }

@@ -51,6 +51,34 @@ internal sealed class WarpingPotential
         return (copies * j, copies * area);
     }
 
+    /// <summary>Moments about the centroid of the shear stresses of the loads 1 to 4, of a whole section [per unit of the load].</summary>
+    public double[] FlexureMoments()
+    {
+        var moments = new double[PatchStiffness.Loads - 1];
+        if (Mesh.IsQuarter) return moments;                                        // two axes of symmetry: none
+
+        for (var e = 0; e < Mesh.Patches.Count; e++)
+        {
+            for (var a = 0; a < Rule.QuadratureCount; a++)
+            {
+                for (var b = 0; b < Rule.QuadratureCount; b++)
+                {
+                    var at = Mesh.Patches[e].Map(Rule.QuadratureAt[a], Rule.QuadratureAt[b]);
+                    var weight = Rule.QuadratureWeights[a] * Rule.QuadratureWeights[b] * Math.Abs(at.Determinant);
+                    for (var load = 1; load < PatchStiffness.Loads; load++)
+                    {
+                        var (gy, gz) = Gradient(at, Coefficients(e, load), Rule.QuadratureAt[a], Rule.QuadratureAt[b]);
+                        if (load == 3) gy += 0.5 * at.Z * at.Z;
+                        if (load == 4) gz += 0.5 * at.Y * at.Y;
+                        moments[load - 1] += weight * (at.Y * gz - at.Z * gy);
+                    }
+                }
+            }
+        }
+
+        return moments;
+    }
+
     /// <summary>Gradient of a combination of potentials at a point of a patch.</summary>
     public static (double Y, double Z) Gradient(in PatchPoint at, ReadOnlySpan<double> coefficients, double xi, double eta)
     {

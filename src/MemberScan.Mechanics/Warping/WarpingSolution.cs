@@ -6,10 +6,16 @@ namespace MemberScan.Mechanics.Warping;
 internal sealed class WarpingSolution
 {
     private const int FirstDegree = 6;
+    private const int FirstDegreeOfManyPatches = 4;
+    private const int LastDegreeOfManyPatches = 8;
+    private const int ManyPatches = 130;
     private const int LastDegree = 12;
-    private const double TorsionTolerance = 1e-6;
+    private const double TorsionTolerance = 1e-5;
     private const double StressTolerance = 2e-3;
     private const int Components = 10;
+
+    // What changes more at the last refinement is no result.
+    private const double LargestChange = 0.05;
 
     private WarpingSolution(WarpingPotential potential, double j, double torsionError, double stressError)
     {
@@ -32,14 +38,15 @@ internal sealed class WarpingSolution
     /// <summary>Largest change of a shear stress between the last two refinements, against the largest stress of its load [-].</summary>
     public double StressError { get; }
 
-    /// <summary>Solves with polynomials of rising degree until two successive results agree.</summary>
+    /// <summary>Solves with polynomials of rising degree until two successive results agree; null where the mesh is too distorted for that.</summary>
     /// <param name="mesh">The mesh.</param>
     /// <param name="counts">Whether the stress at a place counts for the comparison; those at sharp re-entrant corners do not.</param>
-    public static WarpingSolution Of(PatchMesh mesh, Func<double, double, bool> counts)
+    public static WarpingSolution? TryOf(PatchMesh mesh, Func<double, double, bool> counts)
     {
         (WarpingPotential Potential, double J, double[] Stresses)? last = null;
         var (torsionError, stressError) = (1.0, 1.0);
-        for (var degree = FirstDegree; degree <= LastDegree; degree += 2)
+        var areMany = mesh.Patches.Count > ManyPatches;
+        for (var degree = areMany ? FirstDegreeOfManyPatches : FirstDegree; degree <= (areMany ? LastDegreeOfManyPatches : LastDegree); degree += 2)
         {
             if (WarpingSolver.TrySolve(mesh, degree) is not { } potential) break;
 
@@ -55,8 +62,9 @@ internal sealed class WarpingSolution
             if (torsionError <= TorsionTolerance && stressError <= StressTolerance) break;
         }
 
-        var found = last ?? throw new ArgumentException("the mesh of the section is not valid", nameof(mesh));
-        return new WarpingSolution(found.Potential, found.J, torsionError, stressError);
+        return last is { } found && found.J > 0 && torsionError <= LargestChange && stressError <= LargestChange
+            ? new WarpingSolution(found.Potential, found.J, torsionError, stressError)
+            : null;
     }
 
     /// <summary>Largest shear stress of unit T among the nodes of all patches, those that count [1/m³].</summary>

@@ -162,6 +162,74 @@ public sealed class SectionRunTests
         Assert.Contains("give a number from 0 to below 0.5", ran.Error, StringComparison.Ordinal);
     }
 
+    [Fact]
+    public async Task Both_shear_models_stand_side_by_side_where_asked_for()
+    {
+        using var json = await Json("box 50x100x5 mm ro 10 ri 5", "--forces", "Vz=20kN T=0.5kNm My=1kNm", "--shear", "both", "--yield", "355MPa");
+
+        var (own, other) = (json.RootElement.GetProperty("governing"), json.RootElement.GetProperty("comparison"));
+        Assert.Equal(["shear", "governing", "difference", "filletVonMises", "stressChange"], Keys(other));
+        var ratio = other.GetProperty("governing").GetProperty("vonMises").GetProperty("value").GetDouble() / own.GetProperty("vonMises").GetProperty("value").GetDouble();
+        Assert.Equal(ratio - 1, other.GetProperty("difference").GetDouble(), 1e-12);
+        Assert.InRange(ratio, 0.9, 1.1);
+        Assert.Equal(1e3 / (4.084e-5 * 355e6), json.RootElement.GetProperty("plastic").GetProperty("My").GetDouble(), 1e-4);   // Wpl of EN 10219-2's annex formula
+    }
+
+    [Fact]
+    public async Task Several_situations_are_held_apart_and_the_largest_decides()
+    {
+        var ran = await Memberscan.Run("section", "round 20 mm", "--forces", "N=10kN", "--forces", "My=0.2kNm", "--forces", "N=20kN", "--yield", "235MPa", "--json");
+
+        Assert.True(ran.ExitCode == 1, ran.All);
+        using var json = JsonDocument.Parse(ran.Output);
+        Assert.Equal(2, json.RootElement.GetProperty("situation").GetInt32());
+        Assert.Equal([31.83, 254.65, 63.66], json.RootElement.GetProperty("situations").EnumerateArray().Select(s => s.GetProperty("vonMises").GetProperty("value").GetDouble() / 1e6), (a, b) => Math.Abs(a - b) < 0.005);
+        Assert.Equal(254.65 / 235, json.RootElement.GetProperty("utilization").GetDouble(), 3e-5);
+    }
+
+    /// <summary>By hand: 32·M/(π·d³) = fy gives d = (32·0.2e6/(π·235))^⅓ = 20.543 mm, so 20.55 mm.</summary>
+    [Fact]
+    public async Task The_smallest_diameter_is_the_one_found_by_hand()
+    {
+        var ran = await Memberscan.Run("section", "round 20 mm", "--forces", "My=0.2kNm", "--yield", "235MPa", "--smallest");
+
+        Assert.True(ran.ExitCode == 1, ran.All);
+        Assert.Contains("hint for the modeler, elementary model: smallest diameter: 20.55 mm", ran.Output, StringComparison.Ordinal);
+        Assert.Contains("moment over plastic moment Wpl·fy, for information: My 0.638", ran.Output, StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public async Task An_outline_from_a_file_is_drawn_to_scale()
+    {
+        using var folder = new TemporaryFolder();
+        var (outline, drawing) = (Path.Combine(folder.Path, "gusset.json"), Path.Combine(folder.Path, "gusset.svg"));
+        await File.WriteAllTextAsync(outline, """{ "unit": "mm", "outer": { "points": [[0, 0], [60, 0], [60, 40], [0, 40]] }, "holes": [{ "circle": [30, 20, 8] }] }""", TestContext.Current.CancellationToken);
+
+        var ran = await Memberscan.Run("section", $"outline {outline}", "--forces", "My=1kNm T=0.1kNm", "--shear", "elasticity", "--svg", drawing, "--json");
+
+        Assert.True(ran.ExitCode == 0, ran.All);
+        using var json = JsonDocument.Parse(ran.Output);
+        Assert.Equal((60 * 40 - Math.PI * 64) * 1e-6, json.RootElement.GetProperty("properties").GetProperty("area").GetDouble(), 1e-12);
+        var svg = await File.ReadAllTextAsync(drawing, TestContext.Current.CancellationToken);
+        Assert.StartsWith("<svg", svg, StringComparison.Ordinal);
+        Assert.Equal(2, svg.Split("<polygon").Length - 1);
+        Assert.Contains("largest von Mises", svg, StringComparison.Ordinal);
+        Assert.Equal(["gusset.json", "gusset.svg"], folder.Names);
+    }
+
+    [Fact]
+    public void An_outline_has_no_elementary_model_and_the_remedy_is_told()
+    {
+        using var folder = new TemporaryFolder();
+        var path = Path.Combine(folder.Path, "plate.json");
+        File.WriteAllText(path, """{ "unit": "mm", "outer": { "points": [[0, 0], [60, 0], [60, 40], [0, 40]] } }""");
+
+        var failure = Assert.Throws<Failure>(() => SectionRun.Execute(new SectionRun.Options($"outline {path}", "N=1kN", [], "elementary", 0.3, null, Json: true)));
+
+        Assert.Equal(64, failure.ExitCode);
+        Assert.EndsWith("use --shear elasticity.", failure.Message, StringComparison.Ordinal);
+    }
+
     private static async Task<JsonDocument> Json(params string[] arguments)
     {
         var ran = await Memberscan.Run(["section", .. arguments, "--json"]);

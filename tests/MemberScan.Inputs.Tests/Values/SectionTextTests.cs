@@ -1,6 +1,7 @@
 using System.Globalization;
 using CsCheck;
 using MemberScan.Inputs.Values;
+using MemberScan.Mechanics.Profiles;
 using MemberScan.Mechanics.Sections;
 
 namespace MemberScan.Inputs.Tests.Values;
@@ -20,6 +21,10 @@ public sealed class SectionTextTests
         { "rectangle 1.5e1 x 8e-1 cm", new Rectangle(15e-2, 0.8e-2) },
         { "rectangle 60x100 mm r 15", new RoundedRectangle(0.06, 0.1, 0.015) },
         { "rectangle 60x100 mm r 1.5 cm", new RoundedRectangle(0.06, 0.1, 0.015) },
+        { "L 100x80x8 mm", new OpenProfile(OpenShape.L, 0.1, 0.08, 0.008, 0.008) },
+        { "i 200x100x5.6x8.5 mm r 12", new OpenProfile(OpenShape.I, 0.2, 0.1, 0.0056, 0.0085, 0.012) },
+        { "U100x50x6x8.5mm", new OpenProfile(OpenShape.U, 0.1, 0.05, 0.006, 0.0085) },
+        { "T 60x60x7x7 mm r 7", new OpenProfile(OpenShape.T, 0.06, 0.06, 0.007, 0.007, 0.007) },
         { "box 50x30x3 mm", new Box(0.05, 0.03, 0.003) },
         { "box 50x30x3 mm ro 6 ri 3", new Box(0.05, 0.03, 0.003, 0.006, 0.003) },
         { "box 50x30x3 mm ri=3 ro=6mm", new Box(0.05, 0.03, 0.003, 0.006, 0.003) },
@@ -40,15 +45,18 @@ public sealed class SectionTextTests
     }
 
     [Theory]
-    [InlineData("", "the section kind is missing; begin with one of round, tube, rectangle, box, such as 'tube 48.3x3.2 mm'")]
+    [InlineData("", "the section kind is missing; begin with one of round, tube, rectangle, box, I, L, U, T, such as 'tube 48.3x3.2 mm'")]
     [InlineData("tub 48.3x3.2 mm", "'tub' is not a section kind; did you mean 'tube'?")]
-    [InlineData("girder 1x2 mm", "'girder' is not a section kind; known are round, tube, rectangle, box")]
+    [InlineData("girder 1x2 mm", "'girder' is not a section kind; known are round, tube, rectangle, box, I, L, U, T")]
     [InlineData("tube 48.3x3.2", "the unit is missing; give one of m, mm, cm, in, ft after the last dimension")]
     [InlineData("box 50x30x3 ro 6 ri 3", "the unit is missing; give one of m, mm, cm, in, ft after the last dimension")]
     [InlineData("tube 48.3 mm x 3.2", "the unit is missing; give one of m, mm, cm, in, ft after the last dimension")]
     [InlineData("tube 48.3x3.2 kN", "'kN' is a unit of force, not of length; give one of m, mm, cm, in, ft")]
     [InlineData("tube 48.3x3.2 mn", "'mn' is not a unit of length; did you mean 'm'?")]
     [InlineData("tube 48.3 mm", "a tube has 2 dimensions (outer diameter x wall), but 1 is given")]
+    [InlineData("L 100x80 mm", "an L has 3 dimensions (leg along z x leg along y x thickness), but 2 are given")]
+    [InlineData("U 100x50x6 mm", "a U has 4 dimensions (depth along z x width along y x web x flange), but 3 are given")]
+    [InlineData("T 60x60x7x60 mm", "the walls are as thick as the profile")]
     [InlineData("round 25x3 mm", "a round has 1 dimension (the diameter), but 2 are given")]
     [InlineData("tube 48,3x3.2 mm", "'48,3x3.2' has a decimal comma; write the number with a decimal point and without grouping")]
     [InlineData("tube 48.3xNaN mm", "'NaN' is not a finite number; give a finite number")]

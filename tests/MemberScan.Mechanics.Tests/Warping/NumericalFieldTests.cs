@@ -1,4 +1,5 @@
 using MemberScan.Mechanics.Forces;
+using MemberScan.Mechanics.Profiles;
 using MemberScan.Mechanics.Sections;
 using MemberScan.Mechanics.Stress;
 using MemberScan.Mechanics.Warping;
@@ -57,7 +58,7 @@ public sealed class NumericalFieldTests
         double width, double depth, double wall, double outer, double inner)
     {
         var box = new Box(width, depth, wall, outer, inner);
-        var upper = SolvedSections.Of(box).J;
+        var upper = SolvedSections.TryOf(box)!.J;
 
         var lower = StressFunction.J(box, 240, 16);
 
@@ -154,11 +155,25 @@ public sealed class NumericalFieldTests
     }
 
     [Fact]
+    public void Sections_of_one_to_a_thousand_are_solved_and_those_beyond_reason_are_refused()
+    {
+        foreach (var section in new CrossSection[] { new RoundedRectangle(1, 0.001, 0.0001), new Box(1, 1, 0.001), new Box(10, 0.01, 0.0001, 0.0002, 0.0001) })
+            Assert.True(Samples.Field(section, ShearModel.Elasticity).Closure.LargestError <= 1e-3, section.Designation);
+
+        foreach (var section in new CrossSection[] { new RoundedRectangle(1e9, 1e-9, 1e-10), new Box(1e9, 1e-9, 1e-10), new OpenProfile(OpenShape.U, 1e6, 1, 1e-6, 1e-6) })
+        {
+            Assert.False(StressField.TryCreate(section, ShearModel.Elasticity, 0.3, out _, out var whyNot));
+            Assert.EndsWith("are too far apart for a numerical field", whyNot, StringComparison.Ordinal);
+            Assert.Null(SectionProperties.Of(section).J);
+        }
+    }
+
+    [Fact]
     public void A_section_is_solved_once()
     {
         var box = new Box(0.05, 0.07, 0.004, 0.008, 0.004);
 
-        Assert.Same(SolvedSections.Of(box), SolvedSections.Of(new Box(0.05, 0.07, 0.004, 0.008, 0.004)));
+        Assert.Same(SolvedSections.TryOf(box), SolvedSections.TryOf(new Box(0.05, 0.07, 0.004, 0.008, 0.004)));
     }
 
     private static void Agree(StressField field, StressField reference, double tolerance)
