@@ -1,3 +1,30 @@
 using BenchmarkDotNet.Running;
+using MemberScan.Benchmarks.Models;
+using MemberScan.Benchmarks.Question;
 
-BenchmarkSwitcher.FromAssembly(typeof(Program).Assembly).Run(args);
+// generate NAME FILE | question FILE [THREADS] | checked FILE; anything else goes to BenchmarkDotNet.
+return args switch
+{
+    ["generate", var name, var path] => Generate(name, path),
+    ["checked", var path] => Print(CheckedQuestion.Ask(path)),
+    _ => Benchmark(args),
+};
+
+static int Generate(string name, string path)
+{
+    using var file = new FileStream(path, FileMode.Create, FileAccess.Write, FileShare.None, 1 << 20);
+    LandingModel.Write(ModelRecipe.Named(name), file);
+    return 0;
+}
+
+static int Print(Answer answer)
+{
+    Console.WriteLine(answer);
+    return 0;
+}
+
+static int Benchmark(string[] args)
+{
+    BenchmarkSwitcher.FromAssembly(typeof(Program).Assembly).Run(args);
+    return 0;
+}
