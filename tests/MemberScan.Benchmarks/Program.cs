@@ -1,3 +1,4 @@
+using System.Globalization;
 using BenchmarkDotNet.Running;
 using MemberScan.Benchmarks.Models;
 using MemberScan.Benchmarks.Question;
@@ -6,6 +7,9 @@ using MemberScan.Benchmarks.Question;
 return args switch
 {
     ["generate", var name, var path] => Generate(name, path),
+    ["question", var path] => Print(IndexedQuestion.Ask(path, 0)),
+    ["question", var path, var threads] => Print(IndexedQuestion.Ask(path, int.Parse(threads, CultureInfo.InvariantCulture))),
+    ["pass", var path, var threads] => IndexedQuestion.Pass(path, int.Parse(threads, CultureInfo.InvariantCulture)),
     ["checked", var path] => Print(CheckedQuestion.Ask(path)),
     _ => Benchmark(args),
 };

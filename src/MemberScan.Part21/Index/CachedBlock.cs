@@ -1,0 +1,53 @@
+using MemberScan.Part21.Streaming;
+
+namespace MemberScan.Part21.Index;
+
+/// <summary>The text of one block with its instances.</summary>
+internal sealed class CachedBlock(ByteSource source)
+{
+    private readonly Window _window = new(source, 2 * BlockEntry.Length);
+    private uint[] _ids = new uint[128];
+    private (int Start, int Length, InstanceFlags Flags)[] _places = new (int, int, InstanceFlags)[128];
+
+    /// <summary>Its place among the anchors; −1 while it holds none.</summary>
+    public int Entry { get; private set; } = -1;
+
+    /// <summary>Number of instances.</summary>
+    public int Count { get; private set; }
+
+    /// <summary>Numbers of its instances in file order.</summary>
+    public ReadOnlySpan<uint> Ids => _ids.AsSpan(0, Count);
+
+    public void Load(int entry, in BlockEntry anchor, DataScanner scanner)
+    {
+        Entry = entry;
+        Count = 0;
+        var at = anchor.Start;
+        _window.Shrink();
+        var sink = new ListSink(this, at);
+        _ = scanner.Scan(_window, ref at, anchor.End, true, ref sink);
+        scanner.Log.TakeBack(0);
+    }
+
+    public Part21Instance At(int place)
+    {
+        var (start, length, flags) = _places[place];
+        return new Part21Instance(_window.Text.Slice(start, length), _window.Origin + start, _ids[place], flags);
+    }
+
+    private readonly struct ListSink(CachedBlock block, long origin) : IStatementSink
+    {
+        public void Add(long offset, int length, uint id, ReadOnlySpan<byte> keyword, InstanceFlags flags)
+        {
+            if (block.Count == block._ids.Length)
+            {
+                Array.Resize(ref block._ids, 2 * block.Count);
+                Array.Resize(ref block._places, 2 * block.Count);
+            }
+
+            block._ids[block.Count] = id;
+            block._places[block.Count] = ((int)(offset - origin), length, flags);
+            block.Count++;
+        }
+    }
+}

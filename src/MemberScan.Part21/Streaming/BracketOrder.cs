@@ -1,0 +1,81 @@
+using System.Numerics;
+using System.Runtime.CompilerServices;
+using System.Runtime.Intrinsics.X86;
+
+namespace MemberScan.Part21.Streaming;
+
+/// <summary>Whether the brackets of a statement close each other, eight at a time.</summary>
+internal static class BracketOrder
+{
+    /// <summary>Depth of a statement that has had no bracket yet.</summary>
+    public const int None = -1;
+
+    // Deeper ones are left to the reader that counts exactly.
+    private const int DepthTaken = 48;
+
+    // Index: a one above k ≤ 8 bits, the first bracket lowest, 1 for an opening one.
+    private static readonly sbyte[] s_net = new sbyte[512];
+    private static readonly sbyte[] s_least = new sbyte[512];
+
+    static BracketOrder()
+    {
+        for (var index = 1; index < 512; index++)
+        {
+            var count = BitOperations.Log2((uint)index);
+            int depth = 0, least = sbyte.MaxValue;
+            for (var i = 0; i < count; i++)
+            {
+                least = Math.Min(least, depth);
+                depth += (index >> i & 1) != 0 ? 1 : -1;
+            }
+
+            s_net[index] = (sbyte)depth;
+            s_least[index] = (sbyte)least;
+        }
+    }
+
+    /// <summary>Takes the brackets of a stretch: false if one stands behind the bracket that closed the first, or they are deep.</summary>
+    /// <param name="open">Opening brackets.</param>
+    /// <param name="close">Closing brackets.</param>
+    /// <param name="depth">Brackets open before and after; <see cref="None"/> before the first.</param>
+    [MethodImpl(MethodImplOptions.AggressiveInlining)]
+    public static bool TryTake(ulong open, ulong close, ref int depth)
+    {
+        var both = open | close;
+        var count = BitOperations.PopCount(both);
+        if (count == 0) return true;
+
+        var order = Gather(open, both);
+        if (depth == None)
+        {
+            if ((order & 1) == 0) return false;
+            depth = 1;
+            order >>= 1;
+            count--;
+        }
+
+        var sound = true;
+        while (count > 0)
+        {
+            var taken = Math.Min(count, 8);
+            var index = (1 << taken) | (int)(order & ((1UL << taken) - 1));
+            sound &= depth + s_least[index] >= 1 && depth <= DepthTaken;
+            depth += s_net[index];
+            order >>= taken;
+            count -= taken;
+        }
+
+        return sound;
+    }
+
+    [MethodImpl(MethodImplOptions.AggressiveInlining)]
+    private static ulong Gather(ulong bits, ulong mask)
+    {
+        if (Bmi2.X64.IsSupported) return Bmi2.X64.ParallelBitExtract(bits, mask);
+
+        var gathered = 0UL;
+        for (var i = 0; mask != 0; i++, mask &= mask - 1)
+            gathered |= (bits >> BitOperations.TrailingZeroCount(mask) & 1) << i;
+        return gathered;
+    }
+}
