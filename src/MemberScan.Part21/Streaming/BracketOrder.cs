@@ -14,25 +14,8 @@ internal static class BracketOrder
     private const int DepthTaken = 48;
 
     // Index: a one above k ≤ 8 bits, the first bracket lowest, 1 for an opening one.
-    private static readonly sbyte[] s_net = new sbyte[512];
-    private static readonly sbyte[] s_least = new sbyte[512];
-
-    static BracketOrder()
-    {
-        for (var index = 1; index < 512; index++)
-        {
-            var count = BitOperations.Log2((uint)index);
-            int depth = 0, least = sbyte.MaxValue;
-            for (var i = 0; i < count; i++)
-            {
-                least = Math.Min(least, depth);
-                depth += (index >> i & 1) != 0 ? 1 : -1;
-            }
-
-            s_net[index] = (sbyte)depth;
-            s_least[index] = (sbyte)least;
-        }
-    }
+    private static readonly sbyte[] s_net = Table((net, _) => net);
+    private static readonly sbyte[] s_least = Table((_, least) => least);
 
     /// <summary>Takes the brackets of a stretch: false if one stands behind the bracket that closed the first, or they are deep.</summary>
     /// <param name="open">Opening brackets.</param>
@@ -77,5 +60,24 @@ internal static class BracketOrder
         for (var i = 0; mask != 0; i++, mask &= mask - 1)
             gathered |= (bits >> BitOperations.TrailingZeroCount(mask) & 1) << i;
         return gathered;
+    }
+
+    // Change of depth over the brackets, and the least depth before any of them.
+    private static sbyte[] Table(Func<int, int, int> value)
+    {
+        var table = new sbyte[512];
+        for (var index = 1; index < table.Length; index++)
+        {
+            int depth = 0, least = sbyte.MaxValue;
+            for (var i = 0; i < BitOperations.Log2((uint)index); i++)
+            {
+                least = Math.Min(least, depth);
+                depth += (index >> i & 1) != 0 ? 1 : -1;
+            }
+
+            table[index] = (sbyte)value(depth, least);
+        }
+
+        return table;
     }
 }

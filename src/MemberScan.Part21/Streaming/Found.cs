@@ -1,0 +1,10 @@
+namespace MemberScan.Part21.Streaming;
+
+/// <summary>Where the masks stand that the rules of plain layout leave: eight words each, outside of strings only.</summary>
+internal static class Found
+{
+    public const int Bad = 0, Open = 8, Close = 16, Semicolon = 24, EqualsSign = 32, Blank = 40;
+
+    /// <summary>Words of all.</summary>
+    public const int Words = 48;
+}
