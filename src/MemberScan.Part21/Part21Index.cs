@@ -30,7 +30,7 @@ public sealed class Part21Index : IDisposable
         (_source, _owned, Name) = (source, owned, name);
         _wanted = [.. wanted.Distinct(StringComparer.Ordinal)];
         var log = new FindingLog();
-        var pass = new DataPass(source, new WantedKeywords(_wanted), options.Limits, options.Stretch);
+        var pass = new DataPass(source, new WantedKeywords(_wanted), options.Limits, options.Stretch, options.Window);
         var structure = new StreamedStructure(source, log, options.Limits, pass, options.Threads);
         structure.Read();
 
@@ -238,9 +238,11 @@ public sealed class Part21Index : IDisposable
     /// <summary>How a pass is made.</summary>
     /// <param name="Limits">How much a text may ask of the reader.</param>
     /// <param name="Stretch">Length of a stretch [byte].</param>
+    /// <param name="Window">Length of the window that a stretch is read through [byte].</param>
     /// <param name="Threads">Threads that share the pass.</param>
-    internal sealed record Options(ReadingLimits Limits, int Stretch, int Threads)
+    internal sealed record Options(ReadingLimits Limits, int Stretch, int Window, int Threads)
     {
-        public static Options Shipped(int threads) => new(Part21File.ShippedLimits, DataPass.ShippedStretch, threads > 0 ? threads : Environment.ProcessorCount);
+        public static Options Shipped(int threads) => new(
+            Part21File.ShippedLimits, DataPass.ShippedStretch, DataPass.ShippedWindow, threads > 0 ? threads : Environment.ProcessorCount);
     }
 }

@@ -9,13 +9,22 @@ public sealed class Part21Lookup
 {
     private const int CachedBlocks = 256;
 
+    // Most blocks end within an instance that is shorter than the rest; most instances are shorter than one piece [byte].
+    private const int BlockPiece = BlockEntry.Length + 1024;
+    private const int InstancePiece = 1024;
+
     private readonly BlockIndex _index;
     private readonly ByteSource _source;
     private readonly DataScanner _scanner;
     private readonly CachedBlock?[] _cache = new CachedBlock?[CachedBlocks];
+    private readonly CachedBlock _single;
     private int _last = -1;
 
-    internal Part21Lookup(BlockIndex index, ByteSource source, DataScanner scanner) => (_index, _source, _scanner) = (index, source, scanner);
+    internal Part21Lookup(BlockIndex index, ByteSource source, DataScanner scanner)
+    {
+        (_index, _source, _scanner) = (index, source, scanner);
+        _single = new CachedBlock(source, InstancePiece);
+    }
 
     /// <summary>Finds an instance by its number; the first one when a number is used twice.</summary>
     public bool TryFind(uint id, out Part21Instance instance)
@@ -27,23 +36,16 @@ public sealed class Part21Lookup
         return true;
     }
 
-    /// <summary>The instance whose '#' stands at an offset; false if none does.</summary>
+    /// <summary>The instance at an offset.</summary>
+    /// <param name="offset">One of <see cref="Part21Index.OffsetsOf"/> [byte].</param>
+    /// <param name="instance">The instance.</param>
+    /// <returns>False where no instance begins.</returns>
     public bool TryReadAt(long offset, out Part21Instance instance)
     {
-        instance = default;
-        var entry = _last >= 0 && _index.Entries[_last].Block == offset / BlockEntry.Length ? _last : _index.At(offset);
-        if (entry < 0) return false;
-
-        _last = entry;
-        var block = Block(entry);
-        for (var place = 0; place < block.Count; place++)
-        {
-            instance = block.At(place);
-            if (instance.Offset == offset) return true;
-        }
-
-        instance = default;
-        return false;
+        _single.LoadOne(offset, _scanner);
+        var isFound = _single.Count > 0 && _single.At(0).Offset == offset;
+        instance = isFound ? _single.At(0) : default;
+        return isFound;
     }
 
     internal bool TryFindPlace(uint id, out CachedBlock block, out int place)
@@ -59,7 +61,7 @@ public sealed class Part21Lookup
     internal CachedBlock Block(int entry)
     {
         ref var slot = ref _cache[entry % CachedBlocks];
-        slot ??= new CachedBlock(_source);
+        slot ??= new CachedBlock(_source, BlockPiece);
         if (slot.Entry != entry) slot.Load(entry, _index.Entries[entry], _scanner);
         return slot;
     }

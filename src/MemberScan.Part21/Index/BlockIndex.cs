@@ -100,22 +100,6 @@ internal sealed class BlockIndex
         return first < lows.Length && lows[first] == low ? BlockAt(from + first) : -1;
     }
 
-    /// <summary>The place in <see cref="Entries"/> of the block that an offset lies in; −1 if none.</summary>
-    public int At(long offset)
-    {
-        int low = 0, high = _entries.Length - 1;
-        var block = offset / BlockEntry.Length;
-        while (low <= high)
-        {
-            var middle = (low + high) >>> 1;
-            if (_entries[middle].Block == block) return middle;
-            if (_entries[middle].Block < block) low = middle + 1;
-            else high = middle - 1;
-        }
-
-        return -1;
-    }
-
     /// <summary>Each number that is listed, with its block; equal ones follow each other, the first in the file first.</summary>
     public IEnumerable<(uint Id, int Entry)> List()
     {
@@ -165,6 +149,7 @@ internal sealed class BlockIndex
                 while (again < next && _entries[again].Start < at) again++;
                 if (again >= next) break;
                 at = _entries[again].Start;
+                sink.Entry = again;
             }
 
             i = next;

@@ -2,10 +2,12 @@ using MemberScan.Part21.Streaming;
 
 namespace MemberScan.Part21.Index;
 
-/// <summary>The text of one block with its instances.</summary>
-internal sealed class CachedBlock(ByteSource source)
+/// <summary>The text of one block, or of one instance, with its instances.</summary>
+/// <param name="source">The text.</param>
+/// <param name="length">How much is read at a time [byte].</param>
+internal sealed class CachedBlock(ByteSource source, int length)
 {
-    private readonly Window _window = new(source, 2 * BlockEntry.Length);
+    private readonly Window _window = new(source, length);
     private uint[] _ids = new uint[128];
     private (int Start, int Length, InstanceFlags Flags)[] _places = new (int, int, InstanceFlags)[128];
 
@@ -26,6 +28,17 @@ internal sealed class CachedBlock(ByteSource source)
         _window.Shrink();
         var sink = new ListSink(this, at);
         _ = scanner.Scan(_window, ref at, anchor.End, true, ref sink);
+        scanner.Log.TakeBack(0);
+    }
+
+    /// <summary>Holds the one instance at an offset where an instance is known to begin.</summary>
+    public void LoadOne(long offset, DataScanner scanner)
+    {
+        Entry = -1;
+        Count = 0;
+        var at = offset;
+        var sink = new ListSink(this, at);
+        _ = scanner.Scan(_window, ref at, offset + 1, true, ref sink);
         scanner.Log.TakeBack(0);
     }
 

@@ -173,7 +173,13 @@ internal sealed class StructureReader
 
     private int ReadSection(ReadOnlySpan<byte> text, int at)
     {
-        if (Words.Stands(text, at, "DATA"u8)) return ReadData(text, SkipStatement(text, at));
+        if (Words.Stands(text, at, "DATA"u8))
+        {
+            // DATA; or DATA('name',('SCHEMA'));
+            var next = Blanks.Skip(text, at + "DATA".Length);
+            if (next >= 0 && next < text.Length && text[next] is not ((byte)';' or (byte)'(')) _log.Tell(FindingKinds.TextBetween, next);
+            return ReadData(text, SkipStatement(text, at));
+        }
 
         if (Words.Stands(text, at, "ANCHOR"u8) || Words.Stands(text, at, "REFERENCE"u8))
         {

@@ -7,40 +7,40 @@ namespace MemberScan.Part21.Streaming;
 /// <summary>Whether the brackets of a statement close each other, eight at a time.</summary>
 internal static class BracketOrder
 {
-    /// <summary>Depth of a statement that has had no bracket yet.</summary>
-    public const int None = -1;
-
     // Deeper ones are left to the reader that counts exactly.
     private const int DepthTaken = 48;
+
+    // Brackets taken at a time.
+    private const int Taken = 8;
 
     // Index: a one above k ≤ 8 bits, the first bracket lowest, 1 for an opening one.
     private static readonly sbyte[] s_net = Table((net, _) => net);
     private static readonly sbyte[] s_least = Table((_, least) => least);
 
-    /// <summary>Takes the brackets of a stretch: false if one stands behind the bracket that closed the first, or they are deep.</summary>
-    /// <param name="open">Opening brackets.</param>
+    /// <summary>Takes the brackets of a stretch: false if one stands behind the bracket that closed the outermost, or they are deep.</summary>
+    /// <param name="open">Opening brackets, without the outermost of a statement.</param>
     /// <param name="close">Closing brackets.</param>
-    /// <param name="depth">Brackets open before and after; <see cref="None"/> before the first.</param>
+    /// <param name="depth">Brackets open before and after; 1 at the beginning of a statement.</param>
     [MethodImpl(MethodImplOptions.AggressiveInlining)]
     public static bool TryTake(ulong open, ulong close, ref int depth)
     {
         var both = open | close;
         var count = BitOperations.PopCount(both);
-        if (count == 0) return true;
-
         var order = Gather(open, both);
-        if (depth == None)
-        {
-            if ((order & 1) == 0) return false;
-            depth = 1;
-            order >>= 1;
-            count--;
-        }
+        if (count > Taken) return TryTakeMany(order, count, ref depth);
 
+        var index = (1 << count) | (int)order;
+        var sound = depth + s_least[index] >= 1 && depth <= DepthTaken;
+        depth += s_net[index];
+        return sound;
+    }
+
+    private static bool TryTakeMany(ulong order, int count, ref int depth)
+    {
         var sound = true;
         while (count > 0)
         {
-            var taken = Math.Min(count, 8);
+            var taken = Math.Min(count, Taken);
             var index = (1 << taken) | (int)(order & ((1UL << taken) - 1));
             sound &= depth + s_least[index] >= 1 && depth <= DepthTaken;
             depth += s_net[index];

@@ -15,7 +15,9 @@ internal sealed class DataPass
     /// <summary>Length of a stretch [byte].</summary>
     public const int ShippedStretch = 8 * 1024 * 1024;
 
-    private const int WindowLength = 256 * 1024;
+    /// <summary>Length of the window that a stretch is read through [byte].</summary>
+    public const int ShippedWindow = 256 * 1024;
+
     private const int LookBack = 64;
     private const int GuessLength = 64 * 1024;
 
@@ -23,18 +25,20 @@ internal sealed class DataPass
     private readonly WantedKeywords _wanted;
     private readonly ReadingLimits _limits;
     private readonly int _stretch;
+    private readonly int _windowLength;
     private readonly ChunkResult?[] _guessed;
     private readonly DataScanner _scanner;
     private readonly Window _window;
 
-    public DataPass(ByteSource source, WantedKeywords wanted, ReadingLimits limits, int stretch)
+    public DataPass(ByteSource source, WantedKeywords wanted, ReadingLimits limits, int stretch, int window)
     {
         _source = source;
         _wanted = wanted;
         _limits = limits with { RescannedBytes = Math.Min(limits.RescannedBytes, 8L * stretch) };
         _stretch = stretch;
+        _windowLength = window;
         _guessed = new ChunkResult?[(source.Length + stretch - 1) / stretch];
-        (_scanner, _window) = (new DataScanner(new FindingLog(), _limits), new Window(source, WindowLength));
+        (_scanner, _window) = (new DataScanner(new FindingLog(), _limits), new Window(source, window));
     }
 
     public List<BlockEntry> Blocks { get; } = [];
@@ -56,7 +60,7 @@ internal sealed class DataPass
             {
                 try
                 {
-                    Work(new DataScanner(new FindingLog(), _limits), new Window(_source, WindowLength));
+                    Work(new DataScanner(new FindingLog(), _limits), new Window(_source, _windowLength));
                 }
                 catch (IOException thrown)
                 {

@@ -129,7 +129,7 @@ internal struct PlainRules
         if (trap != Vector512<ulong>.Zero) bad |= Traps(trap, ref bytes, block);
 
         bad.CopyTo(found[Found.Bad..]);
-        open.CopyTo(found[Found.Open..]);
+        (open & ~headEnd).CopyTo(found[Found.Open..]);
         close.CopyTo(found[Found.Close..]);
         semicolon.CopyTo(found[Found.Semicolon..]);
         equals.CopyTo(found[Found.EqualsSign..]);

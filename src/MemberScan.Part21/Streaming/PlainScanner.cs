@@ -44,7 +44,7 @@ internal static class PlainScanner
         rules.Begin();
 
         var start = -1;            // of the statement being read; −1 between statements
-        var depth = BracketOrder.None;
+        var depth = 1;
         var equalsSigns = 0;
         var broken = 0UL;
         var between = at;          // where the search for the next statement stands
@@ -93,7 +93,7 @@ internal static class PlainScanner
                         if (Unsafe.Add(ref bytes, at) != '#') return PlainStop.NoInstance;
 
                         start = at;
-                        depth = BracketOrder.None;
+                        depth = 1;
                         equalsSigns = 0;
                         broken = 0;
                         rest &= ulong.MaxValue << first;
