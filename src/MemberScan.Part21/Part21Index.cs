@@ -36,9 +36,8 @@ public sealed class Part21Index : IDisposable
 
         Count = pass.Count;
         InsertionOffset = structure.InsertionOffset;
-        var beginning = new SourceText(structure.Beginning, name);
-        Header = Part21Header.From(beginning, structure.Header);
-        LineEnd = beginning.LineEnd;
+        Header = Part21Header.From(new SourceText(structure.HeaderText, name), structure.Header);
+        LineEnd = new SourceText(structure.Beginning, name).LineEnd;
         _places = Grouped(pass.Places, _wanted.Length);
         _blocks = new BlockIndex(pass.Blocks, source, NewScanner());
         TellDuplicates(log);

@@ -41,6 +41,7 @@ public sealed class Part21IndexTests
     [InlineData("#1=A(1);/* never closed #2=B();\n#3=C();")]
     [InlineData("#1=A(1)\n#2=B(2);;#3=C(3);\nrubbish; #4=D(4);")]
     [InlineData("#1=A(1);ENDSEC;\nDATA;\n#2=B(2);\nENDSEC;\nREFERENCE;#5=<x>;ENDSEC;DATA;#3=C();")]
+    [InlineData("#1=A();\nENDSEC;\nHEADER;\nFILE_SCHEMA(('IFC9'));ENDSEC;DATA;#2=B();")]
     [InlineData("#1=A('line\nbreak','tab\tx','\u00e4');\n#2=B(\u00e4);")]
     public void Small_texts_read_the_same(string data)
     {
@@ -53,6 +54,19 @@ public sealed class Part21IndexTests
             var at = Sample.Header.Length;
             AssertAgrees([.. bytes[..at], .. comment, .. bytes[at..]], 4096, 1024, 1);
         }
+    }
+
+    [Theory]
+    [InlineData("ISO-10303-21;\nDATA;\n#1=A();\nENDSEC;\nHEADER;\nFILE_SCHEMA(('IFC4'));\nENDSEC;\nDATA;\n#2=B();\nENDSEC;\nEND-ISO-10303-21;")]
+    [InlineData("rubbish\nISO-10303-21;HEADER;ENDSEC;DATA;#1=A();ENDSEC;END-ISO-10303-21;\nISO-10303-21;\nHEADER;")]
+    [InlineData("ISO-10303-21;HEADER;FILE_NAME('x;DATA;#1=A();ENDSEC;")]
+    [InlineData("ISO-10303-21;HEADER;ENDSEC;DATA;#1=A();ENDSEC;END-ISO-10303-21;SIGNATURE;AA==;ENDSEC;")]
+    [InlineData("ISO-10303-21;HEADER;ENDSEC;DATA.;#1=A();ENDSEC;END-ISO-10303-21;")]
+    [InlineData("no model at all")]
+    [InlineData("")]
+    public void Odd_structures_read_the_same(string text)
+    {
+        AssertAgrees(Encoding.Latin1.GetBytes(text), 4096, 1024, 1);
     }
 
     [Fact]

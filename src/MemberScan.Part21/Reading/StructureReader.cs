@@ -55,17 +55,21 @@ internal sealed class StructureReader
     public bool ReadBeginning(ReadOnlySpan<byte> text)
     {
         var start = FindStart(text);
-        if (start >= 0) ReadSections(text, start, hasHeader: false);
+        if (start >= 0) ReadSections(text, start);
         return start >= 0;
     }
 
+    /// <summary>Whether a header was read, here or before; a second one is none.</summary>
+    public bool HasHeader { get; private set; }
+
     /// <summary>Reads from where the instances of a data section end up to those of the next one.</summary>
-    public void ReadBehindData(ReadOnlySpan<byte> text)
+    public void ReadBehindData(ReadOnlySpan<byte> text, bool hasHeader)
     {
+        HasHeader = hasHeader;
         var at = 0;
         if (Words.Stands(text, at, "ENDSEC"u8)) at = ReadEndOfData(text, at);
         else if (text.Length > 0) _log.Tell(FindingKinds.EndOfSectionMissing, at);
-        ReadSections(text, at, hasHeader: true);
+        ReadSections(text, at);
     }
 
     /// <summary>Tells what a header lacks, and if there were no data.</summary>
@@ -81,7 +85,7 @@ internal sealed class StructureReader
         var start = FindStart(text);
         if (start >= 0)
         {
-            ReadSections(text, start, hasHeader: false);
+            ReadSections(text, start);
             TellMissing(_hasData);
         }
 
@@ -147,7 +151,7 @@ internal sealed class StructureReader
         }
     }
 
-    private void ReadSections(ReadOnlySpan<byte> text, int at, bool hasHeader)
+    private void ReadSections(ReadOnlySpan<byte> text, int at)
     {
         while (at >= 0 && !_isOver)
         {
@@ -159,9 +163,9 @@ internal sealed class StructureReader
                 break;
             }
 
-            if (!hasHeader && Words.Stands(text, at, "HEADER"u8))
+            if (!HasHeader && Words.Stands(text, at, "HEADER"u8))
             {
-                hasHeader = true;
+                HasHeader = true;
                 at = _header.Read(text, TakeSemicolon(text, at + "HEADER".Length));
             }
             else

@@ -16,11 +16,15 @@ internal sealed class StreamedStructure(ByteSource source, FindingLog log, Readi
     private const int Lookahead = 4096;
 
     private bool _hasData;
+    private bool _hasHeader;
 
-    /// <summary>The entries of the header; their offsets count from the start of the file.</summary>
+    /// <summary>The entries of the header; their offsets count from the start of <see cref="HeaderText"/>.</summary>
     public ImmutableArray<HeaderEntry> Header { get; private set; } = [];
 
-    /// <summary>The piece that the header stands in, from the start of the file on.</summary>
+    /// <summary>The piece that the header stands in.</summary>
+    public byte[] HeaderText { get; private set; } = [];
+
+    /// <summary>The piece at the start of the file.</summary>
     public byte[] Beginning { get; private set; } = [];
 
     /// <summary>Offset of the last data section's ENDSEC [byte]; −1 if none.</summary>
@@ -29,7 +33,7 @@ internal sealed class StreamedStructure(ByteSource source, FindingLog log, Readi
     public void Read()
     {
         var first = Piece(0, isFirst: true, out var isStructure);
-        Header = first.Header;
+        var header = first;
         var at = (long)first.DataStart;
         while (at >= 0)
         {
@@ -39,11 +43,12 @@ internal sealed class StreamedStructure(ByteSource source, FindingLog log, Readi
 
             var next = Piece(at, isFirst: false, out _);
             if (next.DataEnd >= 0) InsertionOffset = at + next.DataEnd;
+            if (!header.HasHeader) header = next;
             at = next.DataStart < 0 ? -1 : at + next.DataStart;
         }
 
-        if (isStructure) first.TellMissing(_hasData);
-        Hand(first, 0);
+        if (isStructure) header.TellMissing(_hasData);
+        Hand(header, 0);
     }
 
     // Reads on from 'at' to the next data section or the end, in a piece as large as that takes.
@@ -56,13 +61,14 @@ internal sealed class StreamedStructure(ByteSource source, FindingLog log, Readi
             var reader = new StructureReader(new FindingLog(), limits);
             isStructure = true;
             if (isFirst) isStructure = reader.ReadBeginning(text);
-            else reader.ReadBehindData(text);
+            else reader.ReadBehindData(text, _hasHeader);
 
             var isWhole = at + text.Length == source.Length || length == LargestPiece;
             var isConclusive = reader.DataStart >= 0 && reader.DataStart <= text.Length - Lookahead;
             if (!isWhole && !isConclusive) continue;
 
             if (isFirst) Beginning = text;
+            if (reader.HasHeader && !_hasHeader) (Header, HeaderText, _hasHeader) = (reader.Header, text, true);
             Hand(reader, at);
             return reader;
         }
