@@ -161,13 +161,17 @@ public sealed class Part21Index : IDisposable
 
     private static DataScanner NewScanner() => new(new FindingLog(), Part21File.ShippedLimits);
 
-    private static long[][] Grouped(List<PlaceRow> places, int keywords)
+    private static long[][] Grouped(List<List<PlaceRow>> places, int keywords)
     {
         var counts = new int[keywords];
-        foreach (var place in places) counts[place.Keyword]++;
+        foreach (var part in places)
+            foreach (var place in part)
+                counts[place.Keyword]++;
         var grouped = Array.ConvertAll(counts, c => new long[c]);
         Array.Clear(counts);
-        foreach (var place in places) grouped[place.Keyword][counts[place.Keyword]++] = place.Offset;
+        foreach (var part in places)
+            foreach (var place in part)
+                grouped[place.Keyword][counts[place.Keyword]++] = place.Offset;
         return grouped;
     }
 

@@ -23,22 +23,19 @@ internal sealed class BlockIndex
     private readonly ushort[] _lows = [];
     private readonly byte[] _blocks = [];
 
-    public BlockIndex(List<BlockEntry> entries, ByteSource source, DataScanner scanner)
+    public BlockIndex(List<List<BlockEntry>> entries, ByteSource source, DataScanner scanner)
     {
-        _entries = [.. entries];
-        var rising = new List<int>();
-        var last = -1L;
-        for (var i = 0; i < _entries.Length; i++)
+        _entries = new BlockEntry[entries.Sum(e => e.Count)];
+        var count = 0;
+        foreach (var part in entries)
         {
-            if (!_entries[i].Rises || _entries[i].FirstId <= last) continue;
-
-            rising.Add(i);
-            last = _entries[i].LastId;
+            part.CopyTo(_entries, count);
+            count += part.Count;
         }
 
-        if (rising.Count == _entries.Length) return;
+        if (CountRising() == _entries.Length) return;
 
-        _rising = [.. rising];
+        _rising = ListRising();
         var highest = 0u;
         var counts = new uint[65_537];
         var tally = new TallySink(this, counts, []);
@@ -106,6 +103,31 @@ internal sealed class BlockIndex
         for (var group = 0; group + 1 < _groups.Length; group++)
             for (var i = (int)_groups[group]; i < _groups[group + 1]; i++)
                 yield return (((uint)group << 16) | _lows[i], BlockAt(i));
+    }
+
+    private int CountRising()
+    {
+        var (count, last) = (0, -1L);
+        foreach (ref readonly var entry in _entries.AsSpan()) count += IsRising(entry, ref last) ? 1 : 0;
+        return count;
+    }
+
+    private int[] ListRising()
+    {
+        var rising = new int[CountRising()];
+        var (count, last) = (0, -1L);
+        for (var i = 0; i < _entries.Length; i++)
+            if (IsRising(_entries[i], ref last))
+                rising[count++] = i;
+        return rising;
+    }
+
+    private static bool IsRising(in BlockEntry entry, ref long last)
+    {
+        if (!entry.Rises || entry.FirstId <= last) return false;
+
+        last = entry.LastId;
+        return true;
     }
 
     private int EntryAt(int place) => _rising is null ? place : _rising[place];

@@ -41,9 +41,11 @@ internal sealed class DataPass
         (_scanner, _window) = (new DataScanner(new FindingLog(), _limits), new Window(source, window));
     }
 
-    public List<BlockEntry> Blocks { get; } = [];
+    /// <summary>Anchors by stretch, in file order.</summary>
+    public List<List<BlockEntry>> Blocks { get; } = [];
 
-    public List<PlaceRow> Places { get; } = [];
+    /// <summary>Rows of wanted keywords by stretch, in file order.</summary>
+    public List<List<PlaceRow>> Places { get; } = [];
 
     /// <summary>Number of instances.</summary>
     public long Count { get; private set; }
@@ -108,8 +110,8 @@ internal sealed class DataPass
             _guessed[number] = null;
             var result = guessed?.From == at ? guessed : Scan(_scanner, _window, at, (long)(number + 1) * _stretch);
             log.Take(result.Findings, 0);
-            Blocks.AddRange(result.Blocks);
-            Places.AddRange(result.Places);
+            Blocks.Add(result.Blocks);
+            Places.Add(result.Places);
             Count += result.Count;
             at = result.End;
             if (Count > _limits.Instances)

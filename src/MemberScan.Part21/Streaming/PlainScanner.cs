@@ -1,3 +1,4 @@
+using System.Buffers.Binary;
 using System.Numerics;
 using System.Runtime.CompilerServices;
 using System.Runtime.InteropServices;
@@ -39,6 +40,7 @@ internal static class PlainScanner
         Span<ulong> classWords = stackalloc ulong[ByteClasses.Words];
         Span<ulong> insideWords = stackalloc ulong[8];
         Span<ulong> found = stackalloc ulong[Found.Words];
+        ref var results = ref MemoryMarshal.GetReference(found);
         var classes = new ByteClasses(classWords);
         var rules = new PlainRules();
         rules.Begin();
@@ -71,16 +73,16 @@ internal static class PlainScanner
                 if (loaded <= 0) break;
 
                 var rest = loaded >= 64 ? ulong.MaxValue : (1UL << loaded) - 1;
-                var semicolon = found[Found.Semicolon + i] & rest;
-                var bad = found[Found.Bad + i];
-                var open = found[Found.Open + i];
-                var close = found[Found.Close + i];
-                var equals = found[Found.EqualsSign + i];
+                var semicolon = Unsafe.Add(ref results, Found.Semicolon + i) & rest;
+                var bad = Unsafe.Add(ref results, Found.Bad + i);
+                var open = Unsafe.Add(ref results, Found.Open + i);
+                var close = Unsafe.Add(ref results, Found.Close + i);
+                var equals = Unsafe.Add(ref results, Found.EqualsSign + i);
                 while (true)
                 {
                     if (start < 0)
                     {
-                        var next = ~found[Found.Blank + i] & rest;
+                        var next = ~Unsafe.Add(ref results, Found.Blank + i) & rest;
                         if (next == 0)
                         {
                             between = Math.Min(word + 64, length);
@@ -140,10 +142,11 @@ internal static class PlainScanner
     private static bool TryHead(ref byte bytes, int start, int end, out uint id, out int keyword, out int length)
     {
         var at = start + 1;
-        var number = 0UL;
+        var number = EightDigits(ref Unsafe.Add(ref bytes, at), out var digits);
+        at += digits;
         keyword = length = 0;
         id = 0;
-        while (true)
+        while (digits >= 8)
         {
             var digit = (uint)Unsafe.Add(ref bytes, at) - '0';
             if (digit > 9) break;
@@ -171,5 +174,21 @@ internal static class PlainScanner
 
         var first = Unsafe.Add(ref bytes, at);
         return length > 0 && length <= LongestKeyword && (char.IsAsciiLetterUpper((char)first) || first == '_');
+    }
+
+    // The number that up to eight digits spell, by three multiplications; and how many there are.
+    [MethodImpl(MethodImplOptions.AggressiveInlining)]
+    private static ulong EightDigits(ref byte first, out int count)
+    {
+        var bytes = BinaryPrimitives.ReadUInt64LittleEndian(MemoryMarshal.CreateReadOnlySpan(ref first, 8)) ^ 0x3030_3030_3030_3030;
+        var others = (((bytes & 0x7F7F_7F7F_7F7F_7F7F) + 0x7676_7676_7676_7676) | bytes) & 0x8080_8080_8080_8080;
+        count = BitOperations.TrailingZeroCount(others) >> 3;
+        if (count == 0) return 0;
+
+        // Leading zeros in place of what follows the digits; then pairs, fours, eight.
+        bytes <<= 64 - 8 * count;
+        bytes = (bytes * 10 + (bytes >> 8)) & 0x00FF_00FF_00FF_00FF;
+        bytes = (bytes * 100 + (bytes >> 16)) & 0x0000_FFFF_0000_FFFF;
+        return (bytes * 10_000 + (bytes >> 32)) & 0xFFFF_FFFF;
     }
 }

@@ -25,6 +25,7 @@ internal sealed class IndexedQuestion
         var watch = Stopwatch.StartNew();
         using var index = Part21Index.Open(path, [Member, ByProperties, ByType], new DiagnosticList(), threads);
         var opened = watch.Elapsed;
+        var (first, second) = (GC.CollectionCount(0), GC.CollectionCount(1));
         if (threads == 0) threads = Environment.ProcessorCount;
 
         var pairs = Relations(index, threads);
@@ -41,7 +42,7 @@ internal sealed class IndexedQuestion
 
         for (var i = 1; i < threads; i++) parts[0].Add(parts[i]);
         if (Environment.GetEnvironmentVariable("QUESTION_TIMES") is not null)
-            Console.Error.WriteLine($"open {opened.TotalMilliseconds:F0} relations {(related - opened).TotalMilliseconds:F0} members {(watch.Elapsed - related).TotalMilliseconds:F0} ms, collections {GC.CollectionCount(0)} {GC.CollectionCount(1)} {GC.CollectionCount(2)}");
+            Console.Error.WriteLine($"open {opened.TotalMilliseconds:F0} relations {(related - opened).TotalMilliseconds:F0} members {(watch.Elapsed - related).TotalMilliseconds:F0} ms, collections {first} ({second} above generation 0) in the pass, {GC.CollectionCount(0)} ({GC.CollectionCount(1)}) in all");
         return parts[0];
     }
 
