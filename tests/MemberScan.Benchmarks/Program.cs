@@ -3,13 +3,17 @@ using BenchmarkDotNet.Running;
 using MemberScan.Benchmarks.Models;
 using MemberScan.Benchmarks.Question;
 
-// generate NAME FILE | question FILE [THREADS] | checked FILE; anything else goes to BenchmarkDotNet.
+// generate NAME FILE | question FILE [THREADS] | checked FILE | pass FILE THREADS | scan FILE | append FILE TARGET [disk]; anything else goes to
+// BenchmarkDotNet. compare.sh measures them beside other programs.
 return args switch
 {
     ["generate", var name, var path] => Generate(name, path),
     ["question", var path] => Print(IndexedQuestion.Ask(path, 0)),
     ["question", var path, var threads] => Print(IndexedQuestion.Ask(path, int.Parse(threads, CultureInfo.InvariantCulture))),
     ["pass", var path, var threads] => IndexedQuestion.Pass(path, int.Parse(threads, CultureInfo.InvariantCulture)),
+    ["append", var path, var target] => AppendedSets.Write(path, target, toDisk: false),
+    ["append", var path, var target, "disk"] => AppendedSets.Write(path, target, toDisk: true),
+    ["scan", var path] => MaskScan.Run(path),
     ["checked", var path] => Print(CheckedQuestion.Ask(path)),
     _ => Benchmark(args),
 };

@@ -112,8 +112,9 @@ public sealed class Part21Edits
 
     /// <summary>Writes the changed text to a file that is there as a whole or, if anything fails, not touched: a temporary file beside it takes its place.</summary>
     /// <param name="path">The file; it may be the one that was indexed.</param>
+    /// <param name="toDisk">Whether to wait until the disk has it, so that not even a power cut leaves half a file; a copy command does not.</param>
     /// <exception cref="IOException">It cannot be written.</exception>
-    public void Save(string path)
+    public void Save(string path, bool toDisk = true)
     {
         ArgumentException.ThrowIfNullOrEmpty(path);
         var whole = Path.GetFullPath(path);
@@ -123,7 +124,7 @@ public sealed class Part21Edits
             using (var output = new FileStream(temporary, FileMode.CreateNew, FileAccess.Write, FileShare.None, bufferSize: 0))
             {
                 WriteTo(output);
-                output.Flush(flushToDisk: true);
+                output.Flush(toDisk);
             }
 
             File.Move(temporary, whole, overwrite: true);
