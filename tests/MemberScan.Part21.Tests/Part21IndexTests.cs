@@ -187,6 +187,35 @@ public sealed class Part21IndexTests
         Assert.True(index.CreateLookup().TryFind(uint.MaxValue, out _));
     }
 
+    [Fact]
+    public void Limits_are_the_same_and_told()
+    {
+        var limits = Part21File.ShippedLimits with { Depth = 3, StringLength = 20, InstanceLength = 3000, KeywordLength = 8 };
+        var data = $"#1=A((((1))));\n#2=A('{new string('x', 30)}');\n#3=ABCDEFGHIJ();\n#4=A({string.Join(',', Enumerable.Repeat("'abcdefg'", 400))});\n#5=A((1),'ok');";
+        var bytes = Encoding.ASCII.GetBytes(Sample.Model(data));
+
+        var toldOfFile = new DiagnosticList();
+        _ = Part21File.Read(bytes, "landing.ifc", toldOfFile, limits);
+        var toldOfIndex = new DiagnosticList();
+        using var index = Part21Index.Over(bytes, "landing.ifc", ["A"], toldOfIndex, new Part21Index.Options(limits, 4096, 1024, 1));
+
+        Assert.Equal(Shown(toldOfFile, []), Shown(toldOfIndex, []));
+        Assert.Superset(new HashSet<string>(["P21-0029", "P21-0030", "P21-0031", "P21-0032"]), toldOfIndex.Items.Select(d => d.Code).ToHashSet());
+    }
+
+    [Fact]
+    public void Reading_stops_where_there_are_too_many_instances()
+    {
+        var text = Sample.Model(string.Concat(Enumerable.Range(1, 900).Select(Filler)));
+        var told = new DiagnosticList();
+        using var index = Part21Index.Over(
+            Encoding.ASCII.GetBytes(text), "landing.ifc", [], told, new Part21Index.Options(Part21File.ShippedLimits with { Instances = 100 }, 4096, 1024, 2));
+
+        Assert.Equal("P21-0034", Assert.Single(told.Items).Code);
+        Assert.False(index.ReadToEnd);
+        Assert.InRange(index.Count, 100, 200);
+    }
+
     internal static void AssertAgrees(byte[] bytes, int stretch, int window, int threads)
     {
         var toldOfFile = new DiagnosticList();

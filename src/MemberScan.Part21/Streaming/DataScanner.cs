@@ -20,9 +20,14 @@ internal sealed class DataScanner
 
     private readonly InstanceReader _instances;
 
+    // The leaps know the limits that ship; under lower ones every instance is read by the other reader.
+    private readonly bool _leaps;
+
     public DataScanner(FindingLog log, ReadingLimits limits)
     {
         Log = log;
+        _leaps = limits.Depth >= Part21Limits.Depth && limits.InstanceLength >= Part21Limits.InstanceLength
+            && limits.StringLength >= Part21Limits.StringLength && limits.KeywordLength >= Part21Limits.KeywordLength;
         var marks = new ReferenceMarks(0) { IsOff = true };
         _instances = new InstanceReader(log, marks, new ParameterScanner(log, marks, limits), limits);
     }
@@ -46,7 +51,8 @@ internal sealed class DataScanner
         while (true)
         {
             var rest = (int)(at - window.Origin);
-            var stop = PlainScanner.Scan(window.Text, ref rest, (int)Math.Min(until - window.Origin, int.MaxValue), window.Origin, ref sink);
+            var near = (int)Math.Min(until - window.Origin, int.MaxValue);
+            var stop = _leaps ? PlainScanner.Scan(window.Text, ref rest, near, window.Origin, ref sink) : Next(window.Text, ref rest, near);
             at = window.Origin + rest;
             if (stop == PlainStop.Until) return DataStop.Until;
 
@@ -66,6 +72,14 @@ internal sealed class DataScanner
                 : TryOne(window, ref at, keepsText ? from : at, ref sink, out end);
             if (!isUnderstood) return end;
         }
+    }
+
+    private static PlainStop Next(ReadOnlySpan<byte> text, ref int at, int until)
+    {
+        while (at < text.Length && Blanks.IsBlank(text[at])) at++;
+        if (at == text.Length) return PlainStop.More;
+        if (at >= until) return PlainStop.Until;
+        return text[at] == '#' ? PlainStop.NotPlain : PlainStop.NoInstance;
     }
 
     // One instance by the other reader, with as much text as it needs.

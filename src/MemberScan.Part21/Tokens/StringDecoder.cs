@@ -1,5 +1,4 @@
 using System.Buffers;
-using System.Globalization;
 using System.Text;
 using System.Text.Unicode;
 
@@ -55,7 +54,7 @@ internal static class StringDecoder
         {
             var run = bytes[at..].IndexOfAny((byte)'\\', (byte)'\'');
             if (run < 0) run = bytes.Length - at;
-            text.Length += raw.GetChars(bytes.Slice(at, run), text.Rest);
+            text.Length += Chars(raw, bytes.Slice(at, run), text.Rest);
             at += run;
             if (at >= bytes.Length) break;
 
@@ -152,8 +151,25 @@ internal static class StringDecoder
         return true;
     }
 
-    private static bool TryHex(ReadOnlySpan<byte> digits, out uint value) =>
-        uint.TryParse(digits, NumberStyles.AllowHexSpecifier, CultureInfo.InvariantCulture, out value);
+    private static bool TryHex(ReadOnlySpan<byte> digits, out uint value)
+    {
+        value = 0;
+        foreach (var digit in digits)
+        {
+            if (!char.IsAsciiHexDigit((char)digit)) return false;
+            value = value << 4 | (uint)(digit <= '9' ? digit - '0' : (digit | 0x20) - 'a' + 10);
+        }
+
+        return true;
+    }
+
+    private static int Chars(Encoding raw, ReadOnlySpan<byte> bytes, Span<char> buffer)
+    {
+        if (!Ascii.IsValid(bytes)) return raw.GetChars(bytes, buffer);
+
+        _ = Ascii.ToUtf16(bytes, buffer, out var written);
+        return written;
+    }
 
     // Half a pair has no UTF-8 spelling and would stop every writer further on.
     private static void MendLoneSurrogates(Span<char> text)
