@@ -12,6 +12,7 @@ namespace MemberScan.Part21.Tokens;
 internal static class StringDecoder
 {
     private static readonly SearchValues<byte> s_plain = SearchValues.Create(PlainBytes());
+    private static readonly SearchValues<byte> s_controls = SearchValues.Create([.. Enumerable.Range(0, 0x20).Select(b => (byte)b), 0x7F]);
     private static readonly Encoding s_windows1252 = CodePagesEncodingProvider.Instance.GetEncoding(1252)!;
 
     /// <summary>Decodes what stands between the outer apostrophes.</summary>
@@ -30,7 +31,7 @@ internal static class StringDecoder
     public static int Decode(ReadOnlySpan<byte> content, Span<char> buffer)
     {
         if (content.IndexOfAnyExcept(s_plain) < 0) return Encoding.ASCII.GetChars(content, buffer);
-        if (content.IndexOfAnyInRange((byte)0, (byte)0x1F) < 0 && !content.Contains((byte)0x7F)) return DecodeDirectives(content, buffer);
+        if (!content.ContainsAny(s_controls)) return DecodeDirectives(content, buffer);
 
         var kept = ArrayPool<byte>.Shared.Rent(content.Length);
         var count = 0;
@@ -174,8 +175,6 @@ internal static class StringDecoder
     // Half a pair has no UTF-8 spelling and would stop every writer further on.
     private static void MendLoneSurrogates(Span<char> text)
     {
-        if (text.IndexOfAnyInRange('\uD800', '\uDFFF') < 0) return;
-
         for (var i = 0; i < text.Length; i++)
         {
             if (!char.IsSurrogate(text[i])) continue;
