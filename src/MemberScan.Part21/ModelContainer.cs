@@ -1,5 +1,5 @@
 using MemberScan.Part21.Containers;
-using MemberScan.Part21.Streaming;
+using MemberScan.Part21.Sources;
 
 namespace MemberScan.Part21;
 

@@ -1,8 +1,10 @@
 using System.Collections.Immutable;
 using MemberScan.Foundation.Diagnostics;
+using MemberScan.Part21.Blocks;
 using MemberScan.Part21.Findings;
 using MemberScan.Part21.Index;
 using MemberScan.Part21.Reading;
+using MemberScan.Part21.Sources;
 using MemberScan.Part21.Streaming;
 using MemberScan.Part21.Tokens;
 

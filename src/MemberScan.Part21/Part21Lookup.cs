@@ -1,4 +1,6 @@
+using MemberScan.Part21.Blocks;
 using MemberScan.Part21.Index;
+using MemberScan.Part21.Sources;
 using MemberScan.Part21.Streaming;
 
 namespace MemberScan.Part21;

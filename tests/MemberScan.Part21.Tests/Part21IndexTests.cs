@@ -2,6 +2,7 @@ using System.Globalization;
 using System.Text;
 using MemberScan.Foundation.Diagnostics;
 using MemberScan.OpenModels;
+using MemberScan.Part21.Tests.Sources;
 
 namespace MemberScan.Part21.Tests;
 

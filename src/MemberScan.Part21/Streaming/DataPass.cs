@@ -1,6 +1,7 @@
 using MemberScan.Part21.Findings;
 using MemberScan.Part21.Index;
 using MemberScan.Part21.Reading;
+using MemberScan.Part21.Sources;
 using MemberScan.Part21.Tokens;
 
 namespace MemberScan.Part21.Streaming;

@@ -1,7 +1,9 @@
 using System.Text;
 using MemberScan.Part21.Findings;
 using MemberScan.Part21.Index;
+using MemberScan.Part21.Plain;
 using MemberScan.Part21.Reading;
+using MemberScan.Part21.Sources;
 using MemberScan.Part21.Tokens;
 
 namespace MemberScan.Part21.Streaming;

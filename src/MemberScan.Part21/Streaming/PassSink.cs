@@ -1,4 +1,5 @@
 using MemberScan.Part21.Index;
+using MemberScan.Part21.Plain;
 
 namespace MemberScan.Part21.Streaming;
 

@@ -1,6 +1,7 @@
 using System.Collections.Immutable;
 using MemberScan.Part21.Findings;
 using MemberScan.Part21.Reading;
+using MemberScan.Part21.Sources;
 
 namespace MemberScan.Part21.Streaming;
 

@@ -2,7 +2,7 @@ using System.Numerics;
 using System.Runtime.CompilerServices;
 using System.Runtime.Intrinsics.X86;
 
-namespace MemberScan.Part21.Streaming;
+namespace MemberScan.Part21.Plain;
 
 /// <summary>Whether the brackets of a statement close each other, eight at a time.</summary>
 internal static class BracketOrder

@@ -1,6 +1,6 @@
-using MemberScan.Part21.Streaming;
+using MemberScan.Part21.Plain;
 
-namespace MemberScan.Part21.Tests.Streaming;
+namespace MemberScan.Part21.Tests.Plain;
 
 /// <summary>Classes of bytes: the wide look-up against one byte at a time.</summary>
 public sealed class ByteClassesTests

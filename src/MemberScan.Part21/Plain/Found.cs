@@ -1,4 +1,4 @@
-namespace MemberScan.Part21.Streaming;
+namespace MemberScan.Part21.Plain;
 
 /// <summary>Where the masks stand that the rules of plain layout leave: eight words each, outside of strings only; opening brackets without the outermost of a statement.</summary>
 internal static class Found

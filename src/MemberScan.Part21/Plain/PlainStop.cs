@@ -1,4 +1,4 @@
-namespace MemberScan.Part21.Streaming;
+namespace MemberScan.Part21.Plain;
 
 /// <summary>Why the scan of plain statements stopped.</summary>
 internal enum PlainStop

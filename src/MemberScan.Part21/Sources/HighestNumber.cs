@@ -1,6 +1,6 @@
 using System.Buffers;
 
-namespace MemberScan.Part21.Streaming;
+namespace MemberScan.Part21.Sources;
 
 /// <summary>The highest number after a '#' anywhere in a text, also in strings and comments: what is above is surely free.</summary>
 internal static class HighestNumber

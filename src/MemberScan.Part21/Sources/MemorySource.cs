@@ -1,4 +1,4 @@
-namespace MemberScan.Part21.Streaming;
+namespace MemberScan.Part21.Sources;
 
 /// <summary>Bytes in memory, such as those out of an archive.</summary>
 internal sealed class MemorySource(ReadOnlyMemory<byte> bytes) : ByteSource

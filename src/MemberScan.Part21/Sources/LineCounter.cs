@@ -1,4 +1,4 @@
-namespace MemberScan.Part21.Streaming;
+namespace MemberScan.Part21.Sources;
 
 /// <summary>The lines that offsets lie in, counted in one pass up to the last of them.</summary>
 internal static class LineCounter

@@ -1,6 +1,6 @@
-using MemberScan.Part21.Streaming;
+using MemberScan.Part21.Sources;
 
-namespace MemberScan.Part21.Tests;
+namespace MemberScan.Part21.Tests.Sources;
 
 /// <summary>A source that claims to be one byte longer than the limit.</summary>
 internal sealed class EndlessSource : ByteSource

@@ -6,7 +6,7 @@ using System.Runtime.Intrinsics;
 using System.Runtime.Intrinsics.X86;
 using MemberScan.Part21.Index;
 
-namespace MemberScan.Part21.Streaming;
+namespace MemberScan.Part21.Plain;
 
 /// <summary>Walks over statements of plain layout, 64 bytes at a time, and stops at the first that is anything else.</summary>
 /// <remarks>

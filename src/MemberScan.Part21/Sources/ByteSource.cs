@@ -1,4 +1,4 @@
-namespace MemberScan.Part21.Streaming;
+namespace MemberScan.Part21.Sources;
 
 /// <summary>Bytes that can be read from any place, by several threads at a time.</summary>
 internal abstract class ByteSource

@@ -1,9 +1,9 @@
 using System.Numerics;
 using System.Runtime.CompilerServices;
 using System.Runtime.Intrinsics;
-using static MemberScan.Part21.Streaming.WideBits;
+using static MemberScan.Part21.Plain.WideBits;
 
-namespace MemberScan.Part21.Streaming;
+namespace MemberScan.Part21.Plain;
 
 /// <summary>The rules of plain layout over 512 bytes at a time; what the rules look back to is kept from one time to the next.</summary>
 internal struct PlainRules

@@ -1,6 +1,9 @@
+using MemberScan.Part21.Index;
+using MemberScan.Part21.Plain;
+using MemberScan.Part21.Sources;
 using MemberScan.Part21.Streaming;
 
-namespace MemberScan.Part21.Index;
+namespace MemberScan.Part21.Blocks;
 
 /// <summary>The text of one block, or of one instance, with its instances.</summary>
 /// <param name="source">The text.</param>

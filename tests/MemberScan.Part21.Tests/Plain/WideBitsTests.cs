@@ -1,7 +1,7 @@
 using System.Runtime.Intrinsics;
-using MemberScan.Part21.Streaming;
+using MemberScan.Part21.Plain;
 
-namespace MemberScan.Part21.Tests.Streaming;
+namespace MemberScan.Part21.Tests.Plain;
 
 /// <summary>Masks of 512 bits against the same done bit by bit.</summary>
 public sealed class WideBitsTests

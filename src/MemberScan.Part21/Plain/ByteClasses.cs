@@ -3,7 +3,7 @@ using System.Runtime.InteropServices;
 using System.Runtime.Intrinsics;
 using System.Runtime.Intrinsics.X86;
 
-namespace MemberScan.Part21.Streaming;
+namespace MemberScan.Part21.Plain;
 
 /// <summary>Where the bytes of each class stand among 512: bit i of word w is byte 64·w + i.</summary>
 /// <remarks>One table look-up for 64 bytes where the processor has it (AVX-512 VBMI), else one for each byte: the same bits.</remarks>

@@ -1,6 +1,6 @@
 using Microsoft.Win32.SafeHandles;
 
-namespace MemberScan.Part21.Streaming;
+namespace MemberScan.Part21.Sources;
 
 /// <summary>The bytes of a file; its length is that at the beginning.</summary>
 internal sealed class FileSource(SafeFileHandle file) : ByteSource

@@ -4,7 +4,7 @@ using System.Text.Json;
 using MemberScan.Foundation.Diagnostics;
 using MemberScan.OpenModels;
 
-namespace MemberScan.Part21.Tests;
+namespace MemberScan.Part21.Tests.Sources;
 
 /// <summary>Numbers of instances against web-ifc, a parser that shares no code with this project.</summary>
 public sealed class IndependentCountTests

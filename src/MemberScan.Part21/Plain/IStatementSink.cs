@@ -1,4 +1,4 @@
-namespace MemberScan.Part21.Streaming;
+namespace MemberScan.Part21.Plain;
 
 /// <summary>Takes the instances that a scan finds, in file order.</summary>
 /// <remarks>Implemented by structs, so that the scan is compiled for each and calls nothing through a table.</remarks>

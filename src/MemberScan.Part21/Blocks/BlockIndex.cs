@@ -1,7 +1,10 @@
 using System.Buffers.Binary;
+using MemberScan.Part21.Index;
+using MemberScan.Part21.Plain;
+using MemberScan.Part21.Sources;
 using MemberScan.Part21.Streaming;
 
-namespace MemberScan.Part21.Index;
+namespace MemberScan.Part21.Blocks;
 
 /// <summary>Instance number → block: the anchors themselves where numbers rise, five bytes an instance elsewhere.</summary>
 /// <remarks>

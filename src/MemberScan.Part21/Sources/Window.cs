@@ -1,4 +1,6 @@
-namespace MemberScan.Part21.Streaming;
+using MemberScan.Part21.Plain;
+
+namespace MemberScan.Part21.Sources;
 
 /// <summary>A stretch of a source in memory; it moves forward and grows where one statement needs it.</summary>
 internal sealed class Window(ByteSource source, int size)
