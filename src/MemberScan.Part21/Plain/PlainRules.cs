@@ -22,6 +22,7 @@ internal struct PlainRules
     /// <param name="block">Where the 512 bytes begin in it.</param>
     /// <param name="length">Length of the text [byte].</param>
     /// <param name="found">Receives the masks of <see cref="Found"/>.</param>
+    /// <remarks>In one piece: forty masks are shared by the rules and stay in registers.</remarks>
     [MethodImpl(MethodImplOptions.AggressiveOptimization)]
     public void Apply(scoped in ByteClasses classes, Vector512<ulong> inside, ref byte bytes, int block, int length, scoped Span<ulong> found)
     {

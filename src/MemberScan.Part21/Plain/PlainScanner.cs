@@ -31,6 +31,7 @@ internal static class PlainScanner
     /// <param name="until">Statements that begin here or beyond are left.</param>
     /// <param name="origin">Offset of the text in the file.</param>
     /// <param name="sink">Receives each instance.</param>
+    /// <remarks>In one piece: what is known of the statement under way is kept in locals from one word to the next.</remarks>
     [MethodImpl(MethodImplOptions.AggressiveOptimization)]
     public static PlainStop Scan<TSink>(ReadOnlySpan<byte> text, ref int at, int until, long origin, ref TSink sink)
         where TSink : struct, IStatementSink
