@@ -1,4 +1,5 @@
 using MemberScan.Part21.Containers;
+using MemberScan.Part21.Sources;
 
 namespace MemberScan.Part21;
 
@@ -27,6 +28,30 @@ public static class ModelContainer
         try
         {
             return Read(file, name, maxBytes, maxRatio);
+        }
+        catch (RefusedContainer refusal)
+        {
+            throw new InvalidDataException(refusal.Message, refusal);
+        }
+    }
+
+    /// <summary>Whether a file is a zip or gzip by its first bytes.</summary>
+    internal static bool IsArchive(string path)
+    {
+        using var file = Open(path);
+        Span<byte> magic = stackalloc byte[4];
+        var count = file.ReadAtLeast(magic, magic.Length, throwOnEndOfStream: false);
+        return magic[..count] is [(byte)'P', (byte)'K', 3 or 5 or 7, ..] or [0x1F, 0x8B, ..];
+    }
+
+    /// <summary>Refuses a text in another encoding by its beginning.</summary>
+    /// <exception cref="InvalidDataException">It is UTF-16, XML or JSON.</exception>
+    internal static void RefuseForeign(ByteSource source, string name)
+    {
+        Span<byte> beginning = stackalloc byte[256];
+        try
+        {
+            ForeignEncoding.Refuse(beginning[..source.Read(0, beginning)], name);
         }
         catch (RefusedContainer refusal)
         {

@@ -1,3 +1,38 @@
+using System.Globalization;
 using BenchmarkDotNet.Running;
+using MemberScan.Benchmarks.Models;
+using MemberScan.Benchmarks.Question;
 
-BenchmarkSwitcher.FromAssembly(typeof(Program).Assembly).Run(args);
+// generate NAME FILE | question FILE [THREADS] | checked FILE | pass FILE THREADS | scan FILE | append FILE TARGET [disk]; anything else goes to
+// BenchmarkDotNet. compare.sh measures them beside other programs.
+return args switch
+{
+    ["generate", var name, var path] => Generate(name, path),
+    ["question", var path] => Print(IndexedQuestion.Ask(path, 0)),
+    ["question", var path, var threads] => Print(IndexedQuestion.Ask(path, int.Parse(threads, CultureInfo.InvariantCulture))),
+    ["pass", var path, var threads] => IndexedQuestion.Pass(path, int.Parse(threads, CultureInfo.InvariantCulture)),
+    ["append", var path, var target] => AppendedSets.Write(path, target, toDisk: false),
+    ["append", var path, var target, "disk"] => AppendedSets.Write(path, target, toDisk: true),
+    ["scan", var path] => MaskScan.Run(path),
+    ["checked", var path] => Print(CheckedQuestion.Ask(path)),
+    _ => Benchmark(args),
+};
+
+static int Generate(string name, string path)
+{
+    using var file = new FileStream(path, FileMode.Create, FileAccess.Write, FileShare.None, 1 << 20);
+    LandingModel.Write(ModelRecipe.Named(name), file);
+    return 0;
+}
+
+static int Print(Answer answer)
+{
+    Console.WriteLine(answer);
+    return 0;
+}
+
+static int Benchmark(string[] args)
+{
+    BenchmarkSwitcher.FromAssembly(typeof(Program).Assembly).Run(args);
+    return 0;
+}

@@ -49,6 +49,7 @@ internal static class FindingKinds
     public static readonly FindingKind TooManyKeywords = Damage("P21-0033", "There are more different keywords than the limit of 65,536; instances of further ones count as damaged.");
     public static readonly FindingKind TooManyInstances = Fatal("P21-0034", "There are more instances than the limit of 200,000,000; reading stopped there.");
     public static readonly FindingKind TooMuchDamage = Fatal("P21-0035", "So much of the text is damaged that finding the next instance took too long; reading stopped there.");
+    public static readonly FindingKind NumberOfInstanceTooLarge = Damage("P21-0036", "The number of an instance is beyond 4,294,967,295, the highest that the index holds; the instance was passed over.");
 
     private static FindingKind Fatal(string code, string message) => new(code, Severity.Error, message, EndsReading: true);
 

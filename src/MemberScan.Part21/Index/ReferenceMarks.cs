@@ -11,11 +11,15 @@ internal sealed class ReferenceMarks
     /// <param name="textLength">Length of the text [byte]; the bits take half of it at most.</param>
     public ReferenceMarks(long textLength) => _limit = 4UL * (ulong)textLength;
 
+    /// <summary>Whether references are passed over: nothing is marked, nothing grows.</summary>
+    public bool IsOff { get; init; }
+
     /// <summary>Highest number marked or noted; 0 if none.</summary>
     public ulong Highest { get; private set; }
 
     public void Mark(ulong id)
     {
+        if (IsOff) return;
         if (id > Highest) Highest = id;
         if (id >= _limit)
         {

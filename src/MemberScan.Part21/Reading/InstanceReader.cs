@@ -9,9 +9,28 @@ internal sealed class InstanceReader(FindingLog log, ReferenceMarks marks, Param
 {
     private readonly List<InstanceRow> _rows = [];
     private readonly KeywordTable _keywords = new();
-    private long _rescanned;
+
+    /// <summary>Text read a second time so far [byte].</summary>
+    public long Rescanned { get; set; }
+
+    /// <summary>How far into its text the last call looked [byte].</summary>
+    public int Reached { get; private set; }
 
     public InstanceTable Build() => new(_rows, _keywords);
+
+    /// <summary>Takes the row that the last call left out of the table; false if it left none.</summary>
+    public bool TryTakeRow(out InstanceRow row, out string keyword)
+    {
+        row = _rows.Count > 0 ? _rows[^1] : default;
+        keyword = _keywords[row.Keyword];
+        if (_rows.Count == 0) return false;
+
+        _rows.Clear();
+        return true;
+    }
+
+    /// <summary>Notes how far a look outside of an instance went.</summary>
+    public int LookedTo(int at) => Reached = at;
 
     /// <summary>Reads the instance whose '#' stands at <paramref name="start"/>.</summary>
     /// <returns>Where reading goes on; −1 if it stops at a limit.</returns>
@@ -28,6 +47,7 @@ internal sealed class InstanceReader(FindingLog log, ReferenceMarks marks, Param
         var draft = new Draft();
         if (!TryRead(text, start, ref draft, out var fault)) return PassOver(all, start, text.Length, draft, fault);
 
+        Reached = start + draft.At;
         marks.Note(draft.Id);
         _rows.Add(new InstanceRow(start, draft.At, draft.Id, draft.Keyword, draft.Flags));
         return start + draft.At;
@@ -38,16 +58,17 @@ internal sealed class InstanceReader(FindingLog log, ReferenceMarks marks, Param
     public int Resume(ReadOnlySpan<byte> all, int from, int reached)
     {
         var resume = Resynchronizer.Next(all, from);
+        Reached = Math.Max(resume, reached);
         NoteNumbers(all[from..resume]);
         if (reached <= resume) return resume;
 
-        if (_rescanned > limits.RescannedBytes)
+        if (Rescanned > limits.RescannedBytes)
         {
             log.Tell(FindingKinds.TooMuchDamage, from);
             return -1;
         }
 
-        _rescanned += reached - resume;
+        Rescanned += reached - resume;
         return resume;
     }
 

@@ -1,3 +1,4 @@
+using System.Collections.Immutable;
 using MemberScan.Part21.Findings;
 using MemberScan.Part21.Index;
 using MemberScan.Part21.Tokens;
@@ -8,7 +9,7 @@ namespace MemberScan.Part21.Reading;
 /// <remarks>EXCHANGE_FILE = "ISO-10303-21;" HEADER_SECTION [ ANCHOR ] [ REFERENCE ] { DATA_SECTION } "END-ISO-10303-21;" { SIGNATURE }.</remarks>
 internal sealed class StructureReader
 {
-    private readonly SourceText _source;
+    private readonly SourceText? _source;
     private readonly FindingLog _log;
     private readonly ReferenceMarks _marks;
     private readonly InstanceReader _instances;
@@ -18,25 +19,79 @@ internal sealed class StructureReader
     private bool _hasData;
     private bool _isOver;
 
+    /// <summary>A reader of a whole text.</summary>
     public StructureReader(SourceText source, FindingLog log, ReadingLimits limits)
+        : this(log, limits, new ReferenceMarks(source.Bytes.Length)) => _source = source;
+
+    /// <summary>A reader of pieces between data sections, whose instances another one takes.</summary>
+    public StructureReader(FindingLog log, ReadingLimits limits)
+        : this(log, limits, new ReferenceMarks(0) { IsOff = true })
     {
-        _source = source;
+    }
+
+    private StructureReader(FindingLog log, ReadingLimits limits, ReferenceMarks marks)
+    {
         _log = log;
-        _marks = new ReferenceMarks(source.Bytes.Length);
+        _marks = marks;
         var parameters = new ParameterScanner(log, _marks, limits);
         _instances = new InstanceReader(log, _marks, parameters, limits);
         _header = new HeaderReader(log, parameters);
     }
 
-    public ReadingResult Read()
+    /// <summary>What was found.</summary>
+    public FindingLog Log => _log;
+
+    /// <summary>Where the instances of a data section begin in the piece read last; −1 if it came to none.</summary>
+    public int DataStart { get; private set; } = -1;
+
+    /// <summary>Where the <c>ENDSEC</c> of a data section stands in the piece read last; −1 if there is none.</summary>
+    public int DataEnd => (int)_insertionOffset;
+
+    /// <summary>The entries of the header, by their offsets in the piece read.</summary>
+    public ImmutableArray<HeaderEntry> Header => _header.Entries;
+
+    /// <summary>Reads the beginning of a text up to its first data section.</summary>
+    /// <returns>Whether it is an exchange structure.</returns>
+    public bool ReadBeginning(ReadOnlySpan<byte> text)
     {
-        var text = _source.Bytes.Span;
         var start = FindStart(text);
         if (start >= 0) ReadSections(text, start);
+        return start >= 0;
+    }
+
+    /// <summary>Whether a header was read, here or before; a second one is none.</summary>
+    public bool HasHeader { get; private set; }
+
+    /// <summary>Reads from where the instances of a data section end up to those of the next one.</summary>
+    public void ReadBehindData(ReadOnlySpan<byte> text, bool hasHeader)
+    {
+        HasHeader = hasHeader;
+        var at = 0;
+        if (Words.Stands(text, at, "ENDSEC"u8)) at = ReadEndOfData(text, at);
+        else if (text.Length > 0) _log.Tell(FindingKinds.EndOfSectionMissing, at);
+        ReadSections(text, at);
+    }
+
+    /// <summary>Tells what a header lacks, and if there were no data.</summary>
+    public void TellMissing(bool hasData)
+    {
+        _header.TellMissing();
+        if (!hasData) _log.Tell(FindingKinds.NoData, -1);
+    }
+
+    public ReadingResult Read()
+    {
+        var text = _source!.Bytes.Span;
+        var start = FindStart(text);
+        if (start >= 0)
+        {
+            ReadSections(text, start);
+            TellMissing(_hasData);
+        }
 
         var table = _instances.Build();
         TellDuplicates(table);
-        DanglingReferences.Tell(_source, table, _marks, _log);
+        DanglingReferences.Tell(_source!, table, _marks, _log);
         return new ReadingResult
         {
             Instances = table,
@@ -98,7 +153,6 @@ internal sealed class StructureReader
 
     private void ReadSections(ReadOnlySpan<byte> text, int at)
     {
-        var hasHeader = false;
         while (at >= 0 && !_isOver)
         {
             at = SkipBlanks(text, at);
@@ -109,9 +163,9 @@ internal sealed class StructureReader
                 break;
             }
 
-            if (!hasHeader && Words.Stands(text, at, "HEADER"u8))
+            if (!HasHeader && Words.Stands(text, at, "HEADER"u8))
             {
-                hasHeader = true;
+                HasHeader = true;
                 at = _header.Read(text, TakeSemicolon(text, at + "HEADER".Length));
             }
             else
@@ -119,14 +173,17 @@ internal sealed class StructureReader
                 at = ReadSection(text, at);
             }
         }
-
-        _header.TellMissing();
-        if (!_hasData) _log.Tell(FindingKinds.NoData, -1);
     }
 
     private int ReadSection(ReadOnlySpan<byte> text, int at)
     {
-        if (Words.Stands(text, at, "DATA"u8)) return ReadData(text, SkipStatement(text, at));
+        if (Words.Stands(text, at, "DATA"u8))
+        {
+            // DATA; or DATA('name',('SCHEMA'));
+            var next = Blanks.Skip(text, at + "DATA".Length);
+            if (next >= 0 && next < text.Length && text[next] is not ((byte)';' or (byte)'(')) _log.Tell(FindingKinds.TextBetween, next);
+            return ReadData(text, SkipStatement(text, at));
+        }
 
         if (Words.Stands(text, at, "ANCHOR"u8) || Words.Stands(text, at, "REFERENCE"u8))
         {
@@ -156,6 +213,12 @@ internal sealed class StructureReader
     private int ReadData(ReadOnlySpan<byte> text, int at)
     {
         _hasData = true;
+        if (_source is null)
+        {
+            DataStart = at;
+            return -1;
+        }
+
         while (true)
         {
             at = SkipBlanks(text, at);
@@ -167,8 +230,7 @@ internal sealed class StructureReader
             }
             else if (Words.Stands(text, at, "ENDSEC"u8))
             {
-                _insertionOffset = at;
-                return TakeSemicolon(text, at + "ENDSEC".Length);
+                return ReadEndOfData(text, at);
             }
             else if (BeginsOtherSection(text, at))
             {
@@ -184,6 +246,15 @@ internal sealed class StructureReader
             if (at < 0) return at;
         }
     }
+
+    private int ReadEndOfData(ReadOnlySpan<byte> text, int at)
+    {
+        _insertionOffset = at;
+        return TakeSemicolon(text, at + "ENDSEC".Length);
+    }
+
+    /// <summary>Whether what stands there ends a data section.</summary>
+    public static bool BeginsSection(ReadOnlySpan<byte> text, int at) => Words.Stands(text, at, "ENDSEC"u8) || BeginsOtherSection(text, at);
 
     private static bool BeginsOtherSection(ReadOnlySpan<byte> text, int at) =>
         Words.Stands(text, at, "END-ISO-10303-21"u8) || Words.Stands(text, at, "ISO-10303-21"u8) || Words.Stands(text, at, "DATA"u8);

@@ -1,0 +1,43 @@
+using System.Runtime.CompilerServices;
+using System.Runtime.Intrinsics;
+using System.Runtime.Intrinsics.X86;
+
+namespace MemberScan.Part21.Plain;
+
+/// <summary>Shifts and sums over masks of 512 bits, the lowest word first.</summary>
+internal static class WideBits
+{
+    private static readonly Vector512<ulong> s_one = Vector512.Create(1UL, 2, 4, 8, 16, 32, 64, 128);
+
+    /// <summary>The bits moved up by some places, those of the mask before filled in below.</summary>
+    /// <param name="bits">The mask.</param>
+    /// <param name="previous">The mask before; afterwards this one.</param>
+    /// <param name="steps">Places, 1 to 63.</param>
+    [MethodImpl(MethodImplOptions.AggressiveInlining)]
+    public static Vector512<ulong> Before(Vector512<ulong> bits, ref Vector512<ulong> previous, int steps = 1)
+    {
+        var lower = Avx512F.IsSupported
+            ? Avx512F.AlignRight64(bits, previous, 7)
+            : Vector512.Create(previous[7], bits[0], bits[1], bits[2], bits[3], bits[4], bits[5], bits[6]);
+        previous = bits;
+        return (bits << steps) | (lower >>> (64 - steps));
+    }
+
+    /// <summary>The first bit at or above each start that is none of those to run through: a sum carries each start through its run.</summary>
+    /// <param name="starts">Where runs begin.</param>
+    /// <param name="through">What they run through.</param>
+    /// <param name="carry">1 if a run goes on from the mask before; afterwards whether one goes on into the next.</param>
+    [MethodImpl(MethodImplOptions.AggressiveInlining)]
+    public static Vector512<ulong> Run(Vector512<ulong> starts, Vector512<ulong> through, ref uint carry)
+    {
+        var sum = through + starts;
+        var over = (uint)Vector512.LessThan(sum, through).ExtractMostSignificantBits();
+        var full = (uint)Vector512.Equals(sum, Vector512<ulong>.AllBitsSet).ExtractMostSignificantBits();
+
+        // A word of ones passes a carry on: the sum of both masks finds all words that get one.
+        var carries = ((over << 1) | carry) + full;
+        carry = carries >> 8;
+        var raised = Vector512.Create((ulong)(carries ^ full)) & s_one;
+        return (sum - Vector512.Equals(raised, s_one)) & ~through;
+    }
+}

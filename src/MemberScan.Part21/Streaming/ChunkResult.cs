@@ -1,0 +1,25 @@
+using MemberScan.Part21.Findings;
+using MemberScan.Part21.Index;
+
+namespace MemberScan.Part21.Streaming;
+
+/// <summary>What the scan of one stretch of a data section gave.</summary>
+internal sealed class ChunkResult
+{
+    /// <summary>Where the scan began.</summary>
+    public required long From { get; init; }
+
+    /// <summary>Where it stopped.</summary>
+    public long End { get; set; }
+
+    public DataStop Stop { get; set; }
+
+    /// <summary>Number of instances.</summary>
+    public long Count { get; set; }
+
+    public List<BlockEntry> Blocks { get; } = [];
+
+    public List<PlaceRow> Places { get; } = [];
+
+    public List<Finding> Findings { get; } = [];
+}

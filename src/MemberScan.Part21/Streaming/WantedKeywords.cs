@@ -1,0 +1,68 @@
+using System.Runtime.CompilerServices;
+using System.Runtime.InteropServices;
+using System.Text;
+
+namespace MemberScan.Part21.Streaming;
+
+/// <summary>The keywords whose instances are indexed exactly, looked up by their bytes.</summary>
+internal sealed class WantedKeywords
+{
+    private const int Slots = 1024;
+
+    // Number + 1 of the first keyword of a slot; 0 where there is none, which settles nearly every look-up.
+    private readonly short[] _slots = new short[Slots];
+    private readonly short[] _next;
+    private readonly byte[][] _words;
+
+    public WantedKeywords(IReadOnlyList<string> words)
+    {
+        _words = [.. words.Select(Encoding.ASCII.GetBytes)];
+        _next = new short[_words.Length];
+        for (var i = 0; i < _words.Length; i++)
+        {
+            ref var slot = ref _slots[Slot(_words[i])];
+            _next[i] = slot;
+            slot = (short)(i + 1);
+        }
+    }
+
+    /// <summary>Number of keywords.</summary>
+    public int Count => _words.Length;
+
+    /// <summary>The number of an upper-case keyword; −1 if it is not wanted.</summary>
+    [MethodImpl(MethodImplOptions.AggressiveInlining)]
+    public int Find(ReadOnlySpan<byte> word)
+    {
+        var number = _slots[Slot(word)];
+        return number == 0 ? -1 : FindFrom(number - 1, word);
+    }
+
+    private int FindFrom(int number, ReadOnlySpan<byte> word)
+    {
+        while (number >= 0)
+        {
+            if (word.SequenceEqual(_words[number])) return number;
+            number = _next[number] - 1;
+        }
+
+        return -1;
+    }
+
+    // Last eight bytes and length: first ones are the same in most keywords of a schema.
+    [MethodImpl(MethodImplOptions.AggressiveInlining)]
+    private static int Slot(ReadOnlySpan<byte> word)
+    {
+        var length = word.Length;
+        var tail = length >= 8
+            ? Unsafe.ReadUnaligned<ulong>(ref Unsafe.Add(ref MemoryMarshal.GetReference(word), length - 8))
+            : Short(word);
+        return (int)((tail + (ulong)length * 0x9E37) * 0x9E3779B97F4A7C15 >> 54);
+    }
+
+    private static ulong Short(ReadOnlySpan<byte> word)
+    {
+        var bits = 0UL;
+        foreach (var letter in word) bits = bits << 8 | letter;
+        return bits;
+    }
+}
