@@ -5,7 +5,4 @@ public enum DisplayUnits
 {
     /// <summary>mm, kN, kN·m, MPa.</summary>
     Si,
-
-    /// <summary>in, kip, kip·in, ksi.</summary>
-    Us,
 }

@@ -12,7 +12,7 @@ namespace MemberScan.Mechanics.Stress;
 /// <remarks>
 /// A dense table, nodes × (y, z, τxy and τxz of unit Vy, Vz, T), of all nodes of the edges and the inside. Eight states share a pass
 /// over it, one a lane of a vector of fixed width, so that a state's result hangs neither on its neighbours nor on the machine.
-/// Some 7 to 12 times as fast as <see cref="Plain"/>, which is kept as its oracle (tests/MemberScan.Benchmarks).
+/// <see cref="Plain"/> is kept as its oracle.
 /// </remarks>
 internal sealed class BlockScan
 {

@@ -32,7 +32,7 @@ public sealed class SettingsFileTests
                 "poisson": 0.25
               },
               "stability": { "lengthFactor": 1 },
-              "display": "us",
+              "display": "si",
             }
             """);
 
@@ -52,7 +52,7 @@ public sealed class SettingsFileTests
         Assert.Equal([new YieldRange(0.016, 240e6), new YieldRange(double.PositiveInfinity, 33 * Foundation.Units.Si.Ksi(1))], grade.Yields);
         Assert.Equal("S235", settings.Reading.Grades[1].Name);
         Assert.Equal(0.25, settings.Reading.DefaultPoisson);
-        Assert.Equal((1.0, DisplayUnits.Us), (settings.LengthFactor, settings.Display));
+        Assert.Equal((1.0, DisplayUnits.Si), (settings.LengthFactor, settings.Display));
     }
 
     public static TheoryData<string> AbsentKeys => new()
@@ -112,7 +112,7 @@ public sealed class SettingsFileTests
         { "{\"basis\": []}", "INP-0104", 1, 11, "basis is a list; give an object in braces" },
         { "{\"basis\": {\"service\": {\"omega\": \"1.67\"}}}", "INP-0104", 1, 33, "basis.service.omega is a text; give a number without quotes" },
         { "{\"basis\": {\"service\": {\"omega\": null}}}", "INP-0104", 1, 33, "basis.service.omega is null; give a number without quotes" },
-        { "{\"display\": 1}", "INP-0104", 1, 13, "display is a number; give one of the texts \"si\", \"us\"" },
+        { "{\"display\": 1}", "INP-0104", 1, 13, "display is a number; give the text \"si\"" },
         { "{\"candidates\": {\"always\": \"IfcBeam\"}}", "INP-0104", 1, 27, "candidates.always is a text; give a list in square brackets" },
         { "{\"candidates\": {\"always\": [7]}}", "INP-0104", 1, 28, "candidates.always is a number; give a text in quotes" },
         { "{\"forces\": {\"kinds\": [true]}}", "INP-0104", 1, 23, "forces.kinds[1] is true or false; give an object in braces" },

@@ -64,8 +64,8 @@ public sealed class SettingsTests
     [Fact]
     public void Order_and_spelling_in_the_file_do_not_change_the_effective_text()
     {
-        var one = Read("""{"display": "us", "forces": {"turnDegreesByMember": {"b": 1, "a": 2.50}, "kinds": [{"pattern": "U*", "kind": "design"}]}}""");
-        var two = Read("""{"forces": {"kinds": [{"kind": "design", "pattern": "U*"}], "turnDegreesByMember": {"a": 25e-1, "b": 1.0}}, /* same */ "display": "us"}""");
+        var one = Read("""{"display": "si", "forces": {"turnDegreesByMember": {"b": 1, "a": 2.50}, "kinds": [{"pattern": "U*", "kind": "design"}]}}""");
+        var two = Read("""{"forces": {"kinds": [{"kind": "design", "pattern": "U*"}], "turnDegreesByMember": {"a": 25e-1, "b": 1.0}}, /* same */ "display": "si"}""");
 
         Assert.Equal(one.Effective, two.Effective);
         Assert.Equal("2.5", Value(one, "forces.turnDegreesByMember[\"a\"]"));

@@ -231,7 +231,7 @@ public static class GangwayRails
         - a railing (`GL-1`) whose body has six swept disks: six candidates. The model links no results to them: without the forces table they are NOT CHECKED,
           no-forces; with `--forces gangway-rails.forces.csv` they have the verdicts below;
         - `Zugstab Z9`, an analytical curve member without an element;
-        - what cannot be checked: `Pfosten aus 'Stahl'` (no strength), `Stützkonsole, nur Flächen` (no parametric section), `Druckstrebe D1` (compressed beyond 4 % of
+        - what cannot be checked: `Pfosten aus 'Stahl'` (no strength), `Stützkonsole, nur Flächen` (a mesh, and recognition of meshes is not asked for), `Druckstrebe D1` (compressed beyond 4 % of
           its Euler load);
         - a name with a damaged escape (`P-10`), which is kept as it stands; names with umlauts, apostrophes, CJK characters and a character outside the BMP.
         """;
