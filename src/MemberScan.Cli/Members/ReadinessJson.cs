@@ -13,7 +13,9 @@ internal sealed partial class ReadinessJson : JsonSerializerContext
 {
     private static readonly ReadinessJson s_plain = new(new JsonSerializerOptions
     {
-        WriteIndented = true, PropertyNamingPolicy = JsonNamingPolicy.CamelCase, Encoder = JavaScriptEncoder.UnsafeRelaxedJsonEscaping,
+        WriteIndented = true,
+        PropertyNamingPolicy = JsonNamingPolicy.CamelCase,
+        Encoder = JavaScriptEncoder.UnsafeRelaxedJsonEscaping,
     });
 
     /// <summary>The record as UTF-8 bytes.</summary>

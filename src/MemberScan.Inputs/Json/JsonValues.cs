@@ -55,7 +55,7 @@ internal sealed class JsonValues(JsonSource source)
     /// <summary>One of several words; null with an error.</summary>
     public string? Word(JsonItem item, string path, IReadOnlyCollection<string> words)
     {
-        if (!Is(item, path, JsonValueKind.String, $"{(words.Length == 1 ? "the text" : "one of the texts")} {string.Join(", ", words.Select(word => $"\"{word}\""))}")) return null;
+        if (!Is(item, path, JsonValueKind.String, $"{(words.Count == 1 ? "the text" : "one of the texts")} {string.Join(", ", words.Select(word => $"\"{word}\""))}")) return null;
         if (words.Contains(item.Text)) return item.Text;
 
         Fail(InputCodes.WordUnknown, item, $"{path} is {Excerpt.Of(item.Text)}; {NearestName.Advice(item.Text, words)}");
