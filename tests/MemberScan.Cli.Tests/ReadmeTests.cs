@@ -37,18 +37,18 @@ public sealed partial class ReadmeTests
     {
         var commands = Lines().Select(l => l[Call.Length..].Split(' ')[0]).Distinct(StringComparer.Ordinal).Order(StringComparer.Ordinal);
 
-        Assert.Equal(["screen", "section"], commands);
+        Assert.Equal(["members", "screen", "section"], commands);
     }
 
     [Fact]
     public async Task The_README_names_every_option()
     {
         var text = await File.ReadAllTextAsync(Path.Combine(Memberscan.Root, "README.md"), TestContext.Current.CancellationToken);
-        var help = (await Memberscan.Run("screen", "--help")).Output + (await Memberscan.Run("section", "--help")).Output;
+        var help = (await Memberscan.Run("screen", "--help")).Output + (await Memberscan.Run("section", "--help")).Output + (await Memberscan.Run("members", "--help")).Output;
 
         var options = LongOption().Matches(help).Select(m => m.Value).Except(["--help", "--version"]).Distinct(StringComparer.Ordinal).ToArray();
 
-        Assert.Equal(13, options.Length);
+        Assert.Equal(14, options.Length);
         Assert.All(options, option => Assert.Contains(option, text, StringComparison.Ordinal));
     }
 

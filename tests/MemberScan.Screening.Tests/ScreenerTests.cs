@@ -64,7 +64,7 @@ public sealed class ScreenerTests
 
         Assert.Equal(new VerdictCounts(6, 1, 3), record.Counts);
         Assert.Equal("P-7", Assert.Single(record.Members, m => m.Verdict == Verdict.Overstressed).Tag);
-        Assert.Equal(["no-strength", "no-forces", "section-not-parametric"], record.Members.Where(m => m.Reason is not null).Select(m => m.Reason!.Code.Text()));
+        Assert.Equal(["no-strength", "no-forces", "mesh-not-allowed"], record.Members.Where(m => m.Reason is not null).Select(m => m.Reason!.Code.Text()));
     }
 
     [Fact]

@@ -25,4 +25,17 @@ public readonly record struct ForceInterval(ForceStation Start, ForceStation End
             Mz = linear.Mz - bulge * (Start.Forces.Vy - End.Forces.Vy),
         };
     }
+
+    /// <summary>
+    /// The end states with the largest bulge of the moments added. All states in between lie within the span of these two and the two
+    /// stations, so a measure that is convex in the forces is nowhere larger than at one of the four.
+    /// </summary>
+    public (SectionForces Start, SectionForces End) Enclosing
+    {
+        get
+        {
+            var bulge = At(0.5) - (Start.Forces + 0.5 * (End.Forces - Start.Forces));
+            return (Start.Forces + bulge, End.Forces + bulge);
+        }
+    }
 }
