@@ -68,7 +68,7 @@ public static class Screener
             Settings = [.. settings.Effective.Select(s => new SettingLine(s.Key, s.Value, s.IsDefault))],
             Cautions = Cautions.Lines,
             PassedOver = [.. contents.Catalog.PassedOver.Select(p => new PassedOver(p.Class, p.Count, p.Why))],
-            Sections = SectionsInUse(contents.Catalog.Members, library),
+            Sections = SectionsInUse(contents.Catalog.Members, results, library),
             Members = results,
             Findings = [.. diagnostics.Items.Select(d => new FindingLine(d.Code, d.Severity, d.Message, d.Span?.ToString() ?? "", diagnostics.CountOf(d)))],
             Counts = new VerdictCounts(
@@ -80,10 +80,11 @@ public static class Screener
     private static BasisLine BasisLine(string kind, StressLimit? limit, StressLimit? standard) =>
         new(kind, LimitInForce.Words(limit), LimitInForce.Clause(limit), limit == standard);
 
-    private static ImmutableArray<SectionFacts> SectionsInUse(ImmutableArray<Member> members, SectionLibrary library)
+    /// <summary>Sections that stresses were found in; those of members without forces or strength are not solved for the sake of a table.</summary>
+    private static ImmutableArray<SectionFacts> SectionsInUse(ImmutableArray<Member> members, ImmutableArray<MemberResult> results, SectionLibrary library)
     {
         var uses = members
-            .Where(m => m.Section is Finding<SectionFinding>.Found)
+            .Where((m, i) => m.Section is Finding<SectionFinding>.Found && results[i].Governing is not null)
             .SelectMany(m => ((Finding<SectionFinding>.Found)m.Section).Value.Shapes.Select(shape => (Shape: shape, Poisson: ((Finding<double>.Found)m.Material.Poisson).Value)))
             .Where(use => NumberRange.Holds(use.Shape))
             .GroupBy(use => use.Shape)

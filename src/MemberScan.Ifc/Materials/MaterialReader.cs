@@ -30,6 +30,13 @@ internal sealed class MaterialReader(
     // Patterns are matched in linear time; this only bounds what a settings file could ask for.
     private static readonly TimeSpan s_patience = TimeSpan.FromSeconds(10);
 
+    // Made once: a pattern of linear matching time costs far more to make than to match.
+    private readonly ImmutableArray<(Grade? Grade, Regex Pattern)> _patterns =
+    [
+        .. rules.Grades.Select(grade => (grade, new Regex(
+            $@"\A(?:{grade.Pattern})\z", RegexOptions.IgnoreCase | RegexOptions.CultureInvariant | RegexOptions.NonBacktracking, s_patience))),
+    ];
+
     private readonly Dictionary<string, Grade?> _gradeOf = new(StringComparer.Ordinal);
 
     /// <summary>Profiles that the association of an object (or its type) names; empty if none.</summary>
@@ -179,8 +186,7 @@ internal sealed class MaterialReader(
         return _gradeOf[name] = grade;
     }
 
-    private Grade? Matching(string name) => rules.Grades.FirstOrDefault(grade =>
-        Regex.IsMatch(name, $@"\A(?:{grade.Pattern})\z", RegexOptions.IgnoreCase | RegexOptions.CultureInvariant | RegexOptions.NonBacktracking, s_patience));
+    private Grade? Matching(string name) => _patterns.FirstOrDefault(p => p.Pattern.IsMatch(name)).Grade;
 
     /// <summary>Material definitions of the occurrence, then those of its type.</summary>
     private IEnumerable<IEnumerable<Part21Record>> Levels(ulong id)

@@ -1,8 +1,8 @@
 namespace MemberScan.Screening.Record;
 
-/// <summary>A section in use: its properties (SI) and how well its stress fields give back the six section forces.</summary>
+/// <summary>A section that stresses were found in: its properties (SI) and how well its stress fields give back the six section forces.</summary>
 /// <param name="Designation">Kind and dimensions.</param>
-/// <param name="Members">Number of candidates that have it.</param>
+/// <param name="Members">Number of candidates that have it and whose stresses are known.</param>
 /// <param name="Area">Area [m²].</param>
 /// <param name="Iy">Second moment about y [m⁴].</param>
 /// <param name="Iz">Second moment about z [m⁴].</param>
