@@ -1,6 +1,9 @@
 using System.Diagnostics.CodeAnalysis;
+using MemberScan.Mechanics.Fields;
 using MemberScan.Mechanics.Forces;
 using MemberScan.Mechanics.Profiles;
+using MemberScan.Mechanics.Properties;
+using MemberScan.Mechanics.Resultants;
 using MemberScan.Mechanics.Sections;
 using MemberScan.Mechanics.Shear;
 using MemberScan.Mechanics.Warping;

@@ -46,7 +46,7 @@ internal static class SolvedSections
     private static Func<double, double, bool> Counts(CrossSection section) => section switch
     {
         Box box => (y, z) => !ReentrantZone.Covers(box, y, z),
-        OutlineSection or OpenProfile => CountsIn(new OutlineShape(OutlineProperties.EdgesOf(section))),
+        OutlineSection or OpenProfile => CountsIn(new OutlineShape(ProfileEdges.Of(section))),
         _ => (_, _) => true,
     };
 
@@ -56,7 +56,7 @@ internal static class SolvedSections
     {
         Box box => WarpingSolution.TryOf(WalledMesh.Of(box), Counts(box)),
         RoundedRectangle rounded => WarpingSolution.TryOf(WalledMesh.Of(rounded), Counts(rounded)),
-        OutlineSection or OpenProfile => OutlineMesh.TryOf(new OutlineShape(OutlineProperties.EdgesOf(section))) is { } mesh
+        OutlineSection or OpenProfile => OutlineMesh.TryOf(new OutlineShape(ProfileEdges.Of(section))) is { } mesh
             ? WarpingSolution.TryOf(mesh, Counts(section)) : null,
         _ => throw new ArgumentOutOfRangeException(nameof(section), section.Kind, "no numerical field for this kind"),
     };

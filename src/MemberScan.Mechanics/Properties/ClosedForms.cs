@@ -1,8 +1,9 @@
 using System.Globalization;
+using MemberScan.Mechanics.Sections;
 using MemberScan.Mechanics.Series;
 using MemberScan.Mechanics.Warping;
 
-namespace MemberScan.Mechanics.Sections;
+namespace MemberScan.Mechanics.Properties;
 
 /// <summary>Section properties by closed form, one method per kind.</summary>
 internal static class ClosedForms

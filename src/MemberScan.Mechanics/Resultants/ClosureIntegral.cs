@@ -1,8 +1,9 @@
 using MemberScan.Mechanics.Forces;
 using MemberScan.Mechanics.Outlines;
+using MemberScan.Mechanics.Properties;
 using MemberScan.Mechanics.Shear;
 
-namespace MemberScan.Mechanics.Stress;
+namespace MemberScan.Mechanics.Resultants;
 
 /// <summary>Integrates a field over its section for each unit force.</summary>
 internal static class ClosureIntegral
@@ -13,10 +14,9 @@ internal static class ClosureIntegral
         new(0, 0, 0, 1, 0, 0), new(0, 0, 0, 0, 1, 0), new(0, 0, 0, 0, 0, 1),
     ];
 
-    /// <summary>The closure of a field.</summary>
-    public static Closure Of(StressField field, ShearSolution shear, Outline outline)
+    /// <summary>The closure of the bending formula and a shear solution.</summary>
+    public static Closure Of(SectionProperties p, ShearSolution shear, Outline outline)
     {
-        var p = field.Properties;
         var got = new SectionForces[s_units.Length];
         foreach (var (y, z, area) in outline.Quadrature())
         {

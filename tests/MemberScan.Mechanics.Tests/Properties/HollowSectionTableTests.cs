@@ -1,6 +1,7 @@
+using MemberScan.Mechanics.Properties;
 using MemberScan.Mechanics.Sections;
 
-namespace MemberScan.Mechanics.Tests.Sections;
+namespace MemberScan.Mechanics.Tests.Properties;
 
 /// <summary>
 /// Tables of EN 10210-2:2006 and EN 10219-2:2006 (cm², cm⁴, cm³) and of the AISC Steel Construction Manual, 14th/15th edition,

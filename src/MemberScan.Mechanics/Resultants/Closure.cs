@@ -1,4 +1,4 @@
-namespace MemberScan.Mechanics.Stress;
+namespace MemberScan.Mechanics.Resultants;
 
 /// <summary>The six section forces got back by integrating a field over the section, each for a unit of it [-]; 1 is exact.</summary>
 /// <param name="N">∫σ dA for unit N.</param>

@@ -1,4 +1,4 @@
-namespace MemberScan.Mechanics.Sections;
+namespace MemberScan.Mechanics.Properties;
 
 /// <summary>What a rounded corner lacks against a sharp one: a square of the radius less a quarter circle.</summary>
 /// <param name="Area">Area [m²].</param>

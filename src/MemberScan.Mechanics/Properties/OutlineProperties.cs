@@ -1,9 +1,8 @@
-using System.Collections.Immutable;
-using MemberScan.Mechanics.Meshes;
+using MemberScan.Mechanics.Profiles;
 using MemberScan.Mechanics.Sections;
 using MemberScan.Mechanics.Warping;
 
-namespace MemberScan.Mechanics.Profiles;
+namespace MemberScan.Mechanics.Properties;
 
 /// <summary>Properties of outlines and open profiles: exact integrals along the edges; J and the shear centre from the numerical field.</summary>
 internal static class OutlineProperties
@@ -11,7 +10,7 @@ internal static class OutlineProperties
     /// <summary>The properties at a ν, on which the shear centre depends.</summary>
     public static SectionProperties Of(CrossSection section, double poisson)
     {
-        var edges = EdgesOf(section);
+        var edges = ProfileEdges.Of(section);
         var integrals = OutlineIntegrals.Of(edges);
         var torsion = SolvedSections.Torsion(section);
         var (y, z) = torsion?.ShearCentre(integrals.Iy, integrals.Iz, integrals.Iyz, poisson) ?? (double.NaN, double.NaN);
@@ -37,14 +36,6 @@ internal static class OutlineProperties
             ShearCentreZ = Math.Abs(z) <= Rounding * farZ ? 0 : z,
         };
     }
-
-    /// <summary>Edges of an outline or an open profile about the centroid.</summary>
-    public static ImmutableArray<EdgeCurve> EdgesOf(CrossSection section) => section switch
-    {
-        OutlineSection outline => outline.Edges,
-        OpenProfile profile => profile.Edges,
-        _ => throw new ArgumentOutOfRangeException(nameof(section), section.Kind, "no outline for this kind"),
-    };
 
     // What a numerical field leaves of nothing.
     private const double Rounding = 1e-5;

@@ -1,6 +1,7 @@
-using MemberScan.Mechanics.Sections;
+using MemberScan.Mechanics.Forces;
+using MemberScan.Mechanics.Properties;
 
-namespace MemberScan.Mechanics.Forces;
+namespace MemberScan.Mechanics.Resultants;
 
 /// <summary>Normal stress by the bending formula, with the product of inertia where there is one.</summary>
 internal static class BendingStress

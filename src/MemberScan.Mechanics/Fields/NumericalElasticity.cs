@@ -1,8 +1,9 @@
 using MemberScan.Mechanics.Meshes;
-using MemberScan.Mechanics.Sections;
+using MemberScan.Mechanics.Properties;
 using MemberScan.Mechanics.Shear;
+using MemberScan.Mechanics.Warping;
 
-namespace MemberScan.Mechanics.Warping;
+namespace MemberScan.Mechanics.Fields;
 
 /// <summary>Saint-Venant flexure and torsion from the numerical field of a section, for one ν.</summary>
 internal sealed class NumericalElasticity : ShearSolution

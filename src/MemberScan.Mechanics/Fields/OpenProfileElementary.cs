@@ -1,9 +1,10 @@
 using System.Collections.Immutable;
 using MemberScan.Mechanics.Meshes;
-using MemberScan.Mechanics.Sections;
+using MemberScan.Mechanics.Profiles;
+using MemberScan.Mechanics.Properties;
 using MemberScan.Mechanics.Shear;
 
-namespace MemberScan.Mechanics.Profiles;
+namespace MemberScan.Mechanics.Fields;
 
 /// <summary>Open profiles by hand calculation: <c>V·Q/(I·t)</c> along the middle line of each wall, torsion <c>2nT/J</c>, <c>J = Σbt³/3</c>.</summary>
 /// <remarks>

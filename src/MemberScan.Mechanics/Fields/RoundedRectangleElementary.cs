@@ -1,6 +1,8 @@
+using MemberScan.Mechanics.Properties;
 using MemberScan.Mechanics.Sections;
+using MemberScan.Mechanics.Shear;
 
-namespace MemberScan.Mechanics.Shear;
+namespace MemberScan.Mechanics.Fields;
 
 /// <summary>Rounded rectangle by hand calculation: <c>τ = V·Q/(I·b)</c> for each shear force, b the width at the level; torsion from the numerical field.</summary>
 internal sealed class RoundedRectangleElementary : ShearSolution

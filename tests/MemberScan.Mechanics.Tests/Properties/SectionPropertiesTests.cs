@@ -1,6 +1,7 @@
+using MemberScan.Mechanics.Properties;
 using MemberScan.Mechanics.Sections;
 
-namespace MemberScan.Mechanics.Tests.Sections;
+namespace MemberScan.Mechanics.Tests.Properties;
 
 public sealed class SectionPropertiesTests
 {

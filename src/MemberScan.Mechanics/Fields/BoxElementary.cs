@@ -1,6 +1,8 @@
+using MemberScan.Mechanics.Properties;
 using MemberScan.Mechanics.Sections;
+using MemberScan.Mechanics.Shear;
 
-namespace MemberScan.Mechanics.Shear;
+namespace MemberScan.Mechanics.Fields;
 
 /// <summary>Rectangular tube by hand calculation: bending-shear flow along the wall's middle line, plus torsion.</summary>
 /// <remarks>

@@ -1,6 +1,7 @@
 using MemberScan.Mechanics.Profiles;
+using MemberScan.Mechanics.Sections;
 
-namespace MemberScan.Mechanics.Sections;
+namespace MemberScan.Mechanics.Properties;
 
 /// <summary>Properties of a cross-section about its centroid; warping is left out.</summary>
 public sealed record SectionProperties
