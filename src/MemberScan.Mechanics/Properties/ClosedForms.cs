@@ -29,7 +29,8 @@ internal static class ClosedForms
         var plastic = 4 * t * (b * b + a * b + a * a) / 3;
         return DoublySymmetric(
             Math.PI * t * (b + a), inertia, inertia, inertia / b, inertia / b, plastic, plastic,
-            2 * inertia, Exact, 2 * inertia / b, 2 * Math.PI * middle * middle * middle * t);
+            2 * inertia, Exact, 2 * inertia / b, 2 * Math.PI * middle * middle * middle * t) with
+        { WtThinWall = 2 * Math.PI * middle * middle * t };
     }
 
     public static SectionProperties Of(Rectangle section)
@@ -74,7 +75,7 @@ internal static class ClosedForms
             (b * h * h - bi * hi * hi) / 4 - outer.FourMoment(h) + inner.FourMoment(hi),
             (h * b * b - hi * bi * bi) / 4 - outer.FourMoment(b) + inner.FourMoment(bi),
             torsion?.J, Numerical(torsion), it / (t + k / t), 4 * enclosed * enclosed * t / length) with
-        { JAnnex = it };
+        { JAnnex = it, WtThinWall = 2 * enclosed * t };
     }
 
     /// <summary>Where a torsion constant comes from, in words.</summary>
@@ -94,6 +95,9 @@ internal static class ClosedForms
             JSource = jSource,
             WelY = welY,
             WelZ = welZ,
+            Extremes = new ExtremeModuli(welY, welY, welZ, welZ),
+            QY = wplY / 2,                                                         // the centroid halves the area
+            QZ = wplZ / 2,
             WplY = wplY,
             WplZ = wplZ,
             Wt = wt,

@@ -1,3 +1,4 @@
+using System.Collections.Immutable;
 using MemberScan.Mechanics.Profiles;
 using MemberScan.Mechanics.Sections;
 using MemberScan.Mechanics.Warping;
@@ -14,8 +15,10 @@ internal static class OutlineProperties
         var integrals = OutlineIntegrals.Of(edges);
         var torsion = SolvedSections.Torsion(section);
         var (y, z) = torsion?.ShearCentre(integrals.Iy, integrals.Iz, integrals.Iyz, poisson) ?? (double.NaN, double.NaN);
-        var (farY, farZ) = (0.0, 0.0);
-        foreach (var at in edges.SelectMany(edge => edge.Extremes())) (farY, farZ) = (Math.Max(farY, Math.Abs(at.Y)), Math.Max(farZ, Math.Abs(at.Z)));
+        var (left, right, bottom, top) = RingGeometry.Bounds(edges);
+        var (farY, farZ) = (Math.Max(right, -left), Math.Max(top, -bottom));
+        var exchanged = edges.Select(edge => edge.Exchanged().Reversed()).ToImmutableArray();
+        var (plasticY, plasticZ) = (OutlineIntegrals.Plastic(edges), OutlineIntegrals.Plastic(exchanged));
         var walls = section is OpenProfile profile ? ProfileWalls.Of(profile) : [];
         double? thinWall = walls.IsEmpty ? null : walls.Sum(wall => wall.Length * Math.Pow(wall.Thickness, 3) / 3);
         return new SectionProperties
@@ -28,8 +31,13 @@ internal static class OutlineProperties
             JSource = ClosedForms.Numerical(torsion),
             WelY = integrals.Iy / farZ,
             WelZ = integrals.Iz / farY,
-            WplY = OutlineIntegrals.Plastic(edges),
-            WplZ = OutlineIntegrals.Plastic([.. edges.Select(edge => edge.Exchanged().Reversed())]),
+            Extremes = new ExtremeModuli(integrals.Iy / top, integrals.Iy / -bottom, integrals.Iz / right, integrals.Iz / -left),
+            QY = OutlineIntegrals.Above(edges, 0).MomentZ,
+            QZ = OutlineIntegrals.Above(exchanged, 0).MomentZ,
+            WplY = plasticY.Modulus,
+            WplZ = plasticZ.Modulus,
+            PlasticAxisZ = Math.Abs(plasticY.Axis) <= Nothing * farZ ? 0 : plasticY.Axis,
+            PlasticAxisY = Math.Abs(plasticZ.Axis) <= Nothing * farY ? 0 : plasticZ.Axis,
             Wt = thinWall is { } j ? j / walls.Max(wall => wall.Thickness) : torsion?.Wt,
             JThinWall = thinWall,
             ShearCentreY = Math.Abs(y) <= Rounding * farY ? 0 : y,
@@ -39,6 +47,9 @@ internal static class OutlineProperties
 
     // What a numerical field leaves of nothing.
     private const double Rounding = 1e-5;
+
+    // What halving an interval leaves of nothing.
+    private const double Nothing = 1e-9;
 
     private static bool IsSymmetric(OutlineIntegrals integrals) => Math.Abs(integrals.Iyz) <= 1e-12 * (integrals.Iy + integrals.Iz);
 }

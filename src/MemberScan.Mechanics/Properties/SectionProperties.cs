@@ -30,11 +30,26 @@ public sealed record SectionProperties
     /// <summary>Elastic modulus about z at the nearer extreme fibre: the smaller one [m³].</summary>
     public required double WelZ { get; init; }
 
-    /// <summary>Plastic modulus about y [m³].</summary>
+    /// <summary>Elastic moduli at each of the four extreme fibres.</summary>
+    public required ExtremeModuli Extremes { get; init; }
+
+    /// <summary>First moment about y of the part above the centroid, <c>∫z dA</c> over z ≥ 0 [m³].</summary>
+    public required double QY { get; init; }
+
+    /// <summary>First moment about z of the part beyond the centroid, <c>∫y dA</c> over y ≥ 0 [m³].</summary>
+    public required double QZ { get; init; }
+
+    /// <summary>Plastic modulus about y: first moments of both halves about the axis that halves the area [m³].</summary>
     public required double WplY { get; init; }
 
     /// <summary>Plastic modulus about z [m³].</summary>
     public required double WplZ { get; init; }
+
+    /// <summary>Distance from the centroid along z of the axis parallel to y that halves the area [m].</summary>
+    public double PlasticAxisZ { get; init; }
+
+    /// <summary>Distance from the centroid along y of the axis parallel to z that halves the area [m].</summary>
+    public double PlasticAxisY { get; init; }
 
     /// <summary>
     /// Torsion modulus: largest torsional shear stress = T/Wt [m³]; null where J is. Of a box that of the hand calculation,
@@ -47,6 +62,9 @@ public sealed record SectionProperties
 
     /// <summary>Thin-wall torsion constant [m⁴]: <c>4·Am²·t/p</c> of a closed wall, <c>Σbt³/3</c> of open walls; null for other sections.</summary>
     public required double? JThinWall { get; init; }
+
+    /// <summary>Thin-wall torsion modulus <c>2·Am·t</c> of a closed wall (Bredt) [m³], shown beside Wt; null for other sections.</summary>
+    public double? WtThinWall { get; init; }
 
     /// <summary>Shear centre, distance from the centroid along y [m].</summary>
     public required double ShearCentreY { get; init; }

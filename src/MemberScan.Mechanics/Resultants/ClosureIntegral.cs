@@ -44,4 +44,18 @@ internal static class ClosureIntegral
 
         return new Closure(own[0], own[1], own[2], own[3], own[4], own[5], cross);
     }
+
+    /// <summary>Shear areas: <c>1/∫τ² dA</c> for unit shear forces [m²].</summary>
+    public static ShearAreas ShearAreas(ShearSolution shear, Outline outline)
+    {
+        var (alongY, alongZ) = (0.0, 0.0);
+        foreach (var (y, z, area) in outline.Quadrature())
+        {
+            var (vy, vz, _) = shear.UnitsAt(y, z);
+            alongY += area * (vy.XY * vy.XY + vy.XZ * vy.XZ);
+            alongZ += area * (vz.XY * vz.XY + vz.XZ * vz.XZ);
+        }
+
+        return new ShearAreas(1 / alongY, 1 / alongZ);
+    }
 }

@@ -25,6 +25,7 @@ internal sealed class SectionField : StressField
     private readonly GoverningSearch _search;
     private readonly GoverningSearch? _fillets;
     private readonly Lazy<Closure> _closure;
+    private readonly Lazy<ShearAreas> _shearAreas;
     private readonly Lazy<(BlockScan Thin, BlockScan Dense)> _scans;
 
     /// <summary>The field of a section with its shear solution.</summary>
@@ -39,6 +40,7 @@ internal sealed class SectionField : StressField
             _fillets = new GoverningSearch(this, shear, new FilletOutline(section, _outline, arcs));
         _scans = new Lazy<(BlockScan, BlockScan)>(() => (new BlockScan(properties, shear, _outline, true), new BlockScan(properties, shear, _outline, false)));
         _closure = new Lazy<Closure>(() => ClosureIntegral.Of(properties, shear, _outline));
+        _shearAreas = new Lazy<ShearAreas>(() => ClosureIntegral.ShearAreas(shear, _outline));
     }
 
     /// <inheritdoc/>
@@ -52,6 +54,9 @@ internal sealed class SectionField : StressField
 
     /// <inheritdoc/>
     public override Closure Closure => _closure.Value;
+
+    /// <inheritdoc/>
+    public override ShearAreas ShearAreas => _shearAreas.Value;
 
     /// <inheritdoc/>
     public override StressState At(in SectionForces forces, double y, double z)

@@ -38,6 +38,9 @@ public abstract class StressField
     /// <summary>How well the field gives back the six section forces.</summary>
     public abstract Closure Closure { get; }
 
+    /// <summary>Shear areas of this model by energy [m²].</summary>
+    public abstract ShearAreas ShearAreas { get; }
+
     /// <summary>Makes the field of a section; false with a sentence when the model has none for it.</summary>
     /// <param name="section">The section.</param>
     /// <param name="model">The shear model.</param>
