@@ -1,5 +1,5 @@
 using System.Collections.Immutable;
-using MemberScan.Mechanics.Meshes;
+using MemberScan.Mechanics.Edges;
 using MemberScan.Mechanics.Profiles;
 using MemberScan.Mechanics.Properties;
 using MemberScan.Mechanics.Shear;
@@ -36,14 +36,25 @@ internal sealed class OpenProfileElementary : ShearSolution
     /// <summary>True: across each wall all stresses are linear.</summary>
     public override bool EdgesGovern => true;
 
-    /// <summary>Lines across the walls a hair off their ends, and inside fillets, where the flow changes from wall to wall.</summary>
+    /// <summary>
+    /// Lines a hair on either side of where the stress jumps from wall to wall: along all four sides of each wall, between walls whose ends
+    /// meet, and inside fillets. What falls outside the material is to be left away.
+    /// </summary>
     public IEnumerable<EdgeCurve> Creases()
     {
         foreach (var wall in _walls)
         {
-            foreach (var s in new[] { Hair * wall.Length, (1 - Hair) * wall.Length })
-                yield return EdgeCurve.Line(wall.At(s, -0.5 * wall.Thickness), wall.At(s, 0.5 * wall.Thickness));
+            foreach (var off in new[] { -Hair, Hair })
+            {
+                var (half, start, end) = (0.5 * wall.Thickness * (1 + off), -off * wall.Thickness, wall.Length + off * wall.Thickness);
+                yield return EdgeCurve.Line(wall.At(start, -half), wall.At(start, half));
+                yield return EdgeCurve.Line(wall.At(end, -half), wall.At(end, half));
+                yield return EdgeCurve.Line(wall.At(start, -half), wall.At(end, -half));
+                yield return EdgeCurve.Line(wall.At(start, half), wall.At(end, half));
+            }
         }
+
+        foreach (var line in BetweenEnds()) yield return line;
 
         // Inside a fillet the nearest wall changes on the bisector, from the corner of the walls to the middle of the arc; n stops growing
         // on the faces of the walls, from that corner to the ends of the arc.
@@ -59,6 +70,33 @@ internal sealed class OpenProfileElementary : ShearSolution
                 var (offY, offZ) = (-side * dz, side * dy);
                 yield return EdgeCurve.Line(
                     (corner.Item1 + offY, corner.Item2 + offZ), (middle.Y + offY, middle.Z + offZ));
+            }
+        }
+    }
+
+    // Where two walls end in one point, neither covers the quarter beyond both ends: there the nearer one counts, by halves.
+    private IEnumerable<EdgeCurve> BetweenEnds()
+    {
+        (ProfileWall Wall, double S, double OutY, double OutZ)[] ends =
+        [
+            .. _walls.Select(wall => (wall, 0.0, -wall.DirectionY, -wall.DirectionZ)),
+            .. _walls.Select(wall => (wall, wall.Length, wall.DirectionY, wall.DirectionZ)),
+        ];
+        for (var i = 0; i < ends.Length; i++)
+        {
+            for (var j = 0; j < i; j++)
+            {
+                var (from, other) = (ends[i].Wall.At(ends[i].S, 0), ends[j].Wall.At(ends[j].S, 0));
+                var reach = ends[i].Wall.Thickness + ends[j].Wall.Thickness;
+                if (double.Hypot(from.Y - other.Y, from.Z - other.Z) > Hair * reach) continue;
+
+                var (y, z) = (ends[i].OutY + ends[j].OutY, ends[i].OutZ + ends[j].OutZ);
+                if (double.Hypot(y, z) < 1) continue;                              // end to end in one line
+                foreach (var side in new[] { -Hair, Hair })
+                {
+                    var (startY, startZ) = (from.Y - side * reach * z, from.Z + side * reach * y);
+                    yield return EdgeCurve.Line((startY, startZ), (startY + reach * y, startZ + reach * z));
+                }
             }
         }
     }

@@ -1,7 +1,7 @@
 using System.Buffers;
+using MemberScan.Mechanics.Edges;
 using MemberScan.Mechanics.Fields;
 using MemberScan.Mechanics.Forces;
-using MemberScan.Mechanics.Meshes;
 using MemberScan.Mechanics.Outlines;
 using MemberScan.Mechanics.Profiles;
 using MemberScan.Mechanics.Properties;

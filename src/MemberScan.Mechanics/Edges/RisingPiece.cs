@@ -1,4 +1,4 @@
-namespace MemberScan.Mechanics.Meshes;
+namespace MemberScan.Mechanics.Edges;
 
 /// <summary>A piece of an edge along which z only rises or only falls.</summary>
 internal readonly record struct RisingPiece(double Low, double High, double Y, double PerZ, double CentreZ, double RadiusSquared, double Sign)

@@ -1,6 +1,6 @@
 using MemberScan.Mechanics.Sections;
 
-namespace MemberScan.Mechanics.Meshes;
+namespace MemberScan.Mechanics.Edges;
 
 /// <summary>The surroundings of re-entrant corners, whose peaks are told apart and do not decide.</summary>
 /// <remarks>

@@ -1,4 +1,4 @@
-namespace MemberScan.Mechanics.Meshes;
+namespace MemberScan.Mechanics.Edges;
 
 /// <summary>A straight line or a circular arc from one point to another, walked by a share from 0 to 1.</summary>
 internal readonly record struct EdgeCurve

@@ -1,6 +1,6 @@
 using System.Collections.Immutable;
 
-namespace MemberScan.Mechanics.Meshes;
+namespace MemberScan.Mechanics.Edges;
 
 /// <summary>The edges of a section as something to ask: what lies inside, how thick the material is, where it has re-entrant corners.</summary>
 internal sealed class OutlineShape

@@ -1,4 +1,4 @@
-namespace MemberScan.Mechanics.Meshes;
+namespace MemberScan.Mechanics.Edges;
 
 /// <summary>A re-entrant corner: a point where it is sharp, an arc where it is rounded.</summary>
 /// <param name="Curve">The point or the arc.</param>
