@@ -16,8 +16,8 @@ internal sealed class ProfileOutline : Outline
 {
     private const int RasterPoints = 700;
     private const int NodesPerPiece = 11;
-    private const double LongestPerWall = 1.5;
-    private const int FewestPieces = 2;
+    private const double LongestPerWall = 1;
+    private const int FewestPieces = 4;
     private const int MostPieces = 40;
     private const double Hair = 1e-9;
     private readonly OutlineShape _shape;
@@ -128,7 +128,7 @@ internal sealed class ProfileOutline : Outline
     // A field changes along an edge over lengths of the wall's thickness; the hand calculation does not.
     private IEnumerable<EdgeCurve> Short(EdgeCurve edge)
     {
-        var count = _hasPeaks ? (int)Math.Clamp(Math.Ceiling(edge.Length / (LongestPerWall * _shape.Thickness(edge, 0.5))), FewestPieces, MostPieces) : FewestPieces;
+        var count = _hasPeaks ? (int)Math.Clamp(Math.Ceiling(edge.Length / (LongestPerWall * _shape.Thickness(edge, 0.5))), FewestPieces, MostPieces) : FewestPieces / 2;
         for (var k = 0; k < count; k++) yield return edge.Piece((double)k / count, (double)(k + 1) / count);
     }
 

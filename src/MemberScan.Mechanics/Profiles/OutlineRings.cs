@@ -19,7 +19,8 @@ public static class OutlineRings
     /// <summary>The edges of a section about its centroid, arcs as arcs, the outer ring first.</summary>
     internal static ImmutableArray<EdgeCurve> EdgesOf(CrossSection section) => RingGeometry.Edges(VerticesOf(section));
 
-    private static ImmutableArray<ImmutableArray<OutlineVertex>> VerticesOf(CrossSection section) => section switch
+    /// <summary>The rings of a section about its centroid as corners and the ways between them, the outer one first.</summary>
+    internal static ImmutableArray<ImmutableArray<OutlineVertex>> VerticesOf(CrossSection section) => section switch
     {
         Round round => [Circle(round.Radius)],
         Tube tube => [Circle(tube.OuterRadius), Circle(tube.InnerRadius)],

@@ -126,6 +126,19 @@ internal sealed class SectionField : StressField
         }
     }
 
+    /// <inheritdoc/>
+    public override void GovernEach(ReadOnlySpan<SectionForces> states, StressMeasure measure, Span<double> values)
+    {
+        if (values.Length < states.Length) throw new ArgumentException("every state needs room for its value", nameof(values));
+        foreach (ref readonly var forces in states)
+        {
+            if (!forces.IsFinite) throw new ArgumentException("section forces must be finite numbers", nameof(states));
+            RefuseTorsion(forces);
+        }
+
+        for (var i = 0; i < states.Length; i++) values[i] = _search.Value(states[i], measure);
+    }
+
     private void RefuseTorsion(in SectionForces forces)
     {
         if (forces.T != 0 && !CarriesTorsion) throw new ArgumentException($"the elementary model of this {Section.Kind} carries no torsion");

@@ -47,6 +47,46 @@ public sealed class BlockScanTests
         }
     }
 
+    [Theory]
+    [MemberData(nameof(FieldNumbers))]
+    public void Each_state_of_a_block_has_its_own_largest_value(int number)
+    {
+        var field = Samples.Fields.ElementAt(number);
+        var states = States(field, 200, 4);
+        var (values, one) = (new double[states.Length], new double[1]);
+        foreach (var measure in Enum.GetValues<StressMeasure>())
+        {
+            field.GovernEach(states, measure, values);
+            for (var i = 0; i < states.Length; i++)
+            {
+                var best = field.Govern(states[i], measure).Value;
+                field.GovernEach([states[i]], measure, one);
+
+                Assert.True(Math.Abs(values[i] - best) <= 1e-4 * Math.Abs(best), $"{Samples.Name(field)} {measure} {states[i]}: {values[i]} against {best}");
+                Assert.Equal(values[i], one[0]);
+            }
+        }
+    }
+
+    [Fact]
+    public void Each_state_is_searched_without_allocating_and_wrong_input_is_refused()
+    {
+        var field = Samples.Field(new Box(0.05, 0.1, 0.005, 0.01, 0.005), ShearModel.Elasticity);
+        var states = States(field, 20, 5);
+        var values = new double[states.Length];
+        for (var warm = 0; warm < 30; warm++) field.GovernEach(states, StressMeasure.VonMises, values);
+
+        var before = GC.GetAllocatedBytesForCurrentThread();
+        field.GovernEach(states, StressMeasure.VonMises, values);
+
+        Assert.Equal(before, GC.GetAllocatedBytesForCurrentThread());
+        field.GovernEach([], StressMeasure.Tau, values);
+        field.GovernEach([default], StressMeasure.Tau, values);
+        Assert.Equal(0, values[0]);
+        Assert.Throws<ArgumentException>(() => field.GovernEach(states, StressMeasure.Tau, values.AsSpan(1)));
+        Assert.Throws<ArgumentException>(() => field.GovernEach([new SectionForces(0, 0, double.NaN, 0, 0, 0)], StressMeasure.Tau, values));
+    }
+
     [Fact]
     public void How_states_are_grouped_changes_nothing()
     {
