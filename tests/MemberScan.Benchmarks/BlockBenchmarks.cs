@@ -13,6 +13,7 @@ public class BlockBenchmarks
     private readonly SectionForces[] _states = new SectionForces[States];
     private readonly GoverningPoint[] _largest = new GoverningPoint[6];
     private readonly int[] _which = new int[6];
+    private readonly double[] _values = new double[Few];
     private StressField _field = null!;
 
     /// <summary>Section and model.</summary>
@@ -44,6 +45,14 @@ public class BlockBenchmarks
     {
         _field.GovernAll(_states, _largest, _which);
         return _largest[0].Value;
+    }
+
+    /// <summary>The value of every measure for every state, without place or name.</summary>
+    [Benchmark(OperationsPerInvoke = Few)]
+    public double Each()
+    {
+        for (var measure = 0; measure < 6; measure++) _field.GovernEach(_states.AsSpan(0, Few), (StressMeasure)measure, _values);
+        return _values[0];
     }
 
     /// <summary>Every state searched by itself for every measure.</summary>

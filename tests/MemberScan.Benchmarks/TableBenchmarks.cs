@@ -1,4 +1,5 @@
 using BenchmarkDotNet.Attributes;
+using MemberScan.Mechanics.Profiles;
 using MemberScan.Mechanics.Sections;
 using MemberScan.Mechanics.Stress;
 
@@ -21,6 +22,23 @@ public class TableBenchmarks
     /// <summary>A rounded rectangle.</summary>
     [Benchmark]
     public double RoundedRectangle() => Closure(new RoundedRectangle(0.05 + Next(), 0.1, 0.008));
+
+    /// <summary>A rolled beam.</summary>
+    [Benchmark]
+    public double RolledBeam() => Closure(new OpenProfile(OpenShape.I, 0.2 + Next(), 0.1, 0.0056, 0.0085, 0.012));
+
+    /// <summary>An angle with sharp corners.</summary>
+    [Benchmark]
+    public double SharpAngle() => Closure(new OpenProfile(OpenShape.L, 0.1 + Next(), 0.08, 0.008, 0.008));
+
+    /// <summary>A rolled channel.</summary>
+    [Benchmark]
+    public double RolledChannel() => Closure(new OpenProfile(OpenShape.U, 0.1 + Next(), 0.05, 0.006, 0.0085, 0.0085));
+
+    /// <summary>A plate with a hole, a general outline.</summary>
+    [Benchmark]
+    public double PlateWithHole() => Closure(new OutlineSection(
+        "plate", [[new(-0.06 - Next(), -0.03), new(0.06, -0.03), new(0.06, 0.03), new(-0.06 - Next(), 0.03)], [new(0.005, 0, 1), new(0.035, 0, 1)]]));
 
     private double Next() => 1e-7 * ++_count;
 

@@ -16,8 +16,9 @@ public static class OutlineRings
         return [.. VerticesOf(section).Select(ring => RingGeometry.Edges([ring]).SelectMany(Points).ToImmutableArray())];
     }
 
-    /// <summary>The edges of a section about its centroid, arcs as arcs, the outer ring first.</summary>
-    internal static ImmutableArray<EdgeCurve> EdgesOf(CrossSection section) => RingGeometry.Edges(VerticesOf(section));
+    /// <summary>The edges of a section about its centroid, arcs as arcs, the material to their left, the outer ring first.</summary>
+    internal static ImmutableArray<EdgeCurve> EdgesOf(CrossSection section) =>
+        RingGeometry.Edges(VerticesOf(section).Select((ring, i) => RingGeometry.Turned(ring, counterClockwise: i == 0)));
 
     /// <summary>The rings of a section about its centroid as corners and the ways between them, the outer one first.</summary>
     internal static ImmutableArray<ImmutableArray<OutlineVertex>> VerticesOf(CrossSection section) => section switch

@@ -51,6 +51,9 @@ internal sealed class GoverningSearch(StressField field, ShearSolution shear, Ou
         return Target.Value(measure, field.At(forces, best.Y, best.Z));
     }
 
+    /// <summary>The target at that place.</summary>
+    public double TargetInHaste(in SectionForces forces, StressMeasure measure) => forces == default(SectionForces) ? 0 : Search(forces, measure, WorthwhileInHaste).Highest;
+
     private Choice Search(in SectionForces forces, StressMeasure measure, double worthwhile)
     {
         var best = new Choice(outline);

@@ -20,6 +20,9 @@ internal sealed class SectionField : StressField
     private const double Worthwhile = 0.93;
     private const double WorthwhileWhenThin = 0.8;
 
+    // Share of a target, a square of the stress or the stress, that a search in haste may miss: twice 0.1 % and a margin.
+    private const double HasteMisses = 4e-3;
+
     private readonly ShearSolution _shear;
     private readonly Outline _outline;
     private readonly GoverningSearch _search;
@@ -200,10 +203,19 @@ internal sealed class SectionField : StressField
         }
 
         keys[..count].Sort(order[..count]);
-        var (best, bestState, bestTarget) = (default(GoverningPoint), -1, double.NegativeInfinity);
-        for (var k = 0; k < count; k++)
+        // Found in haste first; those within what haste may miss are then searched with care.
+        var (left, leading) = (0, double.NegativeInfinity);
+        for (; left < count && -keys[left] >= Worthwhile * leading; left++)
         {
-            if (-keys[k] < Worthwhile * bestTarget) break;
+            var target = _search.TargetInHaste(states[order[left]], measure);
+            keys[left] = target;
+            leading = Math.Max(leading, target);
+        }
+
+        var (best, bestState, bestTarget) = (default(GoverningPoint), -1, double.NegativeInfinity);
+        for (var k = 0; k < left; k++)
+        {
+            if (keys[k] < leading * (1 - HasteMisses)) continue;
 
             var point = Govern(states[order[k]], measure);
             var target = Target.Of(measure, point.State);

@@ -27,12 +27,13 @@ internal sealed class BoundaryIntegral
     public void Arc(double y, double z, double radius, double from, double sweep, double panel) =>
         Panels(EdgeCurve.Arc((y, z), radius, from, from + sweep), panel);
 
-    /// <summary>Adds any edge in panels of about the given length, each of the two at its ends halved towards the end a number of times.</summary>
-    public void Edge(EdgeCurve edge, double panel, int halvings)
+    /// <summary>Adds any edge in panels of about the given length, the first and the last of them halved towards the end a number of times.</summary>
+    public void Edge(EdgeCurve edge, double panel, int halvingsAtStart, int halvingsAtEnd)
     {
         var count = Math.Max(2, (int)Math.Ceiling(edge.Length / panel));
         List<double> cuts = [.. Enumerable.Range(1, count - 1).Select(k => (double)k / count)];
-        for (var k = 1; k <= halvings; k++) cuts.AddRange([Math.Pow(0.5, k) / count, 1 - Math.Pow(0.5, k) / count]);
+        for (var k = 1; k <= halvingsAtStart; k++) cuts.Add(Math.Pow(0.5, k) / count);
+        for (var k = 1; k <= halvingsAtEnd; k++) cuts.Add(1 - Math.Pow(0.5, k) / count);
         cuts.Sort();
         cuts = [0, .. cuts, 1];
         for (var k = 1; k < cuts.Count; k++) Add(edge.Piece(cuts[k - 1], cuts[k]));

