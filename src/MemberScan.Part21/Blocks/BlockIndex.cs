@@ -206,6 +206,10 @@ internal sealed class BlockIndex
     {
         public int Entry;
 
+        public static bool NeedsLength => false;
+
+        public readonly bool MayWant(uint letters) => false;
+
         public void Add(long offset, int length, uint id, ReadOnlySpan<byte> keyword, InstanceFlags flags)
         {
             while (offset >= index._entries[Entry].End) Entry++;

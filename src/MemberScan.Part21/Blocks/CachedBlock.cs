@@ -53,6 +53,10 @@ internal sealed class CachedBlock(ByteSource source, int length)
 
     private readonly struct ListSink(CachedBlock block, long origin) : IStatementSink
     {
+        public static bool NeedsLength => true;
+
+        public bool MayWant(uint letters) => false;
+
         public void Add(long offset, int length, uint id, ReadOnlySpan<byte> keyword, InstanceFlags flags)
         {
             if (block.Count == block._ids.Length)

@@ -4,6 +4,12 @@ namespace MemberScan.Part21.Plain;
 /// <remarks>Implemented by structs, so that the scan is compiled for each and calls nothing through a table.</remarks>
 internal interface IStatementSink
 {
+    /// <summary>Whether lengths are used; where not, those of plain statements are told as 0.</summary>
+    static abstract bool NeedsLength { get; }
+
+    /// <summary>Whether the keyword is used that has these as its fourth to seventh byte (lowest first); where not, that of a plain statement is told as empty.</summary>
+    bool MayWant(uint letters);
+
     /// <summary>An instance.</summary>
     /// <param name="offset">Of its '#' [byte].</param>
     /// <param name="length">From '#' to ';' [byte].</param>

@@ -1,3 +1,4 @@
+using System.Runtime.CompilerServices;
 using MemberScan.Part21.Index;
 using MemberScan.Part21.Plain;
 
@@ -10,18 +11,32 @@ internal struct PassSink(ChunkResult result, WantedKeywords wanted) : IStatement
     private readonly List<PlaceRow> _places = result.Places;
     private BlockEntry _entry = new() { Block = -1 };
 
+    /// <inheritdoc />
+    public static bool NeedsLength => false;
+
     /// <summary>Number of instances.</summary>
     public long Count { get; private set; }
 
     /// <inheritdoc />
+    [MethodImpl(MethodImplOptions.AggressiveInlining)]
+    public readonly bool MayWant(uint letters) => wanted.MayHold(letters);
+
+    /// <inheritdoc />
+    [MethodImpl(MethodImplOptions.AggressiveInlining)]
     public void Add(long offset, int length, uint id, ReadOnlySpan<byte> keyword, InstanceFlags flags)
     {
-        var block = (int)(offset / BlockEntry.Length);
+        var block = (int)((ulong)offset / BlockEntry.Length);
         if (block != _entry.Block) Begin(block, offset, id);
         else if (id <= _entry.LastId) _entry.Rises = false;
         _entry.LastId = id;
         Count++;
 
+        if (keyword.Length > 0) Place(offset, id, keyword);
+    }
+
+    [MethodImpl(MethodImplOptions.NoInlining)]
+    private readonly void Place(long offset, uint id, ReadOnlySpan<byte> keyword)
+    {
         var number = wanted.Find(keyword);
         if (number >= 0) _places.Add(new PlaceRow(offset, id, number));
     }
@@ -32,6 +47,7 @@ internal struct PassSink(ChunkResult result, WantedKeywords wanted) : IStatement
         if (_entry.Block >= 0) _blocks.Add(_entry);
     }
 
+    [MethodImpl(MethodImplOptions.NoInlining)]
     private void Begin(int block, long offset, uint id)
     {
         Finish();
