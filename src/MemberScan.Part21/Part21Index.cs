@@ -27,12 +27,13 @@ public sealed class Part21Index : IDisposable
     private readonly long[][] _places;
     private readonly Lazy<uint> _highestId;
 
-    private Part21Index(ByteSource source, IDisposable? owned, string name, IReadOnlyCollection<string> wanted, DiagnosticList diagnostics, Options options)
+    private Part21Index(
+        ByteSource source, IDisposable? owned, string name, IReadOnlyCollection<string> wanted, DiagnosticList diagnostics, Options options, Func<IPart21Taker>? newTaker)
     {
         (_source, _owned, Name) = (source, owned, name);
         _wanted = [.. wanted.Distinct(StringComparer.Ordinal)];
         var log = new FindingLog();
-        var pass = new DataPass(source, new WantedKeywords(_wanted), options.Limits, options.Stretch, options.Window);
+        var pass = new DataPass(source, new WantedKeywords(_wanted), newTaker, options.Limits, options.Stretch, options.Window);
         var structure = new StreamedStructure(source, log, options.Limits, pass, options.Threads);
         structure.Read();
 
@@ -40,6 +41,7 @@ public sealed class Part21Index : IDisposable
         InsertionOffset = structure.InsertionOffset;
         Header = Part21Header.From(new SourceText(structure.HeaderText, name), structure.Header);
         LineEnd = new SourceText(structure.Beginning, name).LineEnd;
+        Takers = pass.Takers;
         _places = Grouped(pass.Places, _wanted.Length);
         _blocks = new BlockIndex(pass.Blocks, source, NewScanner());
         TellDuplicates(log);
@@ -76,6 +78,9 @@ public sealed class Part21Index : IDisposable
     /// <summary>Highest number that stands behind a '#' anywhere in the text, up to 4,294,967,295; 0 if none. The first call reads the text once more.</summary>
     public uint HighestId => _highestId.Value;
 
+    /// <summary>What took the wanted instances while the pass went over them, in file order; empty if nothing was to take them.</summary>
+    public IReadOnlyList<IPart21Taker> Takers { get; }
+
     internal ByteSource Source => _source;
 
     internal int Listed => _blocks.Listed;
@@ -85,13 +90,14 @@ public sealed class Part21Index : IDisposable
     /// <param name="wanted">Keywords in upper case whose instances are kept exactly.</param>
     /// <param name="diagnostics">Receives findings with codes <c>P21-…</c>.</param>
     /// <param name="threads">Threads that share the pass; 0 for one per processor. The result is the same for any number.</param>
+    /// <param name="newTaker">Makes what takes the wanted instances as they pass by, once for each stretch, on any thread; null if nothing does.</param>
     /// <exception cref="InvalidDataException">As <see cref="ModelContainer.Read(string)"/>, or the text is longer than <see cref="MaxBytes"/>.</exception>
     /// <exception cref="IOException">The file cannot be read.</exception>
-    public static Part21Index Open(string path, IReadOnlyCollection<string> wanted, DiagnosticList diagnostics, int threads = 0)
+    public static Part21Index Open(string path, IReadOnlyCollection<string> wanted, DiagnosticList diagnostics, int threads = 0, Func<IPart21Taker>? newTaker = null)
     {
         ArgumentException.ThrowIfNullOrEmpty(path);
         var name = Path.GetFileName(path);
-        if (ModelContainer.IsArchive(path)) return Over(ModelContainer.Read(path).Bytes, name, wanted, diagnostics, threads);
+        if (ModelContainer.IsArchive(path)) return Over(ModelContainer.Read(path).Bytes, name, wanted, diagnostics, threads, newTaker);
 
         var handle = File.OpenHandle(path, options: FileOptions.RandomAccess);
         try
@@ -99,7 +105,7 @@ public sealed class Part21Index : IDisposable
             var source = new FileSource(handle);
             RefuseTooLong(source.Length, name);
             ModelContainer.RefuseForeign(source, name);
-            return new Part21Index(source, handle, name, Checked(wanted), diagnostics, Options.Shipped(threads));
+            return new Part21Index(source, handle, name, Checked(wanted), diagnostics, Options.Shipped(threads), newTaker);
         }
         catch
         {
@@ -114,8 +120,10 @@ public sealed class Part21Index : IDisposable
     /// <param name="wanted">Keywords in upper case whose instances are kept exactly.</param>
     /// <param name="diagnostics">Receives findings with codes <c>P21-…</c>.</param>
     /// <param name="threads">Threads that share the pass; 0 for one per processor.</param>
-    public static Part21Index Over(ReadOnlyMemory<byte> text, string name, IReadOnlyCollection<string> wanted, DiagnosticList diagnostics, int threads = 0) =>
-        Over(text, name, wanted, diagnostics, Options.Shipped(threads));
+    /// <param name="newTaker">As for <see cref="Open"/>.</param>
+    public static Part21Index Over(
+        ReadOnlyMemory<byte> text, string name, IReadOnlyCollection<string> wanted, DiagnosticList diagnostics, int threads = 0, Func<IPart21Taker>? newTaker = null) =>
+        Over(new MemorySource(text), name, wanted, diagnostics, Options.Shipped(threads), newTaker);
 
     /// <summary>Offsets [byte] of the instances of a keyword, in file order, exact (no subtypes).</summary>
     /// <param name="keyword">One of those asked for.</param>
@@ -143,10 +151,11 @@ public sealed class Part21Index : IDisposable
     internal static Part21Index Over(ReadOnlyMemory<byte> text, string name, IReadOnlyCollection<string> wanted, DiagnosticList diagnostics, Options options) =>
         Over(new MemorySource(text), name, wanted, diagnostics, options);
 
-    internal static Part21Index Over(ByteSource source, string name, IReadOnlyCollection<string> wanted, DiagnosticList diagnostics, Options options)
+    internal static Part21Index Over(
+        ByteSource source, string name, IReadOnlyCollection<string> wanted, DiagnosticList diagnostics, Options options, Func<IPart21Taker>? newTaker = null)
     {
         RefuseTooLong(source.Length, name);
-        return new(source, null, name, Checked(wanted), diagnostics, options);
+        return new(source, null, name, Checked(wanted), diagnostics, options, newTaker);
     }
 
     private static IReadOnlyCollection<string> Checked(IReadOnlyCollection<string> wanted)

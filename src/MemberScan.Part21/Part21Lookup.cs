@@ -44,7 +44,7 @@ public sealed class Part21Lookup
     /// <returns>False where no instance begins.</returns>
     public bool TryReadAt(long offset, out Part21Instance instance)
     {
-        _single.LoadOne(offset, _scanner);
+        _single.LoadOne(offset, _index.IsPlainAt(offset), _scanner);
         var isFound = _single.Count > 0 && _single.At(0).Offset == offset;
         instance = isFound ? _single.At(0) : default;
         return isFound;

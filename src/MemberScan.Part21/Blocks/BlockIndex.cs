@@ -63,6 +63,27 @@ internal sealed class BlockIndex
     /// <summary>Anchors in file order.</summary>
     public ReadOnlySpan<BlockEntry> Entries => _entries;
 
+    /// <summary>Whether the instances are plain in the block of an offset where one begins.</summary>
+    public bool IsPlainAt(long offset)
+    {
+        var block = (int)(offset / BlockEntry.Length);
+        int low = 0, high = _entries.Length - 1;
+        while (low <= high)
+        {
+            var middle = (low + high) >>> 1;
+            if (_entries[middle].Block == block) return _entries[middle].IsPlain && !IsShared(middle);
+            if (_entries[middle].Block < block) low = middle + 1;
+            else high = middle - 1;
+        }
+
+        return false;
+    }
+
+    // Two data sections may meet in a block; each has an anchor of its own there.
+    private bool IsShared(int entry) =>
+        (entry > 0 && _entries[entry - 1].Block == _entries[entry].Block)
+        || (entry + 1 < _entries.Length && _entries[entry + 1].Block == _entries[entry].Block);
+
     /// <summary>The place in <see cref="Entries"/> of the only block found by its anchor that may hold a number; −1 if none.</summary>
     public int RisingWith(uint id)
     {
@@ -206,11 +227,17 @@ internal sealed class BlockIndex
     {
         public int Entry;
 
-        public static bool NeedsLength => false;
+        public static bool NeedsText => false;
 
         public readonly bool MayWant(uint letters) => false;
 
-        public void Add(long offset, int length, uint id, ReadOnlySpan<byte> keyword, InstanceFlags flags)
+        public void AddOther(long offset, uint id, ReadOnlySpan<byte> text, ReadOnlySpan<byte> keyword, InstanceFlags flags) => AddPlain(offset, id, text, keyword);
+
+        public readonly void PassOver()
+        {
+        }
+
+        public void AddPlain(long offset, uint id, ReadOnlySpan<byte> text, ReadOnlySpan<byte> keyword)
         {
             while (offset >= index._entries[Entry].End) Entry++;
             if (counts.Length > 0)

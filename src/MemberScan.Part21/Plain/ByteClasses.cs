@@ -19,11 +19,17 @@ internal readonly ref struct ByteClasses
     /// <summary>Classes of the second set.</summary>
     public const int Comma = 8, Semicolon = 9, EqualsSign = 10, LineEnd = 11, Backslash = 12;
 
-    /// <summary>Words of both sets and of the misplaced bytes.</summary>
-    public const int Words = 136;
+    /// <summary>Bytes that may not follow the one before, or are no bytes of Part 21; true outside of strings only.</summary>
+    public const int Misplaced = 13;
+
+    /// <summary>Words of both sets.</summary>
+    public const int Words = 128;
 
     private const int Rows = 64;
-    private const int Misplaced = 128;
+    private const byte MisplacedBit = 1 << (Misplaced - 8);
+
+    // How far ahead of the look-up the bytes are asked for [byte]: what the kernel copied stands in an outer cache.
+    private const int Ahead = 2048;
 
     private static readonly byte[] s_first = Table(First);
     private static readonly byte[] s_second = Table(Second);
@@ -51,13 +57,6 @@ internal readonly ref struct ByteClasses
     /// <summary>Whether the instructions for 64 bytes at a time are there.</summary>
     public static bool IsWide => Avx512Vbmi.IsSupported && Gfni.V512.IsSupported;
 
-    /// <summary>Bytes that may not follow the one before, or are no bytes of Part 21; true outside of strings only.</summary>
-    public Vector512<ulong> MisplacedBytes
-    {
-        [MethodImpl(MethodImplOptions.AggressiveInlining)]
-        get => Vector512.LoadUnsafe(ref _words, Misplaced);
-    }
-
     /// <summary>Classifies the 64 bytes from <paramref name="at"/> on as one word of each class; bytes from 0x80 on are in no class.</summary>
     /// <param name="at">The first byte.</param>
     /// <param name="hasBefore">Whether the byte before counts; else a blank stands for it.</param>
@@ -71,17 +70,19 @@ internal readonly ref struct ByteClasses
             return;
         }
 
+        if (Sse.IsSupported) Prefetch(ref at);
         var bytes = Vector512.LoadUnsafe(ref at);
-        var high = bytes & Vector512.Create((byte)0x80);
-        var before = hasBefore ? Vector512.LoadUnsafe(ref Unsafe.Subtract(ref at, 1)) : Shifted(bytes);
-        var misplaced = (Avx512Vbmi.PermuteVar64x8x2(_beforeLow, before, _beforeHigh) & Avx512Vbmi.PermuteVar64x8x2(_behindLow, bytes, _behindHigh)) | high;
-        Unsafe.Add(ref _words, Misplaced + word) = ~Vector512.Equals(misplaced, Vector512<byte>.Zero).ExtractMostSignificantBits();
-
         var reversed = Avx512Vbmi.PermuteVar64x8(bytes, _reversed);
+        var before = Avx512Vbmi.PermuteVar64x8(hasBefore ? Vector512.LoadUnsafe(ref Unsafe.Subtract(ref at, 1)) : Shifted(bytes), _reversed);
+        var high = reversed & Vector512.Create((byte)0x80);
+        var misplaced = (Avx512Vbmi.PermuteVar64x8x2(_beforeLow, before, _beforeHigh) & Avx512Vbmi.PermuteVar64x8x2(_behindLow, reversed, _behindHigh)) | high;
         if (high != Vector512<byte>.Zero)
             reversed = Vector512.ConditionalSelect(Vector512.LessThan(reversed.AsSByte(), Vector512<sbyte>.Zero).AsByte(), Vector512.Create((byte)'!'), reversed);
-        Turned(Avx512Vbmi.PermuteVar64x8x2(_firstLow, reversed, _firstHigh)).StoreUnsafe(ref _words, (nuint)(8 * word));
-        Turned(Avx512Vbmi.PermuteVar64x8x2(_secondLow, reversed, _secondHigh)).StoreUnsafe(ref _words, (nuint)(Rows + 8 * word));
+        var first = Avx512Vbmi.PermuteVar64x8x2(_firstLow, reversed, _firstHigh);
+        var second = Avx512Vbmi.PermuteVar64x8x2(_secondLow, reversed, _secondHigh)
+            | (~Vector512.Equals(misplaced, Vector512<byte>.Zero) & Vector512.Create(MisplacedBit));
+        Turned(first).StoreUnsafe(ref _words, (nuint)(8 * word));
+        Turned(second).StoreUnsafe(ref _words, (nuint)(Rows + 8 * word));
     }
 
     /// <summary>The same, byte for byte.</summary>
@@ -89,18 +90,16 @@ internal readonly ref struct ByteClasses
     {
         Span<ulong> rows = stackalloc ulong[16];
         rows.Clear();
-        var misplaced = 0UL;
         var before = hasBefore ? Unsafe.Subtract(ref at, 1) : (byte)' ';
         for (var i = 0; i < 64; i++)
         {
             var value = Unsafe.Add(ref at, i);
-            var bit = 1UL << i;
-            if (value >= 0x80 || (BytePairs.Before[before & 0x7F] & BytePairs.Behind[value]) != 0) misplaced |= bit;
-            for (var rest = value < 0x80 ? s_first[value] | s_second[value] << 8 : 0; rest != 0; rest &= rest - 1) rows[BitOperations.TrailingZeroCount(rest)] |= bit;
+            var classes = value < 0x80 ? s_first[value] | s_second[value] << 8 : 0;
+            if (value >= 0x80 || (BytePairs.Before[before & 0x7F] & BytePairs.Behind[value]) != 0) classes |= 1 << Misplaced;
+            for (; classes != 0; classes &= classes - 1) rows[BitOperations.TrailingZeroCount(classes)] |= 1UL << i;
             before = value;
         }
 
-        Unsafe.Add(ref _words, Misplaced + word) = misplaced;
         for (var i = 0; i < 8; i++)
         {
             Unsafe.Add(ref _words, 8 * word + i) = rows[i];
@@ -178,6 +177,9 @@ internal readonly ref struct ByteClasses
         var unit = Vector512.Create(0x8040_2010_0804_0201).AsByte();
         return Avx512Vbmi.PermuteVar64x8(Gfni.V512.GaloisFieldAffineTransform(unit, classes, 0), _gathered).AsUInt64();
     }
+
+    [MethodImpl(MethodImplOptions.AggressiveInlining)]
+    private static unsafe void Prefetch(ref byte at) => Sse.Prefetch0(Unsafe.AsPointer(ref Unsafe.Add(ref at, Ahead)));
 
     // The bytes moved up by one, a blank below.
     private static Vector512<byte> Shifted(Vector512<byte> bytes) =>

@@ -7,6 +7,8 @@ namespace MemberScan.Part21.Plain;
 /// <summary>Tokens in which letters and digits meet, which no pair of bytes decides: exponents, words with digits. Rare, so one at a time.</summary>
 internal static class OddTokens
 {
+    private static readonly bool[] s_parts = [.. Enumerable.Range(0, 256).Select(c => char.IsAsciiLetterUpper((char)c) || char.IsAsciiDigit((char)c) || (char)c is '_' or '.' or '+' or '-')];
+
     // A longer one is left to the other reader.
     private const int Longest = 80;
 
@@ -18,23 +20,28 @@ internal static class OddTokens
     {
         Span<ulong> bad = stackalloc ulong[8];
         bad.Clear();
+        var behind = 0;
         for (var i = 0; i < 8; i++)
         {
             for (var rest = places[i]; rest != 0; rest &= rest - 1)
             {
                 var bit = BitOperations.TrailingZeroCount(rest);
-                if (!IsSound(text, block + 64 * i + bit)) bad[i] |= 1UL << bit;
+                var at = block + 64 * i + bit;
+
+                // A token looked at once is not looked at again.
+                if (at >= behind && !IsSound(text, at, out behind)) bad[i] |= 1UL << bit;
             }
         }
 
         return Vector512.Create<ulong>(bad);
     }
 
-    private static bool IsSound(ReadOnlySpan<byte> text, int at)
+    private static bool IsSound(ReadOnlySpan<byte> text, int at, out int end)
     {
+        end = at;
         if (at >= text.Length) return false;
 
-        var (start, end) = (at, at);
+        var start = at;
         while (start > 0 && at - start < Longest && IsPart(text[start - 1])) start--;
         while (end < text.Length && end - at < Longest && IsPart(text[end])) end++;
         if (end == text.Length || end - at == Longest || at - start == Longest) return false;
@@ -50,15 +57,12 @@ internal static class OddTokens
         };
     }
 
-    private static bool IsPart(byte value) => char.IsAsciiLetterUpper((char)value) || char.IsAsciiDigit((char)value) || value is (byte)'_' or (byte)'.' or (byte)'+' or (byte)'-';
+    private static bool IsPart(byte value) => s_parts[value];
 
     private static bool IsWord(ReadOnlySpan<byte> token)
     {
         if (char.IsAsciiDigit((char)token[0])) return false;
-        foreach (var letter in token)
-            if (letter is (byte)'.' or (byte)'+' or (byte)'-')
-                return false;
-        return true;
+        return token.IndexOfAny((byte)'.', (byte)'+', (byte)'-') < 0;
     }
 
     // digits [. [digits]] E [sign] digit [digit]; larger exponents may be beyond a double.

@@ -27,7 +27,7 @@ internal struct PlainRules
     public bool Apply(scoped in ByteClasses classes, ReadOnlySpan<byte> text, int block, scoped Span<ulong> found)
     {
         classes.Columns(0, out var quote, out var numeric, out var letter, out var dot, out var hash, out var blank, out var open, out var close);
-        classes.Columns(1, out var comma, out var semicolon, out var equals, out var lineEnd, out var backslash, out _, out _, out _);
+        classes.Columns(1, out var comma, out var semicolon, out var equals, out var lineEnd, out var backslash, out var misplaced, out _, out _);
 
         // Strings: from each opening apostrophe to before the closing one. Two apostrophes within are one string's end and the next one's beginning.
         var inside = PrefixXor(quote, ref _inside);
@@ -35,7 +35,7 @@ internal struct PlainRules
         var quoteEnd = quote & ~inside;
         var outside = ~(inside | quote);
         var afterQuoteEnd = Before(quoteEnd, ref _quoteEnd);
-        var bad = classes.MisplacedBytes & (outside | (quoteStart & ~afterQuoteEnd));
+        var bad = misplaced & (outside | (quoteStart & ~afterQuoteEnd));
         bad |= inside & lineEnd;
 
         numeric &= outside;

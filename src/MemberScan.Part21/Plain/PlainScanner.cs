@@ -2,7 +2,6 @@ using System.Buffers.Binary;
 using System.Numerics;
 using System.Runtime.CompilerServices;
 using System.Runtime.InteropServices;
-using MemberScan.Part21.Index;
 
 namespace MemberScan.Part21.Plain;
 
@@ -60,14 +59,27 @@ internal static class PlainScanner
             // Each semicolon ends the statement under way, or the one that began behind the semicolon before.
             starts[0] = under;
             var begun = Places(found[Found.Start..], block, starts, under >= 0 ? 1 : 0);
-            var ended = TSink.NeedsLength ? Places(found[Found.Semicolon..], block, ends, 0) : Count(found[Found.Semicolon..]);
+            var ended = TSink.NeedsText ? Places(found[Found.Semicolon..], block, ends, 0) : Count(found[Found.Semicolon..]);
+            var hasEnds = TSink.NeedsText;
             for (var i = 0; i < ended; i++)
             {
                 var start = starts[i];
-                if (TryTake(ref bytes, start, TSink.NeedsLength ? ends[i] + 1 - start : 0, origin, ref sink)) continue;
+                if (!TryHead(ref bytes, start, out var id, out var word))
+                {
+                    at = start;
+                    return PlainStop.NotPlain;
+                }
 
-                at = start;
-                return PlainStop.NotPlain;
+                var isWanted = sink.MayWant(Unsafe.ReadUnaligned<uint>(ref Unsafe.Add(ref bytes, word + 3)));
+                if (!TSink.NeedsText && !isWanted)
+                {
+                    sink.AddPlain(origin + start, id, default, default);
+                    continue;
+                }
+
+                if (!hasEnds) Places(found[Found.Semicolon..], block, ends, 0);
+                hasEnds = true;
+                sink.AddPlain(origin + start, id, text[start..(ends[i] + 1)], isWanted ? Keyword(text[word..]) : default);
             }
 
             under = begun > ended ? starts[ended] : -1;
@@ -112,8 +124,10 @@ internal static class PlainScanner
 
             stop = PlainStop.NotPlain;
             if (semicolon == loaded) return true;
-            if (!TryTake(ref MemoryMarshal.GetReference(text), under, block + semicolon + 1 - under, origin, ref sink)) return false;
+            if (!TryHead(ref MemoryMarshal.GetReference(text), under, out var id, out var word)) return false;
 
+            var end = block + semicolon + 1;
+            sink.AddPlain(origin + under, id, text[under..end], Keyword(text[word..]));
             under = -1;
             from = semicolon + 1;
         }
@@ -165,10 +179,13 @@ internal static class PlainScanner
         return count;
     }
 
-    // #id=KEYWORD( or #id= KEYWORD(, known to be so; false for a number beyond 32 bits.
+    /// <summary>Number and keyword of a plain statement; false for a number beyond 32 bits.</summary>
+    /// <param name="bytes">First byte of the text; eight more than the statement are readable.</param>
+    /// <param name="start">Where the statement begins, <c>#id=KEYWORD(</c> or <c>#id= KEYWORD(</c>.</param>
+    /// <param name="id">Its number.</param>
+    /// <param name="word">Where its keyword begins.</param>
     [MethodImpl(MethodImplOptions.AggressiveInlining)]
-    private static bool TryTake<TSink>(ref byte bytes, int start, int length, long origin, ref TSink sink)
-        where TSink : struct, IStatementSink
+    public static bool TryHead(ref byte bytes, int start, out uint id, out int word)
     {
         ref var head = ref Unsafe.Add(ref bytes, start + 1);
         var number = EightDigits(ref head, out var digits);
@@ -179,25 +196,16 @@ internal static class PlainScanner
                 number = number * 10 + digit;
                 digits++;
             }
-
-            if (number > uint.MaxValue || digits > 10) return false;
         }
 
-        var word = digits + 1;
-        if (Unsafe.Add(ref head, word) <= ' ') word++;
-        ref var keyword = ref Unsafe.Add(ref head, word);
-        var wanted = sink.MayWant(Unsafe.ReadUnaligned<uint>(ref Unsafe.Add(ref keyword, 3)));
-        sink.Add(origin + start, length, (uint)number, wanted ? Keyword(ref keyword) : default, InstanceFlags.None);
-        return true;
+        id = (uint)number;
+        word = start + 2 + digits;
+        if (Unsafe.Add(ref bytes, word) <= ' ') word++;
+        return number <= uint.MaxValue && digits <= 10;
     }
 
     [MethodImpl(MethodImplOptions.NoInlining)]
-    private static ReadOnlySpan<byte> Keyword(ref byte first)
-    {
-        var length = 1;
-        while (Unsafe.Add(ref first, length) != '(') length++;
-        return MemoryMarshal.CreateReadOnlySpan(ref first, length);
-    }
+    private static ReadOnlySpan<byte> Keyword(ReadOnlySpan<byte> text) => text[..text.IndexOf((byte)'(')];
 
     // The number that up to eight digits spell, by three multiplications; and how many there are.
     [MethodImpl(MethodImplOptions.AggressiveInlining)]

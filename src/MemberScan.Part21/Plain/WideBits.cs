@@ -59,6 +59,16 @@ internal static class WideBits
         return within ^ Vector512.Equals(Vector512.Create((ulong)turned) & s_one, s_one);
     }
 
+    /// <summary>Each bit the exclusive sum of all up to it, in one word.</summary>
+    [MethodImpl(MethodImplOptions.AggressiveInlining)]
+    public static ulong PrefixXor(ulong bits)
+    {
+        if (Pclmulqdq.IsSupported) return Pclmulqdq.CarrylessMultiply(Vector128.CreateScalar(bits), Vector128<ulong>.AllBitsSet, 0).ToScalar();
+
+        for (var step = 1; step < 64; step <<= 1) bits ^= bits << step;
+        return bits;
+    }
+
     [MethodImpl(MethodImplOptions.AggressiveInlining)]
     private static Vector512<ulong> WithinWords(Vector512<ulong> bits)
     {

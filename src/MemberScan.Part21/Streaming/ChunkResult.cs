@@ -17,6 +17,9 @@ internal sealed class ChunkResult
     /// <summary>Number of instances.</summary>
     public long Count { get; set; }
 
+    /// <summary>Takes the wanted instances as they pass by; null if nobody asked for that.</summary>
+    public IPart21Taker? Taker { get; init; }
+
     public List<BlockEntry> Blocks { get; } = [];
 
     public List<PlaceRow> Places { get; } = [];

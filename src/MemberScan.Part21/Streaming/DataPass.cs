@@ -31,8 +31,11 @@ internal sealed class DataPass
     private readonly DataScanner _scanner;
     private readonly Window _window;
 
-    public DataPass(ByteSource source, WantedKeywords wanted, ReadingLimits limits, int stretch, int window)
+    private readonly Func<IPart21Taker>? _newTaker;
+
+    public DataPass(ByteSource source, WantedKeywords wanted, Func<IPart21Taker>? newTaker, ReadingLimits limits, int stretch, int window)
     {
+        _newTaker = newTaker;
         _source = source;
         _wanted = wanted;
         _limits = limits with { RescannedBytes = Math.Min(limits.RescannedBytes, 8L * stretch) };
@@ -47,6 +50,9 @@ internal sealed class DataPass
 
     /// <summary>Rows of wanted keywords by stretch, in file order.</summary>
     public List<List<PlaceRow>> Places { get; } = [];
+
+    /// <summary>What took the wanted instances, by stretch, in file order.</summary>
+    public List<IPart21Taker> Takers { get; } = [];
 
     /// <summary>Number of instances.</summary>
     public long Count { get; private set; }
@@ -113,6 +119,7 @@ internal sealed class DataPass
             log.Take(result.Findings, 0);
             Blocks.Add(result.Blocks);
             Places.Add(result.Places);
+            if (result.Taker is not null) Takers.Add(result.Taker);
             Count += result.Count;
             at = result.End;
             if (Count > _limits.Instances)
@@ -127,7 +134,7 @@ internal sealed class DataPass
 
     private ChunkResult Scan(DataScanner scanner, Window window, long from, long until)
     {
-        var result = new ChunkResult { From = from };
+        var result = new ChunkResult { From = from, Taker = _newTaker?.Invoke() };
         var sink = new PassSink(result, _wanted);
         scanner.Log.TakeBack(0);
         result.Stop = scanner.Scan(window, ref from, until, false, ref sink);

@@ -75,6 +75,6 @@ public sealed class ByteClassesTests
 
         new ByteClasses(words).Load(ref bytes[0], false, 3);
 
-        Assert.Equal(isMisplaced, (new ByteClasses(words).MisplacedBytes[3] >> 21 & 1) != 0);
+        Assert.Equal(isMisplaced, (new ByteClasses(words).Of(ByteClasses.Misplaced)[3] >> 21 & 1) != 0);
     }
 }
