@@ -25,7 +25,9 @@ public sealed class Part21Index : IDisposable
     private readonly BlockIndex _blocks;
     private readonly ImmutableArray<string> _wanted;
     private readonly long[][] _places;
-    private readonly Lazy<uint> _highestId;
+    private readonly int _threads;
+    private readonly Lock _gate = new();
+    private long _highestId = -1;
 
     private Part21Index(
         ByteSource source, IDisposable? owned, string name, IReadOnlyCollection<string> wanted, DiagnosticList diagnostics, Options options, Func<IPart21Taker>? newTaker)
@@ -48,7 +50,7 @@ public sealed class Part21Index : IDisposable
         Tell(log, diagnostics);
         ReadToEnd = !log.EndsReading;
         HasDamage = log.HasDamage;
-        _highestId = new Lazy<uint>(() => HighestNumber.In(source, options.Threads));
+        _threads = options.Threads;
     }
 
     /// <summary>Name of the file, without folder.</summary>
@@ -76,7 +78,17 @@ public sealed class Part21Index : IDisposable
     public string LineEnd { get; }
 
     /// <summary>Highest number that stands behind a '#' anywhere in the text, up to 4,294,967,295; 0 if none. The first call reads the text once more.</summary>
-    public uint HighestId => _highestId.Value;
+    public uint HighestId
+    {
+        get
+        {
+            lock (_gate)
+            {
+                if (_highestId < 0) _highestId = HighestNumber.In(_source, _threads);
+                return (uint)_highestId;
+            }
+        }
+    }
 
     /// <summary>What took the wanted instances while the pass went over them, in file order; empty if nothing was to take them.</summary>
     public IReadOnlyList<IPart21Taker> Takers { get; }
@@ -172,17 +184,14 @@ public sealed class Part21Index : IDisposable
 
     private static DataScanner NewScanner() => new(new FindingLog(), Part21File.ShippedLimits);
 
-    private static long[][] Grouped(List<List<PlaceRow>> places, int keywords)
+    private static long[][] Grouped(Rows<PlaceRow> places, int keywords)
     {
         var counts = new int[keywords];
-        foreach (var part in places)
-            foreach (var place in part)
-                counts[place.Keyword]++;
-        var grouped = Array.ConvertAll(counts, c => new long[c]);
+        for (var i = 0; i < places.Count; i++) counts[places[i].Keyword]++;
+        var grouped = new long[keywords][];
+        for (var i = 0; i < keywords; i++) grouped[i] = new long[counts[i]];
         Array.Clear(counts);
-        foreach (var part in places)
-            foreach (var place in part)
-                grouped[place.Keyword][counts[place.Keyword]++] = place.Offset;
+        for (var i = 0; i < places.Count; i++) grouped[places[i].Keyword][counts[places[i].Keyword]++] = places[i].Offset;
         return grouped;
     }
 
@@ -238,6 +247,8 @@ public sealed class Part21Index : IDisposable
     private void Tell(FindingLog log, DiagnosticList diagnostics)
     {
         var findings = log.Counted();
+        if (findings.Count == 0) return;
+
         long[] offsets = [.. findings.Select(f => f.Offset).Where(o => o >= 0).Order()];
         var lines = LineCounter.LinesAt(_source, offsets);
         foreach (var (kind, offset, id, count) in findings)

@@ -35,9 +35,9 @@ internal readonly ref struct ByteClasses
     private static readonly byte[] s_second = Table(Second);
 
     // Bytes of each group of eight in reverse: the turn of the matrix puts the last one lowest. Then the k-th bytes of all groups together.
-    private static readonly byte[] s_reversed = [.. Enumerable.Range(0, 64).Select(i => (byte)(i ^ 7))];
-    private static readonly byte[] s_gathered = [.. Enumerable.Range(0, 64).Select(i => (byte)((i & 7) * 8 + i / 8))];
-    private static readonly byte[] s_shifted = [.. Enumerable.Range(0, 64).Select(i => (byte)Math.Max(0, i - 1))];
+    private static readonly byte[] s_reversed = Places(i => i ^ 7);
+    private static readonly byte[] s_gathered = Places(i => (i & 7) * 8 + i / 8);
+    private static readonly byte[] s_shifted = Places(i => Math.Max(0, i - 1));
 
     private readonly ref ulong _words;
     private readonly Vector512<byte> _firstLow, _firstHigh, _secondLow, _secondHigh, _beforeLow, _beforeHigh, _behindLow, _behindHigh;
@@ -188,7 +188,19 @@ internal readonly ref struct ByteClasses
     private static (Vector512<byte> Low, Vector512<byte> High) Halves(ReadOnlySpan<byte> table) =>
         (Vector512.Create(table[..64]), Vector512.Create(table[64..]));
 
-    private static byte[] Table(Func<char, int> bits) => [.. Enumerable.Range(0, 128).Select(c => (byte)bits((char)c))];
+    private static byte[] Places(Func<int, int> place)
+    {
+        var places = new byte[64];
+        for (var i = 0; i < places.Length; i++) places[i] = (byte)place(i);
+        return places;
+    }
+
+    private static byte[] Table(Func<char, int> bits)
+    {
+        var table = new byte[128];
+        for (var c = 0; c < table.Length; c++) table[c] = (byte)bits((char)c);
+        return table;
+    }
 
     private static int First(char c) => c switch
     {

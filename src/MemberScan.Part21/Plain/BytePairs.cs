@@ -19,7 +19,12 @@ internal static class BytePairs
     /// <summary>Bits of the byte behind, by its value below 0x80.</summary>
     public static ReadOnlySpan<byte> Behind => s_behind;
 
-    private static byte[] Table(Func<char, int> bits) => [.. Enumerable.Range(0, 128).Select(c => (byte)bits((char)c))];
+    private static byte[] Table(Func<char, int> bits)
+    {
+        var table = new byte[128];
+        for (var c = 0; c < table.Length; c++) table[c] = (byte)bits((char)c);
+        return table;
+    }
 
     // E may end in a sign (an exponent); what follows ';' begins a statement and is looked at there.
     private static int BitsBefore(char c) => c switch

@@ -7,7 +7,7 @@ namespace MemberScan.Part21.Plain;
 /// <summary>Tokens in which letters and digits meet, which no pair of bytes decides: exponents, words with digits. Rare, so one at a time.</summary>
 internal static class OddTokens
 {
-    private static readonly bool[] s_parts = [.. Enumerable.Range(0, 256).Select(c => char.IsAsciiLetterUpper((char)c) || char.IsAsciiDigit((char)c) || (char)c is '_' or '.' or '+' or '-')];
+    private static readonly bool[] s_parts = Parts();
 
     // A longer one is left to the other reader.
     private const int Longest = 80;
@@ -58,6 +58,13 @@ internal static class OddTokens
     }
 
     private static bool IsPart(byte value) => s_parts[value];
+
+    private static bool[] Parts()
+    {
+        var parts = new bool[256];
+        foreach (var part in "ABCDEFGHIJKLMNOPQRSTUVWXYZ_0123456789.+-"u8) parts[part] = true;
+        return parts;
+    }
 
     private static bool IsWord(ReadOnlySpan<byte> token)
     {

@@ -20,9 +20,9 @@ internal sealed class ChunkResult
     /// <summary>Takes the wanted instances as they pass by; null if nobody asked for that.</summary>
     public IPart21Taker? Taker { get; init; }
 
-    public List<BlockEntry> Blocks { get; } = [];
+    public Rows<BlockEntry> Blocks { get; } = new();
 
-    public List<PlaceRow> Places { get; } = [];
+    public Rows<PlaceRow> Places { get; } = new();
 
     public List<Finding> Findings { get; } = [];
 }

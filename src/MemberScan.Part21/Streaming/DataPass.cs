@@ -45,11 +45,11 @@ internal sealed class DataPass
         (_scanner, _window) = (new DataScanner(new FindingLog(), _limits), new Window(source, window));
     }
 
-    /// <summary>Anchors by stretch, in file order.</summary>
-    public List<List<BlockEntry>> Blocks { get; } = [];
+    /// <summary>Anchors in file order.</summary>
+    public Rows<BlockEntry> Blocks { get; } = new();
 
-    /// <summary>Rows of wanted keywords by stretch, in file order.</summary>
-    public List<List<PlaceRow>> Places { get; } = [];
+    /// <summary>Rows of wanted keywords in file order.</summary>
+    public Rows<PlaceRow> Places { get; } = new();
 
     /// <summary>What took the wanted instances, by stretch, in file order.</summary>
     public List<IPart21Taker> Takers { get; } = [];
@@ -117,8 +117,8 @@ internal sealed class DataPass
             _guessed[number] = null;
             var result = guessed?.From == at ? guessed : Scan(_scanner, _window, at, (long)(number + 1) * _stretch);
             log.Take(result.Findings, 0);
-            Blocks.Add(result.Blocks);
-            Places.Add(result.Places);
+            Blocks.AddAll(result.Blocks);
+            Places.AddAll(result.Places);
             if (result.Taker is not null) Takers.Add(result.Taker);
             Count += result.Count;
             at = result.End;
