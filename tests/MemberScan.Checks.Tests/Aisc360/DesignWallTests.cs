@@ -1,5 +1,6 @@
 using MemberScan.Checks.Aisc360;
 using MemberScan.Foundation.Units;
+using MemberScan.Mechanics.Properties;
 using MemberScan.Mechanics.Sections;
 
 namespace MemberScan.Checks.Tests.Aisc360;

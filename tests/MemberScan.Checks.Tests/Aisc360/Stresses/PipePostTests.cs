@@ -3,6 +3,7 @@ using MemberScan.Checks.Aisc360.Stresses;
 using MemberScan.Checks.Allowable;
 using MemberScan.Foundation.Units;
 using MemberScan.Mechanics.Forces;
+using MemberScan.Mechanics.Properties;
 using MemberScan.Mechanics.Sections;
 using MemberScan.Mechanics.Stress;
 using MemberScan.Model.Forces;

@@ -1,6 +1,7 @@
 using MemberScan.Checks.En1993.Sections;
 using MemberScan.Foundation.Units;
 using MemberScan.Mechanics.Forces;
+using MemberScan.Mechanics.Properties;
 using MemberScan.Mechanics.Sections;
 using MemberScan.Model.Forces;
 
@@ -43,6 +44,9 @@ internal static class Cases
             JSource = "left out here",
             WelY = 2 * iy / h,
             WelZ = 2 * iz / b,
+            Extremes = new ExtremeModuli(2 * iy / h, 2 * iy / h, 2 * iz / b, 2 * iz / b),
+            QY = (b * h * h - bi * hi * hi) / 8,
+            QZ = (h * b * b - hi * bi * bi) / 8,
             WplY = (b * h * h - bi * hi * hi) / 4,
             WplZ = (h * b * b - hi * bi * bi) / 4,
             Wt = null,
