@@ -41,14 +41,14 @@ internal sealed class StateSvg(Action<FormattableString> add, double left, doubl
             add($"<circle class=\"mohr\" cx=\"{X(circle.Centre):0.##}\" cy=\"{y0:0.#}\" r=\"{circle.Radius * scale:0.##}\" fill=\"none\" stroke=\"{Normal}\"/>");
         // The face across x of the section, and the face square to it.
         add($"<circle cx=\"{X(state.Stress.Sigma):0.##}\" cy=\"{y0 - state.Stress.Tau * scale:0.##}\" r=\"3\" fill=\"{Shear}\"/>");
-        add($"<text x=\"{x0:0.#}\" y=\"{top + Height - 4:0.#}\" font-size=\"11\">σ1 {state.Sigma1 / 1e6:0.#}, σ3 {state.Sigma3 / 1e6:0.#}, τmax {state.LargestShear.Shear / 1e6:0.#}</text>");
+        add($"<text x=\"{x0:0.#}\" y=\"{top + Height - 4:0.#}\" font-size=\"11\">σ1 {Mpa(state.Sigma1)}, σ3 {Mpa(state.Sigma3)}, τmax {Mpa(state.LargestShear.Shear)}</text>");
     }
 
     private void Element(StressElement element, double x0)
     {
         var plane = element.Plane == ElementPlane.XY ? "xy" : "xz";
         var (cx, cy, half) = (x0 + Figure / 2.0 - 10, top + Middle, Side / 2.0);
-        add($"<text x=\"{x0:0.#}\" y=\"{top + 14:0.#}\">element {plane} [MPa]</text>");
+        add($"<text x=\"{x0:0.#}\" y=\"{top + 14:0.#}\">element {plane}, {plane[1..]} up [MPa]</text>");
         add($"<rect class=\"element\" x=\"{cx - half:0.#}\" y=\"{cy - half:0.#}\" width=\"{Side}\" height=\"{Side}\" fill=\"#f4efe4\" stroke=\"{Ink}\"/>");
         if (element.Sigma != 0)
         {
@@ -72,8 +72,11 @@ internal sealed class StateSvg(Action<FormattableString> add, double left, doubl
             }
         }
 
-        add($"<text x=\"{x0:0.#}\" y=\"{top + Height - 4:0.#}\" font-size=\"11\">σx {element.Sigma / 1e6:0.#}, τ{plane} {element.Tau / 1e6:0.#}; x to the right, {plane[1..]} up</text>");
+        add($"<text x=\"{x0:0.#}\" y=\"{top + Height - 4:0.#}\" font-size=\"11\">σx {Mpa(element.Sigma)}, τ{plane} {Mpa(element.Tau)}</text>");
     }
+
+    // Rounded before it is written: no -0.
+    private static double Mpa(double stress) => Math.Round(stress / 1e6, 1) + 0.0;
 
     private void Arrow(double x1, double y1, double x2, double y2, string colour)
     {

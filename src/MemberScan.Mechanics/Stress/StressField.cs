@@ -11,7 +11,14 @@ using MemberScan.Mechanics.Warping;
 namespace MemberScan.Mechanics.Stress;
 
 /// <summary>The stresses of one cross-section in one shear model, for any section forces.</summary>
-/// <remarks>Immutable and safe for several threads: made once per section, shared by all members that have it.</remarks>
+/// <remarks>
+/// <para>Immutable and safe for several threads: made once per section, shared by all members that have it.</para>
+/// <para>One way for every kind, outlines and open profiles too: whether a model has the section is what <see cref="TryCreate"/> returns, with the reason
+/// where not (an outline has no elementary model); the shear centre is in <see cref="Properties"/>, of this ν; the rings to be drawn come from
+/// <see cref="OutlineRings.Of"/> and places of governing points lie on them or inside; the name of a place is in
+/// <see cref="GoverningPoint.Place"/>; peaks at fillets, which do not decide, in <see cref="FilletPeak"/>; the error left in a numerical field in
+/// <see cref="NumericalError"/>; the worked-out state of a point comes from <c>PointState.Of</c>.</para>
+/// </remarks>
 public abstract class StressField
 {
     private protected StressField(CrossSection section, ShearModel model, double poisson, SectionProperties properties) =>

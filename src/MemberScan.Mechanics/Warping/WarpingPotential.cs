@@ -51,6 +51,25 @@ internal sealed class WarpingPotential
         return (copies * j, copies * area);
     }
 
+    /// <summary>Polar second moment <c>∫(y² + z²) dA</c> of a whole section [m⁴].</summary>
+    public double PolarMoment()
+    {
+        var sum = 0.0;
+        foreach (var patch in Mesh.Patches)
+        {
+            for (var a = 0; a < Rule.QuadratureCount; a++)
+            {
+                for (var b = 0; b < Rule.QuadratureCount; b++)
+                {
+                    var at = patch.Map(Rule.QuadratureAt[a], Rule.QuadratureAt[b]);
+                    sum += Rule.QuadratureWeights[a] * Rule.QuadratureWeights[b] * Math.Abs(at.Determinant) * (at.Y * at.Y + at.Z * at.Z);
+                }
+            }
+        }
+
+        return (Mesh.IsQuarter ? 4 : 1) * sum;
+    }
+
     /// <summary>Moments about the centroid of the shear stresses of the loads 1 to 4, of a whole section [per unit of the load].</summary>
     public double[] FlexureMoments()
     {

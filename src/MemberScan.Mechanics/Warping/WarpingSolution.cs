@@ -18,6 +18,9 @@ internal sealed class WarpingSolution
     // What changes more at the last refinement is no result.
     private const double LargestChange = 0.05;
 
+    // Walls of an open profile about 1:200 and thicker.
+    private const double LeastTorsionShare = 5e-5;
+
     private WarpingSolution(WarpingPotential potential, double j, double torsionError, double stressError)
     {
         (Potential, J, TorsionError, StressError) = (potential, j, torsionError, stressError);
@@ -63,10 +66,13 @@ internal sealed class WarpingSolution
             if (torsionError <= TorsionTolerance && stressError <= StressTolerance) break;
         }
 
-        return last is { } found && found.J > 0 && torsionError <= LargestChange && stressError <= LargestChange
+        return last is { } found && found.J > 0 && KeepsDigits(found.Potential, found.J) && torsionError <= LargestChange && stressError <= LargestChange
             ? new WarpingSolution(found.Potential, found.J, torsionError, stressError)
             : null;
     }
+
+    // J comes as a difference from the polar moment; of thin open walls it is so small a share that the difference keeps too few digits.
+    private static bool KeepsDigits(WarpingPotential potential, double j) => !potential.Mesh.IsGraded || j >= LeastTorsionShare * potential.PolarMoment();
 
     private static int LastDegreeOf(PatchMesh mesh) => mesh.Patches.Count <= ManyPatches ? LastDegree : mesh.IsGraded ? LastDegreeOfManyGraded : LastDegreeOfManyPatches;
 

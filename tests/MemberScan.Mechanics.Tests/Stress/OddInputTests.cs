@@ -70,22 +70,25 @@ public sealed class OddInputTests
         }
     }
 
-    // Legs of 1:1000: Σbt³/3 and the hand calculation, both models within some per cent; all six forces come back.
+    // Legs of 1:100: J as Σbt³/3 by thin-wall theory (any text); all six forces come back. Legs of 1:1000 are refused: too few digits are left of J.
     [Theory]
     [InlineData(OpenShape.L)]
     [InlineData(OpenShape.U)]
     [InlineData(OpenShape.T)]
     [InlineData(OpenShape.I)]
-    public void An_open_profile_of_one_to_a_thousand_is_solved_in_a_bounded_time(OpenShape shape)
+    public void A_thin_open_profile_is_solved_and_one_of_one_to_a_thousand_is_refused(OpenShape shape)
     {
-        var watch = System.Diagnostics.Stopwatch.StartNew();
-        var field = Samples.Field(new OpenProfile(shape, 1, 1, 0.001, 0.001), ShearModel.Elasticity);
+        var field = Samples.Field(new OpenProfile(shape, 1, 1, 0.01, 0.01), ShearModel.Elasticity);
         var p = field.Properties;
 
-        Assert.Equal(1, p.J!.Value / p.JThinWall!.Value, 2e-3);
+        Assert.Equal(1, p.J!.Value / p.JThinWall!.Value, 2e-2);
         Assert.True(field.Closure.LargestError <= 1e-3, $"{field.Closure}");
-        Assert.InRange(field.Govern(new SectionForces(0, 0, 0, 1, 0, 0), StressMeasure.Tau).Value * p.Wt!.Value, 0.99, 1.05);
-        Assert.True(watch.Elapsed < TimeSpan.FromMinutes(1), $"{watch.Elapsed}");
+
+        foreach (var model in Enum.GetValues<ShearModel>())
+        {
+            Assert.False(StressField.TryCreate(new OpenProfile(shape, 1, 1, 0.001, 0.001), model, 0.3, out _, out var whyNot));
+            Assert.EndsWith("are too far apart for a numerical field", whyNot, StringComparison.Ordinal);
+        }
     }
 
     [Fact]

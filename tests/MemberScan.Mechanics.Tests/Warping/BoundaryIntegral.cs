@@ -1,5 +1,5 @@
-using MathNet.Numerics.LinearAlgebra;
 using MathNet.Numerics.LinearAlgebra.Double;
+using MathNet.Numerics.LinearAlgebra.Factorization;
 using MemberScan.Mechanics.Edges;
 
 namespace MemberScan.Mechanics.Tests.Warping;
@@ -17,7 +17,7 @@ internal sealed class BoundaryIntegral
 
     private readonly List<Node> _nodes = [];
     private readonly List<Panel> _panels = [];
-    private Matrix<double>? _inverse;
+    private LU<double>? _factor;
 
     /// <summary>Adds a straight edge in panels of about the given length.</summary>
     public void Line(double y0, double z0, double y1, double z1, double panel) =>
@@ -77,13 +77,13 @@ internal sealed class BoundaryIntegral
 
     private double[] Density(Func<double, double, (double Y, double Z)> particular, Func<double, double, (double Y, double Z)> extra)
     {
-        _inverse ??= Operator().Inverse();
+        _factor ??= Operator().LU();
         var right = DenseVector.OfEnumerable(_nodes.Select(node =>
         {
             var ((py, pz), (ey, ez)) = (particular(node.Y, node.Z), extra(node.Y, node.Z));
             return -((py + ey) * node.NY + (pz + ez) * node.NZ);
         }));
-        return [.. _inverse * right];
+        return [.. _factor.Solve(right)];
     }
 
     private DenseMatrix Operator()

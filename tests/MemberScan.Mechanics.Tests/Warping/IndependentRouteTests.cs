@@ -30,8 +30,11 @@ public sealed class IndependentRouteTests
 
     public static TheoryData<string> Names => [.. s_sections.Keys];
 
+    // Of open walls the route finds small stresses as differences of large ones and lacks the digits; their bounds stand below.
+    public static TheoryData<string> CompactNames => [.. s_sections.Where(pair => pair.Value is not OpenProfile).Select(pair => pair.Key)];
+
     [Theory]
-    [MemberData(nameof(Names))]
+    [MemberData(nameof(CompactNames))]
     public void The_torsion_constant_and_the_stresses_agree_with_a_boundary_integral(string name)
     {
         var section = s_sections[name];
@@ -39,8 +42,7 @@ public sealed class IndependentRouteTests
         var p = field.Properties;
         var (route, shape) = RouteOf(section);
 
-        // The route has J as a difference from Iy + Iz; where that is far larger, digits are lost and the bounds below decide alone.
-        if (p.J!.Value > 0.3 * (p.Iy + p.Iz)) Assert.InRange(p.J!.Value / route.J(p.Iy + p.Iz), 1 - 5e-4, 1 + 5e-4);
+        Assert.InRange(p.J!.Value / route.J(p.Iy + p.Iz), 1 - 5e-4, 1 + 5e-4);
 
         // dσ/dx = y needs Vy = Iz, Vz = Iyz; dσ/dx = z needs Vy = Iyz, Vz = Iy.
         (SectionForces Forces, Func<double, double, (double XY, double XZ)> Stress)[] cases =
@@ -87,7 +89,7 @@ public sealed class IndependentRouteTests
 
     private static (BoundaryIntegral Route, OutlineShape Shape) RouteOf(CrossSection section)
     {
-        const int AtCorners = 8, AtJoints = 2;
+        const int AtCorners = 6, AtJoints = 2;
 
         var edges = OutlineRings.EdgesOf(section);
         var shape = new OutlineShape(edges);
