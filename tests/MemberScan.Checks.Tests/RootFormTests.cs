@@ -22,7 +22,7 @@ public sealed class RootFormTests
     public void A_jump_counts_where_it_passes_1() => Assert.Equal(1 / 1.5, RootForm.Of(s => s <= 1.5 ? 0.1 * s : double.PositiveInfinity), 12);
 
     [Fact]
-    public void Nothing_gives_0_and_no_resistance_gives_the_largest() 
+    public void Nothing_gives_0_and_no_resistance_gives_the_largest()
     {
         Assert.Equal(0, RootForm.Of(_ => 0));
         Assert.Equal(1e12, RootForm.Of(_ => double.PositiveInfinity));

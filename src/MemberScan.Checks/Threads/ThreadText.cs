@@ -25,27 +25,41 @@ public static partial class ThreadText
     /// <param name="text">Text; may be empty.</param>
     /// <param name="source">Where the text comes from, in words.</param>
     /// <returns>The thread, or <see cref="ReasonCode.ThreadUnknown"/> with what was met.</returns>
-    public static Finding<ThreadDesignation> Find(string text, string source)
+    public static Finding<ThreadDesignation> Find(string text, string source) =>
+        Named(text, source) ?? Unknown($"the {source} names no thread; {Remedy}");
+
+    /// <summary>The thread of the first text that names one, such as property, name, type, settings in this order.</summary>
+    /// <param name="texts">Texts with where they come from, the first to be believed first.</param>
+    /// <returns>The thread; unknown when none names one, or when the first that does names two or an impossible one.</returns>
+    public static Finding<ThreadDesignation> FindFirst(IEnumerable<(string Text, string Source)> texts)
+    {
+        ArgumentNullException.ThrowIfNull(texts);
+        var sources = new List<string>();
+        foreach (var (text, source) in texts)
+        {
+            if (Named(text, source) is { } named) return named;
+            sources.Add(source);
+        }
+
+        return Unknown($"no thread is named in {(sources.Count == 0 ? "any source" : string.Join(", ", sources))}; {Remedy}");
+    }
+
+    // Null when the text names no thread at all.
+    private static Finding<ThreadDesignation>? Named(string text, string source)
     {
         ArgumentNullException.ThrowIfNull(text);
         if (text.Length > LongestText) return Unknown($"the {source} is longer than {LongestText} characters; {Remedy}");
 
         var found = new List<ThreadDesignation>();
-        foreach (Match match in Metric().Matches(text))
+        foreach (var (match, thread) in Metric().Matches(text).Select(m => (m, MetricOf(m))).Concat(Unified().Matches(text).Select(m => (m, UnifiedOf(m)))))
         {
-            if (MetricOf(match) is not { } thread) return Unknown($"'{match.Value.Trim()}' in the {source} is no thread of the coarse series and no possible pitch; {Remedy}");
-            if (!found.Contains(thread)) found.Add(thread);
-        }
-
-        foreach (Match match in Unified().Matches(text))
-        {
-            if (UnifiedOf(match) is not { } thread) return Unknown($"'{match.Value.Trim()}' in the {source} is no thread of the coarse series and no possible pitch; {Remedy}");
+            if (thread is null) return Unknown($"'{match.Value.Trim()}' in the {source} is no thread of the coarse series and no possible pitch; {Remedy}");
             if (!found.Contains(thread)) found.Add(thread);
         }
 
         return found.Count switch
         {
-            0 => Unknown($"the {source} names no thread; {Remedy}"),
+            0 => null,
             1 => new Finding<ThreadDesignation>.Found(found[0], source),
             _ => Unknown($"the {source} names more than one thread ({string.Join(", ", found)}); {Remedy}"),
         };

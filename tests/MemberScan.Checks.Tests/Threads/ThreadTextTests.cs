@@ -62,6 +62,18 @@ public sealed class ThreadTextTests
     }
 
     [Fact]
+    public void The_first_source_that_names_a_thread_decides()
+    {
+        var found = Assert.IsType<Finding<ThreadDesignation>.Found>(ThreadText.FindFirst([("", "property"), ("HR-07", "name"), ("M10", "type"), ("M12", "settings")]));
+
+        Assert.Equal(("M10x1.5", "type"), (found.Value.ToString(), found.Source));
+        Assert.IsType<Finding<ThreadDesignation>.Missing>(ThreadText.FindFirst([("M10 or M12", "name"), ("M12", "settings")]));
+
+        var none = Assert.IsType<Finding<ThreadDesignation>.Missing>(ThreadText.FindFirst([("HR-07", "name"), ("rod", "type")]));
+        Assert.StartsWith("no thread is named in name, type", none.Why.Message, StringComparison.Ordinal);
+    }
+
+    [Fact]
     public void A_text_beyond_the_limit_is_not_searched()
     {
         Assert.IsType<Finding<ThreadDesignation>.Missing>(ThreadText.Find("M12 " + new string('x', ThreadText.LongestText), "name"));
