@@ -1,6 +1,7 @@
 using MemberScan.Checks.Walls;
 using MemberScan.Foundation.Units;
 using MemberScan.Mechanics.Forces;
+using MemberScan.Mechanics.Properties;
 using MemberScan.Mechanics.Sections;
 using MemberScan.Model.Verdicts;
 
