@@ -200,7 +200,7 @@ internal static class PlainScanner
 
         id = (uint)number;
         word = start + 2 + digits;
-        if (Unsafe.Add(ref bytes, word) <= ' ') word++;
+        if ((uint)(Unsafe.Add(ref bytes, word) - 'A') > '_' - 'A') word++;
         return number <= uint.MaxValue && digits <= 10;
     }
 
