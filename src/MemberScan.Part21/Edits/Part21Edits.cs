@@ -1,9 +1,15 @@
 using System.Buffers;
+using System.Buffers.Text;
 using System.Globalization;
+using System.Runtime.InteropServices;
 using System.Text;
 using MemberScan.Part21.Findings;
 using MemberScan.Part21.Index;
+using MemberScan.Part21.Plain;
 using MemberScan.Part21.Reading;
+using MemberScan.Part21.Sources;
+using MemberScan.Part21.Streaming;
+using Microsoft.Win32.SafeHandles;
 
 namespace MemberScan.Part21.Edits;
 
@@ -12,6 +18,7 @@ namespace MemberScan.Part21.Edits;
 public sealed class Part21Edits
 {
     private const int CopyLength = 1024 * 1024;
+    private static readonly WantedKeywords s_nothing = new([]);
 
     private readonly Part21Index _index;
     private readonly Part21Lookup _lookup;
@@ -20,6 +27,7 @@ public sealed class Part21Edits
     private readonly byte[] _lineEnd;
     private readonly FindingLog _log = new();
     private readonly InstanceReader _reader;
+    private readonly ChunkResult _plainOnes = new() { From = 0 };
     private byte[] _draft = new byte[1024];
     private uint _lastId;
     private bool _hasLastId;
@@ -46,6 +54,13 @@ public sealed class Part21Edits
     public uint Append(string record)
     {
         ArgumentNullException.ThrowIfNull(record);
+        return Append(Bytes(record));
+    }
+
+    /// <summary>As <see cref="Append(string)"/>, from bytes; nothing is allocated for an instance.</summary>
+    /// <param name="record">Keyword and arguments, ASCII only.</param>
+    public uint Append(ReadOnlySpan<byte> record)
+    {
         if (_index.InsertionOffset < 0) throw new InvalidOperationException($"{_index.Name} has no ENDSEC of a data section, so there is no place to append at.");
 
         if (!_hasLastId) (_lastId, _hasLastId) = (_index.HighestId, true);
@@ -59,12 +74,12 @@ public sealed class Part21Edits
 
     /// <summary>Replaces an instance, keeping its number; the first one when a number is used twice.</summary>
     /// <param name="id">Its number.</param>
-    /// <param name="record">As for <see cref="Append"/>.</param>
+    /// <param name="record">As for <see cref="Append(string)"/>.</param>
     /// <exception cref="ArgumentException">That is no sound record, or there is no such instance.</exception>
     public void Replace(uint id, string record)
     {
         ArgumentNullException.ThrowIfNull(record);
-        Change(id, Spell(id, record).ToArray());
+        Change(id, Spell(id, Bytes(record)).ToArray());
     }
 
     /// <summary>Removes an instance, from '#' to ';'; the first one when a number is used twice.</summary>
@@ -76,36 +91,71 @@ public sealed class Part21Edits
     {
         ArgumentNullException.ThrowIfNull(output);
         var buffer = ArrayPool<byte>.Shared.Rent(CopyLength);
+        WriteTo(output.Write, Copy);
+        ArrayPool<byte>.Shared.Return(buffer);
+
+        void Copy(long from, long until)
+        {
+            while (from < until) output.Write(Read(buffer, ref from, until));
+        }
+    }
+
+    // Untouched stretches and changes in file order.
+    private void WriteTo(Action<byte[], int, int> write, Action<long, long> copy)
+    {
         var at = 0L;
         var isAppended = _appended.WrittenCount == 0;
         foreach (var (offset, change) in _changes)
         {
             if (!isAppended && offset > _index.InsertionOffset) Insert();
-            Copy(offset);
-            output.Write(change.Text);
+            copy(at, offset);
+            write(change.Text, 0, change.Text.Length);
             at = offset + change.Length;
         }
 
         if (!isAppended) Insert();
-        Copy(_index.Length);
-        ArrayPool<byte>.Shared.Return(buffer);
+        copy(at, _index.Length);
 
         void Insert()
         {
-            Copy(_index.InsertionOffset);
-            output.Write(_appended.WrittenSpan);
+            copy(at, _index.InsertionOffset);
+            at = _index.InsertionOffset;
+            _ = MemoryMarshal.TryGetArray(_appended.WrittenMemory, out var appended);
+            write(appended.Array!, appended.Offset, appended.Count);
             isAppended = true;
         }
+    }
 
-        void Copy(long until)
+    private ReadOnlySpan<byte> Read(byte[] buffer, ref long from, long until)
+    {
+        var count = _index.Read(from, buffer.AsSpan(0, (int)Math.Min(CopyLength, until - from)));
+        if (count == 0) throw new IOException($"{_index.Name} became shorter while it was read.");
+
+        from += count;
+        return buffer.AsSpan(0, count);
+    }
+
+    private void WriteTo(SafeFileHandle output)
+    {
+        var position = 0L;
+        var buffer = ArrayPool<byte>.Shared.Rent(CopyLength);
+        WriteTo(Write, Copy);
+        ArrayPool<byte>.Shared.Return(buffer);
+
+        void Write(byte[] text, int offset, int count)
         {
-            while (at < until)
-            {
-                var count = _index.Read(at, buffer.AsSpan(0, (int)Math.Min(CopyLength, until - at)));
-                if (count == 0) throw new IOException($"{_index.Name} became shorter while it was read.");
+            RandomAccess.Write(output, text.AsSpan(offset, count), position);
+            position += count;
+        }
 
-                output.Write(buffer, 0, count);
-                at += count;
+        void Copy(long from, long until)
+        {
+            if (_index.Source is FileSource file) KernelCopy.Copy(file.File, ref from, until, output, ref position);
+            while (from < until)
+            {
+                var text = Read(buffer, ref from, until);
+                RandomAccess.Write(output, text, position);
+                position += text.Length;
             }
         }
     }
@@ -121,10 +171,10 @@ public sealed class Part21Edits
         var temporary = Path.Combine(Path.GetDirectoryName(whole)!, $".{Path.GetFileName(whole)}.{Path.GetRandomFileName()}");
         try
         {
-            using (var output = new FileStream(temporary, FileMode.CreateNew, FileAccess.Write, FileShare.None, bufferSize: 0))
+            using (var output = File.OpenHandle(temporary, FileMode.CreateNew, FileAccess.Write, FileShare.None))
             {
                 WriteTo(output);
-                output.Flush(toDisk);
+                if (toDisk) RandomAccess.FlushToDisk(output);
             }
 
             File.Move(temporary, whole, overwrite: true);
@@ -144,19 +194,37 @@ public sealed class Part21Edits
         _changes[instance.Offset] = (instance.Text.Length, text);
     }
 
-    // #id=RECORD; read back by the reader of models: one sound instance, and nothing else.
-    private ReadOnlySpan<byte> Spell(uint id, string record)
-    {
-        var length = record.Length + 16;
-        if (_draft.Length < length) _draft = new byte[2 * length];
-        if (!Ascii.IsValid(record)) throw NotSound(record);
+    private static byte[] Bytes(string record) => Ascii.IsValid(record) ? Encoding.ASCII.GetBytes(record) : throw NotSound(record);
 
-        _ = System.Text.Unicode.Utf8.TryWrite(_draft, CultureInfo.InvariantCulture, $"#{id}={record};", out var written);
-        var text = _draft.AsSpan(0, written);
+    // #id=RECORD; as the reader of models would take it: one sound instance, and nothing else.
+    private ReadOnlySpan<byte> Spell(uint id, ReadOnlySpan<byte> record)
+    {
+        const int Around = 16;
+        if (_draft.Length < record.Length + Around + PlainScanner.Slack) _draft = new byte[2 * (record.Length + Around) + PlainScanner.Slack];
+        if (!Ascii.IsValid(record)) throw NotSound(Encoding.ASCII.GetString(record));
+
+        _draft[0] = (byte)'#';
+        _ = Utf8Formatter.TryFormat(id, _draft.AsSpan(1), out var digits);
+        _draft[digits + 1] = (byte)'=';
+        record.CopyTo(_draft.AsSpan(digits + 2));
+        var length = digits + 2 + record.Length;
+        _draft[length++] = (byte)';';
+        var text = _draft.AsSpan(0, length);
+        return IsPlain(text) || IsSound(text) ? text : throw NotSound(Encoding.ASCII.GetString(record));
+    }
+
+    private bool IsPlain(ReadOnlySpan<byte> text)
+    {
+        var sink = new PassSink(_plainOnes, s_nothing);
+        var at = 0;
+        return PlainScanner.Scan(text, ref at, text.Length, 0, ref sink) == PlainStop.More && at == text.Length && sink.Count == 1;
+    }
+
+    private bool IsSound(ReadOnlySpan<byte> text)
+    {
         _log.TakeBack(0);
         var end = _reader.Read(text, 0);
-        var isSound = _reader.TryTakeRow(out var row, out _) && end == written && row.Flags == InstanceFlags.None && _log.Gathered.Count == 0;
-        return isSound ? text : throw NotSound(record);
+        return _reader.TryTakeRow(out var row, out _) && end == text.Length && row.Flags == InstanceFlags.None && _log.Gathered.Count == 0;
     }
 
     private static ArgumentException NotSound(string record) =>

@@ -200,16 +200,18 @@ internal static class PlainScanner
 
         id = (uint)number;
         word = start + 2 + digits;
-        if (Unsafe.Add(ref bytes, word) <= ' ') word++;
+        if ((uint)(Unsafe.Add(ref bytes, word) - 'A') > '_' - 'A') word++;
         return number <= uint.MaxValue && digits <= 10;
     }
 
     [MethodImpl(MethodImplOptions.NoInlining)]
     private static ReadOnlySpan<byte> Keyword(ReadOnlySpan<byte> text) => text[..text.IndexOf((byte)'(')];
 
-    // The number that up to eight digits spell, by three multiplications; and how many there are.
+    /// <summary>The number that up to eight digits spell, by three multiplications; any number for none.</summary>
+    /// <param name="first">The first digit; eight bytes from it on are readable.</param>
+    /// <param name="count">How many digits there are, up to eight.</param>
     [MethodImpl(MethodImplOptions.AggressiveInlining)]
-    private static ulong EightDigits(ref byte first, out int count)
+    public static ulong EightDigits(ref byte first, out int count)
     {
         var bytes = BinaryPrimitives.ReadUInt64LittleEndian(MemoryMarshal.CreateReadOnlySpan(ref first, 8)) ^ 0x3030_3030_3030_3030;
         var others = (((bytes & 0x7F7F_7F7F_7F7F_7F7F) + 0x7676_7676_7676_7676) | bytes) & 0x8080_8080_8080_8080;

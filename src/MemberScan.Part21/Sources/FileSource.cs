@@ -5,6 +5,9 @@ namespace MemberScan.Part21.Sources;
 /// <summary>The bytes of a file; its length is that at the beginning.</summary>
 internal sealed class FileSource(SafeFileHandle file) : ByteSource
 {
+    /// <summary>The open file.</summary>
+    public SafeFileHandle File { get; } = file;
+
     /// <inheritdoc />
     public override long Length { get; } = RandomAccess.GetLength(file);
 
@@ -15,7 +18,7 @@ internal sealed class FileSource(SafeFileHandle file) : ByteSource
         var done = 0;
         while (done < buffer.Length)
         {
-            var count = RandomAccess.Read(file, buffer[done..], offset + done);
+            var count = RandomAccess.Read(File, buffer[done..], offset + done);
             if (count == 0) throw new IOException("The file became shorter while it was read.");
             done += count;
         }

@@ -1,4 +1,9 @@
 using System.Buffers;
+using System.Numerics;
+using System.Runtime.CompilerServices;
+using System.Runtime.InteropServices;
+using System.Runtime.Intrinsics;
+using MemberScan.Part21.Plain;
 
 namespace MemberScan.Part21.Sources;
 
@@ -10,6 +15,9 @@ internal static class HighestNumber
     // A number of more digits than this is beyond what an index holds.
     private const int Overlap = 16;
 
+    // Readable behind a piece [byte].
+    private const int Slack = 128;
+
     public static uint In(ByteSource source, int threads)
     {
         var highest = 0L;
@@ -17,11 +25,12 @@ internal static class HighestNumber
         var next = -1L;
         Parallel.For(0, Math.Max(1, threads), new ParallelOptions { MaxDegreeOfParallelism = Math.Max(1, threads) }, _ =>
         {
-            var piece = ArrayPool<byte>.Shared.Rent(PieceLength + Overlap);
+            var piece = ArrayPool<byte>.Shared.Rent(PieceLength + Overlap + Slack);
             var most = 0u;
             for (var number = Interlocked.Increment(ref next); number < pieces; number = Interlocked.Increment(ref next))
             {
                 var length = source.Read(number * PieceLength, piece.AsSpan(0, PieceLength + Overlap));
+                piece.AsSpan(length, Slack).Clear();
                 most = Math.Max(most, In(piece.AsSpan(0, length), most));
             }
 
@@ -32,18 +41,24 @@ internal static class HighestNumber
         return (uint)highest;
     }
 
+    // Behind the text stand bytes enough to look at 64 at a time and at the digits behind a '#' in the last of them.
     private static uint In(ReadOnlySpan<byte> text, uint most)
     {
-        var at = 0;
-        while (true)
+        ref var bytes = ref MemoryMarshal.GetReference(text);
+        for (var word = 0; word < text.Length; word += 64)
         {
-            var hop = text[at..].IndexOf((byte)'#');
-            if (hop < 0) return most;
+            var loaded = Vector512.LoadUnsafe(ref Unsafe.Add(ref bytes, word));
+            for (var rest = Vector512.Equals(loaded, Vector512.Create((byte)'#')).ExtractMostSignificantBits(); rest != 0; rest &= rest - 1)
+            {
+                var at = word + BitOperations.TrailingZeroCount(rest) + 1;
+                var number = PlainScanner.EightDigits(ref Unsafe.Add(ref bytes, at), out var digits);
+                if (digits == 0 || (digits < 8 && number <= most) || at + digits > text.Length) continue;
 
-            at += hop + 1;
-            var number = 0UL;
-            while (at < text.Length && char.IsAsciiDigit((char)text[at]) && number <= uint.MaxValue) number = number * 10 + text[at++] - '0';
-            if (number <= uint.MaxValue && number > most) most = (uint)number;
+                for (at += digits; digits >= 8 && at < text.Length && char.IsAsciiDigit((char)text[at]) && number <= uint.MaxValue; at++) number = number * 10 + text[at] - '0';
+                if (number <= uint.MaxValue && number > most) most = (uint)number;
+            }
         }
+
+        return most;
     }
 }
