@@ -7,6 +7,7 @@ internal sealed class Relations
 {
     private readonly Instances _instances;
     private readonly HashSet<ulong> _voided = [];
+    private readonly Dictionary<ulong, string> _layerOf = [];
     private readonly Dictionary<ulong, ulong> _typeOf = [];
     private readonly Dictionary<ulong, List<ulong>> _materialOf = [];
     private readonly Dictionary<ulong, ulong> _containerOf = [];
@@ -37,8 +38,16 @@ internal sealed class Relations
         Each("IFCRELCONNECTSSTRUCTURALELEMENT", r => Pair(r[4], r[5], Link));
         Each("IFCRELASSIGNSTOPRODUCT", r => Spread(r[4], r[6], (related, product) => LinkEitherWay(product, related)));
         Each("IFCRELASSOCIATESPROFILEPROPERTIES", AddProfileProperties);
+        Each("IFCPRESENTATIONLAYERASSIGNMENT", AddLayer);
+        Each("IFCPRESENTATIONLAYERWITHSTYLE", AddLayer);
         Each("IFCRELVOIDSELEMENT", r => Pair(r[4], r[5], (element, _) => _voided.Add(element)));
     }
+
+    /// <summary>Whether anything is assigned to a layer.</summary>
+    public bool HasLayers => _layerOf.Count > 0;
+
+    /// <summary>Name of the layer of a representation or item; empty if none.</summary>
+    public string LayerOf(ulong id) => _layerOf.GetValueOrDefault(id) ?? "";
 
     /// <summary>Whether openings are cut out of an element.</summary>
     public bool HasOpenings(ulong id) => _voided.Contains(id);
@@ -84,6 +93,12 @@ internal sealed class Relations
         }
 
         return 0;
+    }
+
+    private void AddLayer(Part21Record layer)
+    {
+        var name = Instances.Text(layer[0]);
+        foreach (var item in Instances.IdsOf(layer[2])) _layerOf.TryAdd(item, name);
     }
 
     private void AddPart(ulong part, ulong whole)

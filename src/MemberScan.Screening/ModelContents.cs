@@ -1,4 +1,5 @@
 using System.Collections.Immutable;
+using System.Globalization;
 using MemberScan.Foundation.Diagnostics;
 using MemberScan.Ifc;
 using MemberScan.Ifc.Members;
@@ -7,6 +8,7 @@ using MemberScan.Inputs.ForcesTables;
 using MemberScan.Model.Forces;
 using MemberScan.Model.Members;
 using MemberScan.Model.Rules;
+using MemberScan.Model.Verdicts;
 using MemberScan.Part21;
 using MemberScan.Screening.Record;
 
@@ -56,11 +58,24 @@ internal sealed class ModelContents
         var catalog = model?.ReadMembers(element => named.Contains(element.GlobalId) || named.Contains(element.Tag)) ?? new MemberCatalog([], []);
 
         progress?.Report(new("forces", 0));
-        var fromModel = model?.ReadForces(catalog.Members) ?? [];
+        var fromModel = Usable(model?.ReadForces(catalog.Members) ?? [], catalog.Members);
         var (fromTables, files) = ReadTables(request, catalog, diagnostics);
         return diagnostics.Items.Any(d => d is { Severity: Severity.Error, Code: "SCR-0001" or "SCR-0002" or "SCR-0003" or "SCR-0004" or "SCR-0007" })
             ? null
             : new ModelContents(model, file, stripped.Base, catalog, fromModel, fromTables, files);
+    }
+
+    /// <summary>Results of the model are not used where they are tied to a line beside the section's centroid: about which they are is not said.</summary>
+    private static ImmutableArray<MemberForces> Usable(ImmutableArray<MemberForces> forces, ImmutableArray<Member> members)
+    {
+        var eccentric = members.Where(m => m.CentroidOffset != (0, 0)).ToDictionary(m => m.Key, m => m.CentroidOffset, StringComparer.Ordinal);
+        if (eccentric.Count == 0) return forces;
+
+        return [.. forces.Select(f => !eccentric.TryGetValue(f.MemberKey, out var at) || f.Unusable is not null ? f : f with
+        {
+            Stations = [],
+            Unusable = new Reason(ReasonCode.ConventionUnknown, string.Create(CultureInfo.InvariantCulture, $"the section's centroid lies at y {at.Y * 1e3:0.##} mm, z {at.Z * 1e3:0.##} mm from the line of the analytical member; whether its forces are about the one or the other is not said")),
+        })];
     }
 
     /// <summary>The forces that are used for a candidate: those of tables before those of the model.</summary>

@@ -1,4 +1,5 @@
 using MemberScan.Mechanics.Forces;
+using MemberScan.Mechanics.Profiles;
 using MemberScan.Mechanics.Properties;
 using MemberScan.Mechanics.Sections;
 
@@ -21,6 +22,9 @@ public static class NumberRange
     {
         ArgumentNullException.ThrowIfNull(section);
         if (Math.Min(section.ExtentY, section.ExtentZ) < LeastExtent || Math.Max(section.ExtentY, section.ExtentZ) > LargestExtent) return false;
+
+        // The outline of such a section was found sound when it was made; its properties would need a numerical field.
+        if (section is OutlineSection or OpenProfile) return true;
 
         var p = SectionProperties.Of(section);
         return double.IsNormal(p.Area) && double.IsNormal(p.Iy) && double.IsNormal(p.Iz);

@@ -1,6 +1,7 @@
 using System.Collections.Immutable;
 using System.Globalization;
 using MemberScan.Foundation.Diagnostics;
+using MemberScan.Mechanics.Profiles;
 using MemberScan.Mechanics.Sections;
 using MemberScan.Mechanics.Stress;
 using MemberScan.Model;
@@ -94,11 +95,22 @@ public static class Screener
 
     private static SectionFacts Facts(CrossSection shape, int members, double poisson, SectionLibrary library)
     {
-        var p = library.Properties(shape);
+        var p = library.Properties(shape, poisson);
         return new SectionFacts(
             shape.Designation, members, p.Area, p.Iy, p.Iz, p.WelY, p.WelZ, p.J, p.JSource, p.Wt,
-            Closure(library.Field(shape, ShearModel.Elementary, poisson)), Closure(library.Field(shape, ShearModel.Elasticity, poisson)));
+            Closure(library.Field(shape, ShearModel.Elementary, poisson)), Closure(library.Field(shape, ShearModel.Elasticity, poisson)))
+        {
+            Iyz = p.Iyz,
+            ShearCentreY = p.ShearCentreY,
+            ShearCentreZ = p.ShearCentreZ,
+            Rings = Rings(shape),
+        };
     }
+
+    /// <summary>The rings of sections that their designation does not tell, for drawings.</summary>
+    private static ImmutableArray<ImmutableArray<RingPoint>> Rings(CrossSection shape) => shape is OutlineSection or OpenProfile
+        ? [.. OutlineRings.Of(shape).Select(ring => ring.Select(p => new RingPoint(p.Y, p.Z)).ToImmutableArray())]
+        : [];
 
     private static string Closure((StressField? Field, string WhyNot) entry)
     {

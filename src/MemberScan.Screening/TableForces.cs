@@ -94,6 +94,7 @@ internal sealed class TableForces
             MemberKey = member.Key,
             Situation = SituationOf(rows[0], table),
             Stations = [],
+            Torsion = table.Torsion,
             Source = source,
         };
         if (!member.Length.TryGet(out var length, out var noLength))

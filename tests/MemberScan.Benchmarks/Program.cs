@@ -1,9 +1,10 @@
 using System.Globalization;
 using BenchmarkDotNet.Running;
+using MemberScan.Benchmarks.Meshes;
 using MemberScan.Benchmarks.Models;
 using MemberScan.Benchmarks.Question;
 
-// generate NAME FILE | question FILE [THREADS] | checked FILE | pass FILE THREADS | scan FILE | append FILE TARGET [disk]; anything else goes to
+// generate NAME FILE | question FILE [THREADS] | checked FILE | pass FILE THREADS | scan FILE | append FILE TARGET [disk] | meshes; anything else goes to
 // BenchmarkDotNet. compare.sh measures them beside other programs.
 return args switch
 {
@@ -14,6 +15,7 @@ return args switch
     ["append", var path, var target] => AppendedSets.Write(path, target, toDisk: false),
     ["append", var path, var target, "disk"] => AppendedSets.Write(path, target, toDisk: true),
     ["scan", var path] => MaskScan.Run(path),
+    ["meshes"] => MeshRecognition.Run(),
     ["checked", var path] => Print(CheckedQuestion.Ask(path)),
     _ => Benchmark(args),
 };

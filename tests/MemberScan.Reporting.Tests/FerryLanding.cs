@@ -20,10 +20,13 @@ internal static class FerryLanding
 
     public const string RailKey = "2O2Fr$t4X7Zf8NOew3FL01";
 
+    private static MemberResult Item(MemberResult member, string globalId, int number, int count) =>
+        member with { Identity = member.Identity with { GlobalId = globalId, ItemNumber = number, ItemCount = count } };
+
     /// <summary>Two overstressed, three within their limit, four not checked for three reasons.</summary>
     public static ScreeningRecord Small() => Record(
         Rail(RailKey, "Gangway rail north, bay 3", bending: 1.32e3),
-        Rail("2O2Fr$t4X7Zf8NOew3FL02/2", "Geländerpfosten „Süd“ 5' 4\"", bending: 1.05e3) with { GlobalId = "2O2Fr$t4X7Zf8NOew3FL02", ItemNumber = 2, ItemCount = 3 },
+        Item(Rail("2O2Fr$t4X7Zf8NOew3FL02/2", "Geländerpfosten „Süd“ 5' 4\"", bending: 1.05e3), "2O2Fr$t4X7Zf8NOew3FL02", 2, 3),
         Rail("2O2Fr$t4X7Zf8NOew3FL03", "Gangway rail south, bay 1", bending: 0.41e3),
         Hanger("2O2Fr$t4X7Zf8NOew3FL04", "渡船缆绳吊杆 04", tension: 48.2e3),
         Hanger("2O2Fr$t4X7Zf8NOew3FL05", "Hanger rod 05", tension: 31.7e3),
@@ -118,16 +121,24 @@ internal static class FerryLanding
         };
         return new MemberResult
         {
-            Key = key,
-            GlobalId = key,
-            ItemNumber = 0,
-            ItemCount = 1,
-            StepId = 1204,
-            Tag = "GR-N-03",
-            Name = name,
-            Class = "IfcMember",
-            Role = "rail",
-            Storey = "Brücke ±0",
+            Identity = new MemberIdentity
+            {
+                Key = key,
+                GlobalId = key,
+                ItemNumber = 0,
+                ItemCount = 1,
+                StepId = 1204,
+                Tag = "GR-N-03",
+                Name = name,
+                Class = "IfcMember",
+                PredefinedType = "MEMBER",
+                TypeName = "Rail 48.3x3.2",
+                Role = "rail",
+                Storey = "Brücke ±0",
+                StoreyPath = "Landing / Brücke ±0",
+                Assembly = "Gangway",
+                Layer = "S-RAIL",
+            },
             Section = "tube 48.3x3.2 mm",
             SectionSource = "profile IfcCircleHollowProfileDef (#77)",
             Material = "S355J2H",

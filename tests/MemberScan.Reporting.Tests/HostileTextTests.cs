@@ -16,8 +16,9 @@ public sealed class HostileTextTests
     [InlineData("רמפה של מעבורת")]
     public void Shows_a_name_as_the_text_it_is(string hostile)
     {
+        var rail = FerryLanding.Rail("Rail", hostile, 1.32e3);
         var record = FerryLanding.Record(
-            FerryLanding.Rail("Rail", hostile, 1.32e3) with { Tag = hostile, Material = hostile, Storey = hostile, Notes = [hostile] },
+            rail with { Identity = rail.Identity with { Tag = hostile, Storey = hostile }, Material = hostile, Notes = [hostile] },
             FerryLanding.Open("Strut", hostile, ReasonCode.NoForces, hostile));
         record = record with { Model = record.Model with { FileName = hostile, ProjectName = hostile, Schema = hostile } };
 

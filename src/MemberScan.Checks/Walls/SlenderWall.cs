@@ -1,11 +1,12 @@
 using MemberScan.Mechanics.Forces;
+using MemberScan.Mechanics.Profiles;
 using MemberScan.Mechanics.Properties;
 using MemberScan.Mechanics.Sections;
 using MemberScan.Model.Verdicts;
 
 namespace MemberScan.Checks.Walls;
 
-/// <summary>Whether compressed walls of hollow steel sections are within class 3: EN 1993-1-1:2005, Table 5.2, from memory.</summary>
+/// <summary>Whether compressed walls of hollow and open steel sections are within class 3: EN 1993-1-1:2005, Table 5.2, from memory.</summary>
 /// <remarks>
 /// The utilization is a slenderness over its limit; it does not grow with the load. It must not be ranked among stress utilizations.
 /// </remarks>
@@ -58,6 +59,8 @@ public static class SlenderWall
             Round or Rectangle or RoundedRectangle => null,
             Tube tube => OfTube(tube, properties, forces, fy),
             Box box => OfBox(box, properties, forces, fy),
+            OpenProfile profile => OpenProfileWalls.Check(profile, properties, forces, fy),
+            OutlineSection outline => OutlineWalls.Check(outline, properties, forces, fy),
             _ => NotChecked($"There is no slenderness rule for a section of the kind {section.Kind}."),
         };
     }
@@ -155,16 +158,16 @@ public static class SlenderWall
     // A stress that is zero but for rounding is no compression: it is measured by the terms it is the difference of.
     internal static bool IsCompressed(double stress, double scale) => stress < -Tolerance * scale;
 
-    private static TraceLine[] EpsilonLines(double fy, double epsilon) =>
+    internal static TraceLine[] EpsilonLines(double fy, double epsilon) =>
     [
         new("fy", "", fy, "Pa", "material of the member"),
         new("ε", $"√(235/fy) = √(235/{Shown.MPa(fy)}) = {Shown.Number(epsilon)}", epsilon, "-", Clause.ToString()),
     ];
 
-    private static TraceLine Last(string symbol, double slenderness, double limit) =>
+    internal static TraceLine Last(string symbol, double slenderness, double limit) =>
         new("utilization", $"{symbol} = {Shown.Number(slenderness)}/{Shown.Number(limit)} = {Shown.Number(slenderness / limit)}",
             slenderness / limit, "-", Clause.ToString());
 
-    private static CheckResult.NotEvaluated NotChecked(string sentence) =>
+    internal static CheckResult.NotEvaluated NotChecked(string sentence) =>
         new(Clause, new Reason(ReasonCode.SlenderWall, sentence));
 }

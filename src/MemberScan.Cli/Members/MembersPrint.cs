@@ -29,7 +29,7 @@ internal static class MembersPrint
     {
         string[] parts =
         [
-            m.IsReady ? "ready" : "missing", m.Key, $"'{Clean(m.Name)}'", m.Class, $"{m.RoleGuess}?", Section(m), Material(m), Length(m), Forces(m),
+            m.IsReady ? "ready" : "missing", m.Key, $"'{Clean(m.Name)}'", Class(m), $"{m.RoleGuess}?", Place(m), Section(m), Material(m), Length(m), Forces(m),
             .. m.IsReady ? [] : new[] { string.Join(", ", m.Missing.Select(r => r.Code.Text())) },
         ];
         return string.Join(" | ", parts);
@@ -39,12 +39,21 @@ internal static class MembersPrint
     {
         var console = AnsiConsole.Create(new AnsiConsoleSettings { Out = new AnsiConsoleOutput(output) });
         var table = new Table().Border(TableBorder.Simple);
-        foreach (var heading in new[] { "member", "class, role (guess)", "section", "material", "length", "forces", "missing" }) table.AddColumn(heading.EscapeMarkup());
+        foreach (var heading in new[] { "member", "class, role (guess)", "place", "section", "material", "length", "forces", "missing" }) table.AddColumn(heading.EscapeMarkup());
         foreach (var m in record.Members)
             table.AddRow(
-                Clean(m.Name.Length > 0 ? $"{m.Name} {m.Key}" : m.Key).EscapeMarkup(), $"{m.Class}, {m.RoleGuess}?".EscapeMarkup(), Section(m).EscapeMarkup(), Material(m).EscapeMarkup(),
+                Clean(m.Name.Length > 0 ? $"{m.Name} {m.Key}" : m.Key).EscapeMarkup(), $"{Class(m)}, {m.RoleGuess}?".EscapeMarkup(), Place(m).EscapeMarkup(), Section(m).EscapeMarkup(), Material(m).EscapeMarkup(),
                 Length(m).EscapeMarkup(), Forces(m).EscapeMarkup(), (m.IsReady ? "nothing" : string.Join(", ", m.Missing.Select(r => r.Code.Text()))).EscapeMarkup());
         console.Write(table);
+    }
+
+    private static string Class(MemberReadiness m) => m.Identity.PredefinedType.Length > 0 ? $"{m.Class} {Clean(m.Identity.PredefinedType)}" : m.Class;
+
+    private static string Place(MemberReadiness m)
+    {
+        (string Word, string Text)[] parts = [("", m.Identity.StoreyPath), ("assembly ", m.Identity.Assembly), ("type ", m.Identity.TypeName), ("layer ", m.Identity.Layer)];
+        var known = string.Join(", ", parts.Where(p => p.Text.Length > 0).Select(p => p.Word + Clean(p.Text)));
+        return known.Length > 0 ? known : "no place";
     }
 
     private static string Section(MemberReadiness m) => m.Section.Length > 0 ? $"{m.Section} ({Clean(m.SectionSource)})" : "no section";

@@ -18,7 +18,8 @@ internal sealed record ReadinessDocument(
 
     /// <summary>One candidate; strength in Pa, length in m.</summary>
     internal sealed record Candidate(
-        string Key, string GlobalId, int Item, string Tag, string Name, string Class, string RoleGuess, string Storey, string Section, string SectionSource,
+        string Key, string GlobalId, int Item, string Tag, string Name, string Class, string PredefinedType, string TypeName, string RoleGuess, string Storey,
+        string StoreyPath, string Assembly, string Layer, string Section, string SectionSource,
         string Material, double? StrengthPa, string StrengthSource, double? LengthM, string LengthSource, int Situations, int Stations, string ForcesSource,
         bool Ready, ImmutableArray<Lack> Missing, ImmutableArray<string> Notes);
 }

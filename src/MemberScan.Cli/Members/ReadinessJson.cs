@@ -28,6 +28,7 @@ internal sealed partial class ReadinessJson : JsonSerializerContext
         s_plain.ReadinessDocument);
 
     private static ReadinessDocument.Candidate Of(MemberReadiness m) => new(
-        m.Key, m.GlobalId, m.ItemNumber, m.Tag, m.Name, m.Class, m.RoleGuess, m.Storey, m.Section, m.SectionSource, m.Material, m.Strength, m.StrengthSource,
+        m.Key, m.Identity.GlobalId, m.Identity.ItemNumber, m.Identity.Tag, m.Name, m.Class, m.Identity.PredefinedType, m.Identity.TypeName, m.RoleGuess, m.Identity.Storey,
+        m.Identity.StoreyPath, m.Identity.Assembly, m.Identity.Layer, m.Section, m.SectionSource, m.Material, m.Strength, m.StrengthSource,
         m.Length, m.LengthSource, m.Situations, m.Stations, m.ForcesSource, m.IsReady, [.. m.Missing.Select(r => new ReadinessDocument.Lack(r.Code.Text(), r.Message))], m.Notes);
 }

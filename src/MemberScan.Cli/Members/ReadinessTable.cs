@@ -10,7 +10,7 @@ namespace MemberScan.Cli.Members;
 internal static class ReadinessTable
 {
     /// <summary>The first line, without its end.</summary>
-    public const string Header = "key,globalId,item,tag,name,class,roleGuess,storey,section,sectionSource,material,strength[MPa],strengthSource,length[m],lengthSource,"
+    public const string Header = "key,globalId,item,tag,name,class,predefinedType,typeName,roleGuess,storey,storeyPath,assembly,layer,section,sectionSource,material,strength[MPa],strengthSource,length[m],lengthSource,"
         + "situations,stations,forcesSource,ready,missing,missingInWords,notes";
 
     /// <summary>The table as bytes: UTF-8, lines end with CR LF.</summary>
@@ -23,7 +23,8 @@ internal static class ReadinessTable
 
     private static string[] Fields(MemberReadiness m) =>
     [
-        m.Key, m.GlobalId, m.ItemNumber > 0 ? Number(m.ItemNumber) : "", m.Tag, m.Name, m.Class, m.RoleGuess, m.Storey, m.Section, m.SectionSource, m.Material,
+        m.Key, m.Identity.GlobalId, m.Identity.ItemNumber > 0 ? Number(m.Identity.ItemNumber) : "", m.Identity.Tag, m.Name, m.Class, m.Identity.PredefinedType,
+        m.Identity.TypeName, m.RoleGuess, m.Identity.Storey, m.Identity.StoreyPath, m.Identity.Assembly, m.Identity.Layer, m.Section, m.SectionSource, m.Material,
         m.Strength is { } strength ? Number(strength / 1e6) : "", m.StrengthSource, m.Length is { } length ? Number(length) : "", m.LengthSource,
         Number(m.Situations), Number(m.Stations), m.ForcesSource, m.IsReady ? "yes" : "no",
         string.Join("; ", m.Missing.Select(r => r.Code.Text())), string.Join("; ", m.Missing.Select(r => r.Message)), string.Join("; ", m.Notes),

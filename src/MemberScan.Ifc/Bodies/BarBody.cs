@@ -2,6 +2,7 @@ using System.Collections.Immutable;
 using MemberScan.Foundation.Geometry;
 using MemberScan.Ifc.Sections;
 using MemberScan.Model;
+using MemberScan.Model.Members;
 
 namespace MemberScan.Ifc.Bodies;
 
@@ -18,6 +19,9 @@ internal sealed record BarBody(
     ProfileShape Profile, double Length, string LengthSource, MemberAxes Axes, string Source, ImmutableArray<double> BendRadii,
     bool IsStraight, ImmutableArray<string> Notes)
 {
+    /// <summary>The section at its end where it tapers; null otherwise.</summary>
+    public SectionFinding? EndSection { get; init; }
+
     /// <summary>Length over largest extent from which a body counts as bar-like in classes that are candidates only then.</summary>
     public const double BarLikeRatio = 3;
 
@@ -45,12 +49,15 @@ internal sealed record BarBody(
         _ = item.Map.Direction(along).TryNormalize(out var x);
         _ = frame.Direction(Vector3.UnitY).TryNormalize(out var z);
         var y = z.Cross(x);
-        if (y.Dot(frame.Direction(Vector3.UnitX)) < 0) notes = notes.Add("y is the reversed X axis of the profile (the sweep runs against its normal, or its profile or the placement mirrors)");
+        var shape = profile.Value.Scaled(scale);
+        var isReversed = y.Dot(frame.Direction(Vector3.UnitX)) < 0;
+        if (isReversed) shape = shape.Mirrored();
+        if (isReversed) notes = notes.Add("y is the reversed X axis of the profile (the sweep runs against its normal, or its profile or the placement mirrors)");
         if (!isStraight) notes = notes.Add("local axes are those at the start, carried along the centre line without twist");
 
         var source = $"{profile.Value.SourceWord} {profile.Source} of {item.Called}";
         var body = new BarBody(
-            profile.Value.Scaled(scale), scale * length.Value, length.Source, new MemberAxes(frame.Origin, x, y, z), source,
+            shape, scale * length.Value, length.Source, new MemberAxes(frame.Origin, x, y, z), source,
             [.. bendRadii.Select(r => scale * r)], isStraight, [.. notes, .. profile.Value.Section.Notes]);
         return new Finding<BarBody>.Found(body, source);
     }

@@ -40,7 +40,8 @@ internal sealed class MeshBodyReader(MeshReader meshes, bool isAllowed)
         var source = string.Create(CultureInfo.InvariantCulture, $"{SourceWord} {item.Called}, largest deviation {prism.Residual * 1e3:0.####} mm");
         ImmutableArray<string> notes =
         [
-            .. item.Notes, "section, length and axes are recognised from a mesh; x points upwards, or along +X or +Y of the project where the member is level", .. prism.Section.Notes,
+            .. item.Notes, "section, length and axes are recognised from a mesh; x points upwards, or along +X or +Y of the project where the member is level",
+            .. prism.IsOblique ? new[] { "its ends are cut obliquely; the length is that along the middle, the section that square to it" } : [], .. prism.Section.Notes,
         ];
         var profile = new ProfileShape(new SectionFinding(prism.Section.Shapes, "", notes), Transform3.Identity) { SourceWord = SourceWord };
         return new Finding<BarBody>.Found(

@@ -4,6 +4,7 @@ using MemberScan.Ifc.Curves;
 using MemberScan.Ifc.Geometry;
 using MemberScan.Ifc.Sections;
 using MemberScan.Ifc.Units;
+using MemberScan.Mechanics.Sections;
 using MemberScan.Model;
 using MemberScan.Model.Verdicts;
 
@@ -22,7 +23,10 @@ internal sealed class SweptBodyReader(
     public Finding<BarBody> Extrusion(BodyItem item) =>
         Prepared(item, out var start) ?? Extruded(item, start);
 
-    /// <summary>Reads IfcExtrudedAreaSolidTapered: a bar where both ends are the same, refused with both named where they are not.</summary>
+    /// <summary>
+    /// Reads IfcExtrudedAreaSolidTapered: a bar where both ends are the same; a tapering bar where they are round, tubular or rectangular
+    /// about one axis and the slope is small; refused with both named where they are not.
+    /// </summary>
     public Finding<BarBody> Tapered(BodyItem item)
     {
         if (Prepared(item, out var start) is { } missing) return missing;
@@ -31,10 +35,19 @@ internal sealed class SweptBodyReader(
 
         var (first, last) = (start.Profile.Value, end.Value);
         var moves = (last.Position.Origin - first.Position.Origin).Length > 1e-4 * first.LargestExtent || (last.Position.X - first.Position.X).Length > 1e-4;
-        if (!SectionAlike.Of(first.Section.Shape, last.Section.Shape) || moves)
-            return Missing(ReasonCode.SectionNotCovered, $"{item.Called} tapers from {first.Section.Shape.Designation} ({start.Profile.Source}) to {last.Section.Shape.Designation} ({end.Source}){(moves ? ", shifted or turned" : "")}; stress along a taper is not evaluated");
+        if (SectionAlike.Of(first.Section.Shape, last.Section.Shape) && !moves) return Extruded(item, start);
 
-        return Extruded(item, start);
+        var words = $"{item.Called} tapers from {first.Section.Shape.Designation} ({start.Profile.Source}) to {last.Section.Shape.Designation} ({end.Source})";
+        if (moves) return Missing(ReasonCode.SectionNotCovered, $"{words}, shifted or turned; stress along such a taper is not evaluated");
+        if (Taper.Of(first.Section.Shape, last.Section.Shape) is not { } taper) return Missing(ReasonCode.SectionNotCovered, $"{words}; only tapers of one round, tubular or rectangular kind are evaluated");
+        if (!Extruded(item, start).TryGet(out var bar, out var whyNot)) return new Finding<BarBody>.Missing(whyNot);
+
+        var slope = taper.SlopeOver(bar.Value.Length / start.Scale);
+        if (slope > Taper.LargestSlope)
+            return Missing(ReasonCode.SectionNotCovered, string.Create(CultureInfo.InvariantCulture, $"{words} with a slope of {slope:0.###}; over {Taper.LargestSlope} the formulas of a straight bar do not hold"));
+
+        var scaled = (last with { Position = first.Position }).Scaled(start.Scale);
+        return bar with { Value = bar.Value with { EndSection = scaled.Section, Notes = bar.Value.Notes.Add(words) } };
     }
 
     /// <summary>Reads IfcRevolvedAreaSolid as a bent bar: length and bend radius at the centroid.</summary>

@@ -5,7 +5,10 @@ using MemberScan.Part21;
 
 namespace MemberScan.Ifc.Curves;
 
-/// <summary>Straight and circular pieces of polylines, indexed poly-curves, composite curves, trimmed lines and trimmed circles.</summary>
+/// <summary>
+/// Straight and circular pieces of polylines, indexed poly-curves, composite curves, trimmed lines and trimmed circles. Ellipses and B-splines
+/// are followed by arcs, in outlines alone.
+/// </summary>
 internal sealed class CurveReader(Instances instances, PlacementReader placements, ModelUnits units)
 {
     /// <summary>Most pieces that a curve may have.</summary>
@@ -14,11 +17,49 @@ internal sealed class CurveReader(Instances instances, PlacementReader placement
     /// <summary>Deepest nesting of composite curves that is followed.</summary>
     public const int MaxNesting = 16;
 
+    private readonly SplineReader _splines = new(instances, placements);
+    private double? _followed;
+
     /// <summary>The pieces of a curve in its order; null when it is of another kind, damaged or beyond the limits.</summary>
-    public List<CurvePiece>? Pieces(Part21Record curve) => Pieces(curve, depth: 0);
+    public List<CurvePiece>? Pieces(Part21Record curve)
+    {
+        _followed = null;
+        return Pieces(curve, depth: 0) is { } pieces && _followed is null ? pieces : null;
+    }
 
     /// <summary>The pieces of a curve that bounds an area: as <see cref="Pieces(Part21Record)"/>, and whole circles; an unclosed indexed poly-curve is not closed here.</summary>
-    public List<CurvePiece>? ClosedPieces(Part21Record curve) => curve.Keyword == "IFCCIRCLE" ? WholeCircle(curve) : Pieces(curve, depth: 0);
+    /// <param name="curve">The curve.</param>
+    /// <param name="within">Largest distance from curves that arcs follow [m]; null where all is straight or circular.</param>
+    public List<CurvePiece>? ClosedPieces(Part21Record curve, out double? within)
+    {
+        _followed = null;
+        var pieces = curve.Keyword == "IFCCIRCLE" ? WholeCircle(curve) : Pieces(curve, depth: 0);
+        within = _followed;
+        return pieces;
+    }
+
+    /// <summary>Axes and radius of IfcCircle [m]; null when it is damaged.</summary>
+    public (Transform3 Axes, double Radius)? CircleOf(Part21Record circle) =>
+        units.Length is { } metre && placements.Axis2(circle[0]) is { } axes && Instances.Real(circle[1]) is { } r && r > 0 ? (axes, metre * r) : null;
+
+    /// <summary>Arcs that follow an ellipse between two of its angles [rad]; null when it is damaged.</summary>
+    private List<CurvePiece>? Ellipse(Part21Record ellipse, double from, double sweep)
+    {
+        if (units.Length is not { } metre || placements.Axis2(ellipse[0]) is not { } axes || Instances.Real(ellipse[1]) is not { } a || Instances.Real(ellipse[2]) is not { } b || !(a > 0) || !(b > 0)) return null;
+
+        return Followed(share =>
+        {
+            var (sin, cos) = Math.SinCos(from + share * sweep);
+            return axes.Origin + metre * a * cos * axes.X + metre * b * sin * axes.Y;
+        }, [.. Enumerable.Range(0, 13).Select(i => i / 12.0)]);
+    }
+
+    private List<CurvePiece>? Followed(Func<double, Vector3> at, IReadOnlyList<double> breaks)
+    {
+        var pieces = SampledCurve.Arcs(at, breaks, out var deviation);
+        _followed = Math.Max(_followed ?? 0, deviation);
+        return pieces;
+    }
 
     private List<CurvePiece>? WholeCircle(Part21Record circle)
     {
@@ -43,6 +84,8 @@ internal sealed class CurveReader(Instances instances, PlacementReader placement
             "IFCINDEXEDPOLYCURVE" => Indexed(curve),
             "IFCCOMPOSITECURVE" => Composite(curve, depth),
             "IFCTRIMMEDCURVE" => TrimmedCurve(curve),
+            "IFCELLIPSE" => Ellipse(curve, 0, 2 * Math.PI),
+            "IFCBSPLINECURVEWITHKNOTS" or "IFCRATIONALBSPLINECURVEWITHKNOTS" => _splines.Read(curve) is { } spline ? Followed(spline.At, spline.Breaks) : null,
             _ => null,
         };
     }
@@ -159,6 +202,7 @@ internal sealed class CurveReader(Instances instances, PlacementReader placement
         {
             "IFCLINE" => TrimmedLine(basis, curve, forward, byPoint),
             "IFCCIRCLE" => TrimmedCircle(basis, curve, forward, byPoint),
+            "IFCELLIPSE" => TrimmedEllipse(basis, curve, forward, byPoint),
             _ => null,
         };
     }
@@ -194,6 +238,27 @@ internal sealed class CurveReader(Instances instances, PlacementReader placement
         _ = forward;   // a line has one way from trim to trim; the sense says the same
         var span = magnitude * metre > 0 ? (end - start).Length / (magnitude * metre) : 1;
         return CurvePiece.Line(start, end, span) is { } piece ? [piece] : null;
+    }
+
+    // The parameter of an ellipse is the angle of the circle that it is stretched from.
+    private List<CurvePiece>? TrimmedEllipse(Part21Record ellipse, Part21Record curve, bool forward, bool byPoint)
+    {
+        if (units.Length is not { } metre || placements.Axis2(ellipse[0]) is not { } axes || Instances.Real(ellipse[1]) is not { } a || Instances.Real(ellipse[2]) is not { } b || !(a > 0) || !(b > 0)) return null;
+
+        double? AngleAt(Part21Value set)
+        {
+            var (parameter, point) = Trim(set);
+            double? byParameter = parameter is { } u ? u * units.Angle : null;
+            double? byPlace = point is { } p ? Math.Atan2((p - axes.Origin).Dot(axes.Y) / (metre * b), (p - axes.Origin).Dot(axes.X) / (metre * a)) : null;
+            return byPoint ? byPlace ?? byParameter : byParameter ?? byPlace;
+        }
+
+        if (AngleAt(curve[1]) is not { } start || AngleAt(curve[2]) is not { } end) return null;
+
+        var sweep = forward ? end - start : start - end;
+        sweep -= 2 * Math.PI * Math.Floor(sweep / (2 * Math.PI));
+        if (sweep < 1e-12) sweep = 2 * Math.PI;
+        return Ellipse(ellipse, start, forward ? sweep : -sweep);
     }
 
     private List<CurvePiece>? TrimmedCircle(Part21Record circle, Part21Record curve, bool forward, bool byPoint)

@@ -14,6 +14,9 @@ internal sealed record MaterialFacts(
     string Name, string Category, PropertyValue? Yield, PropertyValue? Modulus, PropertyValue? Poisson,
     bool IsSteelByProperties, bool IsConcreteByProperties)
 {
+    /// <summary>Density [kg/m³] as found; null when no property names it.</summary>
+    public PropertyValue? Density { get; init; }
+
     /// <summary>Identifications and names of the classification references of the material.</summary>
     public ImmutableArray<string> Classifications { get; init; } = [];
 }

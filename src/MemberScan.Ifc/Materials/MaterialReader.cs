@@ -1,8 +1,6 @@
 using System.Collections.Immutable;
 using System.Globalization;
-using System.Text.RegularExpressions;
 using MemberScan.Ifc.Sections;
-using MemberScan.Mechanics.Sections;
 using MemberScan.Model;
 using MemberScan.Model.Members;
 using MemberScan.Model.Rules;
@@ -22,20 +20,13 @@ internal sealed class MaterialReader(
     /// <summary>Moduli outside this range [Pa] cannot be meant.</summary>
     private const double LeastModulus = 0.5e9, LargestModulus = 1000e9;
 
+    /// <summary>Densities outside this range [kg/m³] cannot be meant.</summary>
+    private const double LeastDensity = 100, LargestDensity = 25_000;
+
     private static readonly string[] s_notCovered =
         ["concrete", "beton", "hormig", "wood", "timber", "holz", "madera", "bois", "glass", "glas", "masonry", "mauerwerk", "brick", "gypsum", "plaster"];
 
     private static readonly char[] s_partMarks = ['/', ',', ';', ':', '|'];
-
-    // Patterns are matched in linear time; this only bounds what a settings file could ask for.
-    private static readonly TimeSpan s_patience = TimeSpan.FromSeconds(10);
-
-    // Made once: a pattern of linear matching time costs far more to make than to match.
-    private readonly ImmutableArray<(Grade? Grade, Regex Pattern)> _patterns =
-    [
-        .. rules.Grades.Select(grade => (grade, new Regex(
-            $@"\A(?:{grade.Pattern})\z", RegexOptions.IgnoreCase | RegexOptions.CultureInvariant | RegexOptions.NonBacktracking, s_patience))),
-    ];
 
     private readonly Dictionary<string, Grade?> _gradeOf = new(StringComparer.Ordinal);
 
@@ -53,6 +44,10 @@ internal sealed class MaterialReader(
 
     /// <summary>Whether the association names a profile set that tapers to another.</summary>
     public bool IsTapering(ulong id) => Levels(id).Any(level => level.Any(d => d.Keyword == "IFCMATERIALPROFILESETUSAGETAPERING"));
+
+    /// <summary>Whether the association says that the member's line is that of its section's centroid (cardinal point 10).</summary>
+    public bool RunsAlongCentroid(ulong id) => Levels(id).Any(level => level.Any(d =>
+        d.Keyword is "IFCMATERIALPROFILESETUSAGE" && d[1].TryInteger(out var point) && point == 10));
 
     /// <summary>The material of an object and its values.</summary>
     /// <param name="id">STEP id of the object.</param>
@@ -72,7 +67,7 @@ internal sealed class MaterialReader(
     }
 
     private List<MaterialFacts> Distinct(IEnumerable<Part21Record> definitions) =>
-        [.. definitions.SelectMany(d => Materials(d, [])).Select(facts.Read).DistinctBy(m => (m.Name, m.Category, m.Yield?.Value, m.Modulus?.Value, m.IsConcreteByProperties))];
+        [.. definitions.SelectMany(d => Materials(d, [], [])).Select(m => facts.Read(m.Material, m.Owners)).DistinctBy(m => (m.Name, m.Category, m.Yield?.Value, m.Modulus?.Value, m.IsConcreteByProperties))];
 
     /// <summary>The occurrence's material, with the smaller strength where the type names another one; both are told.</summary>
     private static Material MoreCautious(Material own, Material ofType) => (own.Yield, ofType.Yield) switch
@@ -94,7 +89,7 @@ internal sealed class MaterialReader(
         var grade = GradeOf(material.Name) ?? GradeOf(material.Category) ?? material.Classifications.Select(GradeOf).FirstOrDefault(g => g is not null);
         var isSteel = grade?.IsSteel ?? (material.IsSteelByProperties
             || material.Category.Contains("steel", StringComparison.OrdinalIgnoreCase) || material.Modulus is { Value: > 170e9 and < 230e9 });
-        return new Material(material.Name, Yield(material, grade, section), Modulus(material, grade), Poisson(material, grade), isSteel);
+        return new Material(material.Name, Yield(material, grade, section), Modulus(material, grade), Poisson(material, grade), isSteel) { Density = Density(material) };
     }
 
     private static Finding<double> Yield(MaterialFacts material, Grade? grade, SectionFinding? section)
@@ -105,7 +100,7 @@ internal sealed class MaterialReader(
         {
             null => null,
             { Value: null } p => Missing(ReasonCode.UnitMissing, $"{p.Source} {p.Fault}"),
-            { Value: < LeastYield or > LargestYield } p => Missing(ReasonCode.StrengthImplausible, string.Create(CultureInfo.InvariantCulture, $"{p.Source} is {p.Value.Value / 1e6:0.####} MPa; outside {LeastYield / 1e6:0} to {LargestYield / 1e6:0} MPa it is taken for a slip of the unit")),
+            { Value: < LeastYield or > LargestYield } p => Missing(ReasonCode.StrengthImplausible, string.Create(CultureInfo.InvariantCulture, $"{p.Source} is {p.Value.Value / 1e6:0.####} MPa; outside {LeastYield / 1e6:0} to {LargestYield / 1e6:0} MPa it is taken for a slip of the unit{UnitSlip.OfYield(p.Written)}")),
             var p => new Finding<double>.Found(p.Value.Value, p.Source),
         };
         if (byProperty is Finding<double>.Missing) return byProperty;
@@ -125,19 +120,12 @@ internal sealed class MaterialReader(
 
     private static Finding<double> YieldOf(Grade grade, SectionFinding? section)
     {
-        var thickness = section is null ? 0 : section.Shapes.Max(Thickness);
+        var thickness = section is null ? 0 : section.Shapes.Max(WallThickness.Of);
         foreach (var range in grade.Yields)
             if (thickness <= range.UpTo * (1 + 1e-9))
                 return new Finding<double>.Found(range.Yield, string.Create(CultureInfo.InvariantCulture, $"by name: grade {grade.Name} of {grade.Standard}, thickness {thickness * 1e3:0.###} mm{(grade.FromMemory ? " (from memory)" : "")}"));
         return Missing(ReasonCode.NoStrength, string.Create(CultureInfo.InvariantCulture, $"grade {grade.Name} of {grade.Standard} gives no strength for a thickness of {thickness * 1e3:0.###} mm"));
     }
-
-    private static double Thickness(CrossSection shape) => shape switch
-    {
-        Tube tube => tube.Wall,
-        Box box => box.Wall,
-        _ => Math.Min(shape.ExtentY, shape.ExtentZ),
-    };
 
     private static Finding<double> Modulus(MaterialFacts material, Grade? grade)
     {
@@ -146,13 +134,21 @@ internal sealed class MaterialReader(
         var why = material.Modulus switch
         {
             null => $"material '{material.Name}' has no modulus of elasticity in its properties",
-            { Value: { } value } p => string.Create(CultureInfo.InvariantCulture, $"{p.Source} is {value / 1e6:0.####} MPa, which is taken for a slip of the unit"),
+            { Value: { } value } p => string.Create(CultureInfo.InvariantCulture, $"{p.Source} is {value / 1e6:0.####} MPa, which is taken for a slip of the unit{UnitSlip.OfModulus(p.Written)}"),
             var p => $"{p.Source} {p.Fault}",
         };
         return grade is not null
             ? new Finding<double>.Found(grade.Modulus, $"by name: grade {grade.Name} of {grade.Standard}{(grade.FromMemory ? " (from memory)" : "")}{(material.Modulus is null ? "" : "; " + why)}")
             : Missing(ReasonCode.StabilityNotChecked, why + " and is no known grade");
     }
+
+    private static Finding<double>? Density(MaterialFacts material) => material.Density switch
+    {
+        null => null,
+        { Value: >= LeastDensity and <= LargestDensity } p => new Finding<double>.Found(p.Value.Value, p.Source),
+        { Value: { } value } p => Missing(ReasonCode.UnitMissing, string.Create(CultureInfo.InvariantCulture, $"{p.Source} is {value:0.####} kg/m³, which is taken for a slip of the unit")),
+        var p => Missing(ReasonCode.UnitMissing, $"{p.Source} {p.Fault}"),
+    };
 
     private Finding<double> Poisson(MaterialFacts material, Grade? grade)
     {
@@ -173,7 +169,7 @@ internal sealed class MaterialReader(
     /// <summary>The grade that a name stands for: the whole name, else the one grade among its parts (<c>STEEL/S235JR</c>).</summary>
     private Grade? GradeOf(string name)
     {
-        if (name.Length is 0 or > 200) return null;
+        if (name.Length is 0 or > GradePattern.LongestName) return null;
         if (_gradeOf.TryGetValue(name, out var known)) return known;
 
         var grade = Matching(name);
@@ -186,7 +182,7 @@ internal sealed class MaterialReader(
         return _gradeOf[name] = grade;
     }
 
-    private Grade? Matching(string name) => _patterns.FirstOrDefault(p => p.Pattern.IsMatch(name)).Grade;
+    private Grade? Matching(string name) => rules.Grades.FirstOrDefault(grade => grade.Fits(name));
 
     /// <summary>Material definitions of the occurrence, then those of its type.</summary>
     private IEnumerable<IEnumerable<Part21Record>> Levels(ulong id)
@@ -220,14 +216,16 @@ internal sealed class MaterialReader(
         }
     }
 
-    private IEnumerable<Part21Record> Materials(Part21Record definition, HashSet<ulong> visited)
+    /// <summary>The materials of a definition, each with the sets, profiles, layers and constituents it is named by, the innermost first.</summary>
+    private IEnumerable<(Part21Record Material, ImmutableArray<Part21Record> Owners)> Materials(Part21Record definition, HashSet<ulong> visited, ImmutableArray<Part21Record> owners)
     {
-        IEnumerable<Part21Record> From(Part21Value list) => instances.FollowAll(list).SelectMany(part => Materials(part, visited));
+        IEnumerable<(Part21Record, ImmutableArray<Part21Record>)> From(Part21Value list) =>
+            instances.FollowAll(list).SelectMany(part => Materials(part, visited, owners.Insert(0, definition)));
+        if (definition.Keyword == "IFCMATERIAL") return [(definition, owners)];
         if (!visited.Add(definition.Id)) return [];
 
         return definition.Keyword switch
         {
-            "IFCMATERIAL" => [definition],
             "IFCMATERIALLIST" => From(definition[0]),
             "IFCMATERIALPROFILESETUSAGE" or "IFCMATERIALPROFILESETUSAGETAPERING" => From(definition[0]),
             "IFCMATERIALPROFILESET" or "IFCMATERIALCONSTITUENTSET" => From(definition[2]),

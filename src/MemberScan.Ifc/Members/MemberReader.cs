@@ -8,7 +8,6 @@ using MemberScan.Ifc.Geometry;
 using MemberScan.Ifc.Materials;
 using MemberScan.Ifc.Schema;
 using MemberScan.Ifc.Sections;
-using MemberScan.Mechanics.Sections;
 using MemberScan.Model;
 using MemberScan.Model.Members;
 using MemberScan.Model.Rules;
@@ -129,9 +128,10 @@ internal sealed class MemberReader(
             ItemCount = count,
             Role = roles.Of(element, (axes as Finding<MemberAxes>.Found)?.Value, body.Length / body.Profile.LargestExtent),
             Section = new Finding<SectionFinding>.Found(section, body.Source),
+            EndSection = body.EndSection,
             Length = new Finding<double>.Found(body.Length, body.LengthSource),
             Axes = axes,
-            Material = materials.Read(record.Id, section),
+            Material = materials.Read(record.Id, body.EndSection is { } end ? section with { Shapes = [.. section.Shapes, .. end.Shapes] } : section),
             BendRadii = body.BendRadii,
             IsStraight = body.IsStraight,
             Notes = notes,
@@ -155,6 +155,8 @@ internal sealed class MemberReader(
         if (sets[0] is not Finding<ProfileShape>.Found set)
             return member with { Notes = member.Notes.Add($"the profile of the material profile set is not read ({((Finding<ProfileShape>.Missing)sets[0]).Why.Message}); the body's section is used") };
 
+        if (member.EndSection is not null) return member with { Notes = member.Notes.Add("the body tapers; its sections are used, not those of the material profile set") };
+
         var own = body.Value.Shapes;
         var different = set.Value.Section.Shapes.Where(s => !own.Any(o => SectionAlike.Of(s, o))).ToImmutableArray();
         if (different.IsEmpty) return member with { Section = body with { Source = $"{body.Source}; material profile set agrees" } };
@@ -172,9 +174,10 @@ internal sealed class MemberReader(
     private Member WithoutBar(Part21Record record, ElementIdentity element, string key, ImmutableArray<Finding<BarBody>> read)
     {
         var notes = ImmutableArray<string>.Empty;
+        var offset = (0.0, 0.0);
         var section = record.IsDamaged
             ? new Finding<SectionFinding>.Missing(new Reason(ReasonCode.DamagedRecord, $"the record of the element #{record.Id} is damaged"))
-            : SectionOfSet(record, read, ref notes);
+            : SectionOfSet(record, read, ref notes, out offset);
         var lines = relations.AnalyticalOf(record.Id).Select(analytical.Read).OfType<AnalyticalMember>().ToList();
         return new Member
         {
@@ -187,22 +190,25 @@ internal sealed class MemberReader(
             Length = lines.Count == 1 ? lines[0].Length : NoLength("the member has no swept body that gives its length"),
             Axes = lines.Count == 1 ? lines[0].Axes : NoAxes("the member has no swept body that gives its axes"),
             Material = materials.Read(record.Id, (section as Finding<SectionFinding>.Found)?.Value),
+            CentroidOffset = offset,
             Notes = notes,
         };
     }
 
-    private Finding<SectionFinding> SectionOfSet(Part21Record record, ImmutableArray<Finding<BarBody>> read, ref ImmutableArray<string> notes)
+    private Finding<SectionFinding> SectionOfSet(Part21Record record, ImmutableArray<Finding<BarBody>> read, ref ImmutableArray<string> notes, out (double Y, double Z) offset)
     {
+        offset = default;
         var sets = materials.ProfilesOf(record.Id);
         if (materials.IsTapering(record.Id)) return NoSection(ReasonCode.SectionNotCovered, "the material profile set tapers to another");
         if (sets.Length > 1) return NoSection(ReasonCode.SectionNotCovered, "the material profile set has several profiles");
         if (sets.Length == 1)
         {
             if (!sets[0].TryGet(out var set, out var whyNoSet)) return new Finding<SectionFinding>.Missing(whyNoSet);
-            if (IsMoved(set.Value)) return Moved(set);
+            if (set.Value.IsMoved) return Moved(set);
 
             if (!read.IsEmpty) notes = notes.Add($"the body gives no section ({((Finding<BarBody>.Missing)read[0]).Why.Message}); the material profile set does");
             notes = notes.AddRange(set.Value.Section.Notes);
+            if (!materials.RunsAlongCentroid(record.Id)) offset = OffsetOf(set.Value);
             return new Finding<SectionFinding>.Found(set.Value.Section, $"material profile set, {set.Source}");
         }
 
@@ -213,13 +219,7 @@ internal sealed class MemberReader(
         static string element(Part21Record record) => $"{ClassNames.Spell(record.Keyword)} #{record.Id}";
     }
 
-    /// <summary>Whether a profile is turned or shifted by its own position, which only a body can show in space.</summary>
-    private static bool IsMoved(ProfileShape profile)
-    {
-        var isTurned = (profile.Position.X - Vector3.UnitX).Length > 1e-6 && profile.Section.Shape is not (Round or Tube);
-        return isTurned || profile.Position.Origin.Length > 1e-6 * profile.LargestExtent;
-    }
-
+    /// <summary>A profile turned or shifted by its own position, which only a body can show in space.</summary>
     private static Finding<SectionFinding> Moved(Finding<ProfileShape>.Found profile) =>
         NoSection(ReasonCode.SectionNotCovered, $"{profile.Source} is turned or shifted by its position, and no body shows how it lies in the member");
 
@@ -242,10 +242,11 @@ internal sealed class MemberReader(
         var element = Identity(record);
         var line = analytical.Read(record.Id)!;
         var notes = ImmutableArray<string>.Empty;
+        var offset = (0.0, 0.0);
         var section = record.IsDamaged
             ? NoSection(ReasonCode.DamagedRecord, $"the record of the analytical member #{record.Id} is damaged")
             : record.Keyword == "IFCSTRUCTURALCURVEMEMBERVARYING" ? NoSection(ReasonCode.SectionNotCovered, "the analytical member varies along its length")
-            : AnalyticalSection(record, ref notes);
+            : AnalyticalSection(record, ref notes, out offset);
         members.Add(new Member
         {
             Key = KeyOf(element, record),
@@ -257,6 +258,7 @@ internal sealed class MemberReader(
             Length = line.Length,
             Axes = line.Axes,
             Material = materials.Read(record.Id, (section as Finding<SectionFinding>.Found)?.Value),
+            CentroidOffset = offset,
             Notes = notes,
         });
     }
@@ -266,19 +268,29 @@ internal sealed class MemberReader(
 
     private bool IsConditional(string keyword) => rules.WithBarBodyOrForces.SelectMany(ClassNames.KeywordsOf).Contains(keyword, StringComparer.Ordinal);
 
-    private Finding<SectionFinding> AnalyticalSection(Part21Record record, ref ImmutableArray<string> notes)
+    private Finding<SectionFinding> AnalyticalSection(Part21Record record, ref ImmutableArray<string> notes, out (double Y, double Z) offset)
     {
+        offset = default;
         foreach (var (properties, _) in relations.ProfilePropertiesOf(record.Id))
         {
             if (!instances.File.TryFind(properties, out var p) || !instances.TryFollow(p[1], out var profile)) continue;
             if (!profiles.Read(profile).TryGet(out var found, out var why)) return new Finding<SectionFinding>.Missing(why);
-            if (IsMoved(found.Value)) return Moved(found);
+            if (found.Value.IsMoved) return Moved(found);
 
             notes = notes.AddRange(found.Value.Section.Notes);
+            offset = OffsetOf(found.Value);
             return new Finding<SectionFinding>.Found(found.Value.Section, $"profile properties #{properties}, {found.Source}");
         }
 
-        return SectionOfSet(record, [], ref notes);
+        return SectionOfSet(record, [], ref notes, out offset);
+    }
+
+    /// <summary>Centroid of a profile from its origin, which lies on the member's line [m].</summary>
+    private static (double Y, double Z) OffsetOf(ProfileShape profile)
+    {
+        var hair = 1e-6 * profile.LargestExtent;
+        var at = profile.Position.Origin;
+        return Math.Abs(at.X) <= hair && Math.Abs(at.Y) <= hair ? default : (at.X, at.Y);
     }
 
     private ElementIdentity Identity(Part21Record record)
@@ -287,11 +299,16 @@ internal sealed class MemberReader(
         var predefined = PredefinedTypeIndex(record.Keyword) is var index and > 0 ? Instances.Literal(record[index]) : "";
         if (predefined is "" or "NOTDEFINED" && type.Id != 0) predefined = Instances.Literal(type[9]);
 
-        var container = relations.ContainerOf(record.Id) is var c and not 0 && instances.File.TryFind(c, out var storey) ? Instances.Text(storey[2]) : "";
+        var place = new PlaceReader(instances, relations);
         var tag = record.Keyword.StartsWith("IFCSTRUCTURAL", StringComparison.Ordinal) ? "" : Instances.Text(record[7]);
         return new ElementIdentity(
             record.Id, Instances.Text(record[0]), ClassNames.Spell(record.Keyword), predefined is "NOTDEFINED" ? "" : predefined,
-            Instances.Text(record[2]), tag, type.Id != 0 ? Instances.Text(type[2]) : "", container);
+            Instances.Text(record[2]), tag, type.Id != 0 ? Instances.Text(type[2]) : "", place.Storey(record.Id))
+        {
+            StoreyPath = place.StoreyPath(record.Id),
+            Assembly = place.Assembly(record.Id),
+            Layer = place.Layer(record[6]),
+        };
     }
 
     private int PredefinedTypeIndex(string keyword) => keyword switch

@@ -32,8 +32,9 @@ internal sealed class RoleGuess
     /// <param name="slenderness">Length over largest extent of the section [-]; null when it is not known.</param>
     public string Of(ElementIdentity element, MemberAxes? axes, double? slenderness)
     {
-        var name = Searched(element.Name);
-        if (!_rules.Any(r => r.Pattern?.IsMatch(name) == true)) name = Searched(element.TypeName);
+        // The first of the element's own names that says something to any rule is the one that all rules search.
+        string[] names = [Searched(element.Name), Searched(element.TypeName), Searched(element.Assembly), Searched(element.Layer)];
+        var name = Array.Find(names, n => _rules.Any(r => r.Pattern?.IsMatch(n) == true)) ?? names[1];
 
         double? slope = axes is null ? null : Math.Asin(Math.Clamp(Math.Abs(axes.X.Z), 0, 1)) * 180 / Math.PI;
         foreach (var (rule, pattern) in _rules)

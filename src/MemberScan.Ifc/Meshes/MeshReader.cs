@@ -1,5 +1,6 @@
 using System.Collections.Immutable;
 using MemberScan.Foundation.Geometry;
+using MemberScan.Ifc.Curves;
 using MemberScan.Ifc.Geometry;
 using MemberScan.Ifc.Units;
 using MemberScan.Part21;
@@ -9,6 +10,8 @@ namespace MemberScan.Ifc.Meshes;
 /// <summary>Meshes from faceted bodies, face sets and surface models.</summary>
 internal sealed class MeshReader(Instances instances, PlacementReader placements, ModelUnits units)
 {
+    private readonly AdvancedFaceReader _advanced = new(instances, placements, new CurveReader(instances, placements, units));
+
     /// <summary>Reads a mesh; null, with the reason, when it is damaged, beyond the limits or has curved faces.</summary>
     /// <param name="body">The body.</param>
     /// <param name="fault">Why there is none; empty when there is one.</param>
@@ -17,11 +20,11 @@ internal sealed class MeshReader(Instances instances, PlacementReader placements
         var builder = new Builder();
         fault = body.Keyword switch
         {
-            "IFCFACETEDBREP" => AddShells(builder, instances.TryFollow(body[0], out var shell) ? [shell] : null),
+            "IFCFACETEDBREP" or "IFCADVANCEDBREP" => AddShells(builder, instances.TryFollow(body[0], out var shell) ? [shell] : null),
             "IFCSHELLBASEDSURFACEMODEL" or "IFCFACEBASEDSURFACEMODEL" => AddShells(builder, instances.FollowEach(body[0])),
             "IFCTRIANGULATEDFACESET" => AddTriangles(builder, body),
             "IFCPOLYGONALFACESET" => AddPolygons(builder, body),
-            "IFCFACETEDBREPWITHVOIDS" => "it has voids within",
+            "IFCFACETEDBREPWITHVOIDS" or "IFCADVANCEDBREPWITHVOIDS" => "it has voids within",
             _ => "its faces may be curved",
         };
         return fault.Length == 0 ? builder.Build() : null;
@@ -44,13 +47,14 @@ internal sealed class MeshReader(Instances instances, PlacementReader placements
 
         foreach (var face in faces)
         {
-            if (face.Keyword != "IFCFACE" && face.Keyword != "IFCFACESURFACE") return "its faces may be curved";
+            var isPlain = face.Keyword is "IFCFACE" or "IFCFACESURFACE";
+            if (!isPlain && (face.Keyword != "IFCADVANCEDFACE" || !_advanced.IsCovered(face))) return "its faces are curved otherwise than a cylinder";
             if (instances.FollowEach(face[0]) is not { Count: > 0 } bounds) return "a face of it has no bounds";
 
             var loops = new List<ImmutableArray<int>>();
             foreach (var bound in bounds)
             {
-                if (!instances.TryFollow(bound[0], out var loop) || loop.Keyword != "IFCPOLYLOOP" || Loop(builder, loop) is not { } indices) return "a face of it is not bounded by straight edges";
+                if (!instances.TryFollow(bound[0], out var loop) || Bound(builder, loop) is not { } indices) return "a face of it is not bounded by straight or circular edges";
 
                 // The outer bound comes first whatever its place in the set.
                 if (bound.Keyword == "IFCFACEOUTERBOUND") loops.Insert(0, indices);
@@ -63,6 +67,13 @@ internal sealed class MeshReader(Instances instances, PlacementReader placements
 
         return "";
     }
+
+    private ImmutableArray<int>? Bound(Builder builder, Part21Record loop) => loop.Keyword switch
+    {
+        "IFCPOLYLOOP" => Loop(builder, loop),
+        "IFCEDGELOOP" => _advanced.Loop(loop) is { } points && points.Count <= Mesh.MaxPoints ? [.. points.Select(builder.Add)] : null,
+        _ => null,
+    };
 
     private ImmutableArray<int>? Loop(Builder builder, Part21Record loop)
     {

@@ -8,4 +8,5 @@ namespace MemberScan.Ifc.Meshes;
 /// <param name="Length">Distance of its end planes [m].</param>
 /// <param name="Section">The section; its position is in the start plane.</param>
 /// <param name="Residual">Largest distance of the mesh's points from the prism [m].</param>
-internal sealed record Prism(Transform3 Start, double Length, RecognisedSection Section, double Residual);
+/// <param name="IsOblique">Whether its ends are not square to it; its length is that along the middle.</param>
+internal sealed record Prism(Transform3 Start, double Length, RecognisedSection Section, double Residual, bool IsOblique);

@@ -7,8 +7,8 @@ using MemberScan.Mechanics.Sections;
 namespace MemberScan.Ifc.Meshes;
 
 /// <summary>
-/// Recognises a closed mesh whose points lie in two parallel end planes, joined by straight edges square to them, and whose end loops are
-/// the outline of a covered section.
+/// Recognises a closed mesh whose points lie in two end planes, joined by straight edges along one direction, and whose end loops, seen
+/// along it, are the outline of a covered section. End planes are square to the direction, or cut obliquely.
 /// </summary>
 internal static class PrismFit
 {
@@ -43,13 +43,10 @@ internal static class PrismFit
             if (prism is not null && (best is null || prism.Length > best.Length)) best = prism;
         }
 
+        if (best is null)
+            best = ObliqueEnds.Of(mesh).Select(ends => OfEnds(mesh, ends, towardsY, along, out _)).FirstOrDefault(prism => prism is not null);
         if (best is not null) fault = "";
         return best;
-    }
-
-    private sealed record EndPlanes(Vector3 Axis, ImmutableArray<bool> IsEnd, double AtStart, double AtEnd, double Deviation)
-    {
-        public double Length => AtEnd - AtStart;
     }
 
     private static bool IsClosed(Mesh mesh)
@@ -183,7 +180,7 @@ internal static class PrismFit
 
         fault = "";
         var height = forward ? ends.AtStart : -ends.AtEnd;
-        return new Prism(new Transform3(height * z, x, y, z), ends.Length, section, Math.Max(residual, ends.Deviation));
+        return new Prism(new Transform3(height * z, x, y, z), ends.Length, section, Math.Max(residual, ends.Deviation), ends.IsOblique);
     }
 
     private static double Allowed(CrossSection shape) => shape switch

@@ -1,8 +1,10 @@
 using System.Collections.Immutable;
 using System.Globalization;
+using MemberScan.Foundation.Geometry;
 using MemberScan.Ifc.Curves;
 using MemberScan.Ifc.Geometry;
 using MemberScan.Ifc.Outlines;
+using MemberScan.Ifc.Sections.General;
 using MemberScan.Ifc.Units;
 using MemberScan.Mechanics.Sections;
 using MemberScan.Model;
@@ -12,7 +14,7 @@ using MemberScan.Part21;
 
 namespace MemberScan.Ifc.Sections;
 
-/// <summary>Sections from profile definitions: five parametric ones, drawn outlines, and profiles derived from others.</summary>
+/// <summary>Sections from profile definitions: parametric ones, drawn outlines, and profiles derived from others.</summary>
 internal sealed class ProfileReader(Instances instances, PlacementReader placements, CurveReader curves, ModelUnits units)
 {
     /// <summary>Deepest nesting of derived and composite profiles that is followed.</summary>
@@ -68,7 +70,7 @@ internal sealed class ProfileReader(Instances instances, PlacementReader placeme
             case "IFCRECTANGLEPROFILEDEF": made = Made(Rectangle.Fault(Dim(3), Dim(4)), () => new Rectangle(Dim(3), Dim(4))); break;
             case "IFCROUNDEDRECTANGLEPROFILEDEF": made = Made(RoundedRectangle.Fault(Dim(3), Dim(4), Dim(5)), () => new RoundedRectangle(Dim(3), Dim(4), Dim(5))); break;
             case "IFCRECTANGLEHOLLOWPROFILEDEF": made = BoxReadings.Of(Dim(3), Dim(4), Dim(5), Radius(profile[6], metre), Radius(profile[7], metre), out notes); break;
-            default: return Missing(ReasonCode.SectionNotCovered, $"{called} is not a round, tubular, rectangular or box profile{OutlineExtents.Words(profile, metre)}");
+            default: return General(profile, called, metre);
         }
 
         if (placements.Axis2(profile[2]) is not { } position) return Missing(ReasonCode.DamagedRecord, $"the position of {called} is damaged");
@@ -80,6 +82,22 @@ internal sealed class ProfileReader(Instances instances, PlacementReader placeme
 
         var section = new SectionFinding(made.Shapes, Instances.Text(profile[1]), notes);
         return new Finding<ProfileShape>.Found(new ProfileShape(section, position), called);
+    }
+
+    private Finding<ProfileShape> General(Part21Record profile, string called, double metre)
+    {
+        if (ParametricOutlines.Of(new ParametricDims(profile, metre, units.Angle)) is not { } made)
+            return Missing(ReasonCode.SectionNotCovered, $"{called} is of a class that is not read as a section");
+        if (placements.Axis2(profile[2]) is not { } position) return Missing(ReasonCode.DamagedRecord, $"the position of {called} is damaged");
+        if (made.Shape is not { } shape)
+        {
+            var code = made.Fault!.Kind == SectionFaultKind.WallOverRadius ? ReasonCode.WallOverRadius : ReasonCode.SectionInvalid;
+            return Missing(code, $"{called}: {made.Fault.Message}");
+        }
+
+        var section = new SectionFinding([shape], Instances.Text(profile[1]), made.Notes);
+        var centred = position.After(new Transform3(made.Centroid, Vector3.UnitX, Vector3.UnitY, Vector3.UnitZ));
+        return new Finding<ProfileShape>.Found(new ProfileShape(section, centred) { Drawn = position }, called);
     }
 
     /// <summary>A profile moved, turned, mirrored or scaled in its plane.</summary>

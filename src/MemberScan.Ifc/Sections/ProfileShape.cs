@@ -1,4 +1,6 @@
 using MemberScan.Foundation.Geometry;
+using MemberScan.Ifc.Sections.General;
+using MemberScan.Mechanics.Profiles;
 using MemberScan.Mechanics.Sections;
 using MemberScan.Model.Members;
 
@@ -15,6 +17,19 @@ internal sealed record ProfileShape(SectionFinding Section, Transform3 Position)
     /// <summary>Where the section comes from, in words: <c>profile</c>, <c>drawn outline</c>, …</summary>
     public string SourceWord { get; init; } = "profile";
 
+    /// <summary>From the axes that the profile is drawn in to the plane of the sweep [m]; its centroid may lie beside their origin.</summary>
+    public Transform3 Drawn { get; init; } = Position;
+
+    /// <summary>Whether the profile is turned or shifted in its plane.</summary>
+    public bool IsMoved
+    {
+        get
+        {
+            var isTurned = (Drawn.X - Vector3.UnitX).Length > 1e-6 && Section.Shape is not (Round or Tube);
+            return isTurned || Drawn.Origin.Length > 1e-6 * LargestExtent;
+        }
+    }
+
     /// <summary>The largest extent of the section [m].</summary>
     public double LargestExtent => Math.Max(Section.Shape.ExtentY, Section.Shape.ExtentZ);
 
@@ -30,10 +45,15 @@ internal sealed record ProfileShape(SectionFinding Section, Transform3 Position)
             Rectangle s => new Rectangle(scale * s.Width, scale * s.Depth),
             RoundedRectangle s => new RoundedRectangle(scale * s.Width, scale * s.Depth, scale * s.CornerRadius),
             Box s => new Box(scale * s.Width, scale * s.Depth, scale * s.Wall, scale * s.OuterRadius, scale * s.InnerRadius),
-            _ => shape,
+            OpenProfile s => new OpenProfile(s.Shape, scale * s.Depth, scale * s.Width, scale * s.Web, scale * s.Flange, scale * s.Root),
+            OutlineSection s => OutlineShapes.Scaled(s, scale, scale),
+            _ => throw new ArgumentOutOfRangeException(nameof(scale), shape.Kind, "no scaling for this kind"),
         };
         return this with { Section = Section with { Shapes = [.. Section.Shapes.Select(Scale)] } };
     }
+
+    /// <summary>The same profile with its section seen from the other side: y reversed.</summary>
+    public ProfileShape Mirrored() => this with { Section = Section with { Shapes = [.. Section.Shapes.Select(OutlineShapes.Mirrored)] } };
 
     /// <summary>The same profile moved, turned, mirrored and scaled in its plane; null when it is no section of the same kind any more.</summary>
     public ProfileShape? Mapped(Transform3 map)
@@ -44,9 +64,16 @@ internal sealed record ProfileShape(SectionFinding Section, Transform3 Position)
         if (Math.Abs(to.X.Dot(to.Y)) > 1e-6 * scaleX * scaleY) return null;
 
         var position = new Transform3(to.Origin, 1 / scaleX * to.X, 1 / scaleY * to.Y, Vector3.UnitZ);
-        if (Math.Abs(scaleX / scaleY - 1) < 1e-6) return Scaled(scaleX) with { Position = position };
-        if (Section.Shape is not Rectangle r) return null;
+        var drawn = map.After(Drawn);
+        drawn = new Transform3(drawn.Origin, position.X, position.Y, Vector3.UnitZ);
+        if (Math.Abs(scaleX / scaleY - 1) < 1e-6) return Scaled(scaleX) with { Position = position, Drawn = drawn };
 
-        return this with { Position = position, Section = Section with { Shapes = [new Rectangle(scaleX * r.Width, scaleY * r.Depth)] } };
+        CrossSection? stretched = Section.Shape switch
+        {
+            Rectangle r => new Rectangle(scaleX * r.Width, scaleY * r.Depth),
+            OutlineSection outline when outline.Rings.All(ring => ring.All(v => v.Bulge == 0)) => OutlineShapes.Scaled(outline, scaleX, scaleY),
+            _ => null,
+        };
+        return stretched is null ? null : this with { Position = position, Drawn = drawn, Section = Section with { Shapes = [stretched] } };
     }
 }

@@ -1,3 +1,4 @@
+using MemberScan.Mechanics.Profiles;
 using MemberScan.Mechanics.Sections;
 
 namespace MemberScan.Ifc.Sections;
@@ -16,7 +17,17 @@ internal static class SectionAlike
             (Rectangle p, Rectangle q) => Near(p.Width, q.Width) && Near(p.Depth, q.Depth),
             (RoundedRectangle p, RoundedRectangle q) => Near(p.Width, q.Width) && Near(p.Depth, q.Depth) && Near(p.CornerRadius, q.CornerRadius),
             (Box p, Box q) => Near(p.Width, q.Width) && Near(p.Depth, q.Depth) && Near(p.Wall, q.Wall) && Near(p.OuterRadius, q.OuterRadius) && Near(p.InnerRadius, q.InnerRadius),
+            (OpenProfile p, OpenProfile q) => p.Shape == q.Shape && Near(p.Depth, q.Depth) && Near(p.Width, q.Width) && Near(p.Web, q.Web) && Near(p.Flange, q.Flange) && Near(p.Root, q.Root),
+            (OutlineSection p, OutlineSection q) => Alike(p, q),
             _ => false,
         };
+    }
+
+    /// <summary>Whether two outlines have their corners in the same places, within 0.01 % of the largest extent.</summary>
+    private static bool Alike(OutlineSection a, OutlineSection b)
+    {
+        var hair = 1e-4 * Math.Max(a.ExtentY, a.ExtentZ);
+        return a.Rings.Length == b.Rings.Length && a.Rings.Zip(b.Rings).All(pair => pair.First.Length == pair.Second.Length
+            && pair.First.All(v => pair.Second.Any(w => double.Hypot(v.Y - w.Y, v.Z - w.Z) <= hair && Math.Abs(v.Bulge - w.Bulge) <= 1e-3)));
     }
 }

@@ -1,6 +1,7 @@
 using System.Collections.Immutable;
 using System.Security.Cryptography;
 using MemberScan.Foundation.Diagnostics;
+using MemberScan.Model.Forces;
 using MemberScan.Model.Rules;
 
 namespace MemberScan.Inputs.ForcesTables;

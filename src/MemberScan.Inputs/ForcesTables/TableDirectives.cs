@@ -1,3 +1,4 @@
+using MemberScan.Model.Forces;
 using MemberScan.Model.Rules;
 
 namespace MemberScan.Inputs.ForcesTables;

@@ -1,5 +1,4 @@
 using System.Collections.Immutable;
-using System.Text.RegularExpressions;
 using MemberScan.Foundation.Diagnostics;
 using MemberScan.Inputs.Json;
 using MemberScan.Model.Rules;
@@ -9,20 +8,10 @@ namespace MemberScan.Inputs.Materials;
 /// <summary>Material grades, found by the name that a model gives its material.</summary>
 public sealed class GradeTable
 {
-    /// <summary>Longer names are looked up by nobody [characters].</summary>
-    public const int LongestName = 256;
-
     private static readonly Lazy<GradeTable> s_shipped = new(ReadShipped);
 
-    private readonly ImmutableArray<Regex> _patterns;
-
     /// <summary>A table of grades, tried in their order.</summary>
-    /// <exception cref="ArgumentException">A pattern is not a regular expression.</exception>
-    public GradeTable(ImmutableArray<Grade> grades)
-    {
-        Grades = grades;
-        _patterns = [.. grades.Select(grade => GradePattern.Whole(grade.Pattern))];
-    }
+    public GradeTable(ImmutableArray<Grade> grades) => Grades = grades;
 
     /// <summary>The table in <c>config/materials/grades.json</c>, embedded in the program; every value is marked as from memory.</summary>
     public static GradeTable Shipped => s_shipped.Value;
@@ -35,12 +24,7 @@ public sealed class GradeTable
     public Grade? Find(string materialName)
     {
         ArgumentNullException.ThrowIfNull(materialName);
-        var name = materialName.Trim();
-        if (name.Length is 0 or > LongestName) return null;
-
-        for (var i = 0; i < Grades.Length; i++)
-            if (_patterns[i].IsMatch(name)) return Grades[i];
-        return null;
+        return Grades.FirstOrDefault(grade => grade.Fits(materialName));
     }
 
     internal static ImmutableArray<Grade> Read(ReadOnlyMemory<byte> bytes, string fileName, DiagnosticList diagnostics)

@@ -1,6 +1,5 @@
 using System.Collections.Immutable;
 using MemberScan.Inputs.Json;
-using MemberScan.Inputs.Materials;
 using MemberScan.Model.Rules;
 
 namespace MemberScan.Inputs.SettingsFiles;

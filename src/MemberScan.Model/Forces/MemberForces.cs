@@ -16,6 +16,9 @@ public sealed record MemberForces
     /// <summary>Stations along the member, in the order of the source; SI, positive-face, about the centroid.</summary>
     public required ImmutableArray<ForceStation> Stations { get; init; }
 
+    /// <summary>The line about which T is taken at the stations.</summary>
+    public TorsionReference Torsion { get; init; }
+
     /// <summary>File and lines, or STEP ids, in words.</summary>
     public required string Source { get; init; }
 

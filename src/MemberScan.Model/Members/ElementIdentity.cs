@@ -10,4 +10,14 @@ namespace MemberScan.Model.Members;
 /// <param name="TypeName">Name of its type object; empty if none.</param>
 /// <param name="Storey">Name of its storey or other container; empty if none.</param>
 public sealed record ElementIdentity(
-    ulong StepId, string GlobalId, string Class, string PredefinedType, string Name, string Tag, string TypeName, string Storey);
+    ulong StepId, string GlobalId, string Class, string PredefinedType, string Name, string Tag, string TypeName, string Storey)
+{
+    /// <summary>Names of what contains it, from the outermost to its storey, with <c> / </c> between; empty if none.</summary>
+    public string StoreyPath { get; init; } = "";
+
+    /// <summary>Name of the assembly that it is part of, its GlobalId where it has no name; empty if none.</summary>
+    public string Assembly { get; init; } = "";
+
+    /// <summary>Name of the presentation layer of its body; empty if none.</summary>
+    public string Layer { get; init; } = "";
+}

@@ -7,4 +7,8 @@ namespace MemberScan.Model.Members;
 /// <param name="Poisson">Poisson's ratio ν [-]; a default is marked so in its source.</param>
 /// <param name="IsSteel">Whether slenderness limits of steel walls apply.</param>
 public sealed record Material(
-    string Name, Finding<double> Yield, Finding<double> Modulus, Finding<double> Poisson, bool IsSteel);
+    string Name, Finding<double> Yield, Finding<double> Modulus, Finding<double> Poisson, bool IsSteel)
+{
+    /// <summary>Density [kg/m³]; null where the model gives none.</summary>
+    public Finding<double>? Density { get; init; }
+}

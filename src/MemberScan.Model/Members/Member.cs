@@ -24,11 +24,20 @@ public sealed record Member
     /// <summary>The section, or why there is none.</summary>
     public required Finding<SectionFinding> Section { get; init; }
 
+    /// <summary>The section at the member's end where it tapers to another of the same kind; null for a member of one section.</summary>
+    public SectionFinding? EndSection { get; init; }
+
     /// <summary>Length along the sweep [m], or why it is not known.</summary>
     public required Finding<double> Length { get; init; }
 
     /// <summary>Local axes in project coordinates, or why they are not known.</summary>
     public required Finding<MemberAxes> Axes { get; init; }
+
+    /// <summary>
+    /// Distance of the section's centroid from the line that results in the model are tied to, along y and z [m]; zero where the
+    /// line is the centroid's. Known for members that no body shows in space.
+    /// </summary>
+    public (double Y, double Z) CentroidOffset { get; init; }
 
     /// <summary>The material.</summary>
     public required Material Material { get; init; }

@@ -12,4 +12,8 @@ namespace MemberScan.Model.Rules;
 /// <param name="IsSteel">Whether it is a steel.</param>
 /// <param name="FromMemory">Whether the values are from memory and not yet verified with the standard's text.</param>
 public sealed record Grade(
-    string Name, string Pattern, string Standard, ImmutableArray<YieldRange> Yields, double Modulus, double Poisson, bool IsSteel, bool FromMemory);
+    string Name, string Pattern, string Standard, ImmutableArray<YieldRange> Yields, double Modulus, double Poisson, bool IsSteel, bool FromMemory)
+{
+    /// <summary>Whether a material name, the whole of it, names this grade.</summary>
+    public bool Fits(string materialName) => GradePattern.Fits(Pattern, materialName);
+}

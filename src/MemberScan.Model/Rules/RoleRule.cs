@@ -12,7 +12,7 @@ public sealed record RoleRule(string Role)
     /// <summary>Predefined types, without regard to case; empty for any.</summary>
     public ImmutableArray<string> PredefinedTypes { get; init; } = [];
 
-    /// <summary>Regular expression that is searched in the name, without regard to case; in the type's name where no rule's pattern fits the name. Empty for any.</summary>
+    /// <summary>Regular expression that is searched in the name, without regard to case; where no rule's pattern fits the name, in those of its type, its assembly and its layer, in this order. Empty for any.</summary>
     public string NamePattern { get; init; } = "";
 
     /// <summary>Least slope of the member against the horizontal [degree], in [0, 90]; over 0 only members of known axes fit.</summary>

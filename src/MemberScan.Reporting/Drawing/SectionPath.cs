@@ -1,5 +1,7 @@
+using System.Collections.Immutable;
 using System.Globalization;
 using MemberScan.Mechanics.Sections;
+using MemberScan.Screening.Record;
 
 namespace MemberScan.Reporting.Drawing;
 
@@ -23,6 +25,14 @@ public static class SectionPath
             + Oblong(centreX, centreY, scale, box.Width - 2 * box.Wall, box.Depth - 2 * box.Wall, box.InnerRadius),
         _ => throw new ArgumentOutOfRangeException(nameof(section)),
     };
+
+    /// <summary>Path data of rings centred on their section's centroid.</summary>
+    /// <param name="rings">Outer line and holes [m].</param>
+    /// <param name="centreX">Horizontal place of the centroid [picture unit].</param>
+    /// <param name="centreY">Vertical place of the centroid [picture unit], downward.</param>
+    /// <param name="scale">Picture units per metre.</param>
+    public static string Of(ImmutableArray<ImmutableArray<RingPoint>> rings, double centreX, double centreY, double scale) =>
+        string.Concat(rings.Select(ring => $"M{string.Join('L', ring.Select(p => $"{Coordinate(centreX + p.Y * scale)} {Coordinate(centreY - p.Z * scale)}"))}Z"));
 
     /// <summary>A length or place of a picture as SVG writes it, to a hundredth.</summary>
     public static string Coordinate(double value) =>

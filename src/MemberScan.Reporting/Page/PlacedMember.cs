@@ -1,3 +1,4 @@
+using System.Collections.Immutable;
 using MemberScan.Screening.Record;
 
 namespace MemberScan.Reporting.Page;
@@ -9,4 +10,7 @@ public sealed record PlacedMember(MemberResult Member, string Anchor)
 {
     /// <summary>Largest utilization known [-]; null when nothing could be evaluated.</summary>
     public double? Utilization => Member.Governing?.Utilization;
+
+    /// <summary>Outline of the section that decides; empty where its designation tells the form.</summary>
+    public ImmutableArray<ImmutableArray<RingPoint>> Rings { get; init; } = [];
 }

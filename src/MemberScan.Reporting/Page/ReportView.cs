@@ -31,7 +31,11 @@ public sealed class ReportView
         ArgumentNullException.ThrowIfNull(record);
         Record = record;
         var anchors = MemberAnchors.OfAll(record.Members.Select(m => m.Key));
-        var placed = record.Members.Select((member, index) => new PlacedMember(member, anchors[index])).ToImmutableArray();
+        var rings = record.Sections.GroupBy(s => s.Designation, StringComparer.Ordinal).Where(g => g.Count() == 1).ToDictionary(g => g.Key, g => g.First().Rings, StringComparer.Ordinal);
+        var placed = record.Members.Select((member, index) => new PlacedMember(member, anchors[index])
+        {
+            Rings = member.Governing is { } governing ? rings.GetValueOrDefault(governing.Section, []) : [],
+        }).ToImmutableArray();
 
         // A stable sort keeps the order of the model where utilizations are equal.
         var ranked = placed.OrderByDescending(p => p.Utilization ?? double.NegativeInfinity).ToImmutableArray();

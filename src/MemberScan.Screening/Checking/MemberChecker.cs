@@ -1,6 +1,7 @@
 using System.Collections.Immutable;
 using System.Globalization;
 using MemberScan.Foundation.Geometry;
+using MemberScan.Mechanics.Sections;
 using MemberScan.Model;
 using MemberScan.Model.Forces;
 using MemberScan.Model.Limits;
@@ -51,7 +52,7 @@ internal sealed class MemberChecker(SectionLibrary library, Basis basis, double 
         var findings = new List<SituationFindings>();
         if (first is null)
         {
-            var subject = new SituationChecker.Subject(section!.Value, length!.Value, strength!.Value, poisson.Value, member.Material);
+            var subject = new SituationChecker.Subject(section!.Value, length!.Value, strength!.Value, poisson.Value, member.Material) { Taper = TaperOf(section.Value, member.EndSection) };
             for (var i = 0; i < forces.Count; i++) findings.Add(_situations.Check(subject, forces[i], i));
             first = Barred(member, section.Value, findings);
         }
@@ -61,6 +62,7 @@ internal sealed class MemberChecker(SectionLibrary library, Basis basis, double 
         }
 
         var decisive = Decisive(findings, all, out var other);
+        if (first is null && decisive is null) first = new Reason(ReasonCode.CheckNotEvaluated, "no stress was found for the member");
         var overstressed = decisive is { Utilization: > OverLimit };
         var verdict = overstressed ? Verdict.Overstressed : first is not null ? Verdict.NotChecked : Verdict.WithinLimit;
         if (overstressed && first is not null) all.Add($"beside the verdict: {first.Message}");
@@ -68,17 +70,8 @@ internal sealed class MemberChecker(SectionLibrary library, Basis basis, double 
 
         return new MemberResult
         {
-            Key = member.Key,
-            GlobalId = member.Element.GlobalId,
-            ItemNumber = member.ItemNumber,
-            ItemCount = member.ItemCount,
-            StepId = member.Element.StepId,
-            Tag = member.Element.Tag,
-            Name = member.Element.Name,
-            Class = member.Element.Class,
-            Role = member.Role,
-            Storey = member.Element.Storey,
-            Section = section?.Value.Shape.Designation ?? "",
+            Identity = MemberIdentity.Of(member),
+            Section = section is null ? "" : member.EndSection is { } end ? $"{section.Value.Shape.Designation} to {end.Shape.Designation}" : section.Value.Shape.Designation,
             SectionSource = section?.Source ?? "",
             Material = member.Material.Name,
             Strength = strength?.Value,
@@ -93,6 +86,8 @@ internal sealed class MemberChecker(SectionLibrary library, Basis basis, double 
             Notes = all.ToImmutable(),
         };
     }
+
+    private static Taper? TaperOf(SectionFinding start, SectionFinding? end) => end is null ? null : Taper.Of(start.Shape, end.Shape);
 
     /// <summary>Dimensions of which a sound section is made, but whose powers leave the range of numbers.</summary>
     private static Reason? OutOfRange(Finding<SectionFinding>.Found? section)
@@ -129,6 +124,7 @@ internal sealed class MemberChecker(SectionLibrary library, Basis basis, double 
         {
             other = null;
             var only = elementary ?? elasticity;
+            if (elasticity is not null) notes.Add($"no elementary shear model for this {elasticity.Field.Section.Kind}; decided by the elasticity model");
             if (elementary is not null) notes.Add($"elasticity not available for a {elementary.Field.Section.Kind}; decided by the elementary model");
             return only;
         }

@@ -1,12 +1,13 @@
 using System.Collections.Concurrent;
 using System.Globalization;
+using MemberScan.Mechanics.Profiles;
 using MemberScan.Mechanics.Properties;
 using MemberScan.Mechanics.Sections;
 using MemberScan.Mechanics.Stress;
 
 namespace MemberScan.Screening.Checking;
 
-/// <summary>Stress fields of the sections in use, made once per section, shear model and ν and shared by all members.</summary>
+/// <summary>Stress fields of the sections in use, each made once per section, shear model and ν and shared by all members.</summary>
 internal sealed class SectionLibrary
 {
     /// <summary>Largest closure error of closed forms and series [-].</summary>
@@ -15,20 +16,26 @@ internal sealed class SectionLibrary
     /// <summary>Largest closure error of numerical fields [-].</summary>
     private const double NumericalClosureTolerance = 1e-3;
 
-    private readonly ConcurrentDictionary<(CrossSection Section, ShearModel Model, double Poisson), (StressField? Field, string WhyNot)> _fields = new();
+    // A numerical field takes up to some hundred milliseconds: whoever asks while it is made waits for it.
+    private readonly ConcurrentDictionary<(CrossSection Section, ShearModel Model, double Poisson), Lazy<(StressField? Field, string WhyNot)>> _fields = new();
+    private readonly ConcurrentDictionary<(CrossSection Section, double Poisson), Lazy<SectionProperties>> _properties = new();
 
-    /// <summary>Properties of a section.</summary>
-    public SectionProperties Properties(CrossSection section) =>
-        Field(section, ShearModel.Elementary, 0).Field?.Properties ?? SectionProperties.Of(section);
+    /// <summary>Properties of a section; the shear centre of an outline is that at a ν.</summary>
+    public SectionProperties Properties(CrossSection section, double poisson) => section is OutlineSection or OpenProfile
+        ? Field(section, ShearModel.Elasticity, poisson).Field?.Properties ?? Kept(section, poisson)
+        : Field(section, ShearModel.Elementary, 0).Field?.Properties ?? Kept(section, 0);
 
     /// <summary>The field of a section in a shear model, or why there is none.</summary>
     public (StressField? Field, string WhyNot) Field(CrossSection section, ShearModel model, double poisson)
     {
         // The elementary model does not depend on ν: one field serves all.
         var key = (section, model, model == ShearModel.Elementary ? 0 : poisson);
-        return _fields.GetOrAdd(key, static k =>
-            StressField.TryCreate(k.Section, k.Model, k.Poisson, out var field, out var whyNot) ? Closing(field) : (null, whyNot));
+        return _fields.GetOrAdd(key, static k => new Lazy<(StressField?, string)>(() =>
+            StressField.TryCreate(k.Section, k.Model, k.Poisson, out var field, out var whyNot) ? Closing(field) : (null, whyNot))).Value;
     }
+
+    private SectionProperties Kept(CrossSection section, double poisson) =>
+        _properties.GetOrAdd((section, poisson), static k => new Lazy<SectionProperties>(() => SectionProperties.Of(k.Section))).Value;
 
     /// <summary>An elasticity field that does not give back its section forces is not used; elementary models need not close.</summary>
     private static (StressField? Field, string WhyNot) Closing(StressField field) =>

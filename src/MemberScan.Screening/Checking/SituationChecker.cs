@@ -1,8 +1,10 @@
+using System.Collections.Immutable;
 using System.Globalization;
 using MemberScan.Checks;
 using MemberScan.Checks.Stability;
 using MemberScan.Checks.Walls;
 using MemberScan.Mechanics.Forces;
+using MemberScan.Mechanics.Profiles;
 using MemberScan.Mechanics.Properties;
 using MemberScan.Mechanics.Sections;
 using MemberScan.Mechanics.Stress;
@@ -37,7 +39,11 @@ internal sealed class SituationChecker(SectionLibrary library, Basis basis, doub
     /// <param name="Yield">Yield strength [Pa].</param>
     /// <param name="Poisson">ν [-].</param>
     /// <param name="Material">The material.</param>
-    public sealed record Subject(SectionFinding Section, double Length, double Yield, double Poisson, Material Material);
+    public sealed record Subject(SectionFinding Section, double Length, double Yield, double Poisson, Material Material)
+    {
+        /// <summary>How the section changes along the member; null where it does not.</summary>
+        public Taper? Taper { get; init; }
+    }
 
     /// <summary>Checks a situation.</summary>
     public SituationFindings Check(Subject subject, MemberForces forces, int index)
@@ -50,28 +56,62 @@ internal sealed class SituationChecker(SectionLibrary library, Basis basis, doub
         }
 
         ChooseLimit(findings, forces.Situation);
-        var line = Line(forces, subject.Length);
-        if (line.Stations.IsEmpty)
+        if (forces.Stations.IsEmpty)
         {
             findings.Bar(ReasonCode.NoForces, "the source has no stations");
             return findings;
         }
 
-        if (!line.ReachesBothEnds) findings.Bar(ReasonCode.StationsTooCoarse, $"the stations of '{forces.Situation.Name}' do not reach both ends of the member");
-        foreach (var shape in subject.Section.Shapes)
-        {
-            var properties = library.Properties(shape);
-            CheckStability(findings, line, properties, subject, Math.Max(subject.Length, (forces.To ?? 0) - forces.From));
-            foreach (var station in line.Stations) CheckWalls(findings, shape, properties, Cleaned(station.Forces, shape), subject);
-            if (findings.Limit is { } limit)
-            {
-                findings.Elementary = Found.Larger(findings.Elementary, Search(findings, line, shape, ShearModel.Elementary, subject, forces.From, limit, index));
-                findings.Elasticity = Found.Larger(findings.Elasticity, Search(findings, line, shape, ShearModel.Elasticity, subject, forces.From, limit, index));
-            }
-        }
-
+        if (subject.Taper is { } taper) CheckTaper(findings, subject, forces, taper, index);
+        else foreach (var shape in subject.Section.Shapes) CheckShape(findings, subject, forces, shape, index);
         return findings;
     }
+
+    private void CheckShape(SituationFindings findings, Subject subject, MemberForces forces, CrossSection shape, int index)
+    {
+        var properties = library.Properties(shape, subject.Poisson);
+        var line = Line(forces, TorsionMove.Of(forces, properties, findings, out var shearIsKnown), subject.Length);
+        if (!line.ReachesBothEnds) findings.Bar(ReasonCode.StationsTooCoarse, $"the stations of '{forces.Situation.Name}' do not reach both ends of the member");
+        if (shape is OpenProfile or OutlineSection && forces.Stations.Any(s => s.Forces is not { My: 0, Mz: 0 }))
+            findings.Note("bending of an open or general section: lateral-torsional buckling is not covered");
+        CheckStability(findings, line, properties, subject, Math.Max(subject.Length, (forces.To ?? 0) - forces.From));
+        foreach (var station in line.Stations) CheckWalls(findings, shape, properties, Cleaned(station.Forces, shape), subject);
+        if (findings.Limit is not { } limit) return;
+
+        var search = new SearchIn(line, shape, subject, forces.From, limit, index, shearIsKnown);
+        var (elementary, elasticity) = (Search(findings, search, ShearModel.Elementary), Search(findings, search, ShearModel.Elasticity));
+        if (elementary is null && elasticity is null)
+            findings.Bar(ReasonCode.CheckNotEvaluated, $"no stress field for {shape.Designation}: {library.Field(shape, ShearModel.Elasticity, subject.Poisson).WhyNot}");
+        findings.Elementary = Found.Larger(findings.Elementary, elementary);
+        findings.Elasticity = Found.Larger(findings.Elasticity, elasticity);
+    }
+
+    /// <summary>
+    /// A tapering member: the section at every station and at many places between, the largest value closed in upon. Stresses are those
+    /// of a straight bar with the section of the place.
+    /// </summary>
+    private void CheckTaper(SituationFindings findings, Subject subject, MemberForces forces, Taper taper, int index)
+    {
+        findings.Note("tapered: stresses of a straight bar with the section of each place; the shear that the taper itself causes is not counted");
+        var line = Line(forces, forces.Stations, subject.Length);
+        if (!line.ReachesBothEnds) findings.Bar(ReasonCode.StationsTooCoarse, $"the stations of '{forces.Situation.Name}' do not reach both ends of the member");
+        var ends = new[] { taper.Start, taper.End };
+        var weakest = ends.MinBy(shape => library.Properties(shape, subject.Poisson).IMin)!;
+        CheckStability(findings, line, library.Properties(weakest, subject.Poisson), subject, Math.Max(subject.Length, (forces.To ?? 0) - forces.From));
+        foreach (var station in line.Stations)
+            foreach (var shape in ends) CheckWalls(findings, shape, library.Properties(shape, subject.Poisson), Cleaned(station.Forces, shape), subject);
+        if (findings.Limit is not { } limit) return;
+
+        foreach (var model in new[] { ShearModel.Elementary, ShearModel.Elasticity })
+        {
+            var found = new TaperSearch(taper, model, subject, forces.From, limit, index).Of(findings, line, Cleaned);
+            if (model == ShearModel.Elementary) findings.Elementary = Found.Larger(findings.Elementary, found);
+            else findings.Elasticity = Found.Larger(findings.Elasticity, found);
+        }
+    }
+
+    /// <summary>What a search for the largest stress works on.</summary>
+    private sealed record SearchIn(ForceLine Line, CrossSection Shape, Subject Subject, double From, StressLimit Limit, int Index, bool ShearIsKnown);
 
     private void ChooseLimit(SituationFindings findings, Situation situation)
     {
@@ -92,10 +132,10 @@ internal sealed class SituationChecker(SectionLibrary library, Basis basis, doub
         }
     }
 
-    private static ForceLine Line(MemberForces forces, double length)
+    private static ForceLine Line(MemberForces forces, ImmutableArray<ForceStation> stations, double length)
     {
         var to = forces.To ?? length;
-        return ForceLine.Build(forces.Stations.Select(s => s with { X = s.X - forces.From }), to - forces.From);
+        return ForceLine.Build(stations.Select(s => s with { X = s.X - forces.From }), to - forces.From);
     }
 
     private void CheckStability(SituationFindings findings, ForceLine line, SectionProperties properties, Subject subject, double length)
@@ -122,9 +162,9 @@ internal sealed class SituationChecker(SectionLibrary library, Basis basis, doub
         if (SlenderWall.Check(shape, properties, forces, yield) is CheckResult.NotEvaluated slender) findings.Bar(slender.Why);
     }
 
-    private Found? Search(
-        SituationFindings findings, ForceLine line, CrossSection shape, ShearModel model, Subject subject, double from, StressLimit limit, int index)
+    private Found? Search(SituationFindings findings, SearchIn given, ShearModel model)
     {
+        var (line, shape, subject, from, limit, index, shearIsKnown) = given;
         if (library.Field(shape, model, subject.Poisson).Field is not { } field) return null;
 
         var measure = LimitInForce.Measure(limit);
@@ -139,7 +179,7 @@ internal sealed class SituationChecker(SectionLibrary library, Basis basis, doub
                 return 0;
             }
 
-            var usable = Usable(findings, field, shape, forces);
+            var usable = Usable(findings, field, shape, shearIsKnown ? forces : new SectionForces(forces.N, 0, 0, 0, forces.My, forces.Mz));
             var point = field.Govern(usable, measure);
             if (best is null || point.Value / allowed > best.Utilization) best = new Found(point.Value / allowed, from + x, usable, point, field, index);
             return point.Value;

@@ -42,15 +42,8 @@ public static class Inventory
         var usable = forces.Where(f => f.Unusable is null).ToList();
         return new MemberReadiness
         {
-            Key = member.Key,
-            GlobalId = member.Element.GlobalId,
-            ItemNumber = member.ItemNumber,
-            Tag = member.Element.Tag,
-            Name = member.Element.Name,
-            Class = member.Element.Class,
-            RoleGuess = member.Role,
-            Storey = member.Element.Storey,
-            Section = section?.Value.Shape.Designation ?? "",
+            Identity = MemberIdentity.Of(member),
+            Section = section is null ? "" : member.EndSection is { } end ? $"{section.Value.Shape.Designation} to {end.Shape.Designation}" : section.Value.Shape.Designation,
             SectionSource = section?.Source ?? "",
             Material = member.Material.Name,
             Strength = strength?.Value,

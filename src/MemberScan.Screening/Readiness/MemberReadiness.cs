@@ -1,34 +1,26 @@
 using System.Collections.Immutable;
 using MemberScan.Model.Verdicts;
+using MemberScan.Screening.Record;
 
 namespace MemberScan.Screening.Readiness;
 
 /// <summary>What is known of one candidate before any check, and what is missing for one.</summary>
 public sealed record MemberReadiness
 {
+    /// <summary>What names the candidate and says where it belongs.</summary>
+    public required MemberIdentity Identity { get; init; }
+
     /// <summary>Key of the candidate.</summary>
-    public required string Key { get; init; }
-
-    /// <summary>GlobalId of its element.</summary>
-    public required string GlobalId { get; init; }
-
-    /// <summary>Number of the item among the element's bodies, from 1; 0 when the element is the candidate.</summary>
-    public required int ItemNumber { get; init; }
-
-    /// <summary>Tag; empty if none.</summary>
-    public required string Tag { get; init; }
+    public string Key => Identity.Key;
 
     /// <summary>Name; empty if none.</summary>
-    public required string Name { get; init; }
+    public string Name => Identity.Name;
 
     /// <summary>Class in its schema's spelling.</summary>
-    public required string Class { get; init; }
+    public string Class => Identity.Class;
 
     /// <summary>Guess of the role.</summary>
-    public required string RoleGuess { get; init; }
-
-    /// <summary>Name of its storey or other container; empty if none.</summary>
-    public required string Storey { get; init; }
+    public string RoleGuess => Identity.Role;
 
     /// <summary>Designation of the section; empty if none.</summary>
     public required string Section { get; init; }

@@ -7,35 +7,38 @@ namespace MemberScan.Screening.Record;
 /// <summary>How one candidate ended, with all that is known of it. Values are SI; what is not known is null or empty.</summary>
 public sealed record MemberResult
 {
+    /// <summary>What names the candidate and says where it belongs.</summary>
+    public required MemberIdentity Identity { get; init; }
+
     /// <summary>GlobalId, for an item <c>GlobalId/2</c>.</summary>
-    public required string Key { get; init; }
+    public string Key => Identity.Key;
 
     /// <summary>GlobalId of the element.</summary>
-    public required string GlobalId { get; init; }
+    public string GlobalId => Identity.GlobalId;
 
     /// <summary>Number of the item, from 1; 0 when the element is the candidate.</summary>
-    public required int ItemNumber { get; init; }
+    public int ItemNumber => Identity.ItemNumber;
 
     /// <summary>Number of items of the element.</summary>
-    public required int ItemCount { get; init; }
+    public int ItemCount => Identity.ItemCount;
 
     /// <summary>Number after '#' of the element.</summary>
-    public required ulong StepId { get; init; }
+    public ulong StepId => Identity.StepId;
 
     /// <summary>Tag; empty if none.</summary>
-    public required string Tag { get; init; }
+    public string Tag => Identity.Tag;
 
     /// <summary>Name; empty if none.</summary>
-    public required string Name { get; init; }
+    public string Name => Identity.Name;
 
     /// <summary>Class, such as <c>IfcMember</c>.</summary>
-    public required string Class { get; init; }
+    public string Class => Identity.Class;
 
     /// <summary>Guess of the role.</summary>
-    public required string Role { get; init; }
+    public string Role => Identity.Role;
 
     /// <summary>Storey or other container; empty if none.</summary>
-    public required string Storey { get; init; }
+    public string Storey => Identity.Storey;
 
     /// <summary>Section in words; empty if none.</summary>
     public required string Section { get; init; }

@@ -1,3 +1,5 @@
+using System.Collections.Immutable;
+
 namespace MemberScan.Screening.Record;
 
 /// <summary>A section that stresses were found in: its properties (SI) and how well its stress fields give back the six section forces.</summary>
@@ -15,4 +17,17 @@ namespace MemberScan.Screening.Record;
 /// <param name="ElasticityClosure">Closure of the elasticity model in words with numbers, or why there is none.</param>
 public sealed record SectionFacts(
     string Designation, int Members, double Area, double Iy, double Iz, double WelY, double WelZ, double? J, string JSource, double? Wt,
-    string ElementaryClosure, string ElasticityClosure);
+    string ElementaryClosure, string ElasticityClosure)
+{
+    /// <summary>Product of inertia [m⁴].</summary>
+    public double Iyz { get; init; }
+
+    /// <summary>Shear centre from the centroid along y [m].</summary>
+    public double ShearCentreY { get; init; }
+
+    /// <summary>Shear centre from the centroid along z [m].</summary>
+    public double ShearCentreZ { get; init; }
+
+    /// <summary>Outer line and holes about the centroid, arcs in chords; empty where the designation tells the form.</summary>
+    public ImmutableArray<ImmutableArray<RingPoint>> Rings { get; init; } = [];
+}

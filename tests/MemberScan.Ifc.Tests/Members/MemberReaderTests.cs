@@ -220,6 +220,33 @@ public sealed class MemberReaderTests
 
     [Theory]
     [MemberData(nameof(Schemas.All), MemberType = typeof(Schemas))]
+    public void A_member_knows_its_containers_its_assembly_and_its_layer(Release release)
+    {
+        var model = Bars.Model(release);
+        string[] spatial = ["$", "$", "$", "$", ".ELEMENT.", "$"];
+        var building = model.Rooted("IFCBUILDING", "pier", "Pier", [.. spatial, "$", "$"]);
+        var storey = model.Rooted("IFCBUILDINGSTOREY", "deck", "Deck", spatial);
+        var gangway = model.Rooted("IFCELEMENTASSEMBLY", "gangway", "Gangway", "$", "$", "$", "$", "$", ".NOTDEFINED.");
+        var solid = model.Bodies.Extrusion(model.Profiles.Of(Bars.Rail), 2);
+        var rail = Bars.Add(model, "X-1", solid);
+        model.Add("IFCPRESENTATIONLAYERASSIGNMENT", "'S-HANDRAIL'", "$", Bars.Refs(solid), "$");
+        model.Aggregate(building, storey);
+        model.Aggregate(gangway, rail);
+        model.Rooted("IFCRELCONTAINEDINSPATIALSTRUCTURE", "in the deck", "in the deck", Bars.Refs(gangway), Bars.Ref(storey));
+
+        var member = Reading.Of(model).Named("X-1");
+
+        Assert.Equal("Gangway", member.Element.Assembly);
+        Assert.Equal("S-HANDRAIL", member.Element.Layer);
+        Assert.EndsWith(member.Element.Storey, member.Element.StoreyPath, StringComparison.Ordinal);
+        Assert.NotEmpty(member.Element.Storey);
+
+        // Neither name nor type nor assembly say what it is; its layer does.
+        Assert.Equal("rail", member.Role);
+    }
+
+    [Theory]
+    [MemberData(nameof(Schemas.All), MemberType = typeof(Schemas))]
     public void An_analytical_member_without_a_physical_one_is_a_candidate(Release release)
     {
         var model = Bars.Model(release);

@@ -132,8 +132,7 @@ public sealed class MeshRecognitionTests
     [InlineData("tapered")]
     [InlineData("twisted")]
     [InlineData("notched")]
-    [InlineData("mitred")]
-    [InlineData("skew")]
+    [InlineData("mitred and bent")]
     [InlineData("open")]
     [InlineData("chamfered")]
     [InlineData("eccentric")]
@@ -147,8 +146,7 @@ public sealed class MeshRecognitionTests
             "tapered" => Body(model, tube.Changed(p => p.Z > 0.5 ? new Vector3(0.98 * p.X, 0.98 * p.Y, p.Z) : p), "faceted"),
             "twisted" => Body(model, flat.Changed(p => p.Z > 0.5 ? new Vector3(p.X - 0.05 * p.Y, p.Y + 0.05 * p.X, p.Z) : p), "faceted"),
             "notched" => Body(model, PrismMesh.Of([new(0, 0, 0), new(0.06, 0, 0), new(0.06, 0.012, 0), new(0.03, 0.012, 0), new(0.03, 0.010, 0), new(0, 0.010, 0)], null, 1), "faceted"),
-            "mitred" => Body(model, flat.Changed(p => p.Z > 0.5 ? p + 0.5 * p.X * Vector3.UnitZ : p), "faceted"),
-            "skew" => Body(model, flat.Changed(p => p.Z > 0.5 ? p + 0.3 * Vector3.UnitX : p), "faceted"),
+            "mitred and bent" => Body(model, tube.Changed(p => p.Z > 0.5 ? p + Math.Abs(p.X) * Vector3.UnitZ : p), "faceted"),
             "open" => model.Bodies.SurfaceModel(tube.Points, tube.Faces().Skip(1)),
             "chamfered" => Body(model, PrismMesh.Of([new(0.005, 0, 0), new(0.055, 0, 0), new(0.06, 0.005, 0), new(0.06, 0.025, 0), new(0.055, 0.03, 0), new(0.005, 0.03, 0), new(0, 0.025, 0), new(0, 0.005, 0)], null, 1), "faceted"),
             _ => Body(model, PrismMesh.Of(SampleModels.Writing.OutlineWriter.RegularPolygon(Vector3.Zero, 0.03, 24), SampleModels.Writing.OutlineWriter.RegularPolygon(new Vector3(0.001, 0, 0), 0.026, 24), 1), "faceted"),
@@ -157,6 +155,86 @@ public sealed class MeshRecognitionTests
 
         Assert.Equal(ReasonCode.SectionNotParametric, Reading.Why(Reading.Of(model, s_asked).Only.Section).Code);
         Assert.Equal(ReasonCode.SectionNotParametric, Reading.Why(Reading.Of(model).Only.Section).Code);
+    }
+
+    [Theory]
+    [InlineData("faceted")]
+    [InlineData("triangles")]
+    public void A_prism_with_mitred_ends_is_recognised_with_its_length_along_the_middle(string form)
+    {
+        // Both ends cut at slopes of their own; the middles of the ends stay 1 m apart.
+        var model = Bars.Model(Release.Ifc4);
+        for (var i = 0; i < s_sections.Length; i++)
+        {
+            var mesh = PrismMesh.Of(s_sections[i], 1, 24).Changed(p => p + (p.Z > 0.5 ? 0.5 * p.X - 0.2 * p.Y : 0.8 * p.Y) * Vector3.UnitZ);
+            Bars.Add(model, FormattableString.Invariant($"P{i}"), Body(model, mesh, form), Bars.Askew);
+        }
+
+        var reading = Reading.Of(model, s_asked);
+
+        for (var i = 0; i < s_sections.Length; i++)
+        {
+            var member = reading.Named(FormattableString.Invariant($"P{i}"));
+            AssertWithin(s_sections[i], Reading.Value(member.Section).Shape, 1e-6, FormattableString.Invariant($"P{i}"));
+            Reading.AssertNear(1, Reading.Value(member.Length), 1e-9);
+            Assert.Contains(member.Notes, n => n.Contains("cut obliquely", StringComparison.Ordinal));
+            Near.Vector(Bars.Askew.Z.Z < 0 ? -Bars.Askew.Z : Bars.Askew.Z, Reading.Value(member.Axes).X, 1e-8);
+        }
+    }
+
+    [Fact]
+    public void A_flat_whose_ends_are_shifted_is_the_thinner_flat_along_its_sides()
+    {
+        // 60 mm wide ends, shifted by 0.3 over 1: along the sides it is 60·cos(atan 0.3) wide and √1.09 m long.
+        var model = Bars.Model(Release.Ifc4);
+        Bars.Add(model, "R", Body(model, PrismMesh.Of(new Rectangle(0.06, 0.012), 1, 8).Changed(p => p.Z > 0.5 ? p + 0.3 * Vector3.UnitX : p), "faceted"));
+
+        var member = Reading.Of(model, s_asked).Only;
+
+        var flat = Assert.IsType<Rectangle>(Reading.Value(member.Section).Shape);
+        Assert.Equal([0.012, 0.06 / Math.Sqrt(1.09)], new[] { flat.Width, flat.Depth }.Order(), (a, b) => Math.Abs(a - b) < 1e-9);
+        Reading.AssertNear(Math.Sqrt(1.09), Reading.Value(member.Length), 1e-9);
+    }
+
+    [Theory]
+    [MemberData(nameof(Schemas.Later), MemberType = typeof(Schemas))]
+    public void A_body_of_planes_and_cylinders_is_recognised_by_its_edges(Release release)
+    {
+        var model = Bars.Model(release);
+        Bars.Add(model, "tube", CylinderBody(model, 1.5, 0.02415, 0.02095));
+        Bars.Add(model, "bar", CylinderBody(model, 0.8, 0.008));
+
+        var reading = Reading.Of(model, s_asked);
+
+        ProfileReaderTests.AssertAlike(new Tube(0.02415, 0.0032), Reading.Value(reading.Named("tube").Section).Shape, 1e-6);
+        Reading.AssertNear(1.5, Reading.Value(reading.Named("tube").Length), 1e-9);
+        ProfileReaderTests.AssertAlike(new Round(0.008), Reading.Value(reading.Named("bar").Section).Shape, 1e-6);
+    }
+
+    // IfcAdvancedBrep of two plane ends and a cylinder for each radius, whose seam runs up at angle 0.
+    private static int CylinderBody(ModelWriter model, double length, params double[] radii)
+    {
+        var (low, high) = (model.AxisPlacement(Transform3.Identity), model.AxisPlacement(Transform3.Identity with { Origin = length * Vector3.UnitZ }));
+        var rings = new List<(int Low, int High)>();
+        var faces = new List<int>();
+        int Oriented(int edge, bool forward) => model.Add("IFCORIENTEDEDGE", "*", "*", Bars.Ref(edge), forward ? ".T." : ".F.");
+        int Bound(bool isOuter, params int[] edges) => model.Add(isOuter ? "IFCFACEOUTERBOUND" : "IFCFACEBOUND", Bars.Ref(model.Add("IFCEDGELOOP", Bars.Refs(edges))), ".T.");
+        foreach (var radius in radii)
+        {
+            var text = model.Units.LengthText(radius);
+            int Vertex(double z) => model.Add("IFCVERTEXPOINT", Bars.Ref(model.Point(new Vector3(radius, 0, z))));
+            var (v0, v1) = (Vertex(0), Vertex(length));
+            var ring = (Low: model.Add("IFCEDGECURVE", Bars.Ref(v0), Bars.Ref(v0), Bars.Ref(model.Add("IFCCIRCLE", Bars.Ref(low), text)), ".T."),
+                High: model.Add("IFCEDGECURVE", Bars.Ref(v1), Bars.Ref(v1), Bars.Ref(model.Add("IFCCIRCLE", Bars.Ref(high), text)), ".T."));
+            var seam = model.Add("IFCEDGE", Bars.Ref(v0), Bars.Ref(v1));
+            rings.Add(ring);
+            var bound = Bound(true, Oriented(ring.Low, true), Oriented(seam, true), Oriented(ring.High, false), Oriented(seam, false));
+            faces.Add(model.Add("IFCADVANCEDFACE", Bars.Refs(bound), Bars.Ref(model.Add("IFCCYLINDRICALSURFACE", Bars.Ref(low), text)), ".T."));
+        }
+
+        foreach (var (place, end) in new[] { (low, rings.ConvertAll(r => r.Low)), (high, rings.ConvertAll(r => r.High)) })
+            faces.Add(model.Add("IFCADVANCEDFACE", Bars.Refs([.. end.Select((edge, i) => Bound(i == 0, Oriented(edge, true)))]), Bars.Ref(model.Add("IFCPLANE", Bars.Ref(place))), ".T."));
+        return model.Add("IFCADVANCEDBREP", Bars.Ref(model.Add("IFCCLOSEDSHELL", Bars.Refs([.. faces]))));
     }
 
     [Fact]
@@ -168,7 +246,7 @@ public sealed class MeshRecognitionTests
         Bars.Add(model, "many", model.Bodies.Triangles(flat.Points, triangles));
         Bars.Add(model, "index", model.Bodies.Triangles(flat.Points, [[0, 1, 99]]));
         Bars.Add(model, "missing", model.Add("IFCFACETEDBREP", "#999999"));
-        Bars.Add(model, "curved", model.Add("IFCADVANCEDBREP", "#999999"));
+        Bars.Add(model, "curved", model.Add("IFCADVANCEDBREP", Bars.Ref(model.Add("IFCCLOSEDSHELL", Bars.Refs(model.Add("IFCADVANCEDFACE", "()", Bars.Ref(model.Add("IFCSPHERICALSURFACE", "$", "1.")), ".T."))))));
 
         var reading = Reading.Of(model, s_asked);
 

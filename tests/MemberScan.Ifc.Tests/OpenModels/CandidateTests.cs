@@ -15,29 +15,29 @@ public sealed class CandidateTests
     // Candidates by class and section kind or reason; passed over by class.
     public static TheoryData<string, string, string> Golden => new()
     {
-        { "balcony-railings-ifc2x3.ifc", "IfcBeam rectangle 16, IfcBeam section-not-covered 21", "IfcBuildingElementProxy 164" },
+        { "balcony-railings-ifc2x3.ifc", "IfcBeam outline 21, IfcBeam rectangle 16", "IfcBuildingElementProxy 164" },
         { "bar-swept-disk-polygonal-ifc4.ifc", "IfcReinforcingBar length-ambiguous 1", "" },
         { "beam-i-shape-tessellated-ifc4.ifc", "IfcBeam section-not-parametric 1", "" },
-        { "beam-varying-profiles-ifc4x3.ifc", "IfcBeam section-not-covered 1, IfcBeam tube 1", "" },
-        { "beams-six-profiles-ifc4.ifc", "IfcBeam box 2, IfcBeam section-not-covered 8, IfcBeam tube 2", "" },
+        { "beam-varying-profiles-ifc4x3.ifc", "IfcBeam I profile 1, IfcBeam tube 1", "" },
+        { "beams-six-profiles-ifc4.ifc", "IfcBeam I profile 2, IfcBeam L profile 2, IfcBeam T profile 2, IfcBeam U profile 2, IfcBeam box 2, IfcBeam tube 2", "" },
         {
             "carwash-steel-ifc2x3.ifc",
-            "IfcBeam box 322, IfcBeam mesh-not-allowed 3, IfcBeam rectangle 1134, IfcBeam round 48, IfcBeam section-not-covered 136, IfcBeam section-not-parametric 106, IfcBeam tube 200, "
-            + "IfcColumn section-not-covered 2, IfcColumn section-not-parametric 18, IfcColumn tube 6, IfcDiscreteAccessory box 2, IfcDiscreteAccessory rectangle 11, IfcMember rectangle 228",
+            "IfcBeam I profile 6, IfcBeam L profile 68, IfcBeam box 322, IfcBeam mesh-not-allowed 3, IfcBeam outline 62, IfcBeam rectangle 1134, IfcBeam round 48, IfcBeam section-not-parametric 106, IfcBeam tube 200, "
+            + "IfcColumn L profile 2, IfcColumn section-not-parametric 18, IfcColumn tube 6, IfcDiscreteAccessory box 2, IfcDiscreteAccessory rectangle 11, IfcMember rectangle 228",
             "IfcDiscreteAccessory 396"
         },
         { "column-room-foot-ifc4x3.ifc", "IfcColumn section-not-parametric 1", "" },
         { "columns-on-grid-ifc4x3.ifc", "IfcBeam rectangle 10, IfcColumn rectangle 25", "" },
-        { "concrete-frame-spanish-ifc2x3.ifc", "IfcBeam rectangle 18, IfcColumn rectangle 12, IfcColumn section-not-covered 4", "IfcBuildingElementProxy 645" },
+        { "concrete-frame-spanish-ifc2x3.ifc", "IfcBeam rectangle 18, IfcColumn I profile 4, IfcColumn rectangle 12", "IfcBuildingElementProxy 645" },
         { "drainage-pipes-ifc4x3rc3.ifc", "IfcPipeSegment tube 6", "" },
-        { "house-german-ifc4.ifc", "IfcBeam mesh-not-allowed 3, IfcBeam rectangle 1, IfcMember section-not-parametric 42, IfcRailing mesh-not-allowed 2", "" },
-        { "members-mirrored-profiles-inch-ifc4.ifc", "IfcMember box 1, IfcMember rectangle 1, IfcMember section-not-covered 4", "" },
-        { "newlines-in-strings-inch-ifc2x3.ifc", "IfcMember section-not-covered 1", "" },
+        { "house-german-ifc4.ifc", "IfcBeam mesh-not-allowed 3, IfcBeam rectangle 1, IfcMember mesh-not-allowed 42, IfcRailing mesh-not-allowed 2", "" },
+        { "members-mirrored-profiles-inch-ifc4.ifc", "IfcMember I profile 2, IfcMember T profile 1, IfcMember box 1, IfcMember outline 1, IfcMember rectangle 1", "" },
+        { "newlines-in-strings-inch-ifc2x3.ifc", "IfcMember outline 1", "" },
         { "rounded-rectangle-csg-ifc4.ifc", "", "" },
         { "stair-railings-ifc2x3.ifczip", "IfcRailing section-not-parametric 13", "IfcBuildingElementProxy 1" },
-        { "steel-frame-drawn-sections-ifc2x3.ifc", "IfcBeam box 17, IfcBeam section-not-covered 26, IfcColumn rectangle 5, IfcColumn section-not-covered 37", "IfcBuildingElementProxy 4" },
-        { "structural-beams-linked-ifc4.ifc", "IfcBeam box 2, IfcBeam section-not-covered 8, IfcBeam tube 2", "IfcStructuralCurveMember 12" },
-        { "structural-portal-frame-results-ifc4.ifc", "IfcStructuralCurveMember section-not-covered 3", "" },
+        { "steel-frame-drawn-sections-ifc2x3.ifc", "IfcBeam U profile 1, IfcBeam box 17, IfcBeam outline 25, IfcColumn outline 37, IfcColumn rectangle 5", "IfcBuildingElementProxy 4" },
+        { "structural-beams-linked-ifc4.ifc", "IfcBeam I profile 2, IfcBeam L profile 2, IfcBeam T profile 2, IfcBeam U profile 2, IfcBeam box 2, IfcBeam tube 2", "IfcStructuralCurveMember 12" },
+        { "structural-portal-frame-results-ifc4.ifc", "IfcStructuralCurveMember I profile 3", "" },
         { "structural-surface-member-ifc4x2.ifc", "", "" },
         { "bad-24-files-in-one-ifc2x3.ifc", "", "" },
         { "bad-double-comma-ifc4.ifc", "", "" },
@@ -50,14 +50,14 @@ public sealed class CandidateTests
     // Candidates with a usable section and all candidates: as the settings are shipped, and with recognition of meshes.
     public static TheoryData<string, int, int, int, int> Shares => new()
     {
-        { "balcony-railings-ifc2x3.ifc", 16, 37, 16, 37 },
-        { "carwash-steel-ifc2x3.ifc", 1951, 2216, 1954, 2216 },
+        { "balcony-railings-ifc2x3.ifc", 37, 37, 37, 37 },
+        { "carwash-steel-ifc2x3.ifc", 2089, 2216, 2092, 2216 },
         { "columns-on-grid-ifc4x3.ifc", 35, 35, 35, 35 },
-        { "concrete-frame-spanish-ifc2x3.ifc", 30, 34, 30, 34 },
-        { "house-german-ifc4.ifc", 1, 48, 28, 70 },
-        { "members-mirrored-profiles-inch-ifc4.ifc", 2, 6, 2, 6 },
+        { "concrete-frame-spanish-ifc2x3.ifc", 34, 34, 34, 34 },
+        { "house-german-ifc4.ifc", 1, 48, 70, 70 },
+        { "members-mirrored-profiles-inch-ifc4.ifc", 6, 6, 6, 6 },
         { "stair-railings-ifc2x3.ifczip", 0, 13, 0, 13 },
-        { "steel-frame-drawn-sections-ifc2x3.ifc", 22, 85, 22, 85 },
+        { "steel-frame-drawn-sections-ifc2x3.ifc", 85, 85, 85, 85 },
     };
 
     [Theory]
@@ -193,9 +193,48 @@ public sealed class CandidateTests
         var compared = reading.Catalog.Members.Where(m => m.ItemNumber == 0 && m.Section.TryGet(out _, out _) && lengths.ContainsKey(m.Element.StepId))
             .Select(m => (Read: Reading.Value(m.Length), Written: 1e-3 * lengths[m.Element.StepId])).ToList();
 
-        Assert.Equal(1941, compared.Count);
+        Assert.Equal(2076, compared.Count);
         Assert.Equal(3, compared.Count(c => c.Written == 0));
-        Assert.All(compared.Where(c => c.Written > 0), c => Reading.AssertNear(c.Written, c.Read, 1e-4));
+        var off = compared.Where(c => c.Written > 0 && Math.Abs(c.Read - c.Written) > 1e-4 * c.Written).ToList();
+
+        // Four bars that end in a cut: the quantity is that of the cut body, up to 9 mm of 8.3 m shorter than the sweep.
+        Assert.Equal(4, off.Count);
+        Assert.All(off, c => Assert.InRange(c.Read - c.Written, 0.007, 0.0095));
+    }
+
+    [Theory]
+    [InlineData("carwash-steel-ifc2x3.ifc", 1700)]
+    [InlineData("balcony-railings-ifc2x3.ifc", 16)]
+    public void Sizes_that_profiles_spell_in_their_names_are_those_read(string file, int atLeast)
+    {
+        // PL5*30 and Strip 30x5: the two sides in mm; BUIS65*2.5: diameter and wall; R360: diameter; L65/130/8: legs and thickness.
+        var compared = 0;
+        foreach (var member in Read(file).Catalog.Members)
+        {
+            if (!member.Section.TryGet(out var section, out _)) continue;
+
+            var (name, shape) = (section.Value.Name, section.Value.Shape);
+            var spelled = System.Text.RegularExpressions.Regex.Match(name, @"^(PL|Strip |BUIS|R|L)([0-9.]+)(?:[*x/]([0-9.]+))?(?:/([0-9.]+))?$");
+            if (!spelled.Success) continue;
+
+            double[] sizes = [.. spelled.Groups.Cast<System.Text.RegularExpressions.Group>().Skip(2).Where(g => g.Success).Select(g => double.Parse(g.Value, System.Globalization.CultureInfo.InvariantCulture))];
+            double[] read = (spelled.Groups[1].Value, shape) switch
+            {
+                ("PL" or "Strip ", Rectangle r) => [.. new[] { r.Width, r.Depth }.Order()],
+                ("BUIS", Tube t) => [2 * t.OuterRadius, t.Wall],
+                ("R", Round r) => [2 * r.Radius],
+                ("L", Mechanics.Profiles.OpenProfile p) when sizes.Length == 3 => [.. new[] { p.Width, p.Depth }.Order(), p.Web],
+                _ => [],
+            };
+            if (read.Length != sizes.Length) continue;
+            if (spelled.Groups[1].Value is "PL" or "Strip ") Array.Sort(sizes);
+            if (spelled.Groups[1].Value == "L") Array.Sort(sizes, 0, 2);
+
+            compared++;
+            Assert.Equal(sizes, read.Select(r => Math.Round(r * 1e3, 6)));
+        }
+
+        Assert.True(compared >= atLeast, $"{compared} compared");
     }
 
     private static Dictionary<ulong, double> LengthQuantities(Part21File file)

@@ -151,19 +151,35 @@ public sealed class DrawnProfileTests
         { "(0.,0.),(10.,0.),(20.,0.)", "", ReasonCode.SectionInvalid, "encloses no area" },
         { "(0.,0.),(60.,0.),(60.,12.),(0.,12.)", "(70.,2.),(80.,2.),(80.,8.),(70.,8.)", ReasonCode.SectionInvalid, "void 1 lies outside the outline" },
         { "(0.,0.),(60.,0.),(60.,12.),(0.,12.)", "(50.,2.),(80.,2.),(80.,8.),(50.,8.)", ReasonCode.SectionInvalid, "void 1 crosses the outline" },
-        { "(0.,0.),(60.,0.),(60.,12.),(0.,12.)", "(10.,2.),(20.,2.),(20.,8.),(10.,8.)", ReasonCode.SectionNotCovered, "general outline of 4 edges with 1 void, 60 mm wide and 12 mm deep, area 660 mm²" },
-        { "(0.,0.),(50.,0.),(50.,5.),(5.,5.),(5.,50.),(0.,50.)", "", ReasonCode.SectionNotCovered, "general outline of 6 edges, 50 mm wide and 50 mm deep, area 475 mm²" },
-        { "(0.,0.),(60.,0.),(60.,12.3),(0.,12.)", "", ReasonCode.SectionNotCovered, "general outline of 4 edges" },
-        { "(5.,0.),(55.,0.),(60.,5.),(60.,25.),(55.,30.),(5.,30.),(0.,25.),(0.,5.)", "", ReasonCode.SectionNotCovered, "general outline of 8 edges" },
     };
+
+    public static TheoryData<string, string, string> Kept => new()
+    {
+        { "(0.,0.),(60.,0.),(60.,12.),(0.,12.)", "(10.,2.),(20.,2.),(20.,8.),(10.,8.)", "outline of 8 edges with a void 60x12 mm, 660 mm²" },
+        { "(0.,0.),(50.,0.),(50.,5.),(5.,5.),(5.,40.),(0.,50.)", "", "outline of 6 edges 50x50 mm, 450 mm²" },
+        { "(0.,0.),(60.,0.),(60.,12.3),(0.,12.)", "", "outline of 4 edges 60x12.3 mm, 729 mm²" },
+        { "(5.,0.),(55.,0.),(60.,5.),(60.,25.),(55.,30.),(5.,30.),(0.,25.),(0.,5.)", "", "outline of 8 edges 60x30 mm, 1750 mm²" },
+    };
+
+    [Theory]
+    [MemberData(nameof(Kept))]
+    public void Outlines_that_stand_for_no_special_section_are_kept_as_they_are(string outer, string inner, string designation)
+    {
+        var model = Bars.Model(Release.Ifc4);
+        Add(model, "R", model.Outlines.Profile(Line(model, outer), inner.Length > 0 ? [Line(model, inner)] : [], "gusset"));
+
+        var member = Reading.Of(model).Only;
+
+        Assert.Equal(designation, Reading.Shape(member).Designation);
+        Assert.Equal("gusset", Reading.Value(member.Section).Name);
+    }
 
     [Theory]
     [MemberData(nameof(Refused))]
     public void Outlines_that_bound_no_area_or_stand_for_no_section_end_with_their_reason(string outer, string inner, ReasonCode code, string words)
     {
         var model = Bars.Model(Release.Ifc4);
-        int Line(string corners) => model.Add("IFCPOLYLINE", Bars.Refs([.. corners.Split("),(").Append(corners.Split("),(")[0]).Select(c => model.Add("IFCCARTESIANPOINT", $"({c.Trim('(', ')')})"))]));
-        Add(model, "R", model.Outlines.Profile(Line(outer), inner.Length > 0 ? [Line(inner)] : [], "gusset"));
+        Add(model, "R", model.Outlines.Profile(Line(model, outer), inner.Length > 0 ? [Line(model, inner)] : [], "gusset"));
 
         var why = Reading.Why(Reading.Of(model).Only.Section);
 
@@ -186,7 +202,48 @@ public sealed class DrawnProfileTests
     }
 
     [Theory]
-    [InlineData("IFCELLIPSE", "$,30.,10.")]
+    [MemberData(nameof(Schemas.All), MemberType = typeof(Schemas))]
+    public void An_ellipse_is_followed_by_arcs_within_a_distance_that_is_told(Release release)
+    {
+        var model = Bars.Model(release);
+        var axes = model.Add("IFCAXIS2PLACEMENT2D", Bars.Ref(model.Add("IFCCARTESIANPOINT", "(5.,0.)")), "$");
+        Add(model, "ellipse", model.Outlines.Profile(model.Add("IFCELLIPSE", Bars.Ref(axes), "30.", "10.")));
+        Add(model, "round", model.Outlines.Profile(model.Add("IFCELLIPSE", Bars.Ref(axes), "10.", "10.")));
+
+        var reading = Reading.Of(model);
+
+        // π·30·10 mm².
+        var member = reading.Named("ellipse");
+        Assert.Matches("outline of [0-9]+ edges 60x20 mm, 942.[45] mm²", Reading.Shape(member).Designation);
+        Assert.Contains(member.Notes, n => n.Contains("followed by arcs", StringComparison.Ordinal));
+        ProfileReaderTests.AssertAlike(new Round(0.010), Reading.Shape(reading.Named("round")), 1e-8);
+    }
+
+    [Fact]
+    public void A_rational_B_spline_of_four_quarters_is_a_circle_and_a_plain_one_of_degree_1_its_polygon()
+    {
+        // A circle of nine points with weights 1 and √½ (Piegl and Tiller, The NURBS Book, example 7.2).
+        var model = Bars.Model(Release.Ifc4);
+        string Points(params string[] places) => Bars.Refs([.. places.Select(p => model.Add("IFCCARTESIANPOINT", p))]);
+        var w = "0.7071067811865476";
+        var circle = model.Add("IFCRATIONALBSPLINECURVEWITHKNOTS", "2",
+            Points("(10.,0.)", "(10.,10.)", "(0.,10.)", "(-10.,10.)", "(-10.,0.)", "(-10.,-10.)", "(0.,-10.)", "(10.,-10.)", "(10.,0.)"),
+            ".UNSPECIFIED.", ".T.", ".F.", "(3,2,2,2,3)", "(0.,1.,2.,3.,4.)", ".UNSPECIFIED.", $"(1.,{w},1.,{w},1.,{w},1.,{w},1.)");
+        var square = model.Add("IFCBSPLINECURVEWITHKNOTS", "1", Points("(0.,0.)", "(40.,0.)", "(40.,20.)", "(0.,20.)", "(0.,0.)"),
+            ".POLYLINE_FORM.", ".T.", ".F.", "(2,1,1,1,2)", "(0.,1.,2.,3.,4.)", ".UNSPECIFIED.");
+        Add(model, "circle", model.Outlines.Profile(circle));
+        Add(model, "square", model.Outlines.Profile(square));
+
+        var reading = Reading.Of(model);
+
+        ProfileReaderTests.AssertAlike(new Round(0.010), Reading.Shape(reading.Named("circle")), 1e-6);
+        ProfileReaderTests.AssertAlike(new Rectangle(0.040, 0.020), Reading.Shape(reading.Named("square")), 1e-8);
+    }
+
+    [Theory]
+    [InlineData("IFCELLIPSE", "$,30.,-10.")]
+    [InlineData("IFCOFFSETCURVE2D", "$,1.,.F.")]
+    [InlineData("IFCBSPLINECURVEWITHKNOTS", "3,(),.UNSPECIFIED.,.T.,.F.,(2),(0.,1.),.UNSPECIFIED.")]
     [InlineData("IFCBSPLINECURVEWITHKNOTS", "2,(),.UNSPECIFIED.,.T.,.F.,(),(),.UNSPECIFIED.")]
     public void Curves_that_are_not_read_are_named(string keyword, string arguments)
     {
@@ -223,8 +280,11 @@ public sealed class DrawnProfileTests
         var reading = Reading.Of(model);
 
         Assert.IsType<Tube>(Reading.Shape(reading.Named("0.01")));
-        Assert.Equal(ReasonCode.SectionNotCovered, Reading.Why(reading.Named("0.2").Section).Code);
+        Assert.StartsWith("outline of 2 edges with a void 60x60 mm", Reading.Shape(reading.Named("0.2")).Designation, StringComparison.Ordinal);
     }
+
+    private static int Line(ModelWriter model, string corners) =>
+        model.Add("IFCPOLYLINE", Bars.Refs([.. corners.Split("),(").Append(corners.Split("),(")[0]).Select(c => model.Add("IFCCARTESIANPOINT", $"({c.Trim('(', ')')})"))]));
 
     private static void Add(ModelWriter model, string name, int profile) => Bars.Add(model, name, model.Bodies.Extrusion(profile, 2), Bars.Askew);
 

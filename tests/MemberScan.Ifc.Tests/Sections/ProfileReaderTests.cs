@@ -104,7 +104,7 @@ public sealed class ProfileReaderTests
     [InlineData("IFCRECTANGLEHOLLOWPROFILEDEF", "60.,40.,20.,$,$", ReasonCode.WallOverRadius)]
     [InlineData("IFCRECTANGLEHOLLOWPROFILEDEF", "60.,40.,4.,4.,25.", ReasonCode.SectionInvalid)]
     [InlineData("IFCRECTANGLEHOLLOWPROFILEDEF", "60.,40.,4.,-1.,8.", ReasonCode.SectionInvalid)]
-    [InlineData("IFCISHAPEPROFILEDEF", "100.,200.,5.,8.,$,$,$", ReasonCode.SectionNotCovered)]
+    [InlineData("IFCISHAPEPROFILEDEF", "100.,200.,5.,-8.,$,$,$", ReasonCode.SectionInvalid)]
     [InlineData("IFCARBITRARYCLOSEDPROFILEDEF", "#1", ReasonCode.DamagedRecord)]
     public void Dimensions_that_make_no_section_end_with_their_reason(string keyword, string dimensions, ReasonCode expected)
     {

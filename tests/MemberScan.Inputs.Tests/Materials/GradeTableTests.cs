@@ -160,9 +160,9 @@ public sealed class GradeTableTests
         var pattern = new Grade("slow", "(a+)+b", "none", [new YieldRange(1, 235e6)], 210e9, 0.3, true, false);
         var table = new GradeTable([pattern]);
 
-        Assert.Null(table.Find(new string('a', GradeTable.LongestName)));
-        Assert.Equal("slow", table.Find(new string('a', GradeTable.LongestName - 1) + "b")?.Name);
-        Assert.Null(table.Find(new string('a', GradeTable.LongestName) + "b"));
+        Assert.Null(table.Find(new string('a', GradePattern.LongestName)));
+        Assert.Equal("slow", table.Find(new string('a', GradePattern.LongestName - 1) + "b")?.Name);
+        Assert.Null(table.Find(new string('a', GradePattern.LongestName) + "b"));
     }
 
     [Fact]

@@ -1,0 +1,88 @@
+using MemberScan.Mechanics.Forces;
+using MemberScan.Mechanics.Sections;
+using MemberScan.Mechanics.Stress;
+using MemberScan.Model.Limits;
+using MemberScan.Model.Verdicts;
+
+namespace MemberScan.Screening.Checking;
+
+/// <summary>Seeks the largest stress along a tapering member: the section is taken at each place.</summary>
+internal sealed class TaperSearch(Taper taper, ShearModel model, SituationChecker.Subject subject, double from, StressLimit limit, int index)
+{
+    /// <summary>Parts into which a stretch between stations is cut before its largest value is closed in upon.</summary>
+    private const int Parts = 16;
+
+    /// <summary>Steps of the golden section; they leave a ten-thousandth of a part.</summary>
+    private const int Steps = 20;
+
+    private Found? _best;
+
+    /// <summary>Brings forces to those that are no rounding of zero.</summary>
+    public delegate SectionForces Cleaning(in SectionForces forces, CrossSection shape);
+
+    /// <summary>The place of largest stress over limit; null where there is no field.</summary>
+    public Found? Of(SituationFindings findings, ForceLine line, Cleaning clean)
+    {
+        foreach (var station in line.Stations) Try(station.X, station.Forces, clean);
+        foreach (var interval in line.Intervals)
+        {
+            if (interval.Kind == IntervalKind.Unknown)
+            {
+                findings.Bar(ReasonCode.StationsTooCoarse, string.Create(System.Globalization.CultureInfo.InvariantCulture, $"between the stations at {from + interval.Start.X:0.###} m and {from + interval.End.X:0.###} m a larger value is possible"));
+                continue;
+            }
+
+            if (interval.Kind == IntervalKind.UniformLoadInferred) findings.Note("uniform load inferred between stations");
+            if (interval.End.X > interval.Start.X) SearchInside(interval, clean);
+        }
+
+        if (_best is null) findings.Bar(ReasonCode.CheckNotEvaluated, "no stress field for the tapering section");
+        return _best;
+    }
+
+    private double Try(double x, in SectionForces forces, Cleaning clean)
+    {
+        var shape = taper.At(Math.Clamp((from + x) / subject.Length, 0, 1));
+        if (!StressField.TryCreate(shape, model, subject.Poisson, out var field, out _)) return 0;
+
+        var cleaned = clean(forces, shape);
+        if (!NumberRange.Holds(shape, field.Properties, cleaned)) return 0;
+
+        var allowed = LimitInForce.Stress(limit, subject.Yield);
+        var point = field.Govern(cleaned, LimitInForce.Measure(limit));
+        if (_best is null || point.Value / allowed > _best.Utilization) _best = new Found(point.Value / allowed, from + x, cleaned, point, field, index);
+        return point.Value;
+    }
+
+    private void SearchInside(ForceInterval interval, Cleaning clean)
+    {
+        double At(double share) => Try(interval.Start.X + share * (interval.End.X - interval.Start.X), interval.At(share), clean);
+
+        var (best, largest) = (0.0, double.NegativeInfinity);
+        for (var i = 0; i <= Parts; i++)
+        {
+            var value = At((double)i / Parts);
+            if (value > largest) (best, largest) = ((double)i / Parts, value);
+        }
+
+        const double Golden = 0.6180339887498949;
+        var (a, b) = (Math.Max(0, best - 1.0 / Parts), Math.Min(1, best + 1.0 / Parts));
+        var (c, d) = (b - Golden * (b - a), a + Golden * (b - a));
+        var (fc, fd) = (At(c), At(d));
+        for (var i = 0; i < Steps; i++)
+        {
+            if (fc >= fd)
+            {
+                (b, d, fd) = (d, c, fc);
+                c = b - Golden * (b - a);
+                fc = At(c);
+            }
+            else
+            {
+                (a, c, fc) = (c, d, fd);
+                d = a + Golden * (b - a);
+                fd = At(d);
+            }
+        }
+    }
+}
