@@ -3,6 +3,7 @@ using MemberScan.Checks;
 using MemberScan.Checks.Stability;
 using MemberScan.Checks.Walls;
 using MemberScan.Mechanics.Forces;
+using MemberScan.Mechanics.Properties;
 using MemberScan.Mechanics.Sections;
 using MemberScan.Mechanics.Stress;
 using MemberScan.Model;
