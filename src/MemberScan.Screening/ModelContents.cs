@@ -60,8 +60,8 @@ internal sealed class ModelContents
         ImmutableArray<ForcesSource> sources =
         [
             ForcesSource.Of("forces table", fromTables, rules, diagnostics),
-            ForcesSource.Of("results in the model", model?.ReadForces(catalog.Members) ?? [], rules, diagnostics),
-            ForcesSource.Of("property sets", model?.ReadForcesInSets(catalog.Members) ?? [], rules, diagnostics),
+            ForcesSource.Of("results in the model", WithTorsion(model?.ReadForces(catalog.Members) ?? [], rules), rules, diagnostics),
+            ForcesSource.Of("property sets", WithTorsion(model?.ReadForcesInSets(catalog.Members) ?? [], rules), rules, diagnostics),
         ];
         CaseCombinations.RefuseUnknown(rules, sources.SelectMany(s => s.All), diagnostics);
         return diagnostics.Items.Any(d => d.Severity == Severity.Error && s_faults.Contains(d.Code))
@@ -88,6 +88,9 @@ internal sealed class ModelContents
         request.ModelName, request.Container, ResultBlock.Sha256(_baseText.Span), _baseText.Length, string.Join(", ", File.Header.Schemas), Model?.SchemaText ?? "not read",
         Model?.ProjectName ?? "", File.Header.OriginatingSystem, File.Header.TimeStamp, File.ReadToEnd && Model is not null,
         Model is null ? [] : [.. Model.Units.Reported.Select(u => new UnitLine(u.UnitType, u.Text, u.Factor ?? 0, u.Source))]);
+
+    private static ImmutableArray<MemberForces> WithTorsion(ImmutableArray<MemberForces> forces, ForceRules rules) =>
+        rules.Torsion == TorsionAxis.NotStated ? forces : [.. forces.Select(f => f with { TorsionAxis = rules.Torsion })];
 
     private static HashSet<string> NamedInTables(ImmutableArray<ForcesTable> tables)
     {

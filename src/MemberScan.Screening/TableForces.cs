@@ -94,6 +94,12 @@ internal sealed class TableForces
             MemberKey = member.Key,
             Situation = SituationOf(rows[0], table),
             Stations = [],
+            TorsionAxis = table.Torsion switch
+            {
+                TorsionReference.Centroid => TorsionAxis.Centroid,
+                TorsionReference.ShearCentre => TorsionAxis.ShearCentre,
+                _ => TorsionAxis.NotStated,
+            },
             Source = source,
         };
         if (!member.Length.TryGet(out var length, out var noLength))

@@ -1,12 +1,14 @@
 using System.Collections.Immutable;
 using System.Runtime.InteropServices;
+using System.Security.Cryptography;
 using MemberScan.Foundation.Diagnostics;
 using MemberScan.Inputs.ForcesTables.Rows;
+using MemberScan.Inputs.ForcesTables.Workbooks;
 using MemberScan.Model.Rules;
 
 namespace MemberScan.Inputs.ForcesTables;
 
-/// <summary>A table of section forces beside the model: CSV, UTF-8, units in the header.</summary>
+/// <summary>A table of section forces beside the model: CSV in UTF-8, or a sheet of an .xlsx workbook; units in the header.</summary>
 /// <remarks>
 /// Header <c>member,situation,kind,station[m],N[kN],Vy[kN],Vz[kN],T[kNm],My[kNm],Mz[kNm]</c>, columns in any order, <c>station[%]</c> for a
 /// share of the length; <c>kind</c> may be left out. Lines that begin with <c>#</c> are remarks, save the directives
@@ -65,9 +67,22 @@ public sealed record ForcesTable
     {
         ArgumentNullException.ThrowIfNull(fileName);
         ArgumentNullException.ThrowIfNull(diagnostics);
+        if (WorkbookText.IsWorkbook(bytes.Span)) return ReadWorkbook(bytes, fileName, diagnostics, limits);
+
         var stream = MemoryMarshal.TryGetArray(bytes, out var array) ? new MemoryStream(array.Array!, array.Offset, array.Count, writable: false) : new MemoryStream(bytes.ToArray(), writable: false);
         var rows = ImmutableArray.CreateBuilder<ForcesRow>();
         return Stream(stream, fileName, diagnostics, limits, (in ForcesRow row) => rows.Add(row)) is { } table ? table with { Rows = rows.DrainToImmutable() } : null;
+    }
+
+    // The text of the sheet is read as any other; its findings go back to the cells.
+    private static ForcesTable? ReadWorkbook(ReadOnlyMemory<byte> bytes, string fileName, DiagnosticList diagnostics, TableLimits limits)
+    {
+        if (WorkbookText.Read(bytes, fileName, diagnostics, WorkbookLimits.Default) is not { } text) return null;
+
+        var found = new DiagnosticList();
+        var table = Read(text, fileName, found, limits);
+        WorkbookFindings.Add(found, text, diagnostics);
+        return table is null ? null : table with { Sha256 = Convert.ToHexStringLower(SHA256.HashData(bytes.Span)) };
     }
 
     private static ForcesTable? Stream(Stream stream, string fileName, DiagnosticList diagnostics, TableLimits limits, ForcesRowSink sink)

@@ -35,6 +35,7 @@ internal static class EffectiveSettings
         Add("forces.missingComponents", SettingKeys.MissingComponents.WordOf(forces.MissingComponentsAreZero));
         Add("forces.unknownMembers", SettingKeys.UnknownMembers.WordOf(forces.ListUnknownMembers));
         AddAll("forces.kinds", forces.Kinds.Select((kind, i) => ($"[{i + 1}]", $"{Quoted(kind.Pattern)} {SettingKeys.Kinds.WordOf(kind.Kind)}")));
+        Add("forces.torsion", ForceKeys.TorsionAxes.WordOf(forces.Torsion));
         Add("forces.missingCoefficients", ForceKeys.MissingCoefficients.WordOf(forces.MissingCoefficientsAreOne));
         Add("forces.caseCoefficients", ForceKeys.CaseCoefficientWords.WordOf(forces.CaseCoefficients));
         AddAll("forces.combinations", forces.Combinations.Select((combination, i) => ($"[{i + 1}]", ForceTexts.Of(combination))));

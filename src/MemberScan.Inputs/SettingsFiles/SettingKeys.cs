@@ -21,7 +21,7 @@ internal static class SettingKeys
     public static readonly ImmutableArray<string> Forces =
     [
         "convention", "components", "turnDegrees", "turnDegreesByMember", "missingComponents", "unknownMembers", "kinds",
-        "missingCoefficients", "caseCoefficients", "combinations", "combinationSets", "caseTags", "propertySets",
+        "torsion", "missingCoefficients", "caseCoefficients", "combinations", "combinationSets", "caseTags", "propertySets",
     ];
     public static readonly ImmutableArray<string> KindEntry = ["pattern", "kind"];
     public static readonly ImmutableArray<string> Materials = ["grades", "poisson"];

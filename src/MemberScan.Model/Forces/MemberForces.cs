@@ -28,6 +28,9 @@ public sealed record MemberForces
     /// <summary>Where the stations must end [m]; null for the member's end.</summary>
     public double? To { get; init; }
 
+    /// <summary>The line about which T is taken.</summary>
+    public TorsionAxis TorsionAxis { get; init; }
+
     /// <summary>Least and largest values, in rising order of places, where the source is named an envelope; empty otherwise.</summary>
     public ImmutableArray<EnvelopeStation> Envelope { get; init; } = [];
 

@@ -36,6 +36,7 @@ public static class Superposition
             Stations = [],
             Source = Sources(parts),
             Conversion = $"{string.Join(" + ", parts.Select(p => p.Words))} ({rule})" + Conversions(parts),
+            TorsionAxis = parts.All(p => p.Forces.TorsionAxis == first.TorsionAxis) ? first.TorsionAxis : TorsionAxis.NotStated,
             From = parts.Min(p => p.Forces.From),
             To = parts.Any(p => p.Forces.To is null) ? null : parts.Max(p => p.Forces.To),
             Notes = [.. parts.SelectMany(p => p.Forces.Notes).Distinct(StringComparer.Ordinal)],

@@ -15,6 +15,9 @@ public sealed record ForceRules
     /// <summary>Axes of results in the model.</summary>
     public ForceComponents Components { get; init; } = ForceComponents.AsFlagged;
 
+    /// <summary>The line about which T is taken in results of the model and in property sets.</summary>
+    public TorsionAxis Torsion { get; init; } = TorsionAxis.NotStated;
+
     /// <summary>Turn about x from the member's own axes to the axes of the stored components [degree].</summary>
     public double TurnDegrees { get; init; }
 

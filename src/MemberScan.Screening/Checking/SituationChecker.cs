@@ -67,7 +67,7 @@ internal sealed class SituationChecker(SectionLibrary library, Basis basis, doub
             CheckStability(findings, line, properties, subject, Math.Max(subject.Length, (forces.To ?? 0) - forces.From));
             var states = isEnvelope ? forces.Envelope.SelectMany(e => e.Corners()) : line.Stations.Select(s => s.Forces);
             foreach (var state in states) CheckWalls(findings, shape, properties, Cleaned(state, shape), subject);
-            if (findings.Limit is not { } limit) continue;
+            if (findings.Limit is not { } limit || AboutShearCentre.Of(findings, forces, shape, properties) is not { } moved) continue;
             if (isEnvelope)
             {
                 findings.Elementary = Found.Larger(findings.Elementary, SearchEnvelope(findings, shape, ShearModel.Elementary, subject, limit, index));
@@ -75,8 +75,8 @@ internal sealed class SituationChecker(SectionLibrary library, Basis basis, doub
             }
             else
             {
-                findings.Elementary = Found.Larger(findings.Elementary, Search(findings, line, shape, ShearModel.Elementary, subject, forces.From, limit, index));
-                findings.Elasticity = Found.Larger(findings.Elasticity, Search(findings, line, shape, ShearModel.Elasticity, subject, forces.From, limit, index));
+                findings.Elementary = Found.Larger(findings.Elementary, Search(findings, ReferenceEquals(moved, forces) ? line : Line(moved, subject.Length), shape, ShearModel.Elementary, subject, forces.From, limit, index));
+                findings.Elasticity = Found.Larger(findings.Elasticity, Search(findings, ReferenceEquals(moved, forces) ? line : Line(moved, subject.Length), shape, ShearModel.Elasticity, subject, forces.From, limit, index));
             }
         }
 

@@ -23,11 +23,11 @@ internal static class SourceConflicts
     {
         if (other.Forces.Count == 0) yield break;
 
-        yield return $"{other.Name} are not used for this member: the {used.Name} comes first";
+        yield return $"{other.Name} are not used for this member: the {used.Name} {(used.Name == "forces table" ? "comes" : "come")} first";
         var byName = used.Forces.GroupBy(f => f.Situation.Name, StringComparer.Ordinal).ToDictionary(g => g.Key, g => g.First(), StringComparer.Ordinal);
         var only = other.Forces.Where(f => !byName.ContainsKey(f.Situation.Name)).Select(f => $"'{f.Situation.Name}'").Distinct(StringComparer.Ordinal).ToList();
         if (only.Count > 0)
-            yield return string.Create(CultureInfo.InvariantCulture, $"{other.Name} have {only.Count} {(only.Count == 1 ? "situation" : "situations")} that the {used.Name} does not have: {string.Join(", ", only.Take(Named))}{(only.Count > Named ? ", …" : "")}");
+            yield return string.Create(CultureInfo.InvariantCulture, $"{other.Name} have {only.Count} {(only.Count == 1 ? "situation" : "situations")} that the {used.Name} {(used.Name == "forces table" ? "does" : "do")} not have: {string.Join(", ", only.Take(Named))}{(only.Count > Named ? ", …" : "")}");
 
         foreach (var entry in other.Forces)
             if (byName.TryGetValue(entry.Situation.Name, out var own) && Difference(member, own, entry) is { } words)

@@ -119,6 +119,7 @@ public sealed class ForcesTableTests
         { Rows("A;B;;0;0;0;0;0;0"), "INP-0009", 2, 1, "the row has 1 fields, the header 10" },
         { Rows("A,B,,0,0,0,0,0,0,0").Replace(',', ';').Replace("A;", "A;;", StringComparison.Ordinal), "INP-0009", 2, 19, "the row has 11 fields, the header 10" },
         { "# situations: envelope\n" + Rows("A,B,,0,0,0,0,0,0,0"), "INP-0019", 1, 1, "'envelope' is not a value of the directive 'situations'; did you mean 'envelopes'?" },
+        { Rows("\"A\",\"B\",,0,0,0,0,0,0,0\n,B,,0,0,0,0,0,0,0"), "INP-0010", 3, 1, "the field 'member' is empty; name the member" },
         { "# results: nonlinear\n" + Rows("A,B,,0,0,0,0,0,0,0"), "INP-0019", 1, 1, "'nonlinear' is not a value of the directive 'results'; did you mean 'linear'?" },
         { "# situations: envelopes\n# situations: load-cases\n" + Rows("A,B,,0,0,0,0,0,0,0"), "INP-0020", 2, 1, "the directive 'situations' says load-cases here and envelopes above; keep one of the two" },
         { Rows("A,B,,0,0x1F,0,0,0,0,0"), "INP-0011", 2, 8, "N is '0x1F', which is not a number; write digits with a decimal point, such as -12.5 or 3e-2" },

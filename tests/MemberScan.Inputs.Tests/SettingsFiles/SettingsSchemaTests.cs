@@ -47,6 +47,7 @@ public sealed class SettingsSchemaTests
         Assert.Equal(SettingKeys.MissingComponents.Words, Words("forces", "missingComponents"));
         Assert.Equal(SettingKeys.UnknownMembers.Words, Words("forces", "unknownMembers"));
         Assert.Equal(SettingKeys.Kinds.Words, Words("forces", "kinds", "kind"));
+        Assert.Equal(ForceKeys.TorsionAxes.Words, Words("forces", "torsion"));
         Assert.Equal(ForceKeys.MissingCoefficients.Words, Words("forces", "missingCoefficients"));
         Assert.Equal(ForceKeys.CaseCoefficientWords.Words, Words("forces", "caseCoefficients"));
         Assert.Equal(ForceKeys.Tags.Words, Words("forces", "caseTags", "tag"));

@@ -18,7 +18,7 @@ internal sealed class NameTable
     /// <summary>The number of a spelling that was met before.</summary>
     public bool TryFind(ReadOnlySpan<byte> spelling, out int number) => _byBytes.GetAlternateLookup<ReadOnlySpan<byte>>().TryGetValue(spelling, out number);
 
-    /// <summary>Takes in a spelling of a name; the same name may be spelt with and without quotes.</summary>
+    /// <summary>Takes in a name with its spelling, empty where it is quoted: the same name may be spelt in several ways.</summary>
     public int Add(ReadOnlySpan<byte> spelling, string name)
     {
         if (!_byText.TryGetValue(name, out var number))
@@ -28,7 +28,7 @@ internal sealed class NameTable
         }
 
         // Spellings are kept for speed only: not more of them than a few for each name.
-        if (_byBytes.Count < 4 * _names.Count) _byBytes[spelling.ToArray()] = number;
+        if (!spelling.IsEmpty && _byBytes.Count < 4 * _names.Count) _byBytes[spelling.ToArray()] = number;
         return number;
     }
 

@@ -1,4 +1,5 @@
 using System.Collections.Immutable;
+using MemberScan.Model.Forces;
 using MemberScan.Model.Rules.Combinations;
 using MemberScan.Model.Rules.PropertySets;
 
@@ -17,6 +18,8 @@ internal static class ForceKeys
     public static readonly (double Least, double Most) CaseFactor = (-100, 100);
     public static readonly (double Least, double Most) StationWord = (0, 100);
 
+    public static readonly WordTable<TorsionAxis> TorsionAxes =
+        new(("not-stated", TorsionAxis.NotStated), ("centroid", TorsionAxis.Centroid), ("shear-centre", TorsionAxis.ShearCentre));
     public static readonly WordTable<bool> MissingCoefficients = new(("refuse", false), ("one", true));
     public static readonly WordTable<CaseCoefficients> CaseCoefficientWords =
         new(("refuse", CaseCoefficients.Refuse), ("in-results", CaseCoefficients.InResults), ("not-in-results", CaseCoefficients.NotInResults));

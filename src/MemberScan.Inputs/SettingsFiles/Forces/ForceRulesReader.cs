@@ -22,6 +22,7 @@ internal sealed class ForceRulesReader(JsonValues values, ISet<string> given)
                 "turnDegreesByMember" => rules with { TurnDegreesByMember = Turns(value, path) },
                 "missingComponents" => rules with { MissingComponentsAreZero = Choose(value, path, SettingKeys.MissingComponents) },
                 "unknownMembers" => rules with { ListUnknownMembers = Choose(value, path, SettingKeys.UnknownMembers) },
+                "torsion" => rules with { Torsion = Choose(value, path, ForceKeys.TorsionAxes) },
                 "missingCoefficients" => rules with { MissingCoefficientsAreOne = Choose(value, path, ForceKeys.MissingCoefficients) },
                 "caseCoefficients" => rules with { CaseCoefficients = Choose(value, path, ForceKeys.CaseCoefficientWords) },
                 "combinations" => rules with { Combinations = new CombinationReader(values).Combinations(value, path) },

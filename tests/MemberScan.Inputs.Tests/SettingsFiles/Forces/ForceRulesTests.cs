@@ -14,7 +14,7 @@ public sealed class ForceRulesTests
     public void Combinations_sets_and_tags_are_read_and_shown()
     {
         var settings = Read("""
-            {"forces": {"missingCoefficients": "one", "caseCoefficients": "in-results", "convention": "detect",
+            {"forces": {"missingCoefficients": "one", "caseCoefficients": "in-results", "convention": "detect", "torsion": "centroid",
              "combinations": [{"name": "ULS 1", "kind": "design", "factors": {"Q": 1.5, "G": 1.35}}],
              "combinationSets": ["en1990-6.10", "asce7-22-2.4"],
              "caseTags": [{"pattern": "G*", "tag": "permanent"}, {"pattern": "Snow", "tag": "snow"}]}}
@@ -23,6 +23,7 @@ public sealed class ForceRulesTests
 
         Assert.True(forces.MissingCoefficientsAreOne);
         Assert.Equal((CaseCoefficients.InResults, ForceConvention.Detect), (forces.CaseCoefficients, forces.Convention));
+        Assert.Equal(TorsionAxis.Centroid, forces.Torsion);
         var combination = Assert.Single(forces.Combinations);
         Assert.Equal(("ULS 1", SituationKind.Design, "settings"), (combination.Name, combination.Kind, combination.Rule));
         Assert.Equal([new CaseFactor("Q", 1.5), new CaseFactor("G", 1.35)], combination.Factors);
