@@ -1,8 +1,10 @@
 using System.Collections.Immutable;
 using MemberScan.Foundation.Diagnostics;
 using MemberScan.Ifc.Analysis;
+using MemberScan.Ifc.Analysis.Loads;
 using MemberScan.Ifc.Bodies;
 using MemberScan.Ifc.Curves;
+using MemberScan.Ifc.ForceSets;
 using MemberScan.Ifc.Geometry;
 using MemberScan.Ifc.Materials;
 using MemberScan.Ifc.Members;
@@ -25,6 +27,7 @@ public sealed class IfcModel
     private readonly PlacementReader _placements;
     private readonly UnitReader _unitReader;
     private readonly AnalyticalMemberReader _analytical;
+    private readonly Lazy<ForceSetReader> _forceSets;
     private readonly ReadingRules _rules;
     private readonly DiagnosticList _diagnostics;
 
@@ -36,6 +39,7 @@ public sealed class IfcModel
         Units = ModelUnits.Read(_instances, _unitReader, rules, diagnostics);
         _relations = new Relations(_instances);
         _placements = new PlacementReader(_instances, Units);
+        _forceSets = new Lazy<ForceSetReader>(() => new ForceSetReader(_instances, Units, _unitReader, rules.Forces));
         _analytical = new AnalyticalMemberReader(_instances, _relations, _placements, Units, schema, diagnostics);
     }
 
@@ -81,8 +85,22 @@ public sealed class IfcModel
     /// <summary>Reads the section forces of candidates from the model's result groups.</summary>
     public ImmutableArray<MemberForces> ReadForces(ImmutableArray<Member> members)
     {
-        var reactions = new ReactionReader(_instances, _placements, Units, _rules.Forces, _diagnostics);
+        var places = new ActivityPlaces(_instances, _placements, Units);
+        var reactions = new ReactionReader(_instances, places, Units, _rules.Forces, _diagnostics);
         var situations = new SituationReader(_instances, _rules.Forces);
-        return new ModelForcesReader(_instances, _relations, _analytical, reactions, situations, _diagnostics).Read(members);
+        var tree = new LoadTree(_instances, _rules.Forces);
+        var loads = new SituationLoads(_instances, tree, new MemberLoadReader(_instances, _relations, places, tree, Units, Schema));
+        var combinations = new CombinedForces(_instances, tree, situations, _diagnostics);
+        return new ModelForcesReader(_instances, _relations, _analytical, reactions, situations, loads, combinations, _diagnostics).Read(members);
     }
+
+    /// <summary>Whether an element has a property set that the settings map to section forces.</summary>
+    public bool HasForcesInSets(ElementIdentity element)
+    {
+        ArgumentNullException.ThrowIfNull(element);
+        return _forceSets.Value.HasForces(element.StepId);
+    }
+
+    /// <summary>Reads the section forces of candidates from their property sets, through the mappings of the settings.</summary>
+    public ImmutableArray<MemberForces> ReadForcesInSets(ImmutableArray<Member> members) => _forceSets.Value.Read(members);
 }

@@ -27,6 +27,9 @@ internal static class InputCodes
     public const string TableLimit = "INP-0022";
     public const string TooManyErrors = "INP-0023";
     public const string ControlCharacter = "INP-0024";
+    public const string Workbook = "INP-0025";
+    public const string WorkbookRead = "INP-0026";
+    public const string WorkbookCell = "INP-0027";
 
     public const string NotJson = "INP-0101";
     public const string KeyUnknown = "INP-0102";

@@ -11,23 +11,22 @@ using MemberScan.Model.Rules;
 using MemberScan.Model.Verdicts;
 using MemberScan.Part21;
 using MemberScan.Screening.Record;
+using MemberScan.Screening.Sources;
 
 namespace MemberScan.Screening;
 
 /// <summary>A model as read: its candidates and their forces from model and tables. What screening and readiness both begin with.</summary>
 internal sealed class ModelContents
 {
-    private readonly Dictionary<string, List<MemberForces>> _fromTables;
-    private readonly ILookup<string, MemberForces> _fromModel;
+    private static readonly string[] s_faults =
+        ["SCR-0001", "SCR-0002", "SCR-0003", "SCR-0004", "SCR-0007", "SCR-0009", "SCR-0010", "SCR-0011"];
+
+    private readonly ImmutableArray<ForcesSource> _sources;
     private readonly ReadOnlyMemory<byte> _baseText;
 
     private ModelContents(
-        IfcModel? model, Part21File file, ReadOnlyMemory<byte> baseText, MemberCatalog catalog, ImmutableArray<MemberForces> fromModel,
-        Dictionary<string, List<MemberForces>> fromTables, ImmutableArray<ForcesFile> files)
-    {
-        (Model, File, _baseText, Catalog, Files, _fromTables) = (model, file, baseText, catalog, files, fromTables);
-        _fromModel = fromModel.ToLookup(f => f.MemberKey, StringComparer.Ordinal);
-    }
+        IfcModel? model, Part21File file, ReadOnlyMemory<byte> baseText, MemberCatalog catalog, ImmutableArray<ForcesSource> sources, ImmutableArray<ForcesFile> files) =>
+        (Model, File, _baseText, Catalog, Files, _sources) = (model, file, baseText, catalog, files, sources);
 
     /// <summary>The model; null when its schema is not read.</summary>
     public IfcModel? Model { get; }
@@ -55,14 +54,21 @@ internal sealed class ModelContents
         cancellation.ThrowIfCancellationRequested();
         var model = IfcModel.Open(file, request.Settings.Reading, diagnostics);
         var named = NamedInTables(request.Tables);
-        var catalog = model?.ReadMembers(element => named.Contains(element.GlobalId) || named.Contains(element.Tag)) ?? new MemberCatalog([], []);
+        var catalog = model?.ReadMembers(element => named.Contains(element.GlobalId) || named.Contains(element.Tag) || model.HasForcesInSets(element)) ?? new MemberCatalog([], []);
 
         progress?.Report(new("forces", 0));
-        var fromModel = Usable(model?.ReadForces(catalog.Members) ?? [], catalog.Members);
         var (fromTables, files) = ReadTables(request, catalog, diagnostics);
-        return diagnostics.Items.Any(d => d is { Severity: Severity.Error, Code: "SCR-0001" or "SCR-0002" or "SCR-0003" or "SCR-0004" or "SCR-0007" })
+        var rules = request.Settings.Reading.Forces;
+        ImmutableArray<ForcesSource> sources =
+        [
+            ForcesSource.Of("forces table", fromTables, rules, diagnostics),
+            ForcesSource.Of("results in the model", WithTorsion(Usable(model?.ReadForces(catalog.Members) ?? [], catalog.Members), rules), rules, diagnostics),
+            ForcesSource.Of("property sets", WithTorsion(model?.ReadForcesInSets(catalog.Members) ?? [], rules), rules, diagnostics),
+        ];
+        CaseCombinations.RefuseUnknown(rules, sources.SelectMany(s => s.All), diagnostics);
+        return diagnostics.Items.Any(d => d.Severity == Severity.Error && s_faults.Contains(d.Code))
             ? null
-            : new ModelContents(model, file, stripped.Base, catalog, fromModel, fromTables, files);
+            : new ModelContents(model, file, stripped.Base, catalog, sources, files);
     }
 
     /// <summary>Results of the model are not used where they are tied to a line beside the section's centroid: about which they are is not said.</summary>
@@ -78,15 +84,18 @@ internal sealed class ModelContents
         })];
     }
 
-    /// <summary>The forces that are used for a candidate: those of tables before those of the model.</summary>
+    /// <summary>The forces that are used for a candidate: of the first source that has any, with the combinations of its load cases.</summary>
     /// <param name="member">The candidate.</param>
     /// <param name="notes">What a reader must know of the choice.</param>
     public IReadOnlyList<MemberForces> ForcesOf(Member member, out IReadOnlyList<string> notes)
     {
-        var inModel = _fromModel[member.Key].ToList();
-        var hasTable = _fromTables.TryGetValue(member.Key, out var inTables);
-        notes = hasTable && inModel.Count > 0 ? ["results in the model are not used for this member: the forces table comes first"] : [];
-        return hasTable ? inTables! : inModel;
+        notes = [];
+        var first = _sources.FirstOrDefault(s => s.Of(member).Count > 0);
+        if (first is null) return [];
+
+        var used = first.Of(member);
+        notes = [.. _sources.Where(s => s != first).SelectMany(s => SourceConflicts.Notes(member, (used, first.Name), (s.Of(member), s.Name)))];
+        return first.Combinations.With(member, used);
     }
 
     /// <summary>What names the model and how it was read.</summary>
@@ -94,6 +103,9 @@ internal sealed class ModelContents
         request.ModelName, request.Container, ResultBlock.Sha256(_baseText.Span), _baseText.Length, string.Join(", ", File.Header.Schemas), Model?.SchemaText ?? "not read",
         Model?.ProjectName ?? "", File.Header.OriginatingSystem, File.Header.TimeStamp, File.ReadToEnd && Model is not null,
         Model is null ? [] : [.. Model.Units.Reported.Select(u => new UnitLine(u.UnitType, u.Text, u.Factor ?? 0, u.Source))]);
+
+    private static ImmutableArray<MemberForces> WithTorsion(ImmutableArray<MemberForces> forces, ForceRules rules) =>
+        rules.Torsion == TorsionAxis.NotStated ? forces : [.. forces.Select(f => f with { TorsionAxis = rules.Torsion })];
 
     private static HashSet<string> NamedInTables(ImmutableArray<ForcesTable> tables)
     {
@@ -108,12 +120,13 @@ internal sealed class ModelContents
         return named;
     }
 
-    private static (Dictionary<string, List<MemberForces>> Forces, ImmutableArray<ForcesFile> Files) ReadTables(
+    private static (ImmutableArray<MemberForces> Forces, ImmutableArray<ForcesFile> Files) ReadTables(
         ScreeningRequest request, MemberCatalog catalog, DiagnosticList diagnostics)
     {
-        var byMember = new Dictionary<string, List<MemberForces>>(StringComparer.Ordinal);
+        var all = ImmutableArray.CreateBuilder<MemberForces>();
+        var earlier = new Dictionary<(string Member, string Situation), MemberForces>();
         var files = ImmutableArray.CreateBuilder<ForcesFile>();
-        if (request.Tables.IsEmpty) return (byMember, []);
+        if (request.Tables.IsEmpty) return ([], []);
 
         var reader = new TableForces(catalog.Members, request.Settings.Reading.Forces, diagnostics);
         foreach (var table in request.Tables)
@@ -121,10 +134,9 @@ internal sealed class ModelContents
             var (forces, unknown) = reader.Read(table);
             foreach (var entry in forces)
             {
-                if (!byMember.TryGetValue(entry.MemberKey, out var list)) byMember[entry.MemberKey] = list = [];
-                if (list.Find(f => f.Situation.Name == entry.Situation.Name) is { } earlier)
-                    diagnostics.Add("SCR-0007", Severity.Error, $"Situation '{entry.Situation.Name}' of '{entry.MemberKey}' stands in two places: {earlier.Source} and {entry.Source}; give it once.");
-                list.Add(entry);
+                if (!earlier.TryAdd((entry.MemberKey, entry.Situation.Name), entry))
+                    diagnostics.Add("SCR-0007", Severity.Error, $"Situation '{entry.Situation.Name}' of '{entry.MemberKey}' stands in two places: {earlier[(entry.MemberKey, entry.Situation.Name)].Source} and {entry.Source}; give it once.");
+                all.Add(entry);
             }
 
             var convention = table.Convention switch
@@ -136,6 +148,6 @@ internal sealed class ModelContents
             files.Add(new ForcesFile(table.FileName, table.Sha256, table.Rows.Length, unknown, convention));
         }
 
-        return (byMember, files.ToImmutable());
+        return (all.ToImmutable(), files.ToImmutable());
     }
 }

@@ -3,8 +3,9 @@ using BenchmarkDotNet.Running;
 using MemberScan.Benchmarks.Meshes;
 using MemberScan.Benchmarks.Models;
 using MemberScan.Benchmarks.Question;
+using MemberScan.Benchmarks.Tables;
 
-// generate NAME FILE | question FILE [THREADS] | checked FILE | pass FILE THREADS | scan FILE | append FILE TARGET [disk] | meshes; anything else goes to
+// generate NAME FILE | forces-table generate FILE ROWS MEMBERS | forces-table read FILE ROUNDS | question FILE [THREADS] | checked FILE | pass FILE THREADS | scan FILE | append FILE TARGET [disk] | meshes; anything else goes to
 // BenchmarkDotNet. compare.sh measures them beside other programs.
 return args switch
 {
@@ -14,6 +15,8 @@ return args switch
     ["pass", var path, var threads] => IndexedQuestion.Pass(path, int.Parse(threads, CultureInfo.InvariantCulture)),
     ["append", var path, var target] => AppendedSets.Write(path, target, toDisk: false),
     ["append", var path, var target, "disk"] => AppendedSets.Write(path, target, toDisk: true),
+    ["forces-table", "generate", var path, var rows, var members] => GenerateTable(path, rows, members),
+    ["forces-table", "read", var path, var rounds] => ForcesTableRun.Read(path, int.Parse(rounds, CultureInfo.InvariantCulture)),
     ["scan", var path] => MaskScan.Run(path),
     ["meshes"] => MeshRecognition.Run(),
     ["checked", var path] => Print(CheckedQuestion.Ask(path)),
@@ -24,6 +27,12 @@ static int Generate(string name, string path)
 {
     using var file = new FileStream(path, FileMode.Create, FileAccess.Write, FileShare.None, 1 << 20);
     LandingModel.Write(ModelRecipe.Named(name), file);
+    return 0;
+}
+
+static int GenerateTable(string path, string rows, string members)
+{
+    ForcesTableModel.Write(path, int.Parse(rows, CultureInfo.InvariantCulture), int.Parse(members, CultureInfo.InvariantCulture));
     return 0;
 }
 

@@ -9,7 +9,7 @@ internal static class ScreenCommand
     public static Command Build()
     {
         var model = new Argument<string>("MODEL") { Description = "The model: .ifc, .ifczip or .gz (IFC2X3, IFC4, IFC4X3)." };
-        var forces = new Option<string[]>("--forces") { Description = "A forces table (CSV with units in its header); may be given several times.", HelpName = "FILE" };
+        var forces = new Option<string[]>("--forces") { Description = "A forces table (CSV or .xlsx, units in its header); may be given several times.", HelpName = "FILE" };
         var settings = new Option<string?>("--settings") { Description = "A settings file (JSON with comments).", HelpName = "FILE" };
         var kind = new Option<string?>("--kind") { Description = "Kind of every situation that nothing else tells.", HelpName = "service|design" };
         kind.AcceptOnlyFromAmong("service", "design");

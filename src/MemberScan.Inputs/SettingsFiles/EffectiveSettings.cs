@@ -4,6 +4,7 @@ using System.Text.Encodings.Web;
 using System.Text.Json;
 using MemberScan.Foundation.Units;
 using MemberScan.Inputs.Materials;
+using MemberScan.Inputs.SettingsFiles.Forces;
 using MemberScan.Model.Forces;
 using MemberScan.Model.Limits;
 using MemberScan.Model.Rules;
@@ -34,6 +35,13 @@ internal static class EffectiveSettings
         Add("forces.missingComponents", SettingKeys.MissingComponents.WordOf(forces.MissingComponentsAreZero));
         Add("forces.unknownMembers", SettingKeys.UnknownMembers.WordOf(forces.ListUnknownMembers));
         AddAll("forces.kinds", forces.Kinds.Select((kind, i) => ($"[{i + 1}]", $"{Quoted(kind.Pattern)} {SettingKeys.Kinds.WordOf(kind.Kind)}")));
+        Add("forces.torsion", ForceKeys.TorsionAxes.WordOf(forces.Torsion));
+        Add("forces.missingCoefficients", ForceKeys.MissingCoefficients.WordOf(forces.MissingCoefficientsAreOne));
+        Add("forces.caseCoefficients", ForceKeys.CaseCoefficientWords.WordOf(forces.CaseCoefficients));
+        AddAll("forces.combinations", forces.Combinations.Select((combination, i) => ($"[{i + 1}]", ForceTexts.Of(combination))));
+        Add("forces.combinationSets", Listed([.. forces.CombinationSets.Select(ForceKeys.Sets.WordOf)]));
+        AddAll("forces.caseTags", forces.CaseTags.Select((tag, i) => ($"[{i + 1}]", $"{Quoted(tag.Pattern)} {ForceKeys.Tags.WordOf(tag.Tag)}")));
+        AddAll("forces.propertySets", forces.PropertySets.Select((mapping, i) => ($"[{i + 1}]", ForceTexts.Of(mapping))));
         lines.Add(new EffectiveSetting("forces.kindOfAll", KindOfAll(forces.KindOfAll), forces.KindOfAll == SituationKind.Unknown));
         foreach (var type in SettingKeys.UnitTypes)
             Add($"units.{type}", settings.Reading.MissingUnits.TryGetValue(type, out var factor) ? $"{Number(factor)} {SiUnit(type)}" : None);
@@ -99,7 +107,7 @@ internal static class EffectiveSettings
         _ => "Pa",
     };
 
-    private static string Number(double value) => value.ToString("R", CultureInfo.InvariantCulture);
+    internal static string Number(double value) => value.ToString("R", CultureInfo.InvariantCulture);
 
-    private static string Quoted(string text) => $"\"{JsonEncodedText.Encode(text, JavaScriptEncoder.UnsafeRelaxedJsonEscaping)}\"";
+    internal static string Quoted(string text) => $"\"{JsonEncodedText.Encode(text, JavaScriptEncoder.UnsafeRelaxedJsonEscaping)}\"";
 }

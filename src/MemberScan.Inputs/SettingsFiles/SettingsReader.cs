@@ -3,6 +3,7 @@ using System.Collections.Immutable;
 using System.Text.Json;
 using MemberScan.Inputs.Json;
 using MemberScan.Inputs.Materials;
+using MemberScan.Inputs.SettingsFiles.Forces;
 using MemberScan.Inputs.Values;
 using MemberScan.Model.Limits;
 using MemberScan.Model.Rules;

@@ -49,6 +49,7 @@ internal sealed class SituationChecker(SectionLibrary library, Basis basis, doub
     public SituationFindings Check(Subject subject, MemberForces forces, int index)
     {
         var findings = new SituationFindings(forces);
+        foreach (var note in forces.Notes) findings.Note(note);
         if (forces.Unusable is { } unusable)
         {
             findings.Bar(unusable);
@@ -75,11 +76,15 @@ internal sealed class SituationChecker(SectionLibrary library, Basis basis, doub
         if (shape is OpenProfile or OutlineSection && forces.Stations.Any(s => s.Forces is not { My: 0, Mz: 0 }))
             findings.Note("bending of an open or general section: lateral-torsional buckling is not covered");
         CheckStability(findings, line, properties, subject, Math.Max(subject.Length, (forces.To ?? 0) - forces.From));
-        foreach (var station in line.Stations) CheckWalls(findings, shape, properties, Cleaned(station.Forces, shape), subject);
-        if (findings.Limit is not { } limit) return;
+        var isEnvelope = !forces.Envelope.IsEmpty;
+        if (isEnvelope) findings.Note(EnvelopeSearch.Note);
+        var states = isEnvelope ? forces.Envelope.SelectMany(e => e.Corners()) : line.Stations.Select(s => s.Forces);
+        foreach (var state in states) CheckWalls(findings, shape, properties, Cleaned(state, shape), subject);
+        if (findings.Limit is not { } limit || isEnvelope && !shearIsKnown) return;
 
         var search = new SearchIn(line, shape, subject, forces.From, limit, index, shearIsKnown);
-        var (elementary, elasticity) = (Search(findings, search, ShearModel.Elementary), Search(findings, search, ShearModel.Elasticity));
+        Found? Largest(ShearModel model) => isEnvelope ? SearchEnvelope(findings, search, model) : Search(findings, search, model);
+        var (elementary, elasticity) = (Largest(ShearModel.Elementary), Largest(ShearModel.Elasticity));
         if (elementary is null && elasticity is null)
             findings.Bar(ReasonCode.CheckNotEvaluated, $"no stress field for {shape.Designation}: {library.Field(shape, ShearModel.Elasticity, subject.Poisson).WhyNot}");
         findings.Elementary = Found.Larger(findings.Elementary, elementary);
@@ -92,6 +97,12 @@ internal sealed class SituationChecker(SectionLibrary library, Basis basis, doub
     /// </summary>
     private void CheckTaper(SituationFindings findings, Subject subject, MemberForces forces, Taper taper, int index)
     {
+        if (!forces.Envelope.IsEmpty)
+        {
+            findings.Bar(ReasonCode.SectionNotCovered, $"'{forces.Situation.Name}' is an envelope, which is not evaluated along a tapering member");
+            return;
+        }
+
         findings.Note("tapered: stresses of a straight bar with the section of each place; the shear that the taper itself causes is not counted");
         var line = Line(forces, forces.Stations, subject.Length);
         if (!line.ReachesBothEnds) findings.Bar(ReasonCode.StationsTooCoarse, $"the stations of '{forces.Situation.Name}' do not reach both ends of the member");
@@ -162,6 +173,11 @@ internal sealed class SituationChecker(SectionLibrary library, Basis basis, doub
         if (SlenderWall.Check(shape, properties, forces, yield) is CheckResult.NotEvaluated slender) findings.Bar(slender.Why);
     }
 
+    private Found? SearchEnvelope(SituationFindings findings, SearchIn given, ShearModel model) =>
+        library.Field(given.Shape, model, given.Subject.Poisson).Field is { } field
+            ? EnvelopeSearch.Largest(findings, findings.Forces.Envelope, field, LimitInForce.Measure(given.Limit), LimitInForce.Stress(given.Limit, given.Subject.Yield), given.Index)
+            : null;
+
     private Found? Search(SituationFindings findings, SearchIn given, ShearModel model)
     {
         var (line, shape, subject, from, limit, index, shearIsKnown) = given;
@@ -206,7 +222,7 @@ internal sealed class SituationChecker(SectionLibrary library, Basis basis, doub
             switch (interval.Kind)
             {
                 case IntervalKind.UniformLoadInferred:
-                    findings.Note("uniform load inferred between stations");
+                    if (!findings.Forces.LoadsAreKnown) findings.Note("uniform load inferred between stations");
                     if (CanExceed(interval)) SearchInside(interval, Try);
                     break;
                 case IntervalKind.Unknown:
@@ -260,7 +276,7 @@ internal sealed class SituationChecker(SectionLibrary library, Basis basis, doub
     /// The forces that the field has an answer for. Where it carries no torsion and there is some, axial force and bending alone are
     /// checked: σ is a lower bound of the equivalent stress, enough to call the member overstressed and never to pass it.
     /// </summary>
-    private static SectionForces Usable(SituationFindings findings, StressField field, CrossSection shape, in SectionForces forces)
+    internal static SectionForces Usable(SituationFindings findings, StressField field, CrossSection shape, in SectionForces forces)
     {
         var cleaned = Cleaned(forces, shape);
         if (field.CarriesTorsion || cleaned.T == 0) return cleaned;
@@ -269,7 +285,7 @@ internal sealed class SituationChecker(SectionLibrary library, Basis basis, doub
         return new SectionForces(cleaned.N, 0, 0, 0, cleaned.My, cleaned.Mz);
     }
 
-    private static SectionForces Cleaned(in SectionForces forces, CrossSection shape)
+    internal static SectionForces Cleaned(in SectionForces forces, CrossSection shape)
     {
         var extent = Math.Max(shape.ExtentY, shape.ExtentZ);
         var force = Math.Max(Math.Abs(forces.N), Math.Max(Math.Abs(forces.Vy), Math.Abs(forces.Vz)));

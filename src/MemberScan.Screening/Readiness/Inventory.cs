@@ -53,6 +53,7 @@ public static class Inventory
             Situations = usable.Count,
             Stations = usable.Sum(f => f.Stations.Length),
             ForcesSource = string.Join("; ", usable.Select(f => f.Source).Distinct(StringComparer.Ordinal).Take(3)),
+            Forces = [.. forces.Select(ForcesLine.Of)],
             Missing = Missing(member, forces),
             Notes = [.. member.Notes, .. notes],
         };

@@ -52,6 +52,9 @@ public sealed record MemberReadiness
     /// <summary>Where the forces come from, in words; empty if there are none.</summary>
     public required string ForcesSource { get; init; }
 
+    /// <summary>What was found of each situation, usable or not, in the order of the source.</summary>
+    public ImmutableArray<ForcesLine> Forces { get; init; } = [];
+
     /// <summary>Everything that is missing, each code once; empty when a check can begin.</summary>
     public required ImmutableArray<Reason> Missing { get; init; }
 

@@ -112,6 +112,54 @@ public sealed class MembersRunTests : IDisposable
         Assert.Contains(root.GetProperty("totals").EnumerateArray(), t => t.GetProperty("code").GetString() == "no-forces" && t.GetProperty("count").GetInt32() == 2);
     }
 
+    private const string Forces = """
+        #30=IFCPROPERTYSINGLEVALUE('Axial',$,IFCREAL(-8.),$);
+        #31=IFCPROPERTYSET('2O2Fr$t4X7Zf8NOew3FLOL',$,'Forces W1',$,(#30));
+        #32=IFCRELDEFINESBYPROPERTIES('2O2Fr$t4X7Zf8NOew3FLOM',$,$,$,(#15),#31);
+        """;
+
+    private const string Mapping = """
+        {"forces": {"missingComponents": "MISSING", "propertySets": [{"set": "Forces *", "stations": "constant", "components": {"N": {"property": "Axial", "unit": "kN"}}}]}}
+        """;
+
+    [Fact]
+    public void Forces_only_shows_what_a_mapping_found_and_what_it_could_not_use()
+    {
+        var model = Model(Rail + Bare + Forces);
+        var used = Run(new(model, [], File("zero.json", Mapping.Replace("MISSING", "zero", StringComparison.Ordinal)), null, null, false) { ForcesOnly = true });
+        var refused = Run(new(model, [], File("refuse.json", Mapping.Replace("MISSING", "refuse", StringComparison.Ordinal)), null, null, false) { ForcesOnly = true });
+        var nothing = Run(new(model, [], null, null, null, false) { ForcesOnly = true });
+
+        Assert.Equal((0, 2), (used.Code, used.Lines.Length));
+        Assert.Equal(
+            "usable | 2O2Fr$t4X7Zf8NOew3FLOH | '=Rail 1' | 'W1' | kind not stated | acts in full | 2 stations 0 to 2.5 m; N -8 kN, Vy 0 kN, Vz 0 kN, T 0 kNm, My 0 kNm, Mz 0 kNm"
+                + " | property set 'Forces W1' #31 | in the member's axes; components left out count as zero: Vy, Vz, T, My, Mz",
+            used.Lines[0]);
+        Assert.Equal("landing.ifc: 1 situations usable + 0 not = 1 on 1 of 2 candidates", used.Lines[1]);
+        Assert.Equal(2, refused.Code);
+        Assert.StartsWith("not used | 2O2Fr$t4X7Zf8NOew3FLOH | '=Rail 1' | 'W1' | kind not stated | acts in full | forces-incomplete: ", refused.Lines[0], StringComparison.Ordinal);
+        Assert.Equal((2, "landing.ifc: 0 situations usable + 0 not = 0 on 0 of 2 candidates"), (nothing.Code, nothing.Lines[^1]));
+    }
+
+    [Fact]
+    public void The_forces_template_is_a_table_that_is_refused_until_it_is_filled()
+    {
+        var path = Path.Combine(_folder.FullName, "to-fill.csv");
+        var model = Model(Rail + Bare);
+
+        Run(new(model, [], null, null, null, false) { Template = path });
+
+        var text = System.IO.File.ReadAllText(path);
+        var lines = text.Split("\r\n", StringSplitOptions.RemoveEmptyEntries);
+        Assert.Equal(ForcesTemplate.Header, lines.First(l => l[0] != '#'));
+        Assert.Equal(["2O2Fr$t4X7Zf8NOew3FLOH,,,0,,,,,,", "2O2Fr$t4X7Zf8NOew3FLOH,,,2.5,,,,,,"], lines.Where(l => l.StartsWith("2O2", StringComparison.Ordinal)));
+        Assert.Contains(lines, l => l.Contains("'Post 2'", StringComparison.Ordinal) && l.EndsWith("no certain length, so it has no rows here", StringComparison.Ordinal));
+        Assert.Equal(64, Assert.Throws<Failure>(() => Run(new(model, [path], null, null, null, false))).ExitCode);
+
+        System.IO.File.WriteAllText(path, text.Replace(",,,0,,,,,,", ",S,service,0,1,0,0,0,0,0", StringComparison.Ordinal).Replace(",,,2.5,,,,,,", ",S,service,2.5,1,0,0,0,0,0", StringComparison.Ordinal));
+        Assert.Contains(Run(new(model, [path], null, null, null, false)).Lines, l => l.StartsWith("ready | 2O2Fr$t4X7Zf8NOew3FLOH", StringComparison.Ordinal));
+    }
+
     [Fact]
     public void The_table_for_a_terminal_names_every_member()
     {

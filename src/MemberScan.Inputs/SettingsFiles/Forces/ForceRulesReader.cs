@@ -3,7 +3,7 @@ using System.Collections.Immutable;
 using MemberScan.Inputs.Json;
 using MemberScan.Model.Rules;
 
-namespace MemberScan.Inputs.SettingsFiles;
+namespace MemberScan.Inputs.SettingsFiles.Forces;
 
 /// <summary>Reads the <c>forces</c> part of a settings file.</summary>
 internal sealed class ForceRulesReader(JsonValues values, ISet<string> given)
@@ -22,6 +22,13 @@ internal sealed class ForceRulesReader(JsonValues values, ISet<string> given)
                 "turnDegreesByMember" => rules with { TurnDegreesByMember = Turns(value, path) },
                 "missingComponents" => rules with { MissingComponentsAreZero = Choose(value, path, SettingKeys.MissingComponents) },
                 "unknownMembers" => rules with { ListUnknownMembers = Choose(value, path, SettingKeys.UnknownMembers) },
+                "torsion" => rules with { Torsion = Choose(value, path, ForceKeys.TorsionAxes) },
+                "missingCoefficients" => rules with { MissingCoefficientsAreOne = Choose(value, path, ForceKeys.MissingCoefficients) },
+                "caseCoefficients" => rules with { CaseCoefficients = Choose(value, path, ForceKeys.CaseCoefficientWords) },
+                "combinations" => rules with { Combinations = new CombinationReader(values).Combinations(value, path) },
+                "combinationSets" => rules with { CombinationSets = new CombinationReader(values).Sets(value, path) },
+                "caseTags" => rules with { CaseTags = new CombinationReader(values).Tags(value, path) },
+                "propertySets" => rules with { PropertySets = new PropertySetReader(values).Read(value, path) },
                 _ => rules with { Kinds = Kinds(value, path) },
             };
         }

@@ -1,4 +1,4 @@
-namespace MemberScan.Inputs.ForcesTables;
+namespace MemberScan.Inputs.ForcesTables.Rows;
 
 /// <summary>Why a row of CSV cannot be taken apart.</summary>
 internal enum CsvFault
