@@ -3,6 +3,9 @@ using MemberScan.Foundation.Diagnostics;
 using MemberScan.Ifc.Analysis;
 using MemberScan.Ifc.Bodies;
 using MemberScan.Ifc.Curves;
+using MemberScan.Ifc.Frames;
+using MemberScan.Ifc.Frames.Stiffness;
+using MemberScan.Ifc.Frames.Topology;
 using MemberScan.Ifc.Geometry;
 using MemberScan.Ifc.Materials;
 using MemberScan.Ifc.Members;
@@ -84,5 +87,20 @@ public sealed class IfcModel
         var reactions = new ReactionReader(_instances, _placements, Units, _rules.Forces, _diagnostics);
         var situations = new SituationReader(_instances, _rules.Forces);
         return new ModelForcesReader(_instances, _relations, _analytical, reactions, situations, _diagnostics).Read(members);
+    }
+
+    /// <summary>Reads the structural analysis models as frames.</summary>
+    /// <param name="members">The candidates, which give sections and materials to the analytical members that stand for them.</param>
+    public ImmutableArray<AnalysisFrame> ReadFrames(ImmutableArray<Member> members)
+    {
+        var curves = new CurveReader(_instances, _placements, Units);
+        var profiles = new ProfileReader(_instances, _placements, curves, Units);
+        var materials = new MaterialReader(_instances, _relations, new MaterialFactsReader(_instances, Units, _unitReader), profiles, _rules);
+        var source = new AnalyticalSource(_instances, _relations, profiles, materials);
+        var stiffness = new StiffnessReader(_instances, _relations, source, new ElasticFactsReader(_instances, Units, _unitReader), members);
+        var boundaries = new BoundaryReader(Units, Schema);
+        return new FrameReader(
+            _instances, _relations, _placements, _analytical, curves, new JointReader(_instances, _placements, Units),
+            new ConnectionReader(_instances, _placements, boundaries, Schema), new ReleaseReader(_instances, _placements, boundaries), stiffness).Read();
     }
 }
