@@ -6,6 +6,7 @@ using MemberScan.Foundation.Units;
 using MemberScan.Inputs.Materials;
 using MemberScan.Model.Forces;
 using MemberScan.Model.Limits;
+using MemberScan.Model.Presets;
 using MemberScan.Model.Rules;
 
 namespace MemberScan.Inputs.SettingsFiles;
@@ -35,6 +36,8 @@ internal static class EffectiveSettings
         Add("forces.unknownMembers", SettingKeys.UnknownMembers.WordOf(forces.ListUnknownMembers));
         AddAll("forces.kinds", forces.Kinds.Select((kind, i) => ($"[{i + 1}]", $"{Quoted(kind.Pattern)} {SettingKeys.Kinds.WordOf(kind.Kind)}")));
         lines.Add(new EffectiveSetting("forces.kindOfAll", KindOfAll(forces.KindOfAll), forces.KindOfAll == SituationKind.Unknown));
+        AddAll("loads.presets", settings.Loads.Presets.Select((use, i) => ($"[{i + 1}]", OfUse(use))));
+        Add("loads.contactTolerance", $"{Number(settings.Loads.ContactTolerance)} m");
         foreach (var type in SettingKeys.UnitTypes)
             Add($"units.{type}", settings.Reading.MissingUnits.TryGetValue(type, out var factor) ? $"{Number(factor)} {SiUnit(type)}" : None);
         AddAll("materials.grades", settings.Reading.Grades.Where(grade => !GradeTable.Shipped.Grades.Contains(grade))
@@ -73,6 +76,9 @@ internal static class EffectiveSettings
         return $"{Quoted(grade.Name)}, pattern {Quoted(grade.Pattern)}, {Quoted(grade.Standard)}, {yields}, E {Number(grade.Modulus)} Pa, "
             + $"ν {Number(grade.Poisson)}, {(grade.IsSteel ? "steel" : "no steel")}{(grade.FromMemory ? ", from memory" : "")}";
     }
+
+    private static string OfUse(PresetUse use) => $"{Quoted(use.Preset.Name)} for {Quoted(use.Members)}"
+        + (use.Pipe is { } pipe ? $", pipe {Quoted(pipe.Name)} schedule {Quoted(pipe.Schedule)}, {use.Contents}, spacing {Number(use.Spacing)} m" : "");
 
     private static string OfRole(RoleRule rule)
     {

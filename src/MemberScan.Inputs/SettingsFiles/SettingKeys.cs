@@ -10,7 +10,7 @@ namespace MemberScan.Inputs.SettingsFiles;
 /// <summary>The keys of a settings file and the words and ranges of their values; the published schema says the same.</summary>
 internal static class SettingKeys
 {
-    public static readonly ImmutableArray<string> Root = ["$schema", "basis", "candidates", "sections", "roles", "forces", "units", "materials", "stability", "display"];
+    public static readonly ImmutableArray<string> Root = ["$schema", "basis", "candidates", "sections", "roles", "forces", "loads", "units", "materials", "stability", "display"];
     public static readonly ImmutableArray<string> Basis = ["service", "design"];
     public static readonly ImmutableArray<string> Service = ["criterion", "omega"];
     public static readonly ImmutableArray<string> Design = ["criterion", "gammaM0"];

@@ -2,6 +2,7 @@ using System.Text.Json;
 using MemberScan.Foundation.Diagnostics;
 using MemberScan.Foundation.Units;
 using MemberScan.Inputs.Materials;
+using MemberScan.Inputs.Presets;
 using MemberScan.Inputs.SettingsFiles;
 
 namespace MemberScan.Inputs.Tests.SettingsFiles;
@@ -23,6 +24,7 @@ public sealed class SettingsSchemaTests
         Assert.Equal(SettingKeys.RoleEntry, Keys("roles"));
         Assert.Equal(SettingKeys.Forces, Keys("forces"));
         Assert.Equal(SettingKeys.KindEntry, Keys("forces", "kinds"));
+        Assert.Equal(LoadRulesReader.Keys, Keys("loads"));
         Assert.Equal(SettingKeys.UnitTypes, Keys("units"));
         Assert.Equal(SettingKeys.Materials, Keys("materials"));
         Assert.Equal(GradeReader.Keys, Keys("materials", "grades"));

@@ -44,6 +44,7 @@ public sealed class SettingsTests
             "sections.recogniseMeshes=false", "roles=the shipped rules",
             "forces.convention=positive-face", "forces.components=as-flagged", "forces.turnDegrees=0", "forces.turnDegreesByMember=none",
             "forces.missingComponents=refuse", "forces.unknownMembers=refuse", "forces.kinds=none", "forces.kindOfAll=none",
+            "loads.presets=none", "loads.contactTolerance=0.025 m",
             "units.LENGTHUNIT=none", "units.FORCEUNIT=none", "units.PRESSUREUNIT=none", "units.TORQUEUNIT=none", "units.MODULUSOFELASTICITYUNIT=none",
             "materials.grades=none", "materials.poisson=0.3", "stability.lengthFactor=2", "display=si",
         ], lines.Select(line => $"{line.Key}={line.Value}"));
