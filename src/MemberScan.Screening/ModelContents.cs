@@ -6,8 +6,11 @@ using MemberScan.Ifc.WriteBack;
 using MemberScan.Inputs.ForcesTables;
 using MemberScan.Model.Forces;
 using MemberScan.Model.Members;
+using MemberScan.Model.Presets;
 using MemberScan.Model.Rules;
 using MemberScan.Part21;
+using MemberScan.Screening.Contacts;
+using MemberScan.Screening.Presets;
 using MemberScan.Screening.Record;
 
 namespace MemberScan.Screening;
@@ -17,14 +20,17 @@ internal sealed class ModelContents
 {
     private readonly Dictionary<string, List<MemberForces>> _fromTables;
     private readonly ILookup<string, MemberForces> _fromModel;
+    private readonly Dictionary<string, List<MemberForces>> _assumed;
     private readonly ReadOnlyMemory<byte> _baseText;
 
     private ModelContents(
         IfcModel? model, Part21File file, ReadOnlyMemory<byte> baseText, MemberCatalog catalog, ImmutableArray<MemberForces> fromModel,
-        Dictionary<string, List<MemberForces>> fromTables, ImmutableArray<ForcesFile> files)
+        Dictionary<string, List<MemberForces>> fromTables, ImmutableArray<ForcesFile> files, LoadRules loads)
     {
         (Model, File, _baseText, Catalog, Files, _fromTables) = (model, file, baseText, catalog, files, fromTables);
         _fromModel = fromModel.ToLookup(f => f.MemberKey, StringComparer.Ordinal);
+        _assumed = AssumedForces.Of(catalog.Members, loads, key => !fromTables.ContainsKey(key) && !_fromModel.Contains(key), out var contacts);
+        Contacts = contacts;
     }
 
     /// <summary>The model; null when its schema is not read.</summary>
@@ -38,6 +44,9 @@ internal sealed class ModelContents
 
     /// <summary>The forces tables as read.</summary>
     public ImmutableArray<ForcesFile> Files { get; }
+
+    /// <summary>The contacts that spans and supports of load presets come from; null when no preset is switched on.</summary>
+    public ContactList? Contacts { get; }
 
     /// <summary>Reads model and tables; null, with an error in <paramref name="diagnostics"/>, when a table does not fit the model.</summary>
     public static ModelContents? Read(ScreeningRequest request, DiagnosticList diagnostics, IProgress<ScreeningProgress>? progress, CancellationToken cancellation)
@@ -60,7 +69,7 @@ internal sealed class ModelContents
         var (fromTables, files) = ReadTables(request, catalog, diagnostics);
         return diagnostics.Items.Any(d => d is { Severity: Severity.Error, Code: "SCR-0001" or "SCR-0002" or "SCR-0003" or "SCR-0004" or "SCR-0007" })
             ? null
-            : new ModelContents(model, file, stripped.Base, catalog, fromModel, fromTables, files);
+            : new ModelContents(model, file, stripped.Base, catalog, fromModel, fromTables, files, request.Settings.Loads);
     }
 
     /// <summary>The forces that are used for a candidate: those of tables before those of the model.</summary>
@@ -71,7 +80,9 @@ internal sealed class ModelContents
         var inModel = _fromModel[member.Key].ToList();
         var hasTable = _fromTables.TryGetValue(member.Key, out var inTables);
         notes = hasTable && inModel.Count > 0 ? ["results in the model are not used for this member: the forces table comes first"] : [];
-        return hasTable ? inTables! : inModel;
+        return hasTable ? inTables!
+            : inModel.Count > 0 ? inModel
+            : _assumed.GetValueOrDefault(member.Key) ?? [];
     }
 
     /// <summary>What names the model and how it was read.</summary>
