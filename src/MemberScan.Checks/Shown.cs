@@ -28,4 +28,10 @@ internal static class Shown
 
     /// <summary>A length [m] in mm, the unit left to the formula.</summary>
     public static string Mm(double metres) => Factor(metres * 1e3);
+
+    /// <summary>An area [m²] in mm², the unit left to the formula.</summary>
+    public static string Mm2(double area) => Factor(area * 1e6);
+
+    /// <summary>A section modulus [m³] in mm³, the unit left to the formula.</summary>
+    public static string Mm3(double modulus) => Factor(modulus * 1e9);
 }

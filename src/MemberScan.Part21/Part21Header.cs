@@ -26,7 +26,7 @@ public sealed record Part21Header
     public ImmutableArray<string> Schemas { get; init; } = [];
 
     // The first entry of a keyword counts; a text in place of a list counts as a list of one.
-    internal static Part21Header From(SourceText source, ImmutableArray<HeaderEntry> entries)
+    internal static Part21Header From(SourceText source, IReadOnlyList<HeaderEntry> entries)
     {
         var description = Parameters(source, entries, "FILE_DESCRIPTION");
         var name = Parameters(source, entries, "FILE_NAME");
@@ -42,7 +42,7 @@ public sealed record Part21Header
         };
     }
 
-    private static Part21Value[] Parameters(SourceText source, ImmutableArray<HeaderEntry> entries, string keyword)
+    private static Part21Value[] Parameters(SourceText source, IReadOnlyList<HeaderEntry> entries, string keyword)
     {
         foreach (var entry in entries)
         {

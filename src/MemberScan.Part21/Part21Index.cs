@@ -25,14 +25,17 @@ public sealed class Part21Index : IDisposable
     private readonly BlockIndex _blocks;
     private readonly ImmutableArray<string> _wanted;
     private readonly long[][] _places;
-    private readonly Lazy<uint> _highestId;
+    private readonly int _threads;
+    private readonly Lock _gate = new();
+    private long _highestId = -1;
 
-    private Part21Index(ByteSource source, IDisposable? owned, string name, IReadOnlyCollection<string> wanted, DiagnosticList diagnostics, Options options)
+    private Part21Index(
+        ByteSource source, IDisposable? owned, string name, IReadOnlyCollection<string> wanted, DiagnosticList diagnostics, Options options, Func<IPart21Taker>? newTaker)
     {
         (_source, _owned, Name) = (source, owned, name);
         _wanted = [.. wanted.Distinct(StringComparer.Ordinal)];
         var log = new FindingLog();
-        var pass = new DataPass(source, new WantedKeywords(_wanted), options.Limits, options.Stretch, options.Window);
+        var pass = new DataPass(source, new WantedKeywords(_wanted), newTaker, options.Limits, options.Stretch, options.Window);
         var structure = new StreamedStructure(source, log, options.Limits, pass, options.Threads);
         structure.Read();
 
@@ -40,13 +43,14 @@ public sealed class Part21Index : IDisposable
         InsertionOffset = structure.InsertionOffset;
         Header = Part21Header.From(new SourceText(structure.HeaderText, name), structure.Header);
         LineEnd = new SourceText(structure.Beginning, name).LineEnd;
+        Takers = pass.Takers;
         _places = Grouped(pass.Places, _wanted.Length);
         _blocks = new BlockIndex(pass.Blocks, source, NewScanner());
         TellDuplicates(log);
         Tell(log, diagnostics);
         ReadToEnd = !log.EndsReading;
         HasDamage = log.HasDamage;
-        _highestId = new Lazy<uint>(() => HighestNumber.In(source, options.Threads));
+        _threads = options.Threads;
     }
 
     /// <summary>Name of the file, without folder.</summary>
@@ -74,7 +78,20 @@ public sealed class Part21Index : IDisposable
     public string LineEnd { get; }
 
     /// <summary>Highest number that stands behind a '#' anywhere in the text, up to 4,294,967,295; 0 if none. The first call reads the text once more.</summary>
-    public uint HighestId => _highestId.Value;
+    public uint HighestId
+    {
+        get
+        {
+            lock (_gate)
+            {
+                if (_highestId < 0) _highestId = HighestNumber.In(_source, _threads);
+                return (uint)_highestId;
+            }
+        }
+    }
+
+    /// <summary>What took the wanted instances while the pass went over them, in file order; empty if nothing was to take them.</summary>
+    public IReadOnlyList<IPart21Taker> Takers { get; }
 
     internal ByteSource Source => _source;
 
@@ -85,13 +102,14 @@ public sealed class Part21Index : IDisposable
     /// <param name="wanted">Keywords in upper case whose instances are kept exactly.</param>
     /// <param name="diagnostics">Receives findings with codes <c>P21-…</c>.</param>
     /// <param name="threads">Threads that share the pass; 0 for one per processor. The result is the same for any number.</param>
+    /// <param name="newTaker">Makes what takes the wanted instances as they pass by, once for each stretch, on any thread; null if nothing does.</param>
     /// <exception cref="InvalidDataException">As <see cref="ModelContainer.Read(string)"/>, or the text is longer than <see cref="MaxBytes"/>.</exception>
     /// <exception cref="IOException">The file cannot be read.</exception>
-    public static Part21Index Open(string path, IReadOnlyCollection<string> wanted, DiagnosticList diagnostics, int threads = 0)
+    public static Part21Index Open(string path, IReadOnlyCollection<string> wanted, DiagnosticList diagnostics, int threads = 0, Func<IPart21Taker>? newTaker = null)
     {
         ArgumentException.ThrowIfNullOrEmpty(path);
         var name = Path.GetFileName(path);
-        if (ModelContainer.IsArchive(path)) return Over(ModelContainer.Read(path).Bytes, name, wanted, diagnostics, threads);
+        if (ModelContainer.IsArchive(path)) return Over(ModelContainer.Read(path).Bytes, name, wanted, diagnostics, threads, newTaker);
 
         var handle = File.OpenHandle(path, options: FileOptions.RandomAccess);
         try
@@ -99,7 +117,7 @@ public sealed class Part21Index : IDisposable
             var source = new FileSource(handle);
             RefuseTooLong(source.Length, name);
             ModelContainer.RefuseForeign(source, name);
-            return new Part21Index(source, handle, name, Checked(wanted), diagnostics, Options.Shipped(threads));
+            return new Part21Index(source, handle, name, Checked(wanted), diagnostics, Options.Shipped(threads), newTaker);
         }
         catch
         {
@@ -114,8 +132,10 @@ public sealed class Part21Index : IDisposable
     /// <param name="wanted">Keywords in upper case whose instances are kept exactly.</param>
     /// <param name="diagnostics">Receives findings with codes <c>P21-…</c>.</param>
     /// <param name="threads">Threads that share the pass; 0 for one per processor.</param>
-    public static Part21Index Over(ReadOnlyMemory<byte> text, string name, IReadOnlyCollection<string> wanted, DiagnosticList diagnostics, int threads = 0) =>
-        Over(text, name, wanted, diagnostics, Options.Shipped(threads));
+    /// <param name="newTaker">As for <see cref="Open"/>.</param>
+    public static Part21Index Over(
+        ReadOnlyMemory<byte> text, string name, IReadOnlyCollection<string> wanted, DiagnosticList diagnostics, int threads = 0, Func<IPart21Taker>? newTaker = null) =>
+        Over(new MemorySource(text), name, wanted, diagnostics, Options.Shipped(threads), newTaker);
 
     /// <summary>Offsets [byte] of the instances of a keyword, in file order, exact (no subtypes).</summary>
     /// <param name="keyword">One of those asked for.</param>
@@ -143,10 +163,11 @@ public sealed class Part21Index : IDisposable
     internal static Part21Index Over(ReadOnlyMemory<byte> text, string name, IReadOnlyCollection<string> wanted, DiagnosticList diagnostics, Options options) =>
         Over(new MemorySource(text), name, wanted, diagnostics, options);
 
-    internal static Part21Index Over(ByteSource source, string name, IReadOnlyCollection<string> wanted, DiagnosticList diagnostics, Options options)
+    internal static Part21Index Over(
+        ByteSource source, string name, IReadOnlyCollection<string> wanted, DiagnosticList diagnostics, Options options, Func<IPart21Taker>? newTaker = null)
     {
         RefuseTooLong(source.Length, name);
-        return new(source, null, name, Checked(wanted), diagnostics, options);
+        return new(source, null, name, Checked(wanted), diagnostics, options, newTaker);
     }
 
     private static IReadOnlyCollection<string> Checked(IReadOnlyCollection<string> wanted)
@@ -163,17 +184,14 @@ public sealed class Part21Index : IDisposable
 
     private static DataScanner NewScanner() => new(new FindingLog(), Part21File.ShippedLimits);
 
-    private static long[][] Grouped(List<List<PlaceRow>> places, int keywords)
+    private static long[][] Grouped(Rows<PlaceRow> places, int keywords)
     {
         var counts = new int[keywords];
-        foreach (var part in places)
-            foreach (var place in part)
-                counts[place.Keyword]++;
-        var grouped = Array.ConvertAll(counts, c => new long[c]);
+        for (var i = 0; i < places.Count; i++) counts[places[i].Keyword]++;
+        var grouped = new long[keywords][];
+        for (var i = 0; i < keywords; i++) grouped[i] = new long[counts[i]];
         Array.Clear(counts);
-        foreach (var part in places)
-            foreach (var place in part)
-                grouped[place.Keyword][counts[place.Keyword]++] = place.Offset;
+        for (var i = 0; i < places.Count; i++) grouped[places[i].Keyword][counts[places[i].Keyword]++] = places[i].Offset;
         return grouped;
     }
 
@@ -229,6 +247,8 @@ public sealed class Part21Index : IDisposable
     private void Tell(FindingLog log, DiagnosticList diagnostics)
     {
         var findings = log.Counted();
+        if (findings.Count == 0) return;
+
         long[] offsets = [.. findings.Select(f => f.Offset).Where(o => o >= 0).Order()];
         var lines = LineCounter.LinesAt(_source, offsets);
         foreach (var (kind, offset, id, count) in findings)

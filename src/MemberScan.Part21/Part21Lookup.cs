@@ -16,7 +16,7 @@ public sealed class Part21Lookup
     private const int InstancePiece = 1024;
 
     private readonly BlockIndex _index;
-    private readonly ByteSource _source;
+    private readonly ReadAhead _source;
     private readonly DataScanner _scanner;
     private readonly CachedBlock?[] _cache = new CachedBlock?[CachedBlocks];
     private readonly CachedBlock _single;
@@ -24,8 +24,8 @@ public sealed class Part21Lookup
 
     internal Part21Lookup(BlockIndex index, ByteSource source, DataScanner scanner)
     {
-        (_index, _source, _scanner) = (index, source, scanner);
-        _single = new CachedBlock(source, InstancePiece);
+        (_index, _source, _scanner) = (index, new ReadAhead(source), scanner);
+        _single = new CachedBlock(_source, InstancePiece);
     }
 
     /// <summary>Finds an instance by its number; the first one when a number is used twice.</summary>
@@ -44,7 +44,7 @@ public sealed class Part21Lookup
     /// <returns>False where no instance begins.</returns>
     public bool TryReadAt(long offset, out Part21Instance instance)
     {
-        _single.LoadOne(offset, _scanner);
+        _single.LoadOne(offset, _index.IsPlainAt(offset), _scanner);
         var isFound = _single.Count > 0 && _single.At(0).Offset == offset;
         instance = isFound ? _single.At(0) : default;
         return isFound;

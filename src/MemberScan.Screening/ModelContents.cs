@@ -6,32 +6,28 @@ using MemberScan.Ifc.WriteBack;
 using MemberScan.Inputs.ForcesTables;
 using MemberScan.Model.Forces;
 using MemberScan.Model.Members;
-using MemberScan.Model.Presets;
 using MemberScan.Model.Rules;
 using MemberScan.Part21;
 using MemberScan.Screening.Contacts;
+using MemberScan.Screening.Frames;
 using MemberScan.Screening.Presets;
 using MemberScan.Screening.Record;
+using MemberScan.Screening.Sources;
 
 namespace MemberScan.Screening;
 
 /// <summary>A model as read: its candidates and their forces from model and tables. What screening and readiness both begin with.</summary>
 internal sealed class ModelContents
 {
-    private readonly Dictionary<string, List<MemberForces>> _fromTables;
-    private readonly ILookup<string, MemberForces> _fromModel;
-    private readonly Dictionary<string, List<MemberForces>> _assumed;
+    private static readonly string[] s_faults =
+        ["SCR-0001", "SCR-0002", "SCR-0003", "SCR-0004", "SCR-0007", "SCR-0009", "SCR-0010", "SCR-0011"];
+
+    private readonly ImmutableArray<ForcesSource> _sources;
     private readonly ReadOnlyMemory<byte> _baseText;
 
     private ModelContents(
-        IfcModel? model, Part21File file, ReadOnlyMemory<byte> baseText, MemberCatalog catalog, ImmutableArray<MemberForces> fromModel,
-        Dictionary<string, List<MemberForces>> fromTables, ImmutableArray<ForcesFile> files, LoadRules loads)
-    {
-        (Model, File, _baseText, Catalog, Files, _fromTables) = (model, file, baseText, catalog, files, fromTables);
-        _fromModel = fromModel.ToLookup(f => f.MemberKey, StringComparer.Ordinal);
-        _assumed = AssumedForces.Of(catalog.Members, loads, key => !fromTables.ContainsKey(key) && !_fromModel.Contains(key), out var contacts);
-        Contacts = contacts;
-    }
+        IfcModel? model, Part21File file, ReadOnlyMemory<byte> baseText, MemberCatalog catalog, ImmutableArray<ForcesSource> sources, ImmutableArray<ForcesFile> files, ContactList? contacts) =>
+        (Model, File, _baseText, Catalog, Files, _sources, Contacts) = (model, file, baseText, catalog, files, sources, contacts);
 
     /// <summary>The model; null when its schema is not read.</summary>
     public IfcModel? Model { get; }
@@ -62,27 +58,63 @@ internal sealed class ModelContents
         cancellation.ThrowIfCancellationRequested();
         var model = IfcModel.Open(file, request.Settings.Reading, diagnostics);
         var named = NamedInTables(request.Tables);
-        var catalog = model?.ReadMembers(element => named.Contains(element.GlobalId) || named.Contains(element.Tag)) ?? new MemberCatalog([], []);
+        var catalog = model?.ReadMembers(element => named.Contains(element.GlobalId) || named.Contains(element.Tag) || model.HasForcesInSets(element)) ?? new MemberCatalog([], []);
 
         progress?.Report(new("forces", 0));
-        var fromModel = model?.ReadForces(catalog.Members) ?? [];
         var (fromTables, files) = ReadTables(request, catalog, diagnostics);
-        return diagnostics.Items.Any(d => d is { Severity: Severity.Error, Code: "SCR-0001" or "SCR-0002" or "SCR-0003" or "SCR-0004" or "SCR-0007" })
+        var rules = request.Settings.Reading.Forces;
+        var sources = Sources(request, model, catalog, fromTables, diagnostics, out var contacts);
+        CaseCombinations.RefuseUnknown(rules, sources.SelectMany(s => s.All), diagnostics);
+        return diagnostics.Items.Any(d => d.Severity == Severity.Error && s_faults.Contains(d.Code))
             ? null
-            : new ModelContents(model, file, stripped.Base, catalog, fromModel, fromTables, files, request.Settings.Loads);
+            : new ModelContents(model, file, stripped.Base, catalog, sources, files, contacts);
     }
 
-    /// <summary>The forces that are used for a candidate: those of tables before those of the model.</summary>
+    /// <summary>The sources of forces in the order of the settings; load presets serve the members that no earlier source does.</summary>
+    private static ImmutableArray<ForcesSource> Sources(
+        ScreeningRequest request, IfcModel? model, MemberCatalog catalog, ImmutableArray<MemberForces> fromTables, DiagnosticList diagnostics, out ContactList? contacts)
+    {
+        contacts = null;
+        var rules = request.Settings.Reading.Forces;
+        var sources = ImmutableArray.CreateBuilder<ForcesSource>();
+        if (!request.Tables.IsEmpty && !rules.From.Contains(ForceSource.Table))
+            diagnostics.Add("SCR-0033", Severity.Warning, "The settings leave forces tables out (forces.from); the tables given are not used.");
+        foreach (var source in rules.From)
+        {
+            switch (source)
+            {
+                case ForceSource.Table: Add("forces table", fromTables); break;
+                case ForceSource.Results: Add("results in the model", model?.ReadForces(catalog.Members) ?? []); break;
+                case ForceSource.PropertySets: Add("property sets", model?.ReadForcesInSets(catalog.Members) ?? []); break;
+                case ForceSource.Statics: Add("own frame analysis", model is null ? [] : OwnAnalysis.Of(model, catalog.Members, !IsAfterResults(rules), diagnostics)); break;
+                default:
+                    var served = sources.SelectMany(s => s.All).Select(f => f.MemberKey).ToHashSet(StringComparer.Ordinal);
+                    Add("load presets", [.. AssumedForces.Of(catalog.Members, request.Settings.Loads, key => !served.Contains(key), out contacts).Values.SelectMany(f => f)]);
+                    break;
+            }
+        }
+
+        return sources.ToImmutable();
+
+        void Add(string name, ImmutableArray<MemberForces> forces) => sources.Add(ForcesSource.Of(name, forces, rules, diagnostics));
+    }
+
+    /// <summary>Whether results in the model come before our own analysis, which then leaves analysis models with results alone.</summary>
+    private static bool IsAfterResults(ForceRules rules) =>
+        rules.From.IndexOf(ForceSource.Results) is var results and >= 0 && results < rules.From.IndexOf(ForceSource.Statics);
+
+    /// <summary>The forces that are used for a candidate: of the first source that has any, with the combinations of its load cases.</summary>
     /// <param name="member">The candidate.</param>
     /// <param name="notes">What a reader must know of the choice.</param>
     public IReadOnlyList<MemberForces> ForcesOf(Member member, out IReadOnlyList<string> notes)
     {
-        var inModel = _fromModel[member.Key].ToList();
-        var hasTable = _fromTables.TryGetValue(member.Key, out var inTables);
-        notes = hasTable && inModel.Count > 0 ? ["results in the model are not used for this member: the forces table comes first"] : [];
-        return hasTable ? inTables!
-            : inModel.Count > 0 ? inModel
-            : _assumed.GetValueOrDefault(member.Key) ?? [];
+        notes = [];
+        var first = _sources.FirstOrDefault(s => s.Of(member).Count > 0);
+        if (first is null) return [];
+
+        var used = first.Of(member);
+        notes = [.. _sources.Where(s => s != first).SelectMany(s => SourceConflicts.Notes(member, (used, first.Name), (s.Of(member), s.Name)))];
+        return first.Combinations.With(member, used);
     }
 
     /// <summary>What names the model and how it was read.</summary>
@@ -104,12 +136,13 @@ internal sealed class ModelContents
         return named;
     }
 
-    private static (Dictionary<string, List<MemberForces>> Forces, ImmutableArray<ForcesFile> Files) ReadTables(
+    private static (ImmutableArray<MemberForces> Forces, ImmutableArray<ForcesFile> Files) ReadTables(
         ScreeningRequest request, MemberCatalog catalog, DiagnosticList diagnostics)
     {
-        var byMember = new Dictionary<string, List<MemberForces>>(StringComparer.Ordinal);
+        var all = ImmutableArray.CreateBuilder<MemberForces>();
+        var earlier = new Dictionary<(string Member, string Situation), MemberForces>();
         var files = ImmutableArray.CreateBuilder<ForcesFile>();
-        if (request.Tables.IsEmpty) return (byMember, []);
+        if (request.Tables.IsEmpty) return ([], []);
 
         var reader = new TableForces(catalog.Members, request.Settings.Reading.Forces, diagnostics);
         foreach (var table in request.Tables)
@@ -117,10 +150,9 @@ internal sealed class ModelContents
             var (forces, unknown) = reader.Read(table);
             foreach (var entry in forces)
             {
-                if (!byMember.TryGetValue(entry.MemberKey, out var list)) byMember[entry.MemberKey] = list = [];
-                if (list.Find(f => f.Situation.Name == entry.Situation.Name) is { } earlier)
-                    diagnostics.Add("SCR-0007", Severity.Error, $"Situation '{entry.Situation.Name}' of '{entry.MemberKey}' stands in two places: {earlier.Source} and {entry.Source}; give it once.");
-                list.Add(entry);
+                if (!earlier.TryAdd((entry.MemberKey, entry.Situation.Name), entry))
+                    diagnostics.Add("SCR-0007", Severity.Error, $"Situation '{entry.Situation.Name}' of '{entry.MemberKey}' stands in two places: {earlier[(entry.MemberKey, entry.Situation.Name)].Source} and {entry.Source}; give it once.");
+                all.Add(entry);
             }
 
             var convention = table.Convention switch
@@ -132,6 +164,6 @@ internal sealed class ModelContents
             files.Add(new ForcesFile(table.FileName, table.Sha256, table.Rows.Length, unknown, convention));
         }
 
-        return (byMember, files.ToImmutable());
+        return (all.ToImmutable(), files.ToImmutable());
     }
 }

@@ -110,7 +110,30 @@ internal sealed class TableForces
 
         return table.Convention == ForceConvention.EndForces
             ? FromEndForces(forces, stations, rows, length.Value, table)
+            : table.IsEnvelope ? FromEnvelope(forces, stations)
             : forces with { Stations = stations.ToImmutable() };
+    }
+
+    /// <summary>The rows at one station: least and largest of each component; a single row is a magnitude and counts both ways.</summary>
+    private static MemberForces FromEnvelope(MemberForces forces, IEnumerable<ForceStation> rows)
+    {
+        var envelope = ImmutableArray.CreateBuilder<EnvelopeStation>();
+        foreach (var place in rows.GroupBy(r => r.X).OrderBy(g => g.Key))
+        {
+            var values = place.Select(r => r.Forces).ToList();
+            if (values.Count == 1) values.Add(-1 * values[0]);
+            SectionForces Of(Func<IEnumerable<double>, double> pick) => new(
+                pick(values.Select(f => f.N)), pick(values.Select(f => f.Vy)), pick(values.Select(f => f.Vz)),
+                pick(values.Select(f => f.T)), pick(values.Select(f => f.My)), pick(values.Select(f => f.Mz)));
+            envelope.Add(new EnvelopeStation(place.Key, Of(Enumerable.Min), Of(Enumerable.Max)));
+        }
+
+        return forces with
+        {
+            Envelope = envelope.ToImmutable(),
+            Stations = [.. envelope.SelectMany(e => new[] { new ForceStation(e.X, e.Least), new ForceStation(e.X, e.Largest) })],
+            Conversion = "envelope: least and largest values by themselves, evaluated at all corners",
+        };
     }
 
     private MemberForces FromEndForces(MemberForces forces, ImmutableArray<ForceStation>.Builder stations, List<ForcesRow> rows, double length, ForcesTable table)
@@ -123,7 +146,11 @@ internal sealed class TableForces
             if (isStart) stations[i] = stations[i] with { Forces = -1 * stations[i].Forces };
         }
 
-        return forces with { Stations = stations.ToImmutable(), Conversion = "end forces: values at the start reversed" };
+        const string Reversed = "end forces: values at the start reversed";
+        if (!table.IsEnvelope) return forces with { Stations = stations.ToImmutable(), Conversion = Reversed };
+
+        var envelope = FromEnvelope(forces, stations);
+        return envelope with { Conversion = $"{Reversed}; {envelope.Conversion}" };
     }
 
     private Situation SituationOf(ForcesRow row, ForcesTable table)
@@ -137,6 +164,6 @@ internal sealed class TableForces
                 : (SituationKind.Unknown, "not stated");
         }
 
-        return new Situation(row.Situation, kind, source, table.ActsInFull, $"forces table {table.FileName}");
+        return new Situation(row.Situation, kind, source, table.ActsInFull, $"forces table {table.FileName}") { IsLinear = table.IsLinear };
     }
 }

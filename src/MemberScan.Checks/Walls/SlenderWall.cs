@@ -1,4 +1,5 @@
 using MemberScan.Mechanics.Forces;
+using MemberScan.Mechanics.Properties;
 using MemberScan.Mechanics.Sections;
 using MemberScan.Model.Verdicts;
 
@@ -128,7 +129,7 @@ public static class SlenderWall
         ]);
     }
 
-    private static WallStress[] WallsOf(Box box, SectionProperties properties, SectionForces forces)
+    internal static WallStress[] WallsOf(Box box, SectionProperties properties, SectionForces forces)
     {
         var acrossY = WallStress.FlatWidthOf(box.Width, box.Wall) / 2;
         var acrossZ = WallStress.FlatWidthOf(box.Depth, box.Wall) / 2;
@@ -152,7 +153,7 @@ public static class SlenderWall
     }
 
     // A stress that is zero but for rounding is no compression: it is measured by the terms it is the difference of.
-    private static bool IsCompressed(double stress, double scale) => stress < -Tolerance * scale;
+    internal static bool IsCompressed(double stress, double scale) => stress < -Tolerance * scale;
 
     private static TraceLine[] EpsilonLines(double fy, double epsilon) =>
     [

@@ -16,10 +16,13 @@ internal static class SectionPrint
         Line($"A    {p.Area * 1e6:0.###} mm²");
         Line($"Iy   {p.Iy * 1e12:0.#} mm⁴    Iz   {p.Iz * 1e12:0.#} mm⁴    Iyz {p.Iyz * 1e12:0.#} mm⁴");
         if (p.Iyz != 0) Line($"principal axes: I {field.Properties.IMax * 1e12:0.#} and {field.Properties.IMin * 1e12:0.#} mm⁴, the larger one about an axis {field.Properties.PrincipalAngle * 180 / Math.PI:0.##}° from y towards z");
+        if (p.ShearCentreY == 0 && p.ShearCentreZ == 0) Line($"shear centre in the centroid");
         if (p.ShearCentreY != 0 || p.ShearCentreZ != 0) Line($"shear centre y {p.ShearCentreY * 1e3:0.###} mm, z {p.ShearCentreZ * 1e3:0.###} mm from the centroid: Vy, Vz and T are taken there");
-        Line($"WelY {p.WelY * 1e9:0.##} mm³    WelZ {p.WelZ * 1e9:0.##} mm³");
-        Line($"WplY {p.WplY * 1e9:0.##} mm³    WplZ {p.WplZ * 1e9:0.##} mm³");
-        Line($"J    {Or(p.J, 1e12, "0.#", "mm⁴")} ({p.JSource}){(p.JThinWall is { } thin ? $", thin wall {(thin * 1e12).ToString("0.#", CultureInfo.InvariantCulture)} mm⁴" : "")}    Wt {Or(p.Wt, 1e9, "0.##", "mm³")}");
+        Line($"WelY {p.WelY * 1e9:0.##} mm³    WelZ {p.WelZ * 1e9:0.##} mm³{Extremes(p.Extremes)}");
+        Line($"WplY {p.WplY * 1e9:0.##} mm³    WplZ {p.WplZ * 1e9:0.##} mm³{(p.PlasticAxisY == 0 && p.PlasticAxisZ == 0 ? "" : string.Create(CultureInfo.InvariantCulture, $", axes of equal areas at z {p.PlasticAxisZ * 1e3:0.###} mm and y {p.PlasticAxisY * 1e3:0.###} mm"))}");
+        Line($"first moments of the half sections QY {p.QY * 1e9:0.##} mm³    QZ {p.QZ * 1e9:0.##} mm³");
+        Line($"shear areas by energy, {result.Shear}: y {p.ShearAreaY * 1e6:0.##} mm², z {p.ShearAreaZ * 1e6:0.##} mm²");
+        Line($"J    {Or(p.J, 1e12, "0.#", "mm⁴")} ({p.JSource}){(p.JThinWall is { } thin ? $", thin wall {(thin * 1e12).ToString("0.#", CultureInfo.InvariantCulture)} mm⁴" : "")}    Wt {Or(p.Wt, 1e9, "0.##", "mm³")}{(p.WtThinWall is { } bredt ? $", thin wall {(bredt * 1e9).ToString("0.##", CultureInfo.InvariantCulture)} mm³" : "")}");
         Line($"shear model {result.Shear}{(field.Model == ShearModel.Elasticity ? string.Create(CultureInfo.InvariantCulture, $", ν = {result.Poisson:0.###}") : "")}; warping left out");
 
         var f = result.Forces;
@@ -39,6 +42,7 @@ internal static class SectionPrint
         var g = result.Governing;
         foreach (var (name, measure) in new[] { ("von Mises", g.VonMises), ("Tresca", g.Tresca), ("|σ|", g.AbsSigma), ("τ", g.Tau), ("σ1", g.Sigma1), ("σ3", g.Sigma3) })
             Line($"largest {name}: {measure.Value / 1e6:0.##} MPa at y {measure.Y * 1e3:0.###} mm, z {measure.Z * 1e3:0.###} mm ({measure.Place})");
+        StatePrint.Write(output, result.GoverningState);
         if (result.Comparison is { } other)
         {
             var o = other.Governing;
@@ -58,6 +62,17 @@ internal static class SectionPrint
         }
 
         if (result.SmallestSize is { Count: 0 }) Line($"no smallest size is sought for this kind of section");
+    }
+
+    // Only where the two sides differ.
+    private static string Extremes(SectionResult.Extremes e)
+    {
+        const double Same = 1e-9;
+
+        var text = "";
+        if (Math.Abs(e.YTop - e.YBottom) > Same * e.YTop) text += string.Create(CultureInfo.InvariantCulture, $"    WelY +z {e.YTop * 1e9:0.##}, −z {e.YBottom * 1e9:0.##} mm³");
+        if (Math.Abs(e.ZRight - e.ZLeft) > Same * e.ZRight) text += string.Create(CultureInfo.InvariantCulture, $"    WelZ +y {e.ZRight * 1e9:0.##}, −y {e.ZLeft * 1e9:0.##} mm³");
+        return text;
     }
 
     private static string Or(double? value, double factor, string format, string unit) =>

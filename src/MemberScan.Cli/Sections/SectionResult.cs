@@ -1,5 +1,7 @@
 using System.Text.Json.Serialization;
+using MemberScan.Foundation.Geometry;
 using MemberScan.Mechanics.Forces;
+using MemberScan.Mechanics.States;
 using MemberScan.Mechanics.Stress;
 
 namespace MemberScan.Cli.Sections;
@@ -36,6 +38,10 @@ internal sealed record SectionResult(
     [JsonPropertyName("smallestSize"), JsonIgnore(Condition = JsonIgnoreCondition.WhenWritingNull)]
     public IReadOnlyList<SmallestSize>? SmallestSize { get; init; }
 
+    /// <summary>The stress state at the point of the largest von Mises stress.</summary>
+    [JsonPropertyName("state")]
+    public required State GoverningState { get; init; }
+
     /// <summary>The result of a field under given forces.</summary>
     public static SectionResult Of(StressField field, in SectionForces forces, IReadOnlyList<Point> points, double? yield)
     {
@@ -43,12 +49,27 @@ internal sealed record SectionResult(
         var f = forces;
         var governing = Measures.Of(field, forces);
         var c = field.Closure;
+        var (areas, e) = (field.ShearAreas, p.Extremes);
         return new SectionResult(
             field.Section.Designation,
-            new Values(p.Area, p.Iy, p.Iz, p.Iyz, p.J, p.WelY, p.WelZ, p.WplY, p.WplZ, p.Wt, p.JThinWall, p.ShearCentreY, p.ShearCentreZ, p.JSource),
+            new Values(p.Area, p.Iy, p.Iz, p.Iyz, p.J, p.WelY, p.WelZ, p.WplY, p.WplZ, p.Wt, p.JThinWall, p.ShearCentreY, p.ShearCentreZ, p.JSource)
+            {
+                Extremes = new Extremes(e.YTop, e.YBottom, e.ZRight, e.ZLeft),
+                IMax = p.IMax,
+                IMin = p.IMin,
+                PrincipalAngle = p.PrincipalAngle,
+                QY = p.QY,
+                QZ = p.QZ,
+                PlasticAxisY = p.PlasticAxisY,
+                PlasticAxisZ = p.PlasticAxisZ,
+                WtThinWall = p.WtThinWall,
+                ShearAreaY = areas.Y,
+                ShearAreaZ = areas.Z,
+            },
             field.Model == ShearModel.Elasticity ? "elasticity" : "elementary", field.Poisson,
             new Forces6(f.N, f.Vy, f.Vz, f.T, f.My, f.Mz), yield is { } fy ? governing.VonMises.Value / fy : null, points, governing,
-            new ClosureValues(c.N, c.Vy, c.Vz, c.T, c.My, c.Mz, c.LargestCross));
+            new ClosureValues(c.N, c.Vy, c.Vz, c.T, c.My, c.Mz, c.LargestCross))
+        { GoverningState = State.Of(PointState.Of(field.Govern(forces, StressMeasure.VonMises).State)) };
     }
 
     /// <summary>Properties of the section.</summary>
@@ -66,7 +87,48 @@ internal sealed record SectionResult(
         [property: JsonPropertyName("JThinWall")] double? JThinWall,
         [property: JsonPropertyName("yS")] double ShearCentreY,
         [property: JsonPropertyName("zS")] double ShearCentreZ,
-        [property: JsonPropertyName("JSource")] string JSource);
+        [property: JsonPropertyName("JSource")] string JSource)
+    {
+        [JsonPropertyName("WelExtremes")]
+        public required Extremes Extremes { get; init; }
+
+        [JsonPropertyName("IMax")]
+        public required double IMax { get; init; }
+
+        [JsonPropertyName("IMin")]
+        public required double IMin { get; init; }
+
+        [JsonPropertyName("principalAngle")]
+        public required double PrincipalAngle { get; init; }
+
+        [JsonPropertyName("QY")]
+        public required double QY { get; init; }
+
+        [JsonPropertyName("QZ")]
+        public required double QZ { get; init; }
+
+        [JsonPropertyName("plasticAxisY")]
+        public required double PlasticAxisY { get; init; }
+
+        [JsonPropertyName("plasticAxisZ")]
+        public required double PlasticAxisZ { get; init; }
+
+        [JsonPropertyName("WtThinWall")]
+        public required double? WtThinWall { get; init; }
+
+        [JsonPropertyName("shearAreaY")]
+        public required double ShearAreaY { get; init; }
+
+        [JsonPropertyName("shearAreaZ")]
+        public required double ShearAreaZ { get; init; }
+    }
+
+    /// <summary>Elastic moduli at the extreme fibres +z, −z, +y, −y.</summary>
+    internal sealed record Extremes(
+        [property: JsonPropertyName("YTop")] double YTop,
+        [property: JsonPropertyName("YBottom")] double YBottom,
+        [property: JsonPropertyName("ZRight")] double ZRight,
+        [property: JsonPropertyName("ZLeft")] double ZLeft);
 
     /// <summary>The six section forces.</summary>
     internal sealed record Forces6(
@@ -117,6 +179,57 @@ internal sealed record SectionResult(
                 Most(StressMeasure.Sigma1), Most(StressMeasure.Sigma3));
         }
     }
+
+    /// <summary>The stress state of a point worked out; vectors in the member's axes x, y, z, angles in radians.</summary>
+    internal sealed record State(
+        [property: JsonPropertyName("sigma")] double Sigma,
+        [property: JsonPropertyName("tauXY")] double TauXY,
+        [property: JsonPropertyName("tauXZ")] double TauXZ,
+        [property: JsonPropertyName("sigma1")] double Sigma1,
+        [property: JsonPropertyName("sigma2")] double Sigma2,
+        [property: JsonPropertyName("sigma3")] double Sigma3,
+        [property: JsonPropertyName("shearDirection")] IReadOnlyList<double> ShearDirection,
+        [property: JsonPropertyName("angle")] double Angle,
+        [property: JsonPropertyName("direction1")] IReadOnlyList<double> Direction1,
+        [property: JsonPropertyName("direction2")] IReadOnlyList<double> Direction2,
+        [property: JsonPropertyName("direction3")] IReadOnlyList<double> Direction3,
+        [property: JsonPropertyName("freeDirections")] bool HasFreeDirections,
+        [property: JsonPropertyName("largestShear")] ShearFace LargestShear,
+        [property: JsonPropertyName("circles")] IReadOnlyList<Circle> Circles,
+        [property: JsonPropertyName("elements")] IReadOnlyList<Element> Elements)
+    {
+        public static State Of(PointState s) => new(
+            s.Stress.Sigma, s.Stress.TauXY, s.Stress.TauXZ, s.Sigma1, s.Sigma2, s.Sigma3, Three(s.ShearDirection), s.Angle,
+            Three(s.Direction1), Three(s.Direction2), Three(s.Direction3), s.HasFreeDirections,
+            new ShearFace(s.LargestShear.Shear, s.LargestShear.Normal, s.LargestShear.Angle, Three(s.LargestShear.Direction)),
+            [.. s.Circles.Select(c => new Circle(c.Name, c.Centre, c.Radius))],
+            [.. s.Elements.Select(e => new Element(e.Plane == ElementPlane.XY ? "xy" : "xz", e.Sigma, e.Tau, e.Largest, e.Smallest, e.Angle))]);
+
+        // No negative zeros.
+        private static double[] Three(Vector3 v) => [v.X + 0.0, v.Y + 0.0, v.Z + 0.0];
+    }
+
+    /// <summary>The face on which the shear stress is largest.</summary>
+    internal sealed record ShearFace(
+        [property: JsonPropertyName("shear")] double Shear,
+        [property: JsonPropertyName("normal")] double Normal,
+        [property: JsonPropertyName("angle")] double Angle,
+        [property: JsonPropertyName("direction")] IReadOnlyList<double> Direction);
+
+    /// <summary>One of Mohr's circles.</summary>
+    internal sealed record Circle(
+        [property: JsonPropertyName("name")] string Name,
+        [property: JsonPropertyName("centre")] double Centre,
+        [property: JsonPropertyName("radius")] double Radius);
+
+    /// <summary>A stress element in one plane.</summary>
+    internal sealed record Element(
+        [property: JsonPropertyName("plane")] string Plane,
+        [property: JsonPropertyName("sigma")] double Sigma,
+        [property: JsonPropertyName("tau")] double Tau,
+        [property: JsonPropertyName("largest")] double Largest,
+        [property: JsonPropertyName("smallest")] double Smallest,
+        [property: JsonPropertyName("angle")] double Angle);
 
     /// <summary>One situation of several.</summary>
     internal sealed record SituationLine(

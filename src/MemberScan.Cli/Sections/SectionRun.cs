@@ -3,6 +3,7 @@ using System.Text.Json;
 using MemberScan.Inputs.Values;
 using MemberScan.Mechanics.Forces;
 using MemberScan.Mechanics.Profiles;
+using MemberScan.Mechanics.Properties;
 using MemberScan.Mechanics.Sections;
 using MemberScan.Mechanics.Stress;
 using MemberScan.Screening;

@@ -2,11 +2,12 @@ using System.Globalization;
 using System.Text;
 using MemberScan.Mechanics.Forces;
 using MemberScan.Mechanics.Profiles;
+using MemberScan.Mechanics.States;
 using MemberScan.Mechanics.Stress;
 
 namespace MemberScan.Cli.Sections;
 
-/// <summary>A section to scale as a drawing: von Mises stress in ten bands, the outline, the governing point. y to the right, z up.</summary>
+/// <summary>A section to scale as a drawing: von Mises stress in ten bands, the outline, the governing point and the stress state there. y to the right, z up.</summary>
 internal static class SectionSvg
 {
     private const int Width = 640;
@@ -24,7 +25,8 @@ internal static class SectionSvg
         var scale = (Width - 2 * Margin) / extent;
         double X(double y) => Margin + (y - leastY) * scale;
         double Y(double z) => Margin + (largestZ - z) * scale;
-        var height = 2 * Margin + (largestZ - leastZ) * scale + 40;
+        var drawn = 2 * Margin + (largestZ - leastZ) * scale + 40;
+        var height = drawn + StateSvg.Height + 10;
 
         var svg = new StringBuilder();
         void Add(FormattableString text) => svg.Append(text.ToString(CultureInfo.InvariantCulture)).Append('\n');
@@ -49,8 +51,9 @@ internal static class SectionSvg
         }
 
         Add($"<circle cx=\"{X(governing.Y):0.##}\" cy=\"{Y(governing.Z):0.##}\" r=\"6\" fill=\"none\" stroke=\"#000\" stroke-width=\"2\"/>");
-        Add($"<text x=\"{Margin}\" y=\"{height - 30:0.#}\">{Escaped(field.Section.Designation)}, {(field.Model == ShearModel.Elementary ? "elementary" : "elasticity")}; bands of a tenth of the largest</text>");
-        Add($"<text x=\"{Margin}\" y=\"{height - 12:0.#}\">largest von Mises {governing.Value / 1e6:0.##} MPa at y {governing.Y * 1e3:0.###} mm, z {governing.Z * 1e3:0.###} mm ({Escaped(governing.Place)}); y to the right, z up</text>");
+        Add($"<text x=\"{Margin}\" y=\"{drawn - 30:0.#}\">{Escaped(field.Section.Designation)}, {(field.Model == ShearModel.Elementary ? "elementary" : "elasticity")}; bands of a tenth of the largest</text>");
+        Add($"<text x=\"{Margin}\" y=\"{drawn - 12:0.#}\">largest von Mises {governing.Value / 1e6:0.##} MPa at y {governing.Y * 1e3:0.###} mm, z {governing.Z * 1e3:0.###} mm ({Escaped(governing.Place)}); y to the right, z up</text>");
+        new StateSvg(Add, Margin, drawn).Draw(PointState.Of(governing.State));
         Add($"</svg>");
         return svg.ToString();
     }

@@ -1,10 +1,7 @@
 using System.Collections.Immutable;
 using System.Globalization;
 using MemberScan.Foundation.Diagnostics;
-using MemberScan.Foundation.Geometry;
-using MemberScan.Mechanics.Forces;
-using MemberScan.Mechanics.Sections;
-using MemberScan.Model;
+using MemberScan.Ifc.Analysis.Loads;
 using MemberScan.Model.Forces;
 using MemberScan.Model.Members;
 using MemberScan.Model.Verdicts;
@@ -14,21 +11,10 @@ namespace MemberScan.Ifc.Analysis;
 
 /// <summary>Section forces of the candidates from the result groups of a model, in each candidate's own axes.</summary>
 internal sealed class ModelForcesReader(
-    Instances instances, Relations relations, AnalyticalMemberReader analytical, ReactionReader reactions, SituationReader situations, DiagnosticList diagnostics)
+    Instances instances, Relations relations, BodyLines bodies, ReactionReader reactions, SituationReader situations, SituationLoads loads,
+    CombinedForces combinations, DiagnosticList diagnostics)
 {
-    /// <summary>Largest sine of the angle between an analytical member and the body that it stands for.</summary>
-    private const double ParallelTolerance = 0.02;
-
-    /// <summary>Share of the length, or one section extent if more, by which a body may stick out beyond its analytical line.</summary>
-    private const double StickOut = 0.02;
-
-    /// <summary>Share of a length within which two places are one.</summary>
-    private const double SamePlace = 1e-6;
-
-    /// <summary>Distance between the two lines from which the result says so [m].</summary>
-    private const double BesideNoted = 0.001;
-
-    private sealed record Part(AnalyticalMember Line, Part21Record Reaction, ReactionReader.Samples Samples);
+    private readonly HashSet<ulong> _used = [];
 
     /// <summary>Reads the forces of all candidates, in candidate order and then in the order of the result groups.</summary>
     public ImmutableArray<MemberForces> Read(ImmutableArray<Member> members)
@@ -37,7 +23,7 @@ internal sealed class ModelForcesReader(
         foreach (var group in members.GroupBy(m => m.Element.StepId))
         {
             var items = group.ToList();
-            foreach (var (member, lines) in Assign(items, LinesOf(items[0]))) AddForces(member, lines, forces);
+            foreach (var (member, lines) in bodies.Assign(items, bodies.LinesOf(items[0]))) AddForces(member, lines, forces);
             ReportDirectActivities(items[0], forces);
         }
 
@@ -45,59 +31,15 @@ internal sealed class ModelForcesReader(
         return forces.ToImmutable();
     }
 
-    private List<AnalyticalMember> LinesOf(Member member)
-    {
-        IEnumerable<ulong> ids = member.Element.Class.StartsWith("IfcStructuralCurveMember", StringComparison.Ordinal)
-            ? [member.Element.StepId]
-            : relations.AnalyticalOf(member.Element.StepId);
-        return [.. ids.Select(analytical.Read).OfType<AnalyticalMember>()];
-    }
-
-    /// <summary>Gives each analytical member to the item whose body it runs along; all of them to the element that is its own candidate.</summary>
-    private List<(Member Member, List<AnalyticalMember> Lines)> Assign(List<Member> items, List<AnalyticalMember> lines)
-    {
-        if (items.Count == 1) return [(items[0], lines)];
-
-        var assigned = items.ConvertAll(item => (Member: item, Lines: new List<AnalyticalMember>()));
-        foreach (var line in lines)
-        {
-            var nearest = -1;
-            var least = double.PositiveInfinity;
-            for (var i = 0; i < items.Count; i++)
-            {
-                var distance = Distance(items[i], line);
-                if (distance < least) (nearest, least) = (i, distance);
-            }
-
-            if (nearest >= 0) assigned[nearest].Lines.Add(line);
-            else diagnostics.Add("IFC-0022", Severity.Warning, "An analytical member runs along none of the bodies of the element that it is linked to; its forces are not used.", Span(line.Id));
-        }
-
-        return assigned;
-    }
-
-    /// <summary>Distance of an analytical member's middle from a body's line [m]; infinite when they do not run together.</summary>
-    private static double Distance(Member item, AnalyticalMember line)
-    {
-        if (!item.Axes.TryGet(out var axes, out _) || !item.Length.TryGet(out var length, out _) || !line.Line.TryGet(out var ends, out _)) return double.PositiveInfinity;
-        if (!(ends.Value.End - ends.Value.Start).TryNormalize(out var x) || x.Cross(axes.Value.X).Length > ParallelTolerance) return double.PositiveInfinity;
-
-        var middle = 0.5 * (ends.Value.Start + ends.Value.End) - axes.Value.Origin;
-        var along = middle.Dot(axes.Value.X);
-        var beside = (middle - along * axes.Value.X).Length;
-        var reach = item.Section is Finding<SectionFinding>.Found section ? Largest(section.Value.Shape) : 0;
-        var within = along > 0 && along < length.Value && beside <= Math.Max(reach, StickOut * length.Value);
-        return within ? beside : double.PositiveInfinity;
-    }
-
     private void AddForces(Member member, List<AnalyticalMember> lines, ImmutableArray<MemberForces>.Builder forces)
     {
-        var bySituation = new List<(Part21Record Group, List<Part> Parts)>();
+        var bySituation = new List<(Part21Record Group, List<JoinedForces.Part> Parts)>();
         foreach (var line in lines)
             foreach (var id in relations.ActivitiesOn(line.Id))
             {
-                if (!instances.File.TryFind(id, out var reaction) || reaction.Keyword is not ("IFCSTRUCTURALCURVEREACTION" or "IFCSTRUCTURALPOINTREACTION")) continue;
+                if (!instances.File.TryFind(id, out var reaction) || !IsReaction(reaction)) continue;
 
+                _ = _used.Add(id);
                 foreach (var group in relations.GroupsOf(id).Select(g => instances.File.TryFind(g, out var r) ? r : default).Where(r => r.Keyword == "IFCSTRUCTURALRESULTGROUP"))
                 {
                     var index = bySituation.FindIndex(s => s.Group.Id == group.Id);
@@ -107,160 +49,22 @@ internal sealed class ModelForcesReader(
                         bySituation.Add((group, []));
                     }
 
-                    bySituation[index].Parts.Add(new Part(line, reaction, reactions.Read(reaction, line, member.Element, member.Key)));
+                    bySituation[index].Parts.Add(Part(member, line, reaction, group));
                 }
             }
 
-        foreach (var (group, parts) in bySituation.OrderBy(s => s.Group.Span.Offset)) forces.Add(Join(member, situations.Read(group), parts));
+        var read = bySituation.OrderBy(s => s.Group.Span.Offset).Select(s => (s.Group, JoinedForces.Of(member, situations.Read(s.Group), s.Parts))).ToList();
+        forces.AddRange(read.Select(r => r.Item2));
+        forces.AddRange(combinations.Of(member, read));
     }
 
-    /// <summary>Joins the samples of all analytical members of a candidate, turned into its axes and shifted along it.</summary>
-    private static MemberForces Join(Member member, Situation situation, List<Part> parts)
+    private JoinedForces.Part Part(Member member, AnalyticalMember line, Part21Record reaction, Part21Record group)
     {
-        var source = string.Join(", ", parts.Select(p => string.Create(CultureInfo.InvariantCulture, $"{p.Reaction.Keyword} #{p.Reaction.Id} on #{p.Line.Id}")));
-        MemberForces Unusable(Reason why) => new() { MemberKey = member.Key, Situation = situation, Stations = [], Source = source, Unusable = why };
-        if (parts.Find(p => p.Samples.Unusable is not null) is { Samples.Unusable: { } bad }) return Unusable(bad);
-        if (Overlap(parts) is { } overlap) return Unusable(overlap);
-        if (parts.Find(p => p.Line.EccentricCardinalPoint is not null) is { } eccentric)
-            return Unusable(new Reason(ReasonCode.AxesUnknown, $"the analytical member #{eccentric.Line.Id} runs along cardinal point {eccentric.Line.EccentricCardinalPoint} of its section, not its centroid; whether its forces are about the one or the other is not said"));
-
-        var isOwnLine = member.Element.StepId == parts[0].Line.Id;
-        if (isOwnLine)
-        {
-            var stations = parts.SelectMany(p => p.Samples.Stations).ToImmutableArray();
-            return new MemberForces { MemberKey = member.Key, Situation = situation, Stations = stations, Source = source, Conversion = parts[0].Samples.Conversion };
-        }
-
-        if (!member.IsStraight) return Unusable(new Reason(ReasonCode.AxesUnknown, "the member is bent; forces of a straight analytical member cannot be laid along it"));
-        if (!member.Axes.TryGet(out var own, out var noAxes)) return Unusable(noAxes);
-        if (!member.Length.TryGet(out var length, out var noLength)) return Unusable(noLength);
-
-        var slack = Math.Max(StickOut * length.Value, member.Section is Finding<SectionFinding>.Found section ? Largest(section.Value.Shape) : 0);
-        var joined = ImmutableArray.CreateBuilder<ForceStation>();
-        var words = new List<string>();
-        var (from, to) = (double.PositiveInfinity, double.NegativeInfinity);
-
-        // From start to end, so that at a shared node the left value stands before the right one, however their places are rounded.
-        var chain = parts.GroupBy(p => p.Line.Id).Select(g => g.ToList()).OrderBy(g => Middle(g[0].Line, own.Value)).ToList();
-        foreach (var link in chain)
-        {
-            var line = link[0].Line;
-            if (!line.Line.TryGet(out var ends, out var noLine)) return Unusable(noLine);
-            if (!LineAxes(line, member, out var lineAxes, out var noLineAxes)) return Unusable(noLineAxes!);
-            if (lineAxes.X.Cross(own.Value.X).Length > ParallelTolerance)
-                return Unusable(new Reason(ReasonCode.AxesUnknown, $"the analytical member #{line.Id} does not run along the member"));
-
-            var reversed = lineAxes.X.Dot(own.Value.X) < 0;
-            var start = Along(own.Value, ends.Value.Start);
-            var (near, far) = InOrder(start, Along(own.Value, ends.Value.End));
-            var samples = link.SelectMany(p => p.Samples.Stations).OrderBy(s => s.X).ToList();
-            if (Break(chain.Count, link, samples, near, far, to, slack) is { } broken) return Unusable(broken);
-
-            (from, to) = (Math.Min(from, near), Math.Max(to, far));
-            var stations = samples.ConvertAll(s => new ForceStation(start + (reversed ? -s.X : s.X), Turned(s.Forces, lineAxes, own.Value, reversed)));
-            if (reversed) stations.Reverse();
-            joined.AddRange(stations);
-            words.Add(Words(link[0], lineAxes, own.Value, reversed, start));
-        }
-
-        // The body may stick out a little beyond its analytical line; farther than that its ends are not covered.
-        return new MemberForces
-        {
-            MemberKey = member.Key,
-            Situation = situation,
-            Stations = joined.ToImmutable(),
-            Source = source,
-            Conversion = string.Join("; ", words.Distinct(StringComparer.Ordinal)),
-            From = from > slack ? 0 : from,
-            To = to < length.Value - slack ? length.Value : to,
-        };
+        var known = JoinedForces.LineAxes(line, member, out var axes, out _) ? loads.On(line, axes, group) : LineLoads.Unknown("the axes are not known");
+        return new JoinedForces.Part(line, string.Create(CultureInfo.InvariantCulture, $"{reaction.Keyword} #{reaction.Id} on #{line.Id}"), reactions.Read(reaction, line, member.Element, member.Key, known.Loads), known);
     }
 
-    /// <summary>Reactions over one stretch of one analytical member: nothing says whether they act together or one replaces the other.</summary>
-    private static Reason? Overlap(List<Part> parts)
-    {
-        foreach (var line in parts.Where(p => p.Samples.Stations.Length > 1).GroupBy(p => p.Line.Id))
-        {
-            var reached = double.NegativeInfinity;
-            foreach (var (least, most) in line.Select(p => (p.Samples.Stations.Min(s => s.X), p.Samples.Stations.Max(s => s.X))).Order())
-            {
-                if (least < reached - SamePlace * Math.Abs(reached))
-                    return new Reason(ReasonCode.ForcesIncomplete, $"several reactions of one situation lie over the same stretch of the analytical member #{line.Key}; whether they act together is not said");
-
-                reached = Math.Max(reached, most);
-            }
-        }
-
-        return null;
-    }
-
-    /// <summary>Where one of several analytical members of a chain leaves a stretch open, or lies over the one before: forces may jump at its ends.</summary>
-    private static Reason? Break(int links, List<Part> link, List<ForceStation> samples, double near, double far, double reached, double slack)
-    {
-        if (links == 1) return null;
-
-        var length = far - near;
-        if (samples.Count == 0 || samples[0].X > SamePlace * length || samples[^1].X < (1 - SamePlace) * length)
-            return new Reason(ReasonCode.StationsTooCoarse, $"the results on the analytical member #{link[0].Line.Id} do not reach both its ends, where forces may jump");
-        if (near > reached + slack && double.IsFinite(reached))
-            return new Reason(ReasonCode.StationsTooCoarse, string.Create(CultureInfo.InvariantCulture, $"no results lie between {reached:0.###} m and {near:0.###} m of the member"));
-        if (near < reached - SamePlace * Math.Max(length, Math.Abs(reached)))
-            return new Reason(ReasonCode.ForcesIncomplete, $"the analytical member #{link[0].Line.Id} lies over another one of the same member and situation; whether their forces act together is not said");
-
-        return null;
-    }
-
-    private static (double Near, double Far) InOrder(double a, double b) => a <= b ? (a, b) : (b, a);
-
-    private static double Middle(AnalyticalMember line, MemberAxes axes) =>
-        line.Line is Finding<(Vector3 Start, Vector3 End)>.Found found ? Along(axes, found.Value.Start) + Along(axes, found.Value.End) : 0;
-
-    /// <summary>Axes of the analytical member; where its Axis is missing and the section has no preferred axes, any axes along it do.</summary>
-    private static bool LineAxes(AnalyticalMember line, Member member, out MemberAxes axes, out Reason? why)
-    {
-        if (line.Axes.TryGet(out var found, out why))
-        {
-            axes = found.Value;
-            return true;
-        }
-
-        axes = null!;
-        var isIsotropic = member.Section is Finding<SectionFinding>.Found { Value.Shape: Round or Tube };
-        if (!isIsotropic || line.Line is not Finding<(Vector3 Start, Vector3 End)>.Found ends || member.Axes is not Finding<MemberAxes>.Found own) return false;
-
-        axes = MemberAxes.From(ends.Value.Start, ends.Value.End - ends.Value.Start, own.Value.Z)!;
-        return axes is not null;
-    }
-
-    /// <summary>Distance of an analytical member's line from a body's, where it is farther at its two ends [m].</summary>
-    private static double Offset(AnalyticalMember line, MemberAxes own)
-    {
-        double Beside(Vector3 point) => (point - own.Origin - Along(own, point) * own.X).Length;
-        return line.Line is Finding<(Vector3 Start, Vector3 End)>.Found ends ? Math.Max(Beside(ends.Value.Start), Beside(ends.Value.End)) : 0;
-    }
-
-    private static double Along(MemberAxes axes, Vector3 point) => (point - axes.Origin).Dot(axes.X);
-
-    /// <summary>The same section forces in other axes along the same line: reversed where x is, then turned about x.</summary>
-    /// <remarks>
-    /// With x reversed and y with it, the cut face is the opposite one: force and moment vectors change sign, so N, Vy, T and My stay and
-    /// Vz and Mz turn round. The lines may lie askew by the tolerance; nothing of N is laid into the shear forces for that.
-    /// </remarks>
-    private static SectionForces Turned(in SectionForces forces, MemberAxes from, MemberAxes to, bool reversed)
-    {
-        var along = reversed ? forces with { Vz = -forces.Vz, Mz = -forces.Mz } : forces;
-        return along.Turned(Math.Atan2(-to.Z.Dot(reversed ? -from.Y : from.Y), to.Z.Dot(from.Z)));
-    }
-
-    private static string Words(Part part, MemberAxes line, MemberAxes own, bool reversed, double start)
-    {
-        var angle = Math.Atan2(own.Z.Dot(line.Y), own.Z.Dot(line.Z)) * 180 / Math.PI;
-        var turn = Math.Abs(angle) < 0.01 ? "axes alike" : string.Create(CultureInfo.InvariantCulture, $"member z lies {angle:0.##}° from the analytical z towards its y");
-        var sense = reversed ? ", x reversed" : "";
-        var offset = Offset(part.Line, own);
-        var beside = offset < BesideNoted ? "" : string.Create(CultureInfo.InvariantCulture, $", its line lies {offset * 1e3:0.#} mm beside the body's; forces taken about the section's centroid");
-        return string.Create(CultureInfo.InvariantCulture, $"{part.Samples.Conversion}; analytical member #{part.Line.Id}: {turn}{sense}, starts at {Math.Round(start, 6):0.######} m of the member{beside}");
-    }
+    private static bool IsReaction(Part21Record record) => record.Keyword is "IFCSTRUCTURALCURVEREACTION" or "IFCSTRUCTURALPOINTREACTION";
 
     /// <summary>Reactions hung on an element itself: no axes say how its components lie.</summary>
     private void ReportDirectActivities(Member member, ImmutableArray<MemberForces>.Builder forces)
@@ -269,8 +73,9 @@ internal sealed class ModelForcesReader(
 
         foreach (var id in relations.ActivitiesOn(member.Element.StepId))
         {
-            if (!instances.File.TryFind(id, out var reaction) || reaction.Keyword is not ("IFCSTRUCTURALCURVEREACTION" or "IFCSTRUCTURALPOINTREACTION")) continue;
+            if (!instances.File.TryFind(id, out var reaction) || !IsReaction(reaction)) continue;
 
+            _ = _used.Add(id);
             foreach (var group in relations.GroupsOf(id))
                 if (instances.File.TryFind(group, out var record) && record.Keyword == "IFCSTRUCTURALRESULTGROUP")
                     forces.Add(new MemberForces
@@ -284,6 +89,7 @@ internal sealed class ModelForcesReader(
         }
     }
 
+    /// <summary>Results that no candidate has: without a situation, on nothing, or on something that is no candidate.</summary>
     private void ReportUnassigned()
     {
         foreach (var reaction in instances.File.RecordsOf("IFCSTRUCTURALCURVEREACTION"))
@@ -292,10 +98,10 @@ internal sealed class ModelForcesReader(
                 diagnostics.Add("IFC-0023", Severity.Warning, "A curve reaction belongs to no result group, so its load situation is not known; it is not used.", reaction.Span);
             if (!relations.IsOnSomething(reaction.Id))
                 diagnostics.Add("IFC-0024", Severity.Warning, "A curve reaction is connected to no member; it is not used.", reaction.Span);
+            else if (!_used.Contains(reaction.Id))
+                diagnostics.Add("IFC-0026", Severity.Warning, "A reaction lies on a member that is no candidate and stands for none; it is not used.", reaction.Span);
         }
+
+        combinations.ReportUnused();
     }
-
-    private SourceSpan? Span(ulong id) => instances.File.TryFind(id, out var record) ? record.Span : null;
-
-    private static double Largest(CrossSection shape) => Math.Max(shape.ExtentY, shape.ExtentZ);
 }

@@ -2,10 +2,9 @@ using System.Collections.Immutable;
 using System.Globalization;
 using MemberScan.Foundation.Diagnostics;
 using MemberScan.Foundation.Geometry;
-using MemberScan.Ifc.Geometry;
+using MemberScan.Ifc.Analysis.Loads;
 using MemberScan.Ifc.Units;
 using MemberScan.Mechanics.Forces;
-using MemberScan.Model;
 using MemberScan.Model.Members;
 using MemberScan.Model.Rules;
 using MemberScan.Model.Verdicts;
@@ -14,8 +13,16 @@ using MemberScan.Part21;
 namespace MemberScan.Ifc.Analysis;
 
 /// <summary>Samples of curve and point reactions in the analytical member's axes, positive face, SI.</summary>
-internal sealed class ReactionReader(Instances instances, PlacementReader placements, ModelUnits units, ForceRules rules, DiagnosticList diagnostics)
+internal sealed class ReactionReader(Instances instances, ActivityPlaces activityPlaces, ModelUnits units, ForceRules rules, DiagnosticList diagnostics)
 {
+    /// <summary>Share of the largest force and moment within which a pair of samples at the two ends balances.</summary>
+    private const double Balanced = 1e-3;
+
+    /// <summary>Share of the length within which a sample is at an end.</summary>
+    private const double AtEnd = 1e-6;
+
+    private static readonly string[] s_components = ["ForceX", "ForceY", "ForceZ", "MomentX", "MomentY", "MomentZ"];
+
     /// <summary>Most samples of one reaction.</summary>
     public const int MaxSamples = 1_000_000;
 
@@ -30,24 +37,26 @@ internal sealed class ReactionReader(Instances instances, PlacementReader placem
     /// <param name="member">The analytical member.</param>
     /// <param name="element">The candidate's element: a turn in the settings may name it instead of the analytical member.</param>
     /// <param name="key">The candidate's key.</param>
-    public Samples Read(Part21Record reaction, AnalyticalMember member, ElementIdentity element, string key)
+    /// <param name="loads">The loads on the analytical member in the same situation, as far as they are known, in its own axes.</param>
+    public Samples Read(Part21Record reaction, AnalyticalMember member, ElementIdentity element, string key, IReadOnlyList<LineLoad> loads)
     {
         var turn = Turn(member, element, key);
         if (!member.Length.TryGet(out var length, out var why)) return Unusable(why);
         if (!instances.TryFollow(reaction[7], out var load)) return Unusable(ReasonCode.DamagedRecord, $"the reaction #{reaction.Id} has no values");
 
         if (load[1].ItemCount > MaxSamples) return Unusable(ReasonCode.ForcesIncomplete, $"the reaction #{reaction.Id} has more than {MaxSamples} samples");
-        if ((load.Keyword == "IFCSTRUCTURALLOADCONFIGURATION" ? instances.FollowEach(load[1]) : [load]) is not { } loads)
+        if ((load.Keyword == "IFCSTRUCTURALLOADCONFIGURATION" ? instances.FollowEach(load[1]) : [load]) is not { } samples)
             return Unusable(ReasonCode.DamagedRecord, $"the reaction #{reaction.Id} has lost a sample");
-        if (loads.Exists(l => l.Keyword is not ("IFCSTRUCTURALLOADSINGLEFORCE" or "IFCSTRUCTURALLOADSINGLEFORCEWARPING")))
+        if (samples.Exists(l => l.Keyword is not ("IFCSTRUCTURALLOADSINGLEFORCE" or "IFCSTRUCTURALLOADSINGLEFORCEWARPING")))
             return Unusable(ReasonCode.ForcesIncomplete, $"the reaction #{reaction.Id} holds something other than section forces");
 
-        if (Places(reaction, load, loads.Count, length.Value, member, out var whyNoPlaces) is not { } places) return Unusable(whyNoPlaces!);
+        if (Places(reaction, load, samples.Count, length.Value, member, out var whyNoPlaces) is not { } places) return Unusable(whyNoPlaces!);
 
         var stations = ImmutableArray.CreateBuilder<ForceStation>(places.Length);
+        var leftOut = new SortedSet<int>();
         for (var i = 0; i < places.Length; i++)
         {
-            var values = Values(loads[Math.Min(i, loads.Count - 1)], out var whyNoValues);
+            var values = Values(samples[Math.Min(i, samples.Count - 1)], leftOut, out var whyNoValues);
             if (values is not { } stored) return Unusable(whyNoValues!);
             if (!InMemberAxes(reaction, member, turn, stored, out var own, out var whyNoAxes)) return Unusable(whyNoAxes!);
 
@@ -55,11 +64,45 @@ internal sealed class ReactionReader(Instances instances, PlacementReader placem
         }
 
         var words = Words(reaction, turn);
-        if (loads.Exists(l => l.Keyword == "IFCSTRUCTURALLOADSINGLEFORCEWARPING" && Instances.Real(l[7]) is not (null or 0)))
+        if (samples.Exists(l => l.Keyword == "IFCSTRUCTURALLOADSINGLEFORCEWARPING" && Instances.Real(l[7]) is not (null or 0)))
             words += "; the warping moment is left out";
-        return rules.Convention == ForceConvention.EndForces
-            ? FromEndForces(reaction, loads.Count, stations, length.Value, words)
-            : new Samples(stations.ToImmutable(), words, null);
+        if (leftOut.Count > 0) words += $"; components left out count as zero: {string.Join(", ", leftOut.Select(i => s_components[i]))}";
+        return rules.Convention switch
+        {
+            ForceConvention.EndForces => FromEndForces(reaction, samples.Count, stations, length.Value, words),
+            ForceConvention.Detect => Detected(reaction, samples.Count, stations, loads, length.Value, words),
+            _ => OnPositiveFace(reaction, samples.Count, stations, loads, length.Value, words),
+        };
+    }
+
+    /// <summary>Samples as they are, unless they balance as forces on the two ends and in no other way.</summary>
+    private Samples OnPositiveFace(Part21Record reaction, int samples, ImmutableArray<ForceStation>.Builder stations, IReadOnlyList<LineLoad> loads, double length, string words)
+    {
+        if (!IsPair(stations, samples, length) || Balance(stations, loads) != (false, true)) return new Samples(stations.ToImmutable(), words, null);
+
+        diagnostics.Add("IFC-0025", Severity.Warning, "The two samples of a reaction balance as forces on the ends of the member, not as forces on the positive face; they are not used. Set forces.convention to \"end-forces\" or \"detect\".", reaction.Span);
+        return Unusable(ReasonCode.ConventionUnknown, $"the samples of the reaction #{reaction.Id} balance as forces on the two ends, not as forces on the positive face; the setting forces.convention can say so");
+    }
+
+    private static Samples Detected(Part21Record reaction, int samples, ImmutableArray<ForceStation>.Builder stations, IReadOnlyList<LineLoad> loads, double length, string words)
+    {
+        if (!IsPair(stations, samples, length)) return new Samples(stations.ToImmutable(), words + "; positive face, since there are samples between the ends or none at them", null);
+
+        return Balance(stations, loads) switch
+        {
+            (true, _) => new Samples(stations.ToImmutable(), words + "; positive face, detected by equilibrium", null),
+            (false, true) => FromEndForces(reaction, samples, stations, length, words + "; end forces, detected by equilibrium"),
+            _ => Unusable(ReasonCode.ConventionUnknown, $"the samples of the reaction #{reaction.Id} balance neither on the positive face nor as forces on the two ends, with the loads that are known"),
+        };
+    }
+
+    private static bool IsPair(ImmutableArray<ForceStation>.Builder stations, int samples, double length) =>
+        samples == 2 && stations.Count == 2 && Math.Abs(stations[0].X) <= AtEnd * length && Math.Abs(stations[1].X - length) <= AtEnd * length;
+
+    private static (bool OnFace, bool OnEnds) Balance(ImmutableArray<ForceStation>.Builder stations, IReadOnlyList<LineLoad> loads)
+    {
+        var reversed = stations[0] with { Forces = -1 * stations[0].Forces };
+        return (Equilibrium.Miss(stations[0], stations[1], loads) <= Balanced, Equilibrium.Miss(reversed, stations[1], loads) <= Balanced);
     }
 
     private double[]? Places(Part21Record reaction, Part21Record load, int count, double length, AnalyticalMember member, out Reason? why)
@@ -67,7 +110,7 @@ internal sealed class ReactionReader(Instances instances, PlacementReader placem
         why = null;
         if (reaction.Keyword == "IFCSTRUCTURALPOINTREACTION")
         {
-            if (PlaceOf(reaction, member) is { } place) return [place];
+            if (activityPlaces.OfVertex(reaction, member) is { } place) return [place];
 
             why = new Reason(ReasonCode.StationsTooCoarse, $"the point reaction #{reaction.Id} does not say where on the member it acts");
             return null;
@@ -96,7 +139,7 @@ internal sealed class ReactionReader(Instances instances, PlacementReader placem
             return null;
         }
 
-        var places = load[2].Items.Select(item => Instances.Reals(item) is { Length: 1 } place ? metre * place[0] : double.NaN).ToArray();
+        var places = activityPlaces.Locations(load)!;
         if (places.Length != count || Array.Exists(places, double.IsNaN) || count == 0)
         {
             why = new Reason(ReasonCode.ForcesIncomplete, $"the reaction #{reaction.Id} has {count} samples at {places.Length} locations");
@@ -114,21 +157,7 @@ internal sealed class ReactionReader(Instances instances, PlacementReader placem
         return places;
     }
 
-    private double? PlaceOf(Part21Record reaction, AnalyticalMember member)
-    {
-        if (!instances.TryFollow(reaction[6], out var shape) || !member.Line.TryGet(out var line, out _)) return null;
-
-        var toProject = !reaction[5].IsEmpty && placements.Placement(reaction[5]) is Finding<Transform3>.Found own ? own.Value : member.ToProject;
-
-        foreach (var representation in instances.FollowAll(shape[2]))
-            foreach (var item in instances.FollowAll(representation[3]))
-                if (item.Keyword == "IFCVERTEXPOINT" && instances.TryFollow(item[0], out var record) && placements.Point(record) is { } point
-                    && (line.Value.End - line.Value.Start).TryNormalize(out var x))
-                    return (toProject.Point(point) - line.Value.Start).Dot(x);
-        return null;
-    }
-
-    private SectionForces? Values(Part21Record load, out Reason? why)
+    private SectionForces? Values(Part21Record load, SortedSet<int> leftOut, out Reason? why)
     {
         why = null;
         Span<double> six = stackalloc double[6];
@@ -137,6 +166,7 @@ internal sealed class ReactionReader(Instances instances, PlacementReader placem
             var value = load[i + 1];
             if (value.IsEmpty)
             {
+                _ = leftOut.Add(i);
                 if (rules.MissingComponentsAreZero) continue;
 
                 why = new Reason(ReasonCode.ForcesIncomplete, $"#{load.Id} leaves out force components, and the settings do not say that these are zero");
@@ -209,8 +239,8 @@ internal sealed class ReactionReader(Instances instances, PlacementReader placem
         for (var i = 0; i < stations.Count; i++)
         {
             var station = stations[i];
-            var isStart = Math.Abs(station.X) <= 1e-6 * length;
-            if (!isStart && Math.Abs(station.X - length) > 1e-6 * length)
+            var isStart = Math.Abs(station.X) <= AtEnd * length;
+            if (!isStart && Math.Abs(station.X - length) > AtEnd * length)
                 return Unusable(ReasonCode.ConventionUnknown, $"the reaction #{reaction.Id} has samples between the ends, which end forces cannot have");
 
             if (isStart) stations[i] = station with { Forces = -1 * station.Forces };

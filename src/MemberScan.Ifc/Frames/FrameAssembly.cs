@@ -59,6 +59,13 @@ internal sealed class FrameAssembly
     /// <summary>Numbers of the frame members of an analytical member, from its start to its end.</summary>
     public IReadOnlyList<int> PiecesOf(ulong line) => _piecesOf.GetValueOrDefault(line) ?? [];
 
+    /// <summary>Length of a frame member [m].</summary>
+    public double LengthOf(int member)
+    {
+        var bar = _members[member];
+        return (_nodes.Nodes[bar.End].Position + bar.EndOffset - _nodes.Nodes[bar.Start].Position - bar.StartOffset).Length;
+    }
+
     /// <summary>The support of a node; null if none.</summary>
     public FrameSupport? SupportOf(int node) => _supports.TryGetValue(node, out var entry) ? entry.Support : null;
 

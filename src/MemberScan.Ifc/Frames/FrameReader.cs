@@ -15,7 +15,7 @@ namespace MemberScan.Ifc.Frames;
 /// <summary>Structural analysis models as frames.</summary>
 internal sealed class FrameReader(
     Instances instances, Relations relations, PlacementReader placements, AnalyticalMemberReader analytical, CurveReader curves, JointReader joints,
-    ConnectionReader connections, ReleaseReader releases, StiffnessReader stiffness)
+    ConnectionReader connections, ReleaseReader releases, FrameLoadReader loads, StiffnessReader stiffness)
 {
     /// <summary>Reads all analysis models that hold curve members, in the order of the file.</summary>
     public ImmutableArray<AnalysisFrame> Read() =>
@@ -36,7 +36,8 @@ internal sealed class FrameReader(
             else assembly.Refuse(why);
         foreach (var member in items.Members) Add(assembly, member);
 
-        var frame = assembly.Refusals.Count > 0 ? null : new Frame { Nodes = assembly.Nodes, Members = assembly.Members, Supports = assembly.Supports, Situations = [] };
+        var (situations, cases) = loads.Read(model, items, assembly, out var hasLoads);
+        var frame = assembly.Refusals.Count > 0 ? null : new Frame { Nodes = assembly.Nodes, Members = assembly.Members, Supports = assembly.Supports, Situations = situations };
         return new AnalysisFrame
         {
             Id = model.Id,
@@ -44,7 +45,8 @@ internal sealed class FrameReader(
             Lines = [.. items.Members.Select(m => m.Id)],
             Frame = frame,
             Pieces = [.. assembly.Pieces],
-            HasLoads = false,
+            Cases = cases,
+            HasLoads = hasLoads,
             HasResults = HasResults(model),
             Refusals = [.. assembly.Refusals],
             Notes = [.. assembly.Notes],

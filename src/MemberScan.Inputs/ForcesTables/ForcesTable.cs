@@ -1,6 +1,7 @@
 using System.Collections.Immutable;
-using System.Security.Cryptography;
+using System.Runtime.InteropServices;
 using MemberScan.Foundation.Diagnostics;
+using MemberScan.Inputs.ForcesTables.Rows;
 using MemberScan.Model.Rules;
 
 namespace MemberScan.Inputs.ForcesTables;
@@ -9,7 +10,7 @@ namespace MemberScan.Inputs.ForcesTables;
 /// <remarks>
 /// Header <c>member,situation,kind,station[m],N[kN],Vy[kN],Vz[kN],T[kNm],My[kNm],Mz[kNm]</c>, columns in any order, <c>station[%]</c> for a
 /// share of the length; <c>kind</c> may be left out. Lines that begin with <c>#</c> are remarks, save the directives
-/// <c># convention: positive-face | end-forces</c>, <c># torsion: centroid | shear-centre</c>, <c># situations: load-cases</c>.
+/// <c># convention: positive-face | end-forces</c>, <c># torsion: centroid | shear-centre</c>, <c># situations: load-cases | envelopes</c>, <c># results: linear</c>. Semicolons or tabs may part the columns instead of commas; decimal commas are refused.
 /// </remarks>
 public sealed record ForcesTable
 {
@@ -28,7 +29,13 @@ public sealed record ForcesTable
     /// <summary>Whether each situation acts in full; false when the table says that its rows are single load cases.</summary>
     public required bool ActsInFull { get; init; }
 
-    /// <summary>The rows, in the order of the file; at least one.</summary>
+    /// <summary>Whether each situation is an envelope: the rows at one station hold least and largest values, a single one a magnitude.</summary>
+    public required bool IsEnvelope { get; init; }
+
+    /// <summary>Whether the table says that its load cases are linear results, which may be superposed.</summary>
+    public required bool IsLinear { get; init; }
+
+    /// <summary>The rows, in the order of the file; at least one, none where they went elsewhere as they were read.</summary>
     public required ImmutableArray<ForcesRow> Rows { get; init; }
 
     /// <summary>Reads a table.</summary>
@@ -39,23 +46,48 @@ public sealed record ForcesTable
     public static ForcesTable? Read(ReadOnlyMemory<byte> bytes, string fileName, DiagnosticList diagnostics) =>
         Read(bytes, fileName, diagnostics, TableLimits.Default);
 
+    /// <summary>Reads a table row by row; memory does not grow with the number of rows.</summary>
+    /// <param name="stream">The bytes of the file, read forward only; a table of text, no workbook.</param>
+    /// <param name="fileName">Name of the file, without its folder, for messages.</param>
+    /// <param name="diagnostics">Takes the findings, as for a table that is read whole.</param>
+    /// <param name="sink">Takes each row as it is read. Of no meaning when null is returned.</param>
+    /// <returns>The table without its rows, or null when anything in it is wrong: a table is used whole or not at all.</returns>
+    public static ForcesTable? Stream(Stream stream, string fileName, DiagnosticList diagnostics, ForcesRowSink sink)
+    {
+        ArgumentNullException.ThrowIfNull(stream);
+        ArgumentNullException.ThrowIfNull(fileName);
+        ArgumentNullException.ThrowIfNull(diagnostics);
+        ArgumentNullException.ThrowIfNull(sink);
+        return Stream(stream, fileName, diagnostics, TableLimits.Default, sink);
+    }
+
     internal static ForcesTable? Read(ReadOnlyMemory<byte> bytes, string fileName, DiagnosticList diagnostics, TableLimits limits)
     {
         ArgumentNullException.ThrowIfNull(fileName);
         ArgumentNullException.ThrowIfNull(diagnostics);
-        var findings = new TableFindings(bytes, fileName, diagnostics, limits.Errors);
-        var directives = new TableDirectives(findings);
-        var rows = new TableReader(bytes.Span, limits, findings, directives).Read();
+        var stream = MemoryMarshal.TryGetArray(bytes, out var array) ? new MemoryStream(array.Array!, array.Offset, array.Count, writable: false) : new MemoryStream(bytes.ToArray(), writable: false);
+        var rows = ImmutableArray.CreateBuilder<ForcesRow>();
+        return Stream(stream, fileName, diagnostics, limits, (in ForcesRow row) => rows.Add(row)) is { } table ? table with { Rows = rows.DrainToImmutable() } : null;
+    }
+
+    private static ForcesTable? Stream(Stream stream, string fileName, DiagnosticList diagnostics, TableLimits limits, ForcesRowSink sink)
+    {
+        using var window = new RowWindow(stream, TableReader.Reach(limits));
+        var findings = new TableFindings(fileName, diagnostics, limits.Errors);
+        var reader = new TableReader(window, limits, findings);
+        _ = reader.Read(sink);
         if (findings.Count > 0) return null;
 
         return new ForcesTable
         {
             FileName = fileName,
-            Sha256 = Convert.ToHexStringLower(SHA256.HashData(bytes.Span)),
-            Convention = directives.Convention,
-            Torsion = directives.Torsion,
-            ActsInFull = directives.ActsInFull,
-            Rows = rows,
+            Sha256 = window.Sha256(),
+            Convention = reader.Directives.Convention,
+            Torsion = reader.Directives.Torsion,
+            ActsInFull = reader.Directives.ActsInFull,
+            IsEnvelope = reader.Directives.IsEnvelope,
+            IsLinear = reader.Directives.IsLinear,
+            Rows = [],
         };
     }
 }

@@ -3,9 +3,9 @@ using MemberScan.Model.Rules;
 namespace MemberScan.Inputs.ForcesTables;
 
 /// <summary>What the directive remarks of a table say: <c># name: value</c>.</summary>
-internal sealed class TableDirectives(TableFindings findings)
+internal sealed class TableDirectives(Action<string, int, string> fail)
 {
-    private static readonly string[] s_names = ["convention", "torsion", "situations"];
+    private static readonly string[] s_names = ["convention", "torsion", "situations", "results"];
 
     private readonly Dictionary<string, string> _values = new(StringComparer.Ordinal);
 
@@ -23,13 +23,17 @@ internal sealed class TableDirectives(TableFindings findings)
         _ => TorsionReference.ShearCentre,
     };
 
-    public bool ActsInFull => !_values.ContainsKey("situations");
+    public bool ActsInFull => _values.GetValueOrDefault("situations") != "load-cases";
+
+    public bool IsEnvelope => _values.GetValueOrDefault("situations") == "envelopes";
+
+    public bool IsLinear => _values.ContainsKey("results");
 
     /// <summary>Takes a remark, its '#' included; passes over what is no directive.</summary>
     /// <remarks>
     /// A single word near a directive's name before a colon is taken for a slip of the pen: passing over it would change the meaning unsaid.
     /// </remarks>
-    public void Take(string remark, int start, int line, bool afterRows)
+    public void Take(string remark, int start, bool afterRows)
     {
         var colon = remark.IndexOf(':', StringComparison.Ordinal);
         if (colon < 0) return;
@@ -49,13 +53,14 @@ internal sealed class TableDirectives(TableFindings findings)
         else
             _values[name] = value;
 
-        void Fail(string code, string message) => findings.Add(code, start, start, line, message);
+        void Fail(string code, string message) => fail(code, start, message);
     }
 
     private static string[] ValuesOf(string name) => name switch
     {
         "convention" => ["positive-face", "end-forces"],
         "torsion" => ["centroid", "shear-centre"],
-        _ => ["load-cases"],
+        "situations" => ["load-cases", "envelopes"],
+        _ => ["linear"],
     };
 }

@@ -3,19 +3,23 @@ using MemberScan.Foundation.Diagnostics;
 namespace MemberScan.Inputs.ForcesTables;
 
 /// <summary>The errors of one table, each with its line and column, up to the limit.</summary>
-internal sealed class TableFindings(ReadOnlyMemory<byte> bytes, string fileName, DiagnosticList diagnostics, int most)
+internal sealed class TableFindings(string fileName, DiagnosticList diagnostics, int most)
 {
     public int Count { get; private set; }
 
     /// <summary>Whether reading must go no further.</summary>
     public bool Full => Count >= most;
 
-    /// <summary>Adds an error at a byte of the file, whose row is known to begin at <paramref name="rowStart"/> on line <paramref name="rowLine"/>.</summary>
-    public void Add(string code, int offset, int rowStart, int rowLine, string message)
+    /// <summary>Adds an error at a byte of the table.</summary>
+    /// <param name="code">Its code.</param>
+    /// <param name="offset">Place of the byte in the table.</param>
+    /// <param name="before">What stands between the beginning of the row and that byte.</param>
+    /// <param name="rowLine">Line on which the row begins.</param>
+    /// <param name="message">What is wrong, and the remedy.</param>
+    public void Add(string code, long offset, ReadOnlySpan<byte> before, int rowLine, string message)
     {
         if (Full) return;
 
-        var before = bytes.Span[rowStart..offset];
         var line = rowLine + before.Count((byte)'\n');
         var column = CodePoints(before[(before.LastIndexOf((byte)'\n') + 1)..]) + 1;
         diagnostics.Add(code, Severity.Error, message, new SourceSpan(fileName, offset, line, column, 0));

@@ -30,21 +30,20 @@ internal sealed class TableHeader
     /// <summary>Reads the header; what is wrong is added to the findings.</summary>
     /// <param name="cells">Text of each cell and the byte at which it begins.</param>
     /// <param name="rowStart">First byte of the row.</param>
-    /// <param name="rowLine">Line of the row.</param>
-    /// <param name="findings">Takes the errors.</param>
-    public static TableHeader Read(IReadOnlyList<(string Text, int Start)> cells, int rowStart, int rowLine, TableFindings findings)
+    /// <param name="fail">Takes the errors: code, byte, message.</param>
+    public static TableHeader Read(IReadOnlyList<(string Text, int Start)> cells, int rowStart, Action<string, int, string> fail)
     {
         var header = new TableHeader(cells.Count);
         for (var place = 0; place < cells.Count; place++)
         {
             var (text, start) = cells[place];
-            header.Take(text, place, (code, message) => findings.Add(code, start, rowStart, rowLine, message));
+            header.Take(text, place, (code, message) => fail(code, start, message));
         }
 
         var missing = TableColumn.All.Where((column, i) => column.IsRequired && header._places[i] < 0).ToArray();
         foreach (var column in missing)
         {
-            findings.Add(InputCodes.ColumnMissing, rowStart, rowStart, rowLine,
+            fail(InputCodes.ColumnMissing, rowStart,
                 $"the column '{column.Name}' is missing; add it as {Example(column)}");
         }
 

@@ -1,108 +1,138 @@
-using System.Collections.Immutable;
 using System.Text;
 using System.Text.Unicode;
+using MemberScan.Inputs.ForcesTables.Rows;
 using MemberScan.Inputs.Values;
 using MemberScan.Mechanics.Forces;
 using MemberScan.Model.Forces;
 
 namespace MemberScan.Inputs.ForcesTables;
 
-/// <summary>Turns the bytes of a forces table into rows; goes on after an error to find the next.</summary>
-internal ref struct TableReader
+/// <summary>Turns the bytes of a forces table into rows, one at a time; goes on after an error to find the next.</summary>
+/// <remarks>Memory grows with the number of different names and situations of members, not with the number of rows.</remarks>
+internal sealed class TableReader
 {
     private static readonly string[] s_kinds = ["service", "design"];
 
-    private readonly ReadOnlySpan<byte> _bytes;
+    private readonly RowWindow _window;
     private readonly TableLimits _limits;
     private readonly TableFindings _findings;
     private readonly TableDirectives _directives;
+    private readonly CsvScanner _scanner;
     private readonly List<CsvField> _fields = [];
     private readonly char[] _letters;
-    private readonly HashSet<string> _names = new(StringComparer.Ordinal);
-    private readonly Dictionary<(string Member, string Situation), (SituationKind Kind, int Line)> _kinds = [];
-    private CsvScanner _scanner;
+    private readonly NameTable _names = new();
+    private readonly Dictionary<long, (SituationKind Kind, int Line)> _kinds = [];
+    private readonly (int Number, byte[] Spelling)[] _last = [(-1, []), (-1, [])];
+    private (long Key, SituationKind Kind) _lastKind = (-1, SituationKind.Unknown);
 
-    public TableReader(ReadOnlySpan<byte> bytes, TableLimits limits, TableFindings findings, TableDirectives directives)
+    public TableReader(RowWindow window, TableLimits limits, TableFindings findings)
     {
-        _bytes = bytes;
-        (_limits, _findings, _directives) = (limits, findings, directives);
-        _scanner = new CsvScanner(bytes, limits);
-        _letters = new char[Math.Max(limits.FieldLength, limits.RowLength)];
+        (_window, _limits, _findings) = (window, limits, findings);
+        _scanner = new CsvScanner(window, limits);
+        _letters = new char[Math.Max(limits.FieldLength, limits.RowLength) + limits.FieldLength + 2];
+        _directives = new TableDirectives(Fail);
     }
 
-    public ImmutableArray<ForcesRow> Read()
-    {
-        if (!Utf8.IsValid(_bytes))
-        {
-            FailOnEncoding();
-            return [];
-        }
+    /// <summary>What the directives say; complete once the first row was read.</summary>
+    public TableDirectives Directives => _directives;
 
+    /// <summary>Bytes that a window must show from the start of a row.</summary>
+    public static int Reach(TableLimits limits) => limits.RowLength + 2 * limits.FieldLength + 16;
+
+    /// <summary>Reads all rows; gives their number, of meaning only when nothing was found.</summary>
+    public int Read(ForcesRowSink sink)
+    {
         TableHeader? header = null;
-        var rows = ImmutableArray.CreateBuilder<ForcesRow>();
-        while (!_findings.Full && _scanner.TryRow(_fields))
+        var rows = 0;
+        while (!_findings.Full && (header is not null || FindSeparator()) && _scanner.TryRow(_fields))
         {
-            if (_scanner.Fault != CsvFault.None) FailOnFault(header is null);
-            else if (_scanner.IsRemark) _directives.Take(Text(_fields[0]).ToString(), _scanner.RowStart, _scanner.RowLine, afterRows: rows.Count > 0);
+            if (_scanner.Fault != CsvFault.None)
+            {
+                FailOnFault();
+                _scanner.Resume();
+                if (header is null) return 0;                          // without a header no later row can be understood
+                continue;
+            }
+
+            if (!Utf8.IsValid(_window.Bytes[_scanner.RowStart.._scanner.RowEnd]))
+            {
+                FailOnEncoding();
+                return 0;
+            }
+
+            if (_scanner.IsRemark) _directives.Take(Text(_fields[0]).ToString(), _scanner.RowStart, afterRows: rows > 0);
             else if (IsBlank()) continue;
             else if (header is null)
             {
-                if (HasOtherSeparator()) return [];
                 var before = _findings.Count;
                 header = ReadHeader();
-                if (_findings.Count > before) return [];               // rows mean nothing under a wrong header
+                if (_findings.Count > before) return 0;                // rows mean nothing under a wrong header
             }
-            else if (rows.Count >= _limits.Rows)
+            else if (rows >= _limits.Rows)
             {
                 Fail(InputCodes.TableLimit, _scanner.RowStart, $"the table has more than {_limits.Rows} rows; split it");
-                return [];
+                return 0;
             }
-            else if (TryRow(header, out var row)) rows.Add(row);
-
-            // Without a header no later row can be understood.
-            if (header is null && _scanner.Fault != CsvFault.None) return [];
+            else if (TryRow(header, out var row))
+            {
+                rows++;
+                sink(row);
+            }
         }
 
-        if (_findings.Count > 0) return [];
+        if (_findings.Count > 0) return 0;
         if (header is null) _findings.Add(InputCodes.TableEmpty, "the table is empty; its first line names the columns: " + HeaderExample);
-        else if (rows.Count == 0) _findings.Add(InputCodes.TableWithoutRows, "the table has a header but no rows; add the section forces or leave the table out");
-        return rows.DrainToImmutable();
+        else if (rows == 0) _findings.Add(InputCodes.TableWithoutRows, "the table has a header but no rows; add the section forces or leave the table out");
+        return rows;
     }
 
     private const string HeaderExample = "member,situation,kind,station[m],N[kN],Vy[kN],Vz[kN],T[kNm],My[kNm],Mz[kNm]";
 
-    private readonly bool IsBlank() => _fields.Count == 1 && !_fields[0].IsQuoted && Text(_fields[0]).Trim().IsEmpty;
+    private bool IsBlank() => _fields.Count == 1 && !_fields[0].IsQuoted && Text(_fields[0]).Trim().IsEmpty;
 
-    // A table of semicolons or tabs has no comma in its header.
-    private readonly bool HasOtherSeparator()
+    /// <summary>Before the header: what stands between its columns. False when it cannot be told.</summary>
+    private bool FindSeparator()
     {
-        if (_fields.Count > 1 || _fields[0].IsQuoted) return false;
+        var line = _scanner.PeekLine();
+        if (line.IsEmpty || line[0] == '#') return true;
 
-        var field = _fields[0];
-        var other = _bytes.Slice(field.Start, field.Length).IndexOfAny(";\t"u8);
-        if (other < 0) return false;
+        if (line is [(byte)'s', (byte)'e', (byte)'p', (byte)'=', var named] && named is (byte)',' or (byte)';' or (byte)'\t')
+        {
+            _scanner.Separator = named;                                // written by spreadsheet programs; the header below must agree
+            _scanner.SkipLine();
+            return FindSeparator();
+        }
 
-        FailOnSeparator(field.Start + other);
-        return true;
+        var (commas, semicolons, tabs) = (line.Contains((byte)','), line.Contains((byte)';'), line.Contains((byte)'\t'));
+        if ((commas ? 1 : 0) + (semicolons ? 1 : 0) + (tabs ? 1 : 0) <= 1)
+        {
+            if (semicolons) _scanner.Separator = (byte)';';
+            else if (tabs) _scanner.Separator = (byte)'\t';
+            return true;
+        }
+
+        // A blank line of tabs, or blanks around the names, is no second separator.
+        if (commas && !semicolons && !line.Trim(" \t"u8).Contains((byte)'\t')) return true;
+
+        var at = _scanner.RowStart + line.IndexOfAny(semicolons ? ";"u8 : "\t"u8);
+        Fail(InputCodes.Separator, at, "the columns of the header are parted by more than one of comma, semicolon and tab; save the table with one of them");
+        return false;
     }
 
-    private readonly void FailOnSeparator(int at) => Fail(InputCodes.Separator, at,
-        $"the columns are parted by {(_bytes[at] == ';' ? "semicolons" : "tabs")}; save the table as CSV with commas and decimal points");
-
-    private readonly TableHeader ReadHeader()
+    private TableHeader ReadHeader()
     {
         var cells = new List<(string, int)>(_fields.Count);
         foreach (var field in _fields) cells.Add((Text(field).Trim().ToString(), field.Start));
-        return TableHeader.Read(cells, _scanner.RowStart, _scanner.RowLine, _findings);
+        return TableHeader.Read(cells, _scanner.RowStart, Fail);
     }
 
-    private readonly bool TryRow(TableHeader header, out ForcesRow row)
+    private bool TryRow(TableHeader header, out ForcesRow row)
     {
         row = default;
         if (_fields.Count != header.Width)
         {
             var at = _fields[Math.Min(header.Width, _fields.Count - 1)].Start;
-            var advice = _fields.Count > header.Width ? "; perhaps a number has a decimal comma: write it with a point" : "";
+            var advice = _fields.Count > header.Width && _scanner.Separator == ',' ? "; perhaps a number has a decimal comma: write it with a point" : "";
             Fail(InputCodes.FieldCount, at, $"the row has {_fields.Count} fields, the header {header.Width}{advice}");
             return false;
         }
@@ -116,41 +146,58 @@ internal ref struct TableReader
         for (var i = 0; i < forces.Length; i++) forces[i] = Number(header, TableColumn.FirstForce + i);
         if (_findings.Count > before || !KindAgrees(header, member, situation, kind)) return false;
 
-        row = new ForcesRow(_scanner.RowLine, member, situation, kind, station, header.StationIsShare,
+        row = new ForcesRow(_scanner.RowLine, _names[member], _names[situation], kind, station, header.StationIsShare,
             new SectionForces(forces[0], forces[1], forces[2], forces[3], forces[4], forces[5]));
         return true;
     }
 
-    // Names repeat from row to row: one string each.
-    private readonly string Name(TableHeader header, int column)
+    // Names repeat from row to row: one string each, and mostly that of the row before.
+    private int Name(TableHeader header, int column)
     {
         var field = _fields[header.PlaceOf(column)];
+        var spelling = _window.Bytes.Slice(field.Start, field.Length);
+        ref var last = ref _last[column];
+        if (!field.IsQuoted && last.Number >= 0 && spelling.SequenceEqual(last.Spelling)) return last.Number;
+        if (field.IsQuoted || !_names.TryFind(spelling, out var number)) number = NewName(field, spelling, column);
+        if (number >= 0 && !field.IsQuoted) last = (number, spelling.SequenceEqual(last.Spelling) ? last.Spelling : spelling.ToArray());
+        return number;
+    }
+
+    private int NewName(CsvField field, ReadOnlySpan<byte> spelling, int column)
+    {
         var text = Trimmed(field);
         if (text.IsEmpty)
         {
             Fail(InputCodes.FieldEmpty, field.Start, $"the field '{TableColumn.Names[column]}' is empty; name the {TableColumn.Names[column]}");
-            return "";
+            return -1;
         }
 
-        if (_names.GetAlternateLookup<ReadOnlySpan<char>>().TryGetValue(text, out var known)) return known;
         foreach (var letter in text)
         {
             if (Excerpt.IsPlain(letter) || char.IsSurrogate(letter)) continue;
             Fail(InputCodes.ControlCharacter, field.Start,
                 $"the {TableColumn.Names[column]} {Excerpt.Of(text)} holds a line end, control or direction character; take it out");
-            return "";
+            return -1;
         }
 
-        var name = text.ToString();
-        _names.Add(name);
-        return name;
+        if (_names.Count >= _limits.Names)
+        {
+            Fail(InputCodes.TableLimit, field.Start, $"the table has more than {_limits.Names} different names; split it");
+            return -1;
+        }
+
+        return field.IsQuoted ? _names.Add([], text.ToString()) : _names.Add(spelling, text.ToString());
     }
 
-    private readonly SituationKind Kind(TableHeader header)
+    private SituationKind Kind(TableHeader header)
     {
         if (header.PlaceOf(TableColumn.Kind) < 0) return SituationKind.Unknown;
 
         var field = _fields[header.PlaceOf(TableColumn.Kind)];
+        var bytes = _window.Bytes.Slice(field.Start, field.Length);
+        if (bytes.SequenceEqual("service"u8)) return SituationKind.Service;
+        if (bytes.SequenceEqual("design"u8)) return SituationKind.Design;
+
         var text = Trimmed(field);
         if (text.IsEmpty) return SituationKind.Unknown;
         if (text.SequenceEqual("service")) return SituationKind.Service;
@@ -160,7 +207,7 @@ internal ref struct TableReader
         return SituationKind.Unknown;
     }
 
-    private readonly double Station(TableHeader header)
+    private double Station(TableHeader header)
     {
         var station = Number(header, TableColumn.Station);
         if (station >= 0 && (!header.StationIsShare || station <= 1)) return station;
@@ -171,9 +218,11 @@ internal ref struct TableReader
         return 0;
     }
 
-    private readonly double Number(TableHeader header, int column)
+    private double Number(TableHeader header, int column)
     {
         var field = _fields[header.PlaceOf(column)];
+        if (DecimalBytes.TryRead(_window.Bytes.Slice(field.Start, field.Length), out var plain) && plain * header.FactorOf(column) is var si && double.IsFinite(si)) return si;
+
         var text = Trimmed(field);
         var fault = NumberText.Read(text, out var number);
         var value = number * header.FactorOf(column);
@@ -192,15 +241,20 @@ internal ref struct TableReader
         return 0;
     }
 
-    private readonly bool KindAgrees(TableHeader header, string member, string situation, SituationKind kind)
+    private bool KindAgrees(TableHeader header, int member, int situation, SituationKind kind)
     {
-        if (_kinds.TryAdd((member, situation), (kind, _scanner.RowLine))) return true;
+        var key = ((long)member << 32) | (uint)situation;
+        if (_lastKind == (key, kind)) return true;
 
-        var earlier = _kinds[(member, situation)];
-        if (earlier.Kind == kind) return true;
+        if (_kinds.TryAdd(key, (kind, _scanner.RowLine)) || _kinds[key].Kind == kind)
+        {
+            _lastKind = (key, kind);
+            return true;
+        }
 
+        var earlier = _kinds[key];
         Fail(InputCodes.KindContradicted, _fields[header.PlaceOf(TableColumn.Kind)].Start,
-            $"situation {Excerpt.Of(situation)} of member {Excerpt.Of(member)} is {Word(kind)} here and {Word(earlier.Kind)} on line {earlier.Line}; "
+            $"situation {Excerpt.Of(_names[situation])} of member {Excerpt.Of(_names[member])} is {Word(kind)} here and {Word(earlier.Kind)} on line {earlier.Line}; "
             + "a situation has one kind");
         return false;
     }
@@ -212,16 +266,8 @@ internal ref struct TableReader
         _ => "without a kind",
     };
 
-    private readonly void FailOnFault(bool inHeader)
+    private void FailOnFault()
     {
-        var row = _bytes[_scanner.RowStart..];
-        row = row[..Math.Max(0, row.IndexOf((byte)'\n'))];
-        if (inHeader && !row.Contains((byte)',') && row.IndexOfAny(";\t"u8) is >= 0 and var other)
-        {
-            FailOnSeparator(_scanner.RowStart + other);
-            return;
-        }
-
         var (code, message) = _scanner.Fault switch
         {
             CsvFault.QuoteNotClosed => (InputCodes.Quoting, "the quoted field that begins here is not closed; add its closing quote"),
@@ -235,26 +281,26 @@ internal ref struct TableReader
         Fail(code, _scanner.FaultAt, message);
     }
 
-    private readonly void FailOnEncoding()
+    private void FailOnEncoding()
     {
-        var (at, rowStart, line) = (0, 0, 1);
-        while (Rune.DecodeFromUtf8(_bytes[at..], out _, out var length) == System.Buffers.OperationStatus.Done)
-        {
-            if (_bytes[at] == '\n') (rowStart, line) = (at + 1, line + 1);
-            at += length;
-        }
-
-        _findings.Add(InputCodes.TableNotUtf8, at, rowStart, line, "the text is not UTF-8 here; save the table as CSV in UTF-8");
+        var row = _window.Bytes[_scanner.RowStart.._scanner.RowEnd];
+        var at = 0;
+        while (Rune.DecodeFromUtf8(row[at..], out _, out var length) == System.Buffers.OperationStatus.Done) at += length;
+        Fail(InputCodes.TableNotUtf8, _scanner.RowStart + at, "the text is not UTF-8 here; save the table as CSV in UTF-8");
     }
 
-    private readonly void Fail(string code, int at, string message) => _findings.Add(code, at, _scanner.RowStart, _scanner.RowLine, message);
+    private void Fail(string code, int at, string message)
+    {
+        var bytes = _window.Bytes;
+        _findings.Add(code, _window.Offset + at, bytes[_scanner.RowStart..at], _scanner.RowLine, message);
+    }
 
-    private readonly ReadOnlySpan<char> Trimmed(CsvField field) => field.IsQuoted ? Text(field) : Text(field).Trim();
+    private ReadOnlySpan<char> Trimmed(CsvField field) => field.IsQuoted ? Text(field) : Text(field).Trim();
 
     // Valid only until the next call: the letters are shared.
-    private readonly ReadOnlySpan<char> Text(CsvField field)
+    private ReadOnlySpan<char> Text(CsvField field)
     {
-        var text = _letters.AsSpan(0, Encoding.UTF8.GetChars(_bytes.Slice(field.Start, field.Length), _letters));
+        var text = _letters.AsSpan(0, Encoding.UTF8.GetChars(_window.Bytes.Slice(field.Start, field.Length), _letters));
         if (!field.IsQuoted || !text.Contains('"')) return text;
 
         var length = 0;

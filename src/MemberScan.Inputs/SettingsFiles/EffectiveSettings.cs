@@ -4,6 +4,7 @@ using System.Text.Encodings.Web;
 using System.Text.Json;
 using MemberScan.Foundation.Units;
 using MemberScan.Inputs.Materials;
+using MemberScan.Inputs.SettingsFiles.Forces;
 using MemberScan.Model.Forces;
 using MemberScan.Model.Limits;
 using MemberScan.Model.Presets;
@@ -27,6 +28,7 @@ internal static class EffectiveSettings
         Add("sections.recogniseMeshes", settings.Reading.RecogniseMeshes ? "true" : "false");
         if (settings.Reading.Roles.Select(OfRole).SequenceEqual(RoleRule.Default.Select(OfRole))) Add("roles", "the shipped rules");
         else AddAll("roles", settings.Reading.Roles.Select((rule, i) => ($"[{i + 1}]", OfRole(rule))));
+        Add("forces.from", forces.From.SequenceEqual(ForceRules.AutomaticOrder) ? "auto" : Listed([.. forces.From.Select(SettingKeys.Sources.WordOf)]));
         Add("forces.convention", SettingKeys.Conventions.WordOf(forces.Convention));
         Add("forces.components", SettingKeys.Components.WordOf(forces.Components));
         Add("forces.turnDegrees", Number(forces.TurnDegrees));
@@ -35,6 +37,12 @@ internal static class EffectiveSettings
         Add("forces.missingComponents", SettingKeys.MissingComponents.WordOf(forces.MissingComponentsAreZero));
         Add("forces.unknownMembers", SettingKeys.UnknownMembers.WordOf(forces.ListUnknownMembers));
         AddAll("forces.kinds", forces.Kinds.Select((kind, i) => ($"[{i + 1}]", $"{Quoted(kind.Pattern)} {SettingKeys.Kinds.WordOf(kind.Kind)}")));
+        Add("forces.missingCoefficients", ForceKeys.MissingCoefficients.WordOf(forces.MissingCoefficientsAreOne));
+        Add("forces.caseCoefficients", ForceKeys.CaseCoefficientWords.WordOf(forces.CaseCoefficients));
+        AddAll("forces.combinations", forces.Combinations.Select((combination, i) => ($"[{i + 1}]", ForceTexts.Of(combination))));
+        Add("forces.combinationSets", Listed([.. forces.CombinationSets.Select(ForceKeys.Sets.WordOf)]));
+        AddAll("forces.caseTags", forces.CaseTags.Select((tag, i) => ($"[{i + 1}]", $"{Quoted(tag.Pattern)} {ForceKeys.Tags.WordOf(tag.Tag)}")));
+        AddAll("forces.propertySets", forces.PropertySets.Select((mapping, i) => ($"[{i + 1}]", ForceTexts.Of(mapping))));
         lines.Add(new EffectiveSetting("forces.kindOfAll", KindOfAll(forces.KindOfAll), forces.KindOfAll == SituationKind.Unknown));
         AddAll("loads.presets", settings.Loads.Presets.Select((use, i) => ($"[{i + 1}]", OfUse(use))));
         Add("loads.contactTolerance", $"{Number(settings.Loads.ContactTolerance)} m");
@@ -105,7 +113,7 @@ internal static class EffectiveSettings
         _ => "Pa",
     };
 
-    private static string Number(double value) => value.ToString("R", CultureInfo.InvariantCulture);
+    internal static string Number(double value) => value.ToString("R", CultureInfo.InvariantCulture);
 
-    private static string Quoted(string text) => $"\"{JsonEncodedText.Encode(text, JavaScriptEncoder.UnsafeRelaxedJsonEscaping)}\"";
+    internal static string Quoted(string text) => $"\"{JsonEncodedText.Encode(text, JavaScriptEncoder.UnsafeRelaxedJsonEscaping)}\"";
 }

@@ -19,7 +19,10 @@ internal static class SettingKeys
     public static readonly ImmutableArray<string> RoleEntry =
         ["role", "classes", "predefinedTypes", "namePattern", "minSlopeDegrees", "maxSlopeDegrees", "minSlenderness"];
     public static readonly ImmutableArray<string> Forces =
-        ["convention", "components", "turnDegrees", "turnDegreesByMember", "missingComponents", "unknownMembers", "kinds"];
+    ["from", 
+        "convention", "components", "turnDegrees", "turnDegreesByMember", "missingComponents", "unknownMembers", "kinds",
+        "missingCoefficients", "caseCoefficients", "combinations", "combinationSets", "caseTags", "propertySets",
+    ];
     public static readonly ImmutableArray<string> KindEntry = ["pattern", "kind"];
     public static readonly ImmutableArray<string> Materials = ["grades", "poisson"];
     public static readonly ImmutableArray<string> Stability = ["lengthFactor"];
@@ -34,9 +37,13 @@ internal static class SettingKeys
         new(("allowable-von-mises", Criterion.AllowableVonMises), ("allowable-tresca", Criterion.AllowableTresca));
     public static readonly WordTable<Criterion> DesignCriteria = new(("en-1993-1-1-elastic", Criterion.En1993Elastic));
     public static readonly WordTable<ForceConvention> Conventions =
+        new(("positive-face", ForceConvention.PositiveFace), ("end-forces", ForceConvention.EndForces), ("detect", ForceConvention.Detect));
+    public static readonly WordTable<ForceConvention> StatedConventions =
         new(("positive-face", ForceConvention.PositiveFace), ("end-forces", ForceConvention.EndForces));
     public static readonly WordTable<ForceComponents> Components =
         new(("as-flagged", ForceComponents.AsFlagged), ("member-axes", ForceComponents.MemberAxes), ("global-axes", ForceComponents.GlobalAxes));
+    public static readonly WordTable<ForceSource> Sources = new(
+        ("table", ForceSource.Table), ("results", ForceSource.Results), ("property-sets", ForceSource.PropertySets), ("statics", ForceSource.Statics), ("presets", ForceSource.Presets));
     public static readonly WordTable<bool> MissingComponents = new(("refuse", false), ("zero", true));
     public static readonly WordTable<bool> UnknownMembers = new(("refuse", false), ("list", true));
     public static readonly WordTable<SituationKind> Kinds = new(("service", SituationKind.Service), ("design", SituationKind.Design));

@@ -4,6 +4,7 @@ using System.Text.Json;
 using MemberScan.Inputs.Json;
 using MemberScan.Inputs.Materials;
 using MemberScan.Inputs.Presets;
+using MemberScan.Inputs.SettingsFiles.Forces;
 using MemberScan.Inputs.Values;
 using MemberScan.Model.Limits;
 using MemberScan.Model.Presets;

@@ -1,3 +1,4 @@
+using MemberScan.Mechanics.Edges;
 using NetTopologySuite.Geometries;
 using NetTopologySuite.Triangulate;
 

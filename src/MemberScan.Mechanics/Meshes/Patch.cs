@@ -1,3 +1,5 @@
+using MemberScan.Mechanics.Edges;
+
 namespace MemberScan.Mechanics.Meshes;
 
 /// <summary>A piece of a section with four sides, straight or arcs, seen as the image of the square [−1, 1]².</summary>

@@ -1,3 +1,4 @@
+using MemberScan.Mechanics.Edges;
 using MemberScan.Mechanics.Sections;
 
 namespace MemberScan.Mechanics.Meshes;
@@ -5,12 +6,6 @@ namespace MemberScan.Mechanics.Meshes;
 /// <summary>Patches of sections made of straight sides and quarter circles: the first quadrant of a box or a rounded rectangle.</summary>
 internal static class WalledMesh
 {
-    // Each layer towards a sharp re-entrant corner is this much thinner than the last.
-    private const double Grading = 0.15;
-
-    // Where layers towards a corner end, as a share of the wall: what lies nearer cannot be told from the corner itself.
-    private const double Finest = 0.01;
-
     /// <summary>The first quadrant of a box: columns from the middle of the top wall around the corner, layers across the wall.</summary>
     public static PatchMesh Of(Box section)
     {
@@ -19,7 +14,7 @@ internal static class WalledMesh
         var (innerY, innerZ) = (outerY - t, outerZ - t);
         var block = Math.Max(ro, t + ri);
         var (flatY, flatZ) = (Nothing(outerY - block, t), Nothing(outerZ - block, t));
-        var layers = Fractions(Layers(ri, t), 1);
+        var layers = Grading.Fractions(Grading.Layers(ri, t), 1);
         var patches = new List<Patch>();
 
         void Column(EdgeCurve inner, EdgeCurve outer)
@@ -30,7 +25,7 @@ internal static class WalledMesh
         // A piece of a corner, cut near the junction of arc and straight side, where the curvature jumps.
         void Bent(EdgeCurve inner, EdgeCurve outer, double from, double to)
         {
-            if (ri < 0.3 * t)
+            if (ri < Grading.RoundFrom * t)
             {
                 Column(inner, outer);
                 return;
@@ -44,17 +39,17 @@ internal static class WalledMesh
         {
             if (length == 0) return;
             var (inner, outer) = (EdgeCurve.Line(innerFrom, innerTo), EdgeCurve.Line(outerFrom, outerTo));
-            var cuts = Fractions(Graded(length, ri >= 0.3 * t ? Grading * t : Math.Max(ri, Finest * t), t), length);
+            var cuts = Grading.Fractions(Grading.Graded(length, ri >= Grading.RoundFrom * t ? Grading.Ratio * t : Math.Max(ri, Grading.Finest * t), t), length);
             for (var k = 1; k < cuts.Length; k++) Column(inner.Piece(cuts[k - 1], cuts[k]), outer.Piece(cuts[k - 1], cuts[k]));
         }
 
         var diagonal = Math.PI / 4;
         var (innerCentre, outerCentre) = ((innerY - ri, innerZ - ri), (outerY - ro, outerZ - ro));
         Wall((0, innerZ), (flatY, innerZ), (0, outerZ), (flatY, outerZ), flatY);
-        foreach (var (inner, outer) in HalfCorner(innerCentre, ri, outerCentre, ro, flatY, innerZ, outerZ)) Bent(inner, outer, 0, Grading);
+        foreach (var (inner, outer) in HalfCorner(innerCentre, ri, outerCentre, ro, flatY, innerZ, outerZ)) Bent(inner, outer, 0, Grading.Ratio);
         // The other half is the mirror image in the line y = z of the same corner of the turned section.
         var turned = HalfCorner((innerZ - ri, innerY - ri), ri, (outerZ - ro, outerY - ro), ro, flatZ, innerY, outerY).Reverse();
-        foreach (var (inner, outer) in turned) Bent(Mirrored(inner), Mirrored(outer), 1 - Grading, 1);
+        foreach (var (inner, outer) in turned) Bent(Mirrored(inner), Mirrored(outer), 1 - Grading.Ratio, 1);
         Wall((innerY, 0), (innerY, flatZ), (outerY, 0), (outerY, flatZ), flatZ);
         return new PatchMesh(patches, true, Math.Max(outerY, outerZ));
 
@@ -71,7 +66,7 @@ internal static class WalledMesh
                 var bent = radiusIn * diagonal + 0.5 * t;
                 var split = diagonal * (1 + bent / (bent + straightIn));
                 // Long beside a small radius: in several pieces, each with its share of the outer arc.
-                var cuts = Fractions(Graded(straightIn, radiusIn >= 0.3 * t ? straightIn : Math.Max(radiusIn, Finest * t), t), straightIn);
+                var cuts = Grading.Fractions(Grading.Graded(straightIn, radiusIn >= Grading.RoundFrom * t ? straightIn : Math.Max(radiusIn, Grading.Finest * t), t), straightIn);
                 var outerPart = Bend(co, radiusOut, 2 * diagonal, split);
                 for (var k = 1; k < cuts.Length; k++) yield return (innerLine.Piece(cuts[k - 1], cuts[k]), outerPart.Piece(cuts[k - 1], cuts[k]));
                 yield return (innerArc, Bend(co, radiusOut, split, diagonal));
@@ -104,7 +99,7 @@ internal static class WalledMesh
         var (columns, rows) = (Steps(flatY), Steps(flatZ));
         var patches = new List<Patch>();
         // The quarter circle and what lies beside it in two layers, cut near the junctions of arc and side, where the curvature jumps.
-        ReadOnlySpan<double> layers = [0, 1 - Grading, 1];
+        ReadOnlySpan<double> layers = [0, 1 - Grading.Ratio, 1];
         for (var i = 1; i < columns.Length; i++)
         {
             for (var j = 1; j < rows.Length; j++) Block(columns[i - 1], columns[i], rows[j - 1], rows[j]);
@@ -113,7 +108,7 @@ internal static class WalledMesh
 
         var centre = EdgeCurve.Line((flatY, flatZ), (flatY, flatZ));
         var arc = EdgeCurve.Arc((flatY, flatZ), r, Math.PI / 2, 0);
-        ReadOnlySpan<double> shares = [0, Grading / 2, 0.5, 1 - Grading / 2, 1];
+        ReadOnlySpan<double> shares = [0, Grading.Ratio / 2, 0.5, 1 - Grading.Ratio / 2, 1];
         for (var i = 1; i < shares.Length; i++)
         {
             for (var k = 1; k < layers.Length; k++)
@@ -131,39 +126,7 @@ internal static class WalledMesh
             patches.Add(Patch.Ruled(EdgeCurve.Line((y0, z0), (y1, z0)), EdgeCurve.Line((y0, z1), (y1, z1)), (0, 1), (0, 1)));
 
         double[] Steps(double length) => length == 0 ? [0]
-            : [.. Fractions(Graded(length, Grading * r, Math.Min(halfY, halfZ)), length).Select(share => share * length)];
-    }
-
-    // Lengths of pieces from an end inwards: growing from the first, fast while below the size of the neighbourhood.
-    private static List<double> Graded(double length, double first, double size)
-    {
-        var pieces = new List<double>();
-        for (var (rest, piece) = (length, Math.Min(first, size)); ;)
-        {
-            if (rest <= 1.6 * piece)
-            {
-                pieces.Add(rest);
-                return pieces;
-            }
-
-            pieces.Add(piece);
-            rest -= piece;
-            piece = piece < size ? Math.Min(piece * (1 / Grading - 1), Math.Max(size, piece)) : 3 * piece;
-        }
-    }
-
-    private static List<double> Layers(double innerRadius, double wall) => innerRadius >= 0.3 * wall
-        ? [Grading * wall, (1 - 2 * Grading) * wall, Grading * wall]
-        : [.. Enumerable.Reverse(Graded(wall, Math.Max(innerRadius, Finest * wall), wall))];
-
-    // Pieces counted from the end: shares of the whole from the start.
-    private static double[] Fractions(List<double> pieces, double length)
-    {
-        var total = pieces.Sum();
-        var cuts = new double[pieces.Count + 1];
-        for (var k = 1; k < pieces.Count; k++) cuts[k] = cuts[k - 1] + pieces[^k] / total;
-        cuts[^1] = length > 0 ? 1 : 0;
-        return cuts;
+            : [.. Grading.Fractions(Grading.Graded(length, Grading.Ratio * r, Math.Min(halfY, halfZ)), length).Select(share => share * length)];
     }
 
     private static EdgeCurve Bend((double Y, double Z) centre, double radius, double from, double to) =>

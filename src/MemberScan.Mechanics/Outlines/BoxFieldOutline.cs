@@ -1,5 +1,5 @@
+using MemberScan.Mechanics.Edges;
 using MemberScan.Mechanics.Forces;
-using MemberScan.Mechanics.Meshes;
 using MemberScan.Mechanics.Sections;
 
 namespace MemberScan.Mechanics.Outlines;

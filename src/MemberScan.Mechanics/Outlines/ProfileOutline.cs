@@ -1,4 +1,5 @@
 using System.Collections.Immutable;
+using MemberScan.Mechanics.Edges;
 using MemberScan.Mechanics.Forces;
 using MemberScan.Mechanics.Meshes;
 using MemberScan.Mechanics.Sections;
@@ -14,6 +15,10 @@ namespace MemberScan.Mechanics.Outlines;
 internal sealed class ProfileOutline : Outline
 {
     private const int RasterPoints = 700;
+    private const int NodesPerPiece = 11;
+    private const double LongestPerWall = 1.5;
+    private const int FewestPieces = 2;
+    private const int MostPieces = 40;
     private const double Hair = 1e-9;
     private readonly OutlineShape _shape;
     private readonly PatchMesh _mesh;
@@ -27,8 +32,12 @@ internal sealed class ProfileOutline : Outline
         : base(section)
     {
         (_shape, _mesh, _hasPeaks, _name) = (shape, mesh, hasPeaks, name);
-        EdgeCurve[] pieces = [.. shape.Edges.SelectMany(Deciding), .. hasPeaks ? shape.Corners.SelectMany(ZoneEdges).SelectMany(Kept) : [], .. creases];
-        Edges = new Chart(Lattice.Curves(pieces.Length, RoundedCorner.NodesPerPiece, ring: false), (p, q) => pieces[(int)q].At(0.5 * (1 + (1 - Hair) * Math.Sin(p))));
+        EdgeCurve[] pieces =
+        [
+            .. shape.Edges.SelectMany(Deciding).SelectMany(Short), .. hasPeaks ? shape.Corners.SelectMany(ZoneEdges).SelectMany(Kept) : [],
+            .. creases.SelectMany(WithinMaterial),
+        ];
+        Edges = new Chart(Lattice.Curves(pieces.Length, NodesPerPiece, ring: false), (p, q) => pieces[(int)q].At(0.5 * (1 + (1 - Hair) * Math.Sin(p))));
         var raster = Raster(out _fallback);
         Inside = raster is null ? null : new Chart(raster, Inward);
     }
@@ -99,7 +108,13 @@ internal sealed class ProfileOutline : Outline
                 for (var j = 0; j < rule.QuadratureCount; j++)
                 {
                     var at = patch.Map(rule.QuadratureAt[i], rule.QuadratureAt[j]);
-                    yield return (at.Y, at.Z, rule.QuadratureWeights[i] * rule.QuadratureWeights[j] * Math.Abs(at.Determinant));
+                    var area = rule.QuadratureWeights[i] * rule.QuadratureWeights[j] * Math.Abs(at.Determinant);
+                    yield return (at.Y, at.Z, area);
+                    if (!_mesh.IsQuarter) continue;
+
+                    yield return (-at.Y, at.Z, area);
+                    yield return (-at.Y, -at.Z, area);
+                    yield return (at.Y, -at.Z, area);
                 }
             }
         }
@@ -107,6 +122,15 @@ internal sealed class ProfileOutline : Outline
 
     // The stretches of an edge that decide.
     private IEnumerable<EdgeCurve> Deciding(EdgeCurve edge) => Stretches(edge, share => Decides(edge.At(share).Y, edge.At(share).Z));
+
+    private IEnumerable<EdgeCurve> WithinMaterial(EdgeCurve line) => Stretches(line, share => _shape.Contains(line.At(share).Y, line.At(share).Z));
+
+    // A field changes along an edge over lengths of the wall's thickness; the hand calculation does not.
+    private IEnumerable<EdgeCurve> Short(EdgeCurve edge)
+    {
+        var count = _hasPeaks ? (int)Math.Clamp(Math.Ceiling(edge.Length / (LongestPerWall * _shape.Thickness(edge, 0.5))), FewestPieces, MostPieces) : FewestPieces;
+        for (var k = 0; k < count; k++) yield return edge.Piece((double)k / count, (double)(k + 1) / count);
+    }
 
     // The stretches of a zone's edge that lie in the material and in no other zone.
     private IEnumerable<EdgeCurve> Kept(EdgeCurve edge) => Stretches(edge, share =>

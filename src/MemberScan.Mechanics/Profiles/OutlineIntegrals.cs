@@ -1,5 +1,5 @@
 using System.Collections.Immutable;
-using MemberScan.Mechanics.Meshes;
+using MemberScan.Mechanics.Edges;
 using MemberScan.Mechanics.Series;
 
 namespace MemberScan.Mechanics.Profiles;
@@ -23,8 +23,10 @@ internal readonly record struct OutlineIntegrals(double Area, double MomentY, do
     /// <summary>Over the part with z above a level [m].</summary>
     public static OutlineIntegrals Above(ImmutableArray<EdgeCurve> edges, double level) => Sum(edges.SelectMany(edge => edge.Above(level)));
 
-    /// <summary>Plastic modulus for bending about y: first moments about the axis that halves the area, both counted positive [m³].</summary>
-    public static double Plastic(ImmutableArray<EdgeCurve> edges)
+    /// <summary>
+    /// Plastic modulus for bending about y: first moments about the axis that halves the area, both counted positive [m³]; and where that axis is [m].
+    /// </summary>
+    public static (double Modulus, double Axis) Plastic(ImmutableArray<EdgeCurve> edges)
     {
         var whole = Of(edges);
         var (low, high) = (double.MaxValue, double.MinValue);
@@ -38,7 +40,7 @@ internal readonly record struct OutlineIntegrals(double Area, double MomentY, do
 
         var axis = 0.5 * (low + high);
         var above = Above(edges, axis);
-        return 2 * above.MomentZ - whole.MomentZ - axis * (2 * above.Area - whole.Area);
+        return (2 * above.MomentZ - whole.MomentZ - axis * (2 * above.Area - whole.Area), axis);
     }
 
     private static OutlineIntegrals Sum(IEnumerable<EdgeCurve> edges)

@@ -1,5 +1,5 @@
 using System.Collections.Immutable;
-using MemberScan.Mechanics.Meshes;
+using MemberScan.Mechanics.Edges;
 using MemberScan.Mechanics.Sections;
 
 namespace MemberScan.Mechanics.Profiles;
@@ -13,19 +13,23 @@ public static class OutlineRings
     public static ImmutableArray<ImmutableArray<(double Y, double Z)>> Of(CrossSection section)
     {
         ArgumentNullException.ThrowIfNull(section);
-        ImmutableArray<ImmutableArray<OutlineVertex>> rings = section switch
-        {
-            Round round => [Circle(round.Radius)],
-            Tube tube => [Circle(tube.OuterRadius), Circle(tube.InnerRadius)],
-            Rectangle r => [Rectangle(r.Width, r.Depth, 0)],
-            RoundedRectangle r => [Rectangle(r.Width, r.Depth, r.CornerRadius)],
-            Box b => [Rectangle(b.Width, b.Depth, b.OuterRadius), Rectangle(b.Width - 2 * b.Wall, b.Depth - 2 * b.Wall, b.InnerRadius)],
-            OpenProfile profile => [profile.Vertices],
-            OutlineSection outline => outline.Rings,
-            _ => throw new ArgumentOutOfRangeException(nameof(section), section.Kind, "no outline for this kind"),
-        };
-        return [.. rings.Select(ring => RingGeometry.Edges([ring]).SelectMany(Points).ToImmutableArray())];
+        return [.. VerticesOf(section).Select(ring => RingGeometry.Edges([ring]).SelectMany(Points).ToImmutableArray())];
     }
+
+    /// <summary>The edges of a section about its centroid, arcs as arcs, the outer ring first.</summary>
+    internal static ImmutableArray<EdgeCurve> EdgesOf(CrossSection section) => RingGeometry.Edges(VerticesOf(section));
+
+    private static ImmutableArray<ImmutableArray<OutlineVertex>> VerticesOf(CrossSection section) => section switch
+    {
+        Round round => [Circle(round.Radius)],
+        Tube tube => [Circle(tube.OuterRadius), Circle(tube.InnerRadius)],
+        Rectangle r => [Rectangle(r.Width, r.Depth, 0)],
+        RoundedRectangle r => [Rectangle(r.Width, r.Depth, r.CornerRadius)],
+        Box b => [Rectangle(b.Width, b.Depth, b.OuterRadius), Rectangle(b.Width - 2 * b.Wall, b.Depth - 2 * b.Wall, b.InnerRadius)],
+        OpenProfile profile => [profile.Vertices],
+        OutlineSection outline => outline.Rings,
+        _ => throw new ArgumentOutOfRangeException(nameof(section), section.Kind, "no outline for this kind"),
+    };
 
     private static IEnumerable<(double Y, double Z)> Points(EdgeCurve edge)
     {

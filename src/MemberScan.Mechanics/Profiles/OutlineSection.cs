@@ -1,5 +1,5 @@
 using System.Collections.Immutable;
-using MemberScan.Mechanics.Meshes;
+using MemberScan.Mechanics.Edges;
 using MemberScan.Mechanics.Sections;
 
 namespace MemberScan.Mechanics.Profiles;

@@ -3,7 +3,7 @@ namespace MemberScan.Mechanics.Sections;
 /// <summary>A cross-section as a value: its kind and dimensions, centred on its centroid, y across and z up.</summary>
 /// <remarks>
 /// The kinds are <see cref="Round"/>, <see cref="Tube"/>, <see cref="Rectangle"/>, <see cref="RoundedRectangle"/>, <see cref="Box"/>,
-/// <see cref="Profiles.OpenProfile"/> and <see cref="Profiles.OutlineSection"/>.
+/// <c>OpenProfile</c> and <c>OutlineSection</c>.
 /// Each has a static <c>Fault</c> that says what is wrong with dimensions before a value is made; the constructor throws on the same.
 /// </remarks>
 public abstract record CrossSection

@@ -3,7 +3,8 @@ using System.Runtime.InteropServices;
 using System.Runtime.Intrinsics;
 using MemberScan.Mechanics.Forces;
 using MemberScan.Mechanics.Outlines;
-using MemberScan.Mechanics.Sections;
+using MemberScan.Mechanics.Properties;
+using MemberScan.Mechanics.Resultants;
 using MemberScan.Mechanics.Shear;
 
 namespace MemberScan.Mechanics.Stress;

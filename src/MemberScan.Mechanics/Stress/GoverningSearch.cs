@@ -1,6 +1,7 @@
 using System.Buffers;
 using MemberScan.Mechanics.Forces;
 using MemberScan.Mechanics.Outlines;
+using MemberScan.Mechanics.Resultants;
 using MemberScan.Mechanics.Shear;
 
 namespace MemberScan.Mechanics.Stress;
@@ -72,7 +73,23 @@ internal sealed class GoverningSearch(StressField field, ShearSolution shear, Ou
             if (measure != StressMeasure.AbsoluteSigma && IsPeak(lattice, values, i)) found = Keep(peaks, found, values, i);
         }
 
-        foreach (var node in peaks[..found]) Climb(table.Chart, forces, measure, node, values[node], ref best);
+        foreach (var node in peaks[..found])
+            Climb(table.Chart, forces, measure, (table.Chart.Nodes.P[node], table.Chart.Nodes.Q[node]), values[node], ref best);
+        Polish(forces, measure, ref best);
+    }
+
+    // A climb narrows its stencil at every step and may end short of a summit on a long ridge: begun anew from where it ended until nothing is gained.
+    private void Polish(in SectionForces forces, StressMeasure measure, ref Choice best)
+    {
+        const int MostRounds = 6;
+        const double Gain = 1e-7;
+
+        for (var round = 0; round < MostRounds && best.Climbed is { } chart && !chart.Nodes.AreCurves; round++)
+        {
+            var before = best.Highest;
+            Climb(chart, forces, measure, best.From, best.Highest, ref best);
+            if (best.Highest <= before * (1 + Gain)) return;
+        }
     }
 
     // Of a stretch of equal nodes those in its middle are no peaks; on a flat ridge of the inside only the first is one.
@@ -109,13 +126,13 @@ internal sealed class GoverningSearch(StressField field, ShearSolution shear, Ou
     }
 
     // Newton's steps on the parabola through a stencil of nine places (three on a curve), each finer than the last.
-    private void Climb(Chart chart, in SectionForces forces, StressMeasure measure, int node, double value, ref Choice best)
+    private void Climb(Chart chart, in SectionForces forces, StressMeasure measure, (double P, double Q) from, double value, ref Choice best)
     {
         const int MaxSteps = 12;
         const double Coarsest = 0.6, Finest = 0.01, Refinement = 1.0 / 6, SameSpot = 1e-5;
 
         var lattice = chart.Nodes;
-        var (p, q) = (lattice.P[node], lattice.Q[node]);
+        var (p, q) = from;
         var isCurve = lattice.AreCurves;
         var scale = Coarsest;
         Span<double> stencil = stackalloc double[9];
@@ -151,6 +168,7 @@ internal sealed class GoverningSearch(StressField field, ShearSolution shear, Ou
         }
 
         var (y, z) = chart.Map(p, q);
+        if (value > best.Highest) best.Remember(chart, p, q);
         best.Offer(value, y, z);
     }
 
@@ -160,20 +178,28 @@ internal sealed class GoverningSearch(StressField field, ShearSolution shear, Ou
         return bend < 0 ? Math.Clamp(0.5 * (before - after) / bend, -1, 1) : 0;
     }
 
-    // Summit of the quadratic through the stencil, in units of its step; 0 where it has none.
+    // Step to the summit of the quadratic through the stencil, in units of its pitch, each part at most 1. Along an axis of the quadratic
+    // in which it does not bend down it goes as far as it may: so a ridge is walked along whichever way it runs.
     private static (double P, double Q) Vertex(ReadOnlySpan<double> f)
     {
+        const double Flat = 1e-9;
+
         var (slopeP, slopeQ) = (0.5 * (f[5] - f[3]), 0.5 * (f[7] - f[1]));
         var (pp, qq) = (f[3] - 2 * f[4] + f[5], f[1] - 2 * f[4] + f[7]);
         var pq = 0.25 * (f[0] + f[8] - f[2] - f[6]);
-        var determinant = pp * qq - pq * pq;
-        if (pp >= 0 || qq >= 0 || determinant <= 1e-9 * pp * qq)
-            return (pp < 0 ? Math.Clamp(-slopeP / pp, -1, 1) : 0, qq < 0 ? Math.Clamp(-slopeQ / qq, -1, 1) : 0);
-
-        return (
-            Math.Clamp((pq * slopeQ - qq * slopeP) / determinant, -1, 1),
-            Math.Clamp((pq * slopeP - pp * slopeQ) / determinant, -1, 1));
+        var (mean, half) = (0.5 * (pp + qq), double.Hypot(0.5 * (pp - qq), pq));
+        // The axis of the larger bend value; the other is square to it.
+        var (sin, cos) = half > 0 ? Math.SinCos(0.5 * Math.Atan2(pq, 0.5 * (pp - qq))) : (0.0, 1.0);
+        var scale = Math.Abs(mean) + half;
+        var one = Step(slopeP * cos + slopeQ * sin, mean + half, Flat * scale);
+        var two = Step(slopeQ * cos - slopeP * sin, mean - half, Flat * scale);
+        var (p, q) = (one * cos - two * sin, one * sin + two * cos);
+        var longest = Math.Max(1, Math.Max(Math.Abs(p), Math.Abs(q)));
+        return (p / longest, q / longest);
     }
+
+    private static double Step(double slope, double bend, double flat) =>
+        bend < -flat ? Math.Clamp(-slope / bend, -1, 1) : Math.Abs(slope) > flat ? Math.Sign(slope) : 0;
 
     private void TryNotable(in SectionForces forces, StressMeasure measure, ref Choice best)
     {
@@ -218,6 +244,15 @@ internal sealed class GoverningSearch(StressField field, ShearSolution shear, Ou
         public double Y { get; private set; }
 
         public double Z { get; private set; }
+
+        public readonly double Highest => _highest;
+
+        /// <summary>The chart on which the highest place was found by climbing, and where on it.</summary>
+        public Chart? Climbed { get; private set; }
+
+        public (double P, double Q) From { get; private set; }
+
+        public void Remember(Chart chart, double p, double q) => (Climbed, From) = (chart, (p, q));
 
         public void Offer(double value, double y, double z)
         {

@@ -1,6 +1,7 @@
 using MemberScan.Mechanics.Forces;
 using MemberScan.Mechanics.Outlines;
-using MemberScan.Mechanics.Sections;
+using MemberScan.Mechanics.Properties;
+using MemberScan.Mechanics.Resultants;
 using MemberScan.Mechanics.Shear;
 
 namespace MemberScan.Mechanics.Stress;

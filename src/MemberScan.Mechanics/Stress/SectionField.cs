@@ -1,8 +1,11 @@
 using System.Buffers;
+using MemberScan.Mechanics.Edges;
+using MemberScan.Mechanics.Fields;
 using MemberScan.Mechanics.Forces;
-using MemberScan.Mechanics.Meshes;
 using MemberScan.Mechanics.Outlines;
 using MemberScan.Mechanics.Profiles;
+using MemberScan.Mechanics.Properties;
+using MemberScan.Mechanics.Resultants;
 using MemberScan.Mechanics.Sections;
 using MemberScan.Mechanics.Shear;
 using MemberScan.Mechanics.Warping;
@@ -22,6 +25,7 @@ internal sealed class SectionField : StressField
     private readonly GoverningSearch _search;
     private readonly GoverningSearch? _fillets;
     private readonly Lazy<Closure> _closure;
+    private readonly Lazy<ShearAreas> _shearAreas;
     private readonly Lazy<(BlockScan Thin, BlockScan Dense)> _scans;
 
     /// <summary>The field of a section with its shear solution.</summary>
@@ -35,7 +39,8 @@ internal sealed class SectionField : StressField
         if (shear.HasPeaks && FilletsOf(section, _outline) is { Length: > 0 } arcs)
             _fillets = new GoverningSearch(this, shear, new FilletOutline(section, _outline, arcs));
         _scans = new Lazy<(BlockScan, BlockScan)>(() => (new BlockScan(properties, shear, _outline, true), new BlockScan(properties, shear, _outline, false)));
-        _closure = new Lazy<Closure>(() => ClosureIntegral.Of(this, shear, _outline));
+        _closure = new Lazy<Closure>(() => ClosureIntegral.Of(properties, shear, _outline));
+        _shearAreas = new Lazy<ShearAreas>(() => ClosureIntegral.ShearAreas(shear, _outline));
     }
 
     /// <inheritdoc/>
@@ -49,6 +54,9 @@ internal sealed class SectionField : StressField
 
     /// <inheritdoc/>
     public override Closure Closure => _closure.Value;
+
+    /// <inheritdoc/>
+    public override ShearAreas ShearAreas => _shearAreas.Value;
 
     /// <inheritdoc/>
     public override StressState At(in SectionForces forces, double y, double z)
@@ -127,7 +135,7 @@ internal sealed class SectionField : StressField
     {
         if (section is not (OutlineSection or OpenProfile)) return Outline.Of(section, shear.HasPeaks);
 
-        var shape = new OutlineShape(OutlineProperties.EdgesOf(section));
+        var shape = new OutlineShape(ProfileEdges.Of(section));
         var walls = section is OpenProfile profile ? shear as OpenProfileElementary ?? new OpenProfileElementary(profile, OutlineProperties.Of(section, 0)) : null;
         return new ProfileOutline(
             section, shape, SolvedSections.TryOf(section)!.Potential.Mesh, shear.HasPeaks,

@@ -1,6 +1,9 @@
 using System.Diagnostics.CodeAnalysis;
+using MemberScan.Mechanics.Fields;
 using MemberScan.Mechanics.Forces;
 using MemberScan.Mechanics.Profiles;
+using MemberScan.Mechanics.Properties;
+using MemberScan.Mechanics.Resultants;
 using MemberScan.Mechanics.Sections;
 using MemberScan.Mechanics.Shear;
 using MemberScan.Mechanics.Warping;
@@ -34,6 +37,9 @@ public abstract class StressField
 
     /// <summary>How well the field gives back the six section forces.</summary>
     public abstract Closure Closure { get; }
+
+    /// <summary>Shear areas of this model by energy [m²].</summary>
+    public abstract ShearAreas ShearAreas { get; }
 
     /// <summary>Makes the field of a section; false with a sentence when the model has none for it.</summary>
     /// <param name="section">The section.</param>

@@ -1,4 +1,5 @@
 using System.Collections.Concurrent;
+using MemberScan.Mechanics.Edges;
 using MemberScan.Mechanics.Meshes;
 using MemberScan.Mechanics.Profiles;
 using MemberScan.Mechanics.Sections;
@@ -46,7 +47,7 @@ internal static class SolvedSections
     private static Func<double, double, bool> Counts(CrossSection section) => section switch
     {
         Box box => (y, z) => !ReentrantZone.Covers(box, y, z),
-        OutlineSection or OpenProfile => CountsIn(new OutlineShape(OutlineProperties.EdgesOf(section))),
+        OutlineSection or OpenProfile => CountsIn(new OutlineShape(ProfileEdges.Of(section))),
         _ => (_, _) => true,
     };
 
@@ -56,7 +57,9 @@ internal static class SolvedSections
     {
         Box box => WarpingSolution.TryOf(WalledMesh.Of(box), Counts(box)),
         RoundedRectangle rounded => WarpingSolution.TryOf(WalledMesh.Of(rounded), Counts(rounded)),
-        OutlineSection or OpenProfile => OutlineMesh.TryOf(new OutlineShape(OutlineProperties.EdgesOf(section))) is { } mesh
+        OpenProfile profile => WarpingSolution.TryOf(
+            JunctionMesh.Of(ProfileJunctions.Of(profile), ProfileJunctions.IsQuarter(profile), 0.5 * Math.Max(profile.Width, profile.Depth)), Counts(profile)),
+        OutlineSection => OutlineMesh.TryOf(new OutlineShape(ProfileEdges.Of(section))) is { } mesh
             ? WarpingSolution.TryOf(mesh, Counts(section)) : null,
         _ => throw new ArgumentOutOfRangeException(nameof(section), section.Kind, "no numerical field for this kind"),
     };

@@ -8,6 +8,7 @@ internal sealed class WarpingSolution
     private const int FirstDegree = 6;
     private const int FirstDegreeOfManyPatches = 4;
     private const int LastDegreeOfManyPatches = 8;
+    private const int LastDegreeOfManyGraded = 10;
     private const int ManyPatches = 130;
     private const int LastDegree = 12;
     private const double TorsionTolerance = 1e-5;
@@ -45,8 +46,8 @@ internal sealed class WarpingSolution
     {
         (WarpingPotential Potential, double J, double[] Stresses)? last = null;
         var (torsionError, stressError) = (1.0, 1.0);
-        var areMany = mesh.Patches.Count > ManyPatches;
-        for (var degree = areMany ? FirstDegreeOfManyPatches : FirstDegree; degree <= (areMany ? LastDegreeOfManyPatches : LastDegree); degree += 2)
+        var areMany = mesh.Patches.Count > ManyPatches && !mesh.IsGraded;
+        for (var degree = areMany ? FirstDegreeOfManyPatches : FirstDegree; degree <= LastDegreeOf(mesh); degree += 2)
         {
             if (WarpingSolver.TrySolve(mesh, degree) is not { } potential) break;
 
@@ -66,6 +67,8 @@ internal sealed class WarpingSolution
             ? new WarpingSolution(found.Potential, found.J, torsionError, stressError)
             : null;
     }
+
+    private static int LastDegreeOf(PatchMesh mesh) => mesh.Patches.Count <= ManyPatches ? LastDegree : mesh.IsGraded ? LastDegreeOfManyGraded : LastDegreeOfManyPatches;
 
     /// <summary>Largest shear stress of unit T among the nodes of all patches, those that count [1/m³].</summary>
     public double LargestTwistStress(Func<double, double, bool> counts)

@@ -8,4 +8,7 @@ public enum ForceConvention
 
     /// <summary>On the two ends of the member: the values at its start change sign.</summary>
     EndForces,
+
+    /// <summary>Found for each pair of samples at the two ends by equilibrium; where both or neither balance, not known.</summary>
+    Detect,
 }

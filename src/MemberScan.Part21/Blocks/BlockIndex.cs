@@ -18,7 +18,7 @@ internal sealed class BlockIndex
 
     private const int BlockBytes = 3;
 
-    private readonly BlockEntry[] _entries;
+    private readonly Rows<BlockEntry> _entries;
 
     // Places in _entries of the blocks found by their anchors; null when those are all.
     private readonly int[]? _rising;
@@ -26,17 +26,10 @@ internal sealed class BlockIndex
     private readonly ushort[] _lows = [];
     private readonly byte[] _blocks = [];
 
-    public BlockIndex(List<List<BlockEntry>> entries, ByteSource source, DataScanner scanner)
+    public BlockIndex(Rows<BlockEntry> entries, ByteSource source, DataScanner scanner)
     {
-        _entries = new BlockEntry[entries.Sum(e => e.Count)];
-        var count = 0;
-        foreach (var part in entries)
-        {
-            part.CopyTo(_entries, count);
-            count += part.Count;
-        }
-
-        if (CountRising() == _entries.Length) return;
+        _entries = entries;
+        if (CountRising() == _entries.Count) return;
 
         _rising = ListRising();
         var highest = 0u;
@@ -61,12 +54,33 @@ internal sealed class BlockIndex
     public int Listed => _lows.Length;
 
     /// <summary>Anchors in file order.</summary>
-    public ReadOnlySpan<BlockEntry> Entries => _entries;
+    public Rows<BlockEntry> Entries => _entries;
+
+    /// <summary>Whether the instances are plain in the block of an offset where one begins.</summary>
+    public bool IsPlainAt(long offset)
+    {
+        var block = (int)(offset / BlockEntry.Length);
+        int low = 0, high = _entries.Count - 1;
+        while (low <= high)
+        {
+            var middle = (low + high) >>> 1;
+            if (_entries[middle].Block == block) return _entries[middle].IsPlain && !IsShared(middle);
+            if (_entries[middle].Block < block) low = middle + 1;
+            else high = middle - 1;
+        }
+
+        return false;
+    }
+
+    // Two data sections may meet in a block; each has an anchor of its own there.
+    private bool IsShared(int entry) =>
+        (entry > 0 && _entries[entry - 1].Block == _entries[entry].Block)
+        || (entry + 1 < _entries.Count && _entries[entry + 1].Block == _entries[entry].Block);
 
     /// <summary>The place in <see cref="Entries"/> of the only block found by its anchor that may hold a number; −1 if none.</summary>
     public int RisingWith(uint id)
     {
-        int low = 0, high = (_rising?.Length ?? _entries.Length) - 1;
+        int low = 0, high = (_rising?.Length ?? _entries.Count) - 1;
         while (low <= high)
         {
             var middle = (low + high) >>> 1;
@@ -111,7 +125,7 @@ internal sealed class BlockIndex
     private int CountRising()
     {
         var (count, last) = (0, -1L);
-        foreach (ref readonly var entry in _entries.AsSpan()) count += IsRising(entry, ref last) ? 1 : 0;
+        for (var i = 0; i < _entries.Count; i++) count += IsRising(_entries[i], ref last) ? 1 : 0;
         return count;
     }
 
@@ -119,7 +133,7 @@ internal sealed class BlockIndex
     {
         var rising = new int[CountRising()];
         var (count, last) = (0, -1L);
-        for (var i = 0; i < _entries.Length; i++)
+        for (var i = 0; i < _entries.Count; i++)
             if (IsRising(_entries[i], ref last))
                 rising[count++] = i;
         return rising;
@@ -153,7 +167,7 @@ internal sealed class BlockIndex
     {
         var window = new Window(source, 256 * 1024);
         var rising = 0;
-        for (var i = 0; i < _entries.Length;)
+        for (var i = 0; i < _entries.Count;)
         {
             if (rising < _rising!.Length && _rising[rising] == i)
             {
@@ -162,7 +176,7 @@ internal sealed class BlockIndex
                 continue;
             }
 
-            var next = rising < _rising.Length ? _rising[rising] : _entries.Length;
+            var next = rising < _rising.Length ? _rising[rising] : _entries.Count;
             var at = _entries[i].Start;
             sink.Entry = i;
             while (at < _entries[next - 1].End)
@@ -206,7 +220,17 @@ internal sealed class BlockIndex
     {
         public int Entry;
 
-        public void Add(long offset, int length, uint id, ReadOnlySpan<byte> keyword, InstanceFlags flags)
+        public static bool NeedsText => false;
+
+        public readonly bool MayWant(uint letters) => false;
+
+        public void AddOther(long offset, uint id, ReadOnlySpan<byte> text, ReadOnlySpan<byte> keyword, InstanceFlags flags) => AddPlain(offset, id, text, keyword);
+
+        public readonly void PassOver()
+        {
+        }
+
+        public void AddPlain(long offset, uint id, ReadOnlySpan<byte> text, ReadOnlySpan<byte> keyword)
         {
             while (offset >= index._entries[Entry].End) Entry++;
             if (counts.Length > 0)

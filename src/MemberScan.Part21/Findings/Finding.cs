@@ -5,4 +5,4 @@ namespace MemberScan.Part21.Findings;
 /// <param name="Offset">Where [byte]; −1 for the file as a whole.</param>
 /// <param name="Id">Number of the instance concerned; 0 if none.</param>
 /// <param name="Count">How often; the place is the first one's.</param>
-internal readonly record struct Finding(FindingKind Kind, long Offset, ulong Id, long Count = 1);
+internal sealed record Finding(FindingKind Kind, long Offset, ulong Id, long Count = 1);

@@ -21,6 +21,9 @@ internal struct BlockEntry
     /// <summary>Whether its numbers rise from instance to instance.</summary>
     public bool Rises;
 
+    /// <summary>Whether its instances are all of plain layout, and only blanks between them.</summary>
+    public bool IsPlain;
+
     /// <summary>Offset of its first instance [byte].</summary>
     public readonly long Start => (long)Block * Length + Within;
 

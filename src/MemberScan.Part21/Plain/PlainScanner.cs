@@ -2,19 +2,16 @@ using System.Buffers.Binary;
 using System.Numerics;
 using System.Runtime.CompilerServices;
 using System.Runtime.InteropServices;
-using System.Runtime.Intrinsics;
-using System.Runtime.Intrinsics.X86;
-using MemberScan.Part21.Index;
 
 namespace MemberScan.Part21.Plain;
 
-/// <summary>Walks over statements of plain layout, 64 bytes at a time, and stops at the first that is anything else.</summary>
+/// <summary>Walks over statements of plain layout, 512 bytes at a time, and stops at the first that is anything else.</summary>
 /// <remarks>
 /// Plain is a statement in which <see cref="Reading.InstanceReader"/> would find nothing to tell and that needs no look back: upper-case
-/// words, no comment, blanks only between statements and behind comma, opening bracket and equals sign, no line end in a string. Every
-/// byte is checked: each class of bytes is one mask of 64 bits, the rules of the grammar are shifts and sums over masks, and what breaks one
-/// is a bit in <c>bad</c>. Rules are stricter than the grammar, never laxer: a statement refused here is read by the other reader.
-/// Several times as fast as that reader (benchmark: RESULTS.md, section Part 21), which is its oracle in the tests.
+/// words, no comment, blanks only between statements and behind comma, opening bracket and equals sign, no line end in a string, brackets
+/// not deeper than seven. Every byte is checked: each class of bytes is a mask of 512 bits, the rules of the grammar are shifts and sums over
+/// masks, and what breaks one is a bit in <c>bad</c>. Rules are stricter than the grammar, never laxer: a statement refused here is read by the
+/// other reader. Many times as fast as that reader (benchmark: RESULTS.md, section Part 21), which is its oracle in the tests.
 /// </remarks>
 internal static class PlainScanner
 {
@@ -22,8 +19,9 @@ internal static class PlainScanner
     public const int Slack = 512;
 
     private const int Stride = 512;
-    private const ulong Top = 1UL << 63;
-    private const int LongestKeyword = 64;
+
+    // The shortest statement has seven bytes; four places are written at once.
+    private const int MostStatements = Stride / 7 + 8;
 
     /// <summary>Scans from a place between two statements.</summary>
     /// <param name="text">The loaded text; <see cref="Slack"/> more bytes are readable behind it.</param>
@@ -31,151 +29,183 @@ internal static class PlainScanner
     /// <param name="until">Statements that begin here or beyond are left.</param>
     /// <param name="origin">Offset of the text in the file.</param>
     /// <param name="sink">Receives each instance.</param>
-    /// <remarks>In one piece: what is known of the statement under way is kept in locals from one word to the next.</remarks>
     [MethodImpl(MethodImplOptions.AggressiveOptimization)]
     public static PlainStop Scan<TSink>(ReadOnlySpan<byte> text, ref int at, int until, long origin, ref TSink sink)
         where TSink : struct, IStatementSink
     {
         ref var bytes = ref MemoryMarshal.GetReference(text);
-        var length = text.Length;
         Span<ulong> classWords = stackalloc ulong[ByteClasses.Words];
-        Span<ulong> insideWords = stackalloc ulong[8];
         Span<ulong> found = stackalloc ulong[Found.Words];
-        ref var results = ref MemoryMarshal.GetReference(found);
+        Span<int> starts = stackalloc int[MostStatements];
+        Span<int> ends = stackalloc int[MostStatements];
         var classes = new ByteClasses(classWords);
         var rules = new PlainRules();
         rules.Begin();
 
-        var start = -1;            // of the statement being read; −1 between statements
-        var depth = 1;
-        var equalsSigns = 0;
-        var broken = 0UL;
-        var between = at;          // where the search for the next statement stands
-        var inString = 0UL;
-
-        for (var block = at; block < length; block += Stride)
+        var first = at;
+        var under = -1;            // start of the statement under way; −1 between statements
+        for (var block = first; block < text.Length; block += Stride)
         {
-            for (var i = 0; i < 8; i++)
-            {
-                classes.Load(ref Unsafe.Add(ref bytes, block + 64 * i), i);
+            ref var here = ref Unsafe.Add(ref bytes, block);
+            for (var i = 0; i < 8; i++) classes.Load(ref Unsafe.Add(ref here, 64 * i), i > 0 || block > first, i);
 
-                // Strings: from each opening apostrophe to before the closing one.
-                var inside = PrefixXor(classWords[ByteClasses.Quote + i]) ^ inString;
-                inString = (ulong)((long)inside >> 63);
-                insideWords[i] = inside;
+            var isClean = rules.Apply(classes, text, block, found);
+            if (!isClean || block + Stride > Math.Min(text.Length, until))
+            {
+                if (TryCarefully(text, block, until, origin, found, ref under, ref at, ref sink, out var stop)) continue;
+                return stop;
             }
 
-            rules.Apply(classes, Vector512.Create<ulong>(insideWords), ref bytes, block, length, found);
-
-            for (var i = 0; i < 8; i++)
+            // Each semicolon ends the statement under way, or the one that began behind the semicolon before.
+            starts[0] = under;
+            var begun = Places(found[Found.Start..], block, starts, under >= 0 ? 1 : 0);
+            var ended = TSink.NeedsText ? Places(found[Found.Semicolon..], block, ends, 0) : Count(found[Found.Semicolon..]);
+            var hasEnds = TSink.NeedsText;
+            for (var i = 0; i < ended; i++)
             {
-                var word = block + 64 * i;
-                var loaded = length - word;
-                if (loaded <= 0) break;
-
-                var rest = loaded >= 64 ? ulong.MaxValue : (1UL << loaded) - 1;
-                var semicolon = Unsafe.Add(ref results, Found.Semicolon + i) & rest;
-                var bad = Unsafe.Add(ref results, Found.Bad + i);
-                var open = Unsafe.Add(ref results, Found.Open + i);
-                var close = Unsafe.Add(ref results, Found.Close + i);
-                var equals = Unsafe.Add(ref results, Found.EqualsSign + i);
-                while (true)
+                var start = starts[i];
+                if (!TryHead(ref bytes, start, out var id, out var word))
                 {
-                    if (start < 0)
-                    {
-                        var next = ~Unsafe.Add(ref results, Found.Blank + i) & rest;
-                        if (next == 0)
-                        {
-                            between = Math.Min(word + 64, length);
-                            break;
-                        }
-
-                        var first = BitOperations.TrailingZeroCount(next);
-                        at = word + first;
-                        if (at >= until) return PlainStop.Until;
-                        if (Unsafe.Add(ref bytes, at) != '#') return PlainStop.NoInstance;
-
-                        start = at;
-                        depth = 1;
-                        equalsSigns = 0;
-                        broken = 0;
-                        rest &= ulong.MaxValue << first;
-                    }
-
-                    var last = semicolon & rest;
-                    var part = last == 0 ? rest : rest & (last ^ (last - 1));
-                    broken |= bad & part;
-                    if (!BracketOrder.TryTake(open & part, close & part, ref depth)) broken = 1;
-                    equalsSigns += BitOperations.PopCount(equals & part);
-                    if (last == 0) break;
-
-                    var end = word + BitOperations.TrailingZeroCount(last) + 1;
-                    if (broken != 0 || depth != 0 || equalsSigns != 1 || !TryHead(ref bytes, start, end, out var id, out var keyword, out var keywordLength))
-                    {
-                        at = start;
-                        return PlainStop.NotPlain;
-                    }
-
-                    sink.Add(origin + start, end - start, id, MemoryMarshal.CreateReadOnlySpan(ref Unsafe.Add(ref bytes, keyword), keywordLength), InstanceFlags.None);
-                    start = -1;
-                    between = end;
-                    rest &= ~part;
-                    if (rest == 0) break;
+                    at = start;
+                    return PlainStop.NotPlain;
                 }
+
+                var isWanted = sink.MayWant(Unsafe.ReadUnaligned<uint>(ref Unsafe.Add(ref bytes, word + 3)));
+                if (!TSink.NeedsText && !isWanted)
+                {
+                    sink.AddPlain(origin + start, id, default, default);
+                    continue;
+                }
+
+                if (!hasEnds) Places(found[Found.Semicolon..], block, ends, 0);
+                hasEnds = true;
+                sink.AddPlain(origin + start, id, text[start..(ends[i] + 1)], isWanted ? Keyword(text[word..]) : default);
             }
+
+            under = begun > ended ? starts[ended] : -1;
         }
 
-        at = start >= 0 ? start : between;
+        at = under >= 0 ? under : Math.Max(first, text.Length);
         return PlainStop.More;
     }
 
-    [MethodImpl(MethodImplOptions.AggressiveInlining)]
-    private static ulong PrefixXor(ulong bits)
+    // Where something is to be stopped at: statement after statement. True if it is not in these 512 bytes after all.
+    [MethodImpl(MethodImplOptions.NoInlining)]
+    private static bool TryCarefully<TSink>(
+        ReadOnlySpan<byte> text, int block, int until, long origin, ReadOnlySpan<ulong> found, ref int under, ref int at, ref TSink sink, out PlainStop stop)
+        where TSink : struct, IStatementSink
     {
-        if (Pclmulqdq.IsSupported) return Pclmulqdq.CarrylessMultiply(Vector128.CreateScalar(bits), Vector128<ulong>.AllBitsSet, 0).ToScalar();
+        var loaded = Math.Min(Stride, text.Length - block);
+        var bad = Next(found[Found.Bad..], 0, loaded);
+        var from = 0;
+        while (true)
+        {
+            if (under < 0)
+            {
+                from = Next(found[Found.Start..], from, loaded);
+                stop = PlainStop.More;
+                if (from == loaded) return true;
 
-        for (var step = 1; step < 64; step <<= 1) bits ^= bits << step;
-        return bits;
+                at = block + from;
+                stop = at >= until ? PlainStop.Until : PlainStop.NoInstance;
+                if (at >= until || text[at] != '#') return false;
+
+                under = at;
+            }
+
+            var semicolon = Next(found[Found.Semicolon..], from, loaded);
+            at = under;
+            if (bad <= semicolon && bad < loaded)
+            {
+                // Cut off at the end of what is loaded, a token is not known to be bad.
+                stop = semicolon == loaded && text.Length - block - bad < Stride / 2 ? PlainStop.More : PlainStop.NotPlain;
+                return false;
+            }
+
+            stop = PlainStop.NotPlain;
+            if (semicolon == loaded) return true;
+            if (!TryHead(ref MemoryMarshal.GetReference(text), under, out var id, out var word)) return false;
+
+            var end = block + semicolon + 1;
+            sink.AddPlain(origin + under, id, text[under..end], Keyword(text[word..]));
+            under = -1;
+            from = semicolon + 1;
+        }
     }
 
-    // #id=KEYWORD( or #id= KEYWORD(
-    [MethodImpl(MethodImplOptions.AggressiveInlining)]
-    private static bool TryHead(ref byte bytes, int start, int end, out uint id, out int keyword, out int length)
+    // The first bit at or above a place, or the length.
+    private static int Next(ReadOnlySpan<ulong> words, int from, int length)
     {
-        var at = start + 1;
-        var number = EightDigits(ref Unsafe.Add(ref bytes, at), out var digits);
-        at += digits;
-        keyword = length = 0;
-        id = 0;
-        while (digits >= 8)
+        for (var i = from >> 6; i < 8; i++)
         {
-            var digit = (uint)Unsafe.Add(ref bytes, at) - '0';
-            if (digit > 9) break;
-            number = number * 10 + digit;
-            at++;
+            var rest = i == from >> 6 ? words[i] & (ulong.MaxValue << (from & 63)) : words[i];
+            if (rest != 0) return Math.Min(length, 64 * i + BitOperations.TrailingZeroCount(rest));
         }
 
-        if (at - start > 11 || number > uint.MaxValue || Unsafe.Add(ref bytes, at) != '=') return false;
+        return length;
+    }
 
-        at++;
-        if (Unsafe.Add(ref bytes, at) <= ' ') at++;
+    [MethodImpl(MethodImplOptions.AggressiveInlining)]
+    private static int Count(ReadOnlySpan<ulong> words)
+    {
+        ref var first = ref MemoryMarshal.GetReference(words);
+        var count = 0;
+        for (var i = 0; i < 8; i++) count += BitOperations.PopCount(Unsafe.Add(ref first, i));
+        return count;
+    }
+
+    // The places of all bits. Four are written whatever the number, which costs less than to guess it wrong.
+    [MethodImpl(MethodImplOptions.AggressiveInlining)]
+    private static int Places(ReadOnlySpan<ulong> words, int block, Span<int> places, int count)
+    {
+        ref var word = ref MemoryMarshal.GetReference(words);
+        ref var place = ref MemoryMarshal.GetReference(places);
+        for (var i = 0; i < 8; i++)
+        {
+            var rest = Unsafe.Add(ref word, i);
+            var number = BitOperations.PopCount(rest);
+            ref var next = ref Unsafe.Add(ref place, count);
+            var at = block + 64 * i;
+            for (var j = 0; j < 4; j++)
+            {
+                Unsafe.Add(ref next, j) = at + BitOperations.TrailingZeroCount(rest);
+                rest &= rest - 1;
+            }
+
+            for (var j = 4; rest != 0; j++, rest &= rest - 1) Unsafe.Add(ref next, j) = at + BitOperations.TrailingZeroCount(rest);
+            count += number;
+        }
+
+        return count;
+    }
+
+    /// <summary>Number and keyword of a plain statement; false for a number beyond 32 bits.</summary>
+    /// <param name="bytes">First byte of the text; eight more than the statement are readable.</param>
+    /// <param name="start">Where the statement begins, <c>#id=KEYWORD(</c> or <c>#id= KEYWORD(</c>.</param>
+    /// <param name="id">Its number.</param>
+    /// <param name="word">Where its keyword begins.</param>
+    [MethodImpl(MethodImplOptions.AggressiveInlining)]
+    public static bool TryHead(ref byte bytes, int start, out uint id, out int word)
+    {
+        ref var head = ref Unsafe.Add(ref bytes, start + 1);
+        var number = EightDigits(ref head, out var digits);
+        if (digits == 8)
+        {
+            for (var digit = (uint)Unsafe.Add(ref head, digits) - '0'; digit <= 9; digit = (uint)Unsafe.Add(ref head, digits) - '0')
+            {
+                number = number * 10 + digit;
+                digits++;
+            }
+        }
+
         id = (uint)number;
-        keyword = at;
-
-        // The word itself was checked by the masks; Slack makes the load readable.
-        var brackets = Vector256.Equals(Vector256.LoadUnsafe(ref Unsafe.Add(ref bytes, at)), Vector256.Create((byte)'(')).ExtractMostSignificantBits();
-        if (brackets != 0)
-        {
-            length = BitOperations.TrailingZeroCount(brackets);
-        }
-        else
-        {
-            while (at + length < end && length <= LongestKeyword && Unsafe.Add(ref bytes, at + length) != '(') length++;
-        }
-
-        var first = Unsafe.Add(ref bytes, at);
-        return length > 0 && length <= LongestKeyword && (char.IsAsciiLetterUpper((char)first) || first == '_');
+        word = start + 2 + digits;
+        if (Unsafe.Add(ref bytes, word) <= ' ') word++;
+        return number <= uint.MaxValue && digits <= 10;
     }
+
+    [MethodImpl(MethodImplOptions.NoInlining)]
+    private static ReadOnlySpan<byte> Keyword(ReadOnlySpan<byte> text) => text[..text.IndexOf((byte)'(')];
 
     // The number that up to eight digits spell, by three multiplications; and how many there are.
     [MethodImpl(MethodImplOptions.AggressiveInlining)]
@@ -184,7 +214,6 @@ internal static class PlainScanner
         var bytes = BinaryPrimitives.ReadUInt64LittleEndian(MemoryMarshal.CreateReadOnlySpan(ref first, 8)) ^ 0x3030_3030_3030_3030;
         var others = (((bytes & 0x7F7F_7F7F_7F7F_7F7F) + 0x7676_7676_7676_7676) | bytes) & 0x8080_8080_8080_8080;
         count = BitOperations.TrailingZeroCount(others) >> 3;
-        if (count == 0) return 0;
 
         // Leading zeros in place of what follows the digits; then pairs, fours, eight.
         bytes <<= 64 - 8 * count;

@@ -40,4 +40,46 @@ internal static class WideBits
         var raised = Vector512.Create((ulong)(carries ^ full)) & s_one;
         return (sum - Vector512.Equals(raised, s_one)) & ~through;
     }
+
+    /// <summary>Each bit the exclusive sum of all up to it: a mask of turns becomes a mask of what is on between them.</summary>
+    /// <param name="bits">The mask.</param>
+    /// <param name="carry">1 if it is on before the mask; afterwards whether it is on behind.</param>
+    [MethodImpl(MethodImplOptions.AggressiveInlining)]
+    public static Vector512<ulong> PrefixXor(Vector512<ulong> bits, ref uint carry)
+    {
+        var within = WithinWords(bits);
+
+        // The same over the words: each is turned by the sum of those before.
+        var sums = (uint)within.ExtractMostSignificantBits();
+        sums ^= sums << 1;
+        sums ^= sums << 2;
+        sums ^= sums << 4;
+        var turned = (sums << 1) ^ (0 - carry);
+        carry ^= (sums >> 7) & 1;
+        return within ^ Vector512.Equals(Vector512.Create((ulong)turned) & s_one, s_one);
+    }
+
+    /// <summary>Each bit the exclusive sum of all up to it, in one word.</summary>
+    [MethodImpl(MethodImplOptions.AggressiveInlining)]
+    public static ulong PrefixXor(ulong bits)
+    {
+        if (Pclmulqdq.IsSupported) return Pclmulqdq.CarrylessMultiply(Vector128.CreateScalar(bits), Vector128<ulong>.AllBitsSet, 0).ToScalar();
+
+        for (var step = 1; step < 64; step <<= 1) bits ^= bits << step;
+        return bits;
+    }
+
+    [MethodImpl(MethodImplOptions.AggressiveInlining)]
+    private static Vector512<ulong> WithinWords(Vector512<ulong> bits)
+    {
+        if (Pclmulqdq.V512.IsSupported)
+        {
+            var even = Pclmulqdq.V512.CarrylessMultiply(bits, Vector512<ulong>.AllBitsSet, 0x00);
+            var odd = Pclmulqdq.V512.CarrylessMultiply(bits, Vector512<ulong>.AllBitsSet, 0x01);
+            return Avx512F.UnpackLow(even, odd);
+        }
+
+        for (var step = 1; step < 64; step <<= 1) bits ^= bits << step;
+        return bits;
+    }
 }

@@ -4,4 +4,4 @@ namespace MemberScan.Part21.Reading;
 /// <param name="Keyword">In upper case.</param>
 /// <param name="Start">Offset of what stands between its brackets [byte].</param>
 /// <param name="Length">Its length [byte].</param>
-internal readonly record struct HeaderEntry(string Keyword, long Start, int Length);
+internal sealed record HeaderEntry(string Keyword, long Start, int Length);

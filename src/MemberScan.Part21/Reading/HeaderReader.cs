@@ -1,4 +1,3 @@
-using System.Collections.Immutable;
 using MemberScan.Part21.Findings;
 using MemberScan.Part21.Tokens;
 
@@ -10,9 +9,9 @@ internal sealed class HeaderReader(FindingLog log, ParameterScanner parameters)
     // A header has three entries and a few more in later editions; the rest of a longer one is of no use.
     private const int MaxEntries = 1000;
 
-    private readonly ImmutableArray<HeaderEntry>.Builder _entries = ImmutableArray.CreateBuilder<HeaderEntry>();
+    private readonly List<HeaderEntry> _entries = [];
 
-    public ImmutableArray<HeaderEntry> Entries => _entries.ToImmutable();
+    public IReadOnlyList<HeaderEntry> Entries => _entries;
 
     /// <summary>Reads from behind <c>HEADER;</c>.</summary>
     /// <returns>Where reading goes on.</returns>
@@ -49,7 +48,7 @@ internal sealed class HeaderReader(FindingLog log, ParameterScanner parameters)
     {
         foreach (var keyword in (ReadOnlySpan<string>)["FILE_DESCRIPTION", "FILE_NAME", "FILE_SCHEMA"])
         {
-            if (_entries.All(e => e.Keyword != keyword)) log.Tell(FindingKinds.HeaderIncomplete, -1);
+            if (!_entries.Exists(e => e.Keyword == keyword)) log.Tell(FindingKinds.HeaderIncomplete, -1);
         }
     }
 

@@ -1,4 +1,3 @@
-using System.Collections.Immutable;
 using MemberScan.Part21.Index;
 
 namespace MemberScan.Part21.Reading;
@@ -9,7 +8,7 @@ internal sealed record ReadingResult
     public required InstanceTable Instances { get; init; }
 
     /// <summary>The parameters of each header entry, between its brackets.</summary>
-    public required ImmutableArray<HeaderEntry> Header { get; init; }
+    public required IReadOnlyList<HeaderEntry> Header { get; init; }
 
     public required bool ReadToEnd { get; init; }
 

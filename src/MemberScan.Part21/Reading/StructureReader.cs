@@ -1,4 +1,3 @@
-using System.Collections.Immutable;
 using MemberScan.Part21.Findings;
 using MemberScan.Part21.Index;
 using MemberScan.Part21.Tokens;
@@ -48,7 +47,7 @@ internal sealed class StructureReader
     public int DataEnd => (int)_insertionOffset;
 
     /// <summary>The entries of the header, by their offsets in the piece read.</summary>
-    public ImmutableArray<HeaderEntry> Header => _header.Entries;
+    public IReadOnlyList<HeaderEntry> Header => _header.Entries;
 
     /// <summary>Reads the beginning of a text up to its first data section.</summary>
     /// <returns>Whether it is an exchange structure.</returns>

@@ -17,9 +17,12 @@ internal sealed class ChunkResult
     /// <summary>Number of instances.</summary>
     public long Count { get; set; }
 
-    public List<BlockEntry> Blocks { get; } = [];
+    /// <summary>Takes the wanted instances as they pass by; null if nobody asked for that.</summary>
+    public IPart21Taker? Taker { get; init; }
 
-    public List<PlaceRow> Places { get; } = [];
+    public Rows<BlockEntry> Blocks { get; } = new();
+
+    public Rows<PlaceRow> Places { get; } = new();
 
     public List<Finding> Findings { get; } = [];
 }

@@ -31,8 +31,11 @@ internal sealed class DataPass
     private readonly DataScanner _scanner;
     private readonly Window _window;
 
-    public DataPass(ByteSource source, WantedKeywords wanted, ReadingLimits limits, int stretch, int window)
+    private readonly Func<IPart21Taker>? _newTaker;
+
+    public DataPass(ByteSource source, WantedKeywords wanted, Func<IPart21Taker>? newTaker, ReadingLimits limits, int stretch, int window)
     {
+        _newTaker = newTaker;
         _source = source;
         _wanted = wanted;
         _limits = limits with { RescannedBytes = Math.Min(limits.RescannedBytes, 8L * stretch) };
@@ -42,11 +45,14 @@ internal sealed class DataPass
         (_scanner, _window) = (new DataScanner(new FindingLog(), _limits), new Window(source, window));
     }
 
-    /// <summary>Anchors by stretch, in file order.</summary>
-    public List<List<BlockEntry>> Blocks { get; } = [];
+    /// <summary>Anchors in file order.</summary>
+    public Rows<BlockEntry> Blocks { get; } = new();
 
-    /// <summary>Rows of wanted keywords by stretch, in file order.</summary>
-    public List<List<PlaceRow>> Places { get; } = [];
+    /// <summary>Rows of wanted keywords in file order.</summary>
+    public Rows<PlaceRow> Places { get; } = new();
+
+    /// <summary>What took the wanted instances, by stretch, in file order.</summary>
+    public List<IPart21Taker> Takers { get; } = [];
 
     /// <summary>Number of instances.</summary>
     public long Count { get; private set; }
@@ -111,8 +117,9 @@ internal sealed class DataPass
             _guessed[number] = null;
             var result = guessed?.From == at ? guessed : Scan(_scanner, _window, at, (long)(number + 1) * _stretch);
             log.Take(result.Findings, 0);
-            Blocks.Add(result.Blocks);
-            Places.Add(result.Places);
+            Blocks.AddAll(result.Blocks);
+            Places.AddAll(result.Places);
+            if (result.Taker is not null) Takers.Add(result.Taker);
             Count += result.Count;
             at = result.End;
             if (Count > _limits.Instances)
@@ -127,7 +134,7 @@ internal sealed class DataPass
 
     private ChunkResult Scan(DataScanner scanner, Window window, long from, long until)
     {
-        var result = new ChunkResult { From = from };
+        var result = new ChunkResult { From = from, Taker = _newTaker?.Invoke() };
         var sink = new PassSink(result, _wanted);
         scanner.Log.TakeBack(0);
         result.Stop = scanner.Scan(window, ref from, until, false, ref sink);

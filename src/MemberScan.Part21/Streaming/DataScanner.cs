@@ -69,6 +69,7 @@ internal sealed class DataScanner
                 }
             }
 
+            if (stop == PlainStop.NoInstance) sink.PassOver();
             var isUnderstood = stop == PlainStop.NoInstance
                 ? PassBetween(window, ref at, keepsText ? from : at, out var end)
                 : TryOne(window, ref at, keepsText ? from : at, ref sink, out end);
@@ -106,7 +107,8 @@ internal sealed class DataScanner
                 continue;
             }
 
-            if (hasRow) Hand(at, row, keyword, ref sink);
+            if (hasRow) Hand(at, text, row, keyword, ref sink);
+            else sink.PassOver();
             if (next < 0) return false;
 
             at += next;
@@ -114,18 +116,19 @@ internal sealed class DataScanner
         }
     }
 
-    private void Hand<TSink>(long origin, in InstanceRow row, string keyword, ref TSink sink)
+    private void Hand<TSink>(long origin, ReadOnlySpan<byte> text, in InstanceRow row, string keyword, ref TSink sink)
         where TSink : struct, IStatementSink
     {
         if (row.Id > uint.MaxValue)
         {
+            sink.PassOver();
             Log.Tell(FindingKinds.NumberOfInstanceTooLarge, 0, row.Id);
             return;
         }
 
         Span<byte> word = stackalloc byte[Part21Limits.KeywordLength];
         var length = Encoding.ASCII.GetBytes(keyword, word);
-        sink.Add(origin + row.Start, row.Length, (uint)row.Id, word[..length], row.Flags);
+        sink.AddOther(origin + row.Start, (uint)row.Id, text.Slice((int)row.Start, row.Length), word[..length], row.Flags);
     }
 
     // What stands between two statements and is no instance: a comment, the end of the section, or something that does not belong there.

@@ -1,4 +1,3 @@
-using System.Collections.Immutable;
 using MemberScan.Part21.Findings;
 using MemberScan.Part21.Reading;
 using MemberScan.Part21.Sources;
@@ -20,7 +19,7 @@ internal sealed class StreamedStructure(ByteSource source, FindingLog log, Readi
     private bool _hasHeader;
 
     /// <summary>The entries of the header; their offsets count from the start of <see cref="HeaderText"/>.</summary>
-    public ImmutableArray<HeaderEntry> Header { get; private set; } = [];
+    public IReadOnlyList<HeaderEntry> Header { get; private set; } = [];
 
     /// <summary>The piece that the header stands in.</summary>
     public byte[] HeaderText { get; private set; } = [];

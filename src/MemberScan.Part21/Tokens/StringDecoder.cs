@@ -11,9 +11,8 @@ namespace MemberScan.Part21.Tokens;
 /// </remarks>
 internal static class StringDecoder
 {
-    private static readonly SearchValues<byte> s_plain = SearchValues.Create(PlainBytes());
-    private static readonly SearchValues<byte> s_controls = SearchValues.Create([.. Enumerable.Range(0, 0x20).Select(b => (byte)b), 0x7F]);
-    private static readonly Encoding s_windows1252 = CodePagesEncodingProvider.Instance.GetEncoding(1252)!;
+    private static readonly SearchValues<byte> s_plain = SearchValues.Create(Bytes(b => b is >= 0x20 and < 0x7F and not ('\'' or '\\')));
+    private static readonly SearchValues<byte> s_controls = SearchValues.Create(Bytes(b => b is < 0x20 or 0x7F));
 
     /// <summary>Decodes what stands between the outer apostrophes.</summary>
     public static string Decode(ReadOnlySpan<byte> content)
@@ -47,7 +46,7 @@ internal static class StringDecoder
 
     private static int DecodeDirectives(ReadOnlySpan<byte> bytes, Span<char> buffer)
     {
-        var raw = Utf8.IsValid(bytes) ? Encoding.UTF8 : s_windows1252;
+        var raw = Utf8.IsValid(bytes) ? Encoding.UTF8 : Windows1252.Encoding;
         var text = new Output(buffer);
         var page = 'A';
         var at = 0;
@@ -184,8 +183,20 @@ internal static class StringDecoder
         }
     }
 
-    private static byte[] PlainBytes() =>
-        [.. Enumerable.Range(0x20, 0x5F).Select(b => (byte)b).Where(b => b is not ((byte)'\'' or (byte)'\\'))];
+    private static byte[] Bytes(Func<int, bool> isOne)
+    {
+        var bytes = new List<byte>(128);
+        for (var b = 0; b < 0x80; b++)
+            if (isOne(b))
+                bytes.Add((byte)b);
+        return [.. bytes];
+    }
+
+    // Apart, so that the table of code pages is loaded only for a text that needs it.
+    private static class Windows1252
+    {
+        public static readonly Encoding Encoding = CodePagesEncodingProvider.Instance.GetEncoding(1252)!;
+    }
 
     // Characters written so far into a buffer that is long enough.
     private ref struct Output(Span<char> buffer)

@@ -1,5 +1,6 @@
 using System.Collections.Concurrent;
 using System.Globalization;
+using MemberScan.Mechanics.Properties;
 using MemberScan.Mechanics.Sections;
 using MemberScan.Mechanics.Stress;
 

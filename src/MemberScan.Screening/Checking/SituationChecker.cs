@@ -3,6 +3,7 @@ using MemberScan.Checks;
 using MemberScan.Checks.Stability;
 using MemberScan.Checks.Walls;
 using MemberScan.Mechanics.Forces;
+using MemberScan.Mechanics.Properties;
 using MemberScan.Mechanics.Sections;
 using MemberScan.Mechanics.Stress;
 using MemberScan.Model;
@@ -42,6 +43,7 @@ internal sealed class SituationChecker(SectionLibrary library, Basis basis, doub
     public SituationFindings Check(Subject subject, MemberForces forces, int index)
     {
         var findings = new SituationFindings(forces);
+        foreach (var note in forces.Notes) findings.Note(note);
         if (forces.Unusable is { } unusable)
         {
             findings.Bar(unusable);
@@ -56,13 +58,22 @@ internal sealed class SituationChecker(SectionLibrary library, Basis basis, doub
             return findings;
         }
 
+        var isEnvelope = !forces.Envelope.IsEmpty;
+        if (isEnvelope) findings.Note(EnvelopeSearch.Note);
         if (!line.ReachesBothEnds) findings.Bar(ReasonCode.StationsTooCoarse, $"the stations of '{forces.Situation.Name}' do not reach both ends of the member");
         foreach (var shape in subject.Section.Shapes)
         {
             var properties = library.Properties(shape);
             CheckStability(findings, line, properties, subject, Math.Max(subject.Length, (forces.To ?? 0) - forces.From));
-            foreach (var station in line.Stations) CheckWalls(findings, shape, properties, Cleaned(station.Forces, shape), subject);
-            if (findings.Limit is { } limit)
+            var states = isEnvelope ? forces.Envelope.SelectMany(e => e.Corners()) : line.Stations.Select(s => s.Forces);
+            foreach (var state in states) CheckWalls(findings, shape, properties, Cleaned(state, shape), subject);
+            if (findings.Limit is not { } limit) continue;
+            if (isEnvelope)
+            {
+                findings.Elementary = Found.Larger(findings.Elementary, SearchEnvelope(findings, shape, ShearModel.Elementary, subject, limit, index));
+                findings.Elasticity = Found.Larger(findings.Elasticity, SearchEnvelope(findings, shape, ShearModel.Elasticity, subject, limit, index));
+            }
+            else
             {
                 findings.Elementary = Found.Larger(findings.Elementary, Search(findings, line, shape, ShearModel.Elementary, subject, forces.From, limit, index));
                 findings.Elasticity = Found.Larger(findings.Elasticity, Search(findings, line, shape, ShearModel.Elasticity, subject, forces.From, limit, index));
@@ -121,6 +132,11 @@ internal sealed class SituationChecker(SectionLibrary library, Basis basis, doub
         if (SlenderWall.Check(shape, properties, forces, yield) is CheckResult.NotEvaluated slender) findings.Bar(slender.Why);
     }
 
+    private Found? SearchEnvelope(SituationFindings findings, CrossSection shape, ShearModel model, Subject subject, StressLimit limit, int index) =>
+        library.Field(shape, model, subject.Poisson).Field is { } field
+            ? EnvelopeSearch.Largest(findings, findings.Forces.Envelope, field, LimitInForce.Measure(limit), LimitInForce.Stress(limit, subject.Yield), index)
+            : null;
+
     private Found? Search(
         SituationFindings findings, ForceLine line, CrossSection shape, ShearModel model, Subject subject, double from, StressLimit limit, int index)
     {
@@ -165,7 +181,7 @@ internal sealed class SituationChecker(SectionLibrary library, Basis basis, doub
             switch (interval.Kind)
             {
                 case IntervalKind.UniformLoadInferred:
-                    findings.Note("uniform load inferred between stations");
+                    if (!findings.Forces.LoadsAreKnown) findings.Note("uniform load inferred between stations");
                     if (CanExceed(interval)) SearchInside(interval, Try);
                     break;
                 case IntervalKind.Unknown:
@@ -219,7 +235,7 @@ internal sealed class SituationChecker(SectionLibrary library, Basis basis, doub
     /// The forces that the field has an answer for. Where it carries no torsion and there is some, axial force and bending alone are
     /// checked: σ is a lower bound of the equivalent stress, enough to call the member overstressed and never to pass it.
     /// </summary>
-    private static SectionForces Usable(SituationFindings findings, StressField field, CrossSection shape, in SectionForces forces)
+    internal static SectionForces Usable(SituationFindings findings, StressField field, CrossSection shape, in SectionForces forces)
     {
         var cleaned = Cleaned(forces, shape);
         if (field.CarriesTorsion || cleaned.T == 0) return cleaned;
@@ -228,7 +244,7 @@ internal sealed class SituationChecker(SectionLibrary library, Basis basis, doub
         return new SectionForces(cleaned.N, 0, 0, 0, cleaned.My, cleaned.Mz);
     }
 
-    private static SectionForces Cleaned(in SectionForces forces, CrossSection shape)
+    internal static SectionForces Cleaned(in SectionForces forces, CrossSection shape)
     {
         var extent = Math.Max(shape.ExtentY, shape.ExtentZ);
         var force = Math.Max(Math.Abs(forces.N), Math.Max(Math.Abs(forces.Vy), Math.Abs(forces.Vz)));

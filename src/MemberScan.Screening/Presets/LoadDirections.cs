@@ -1,5 +1,6 @@
 using System.Collections.Immutable;
 using MemberScan.Foundation.Geometry;
+using MemberScan.Mechanics.Properties;
 using MemberScan.Mechanics.Sections;
 
 namespace MemberScan.Screening.Presets;

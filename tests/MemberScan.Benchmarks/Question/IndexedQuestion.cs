@@ -23,12 +23,12 @@ internal sealed class IndexedQuestion
     public static Answer Ask(string path, int threads)
     {
         var watch = Stopwatch.StartNew();
-        using var index = Part21Index.Open(path, [Member, ByProperties, ByType], new DiagnosticList(), threads);
+        using var index = Part21Index.Open(path, [Member, ByProperties, ByType], new DiagnosticList(), threads, () => new RelationPairs());
         var opened = watch.Elapsed;
         var (first, second) = (GC.CollectionCount(0), GC.CollectionCount(1));
         if (threads == 0) threads = Environment.ProcessorCount;
 
-        var pairs = Relations(index, threads);
+        var pairs = RelationPairs.Joined(index.Takers);
         var related = watch.Elapsed;
         var members = index.OffsetsOf(Member).ToArray();
         var parts = new Answer[threads];
@@ -57,39 +57,6 @@ internal sealed class IndexedQuestion
         }
 
         return 0;
-    }
-
-    // Element → set or type, as pairs in order of the element: element in the high half.
-    private static (ulong[] Sets, ulong[] Types) Relations(Part21Index index, int threads)
-    {
-        var all = new[] { ByProperties, ByType }.Select(keyword =>
-        {
-            var offsets = index.OffsetsOf(keyword).ToArray();
-            var parts = new List<ulong>[threads];
-            Run(threads, part =>
-            {
-                var lookup = index.CreateLookup();
-                var pairs = parts[part] = [];
-                for (var i = offsets.Length * part / threads; i < offsets.Length * (part + 1) / threads; i++) Pair(lookup, offsets[i], pairs);
-            });
-            ulong[] joined = [.. parts.SelectMany(p => p)];
-            Array.Sort(joined);
-            return joined;
-        }).ToArray();
-        return (all[0], all[1]);
-    }
-
-    private static void Pair(Part21Lookup lookup, long offset, List<ulong> pairs)
-    {
-        if (!lookup.TryReadAt(offset, out var relation)) return;
-
-        var arguments = relation.Arguments;
-        if (!arguments.Move(5)) return;
-        var elements = arguments.Items;
-        if (!arguments.MoveNext() || !arguments.TryReference(out var target)) return;
-        while (elements.MoveNext())
-            if (elements.TryReference(out var element))
-                pairs.Add((ulong)element << 32 | target);
     }
 
     private static void Run(int threads, Action<int> work)

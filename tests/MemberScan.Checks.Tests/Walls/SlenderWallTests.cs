@@ -1,6 +1,7 @@
 using MemberScan.Checks.Walls;
 using MemberScan.Foundation.Units;
 using MemberScan.Mechanics.Forces;
+using MemberScan.Mechanics.Properties;
 using MemberScan.Mechanics.Sections;
 using MemberScan.Model.Verdicts;
 
@@ -192,6 +193,9 @@ public sealed class SlenderWallTests
         JSource = "not needed here",
         WelY = iy,
         WelZ = iz,
+        Extremes = new ExtremeModuli(iy, iy, iz, iz),
+        QY = iy / 2,
+        QZ = iz / 2,
         WplY = iy,
         WplZ = iz,
         Wt = null,

@@ -13,14 +13,17 @@ public sealed class SectionRunTests
         using var json = await Json([.. s_combined, "--at", "y=0mm z=10mm", "--yield", "235MPa"]);
 
         var root = json.RootElement;
-        Assert.Equal(["section", "properties", "shear", "poisson", "forces", "utilization", "points", "governing", "closure"], Keys(root));
-        Assert.Equal(["area", "Iy", "Iz", "Iyz", "J", "WelY", "WelZ", "WplY", "WplZ", "Wt", "JThinWall", "yS", "zS", "JSource"], Keys(root.GetProperty("properties")));
+        Assert.Equal(["section", "properties", "shear", "poisson", "forces", "utilization", "points", "governing", "closure", "state"], Keys(root));
+        Assert.Equal(["area", "Iy", "Iz", "Iyz", "J", "WelY", "WelZ", "WplY", "WplZ", "Wt", "JThinWall", "yS", "zS", "JSource", "WelExtremes", "IMax", "IMin", "principalAngle", "QY", "QZ", "plasticAxisY", "plasticAxisZ", "WtThinWall", "shearAreaY", "shearAreaZ"], Keys(root.GetProperty("properties")));
         Assert.Equal(["N", "Vy", "Vz", "T", "My", "Mz"], Keys(root.GetProperty("forces")));
         Assert.Equal(["y", "z", "sigma", "tauXY", "tauXZ", "tau", "vonMises", "tresca", "sigma1", "sigma3"], Keys(root.GetProperty("points")[0]));
         var governing = root.GetProperty("governing");
         Assert.Equal(["vonMises", "tresca", "absSigma", "tau", "sigma1", "sigma3"], Keys(governing));
         Assert.All(governing.EnumerateObject(), measure => Assert.Equal(["value", "y", "z", "place"], Keys(measure.Value)));
         Assert.Equal(("elementary", 0.3, "round 20 mm"), (root.GetProperty("shear").GetString(), root.GetProperty("poisson").GetDouble(), root.GetProperty("section").GetString()));
+        Assert.Equal(
+            ["sigma", "tauXY", "tauXZ", "sigma1", "sigma2", "sigma3", "shearDirection", "angle", "direction1", "direction2", "direction3", "freeDirections", "largestShear", "circles", "elements"],
+            Keys(root.GetProperty("state")));
         Assert.DoesNotContain("utilization", Keys((await Json(s_combined)).RootElement));
     }
 
@@ -48,6 +51,31 @@ public sealed class SectionRunTests
             [Math.PI * 1e-4, Math.PI / 4 * 1e-8, Math.PI / 2 * 1e-8, Math.PI / 4 * 1e-6, 4.0 / 3 * 1e-6],
             new[] { "area", "Iy", "J", "WelZ", "WplY" }.Select(k => p.GetProperty(k).GetDouble()), (a, b) => Math.Abs(a / b - 1) < 1e-9);
         Assert.Equal(JsonValueKind.Null, p.GetProperty("JThinWall").ValueKind);
+    }
+
+    /// <summary>By hand from σ = 211.89 and τ = 31.83 MPa: 105.945 ± √(105.945² + 31.83²) = 105.945 ± 110.623; 2θ = atan(63.66/211.89) = 16.72°.</summary>
+    [Fact]
+    public async Task The_state_at_the_governing_point_is_worked_out()
+    {
+        using var json = await Json(s_combined);
+        var plain = await Memberscan.Run(["section", .. s_combined]);
+
+        var state = json.RootElement.GetProperty("state");
+        double Mpa(JsonElement e, string key) => e.GetProperty(key).GetDouble() / 1e6;
+        Assert.Equal([216.57, 0, -4.68, 211.89], [Mpa(state, "sigma1"), Mpa(state, "sigma2"), Mpa(state, "sigma3"), Mpa(state, "sigma")], (a, b) => Math.Abs(a - b) < 0.01);
+        Assert.Equal(16.72 / 2, state.GetProperty("angle").GetDouble() * 180 / Math.PI, 0.01);
+        Assert.Equal(110.62, Mpa(state.GetProperty("largestShear"), "shear"), 0.01);
+        Assert.Equal(105.95, Mpa(state.GetProperty("largestShear"), "normal"), 0.01);
+        Assert.Equal([("σ1–σ3", 105.95, 110.62), ("σ1–σ2", 108.28, 108.28), ("σ2–σ3", -2.34, 2.34)],
+            state.GetProperty("circles").EnumerateArray().Select(c => (c.GetProperty("name").GetString()!, Math.Round(Mpa(c, "centre"), 2), Math.Round(Mpa(c, "radius"), 2))),
+            (a, b) => a.Item1 == b.Item1 && Math.Abs(a.Item2 - b.Item2) < 0.011 && Math.Abs(a.Item3 - b.Item3) < 0.011);
+        // At (−7.07, 7.07) mm torsion runs towards −y −z: τxy = −T·z/J, τxz = T·y/J, both −22.51 MPa.
+        Assert.Equal([("xy", 211.89, -22.51), ("xz", 211.89, -22.51)],
+            state.GetProperty("elements").EnumerateArray().Select(e => (e.GetProperty("plane").GetString()!, Mpa(e, "sigma"), Mpa(e, "tau"))),
+            (a, b) => a.Item1 == b.Item1 && Math.Abs(a.Item2 - b.Item2) < 0.01 && Math.Abs(a.Item3 - b.Item3) < 0.01);
+        Assert.Contains("principal stresses σ1 216.57, σ2 0, σ3 -4.68 MPa; σ1 at 8.36° from x towards τ", plain.Output, StringComparison.Ordinal);
+        Assert.Contains("Mohr's circles: σ1–σ3 centre 105.95, radius 110.62 MPa", plain.Output, StringComparison.Ordinal);
+        Assert.Contains("stress element xy: σx 211.89, τxy -22.51 MPa", plain.Output, StringComparison.Ordinal);
     }
 
     /// <summary>h/b = 2: J = 0.2287·80·40³ mm⁴ = 1.171e6, τ = T/(0.24588·80·40²) = 6.354 MPa (Timoshenko and Goodier, art. 109, from memory).</summary>
@@ -214,6 +242,8 @@ public sealed class SectionRunTests
         Assert.StartsWith("<svg", svg, StringComparison.Ordinal);
         Assert.Equal(2, svg.Split("<polygon").Length - 1);
         Assert.Contains("largest von Mises", svg, StringComparison.Ordinal);
+        Assert.Equal((3, 2), (svg.Split("class=\"mohr\"").Length - 1, svg.Split("class=\"element\"").Length - 1));
+        System.Xml.Linq.XDocument.Parse(svg);
         Assert.Equal(["gusset.json", "gusset.svg"], folder.Names);
     }
 

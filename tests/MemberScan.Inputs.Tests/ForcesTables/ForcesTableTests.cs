@@ -54,6 +54,29 @@ public sealed class ForcesTableTests
         Assert.Equal([SituationKind.Design, SituationKind.Unknown], table.Rows.Select(row => row.Kind));
     }
 
+    [Theory]
+    [InlineData(';')]
+    [InlineData('\t')]
+    public void Columns_may_be_parted_by_semicolons_or_tabs(char separator)
+    {
+        var text = Rows("\"A,1\",S 1,design,0.5,-1.25e1,0,0,0,0,0").Replace("\"A,1\"", "\"A§1\"", StringComparison.Ordinal).Replace(',', separator).Replace('§', ',');
+
+        var row = Assert.Single(Sound(text).Rows);
+        var named = Assert.Single(Sound($"sep={separator}\r\n{text}").Rows);
+
+        Assert.Equal(("A,1", "S 1", SituationKind.Design, 0.5, -12_500.0), (row.Member, row.Situation, row.Kind, row.Station, row.Forces.N));
+        Assert.Equal(row with { Line = 3 }, named);
+    }
+
+    [Fact]
+    public void Envelopes_and_linear_results_are_stated_in_directives()
+    {
+        var table = Sound($"# situations: envelopes\n# results: linear\n{Header}\nA,B,,0,0,0,0,0,0,0\n");
+
+        Assert.Equal((true, true, true), (table.IsEnvelope, table.IsLinear, table.ActsInFull));
+        Assert.Equal((false, false), (Sound(Rows("A,B,,0,0,0,0,0,0,0")).IsEnvelope, Sound(Rows("A,B,,0,0,0,0,0,0,0")).IsLinear));
+    }
+
     [Fact]
     public void Directives_hold_wherever_they_stand_before_the_rows()
     {
@@ -89,10 +112,19 @@ public sealed class ForcesTableTests
         { "", "INP-0002", 1, 1, $"the table is empty; its first line names the columns: {Header}" },
         { "# only a remark\n", "INP-0002", 1, 1, $"the table is empty; its first line names the columns: {Header}" },
         { Header + "\n", "INP-0003", 1, 1, "the table has a header but no rows; add the section forces or leave the table out" },
-        { "# x\nmember;situation;N[kN]\nA;B;1,5\n", "INP-0004", 2, 7, "the columns are parted by semicolons; save the table as CSV with commas and decimal points" },
-        { "member\tsituation\n", "INP-0004", 1, 7, "the columns are parted by tabs; save the table as CSV with commas and decimal points" },
-        { "\"member\";\"situation\"\n", "INP-0004", 1, 9, "the columns are parted by semicolons; save the table as CSV with commas and decimal points" },
-        { "sep=;\nmember;situation\n", "INP-0004", 1, 5, "the columns are parted by semicolons; save the table as CSV with commas and decimal points" },
+        { "# x\nmember;situation,kind;station[m]\n", "INP-0004", 2, 7, "the columns of the header are parted by more than one of comma, semicolon and tab; save the table with one of them" },
+        { "member\tsituation;kind\n", "INP-0004", 1, 17, "the columns of the header are parted by more than one of comma, semicolon and tab; save the table with one of them" },
+        { Rows("A,B,,0,0,0,0,0,0,0").Replace(',', ';').Replace("B;;0;0", "B;;0;1,5", StringComparison.Ordinal), "INP-0013", 2, 8, "N is '1,5', with a comma; write the number with a decimal point and without grouping" },
+        { Rows("A,B,,0,0,0,0,0,0,0").Replace(',', '\t').Replace("\t0\t0\t0\n", "\t0\t0\t1,000.5\n", StringComparison.Ordinal), "INP-0013", 2, 18, "Mz is '1,000.5', with a comma; write the number with a decimal point and without grouping" },
+        { Rows("A;B;;0;0;0;0;0;0"), "INP-0009", 2, 1, "the row has 1 fields, the header 10" },
+        { Rows("A,B,,0,0,0,0,0,0,0").Replace(',', ';').Replace("A;", "A;;", StringComparison.Ordinal), "INP-0009", 2, 19, "the row has 11 fields, the header 10" },
+        { "# situations: envelope\n" + Rows("A,B,,0,0,0,0,0,0,0"), "INP-0019", 1, 1, "'envelope' is not a value of the directive 'situations'; did you mean 'envelopes'?" },
+        { "# results: nonlinear\n" + Rows("A,B,,0,0,0,0,0,0,0"), "INP-0019", 1, 1, "'nonlinear' is not a value of the directive 'results'; did you mean 'linear'?" },
+        { "# situations: envelopes\n# situations: load-cases\n" + Rows("A,B,,0,0,0,0,0,0,0"), "INP-0020", 2, 1, "the directive 'situations' says load-cases here and envelopes above; keep one of the two" },
+        { Rows("A,B,,0,0x1F,0,0,0,0,0"), "INP-0011", 2, 8, "N is '0x1F', which is not a number; write digits with a decimal point, such as -12.5 or 3e-2" },
+        { Rows("A,B,,0,1e,0,0,0,0,0"), "INP-0011", 2, 8, "N is '1e', which is not a number; write digits with a decimal point, such as -12.5 or 3e-2" },
+        { Rows("A,B,,0,--1,0,0,0,0,0"), "INP-0011", 2, 8, "N is '--1', which is not a number; write digits with a decimal point, such as -12.5 or 3e-2" },
+        { Rows("A,B,,0,1e400,0,0,0,0,0"), "INP-0012", 2, 8, "N is '1e400', which is not finite; give a finite number" },
         { "remark," + Header + "\n", "INP-0005", 1, 1, "'remark' is not a column; known are member, situation, kind, station, N, Vy, Vz, T, My, Mz" },
         { Header.Replace("situation", "situatoin", StringComparison.Ordinal) + "\n", "INP-0005", 1, 8, "'situatoin' is not a column; did you mean 'situation'?" },
         { Header + ",\n", "INP-0005", 1, Header.Length + 2, "column 11 has no name; name it or take it out" },
@@ -215,6 +247,49 @@ public sealed class ForcesTableTests
     }
 
     [Fact]
+    public void More_names_than_the_limit_are_refused()
+    {
+        var text = Rows("A,B,,0,0,0,0,0,0,0\nC,B,,1,0,0,0,0,0,0");
+
+        Assert.Equal(2, Read(text, TableLimits.Default with { Names = 3 }).Table!.Rows.Length);
+        AssertLimit(text, TableLimits.Default with { Names = 2 });
+        Assert.Equal(5_000_000, TableLimits.Default.Names);
+    }
+
+    /// <summary>Three windows long, in pieces of few bytes: what a window loses or doubles at its edges would show.</summary>
+    [Fact]
+    public void A_table_of_any_length_is_read_through_its_window()
+    {
+        var lines = Enumerable.Range(0, 50_000).Select(i => string.Create(CultureInfo.InvariantCulture, $"M{i / 10},\"S {i % 3}\",,{i % 10},{i},{-i},{i / 7.0:R},0,1e-{i % 9},0")).ToArray();
+        var bytes = Encoding.UTF8.GetBytes(Rows(string.Join('\n', lines)));
+        Assert.True(bytes.Length > 2 * Inputs.ForcesTables.Rows.RowWindow.Size);
+        var (rows, diagnostics) = (new List<ForcesRow>(), new DiagnosticList());
+
+        var table = ForcesTable.Stream(new Dripping(bytes), "t.csv", diagnostics, (in ForcesRow row) => rows.Add(row));
+
+        Assert.Empty(diagnostics.Items);
+        Assert.Empty(table!.Rows);
+        Assert.Equal(Convert.ToHexStringLower(System.Security.Cryptography.SHA256.HashData(bytes)), table.Sha256);
+        Assert.Equal(lines.Length, rows.Count);
+        Assert.All(rows.Select((row, i) => (row, i)), r =>
+        {
+            Assert.Equal((r.i + 2, $"M{r.i / 10}", $"S {r.i % 3}", r.i % 10), (r.row.Line, r.row.Member, r.row.Situation, (int)r.row.Station));
+            Assert.Equal((r.i * 1e3, -r.i * 1e3, r.i / 7.0 * 1e3), (r.row.Forces.N, r.row.Forces.Vy, r.row.Forces.Vz));
+        });
+    }
+
+    [Fact]
+    public void Errors_far_down_have_their_place_too()
+    {
+        var rows = string.Join('\n', Enumerable.Repeat("A,B,,0,0,0,0,0,0,0", 100_000)) + "\nA,B,,0,x,0,0,0,0,0";
+
+        var (table, diagnostics) = Read(Rows(rows), TableLimits.Default);
+
+        Assert.Null(table);
+        Assert.Equal((100_002L, 8, (long)(Header.Length + 1 + 100_000 * 19 + 7)), (diagnostics.Items[0].Span!.Value.Line, diagnostics.Items[0].Span!.Value.Column, diagnostics.Items[0].Span!.Value.Offset));
+    }
+
+    [Fact]
     public void Names_that_repeat_are_kept_once()
     {
         var table = Sound(Rows("A,B,,0,0,0,0,0,0,0\nA,B,,1,0,0,0,0,0,0"));
@@ -295,5 +370,12 @@ public sealed class ForcesTableTests
     {
         var diagnostics = new DiagnosticList();
         return (ForcesTable.Read(Encoding.UTF8.GetBytes(text), "hangers.csv", diagnostics, limits), diagnostics);
+    }
+
+    private sealed class Dripping(byte[] bytes) : MemoryStream(bytes)
+    {
+        private int _count;
+
+        public override int Read(byte[] buffer, int offset, int count) => base.Read(buffer, offset, Math.Min(count, 1 + (_count++ * 7919 % 5000)));
     }
 }

@@ -4,6 +4,7 @@ using MemberScan.Foundation.Units;
 using MemberScan.Inputs.Materials;
 using MemberScan.Inputs.Presets;
 using MemberScan.Inputs.SettingsFiles;
+using MemberScan.Inputs.SettingsFiles.Forces;
 
 namespace MemberScan.Inputs.Tests.SettingsFiles;
 
@@ -24,6 +25,12 @@ public sealed class SettingsSchemaTests
         Assert.Equal(SettingKeys.RoleEntry, Keys("roles"));
         Assert.Equal(SettingKeys.Forces, Keys("forces"));
         Assert.Equal(SettingKeys.KindEntry, Keys("forces", "kinds"));
+        Assert.Equal(ForceKeys.Combination, Keys("forces", "combinations"));
+        Assert.Equal(ForceKeys.Tag, Keys("forces", "caseTags"));
+        Assert.Equal(ForceKeys.PropertySet, Keys("forces", "propertySets"));
+        Assert.Equal(ForceKeys.Components.Words, Keys("forces", "propertySets", "components"));
+        Assert.Equal(ForceKeys.Station, Keys("forces", "propertySets", "station"));
+        Assert.Equal(ForceKeys.Component, _schema.GetProperty("$defs").GetProperty("forceProperty").GetProperty("properties").EnumerateObject().Select(key => key.Name));
         Assert.Equal(LoadRulesReader.Keys, Keys("loads"));
         Assert.Equal(SettingKeys.UnitTypes, Keys("units"));
         Assert.Equal(SettingKeys.Materials, Keys("materials"));
@@ -42,6 +49,17 @@ public sealed class SettingsSchemaTests
         Assert.Equal(SettingKeys.MissingComponents.Words, Words("forces", "missingComponents"));
         Assert.Equal(SettingKeys.UnknownMembers.Words, Words("forces", "unknownMembers"));
         Assert.Equal(SettingKeys.Kinds.Words, Words("forces", "kinds", "kind"));
+        Assert.Equal(ForceKeys.MissingCoefficients.Words, Words("forces", "missingCoefficients"));
+        Assert.Equal(ForceKeys.CaseCoefficientWords.Words, Words("forces", "caseCoefficients"));
+        Assert.Equal(ForceKeys.Tags.Words, Words("forces", "caseTags", "tag"));
+        Assert.Equal(ForceKeys.Sets.Words, At("forces", "combinationSets").GetProperty("items").GetProperty("enum").EnumerateArray().Select(word => word.GetString()!));
+        Assert.Equal(SettingKeys.Kinds.Words, Words("forces", "combinations", "kind"));
+        Assert.Equal(SettingKeys.Kinds.Words, Words("forces", "propertySets", "kind"));
+        Assert.Equal(ForceKeys.SituationWords.Words.Order(), Words("forces", "propertySets", "situations").Order());
+        Assert.Equal(ForceKeys.ResultWords.Words, Words("forces", "propertySets", "results"));
+        Assert.Equal(SettingKeys.StatedConventions.Words, Words("forces", "propertySets", "convention"));
+        Assert.Equal(ForceKeys.StationSources.Words, Words("forces", "propertySets", "stations"));
+        Assert.Equal([.. Unit.SymbolsOf(Quantity.Length), "%"], Words("forces", "propertySets", "station", "unit"));
         Assert.Equal(SettingKeys.Displays.Words, Words("display"));
         foreach (var type in SettingKeys.UnitTypes) Assert.Equal(Unit.SymbolsOf(SettingKeys.UnitQuantities[type]), Words("units", type));
     }
@@ -59,6 +77,11 @@ public sealed class SettingsSchemaTests
         Assert.Equal(SettingKeys.Slope, Range(At("roles", "minSlopeDegrees")));
         Assert.Equal(SettingKeys.Slope, Range(At("roles", "maxSlopeDegrees")));
         Assert.Equal(SettingKeys.Slenderness, Range(At("roles", "minSlenderness")));
+        Assert.Equal(ForceKeys.CaseFactor, Range(At("forces", "combinations", "factors").GetProperty("additionalProperties")));
+        Assert.Equal(ForceKeys.StationWord, Range(At("forces", "propertySets", "stationWords").GetProperty("additionalProperties")));
+        Assert.Equal(CombinationReader.MostCombinations, At("forces", "combinations").GetProperty("maxItems").GetInt32());
+        Assert.Equal(CombinationReader.MostCases, At("forces", "combinations", "factors").GetProperty("maxProperties").GetInt32());
+        Assert.Equal(PropertySetReader.MostMappings, At("forces", "propertySets").GetProperty("maxItems").GetInt32());
         Assert.Equal(RoleRulesReader.MostRules, At("roles").GetProperty("maxItems").GetInt32());
     }
 

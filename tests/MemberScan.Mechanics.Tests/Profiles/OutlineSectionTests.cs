@@ -1,5 +1,6 @@
 using MemberScan.Mechanics.Forces;
 using MemberScan.Mechanics.Profiles;
+using MemberScan.Mechanics.Properties;
 using MemberScan.Mechanics.Sections;
 using MemberScan.Mechanics.Stress;
 

@@ -57,6 +57,23 @@ public sealed class WideBitsTests
         }
     }
 
+    [Fact]
+    public void Turns_add_up_across_words_and_masks()
+    {
+        var random = new Random(74);
+        var carry = 0u;
+        var isOn = false;
+        for (var round = 0; round < 200; round++)
+        {
+            var turns = Bits(random, 2 + round % 3);
+
+            var on = Flat(WideBits.PrefixXor(Mask(turns), ref carry));
+
+            for (var i = 0; i < 512; i++) Assert.Equal(isOn ^= turns[i], on[i]);
+            Assert.Equal(isOn ? 1u : 0u, carry);
+        }
+    }
+
     private static bool[] Bits(Random random, int oneIn) => [.. Enumerable.Range(0, 512).Select(_ => random.Next(oneIn) != 0)];
 
     private static Vector512<ulong> Mask(bool[] bits)

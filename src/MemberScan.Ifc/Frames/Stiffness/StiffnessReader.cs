@@ -2,6 +2,7 @@ using System.Collections.Immutable;
 using System.Globalization;
 using MemberScan.Foundation.Geometry;
 using MemberScan.Ifc.Analysis;
+using MemberScan.Mechanics.Properties;
 using MemberScan.Mechanics.Sections;
 using MemberScan.Model;
 using MemberScan.Model.Frames;
@@ -19,6 +20,9 @@ internal sealed class StiffnessReader(Instances instances, Relations relations, 
 
     /// <summary>Acceleration of gravity by which a mass becomes a weight [m/s²]; the models name none.</summary>
     public const double Gravity = 9.80665;
+
+    /// <summary>Density of steel where a model gives none [kg/m³].</summary>
+    public const double SteelDensity = 7850;
 
     /// <summary>Share of the second moments below which a product of inertia or an offset of the shear centre is nothing.</summary>
     private const double Nothing = 1e-9;
@@ -46,10 +50,17 @@ internal sealed class StiffnessReader(Instances instances, Relations relations, 
         var facts = MaterialsOf(source.Element).Select(elastic.Of).FirstOrDefault(f => f != ElasticFacts.None) ?? ElasticFacts.None;
         var poisson = (Finding<double>.Found)source.Material.Poisson;
         if (facts.ShearModulus is null && poisson.Source == "default") notes.Add(string.Create(CultureInfo.InvariantCulture, $"{name}: G by the default Poisson's ratio {poisson.Value:0.0##}"));
+        var density = facts.Density;
+        if (density is null && source.Material.IsSteel)
+        {
+            density = SteelDensity;
+            notes.Add(string.Create(CultureInfo.InvariantCulture, $"{name}: density {SteelDensity} kg/m³ (EN 1991-1-1, Table A.4, from memory); the model gives none"));
+        }
+
         var shear = facts.ShearModulus ?? modulus.Value / (2 * (1 + poisson.Value));
-        var material = new FrameMaterial(source.Material.Name, modulus.Value, shear, (facts.Density ?? 0) * Gravity, facts.Expansion ?? 0, (source.Material.Yield as Finding<double>.Found)?.Value);
+        var material = new FrameMaterial(source.Material.Name, modulus.Value, shear, (density ?? 0) * Gravity, facts.Expansion ?? 0, (source.Material.Yield as Finding<double>.Found)?.Value);
         return new Finding<MemberStiffness>.Found(
-            new MemberStiffness(constants, material, z, reversed, facts.Density, facts.Expansion, section.Value.Shape.ExtentY, section.Value.Shape.ExtentZ, notes.ToImmutable()),
+            new MemberStiffness(constants, material, z, reversed, density, facts.Expansion, section.Value.Shape.ExtentY, section.Value.Shape.ExtentZ, notes.ToImmutable()),
             $"{section.Source}; E by {modulus.Source}");
     }
 
