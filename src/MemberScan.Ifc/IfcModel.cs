@@ -5,6 +5,10 @@ using MemberScan.Ifc.Analysis.Loads;
 using MemberScan.Ifc.Bodies;
 using MemberScan.Ifc.Curves;
 using MemberScan.Ifc.ForceSets;
+using MemberScan.Ifc.Frames;
+using MemberScan.Ifc.Frames.Loading;
+using MemberScan.Ifc.Frames.Stiffness;
+using MemberScan.Ifc.Frames.Topology;
 using MemberScan.Ifc.Geometry;
 using MemberScan.Ifc.Materials;
 using MemberScan.Ifc.Members;
@@ -91,7 +95,7 @@ public sealed class IfcModel
         var tree = new LoadTree(_instances, _rules.Forces);
         var loads = new SituationLoads(_instances, tree, new MemberLoadReader(_instances, _relations, places, tree, Units, Schema));
         var combinations = new CombinedForces(_instances, tree, situations, _diagnostics);
-        return new ModelForcesReader(_instances, _relations, _analytical, reactions, situations, loads, combinations, _diagnostics).Read(members);
+        return new ModelForcesReader(_instances, _relations, new BodyLines(_instances, _relations, _analytical, _diagnostics), reactions, situations, loads, combinations, _diagnostics).Read(members);
     }
 
     /// <summary>Whether an element has a property set that the settings map to section forces.</summary>
@@ -103,4 +107,29 @@ public sealed class IfcModel
 
     /// <summary>Reads the section forces of candidates from their property sets, through the mappings of the settings.</summary>
     public ImmutableArray<MemberForces> ReadForcesInSets(ImmutableArray<Member> members) => _forceSets.Value.Read(members);
+
+    /// <summary>Reads the structural analysis models as frames.</summary>
+    /// <param name="members">The candidates, which give sections and materials to the analytical members that stand for them.</param>
+    public ImmutableArray<AnalysisFrame> ReadFrames(ImmutableArray<Member> members)
+    {
+        var curves = new CurveReader(_instances, _placements, Units);
+        var profiles = new ProfileReader(_instances, _placements, curves, Units);
+        var materials = new MaterialReader(_instances, _relations, new MaterialFactsReader(_instances, Units, _unitReader), profiles, _rules);
+        var source = new AnalyticalSource(_instances, _relations, profiles, materials);
+        var stiffness = new StiffnessReader(_instances, _relations, source, new ElasticFactsReader(_instances, Units, _unitReader), members);
+        var boundaries = new BoundaryReader(Units, Schema);
+        var tree = new LoadTree(_instances, _rules.Forces);
+        var memberLoads = new MemberLoadReader(_instances, _relations, new ActivityPlaces(_instances, _placements, Units), tree, Units, Schema);
+        var loads = new FrameLoadReader(
+            _instances, _relations, _analytical, tree, memberLoads, new NodeLoadReader(_instances, _relations, Units), new SituationReader(_instances, _rules.Forces));
+        return new FrameReader(
+            _instances, _relations, _placements, _analytical, curves, new JointReader(_instances, _placements, Units),
+            new ConnectionReader(_instances, _placements, boundaries, Schema), new ReleaseReader(_instances, _placements, boundaries), loads, stiffness).Read();
+    }
+
+    /// <summary>Lays section forces of analytical members on the candidates that they stand for.</summary>
+    /// <param name="members">The candidates.</param>
+    /// <param name="forces">Forces along analytical members.</param>
+    public ImmutableArray<MemberForces> LayForces(ImmutableArray<Member> members, IEnumerable<LineForces> forces) =>
+        LaidForces.Of(members, forces, new BodyLines(_instances, _relations, _analytical, _diagnostics));
 }

@@ -14,8 +14,20 @@ public static class ShippedFiles
     /// <summary>Material grades by name.</summary>
     public const string Grades = "materials/grades.json";
 
+    /// <summary>Load presets of guards and handrails.</summary>
+    public const string GuardLoads = "loads/guards.json";
+
+    /// <summary>Load presets of hangers.</summary>
+    public const string HangerLoads = "loads/hangers.json";
+
+    /// <summary>Load presets of maintenance.</summary>
+    public const string MaintenanceLoads = "loads/maintenance.json";
+
+    /// <summary>Pipe sizes by schedule, and densities of contents.</summary>
+    public const string Pipes = "loads/pipes.json";
+
     /// <summary>Names of all of them, with '/' between folder and file.</summary>
-    public static ImmutableArray<string> Names { get; } = [DefaultSettings, SettingsSchema, Grades];
+    public static ImmutableArray<string> Names { get; } = [DefaultSettings, SettingsSchema, Grades, GuardLoads, HangerLoads, MaintenanceLoads, Pipes];
 
     /// <summary>The bytes of one of them.</summary>
     /// <exception cref="ArgumentException">There is no such file.</exception>

@@ -10,6 +10,9 @@ using MemberScan.Model.Members;
 using MemberScan.Model.Rules;
 using MemberScan.Model.Verdicts;
 using MemberScan.Part21;
+using MemberScan.Screening.Contacts;
+using MemberScan.Screening.Frames;
+using MemberScan.Screening.Presets;
 using MemberScan.Screening.Record;
 using MemberScan.Screening.Sources;
 
@@ -25,8 +28,8 @@ internal sealed class ModelContents
     private readonly ReadOnlyMemory<byte> _baseText;
 
     private ModelContents(
-        IfcModel? model, Part21File file, ReadOnlyMemory<byte> baseText, MemberCatalog catalog, ImmutableArray<ForcesSource> sources, ImmutableArray<ForcesFile> files) =>
-        (Model, File, _baseText, Catalog, Files, _sources) = (model, file, baseText, catalog, files, sources);
+        IfcModel? model, Part21File file, ReadOnlyMemory<byte> baseText, MemberCatalog catalog, ImmutableArray<ForcesSource> sources, ImmutableArray<ForcesFile> files, ContactList? contacts) =>
+        (Model, File, _baseText, Catalog, Files, _sources, Contacts) = (model, file, baseText, catalog, files, sources, contacts);
 
     /// <summary>The model; null when its schema is not read.</summary>
     public IfcModel? Model { get; }
@@ -39,6 +42,9 @@ internal sealed class ModelContents
 
     /// <summary>The forces tables as read.</summary>
     public ImmutableArray<ForcesFile> Files { get; }
+
+    /// <summary>The contacts that spans and supports of load presets come from; null when no preset is switched on.</summary>
+    public ContactList? Contacts { get; }
 
     /// <summary>Reads model and tables; null, with an error in <paramref name="diagnostics"/>, when a table does not fit the model.</summary>
     public static ModelContents? Read(ScreeningRequest request, DiagnosticList diagnostics, IProgress<ScreeningProgress>? progress, CancellationToken cancellation)
@@ -59,16 +65,11 @@ internal sealed class ModelContents
         progress?.Report(new("forces", 0));
         var (fromTables, files) = ReadTables(request, catalog, diagnostics);
         var rules = request.Settings.Reading.Forces;
-        ImmutableArray<ForcesSource> sources =
-        [
-            ForcesSource.Of("forces table", fromTables, rules, diagnostics),
-            ForcesSource.Of("results in the model", WithTorsion(Usable(model?.ReadForces(catalog.Members) ?? [], catalog.Members), rules), rules, diagnostics),
-            ForcesSource.Of("property sets", WithTorsion(model?.ReadForcesInSets(catalog.Members) ?? [], rules), rules, diagnostics),
-        ];
+        var sources = Sources(request, model, catalog, fromTables, diagnostics, out var contacts);
         CaseCombinations.RefuseUnknown(rules, sources.SelectMany(s => s.All), diagnostics);
         return diagnostics.Items.Any(d => d.Severity == Severity.Error && s_faults.Contains(d.Code))
             ? null
-            : new ModelContents(model, file, stripped.Base, catalog, sources, files);
+            : new ModelContents(model, file, stripped.Base, catalog, sources, files, contacts);
     }
 
     /// <summary>Results of the model are not used where they are tied to a line beside the section's centroid: about which they are is not said.</summary>
@@ -83,6 +84,39 @@ internal sealed class ModelContents
             Unusable = new Reason(ReasonCode.ConventionUnknown, string.Create(CultureInfo.InvariantCulture, $"the section's centroid lies at y {at.Y * 1e3:0.##} mm, z {at.Z * 1e3:0.##} mm from the line of the analytical member; whether its forces are about the one or the other is not said")),
         })];
     }
+
+    /// <summary>The sources of forces in the order of the settings; load presets serve the members that no earlier source does.</summary>
+    private static ImmutableArray<ForcesSource> Sources(
+        ScreeningRequest request, IfcModel? model, MemberCatalog catalog, ImmutableArray<MemberForces> fromTables, DiagnosticList diagnostics, out ContactList? contacts)
+    {
+        contacts = null;
+        var rules = request.Settings.Reading.Forces;
+        var sources = ImmutableArray.CreateBuilder<ForcesSource>();
+        if (!request.Tables.IsEmpty && !rules.From.Contains(ForceSource.Table))
+            diagnostics.Add("SCR-0033", Severity.Warning, "The settings leave forces tables out (forces.from); the tables given are not used.");
+        foreach (var source in rules.From)
+        {
+            switch (source)
+            {
+                case ForceSource.Table: Add("forces table", fromTables); break;
+                case ForceSource.Results: Add("results in the model", WithTorsion(Usable(model?.ReadForces(catalog.Members) ?? [], catalog.Members), rules)); break;
+                case ForceSource.PropertySets: Add("property sets", WithTorsion(model?.ReadForcesInSets(catalog.Members) ?? [], rules)); break;
+                case ForceSource.Statics: Add("own frame analysis", model is null ? [] : OwnAnalysis.Of(model, catalog.Members, !IsAfterResults(rules), diagnostics)); break;
+                default:
+                    var served = sources.SelectMany(s => s.All).Select(f => f.MemberKey).ToHashSet(StringComparer.Ordinal);
+                    Add("load presets", [.. AssumedForces.Of(catalog.Members, request.Settings.Loads, key => !served.Contains(key), out contacts).Values.SelectMany(f => f)]);
+                    break;
+            }
+        }
+
+        return sources.ToImmutable();
+
+        void Add(string name, ImmutableArray<MemberForces> forces) => sources.Add(ForcesSource.Of(name, forces, rules, diagnostics));
+    }
+
+    /// <summary>Whether results in the model come before our own analysis, which then leaves analysis models with results alone.</summary>
+    private static bool IsAfterResults(ForceRules rules) =>
+        rules.From.IndexOf(ForceSource.Results) is var results and >= 0 && results < rules.From.IndexOf(ForceSource.Statics);
 
     /// <summary>The forces that are used for a candidate: of the first source that has any, with the combinations of its load cases.</summary>
     /// <param name="member">The candidate.</param>

@@ -71,6 +71,7 @@ public static class Screener
             PassedOver = [.. contents.Catalog.PassedOver.Select(p => new PassedOver(p.Class, p.Count, p.Why))],
             Sections = SectionsInUse(contents.Catalog.Members, results, library),
             Members = results,
+            Contacts = contents.Contacts?.All ?? [],
             Findings = [.. diagnostics.Items.Select(d => new FindingLine(d.Code, d.Severity, d.Message, d.Span?.ToString() ?? "", diagnostics.CountOf(d)))],
             Counts = new VerdictCounts(
                 results.Count(r => r.Verdict == Verdict.WithinLimit), results.Count(r => r.Verdict == Verdict.Overstressed), results.Count(r => r.Verdict == Verdict.NotChecked)),

@@ -8,7 +8,6 @@ using MemberScan.Model;
 using MemberScan.Model.Forces;
 using MemberScan.Model.Members;
 using MemberScan.Model.Verdicts;
-using MemberScan.Part21;
 
 namespace MemberScan.Ifc.Analysis;
 
@@ -29,15 +28,15 @@ internal static class JoinedForces
 
     /// <summary>One reaction on one analytical member.</summary>
     /// <param name="Line">The analytical member.</param>
-    /// <param name="Reaction">The reaction.</param>
+    /// <param name="Source">Where its samples come from, in words.</param>
     /// <param name="Samples">Its samples.</param>
     /// <param name="Loads">The loads on the analytical member in the same situation.</param>
-    public sealed record Part(AnalyticalMember Line, Part21Record Reaction, ReactionReader.Samples Samples, LineLoads Loads);
+    public sealed record Part(AnalyticalMember Line, string Source, ReactionReader.Samples Samples, LineLoads Loads);
 
     /// <summary>Joins the samples of all analytical members of a candidate, turned into its axes and shifted along it.</summary>
     public static MemberForces Of(Member member, Situation situation, List<Part> parts)
     {
-        var source = string.Join(", ", parts.Select(p => string.Create(CultureInfo.InvariantCulture, $"{p.Reaction.Keyword} #{p.Reaction.Id} on #{p.Line.Id}")));
+        var source = string.Join(", ", parts.Select(p => p.Source));
         MemberForces Unusable(Reason why) => new() { MemberKey = member.Key, Situation = situation, Stations = [], Source = source, Unusable = why };
         if (parts.Find(p => p.Samples.Unusable is not null) is { Samples.Unusable: { } bad }) return Unusable(bad);
         if (Overlap(parts) is { } overlap) return Unusable(overlap);

@@ -2,8 +2,6 @@ using System.Collections.Immutable;
 using System.Globalization;
 using MemberScan.Foundation.Diagnostics;
 using MemberScan.Ifc.Analysis.Loads;
-using MemberScan.Mechanics.Sections;
-using MemberScan.Model;
 using MemberScan.Model.Forces;
 using MemberScan.Model.Members;
 using MemberScan.Model.Verdicts;
@@ -13,7 +11,7 @@ namespace MemberScan.Ifc.Analysis;
 
 /// <summary>Section forces of the candidates from the result groups of a model, in each candidate's own axes.</summary>
 internal sealed class ModelForcesReader(
-    Instances instances, Relations relations, AnalyticalMemberReader analytical, ReactionReader reactions, SituationReader situations, SituationLoads loads,
+    Instances instances, Relations relations, BodyLines bodies, ReactionReader reactions, SituationReader situations, SituationLoads loads,
     CombinedForces combinations, DiagnosticList diagnostics)
 {
     private readonly HashSet<ulong> _used = [];
@@ -25,57 +23,12 @@ internal sealed class ModelForcesReader(
         foreach (var group in members.GroupBy(m => m.Element.StepId))
         {
             var items = group.ToList();
-            foreach (var (member, lines) in Assign(items, LinesOf(items[0]))) AddForces(member, lines, forces);
+            foreach (var (member, lines) in bodies.Assign(items, bodies.LinesOf(items[0]))) AddForces(member, lines, forces);
             ReportDirectActivities(items[0], forces);
         }
 
         ReportUnassigned();
         return forces.ToImmutable();
-    }
-
-    private List<AnalyticalMember> LinesOf(Member member)
-    {
-        IEnumerable<ulong> ids = member.Element.Class.StartsWith("IfcStructuralCurveMember", StringComparison.Ordinal)
-            ? [member.Element.StepId]
-            : relations.AnalyticalOf(member.Element.StepId);
-        return [.. ids.Select(analytical.Read).OfType<AnalyticalMember>()];
-    }
-
-    /// <summary>Gives each analytical member to the item whose body it runs along; all of them to the element that is its own candidate.</summary>
-    private List<(Member Member, List<AnalyticalMember> Lines)> Assign(List<Member> items, List<AnalyticalMember> lines)
-    {
-        if (items.Count == 1) return [(items[0], lines)];
-
-        var assigned = items.ConvertAll(item => (Member: item, Lines: new List<AnalyticalMember>()));
-        foreach (var line in lines)
-        {
-            var nearest = -1;
-            var least = double.PositiveInfinity;
-            for (var i = 0; i < items.Count; i++)
-            {
-                var distance = Distance(items[i], line);
-                if (distance < least) (nearest, least) = (i, distance);
-            }
-
-            if (nearest >= 0) assigned[nearest].Lines.Add(line);
-            else diagnostics.Add("IFC-0022", Severity.Warning, "An analytical member runs along none of the bodies of the element that it is linked to; its forces are not used.", Span(line.Id));
-        }
-
-        return assigned;
-    }
-
-    /// <summary>Distance of an analytical member's middle from a body's line [m]; infinite when they do not run together.</summary>
-    private static double Distance(Member item, AnalyticalMember line)
-    {
-        if (!item.Axes.TryGet(out var axes, out _) || !item.Length.TryGet(out var length, out _) || !line.Line.TryGet(out var ends, out _)) return double.PositiveInfinity;
-        if (!(ends.Value.End - ends.Value.Start).TryNormalize(out var x) || x.Cross(axes.Value.X).Length > JoinedForces.ParallelTolerance) return double.PositiveInfinity;
-
-        var middle = 0.5 * (ends.Value.Start + ends.Value.End) - axes.Value.Origin;
-        var along = middle.Dot(axes.Value.X);
-        var beside = (middle - along * axes.Value.X).Length;
-        var reach = item.Section is Finding<SectionFinding>.Found section ? Largest(section.Value.Shape) : 0;
-        var within = along > 0 && along < length.Value && beside <= Math.Max(reach, JoinedForces.StickOut * length.Value);
-        return within ? beside : double.PositiveInfinity;
     }
 
     private void AddForces(Member member, List<AnalyticalMember> lines, ImmutableArray<MemberForces>.Builder forces)
@@ -108,7 +61,7 @@ internal sealed class ModelForcesReader(
     private JoinedForces.Part Part(Member member, AnalyticalMember line, Part21Record reaction, Part21Record group)
     {
         var known = JoinedForces.LineAxes(line, member, out var axes, out _) ? loads.On(line, axes, group) : LineLoads.Unknown("the axes are not known");
-        return new JoinedForces.Part(line, reaction, reactions.Read(reaction, line, member.Element, member.Key, known.Loads), known);
+        return new JoinedForces.Part(line, string.Create(CultureInfo.InvariantCulture, $"{reaction.Keyword} #{reaction.Id} on #{line.Id}"), reactions.Read(reaction, line, member.Element, member.Key, known.Loads), known);
     }
 
     private static bool IsReaction(Part21Record record) => record.Keyword is "IFCSTRUCTURALCURVEREACTION" or "IFCSTRUCTURALPOINTREACTION";
@@ -151,8 +104,4 @@ internal sealed class ModelForcesReader(
 
         combinations.ReportUnused();
     }
-
-    private SourceSpan? Span(ulong id) => instances.File.TryFind(id, out var record) ? record.Span : null;
-
-    private static double Largest(CrossSection shape) => Math.Max(shape.ExtentY, shape.ExtentZ);
 }

@@ -45,6 +45,23 @@ internal sealed class SituationReader(Instances instances, ForceRules rules)
             name, kind, source, ActsInFull: true, string.Create(CultureInfo.InvariantCulture, $"combination #{combination.Id}, superposed from the results of its cases"));
     }
 
+    /// <summary>The situation of a load case or combination that is solved here.</summary>
+    public Situation OfLoads(Part21Record group)
+    {
+        if (_known.TryGetValue(group.Id, out var known)) return known;
+
+        var type = Instances.Literal(group[5]);
+        var name = Instances.Text(group[2]).Trim();
+        if (name.Length == 0) name = string.Create(CultureInfo.InvariantCulture, $"{Words(type)} #{group.Id}");
+        name = Unique(name, group.Id);
+        var (kind, source) = Kind(name, Instances.Text(group[9]).Trim());
+        return _known[group.Id] = new Situation(
+            name, kind, source, type == "LOAD_COMBINATION", string.Create(CultureInfo.InvariantCulture, $"{Words(type)} #{group.Id}, solved by our own frame analysis"))
+        {
+            IsLinear = true,
+        };
+    }
+
     private string Unique(string name, ulong id)
     {
         if (_names.Add(name)) return name;

@@ -7,6 +7,7 @@ using MemberScan.Inputs.Materials;
 using MemberScan.Inputs.SettingsFiles.Forces;
 using MemberScan.Model.Forces;
 using MemberScan.Model.Limits;
+using MemberScan.Model.Presets;
 using MemberScan.Model.Rules;
 
 namespace MemberScan.Inputs.SettingsFiles;
@@ -27,6 +28,7 @@ internal static class EffectiveSettings
         Add("sections.recogniseMeshes", settings.Reading.RecogniseMeshes ? "true" : "false");
         if (settings.Reading.Roles.Select(OfRole).SequenceEqual(RoleRule.Default.Select(OfRole))) Add("roles", "the shipped rules");
         else AddAll("roles", settings.Reading.Roles.Select((rule, i) => ($"[{i + 1}]", OfRole(rule))));
+        Add("forces.from", forces.From.SequenceEqual(ForceRules.AutomaticOrder) ? "auto" : Listed([.. forces.From.Select(SettingKeys.Sources.WordOf)]));
         Add("forces.convention", SettingKeys.Conventions.WordOf(forces.Convention));
         Add("forces.components", SettingKeys.Components.WordOf(forces.Components));
         Add("forces.turnDegrees", Number(forces.TurnDegrees));
@@ -43,6 +45,8 @@ internal static class EffectiveSettings
         AddAll("forces.caseTags", forces.CaseTags.Select((tag, i) => ($"[{i + 1}]", $"{Quoted(tag.Pattern)} {ForceKeys.Tags.WordOf(tag.Tag)}")));
         AddAll("forces.propertySets", forces.PropertySets.Select((mapping, i) => ($"[{i + 1}]", ForceTexts.Of(mapping))));
         lines.Add(new EffectiveSetting("forces.kindOfAll", KindOfAll(forces.KindOfAll), forces.KindOfAll == SituationKind.Unknown));
+        AddAll("loads.presets", settings.Loads.Presets.Select((use, i) => ($"[{i + 1}]", OfUse(use))));
+        Add("loads.contactTolerance", $"{Number(settings.Loads.ContactTolerance)} m");
         foreach (var type in SettingKeys.UnitTypes)
             Add($"units.{type}", settings.Reading.MissingUnits.TryGetValue(type, out var factor) ? $"{Number(factor)} {SiUnit(type)}" : None);
         AddAll("materials.grades", settings.Reading.Grades.Where(grade => !GradeTable.Shipped.Grades.Contains(grade))
@@ -81,6 +85,9 @@ internal static class EffectiveSettings
         return $"{Quoted(grade.Name)}, pattern {Quoted(grade.Pattern)}, {Quoted(grade.Standard)}, {yields}, E {Number(grade.Modulus)} Pa, "
             + $"ν {Number(grade.Poisson)}, {(grade.IsSteel ? "steel" : "no steel")}{(grade.FromMemory ? ", from memory" : "")}";
     }
+
+    private static string OfUse(PresetUse use) => $"{Quoted(use.Preset.Name)} for {Quoted(use.Members)}"
+        + (use.Pipe is { } pipe ? $", pipe {Quoted(pipe.Name)} schedule {Quoted(pipe.Schedule)}, {use.Contents}, spacing {Number(use.Spacing)} m" : "");
 
     private static string OfRole(RoleRule rule)
     {

@@ -10,7 +10,7 @@ namespace MemberScan.Inputs.SettingsFiles;
 /// <summary>The keys of a settings file and the words and ranges of their values; the published schema says the same.</summary>
 internal static class SettingKeys
 {
-    public static readonly ImmutableArray<string> Root = ["$schema", "basis", "candidates", "sections", "roles", "forces", "units", "materials", "stability", "display"];
+    public static readonly ImmutableArray<string> Root = ["$schema", "basis", "candidates", "sections", "roles", "forces", "loads", "units", "materials", "stability", "display"];
     public static readonly ImmutableArray<string> Basis = ["service", "design"];
     public static readonly ImmutableArray<string> Service = ["criterion", "omega"];
     public static readonly ImmutableArray<string> Design = ["criterion", "gammaM0"];
@@ -19,7 +19,7 @@ internal static class SettingKeys
     public static readonly ImmutableArray<string> RoleEntry =
         ["role", "classes", "predefinedTypes", "namePattern", "minSlopeDegrees", "maxSlopeDegrees", "minSlenderness"];
     public static readonly ImmutableArray<string> Forces =
-    [
+    ["from", 
         "convention", "components", "turnDegrees", "turnDegreesByMember", "missingComponents", "unknownMembers", "kinds",
         "torsion", "missingCoefficients", "caseCoefficients", "combinations", "combinationSets", "caseTags", "propertySets",
     ];
@@ -42,6 +42,8 @@ internal static class SettingKeys
         new(("positive-face", ForceConvention.PositiveFace), ("end-forces", ForceConvention.EndForces));
     public static readonly WordTable<ForceComponents> Components =
         new(("as-flagged", ForceComponents.AsFlagged), ("member-axes", ForceComponents.MemberAxes), ("global-axes", ForceComponents.GlobalAxes));
+    public static readonly WordTable<ForceSource> Sources = new(
+        ("table", ForceSource.Table), ("results", ForceSource.Results), ("property-sets", ForceSource.PropertySets), ("statics", ForceSource.Statics), ("presets", ForceSource.Presets));
     public static readonly WordTable<bool> MissingComponents = new(("refuse", false), ("zero", true));
     public static readonly WordTable<bool> UnknownMembers = new(("refuse", false), ("list", true));
     public static readonly WordTable<SituationKind> Kinds = new(("service", SituationKind.Service), ("design", SituationKind.Design));

@@ -1,5 +1,6 @@
 using System.Collections.Immutable;
 using MemberScan.Model.Limits;
+using MemberScan.Model.Presets;
 using MemberScan.Model.Rules;
 
 namespace MemberScan.Inputs.SettingsFiles;
@@ -20,6 +21,9 @@ public sealed record Settings
 
     /// <summary>Buckling length over member length, for the rule of 4 % of the Euler load [-], in [0.5, 100].</summary>
     public required double LengthFactor { get; init; }
+
+    /// <summary>Assumed loads that are switched on.</summary>
+    public LoadRules Loads { get; init; } = new();
 
     /// <summary>Units in which results are shown.</summary>
     public required DisplayUnits Display { get; init; }

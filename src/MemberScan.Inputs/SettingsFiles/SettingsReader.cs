@@ -3,9 +3,11 @@ using System.Collections.Immutable;
 using System.Text.Json;
 using MemberScan.Inputs.Json;
 using MemberScan.Inputs.Materials;
+using MemberScan.Inputs.Presets;
 using MemberScan.Inputs.SettingsFiles.Forces;
 using MemberScan.Inputs.Values;
 using MemberScan.Model.Limits;
+using MemberScan.Model.Presets;
 using MemberScan.Model.Rules;
 
 namespace MemberScan.Inputs.SettingsFiles;
@@ -20,6 +22,7 @@ internal sealed class SettingsReader(JsonValues values)
     private Basis _basis = Basis.Default;
     private ReadingRules _reading = new() { Grades = GradeTable.Shipped.Grades };
     private double _lengthFactor = DefaultLengthFactor;
+    private LoadRules _loads = new();
     private DisplayUnits _display = DisplayUnits.Si;
 
     /// <summary>Reads the settings; of meaning only when no error was added.</summary>
@@ -35,6 +38,7 @@ internal sealed class SettingsReader(JsonValues values)
                 case "sections": ReadSections(item); break;
                 case "roles": ReadRoles(item); break;
                 case "forces": _reading = _reading with { Forces = new ForceRulesReader(values, _given).Read(item, _reading.Forces) }; break;
+                case "loads": _loads = new LoadRulesReader(values, _given).Read(item, _loads); break;
                 case "units": ReadUnits(item); break;
                 case "materials": ReadMaterials(item); break;
                 case "stability": ReadStability(item); break;
@@ -42,7 +46,7 @@ internal sealed class SettingsReader(JsonValues values)
             }
         }
 
-        return new Settings { Basis = _basis, Reading = _reading, LengthFactor = _lengthFactor, Display = _display, Given = _given.ToImmutable() };
+        return new Settings { Basis = _basis, Reading = _reading, LengthFactor = _lengthFactor, Loads = _loads, Display = _display, Given = _given.ToImmutable() };
     }
 
     private void ReadBasis(JsonItem item)

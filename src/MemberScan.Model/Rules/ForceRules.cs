@@ -53,4 +53,11 @@ public sealed record ForceRules
 
     /// <summary>Kind of every situation that nothing else tells; from the command line.</summary>
     public SituationKind KindOfAll { get; init; } = SituationKind.Unknown;
+
+    /// <summary>The order in which sources are tried; for each member the first that has any forces counts, and sources left out are not used.</summary>
+    public ImmutableArray<ForceSource> From { get; init; } = AutomaticOrder;
+
+    /// <summary>The order where the settings say nothing: what somebody computed, then our own analysis, then assumed loads.</summary>
+    public static ImmutableArray<ForceSource> AutomaticOrder { get; } =
+        [ForceSource.Table, ForceSource.Results, ForceSource.PropertySets, ForceSource.Statics, ForceSource.Presets];
 }

@@ -1,5 +1,6 @@
 using System.Collections.Immutable;
 using MemberScan.Model.Verdicts;
+using MemberScan.Screening.Contacts;
 
 namespace MemberScan.Screening.Record;
 
@@ -47,4 +48,7 @@ public sealed record ScreeningRecord
 
     /// <summary>Whether anything was passed over as damaged.</summary>
     public required bool HasDamage { get; init; }
+
+    /// <summary>The contacts between members by which load presets found spans and supports; empty when none is switched on.</summary>
+    public ImmutableArray<Contact> Contacts { get; init; } = [];
 }

@@ -2,6 +2,7 @@ using System.Text.Json;
 using MemberScan.Foundation.Diagnostics;
 using MemberScan.Foundation.Units;
 using MemberScan.Inputs.Materials;
+using MemberScan.Inputs.Presets;
 using MemberScan.Inputs.SettingsFiles;
 using MemberScan.Inputs.SettingsFiles.Forces;
 
@@ -30,6 +31,7 @@ public sealed class SettingsSchemaTests
         Assert.Equal(ForceKeys.Components.Words, Keys("forces", "propertySets", "components"));
         Assert.Equal(ForceKeys.Station, Keys("forces", "propertySets", "station"));
         Assert.Equal(ForceKeys.Component, _schema.GetProperty("$defs").GetProperty("forceProperty").GetProperty("properties").EnumerateObject().Select(key => key.Name));
+        Assert.Equal(LoadRulesReader.Keys, Keys("loads"));
         Assert.Equal(SettingKeys.UnitTypes, Keys("units"));
         Assert.Equal(SettingKeys.Materials, Keys("materials"));
         Assert.Equal(GradeReader.Keys, Keys("materials", "grades"));

@@ -42,10 +42,11 @@ public sealed class SettingsTests
             "candidates.always=IfcBeam, IfcColumn, IfcMember, IfcRailing, IfcStructuralCurveMember",
             "candidates.withBarBodyOrForces=IfcBuildingElementProxy, IfcDiscreteAccessory, IfcMechanicalFastener, IfcReinforcingBar, IfcTendon, IfcFlowSegment, IfcPipeSegment, IfcCableSegment",
             "sections.recogniseMeshes=false", "roles=the shipped rules",
-            "forces.convention=positive-face", "forces.components=as-flagged", "forces.turnDegrees=0", "forces.turnDegreesByMember=none",
+            "forces.from=auto", "forces.convention=positive-face", "forces.components=as-flagged", "forces.turnDegrees=0", "forces.turnDegreesByMember=none",
             "forces.missingComponents=refuse", "forces.unknownMembers=refuse", "forces.kinds=none",
             "forces.torsion=not-stated", "forces.missingCoefficients=refuse", "forces.caseCoefficients=refuse", "forces.combinations=none", "forces.combinationSets=none", "forces.caseTags=none",
             "forces.propertySets=none", "forces.kindOfAll=none",
+            "loads.presets=none", "loads.contactTolerance=0.025 m",
             "units.LENGTHUNIT=none", "units.FORCEUNIT=none", "units.PRESSUREUNIT=none", "units.TORQUEUNIT=none", "units.MODULUSOFELASTICITYUNIT=none",
             "materials.grades=none", "materials.poisson=0.3", "stability.lengthFactor=2", "display=si",
         ], lines.Select(line => $"{line.Key}={line.Value}"));

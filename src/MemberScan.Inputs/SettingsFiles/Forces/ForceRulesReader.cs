@@ -1,5 +1,6 @@
 using System.Collections.Frozen;
 using System.Collections.Immutable;
+using System.Text.Json;
 using MemberScan.Inputs.Json;
 using MemberScan.Model.Rules;
 
@@ -16,6 +17,7 @@ internal sealed class ForceRulesReader(JsonValues values, ISet<string> given)
             given.Add(path);
             rules = key switch
             {
+                "from" => rules with { From = Sources(value, path) },
                 "convention" => rules with { Convention = Choose(value, path, SettingKeys.Conventions) },
                 "components" => rules with { Components = Choose(value, path, SettingKeys.Components) },
                 "turnDegrees" => rules with { TurnDegrees = Turn(value, path) },
@@ -39,6 +41,26 @@ internal sealed class ForceRulesReader(JsonValues values, ISet<string> given)
     private FrozenDictionary<string, double> Turns(JsonItem item, string path) => values.Object(item, path)
         .ToDictionary(entry => entry.Key, entry => Turn(entry.Value, $"{path}.{Excerpt.Of(entry.Key)}"), StringComparer.Ordinal)
         .ToFrozenDictionary(StringComparer.Ordinal);
+
+    private ImmutableArray<ForceSource> Sources(JsonItem item, string path)
+    {
+        if (item.Kind == JsonValueKind.String)
+        {
+            _ = values.Word(item, path, ["auto"]);
+            return ForceRules.AutomaticOrder;
+        }
+
+        var sources = ImmutableArray.CreateBuilder<ForceSource>();
+        foreach (var entry in values.List(item, path))
+        {
+            if (values.Word(entry, path, SettingKeys.Sources.Words) is not { } word) continue;
+            if (sources.Contains(SettingKeys.Sources.Of(word))) values.Fail(InputCodes.EntryDoubled, entry, $"{path} names {Excerpt.Of(word)} twice; keep one of them");
+            else sources.Add(SettingKeys.Sources.Of(word));
+        }
+
+        if (item.Kind == JsonValueKind.Array && item.Items.IsEmpty) values.Fail(InputCodes.WordUnknown, item, $"{path} names no source; give at least one, or \"auto\"");
+        return sources.ToImmutable();
+    }
 
     private ImmutableArray<KindPattern> Kinds(JsonItem list, string path)
     {
