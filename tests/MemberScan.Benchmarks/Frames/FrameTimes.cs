@@ -3,7 +3,6 @@ using System.Globalization;
 using MemberScan.Foundation.Diagnostics;
 using MemberScan.Statics.Assembly;
 using MemberScan.Statics.Checking;
-using MemberScan.Statics.Solving;
 using MemberScan.Statics.Sparse;
 
 namespace MemberScan.Benchmarks.Frames;
