@@ -43,4 +43,5 @@ internal static class InputCodes
     public const string PatternUnusable = "INP-0110";
     public const string SettingsLimit = "INP-0111";
     public const string EntryDoubled = "INP-0112";
+    public const string ReferenceUnknown = "INP-0113";
 }

@@ -14,4 +14,5 @@ internal static class StaticsCodes
     public const string DigitsLost = "STA-0009";
     public const string FreeTurn = "STA-0010";
     public const string DigitsFew = "STA-0011";
+    public const string Station = "STA-0012";
 }

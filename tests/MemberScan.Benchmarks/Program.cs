@@ -1,12 +1,14 @@
 using System.Globalization;
 using BenchmarkDotNet.Running;
+using MemberScan.Benchmarks.Frames;
 using MemberScan.Benchmarks.Meshes;
 using MemberScan.Benchmarks.Models;
 using MemberScan.Benchmarks.Question;
 using MemberScan.Benchmarks.Tables;
 
-// generate NAME FILE | forces-table generate FILE ROWS MEMBERS | forces-table read FILE ROUNDS | question FILE [THREADS] | checked FILE | pass FILE THREADS | scan FILE | append FILE TARGET [disk] | meshes; anything else goes to
-// BenchmarkDotNet. compare.sh measures them beside other programs.
+// generate NAME FILE | question FILE [THREADS] | checked FILE | pass FILE THREADS | scan FILE | append FILE TARGET [disk] | meshes |
+// forces-table generate FILE ROWS MEMBERS | forces-table read FILE ROUNDS | frame NX NY STOREYS SITUATIONS THREADS ROUNDS |
+// frame-matrix NX NY STOREYS FILE; anything else goes to BenchmarkDotNet. compare.sh measures some of them beside other programs.
 return args switch
 {
     ["generate", var name, var path] => Generate(name, path),
@@ -19,9 +21,13 @@ return args switch
     ["forces-table", "read", var path, var rounds] => ForcesTableRun.Read(path, int.Parse(rounds, CultureInfo.InvariantCulture)),
     ["scan", var path] => MaskScan.Run(path),
     ["meshes"] => MeshRecognition.Run(),
+    ["frame", var nx, var ny, var storeys, var situations, var threads, var rounds] => FrameTimes.Print(Int(nx), Int(ny), Int(storeys), Int(situations), Int(threads), Int(rounds)),
+    ["frame-matrix", var nx, var ny, var storeys, var path] => FrameTimes.Export(Int(nx), Int(ny), Int(storeys), path),
     ["checked", var path] => Print(CheckedQuestion.Ask(path)),
     _ => Benchmark(args),
 };
+
+static int Int(string text) => int.Parse(text, CultureInfo.InvariantCulture);
 
 static int Generate(string name, string path)
 {

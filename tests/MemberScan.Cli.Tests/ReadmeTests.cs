@@ -37,14 +37,15 @@ public sealed partial class ReadmeTests
     {
         var commands = Lines().Select(l => l[Call.Length..].Split(' ')[0]).Distinct(StringComparer.Ordinal).Order(StringComparer.Ordinal);
 
-        Assert.Equal(["members", "screen", "section"], commands);
+        Assert.Equal(["frame", "members", "screen", "section"], commands);
     }
 
     [Fact]
     public async Task The_README_names_every_option()
     {
         var text = await File.ReadAllTextAsync(Path.Combine(Memberscan.Root, "README.md"), TestContext.Current.CancellationToken);
-        var help = (await Memberscan.Run("screen", "--help")).Output + (await Memberscan.Run("section", "--help")).Output + (await Memberscan.Run("members", "--help")).Output;
+        var help = (await Memberscan.Run("screen", "--help")).Output + (await Memberscan.Run("section", "--help")).Output + (await Memberscan.Run("members", "--help")).Output
+            + (await Memberscan.Run("frame", "--help")).Output;
 
         var options = LongOption().Matches(help).Select(m => m.Value).Except(["--help", "--version"]).Distinct(StringComparer.Ordinal).ToArray();
 

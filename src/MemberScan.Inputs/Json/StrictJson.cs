@@ -18,7 +18,7 @@ internal static class StrictJson
     {
         if (source.Bytes.Length > LargestFile)
         {
-            source.Fail(InputCodes.SettingsLimit, 0, $"the file is larger than {LargestFile / 1024} KiB; take out what is not a setting");
+            source.Fail(InputCodes.SettingsLimit, 0, $"the file is larger than {LargestFile / 1024} KiB; take out what is not needed");
             return null;
         }
 

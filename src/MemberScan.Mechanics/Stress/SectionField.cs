@@ -55,6 +55,9 @@ internal sealed class SectionField : StressField
     /// <summary>The tables for many states at a time.</summary>
     public (BlockScan Thin, BlockScan Dense) Scans => _scans.Value;
 
+    /// <summary>Points with their share of the area, dense enough for products of two stresses.</summary>
+    public IEnumerable<(double Y, double Z, double Area)> Quadrature() => _outline.Quadrature();
+
     /// <inheritdoc/>
     public override Closure Closure => _closure.Value;
 

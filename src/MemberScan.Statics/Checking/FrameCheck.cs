@@ -126,8 +126,9 @@ internal sealed class FrameCheck
 
             Joints(member);
             Taper(member);
-            Stations(member);
-            if (Body(member) is not { } body || !_isGood || !wasGood) continue;
+            var body = Body(member);
+            Stations(member, body);
+            if (body is null || !_isGood || !wasGood) continue;
 
             made[m] = MemberStiffness.TryOf(body);
             if (made[m] is null) Fail(StaticsCodes.Value, $"the stiffnesses of member {member.Name} are too far apart to be solved; check the units of its section and material");
@@ -211,11 +212,14 @@ internal sealed class FrameCheck
         if (!rises) Fail(StaticsCodes.Value, $"the sections along member {member.Name} do not rise from share 0 to share 1; put them in order");
     }
 
-    private void Stations(FrameMember member)
+    private void Stations(FrameMember member, MemberBody? body)
     {
         var stations = member.Stations ?? _frame.Stations;
         var count = Math.Max(stations.Count, stations.Positions.Length);
         if (count > FrameLimits.Stations) Fail(StaticsCodes.Size, Text($"member {member.Name} has {count} stations, the limit is {FrameLimits.Stations}"));
+        foreach (var x in stations.Positions)
+            if (body is not null && !(x >= 0 && x <= (1 + FrameLimits.Beyond) * body.Length))
+                Fail(StaticsCodes.Station, Text($"a station at {x:R} m lies beyond member {member.Name}, whose flexible length is {body.Length:R} m; give the member stations of its own"));
     }
 
     private void Fail(string code, string message)
