@@ -3,6 +3,7 @@ using MemberScan.Foundation.Diagnostics;
 using MemberScan.Ifc;
 using MemberScan.Ifc.Members;
 using MemberScan.Ifc.WriteBack;
+using MemberScan.Ifc.WriteBack.Earlier;
 using MemberScan.Inputs.ForcesTables;
 using MemberScan.Model.Forces;
 using MemberScan.Model.Members;
@@ -39,14 +40,15 @@ internal sealed class ModelContents
     /// <summary>The forces tables as read.</summary>
     public ImmutableArray<ForcesFile> Files { get; }
 
+    /// <summary>Whether results of an earlier run can be taken out, so that new ones may be written.</summary>
+    public bool MayWriteModel { get; private init; }
+
     /// <summary>Reads model and tables; null, with an error in <paramref name="diagnostics"/>, when a table does not fit the model.</summary>
     public static ModelContents? Read(ScreeningRequest request, DiagnosticList diagnostics, IProgress<ScreeningProgress>? progress, CancellationToken cancellation)
     {
         progress?.Report(new("reading", 0));
-        var stripped = ResultBlock.Strip(request.ModelBytes);
-        if (stripped is { HadBlock: true, IsIntact: false })
-            diagnostics.Add("SCR-0006", Severity.Warning, "The model carries an earlier result block, but has changed since it was written; the block is replaced all the same.");
-
+        var stripped = EarlierResults.Find(request.ModelBytes, request.ModelName);
+        TellEarlier(stripped, diagnostics);
         var file = Part21File.Read(stripped.Base, request.ModelName, diagnostics);
         if (file.HighestId > ScreeningOutcome.MaxInstanceId)
             diagnostics.Add("SCR-0008", Severity.Error, "The model numbers its instances so high that there is no room for ours; no checked model is written. Export it with smaller numbers.");
@@ -60,7 +62,7 @@ internal sealed class ModelContents
         var (fromTables, files) = ReadTables(request, catalog, diagnostics);
         return diagnostics.Items.Any(d => d is { Severity: Severity.Error, Code: "SCR-0001" or "SCR-0002" or "SCR-0003" or "SCR-0004" or "SCR-0007" })
             ? null
-            : new ModelContents(model, file, stripped.Base, catalog, fromModel, fromTables, files);
+            : new ModelContents(model, file, stripped.Base, catalog, fromModel, fromTables, files) { MayWriteModel = stripped.References.IsEmpty };
     }
 
     /// <summary>The forces that are used for a candidate: those of tables before those of the model.</summary>
@@ -79,6 +81,18 @@ internal sealed class ModelContents
         request.ModelName, request.Container, ResultBlock.Sha256(_baseText.Span), _baseText.Length, string.Join(", ", File.Header.Schemas), Model?.SchemaText ?? "not read",
         Model?.ProjectName ?? "", File.Header.OriginatingSystem, File.Header.TimeStamp, File.ReadToEnd && Model is not null,
         Model is null ? [] : [.. Model.Units.Reported.Select(u => new UnitLine(u.UnitType, u.Text, u.Factor ?? 0, u.Source))]);
+
+    private static void TellEarlier(EarlierResults earlier, DiagnosticList diagnostics)
+    {
+        if (!earlier.References.IsEmpty)
+            diagnostics.Add("SCR-0023", Severity.Error, $"Other instances refer to results of an earlier run ({EarlierWords.Of(earlier.References)}), so those cannot be replaced; no checked model is written. Take the references out, or start from the model without results.");
+        else if (earlier.Kind == EarlierKind.Changed)
+            diagnostics.Add("SCR-0006", Severity.Warning, "The model carries an earlier result block, but has changed since it was written; the block is replaced all the same.");
+        else if (earlier.Kind == EarlierKind.LinesBehind)
+            diagnostics.Add("SCR-0021", Severity.Note, "Another program has written lines behind an earlier result block; its lines stay, the block is replaced.");
+        else if (earlier.Kind == EarlierKind.Rewritten)
+            diagnostics.Add("SCR-0022", Severity.Warning, $"Another program has written the model anew with results of an earlier run in it; {EarlierWords.Count(earlier.Instances)} recognised by set name, Program and RunId are replaced.");
+    }
 
     private static HashSet<string> NamedInTables(ImmutableArray<ForcesTable> tables)
     {

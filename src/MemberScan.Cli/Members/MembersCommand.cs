@@ -13,13 +13,16 @@ internal static class MembersCommand
         var settings = new Option<string?>("--settings") { Description = "A settings file (JSON with comments).", HelpName = "FILE" };
         var csv = new Option<string?>("--csv") { Description = "Also write the table as CSV.", HelpName = "FILE" };
         var json = new Option<string?>("--json") { Description = "Also write the table as JSON.", HelpName = "FILE" };
+        var results = new Option<bool>("--results") { Description = "Instead, read back the results that the model carries; with --csv also as a table in SI." };
         var verbose = new Option<bool>("--verbose") { Description = "Log every finding, notes included." };
 
         var command = new Command("members", "List every candidate with section, material, length and forces found, and what is missing.")
         {
-            model, forces, settings, csv, json, verbose,
+            model, forces, settings, csv, json, results, verbose,
         };
-        command.SetAction((parsed, cancellation) => Task.FromResult(MembersRun.Execute(
+        command.SetAction((parsed, cancellation) => Task.FromResult(parsed.GetValue(results)
+            ? ResultsRun.Execute(parsed.GetValue(model)!, parsed.GetValue(csv), parsed.GetValue(json), Console.Out)
+            : MembersRun.Execute(
             new MembersRun.Options(
                 parsed.GetValue(model)!, parsed.GetValue(forces) ?? [], parsed.GetValue(settings), parsed.GetValue(csv), parsed.GetValue(json), parsed.GetValue(verbose)),
             Console.Out, Console.IsOutputRedirected, cancellation)));
