@@ -1,8 +1,10 @@
 using System.CommandLine;
 using System.Reflection;
 using System.Text;
+using MemberScan.Cli.Comparing;
 using MemberScan.Cli.Frames;
 using MemberScan.Cli.Members;
+using MemberScan.Cli.Restoring;
 using MemberScan.Cli.Screening;
 using MemberScan.Cli.Sections;
 
@@ -25,7 +27,7 @@ internal static class Program
         Console.OutputEncoding = new UTF8Encoding(encoderShouldEmitUTF8Identifier: false);
         var root = new RootCommand("Screens the secondary steel of building models for combined stress. A screening aid for qualified engineers; not a design, not a certificate.")
         {
-            ScreenCommand.Build(), MembersCommand.Build(), SectionCommand.Build(), FrameCommand.Build(),
+            ScreenCommand.Build(), MembersCommand.Build(), SectionCommand.Build(), FrameCommand.Build(), CompareCommand.Build(), RestoreCommand.Build(),
         };
         var parsed = root.Parse(args);
         if (parsed.Errors.Count > 0 && parsed.Action is not (System.CommandLine.Help.HelpAction or null) && !args.Contains("--help"))

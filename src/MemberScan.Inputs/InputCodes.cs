@@ -44,4 +44,9 @@ internal static class InputCodes
     public const string SettingsLimit = "INP-0111";
     public const string EntryDoubled = "INP-0112";
     public const string ReferenceUnknown = "INP-0113";
+
+    public const string DecisionHeader = "INP-0201";
+    public const string DecisionText = "INP-0202";
+    public const string DecisionDate = "INP-0203";
+    public const string DecisionDoubled = "INP-0204";
 }

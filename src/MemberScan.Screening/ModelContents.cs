@@ -4,6 +4,7 @@ using MemberScan.Foundation.Diagnostics;
 using MemberScan.Ifc;
 using MemberScan.Ifc.Members;
 using MemberScan.Ifc.WriteBack;
+using MemberScan.Ifc.WriteBack.Earlier;
 using MemberScan.Inputs.ForcesTables;
 using MemberScan.Model.Forces;
 using MemberScan.Model.Members;
@@ -46,14 +47,15 @@ internal sealed class ModelContents
     /// <summary>The contacts that spans and supports of load presets come from; null when no preset is switched on.</summary>
     public ContactList? Contacts { get; }
 
+    /// <summary>Whether results of an earlier run can be taken out, so that new ones may be written.</summary>
+    public bool MayWriteModel { get; private init; }
+
     /// <summary>Reads model and tables; null, with an error in <paramref name="diagnostics"/>, when a table does not fit the model.</summary>
     public static ModelContents? Read(ScreeningRequest request, DiagnosticList diagnostics, IProgress<ScreeningProgress>? progress, CancellationToken cancellation)
     {
         progress?.Report(new("reading", 0));
-        var stripped = ResultBlock.Strip(request.ModelBytes);
-        if (stripped is { HadBlock: true, IsIntact: false })
-            diagnostics.Add("SCR-0006", Severity.Warning, "The model carries an earlier result block, but has changed since it was written; the block is replaced all the same.");
-
+        var stripped = EarlierResults.Find(request.ModelBytes, request.ModelName);
+        TellEarlier(stripped, diagnostics);
         var file = Part21File.Read(stripped.Base, request.ModelName, diagnostics);
         if (file.HighestId > ScreeningOutcome.MaxInstanceId)
             diagnostics.Add("SCR-0008", Severity.Error, "The model numbers its instances so high that there is no room for ours; no checked model is written. Export it with smaller numbers.");
@@ -69,7 +71,7 @@ internal sealed class ModelContents
         CaseCombinations.RefuseUnknown(rules, sources.SelectMany(s => s.All), diagnostics);
         return diagnostics.Items.Any(d => d.Severity == Severity.Error && s_faults.Contains(d.Code))
             ? null
-            : new ModelContents(model, file, stripped.Base, catalog, sources, files, contacts);
+            : new ModelContents(model, file, stripped.Base, catalog, sources, files, contacts) { MayWriteModel = stripped.References.IsEmpty };
     }
 
     /// <summary>Results of the model are not used where they are tied to a line beside the section's centroid: about which they are is not said.</summary>
@@ -140,6 +142,18 @@ internal sealed class ModelContents
 
     private static ImmutableArray<MemberForces> WithTorsion(ImmutableArray<MemberForces> forces, ForceRules rules) =>
         rules.Torsion == TorsionAxis.NotStated ? forces : [.. forces.Select(f => f with { TorsionAxis = rules.Torsion })];
+
+    private static void TellEarlier(EarlierResults earlier, DiagnosticList diagnostics)
+    {
+        if (!earlier.References.IsEmpty)
+            diagnostics.Add("SCR-0023", Severity.Error, $"Other instances refer to results of an earlier run ({EarlierWords.Of(earlier.References)}), so those cannot be replaced; no checked model is written. Take the references out, or start from the model without results.");
+        else if (earlier.Kind == EarlierKind.Changed)
+            diagnostics.Add("SCR-0006", Severity.Warning, "The model carries an earlier result block, but has changed since it was written; the block is replaced all the same.");
+        else if (earlier.Kind == EarlierKind.LinesBehind)
+            diagnostics.Add("SCR-0021", Severity.Note, "Another program has written lines behind an earlier result block; its lines stay, the block is replaced.");
+        else if (earlier.Kind == EarlierKind.Rewritten)
+            diagnostics.Add("SCR-0022", Severity.Warning, $"Another program has written the model anew with results of an earlier run in it; {EarlierWords.Count(earlier.Instances)} recognised by set name, Program and RunId are replaced.");
+    }
 
     private static HashSet<string> NamedInTables(ImmutableArray<ForcesTable> tables)
     {

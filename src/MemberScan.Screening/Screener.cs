@@ -9,6 +9,7 @@ using MemberScan.Model.Limits;
 using MemberScan.Model.Members;
 using MemberScan.Model.Verdicts;
 using MemberScan.Screening.Checking;
+using MemberScan.Screening.Decisions;
 using MemberScan.Screening.Record;
 
 namespace MemberScan.Screening;
@@ -31,9 +32,9 @@ public static class Screener
 
         cancellation.ThrowIfCancellationRequested();
         var library = new SectionLibrary();
-        var results = Check(request, contents, library, progress, cancellation);
+        var results = DecisionCarrier.Carry(Check(request, contents, library, progress, cancellation), request.Decisions, request.DecidedOn, diagnostics);
         var record = Record(request, contents, results, library, diagnostics);
-        return new ScreeningOutcome(record, contents.Model, RunIdentity.CreationDate(request.TimestampIsGiven ? request.Timestamp : "", contents.File.Header.TimeStamp));
+        return new ScreeningOutcome(record, contents.MayWriteModel ? contents.Model : null, RunIdentity.CreationDate(request.TimestampIsGiven ? request.Timestamp : "", contents.File.Header.TimeStamp)) { WithSetTemplate = request.WithSetTemplate };
     }
 
     private static ImmutableArray<MemberResult> Check(
@@ -41,11 +42,13 @@ public static class Screener
     {
         var members = contents.Catalog.Members;
         var checker = new MemberChecker(library, request.Settings.Basis, request.Settings.LengthFactor);
+        var marker = new InputMarker(request.Settings);
         var results = new MemberResult[members.Length];
         var done = 0;
         Parallel.For(0, members.Length, new ParallelOptions { CancellationToken = cancellation }, i =>
         {
-            results[i] = checker.Check(members[i], contents.ForcesOf(members[i], out var notes), notes);
+            var forces = contents.ForcesOf(members[i], out var notes);
+            results[i] = checker.Check(members[i], forces, notes) with { Inputs = marker.Of(members[i], forces) };
             var count = Interlocked.Increment(ref done);
             if (count % 64 == 0) progress?.Report(new("checking", (double)count / members.Length));
         });

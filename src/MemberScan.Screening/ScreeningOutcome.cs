@@ -14,6 +14,9 @@ public sealed class ScreeningOutcome
     private readonly IfcModel? _model;
     private readonly long _creationDate;
 
+    /// <summary>Whether the checked model explains the set by a template; IFC2X3 knows none.</summary>
+    public bool WithSetTemplate { get; init; }
+
     internal ScreeningOutcome(ScreeningRecord record, IfcModel? model, long creationDate) =>
         (Record, _model, _creationDate) = (record, model, creationDate);
 
@@ -30,7 +33,7 @@ public sealed class ScreeningOutcome
         if (!CanWriteModel) throw new InvalidOperationException("the model was not read to its end; no checked model is written");
 
         var file = _model!.File;
-        var lines = PropertySetWriter.Lines(_model, StressCheckSets.From(Record), _creationDate, Record.Version);
+        var lines = PropertySetWriter.Lines(_model, StressCheckSets.From(Record), _creationDate, Record.Version, WithSetTemplate);
         ResultBlock.Write(output, file.Bytes.Span, file.InsertionOffset, lines, file.LineEnd);
     }
 }

@@ -47,6 +47,8 @@ internal static class StressCheckSets
             ItemCount = items > 1 ? items : null,
             RunId = record.RunId,
             Program = $"MemberScan {record.Version}",
+            ReviewDecision = member.Decision?.Shown,
+            ReviewNote = member.Decision?.ShownNote,
         };
     }
 

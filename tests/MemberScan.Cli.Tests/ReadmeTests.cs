@@ -18,18 +18,22 @@ public sealed partial class ReadmeTests
         using var folder = new TemporaryFolder();
         var expected = ExitComment().Match(line) is { Success: true } match ? int.Parse(match.Groups[1].Value, CultureInfo.InvariantCulture) : 0;
         var arguments = Words(ExitComment().Replace(line, "")[Call.Length..]);
-        if (arguments[0] == "screen")
+        if (arguments[0] is "screen" or "restore")
         {
             var output = arguments.IndexOf("--out");
             if (output >= 0) arguments.RemoveRange(output, 2);
             arguments.AddRange(["--out", folder.Path]);
         }
 
+        // The checked model that an earlier line of the README writes.
+        if (arguments[0] == "restore" && Path.GetFileName(arguments[1]) is var name)
+            arguments[1] = folder.Write(name, (await Screening.ScreenedSample.Of(name[..name.IndexOf('.', StringComparison.Ordinal)])).Checked);
+
         var ran = await Memberscan.Run([.. arguments]);
 
         Assert.True(expected == ran.ExitCode, ran.All);
         Assert.NotEmpty(ran.Output);
-        Assert.Equal(arguments[0] == "screen" ? 4 : 0, folder.Names.Count());
+        Assert.Equal(arguments[0] switch { "screen" => 4, "restore" => 2, _ => 0 }, folder.Names.Count());
     }
 
     [Fact]
@@ -37,19 +41,19 @@ public sealed partial class ReadmeTests
     {
         var commands = Lines().Select(l => l[Call.Length..].Split(' ')[0]).Distinct(StringComparer.Ordinal).Order(StringComparer.Ordinal);
 
-        Assert.Equal(["frame", "members", "screen", "section"], commands);
+        Assert.Equal(["compare", "frame", "members", "restore", "screen", "section"], commands);
     }
 
     [Fact]
     public async Task The_README_names_every_option()
     {
         var text = await File.ReadAllTextAsync(Path.Combine(Memberscan.Root, "README.md"), TestContext.Current.CancellationToken);
-        var help = (await Memberscan.Run("screen", "--help")).Output + (await Memberscan.Run("section", "--help")).Output + (await Memberscan.Run("members", "--help")).Output
-            + (await Memberscan.Run("frame", "--help")).Output;
+        var help = "";
+        foreach (var command in new[] { "screen", "section", "members", "frame", "compare", "restore" }) help += (await Memberscan.Run(command, "--help")).Output;
 
         var options = LongOption().Matches(help).Select(m => m.Value).Except(["--help", "--version"]).Distinct(StringComparer.Ordinal).ToArray();
 
-        Assert.Equal(16, options.Length);
+        Assert.Equal(28, options.Length);
         Assert.All(options, option => Assert.Contains(option, text, StringComparison.Ordinal));
     }
 

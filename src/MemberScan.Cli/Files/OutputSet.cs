@@ -12,43 +12,41 @@ internal sealed class OutputSet : IDisposable
     /// <exception cref="IOException">The folder or the disk does not take it.</exception>
     public void Add(string target, ReadOnlySpan<byte> content)
     {
+        File.Delete(target + EarlierEnding);                          // a killed run may have left it
         using var stream = new FileStream(target + PartEnding, FileMode.Create, FileAccess.Write, FileShare.None);
         _targets.Add(target);
         stream.Write(content);
         stream.Flush(flushToDisk: true);
     }
 
-    /// <summary>Puts all files in place. When one cannot be, those that were there before are put back and nothing new stays.</summary>
-    /// <param name="stale">A file of an earlier run that this run has no successor for; removed together.</param>
-    public void Commit(string? stale = null)
+    /// <summary>Puts all files in place, each in one step: at no moment is there half a file or none. When one cannot be, those that were there before are put back and nothing new stays.</summary>
+    /// <param name="stale">Files of an earlier run that this run has no successor for; removed together.</param>
+    public void Commit(params ReadOnlySpan<string?> stale)
     {
-        var replaced = new List<string>(_targets);
-        if (stale is not null) replaced.Add(stale);
-
-        var setAside = new List<string>();
-        var placed = new List<string>();
+        var placed = new List<(string Target, bool HadEarlier)>();
         try
         {
-            foreach (var target in replaced.Where(File.Exists))
-            {
-                File.Move(target, target + EarlierEnding, overwrite: true);
-                setAside.Add(target);
-            }
-
             foreach (var target in _targets)
             {
-                File.Move(target + PartEnding, target);
-                placed.Add(target);
+                var hasEarlier = File.Exists(target);
+                if (hasEarlier) File.Replace(target + PartEnding, target, target + EarlierEnding);
+                else File.Move(target + PartEnding, target);
+                placed.Add((target, hasEarlier));
             }
+
+            foreach (var path in stale)
+                if (path is not null)
+                    foreach (var ending in new[] { "", PartEnding, EarlierEnding }) File.Delete(path + ending);
         }
         catch
         {
-            foreach (var target in placed) File.Delete(target);
-            foreach (var target in setAside) File.Move(target + EarlierEnding, target, overwrite: true);
+            foreach (var (target, hadEarlier) in placed)
+                if (hadEarlier) File.Move(target + EarlierEnding, target, overwrite: true);
+                else File.Delete(target);
             throw;
         }
 
-        foreach (var target in setAside) File.Delete(target + EarlierEnding);
+        foreach (var (target, hadEarlier) in placed) if (hadEarlier) File.Delete(target + EarlierEnding);
         _targets.Clear();
     }
 

@@ -15,13 +15,16 @@ internal static class MembersCommand
         var json = new Option<string?>("--json") { Description = "Also write the table as JSON.", HelpName = "FILE" };
         var forcesOnly = new Option<bool>("--forces-only") { Description = "List what tables, results and mappings of property sets give, situation by situation; nothing else." };
         var template = new Option<string?>("--write-forces-template") { Description = "Write the forces table to be filled for this model.", HelpName = "FILE" };
+        var results = new Option<bool>("--results") { Description = "Instead, read back the results that the model carries; with --csv also as a table in SI." };
         var verbose = new Option<bool>("--verbose") { Description = "Log every finding, notes included." };
 
         var command = new Command("members", "List every candidate with section, material, length and forces found, and what is missing.")
         {
-            model, forces, settings, csv, json, forcesOnly, template, verbose,
+            model, forces, settings, csv, json, forcesOnly, template, results, verbose,
         };
-        command.SetAction((parsed, cancellation) => Task.FromResult(MembersRun.Execute(
+        command.SetAction((parsed, cancellation) => Task.FromResult(parsed.GetValue(results)
+            ? ResultsRun.Execute(parsed.GetValue(model)!, parsed.GetValue(csv), parsed.GetValue(json), Console.Out)
+            : MembersRun.Execute(
             new MembersRun.Options(
                 parsed.GetValue(model)!, parsed.GetValue(forces) ?? [], parsed.GetValue(settings), parsed.GetValue(csv), parsed.GetValue(json), parsed.GetValue(verbose))
             {

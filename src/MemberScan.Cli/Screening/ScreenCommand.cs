@@ -1,4 +1,5 @@
 using System.CommandLine;
+using MemberScan.Reporting.Topics;
 
 namespace MemberScan.Cli.Screening;
 
@@ -15,11 +16,20 @@ internal static class ScreenCommand
         kind.AcceptOnlyFromAmong("service", "design");
         var output = new Option<string?>("--out") { Description = "Folder for the outputs; default: beside the model.", HelpName = "DIR" };
         var timestamp = new Option<string?>("--timestamp") { Description = "Time of the run, ISO 8601; default: now. Given, it is also written into the model.", HelpName = "TIME" };
+        var decisions = new Option<string?>("--decisions") { Description = "Decisions of people to carry along (CSV or JSON).", HelpName = "FILE" };
+        var decidedOn = new Option<string?>("--decided-on") { Description = "The run record (.run.json) that the decisions were made on; tells which are stale.", HelpName = "FILE" };
+        var bcf = new Option<string?>("--bcf") { Description = "Also write the overstressed as topics, one per cause.", HelpName = "FILE" };
+        var bcfVersion = new Option<string?>("--bcf-version") { Description = "Release of that format; default 2.1.", HelpName = "2.1|3.0" };
+        bcfVersion.AcceptOnlyFromAmong("2.1", "3.0");
+        var request = new Option<string[]>("--request") { Description = "Also write what is missing as a request to the modeler: .csv, .html or .ids; may be given several times.", HelpName = "FILE" };
+        var xlsx = new Option<string?>("--xlsx") { Description = "Also write the candidates as a workbook.", HelpName = "FILE" };
+        var parquet = new Option<string?>("--parquet") { Description = "Also write the candidates as a Parquet file.", HelpName = "FILE" };
+        var template = new Option<bool>("--set-template") { Description = "Explain the property set by a template in the checked model (IFC4 and later)." };
         var verbose = new Option<bool>("--verbose") { Description = "Log every finding, notes included." };
 
         var command = new Command("screen", "Read a model, find forces, check its members, write checked model, report and tables.")
         {
-            model, forces, settings, kind, output, timestamp, verbose,
+            model, forces, settings, kind, output, timestamp, decisions, decidedOn, bcf, bcfVersion, request, xlsx, parquet, template, verbose,
         };
 
         // On a thread of its own: the parser listens for an interruption only once the action has given its task back.
@@ -27,7 +37,14 @@ internal static class ScreenCommand
             () => ScreenRun.Execute(
                 new ScreenRun.Options(
                     parsed.GetValue(model)!, parsed.GetValue(forces) ?? [], parsed.GetValue(settings), parsed.GetValue(kind), parsed.GetValue(output),
-                    parsed.GetValue(timestamp), parsed.GetValue(verbose)),
+                    parsed.GetValue(timestamp), parsed.GetValue(verbose))
+                {
+                    Decisions = parsed.GetValue(decisions),
+                    DecidedOn = parsed.GetValue(decidedOn),
+                    SetTemplate = parsed.GetValue(template),
+                    Further = new FurtherOutputs(
+                        parsed.GetValue(bcf), parsed.GetValue(bcfVersion) == "3.0" ? BcfVersion.Bcf30 : BcfVersion.Bcf21, parsed.GetValue(request) ?? [], parsed.GetValue(xlsx), parsed.GetValue(parquet)),
+                },
                 cancellation),
             CancellationToken.None));
         return command;

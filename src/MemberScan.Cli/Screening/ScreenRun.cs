@@ -1,8 +1,10 @@
 using System.Buffers;
+using System.Collections.Immutable;
 using System.Globalization;
 using System.Text;
 using MemberScan.Cli.Files;
 using MemberScan.Foundation.Diagnostics;
+using MemberScan.Inputs.Decisions;
 using MemberScan.Inputs.SettingsFiles;
 using MemberScan.Model.Forces;
 using MemberScan.Reporting;
@@ -15,7 +17,20 @@ internal static class ScreenRun
 {
     /// <summary>What was asked for on the command line.</summary>
     public sealed record Options(
-        string Model, IReadOnlyList<string> Forces, string? Settings, string? Kind, string? Output, string? Timestamp, bool Verbose);
+        string Model, IReadOnlyList<string> Forces, string? Settings, string? Kind, string? Output, string? Timestamp, bool Verbose)
+    {
+        /// <summary>A file of decisions; null for none.</summary>
+        public string? Decisions { get; init; }
+
+        /// <summary>Run record that the decisions were made on; null when not known.</summary>
+        public string? DecidedOn { get; init; }
+
+        /// <summary>Whether the checked model explains our set by a template.</summary>
+        public bool SetTemplate { get; init; }
+
+        /// <summary>Further outputs that were asked for.</summary>
+        public FurtherOutputs Further { get; init; } = FurtherOutputs.None;
+    }
 
     /// <summary>Runs and returns the exit code.</summary>
     public static int Execute(Options options, CancellationToken cancellation)
@@ -27,10 +42,13 @@ internal static class ScreenRun
         var diagnostics = new DiagnosticList();
         var read = RunInputs.Read(options.Model, options.Forces, options.Settings, diagnostics, log.Write);
         var names = OutputNames.For(options.Model, options.Output);
-        var inputs = new[] { options.Model }.Concat(options.Forces).Concat(options.Settings is { } path ? [path] : []);
+        string[] inputs = [options.Model, .. options.Forces, .. new[] { options.Settings, options.Decisions, options.DecidedOn }.OfType<string>()];
         if (names.Clashes(inputs).FirstOrDefault() is { } clash)
             throw new Failure(ExitCodes.Usage, $"The output '{clash}' would be an input of this run; give another folder with --out DIR.");
+        OutputNames.RefuseClashes(options.Further.Paths, [.. inputs, names.CheckedModel, names.Report, names.MembersTable, names.RunRecord]);
+        options.Further.RefuseUnknown();
 
+        var decisions = Decisions(options, diagnostics, log);
         var (timestamp, isGiven) = Time(options);
 
         var request = new ScreeningRequest
@@ -40,6 +58,9 @@ internal static class ScreenRun
             ModelBytes = read.Model,
             Settings = WithKind(read.Settings, options.Kind),
             Tables = read.Tables,
+            Decisions = decisions,
+            DecidedOn = options.DecidedOn is { } run ? RunRecordFile.Read(run) : null,
+            WithSetTemplate = options.SetTemplate,
             Timestamp = timestamp,
             TimestampIsGiven = isGiven,
             Version = Program.Version,
@@ -52,7 +73,21 @@ internal static class ScreenRun
         cancellation.ThrowIfCancellationRequested();
         WriteOutputs(options, names, outcome);
         Summary.Print(outcome.Record, names, outcome.CanWriteModel);
+        if (options.SetTemplate && outcome.Record.Model.ReadAs == "IFC2X3") Console.Out.WriteLine("no set template is written: IFC2X3 knows none");
+        foreach (var path in options.Further.Written(outcome.Record)) Console.Out.WriteLine($"wrote {path}");
+        foreach (var path in options.Further.NotWritten(outcome.Record)) Console.Out.WriteLine($"not written: {path}; nothing that was missing can be said in its format, see the list in .csv or .html");
         return ExitCodes.Of(outcome.Record);
+    }
+
+    private static ImmutableArray<ReviewDecision> Decisions(Options options, DiagnosticList diagnostics, FindingLog log)
+    {
+        if (options.Decisions is not { } path)
+            return options.DecidedOn is null ? [] : throw new Failure(ExitCodes.Usage, "--decided-on goes with --decisions; give both.");
+        if (string.IsNullOrWhiteSpace(path)) throw new Failure(ExitCodes.Usage, "The path after --decisions is empty; give a file.");
+        if (DecisionFile.Read(InputFile.Read(path), Path.GetFileName(path), diagnostics) is { } decisions) return decisions;
+
+        log.Write(diagnostics);
+        throw new Failure(ExitCodes.Usage, "The file of decisions is wrong; nothing was written.");
     }
 
     private static Settings WithKind(Settings settings, string? kind)
@@ -90,7 +125,8 @@ internal static class ScreenRun
             files.Add(names.Report, Encoding.UTF8.GetBytes(HtmlReport.Render(outcome.Record)));
             files.Add(names.MembersTable, MembersTable.Write(outcome.Record));
             files.Add(names.RunRecord, RunRecord.Write(outcome.Record));
-            files.Commit(outcome.CanWriteModel ? null : names.CheckedModel);
+            options.Further.AddTo(files, outcome.Record);
+            files.Commit([outcome.CanWriteModel ? null : names.CheckedModel, .. options.Further.NotWritten(outcome.Record)]);
         }
         catch (Exception e) when (e is IOException or UnauthorizedAccessException)
         {

@@ -16,6 +16,7 @@ public sealed class PropertySetWriter
     private readonly List<string> _lines = [];
     private readonly (double Factor, string Override) _pressure, _length;
     private readonly string _owner;
+    private readonly List<ulong> _sets = [];
     private ulong _next;
 
     private PropertySetWriter(SchemaVersion schema, ModelUnits units, ulong highestId, long creationDate, string version)
@@ -35,7 +36,8 @@ public sealed class PropertySetWriter
     /// <param name="sets">One per element.</param>
     /// <param name="creationDate">Seconds since 1970 for the owner history that IFC2X3 demands.</param>
     /// <param name="version">Version of the program.</param>
-    public static ImmutableArray<string> Lines(IfcModel model, IEnumerable<StressCheckSet> sets, long creationDate, string version)
+    /// <param name="withTemplate">Whether a template that explains the set goes with them; IFC2X3 knows none, and none is written there.</param>
+    public static ImmutableArray<string> Lines(IfcModel model, IEnumerable<StressCheckSet> sets, long creationDate, string version, bool withTemplate = false)
     {
         ArgumentNullException.ThrowIfNull(model);
         ArgumentNullException.ThrowIfNull(sets);
@@ -44,6 +46,7 @@ public sealed class PropertySetWriter
 
         var writer = new PropertySetWriter(model.Schema, model.Units, model.File.HighestId, creationDate, version);
         foreach (var set in all) writer.Write(set);
+        if (withTemplate && model.Schema != SchemaVersion.Ifc2x3) writer.WriteTemplate(model.File.RecordsOf("IFCPROJECT").Select(p => p.Id).FirstOrDefault());
         return [.. writer._lines];
     }
 
@@ -71,9 +74,12 @@ public sealed class PropertySetWriter
         if (set.ItemCount is { } count) Single("ItemCount", string.Create(CultureInfo.InvariantCulture, $"IFCINTEGER({count})"), "$");
         Single("RunId", $"IFCIDENTIFIER({Part21Text.String(set.RunId)})", "$");
         Label("Program", set.Program);
+        Label("ReviewDecision", set.ReviewDecision);
+        Text("ReviewNote", set.ReviewNote);
 
         var seed = $"{StressCheckSet.SetName}|{set.ElementKey}";
         var id = Add($"IFCPROPERTYSET('{GlobalIds.From(seed + "|set")}',{_owner},'{StressCheckSet.SetName}','Combined stress, screening result',({string.Join(",", properties.Select(Ref))}))");
+        _sets.Add(id);
         Add($"IFCRELDEFINESBYPROPERTIES('{GlobalIds.From(seed + "|relation")}',{_owner},$,$,({Ref(set.ElementId)}),{Ref(id)})");
 
         void Label(string name, string? value)
@@ -92,6 +98,17 @@ public sealed class PropertySetWriter
         }
 
         void Single(string name, string value, string unit) => properties.Add(Add($"IFCPROPERTYSINGLEVALUE('{name}',$,{value},{unit})"));
+    }
+
+    // The project declares the template where there is a project; the template names its sets.
+    private void WriteTemplate(ulong project)
+    {
+        const string Seed = StressCheckSet.SetName + "|template";
+        var properties = SetTemplate.Properties
+            .Select(p => Ref(Add($"IFCSIMPLEPROPERTYTEMPLATE('{GlobalIds.From($"{Seed}|{p.Name}")}',$,'{p.Name}',{Part21Text.String(p.Meaning)},.P_SINGLEVALUE.,'{p.Measure}',$,$,$,$,$,$)"))).ToList();
+        var template = Ref(Add($"IFCPROPERTYSETTEMPLATE('{GlobalIds.From(Seed)}',$,'{StressCheckSet.SetName}','Combined stress, screening result',.PSET_OCCURRENCEDRIVEN.,$,({string.Join(",", properties)}))"));
+        Add($"IFCRELDEFINESBYTEMPLATE('{GlobalIds.From(Seed + "|sets")}',$,$,$,({string.Join(",", _sets.Select(Ref))}),{template})");
+        if (project > 0) Add($"IFCRELDECLARES('{GlobalIds.From(Seed + "|declares")}',$,$,$,{Ref(project)},({template}))");
     }
 
     /// <summary>An ownership chain of our own: the schema demands one, and the original author did not write these results.</summary>

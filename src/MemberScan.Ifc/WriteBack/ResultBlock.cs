@@ -57,6 +57,25 @@ public static class ResultBlock
         return -1;
     }
 
+    /// <summary>Where the last block stands, also when other lines follow it: from its opening comment to behind its last line end; null when there is none.</summary>
+    internal static Range? Locate(ReadOnlySpan<byte> text) => BlockMarks.Find(text, Encoding.ASCII.GetBytes(Begin), Encoding.ASCII.GetBytes(End));
+
+    /// <summary>The hash that a block names.</summary>
+    internal static string DeclaredHash(ReadOnlySpan<byte> text, Range block)
+    {
+        var rest = text[block][Begin.Length..];
+        return Encoding.ASCII.GetString(rest[..Math.Min(HashLength, rest.Length)]);
+    }
+
+    /// <summary>The two comments around a block, each with its line end.</summary>
+    internal static Range[] MarksOf(ReadOnlySpan<byte> text, Range block)
+    {
+        var begin = block.Start.Value;
+        var opening = begin + text[begin..].IndexOf("*/"u8) + 2;
+        var closing = begin + text[block].LastIndexOf(Encoding.ASCII.GetBytes(End));
+        return [begin..BlockMarks.LineEnd(text, opening), closing..block.End.Value];
+    }
+
     /// <summary>SHA-256 in lower-case hexadecimal.</summary>
     public static string Sha256(ReadOnlySpan<byte> bytes) => Convert.ToHexStringLower(SHA256.HashData(bytes));
 

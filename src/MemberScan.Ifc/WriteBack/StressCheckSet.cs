@@ -74,4 +74,10 @@ public sealed record StressCheckSet
 
     /// <summary>Program and version.</summary>
     public required string Program { get; init; }
+
+    /// <summary>What a person decided; null if nobody did.</summary>
+    public string? ReviewDecision { get; init; }
+
+    /// <summary>Note of the decision with who, when, and whether it is stale.</summary>
+    public string? ReviewNote { get; init; }
 }

@@ -1,6 +1,7 @@
 using System.Collections.Immutable;
 using MemberScan.Foundation.Geometry;
 using MemberScan.Model.Verdicts;
+using MemberScan.Screening.Marks;
 
 namespace MemberScan.Screening.Record;
 
@@ -78,4 +79,10 @@ public sealed record MemberResult
 
     /// <summary>What a reader must know.</summary>
     public required ImmutableArray<string> Notes { get; init; }
+
+    /// <summary>Marks of the inputs; null where no run made them.</summary>
+    public InputMarks? Inputs { get; init; }
+
+    /// <summary>What a person decided about it; null if nobody did.</summary>
+    public MemberDecision? Decision { get; init; }
 }

@@ -14,12 +14,14 @@ public sealed class PropertySetWriterTests
     [
         "Status", "Reason", "Utilization", "Criterion", "StressLimit", "EquivalentStress", "NormalStress", "ShearStress", "EquivalentStressText", "Situation", "Station",
         "PointY", "PointZ", "PointName", "ForcesSource", "SectionSource", "ShearModel", "Item", "ItemCount", "RunId", "Program",
+        "ReviewDecision", "ReviewNote",
     ];
 
     private static readonly string[] s_measures =
     [
         "IFCLABEL", "IFCTEXT", "IFCRATIOMEASURE", "IFCLABEL", "IFCPRESSUREMEASURE", "IFCPRESSUREMEASURE", "IFCPRESSUREMEASURE", "IFCPRESSUREMEASURE", "IFCLABEL", "IFCLABEL", "IFCLENGTHMEASURE",
         "IFCLENGTHMEASURE", "IFCLENGTHMEASURE", "IFCLABEL", "IFCLABEL", "IFCLABEL", "IFCLABEL", "IFCLABEL", "IFCINTEGER", "IFCIDENTIFIER", "IFCLABEL",
+        "IFCLABEL", "IFCTEXT",
     ];
 
     [Theory]
@@ -35,7 +37,7 @@ public sealed class PropertySetWriterTests
         Assert.Equal(s_measures, properties.Select(p => p[2].TypeName));
         var relation = Assert.Single(added, r => r.Keyword == "IFCRELDEFINESBYPROPERTIES");
         Assert.Equal((7ul, set.Id), (Follow(file, Assert.Single(relation[4].Items)).Id, Follow(file, relation[5]).Id));
-        Assert.Equal(2, added.Where(r => r.Keyword.StartsWith("IFCREL", StringComparison.Ordinal) || r.Keyword == "IFCPROPERTYSET").Select(r => Text(r[0])).Distinct().Count());
+        Assert.Equal(release == Release.Ifc2X3 ? 2 : 4, added.Where(r => r.Keyword.StartsWith("IFCREL", StringComparison.Ordinal) || r.Keyword == "IFCPROPERTYSET").Select(r => Text(r[0])).Distinct().Count());
     }
 
     [Theory]
@@ -165,6 +167,43 @@ public sealed class PropertySetWriterTests
         }
     }
 
+    [Theory]
+    [MemberData(nameof(Schemas.All), MemberType = typeof(Schemas))]
+    public void A_template_explains_every_property_where_the_schema_knows_templates(Release release)
+    {
+        var (file, added) = Write(release, Full(), Full() with { ElementKey = "other" });
+
+        Assert.Equal(release == Release.Ifc2X3 ? 0 : 1, added.Count(r => r.Keyword == "IFCPROPERTYSETTEMPLATE"));
+        if (release == Release.Ifc2X3) return;
+
+        var template = Assert.Single(added, r => r.Keyword == "IFCPROPERTYSETTEMPLATE");
+        var properties = template[6].Items.Select(i => Follow(file, i)).ToList();
+        Assert.Equal(StressCheckSet.SetName, Text(template[2]));
+        Assert.Equal(s_names, properties.Select(p => Text(p[2])));
+        Assert.Equal(s_measures, properties.Select(p => Text(p[5]).ToUpperInvariant()));
+        var relation = Assert.Single(added, r => r.Keyword == "IFCRELDEFINESBYTEMPLATE");
+        Assert.Equal(added.Where(r => r.Keyword == "IFCPROPERTYSET").Select(r => r.Id), relation[4].Items.Select(i => Follow(file, i).Id));
+        Assert.Equal("IFCPROJECT", Follow(file, Assert.Single(added, r => r.Keyword == "IFCRELDECLARES")[4]).Keyword);
+        Assert.All(added.Where(r => Text(r[0]).Length == 22).GroupBy(r => Text(r[0])), g => Assert.Single(g));
+    }
+
+    [Theory]
+    [MemberData(nameof(Schemas.All), MemberType = typeof(Schemas))]
+    public void Results_are_read_back_in_SI(Release release)
+    {
+        var (file, _) = Write(release, FileUnits.InchKip, ["PRESSUREUNIT"], Full());
+        var model = IfcModel.Open(file, new ReadingRules(), new DiagnosticList())!;
+
+        var element = Assert.Single(ResultReader.Read(model));
+
+        Assert.Equal(7ul, element.StepId);
+        Assert.Equal(s_names, element.Values.Select(v => v.Name));
+        Assert.Equal(s_measures, element.Values.Select(v => v.Measure));
+        Reading.AssertNear(218.9e6, element.Values.Single(v => v.Name == "EquivalentStress").Number!.Value, 1e-12);
+        Reading.AssertNear(1.25, element.Values.Single(v => v.Name == "Station").Number!.Value, 1e-12);
+        Assert.Equal("OVERSTRESSED", element.Values[0].Text);
+    }
+
     [Fact]
     public void No_sets_give_no_lines()
     {
@@ -196,6 +235,8 @@ public sealed class PropertySetWriterTests
         ItemCount = 3,
         RunId = "0123456789abcdef",
         Program = "MemberScan 0.1.0",
+        ReviewDecision = "strengthen",
+        ReviewNote = "letter 4 (R. Vu, 2026-02-03)",
     };
 
     private static (Part21File File, List<Part21Record> Added) Write(Release release, params StressCheckSet[] sets) => Write(release, FileUnits.MillimetreNewton, [], sets);
@@ -216,11 +257,12 @@ public sealed class PropertySetWriterTests
 
     private static (IfcModel Model, ImmutableArray<string> Lines) Lines(Release release, FileUnits units, string[] leftOut, params StressCheckSet[] sets)
     {
+        const bool WithTemplate = true;
         var writer = Bars.Model(release, units, leftOut);
         Bars.Add(writer, "R", Bars.Rail, 2);
         var rules = new ReadingRules { MissingUnits = leftOut.ToFrozenDictionary(type => type, _ => 1e3) };
         var model = Reading.Of(writer, rules).Model;
-        return (model, PropertySetWriter.Lines(model, sets, 1768464000, "0.1.0"));
+        return (model, PropertySetWriter.Lines(model, sets, 1768464000, "0.1.0", WithTemplate));
     }
 
     private static Part21Record Property(List<Part21Record> added, string name) =>
