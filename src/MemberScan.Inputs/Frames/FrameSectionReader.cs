@@ -1,6 +1,7 @@
 using System.Text.Json;
 using MemberScan.Inputs.Json;
 using MemberScan.Inputs.Values;
+using MemberScan.Mechanics.Properties;
 using MemberScan.Mechanics.Sections;
 using MemberScan.Model.Frames;
 

@@ -1,4 +1,5 @@
 using MemberScan.Mechanics.Profiles;
+using MemberScan.Mechanics.Properties;
 using MemberScan.Mechanics.Sections;
 using MemberScan.Mechanics.Stiffness;
 
