@@ -183,10 +183,8 @@ internal static class FerryLanding
             OtherModelUtilization = null,
             Trace = [new TraceLine("σ", "N/A", state.Sigma, "Pa", "beam theory")],
         };
-        return rail with
+        return rail.As(tag: "HR", role: "hanger") with
         {
-            Tag = "HR",
-            Role = "hanger",
             Section = "round 25 mm",
             Material = "S235JR",
             Strength = Si.MPa(235),
@@ -198,12 +196,10 @@ internal static class FerryLanding
     }
 
     /// <summary>A trapeze strut that was not checked.</summary>
-    public static MemberResult Open(string key, string name, ReasonCode code, string message) => Rail(key, name, 0.1e3) with
+    public static MemberResult Open(string key, string name, ReasonCode code, string message) => Rail(key, name, 0.1e3).As(tag: "", role: "strut") with
     {
-        Tag = "",
         Section = "box 60x60x3 mm ro 6 ri 3",
         SectionSource = "profile IfcRectangleHollowProfileDef (#131)",
-        Role = "strut",
         Axes = null,
         Verdict = Verdict.NotChecked,
         Reason = new Reason(code, message),
@@ -211,6 +207,21 @@ internal static class FerryLanding
         Situations = [],
         Notes = [],
     };
+
+    /// <summary>The same result of a member that is called otherwise.</summary>
+    public static MemberResult As(
+        this MemberResult result, string? key = null, string? globalId = null, string? tag = null, string? name = null, string? role = null, ulong? stepId = null) => result with
+        {
+            Identity = result.Identity with
+            {
+                Key = key ?? result.Key,
+                GlobalId = globalId ?? result.GlobalId,
+                Tag = tag ?? result.Tag,
+                Name = name ?? result.Name,
+                Role = role ?? result.Role,
+                StepId = stepId ?? result.StepId,
+            },
+        };
 
     /// <summary>As many hangers as asked for, a few of them overstressed or without forces.</summary>
     public static ScreeningRecord Large(int count)

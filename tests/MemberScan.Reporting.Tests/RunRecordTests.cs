@@ -45,7 +45,7 @@ public sealed class RunRecordTests
     public void Reads_back_to_an_equal_record()
     {
         var record = FerryLanding.Small();
-        record = record with { Members = record.Members.SetItem(0, record.Members[0] with { Length = 0.1 + 0.2, StepId = ulong.MaxValue, Strength = 5e-324 }) };
+        record = record with { Members = record.Members.SetItem(0, record.Members[0].As(stepId: ulong.MaxValue) with { Length = 0.1 + 0.2, Strength = 5e-324 }) };
 
         var read = RunRecord.Read(RunRecord.Write(record));
 

@@ -25,7 +25,7 @@ internal static class ForcesTemplate
         table.Append(Header).Append("\r\n");
         foreach (var member in record.Members)
         {
-            table.Append(CultureInfo.InvariantCulture, $"# member {Plain(member.Key)} '{Plain(member.Name)}', tag '{Plain(member.Tag)}', {member.Class}, {Plain(member.Section.Length > 0 ? member.Section : "no section")}");
+            table.Append(CultureInfo.InvariantCulture, $"# member {Plain(member.Key)} '{Plain(member.Name)}', tag '{Plain(member.Identity.Tag)}', {member.Class}, {Plain(member.Section.Length > 0 ? member.Section : "no section")}");
             if (member.Length is not { } length)
             {
                 table.Append(", no certain length, so it has no rows here\r\n");

@@ -2,7 +2,6 @@ using System.Text.Json;
 using MemberScan.Inputs.Json;
 using MemberScan.Inputs.Values;
 using MemberScan.Mechanics.Properties;
-using MemberScan.Mechanics.Sections;
 using MemberScan.Model.Frames;
 
 namespace MemberScan.Inputs.Frames;

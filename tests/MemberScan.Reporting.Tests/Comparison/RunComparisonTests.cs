@@ -17,7 +17,7 @@ public sealed class RunComparisonTests
     public void Of_fifty_three_with_new_GlobalIds_and_the_same_Tag_are_re_identified_and_none_is_new_or_gone()
     {
         var earlier = Rails(50, 0.4e3);
-        var later = FerryLanding.Record([.. earlier.Members.Select((m, i) => i is 3 or 17 or 40 ? m with { Key = "other" + m.Tag, GlobalId = "other" + m.Tag } : m)]);
+        var later = FerryLanding.Record([.. earlier.Members.Select((m, i) => i is 3 or 17 or 40 ? m.As(key: "other" + m.Tag, globalId: "other" + m.Tag) : m)]);
 
         var record = RunComparison.Of(earlier, later);
 
@@ -30,14 +30,12 @@ public sealed class RunComparisonTests
     [Fact]
     public void Without_Tag_the_axis_finds_a_member_again_also_when_it_runs_the_other_way()
     {
-        var earlier = FerryLanding.Record([.. Rails(5, 0.4e3).Members.Select(m => m with { Tag = "" })]);
+        var earlier = FerryLanding.Record([.. Rails(5, 0.4e3).Members.Select(m => m.As(tag: ""))]);
         var turned = earlier.Members.Select((m, i) =>
         {
             var axes = m.Axes!;
-            return m with
+            return m.As(key: $"new{i}", globalId: $"new{i}") with
             {
-                Key = $"new{i}",
-                GlobalId = $"new{i}",
                 Axes = i % 2 == 0 ? MemberAxes.From(axes.Origin + new Vector3(0.0005, 0, 0) + m.Length!.Value * axes.X, -1 * axes.X, axes.Z) : axes,
             };
         });
@@ -51,10 +49,10 @@ public sealed class RunComparisonTests
     [Fact]
     public void Two_members_in_one_place_are_not_taken_for_each_other()
     {
-        var one = Rails(1, 0.4e3).Members[0] with { Tag = "" };
-        var earlier = FerryLanding.Record(one with { Key = "a", GlobalId = "a" }, one with { Key = "b", GlobalId = "b" });
+        var one = Rails(1, 0.4e3).Members[0].As(tag: "");
+        var earlier = FerryLanding.Record(one.As(key: "a", globalId: "a"), one.As(key: "b", globalId: "b"));
 
-        var record = RunComparison.Of(earlier, FerryLanding.Record(one with { Key = "c", GlobalId = "c" }));
+        var record = RunComparison.Of(earlier, FerryLanding.Record(one.As(key: "c", globalId: "c")));
 
         Assert.Equal((1, 2), (record.Count(Movement.New), record.Count(Movement.Gone)));
     }
@@ -116,8 +114,8 @@ public sealed class RunComparisonTests
     [Fact]
     public void Table_JSON_and_page_say_the_same()
     {
-        var earlier = FerryLanding.Record(Of(1.10) with { Name = "=Geländer \"橋\", 🛟" }, Of(0.5) with { Key = "b", GlobalId = "b", Tag = "b" });
-        var record = RunComparison.Of(earlier, FerryLanding.Record(Of(0.92) with { Name = "=Geländer \"橋\", 🛟" }));
+        var earlier = FerryLanding.Record(Of(1.10).As(name: "=Geländer \"橋\", 🛟"), Of(0.5).As(key: "b", globalId: "b", tag: "b"));
+        var record = RunComparison.Of(earlier, FerryLanding.Record(Of(0.92).As(name: "=Geländer \"橋\", 🛟")));
 
         var lines = Encoding.UTF8.GetString(ComparisonTable.Write(record)).Split("\r\n");
         var json = JsonDocument.Parse(ComparisonJson.Write(record)).RootElement;
@@ -146,6 +144,6 @@ public sealed class RunComparisonTests
     private static ScreeningRecord Rails(int count, double bending) => FerryLanding.Record([.. Enumerable.Range(0, count).Select(i =>
     {
         var key = string.Create(CultureInfo.InvariantCulture, $"2O2Fr$t4X7Zf8NOew3{i:D4}");
-        return FerryLanding.Rail(key, "Gangway rail", bending) with { Tag = $"R-{i}", Axes = MemberAxes.From(new Vector3(2.5 * i, -3.2, 4.05), Vector3.UnitX, Vector3.UnitZ) };
+        return FerryLanding.Rail(key, "Gangway rail", bending).As(tag: $"R-{i}") with { Axes = MemberAxes.From(new Vector3(2.5 * i, -3.2, 4.05), Vector3.UnitX, Vector3.UnitZ) };
     })]);
 }

@@ -94,7 +94,7 @@ public sealed class BcfFileTests
     public void A_malformed_GlobalId_is_told_and_not_selected()
     {
         var record = Posts(2);
-        record = FerryLanding.Record(record.Members[0] with { GlobalId = "short" }, record.Members[1]);
+        record = FerryLanding.Record(record.Members[0].As(globalId: "short"), record.Members[1]);
 
         var topic = Assert.Single(Topic.Of(record));
 

@@ -1,4 +1,3 @@
-using System.Text;
 using MemberScan.Foundation.Geometry;
 using MemberScan.Mechanics.Forces;
 using MemberScan.Model.Verdicts;

@@ -24,7 +24,7 @@ public sealed class TorsionMoveTests
         // 5 − (0.010·300 − (−0.020)·200) = 5 − 7 = −2 N·m.
         Assert.True(isKnown);
         Assert.Equal(-2, moved[0].Forces.T, 1e-12);
-        Assert.Contains("T is moved from the centroid to the shear centre", Assert.Single(findings.Notes));
+        Assert.Contains("T is moved from the centroid to the shear centre", Assert.Single(findings.Notes), StringComparison.Ordinal);
     }
 
     [Fact]

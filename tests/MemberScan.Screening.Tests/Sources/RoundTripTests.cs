@@ -6,7 +6,6 @@ using MemberScan.Ifc;
 using MemberScan.Mechanics.Forces;
 using MemberScan.Mechanics.Sections;
 using MemberScan.Model.Rules;
-using MemberScan.Model.Verdicts;
 using MemberScan.Part21;
 using MemberScan.SampleModels.Scenario;
 using MemberScan.SampleModels.Writing;
