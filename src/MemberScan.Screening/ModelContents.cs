@@ -14,7 +14,7 @@ using MemberScan.Part21;
 using MemberScan.Screening.Contacts;
 using MemberScan.Screening.Frames;
 using MemberScan.Screening.Presets;
-using MemberScan.Screening.Record;
+using MemberScan.Screening.Record.Given;
 using MemberScan.Screening.Sources;
 
 namespace MemberScan.Screening;

@@ -11,6 +11,7 @@ using MemberScan.Model.Verdicts;
 using MemberScan.Screening.Checking;
 using MemberScan.Screening.Decisions;
 using MemberScan.Screening.Record;
+using MemberScan.Screening.Record.Given;
 
 namespace MemberScan.Screening;
 

@@ -37,7 +37,7 @@ public sealed class WrongInputTests
         { Header + "P-1,S,servce,0,1,0,0,0,0,0\n", 2, "did you mean 'service'?" },
         { Header + ",S,service,0,1,0,0,0,0,0\n", 2, "name the member" },
         { Header + "P-1,S,service,0,1,0,0,0,0,0\nP-1,S,design,1,1,0,0,0,0,0\n", 3, "a situation has one kind" },
-        { Header.Replace(',', ';'), 1, "save the table as CSV with commas" },
+        { Header.Replace(',', ';') + "P-1;S;service;0;1,5;0;0;0;0;0\n", 2, "point" },
         { Header.Replace("N[kN]", "N", StringComparison.Ordinal) + "P-1,S,service,0,1,0,0,0,0,0\n", 1, "" },
         { Header.Replace("[kNm]", "[kN]", StringComparison.Ordinal), 1, "" },
         { Header.Replace("Vy", "Vx", StringComparison.Ordinal), 1, "" },

@@ -9,6 +9,7 @@ using MemberScan.Mechanics.Stress;
 using MemberScan.Model.Verdicts;
 using MemberScan.Screening;
 using MemberScan.Screening.Record;
+using MemberScan.Screening.Record.Given;
 
 namespace MemberScan.Reporting.Tests;
 

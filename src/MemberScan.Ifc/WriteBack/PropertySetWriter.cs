@@ -19,16 +19,20 @@ public sealed class PropertySetWriter
     private readonly List<ulong> _sets = [];
     private ulong _next;
 
-    private PropertySetWriter(SchemaVersion schema, ModelUnits units, ulong highestId, long creationDate, string version)
+    private PropertySetWriter(SchemaVersion schema, ModelUnits units, ulong highestId, long creationDate, string version, List<StressCheckSet> sets)
     {
         (_schema, _next) = (schema, highestId);
         _owner = schema == SchemaVersion.Ifc2x3 ? Owner(creationDate, version) : "$";
+
+        // Units of our own only where a value will name them: nothing must stand in the model that nothing refers to.
+        var hasStress = sets.Exists(s => (s.StressLimit ?? s.EquivalentStress ?? s.NormalStress ?? s.ShearStress) is not null);
+        var hasLength = sets.Exists(s => (s.Station ?? s.PointY ?? s.PointZ) is not null);
         _pressure = units.NamedByModel("PRESSUREUNIT")
             ? (units.Pressure!.Value, "$")
-            : (1e6, Ref(Add("IFCSIUNIT(*,.PRESSUREUNIT.,.MEGA.,.PASCAL.)")));
+            : (1e6, hasStress ? Ref(Add("IFCSIUNIT(*,.PRESSUREUNIT.,.MEGA.,.PASCAL.)")) : "$");
         _length = units.NamedByModel("LENGTHUNIT")
             ? (units.Length!.Value, "$")
-            : (1, Ref(Add("IFCSIUNIT(*,.LENGTHUNIT.,$,.METRE.)")));
+            : (1, hasLength ? Ref(Add("IFCSIUNIT(*,.LENGTHUNIT.,$,.METRE.)")) : "$");
     }
 
     /// <summary>The lines for all sets, in the order given; the same input gives the same lines.</summary>
@@ -44,7 +48,7 @@ public sealed class PropertySetWriter
         var all = sets.ToList();
         if (all.Count == 0) return [];
 
-        var writer = new PropertySetWriter(model.Schema, model.Units, model.File.HighestId, creationDate, version);
+        var writer = new PropertySetWriter(model.Schema, model.Units, model.File.HighestId, creationDate, version, all);
         foreach (var set in all) writer.Write(set);
         if (withTemplate && model.Schema != SchemaVersion.Ifc2x3) writer.WriteTemplate(model.File.RecordsOf("IFCPROJECT").Select(p => p.Id).FirstOrDefault());
         return [.. writer._lines];

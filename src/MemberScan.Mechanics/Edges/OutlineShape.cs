@@ -13,11 +13,11 @@ internal sealed class OutlineShape
     public OutlineShape(ImmutableArray<EdgeCurve> edges)
     {
         Edges = edges;
-        _pieces = [.. edges.SelectMany(RisingPiece.Of)];
         var points = edges.SelectMany(edge => edge.Extremes()).ToArray();
         (LeastY, LargestY) = (points.Min(p => p.Y), points.Max(p => p.Y));
         (LeastZ, LargestZ) = (points.Min(p => p.Z), points.Max(p => p.Z));
         Extent = Math.Max(LargestY - LeastY, LargestZ - LeastZ);
+        _pieces = Joined([.. edges.SelectMany(RisingPiece.Of)], 1e-12 * Extent);
         Next = FindNext();
         Corners = [.. FindCorners()];
     }
@@ -96,6 +96,22 @@ internal sealed class OutlineShape
         }
 
         return nearest;
+    }
+
+    // Levels at which pieces meet are made equal: where rounding parts them, a ray at just that level would slip between two edges.
+    private static ImmutableArray<RisingPiece> Joined(RisingPiece[] pieces, double rounding)
+    {
+        var levels = pieces.SelectMany(p => new[] { p.Low, p.High }).Order().ToArray();
+        for (var i = 1; i < levels.Length; i++)
+            if (levels[i] - levels[i - 1] <= rounding) levels[i] = levels[i - 1];
+        return [.. pieces.Select(p => p with { Low = Level(p.Low), High = Level(p.High) })];
+
+        double Level(double z)
+        {
+            var at = Array.BinarySearch(levels, z);
+            if (at >= 0) return z;
+            return levels[Math.Max(0, ~at - 1)];
+        }
     }
 
     private ImmutableArray<int> FindNext()

@@ -1,5 +1,6 @@
 using System.Collections.Immutable;
 using MemberScan.Screening.Record;
+using MemberScan.Screening.Record.Given;
 
 namespace MemberScan.Screening.Readiness;
 

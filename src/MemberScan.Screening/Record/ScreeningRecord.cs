@@ -1,6 +1,7 @@
 using System.Collections.Immutable;
 using MemberScan.Model.Verdicts;
 using MemberScan.Screening.Contacts;
+using MemberScan.Screening.Record.Given;
 
 namespace MemberScan.Screening.Record;
 

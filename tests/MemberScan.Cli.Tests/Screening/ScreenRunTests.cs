@@ -50,7 +50,7 @@ public sealed class ScreenRunTests
 
         var text = page.Body!.TextContent;
         Assert.True(code == sample.Ran.ExitCode, sample.Ran.All);
-        Assert.All(sample.Screening.GetProperty("members").EnumerateArray(), m => Assert.Contains(m.GetProperty("key").GetString()!, text, StringComparison.Ordinal));
+        Assert.All(sample.Screening.GetProperty("members").EnumerateArray(), m => Assert.Contains(m.GetProperty("identity").GetProperty("key").GetString()!, text, StringComparison.Ordinal));
         Assert.All(
             page.QuerySelectorAll("[src], link[href], iframe, object, embed"),
             e => Assert.StartsWith("data:", e.GetAttribute("src") ?? e.GetAttribute("href") ?? "", StringComparison.Ordinal));
@@ -271,7 +271,7 @@ public sealed class ScreenRunTests
 
         Assert.True(ran.ExitCode == 2, ran.All);
         using var json = JsonDocument.Parse(await File.ReadAllBytesAsync(folder["structural-portal-frame-results-ifc4.run.json"], TestContext.Current.CancellationToken));
-        var column = json.RootElement.GetProperty("screening").GetProperty("members").EnumerateArray().Single(m => m.GetProperty("name").GetString() == "Curve Member #1");
+        var column = json.RootElement.GetProperty("screening").GetProperty("members").EnumerateArray().Single(m => m.GetProperty("identity").GetProperty("name").GetString() == "Curve Member #1");
         var stations = column.GetProperty("situations")[0].GetProperty("stations").EnumerateArray().ToArray();
         double[] Values(JsonElement station, params string[] names) => [.. names.Select(n => station.GetProperty("forces").GetProperty(n).GetDouble())];
         const double Lbf = 4.44822162, LbfIn = Lbf * 0.0254;

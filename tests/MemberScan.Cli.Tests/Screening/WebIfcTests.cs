@@ -22,12 +22,12 @@ public sealed class WebIfcTests
         var elements = read.RootElement.GetProperty("elements");
         var screening = sample.Screening;
         var (length, pressure) = (Factor(screening, "LENGTHUNIT"), Factor(screening, "PRESSUREUNIT"));
-        var items = screening.GetProperty("members").EnumerateArray().GroupBy(m => m.GetProperty("globalId").GetString()!).ToArray();
+        var items = screening.GetProperty("members").EnumerateArray().GroupBy(m => m.GetProperty("identity").GetProperty("globalId").GetString()!).ToArray();
         Assert.All(items, group =>
         {
             var sets = elements.GetProperty(group.Key).GetProperty("sets");
             var set = sets.GetProperty(SetName);
-            var member = group.Count() == 1 ? group.Single() : group.Single(m => m.GetProperty("key").GetString() == Text(set, "Item"));
+            var member = group.Count() == 1 ? group.Single() : group.Single(m => m.GetProperty("identity").GetProperty("key").GetString() == Text(set, "Item"));
             Compare(member, set, length, pressure);
             Assert.Equal(screening.GetProperty("runId").GetString(), Text(set, "RunId"));
             Assert.Equal("MemberScan " + screening.GetProperty("version").GetString(), Text(set, "Program"));

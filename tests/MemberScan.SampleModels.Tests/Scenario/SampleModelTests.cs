@@ -27,7 +27,8 @@ public sealed class SampleModelTests
     [Fact]
     public void The_folder_holds_nothing_else()
     {
-        var expected = Samples.All.SelectMany(s => s.Files()).Select(f => f.FileName).Order(StringComparer.Ordinal);
+        // The space frame is written by hand, not by the generator.
+        var expected = Samples.All.SelectMany(s => s.Files()).Select(f => f.FileName).Append("rail-post.frame.json").Order(StringComparer.Ordinal);
 
         var found = Directory.EnumerateFileSystemEntries(Path.Combine(RepositoryFolder.Root, "sample-models")).Select(Path.GetFileName).Order(StringComparer.Ordinal);
 

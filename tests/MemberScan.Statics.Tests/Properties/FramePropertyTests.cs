@@ -20,7 +20,7 @@ public sealed class FramePropertyTests
         foreach (var situation in result.Situations)
         {
             Near.Nothing(situation.EquilibriumError, 1, 1e-10);
-            Near.Nothing(situation.Residual, 1, 1e-12);
+            Near.Nothing(situation.Residual, 1, 1e-10);
             Near.Nothing(situation.BackwardError, 1, 1e-14);
         }
     }, iter: Frames, threads: 1);

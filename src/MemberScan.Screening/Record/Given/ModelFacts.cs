@@ -1,6 +1,6 @@
 using System.Collections.Immutable;
 
-namespace MemberScan.Screening.Record;
+namespace MemberScan.Screening.Record.Given;
 
 /// <summary>What names a model and how it was read.</summary>
 /// <param name="FileName">Name of the file, without folder.</param>

@@ -1,4 +1,4 @@
-namespace MemberScan.Screening.Record;
+namespace MemberScan.Screening.Record.Given;
 
 /// <summary>A file of forces beside the model.</summary>
 /// <param name="FileName">Name of the file, without folder.</param>

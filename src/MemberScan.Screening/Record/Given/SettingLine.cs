@@ -1,4 +1,4 @@
-namespace MemberScan.Screening.Record;
+namespace MemberScan.Screening.Record.Given;
 
 /// <summary>One effective setting.</summary>
 /// <param name="Key">Its key, such as <c>forces.convention</c>.</param>

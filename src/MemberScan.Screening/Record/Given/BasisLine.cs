@@ -1,4 +1,4 @@
-namespace MemberScan.Screening.Record;
+namespace MemberScan.Screening.Record.Given;
 
 /// <summary>A limit in force.</summary>
 /// <param name="Kind">"service" or "design".</param>

@@ -1,4 +1,4 @@
-namespace MemberScan.Screening.Record;
+namespace MemberScan.Screening.Record.Given;
 
 /// <summary>One unit of the model.</summary>
 /// <param name="UnitType">Unit type, such as <c>LENGTHUNIT</c>.</param>
