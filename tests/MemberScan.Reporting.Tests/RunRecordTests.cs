@@ -148,7 +148,7 @@ public sealed class RunRecordTests
         Assert.Equal(plain, german);
     }
 
-    private static IEnumerable<string> Names<T>() => typeof(T).GetProperties().Select(p => JsonNamingPolicy.CamelCase.ConvertName(p.Name));
+    private static IEnumerable<string> Names<T>() => typeof(T).GetProperties().Where(p => p.CanWrite).Select(p => JsonNamingPolicy.CamelCase.ConvertName(p.Name));
 
     private static IEnumerable<JsonObject> Objects(JsonNode? node) => node switch
     {

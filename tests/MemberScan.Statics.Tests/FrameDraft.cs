@@ -15,7 +15,13 @@ internal sealed class FrameDraft
     /// <summary>A 40 × 80 mm bar by plain constants; shear areas 5/6 of the area.</summary>
     public static readonly FrameSection Bar = new()
     {
-        Name = "bar", Area = 3.2e-3, Iy = 0.04 * 0.08 * 0.08 * 0.08 / 12, Iz = 0.08 * 0.04 * 0.04 * 0.04 / 12, J = 1.1e-6, ShearAreaY = 3.2e-3 / 1.2, ShearAreaZ = 3.2e-3 / 1.2,
+        Name = "bar",
+        Area = 3.2e-3,
+        Iy = 0.04 * 0.08 * 0.08 * 0.08 / 12,
+        Iz = 0.08 * 0.04 * 0.04 * 0.04 / 12,
+        J = 1.1e-6,
+        ShearAreaY = 3.2e-3 / 1.2,
+        ShearAreaZ = 3.2e-3 / 1.2,
     };
 
     private readonly List<FrameNode> _nodes = [];

@@ -40,7 +40,15 @@ internal static class FrameSectionReader
         {
             return new FrameSection
             {
-                Name = entry.Key, Shape = section, Area = p.Area, Iy = p.Iy, Iz = p.Iz, Iyz = p.Iyz, J = j, ShearCentreY = p.ShearCentreY, ShearCentreZ = p.ShearCentreZ,
+                Name = entry.Key,
+                Shape = section,
+                Area = p.Area,
+                Iy = p.Iy,
+                Iz = p.Iz,
+                Iyz = p.Iyz,
+                J = j,
+                ShearCentreY = p.ShearCentreY,
+                ShearCentreZ = p.ShearCentreZ,
             };
         }
 

@@ -19,7 +19,7 @@ internal static class SettingKeys
     public static readonly ImmutableArray<string> RoleEntry =
         ["role", "classes", "predefinedTypes", "namePattern", "minSlopeDegrees", "maxSlopeDegrees", "minSlenderness"];
     public static readonly ImmutableArray<string> Forces =
-    ["from", 
+    ["from",
         "convention", "components", "turnDegrees", "turnDegreesByMember", "missingComponents", "unknownMembers", "kinds",
         "torsion", "missingCoefficients", "caseCoefficients", "combinations", "combinationSets", "caseTags", "propertySets",
     ];

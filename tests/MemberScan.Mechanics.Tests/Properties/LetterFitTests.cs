@@ -75,7 +75,23 @@ public sealed class LetterFitTests
 
     private static SectionProperties Plain(OutlineIntegrals i) => new()
     {
-        Area = i.Area, Iy = i.Iy, Iz = i.Iz, Iyz = i.Iyz, J = null, JSource = "", WelY = 0, WelZ = 0, Extremes = default, QY = 0, QZ = 0, WplY = 0, WplZ = 0, Wt = null, JThinWall = null, ShearCentreY = 0, ShearCentreZ = 0,
+        Area = i.Area,
+        Iy = i.Iy,
+        Iz = i.Iz,
+        Iyz = i.Iyz,
+        J = null,
+        JSource = "",
+        WelY = 0,
+        WelZ = 0,
+        Extremes = default,
+        QY = 0,
+        QZ = 0,
+        WplY = 0,
+        WplZ = 0,
+        Wt = null,
+        JThinWall = null,
+        ShearCentreY = 0,
+        ShearCentreZ = 0,
     };
 
     private static OutlineSection Lying(OpenProfile profile, bool isMirrored, int turns) => new("lying", [profile.Vertices.Select(v =>

@@ -37,7 +37,9 @@ internal static class RandomFrame
 
     private static FrameSection Section(Random random) => FrameDraft.Bar with
     {
-        Iyz = (random.NextDouble() - 0.5) * 3e-7, ShearCentreY = 0.02 * (random.NextDouble() - 0.5), ShearCentreZ = 0.02 * (random.NextDouble() - 0.5),
+        Iyz = (random.NextDouble() - 0.5) * 3e-7,
+        ShearCentreY = 0.02 * (random.NextDouble() - 0.5),
+        ShearCentreZ = 0.02 * (random.NextDouble() - 0.5),
     };
 
     private static FrameMember Change(FrameMember m, Random random)

@@ -275,7 +275,9 @@ public sealed class BeamTests
         var (sin, cos) = Math.SinCos(angle);
         var section = FrameDraft.Bar with
         {
-            Iy = i1 * cos * cos + i2 * sin * sin, Iz = i1 * sin * sin + i2 * cos * cos, Iyz = (i2 - i1) * sin * cos,
+            Iy = i1 * cos * cos + i2 * sin * sin,
+            Iz = i1 * sin * sin + i2 * cos * cos,
+            Iyz = (i2 - i1) * sin * cos,
         };
         var draft = FrameDraft.Beam(L, 1, section).Support("N0", Restraints.AllFixed);
         var result = draft.Situation("S", s => s with { NodeLoads = [draft.Load("N1", new(0, 0, -P))] }).Solve().Situations[0];
