@@ -115,7 +115,7 @@ internal sealed class SituationChecker(SectionLibrary library, Basis basis, doub
 
         foreach (var model in new[] { ShearModel.Elementary, ShearModel.Elasticity })
         {
-            var found = new TaperSearch(taper, model, subject, forces.From, limit, index).Of(findings, line, Cleaned);
+            var found = new TaperSearch(taper, model, subject, forces.From, limit, index).Of(findings, line);
             if (model == ShearModel.Elementary) findings.Elementary = Found.Larger(findings.Elementary, found);
             else findings.Elasticity = Found.Larger(findings.Elasticity, found);
         }
@@ -251,25 +251,7 @@ internal sealed class SituationChecker(SectionLibrary library, Basis basis, doub
             if (value > largest) (best, largest) = ((double)i / Parts, value);
         }
 
-        const double Golden = 0.6180339887498949;
-        var (a, b) = (best - 1.0 / Parts, best + 1.0 / Parts);
-        var (c, d) = (b - Golden * (b - a), a + Golden * (b - a));
-        var (fc, fd) = (At(c), At(d));
-        for (var i = 0; i < Steps; i++)
-        {
-            if (fc >= fd)
-            {
-                (b, d, fd) = (d, c, fc);
-                c = b - Golden * (b - a);
-                fc = At(c);
-            }
-            else
-            {
-                (a, c, fc) = (c, d, fd);
-                d = a + Golden * (b - a);
-                fd = At(d);
-            }
-        }
+        GoldenSection.CloseIn(At, best - 1.0 / Parts, best + 1.0 / Parts, Steps);
     }
 
     /// <summary>

@@ -17,13 +17,10 @@ internal sealed class TaperSearch(Taper taper, ShearModel model, SituationChecke
 
     private Found? _best;
 
-    /// <summary>Brings forces to those that are no rounding of zero.</summary>
-    public delegate SectionForces Cleaning(in SectionForces forces, CrossSection shape);
-
     /// <summary>The place of largest stress over limit; null where there is no field.</summary>
-    public Found? Of(SituationFindings findings, ForceLine line, Cleaning clean)
+    public Found? Of(SituationFindings findings, ForceLine line)
     {
-        foreach (var station in line.Stations) Try(station.X, station.Forces, clean);
+        foreach (var station in line.Stations) Try(station.X, station.Forces);
         foreach (var interval in line.Intervals)
         {
             if (interval.Kind == IntervalKind.Unknown)
@@ -33,19 +30,19 @@ internal sealed class TaperSearch(Taper taper, ShearModel model, SituationChecke
             }
 
             if (interval.Kind == IntervalKind.UniformLoadInferred) findings.Note("uniform load inferred between stations");
-            if (interval.End.X > interval.Start.X) SearchInside(interval, clean);
+            if (interval.End.X > interval.Start.X) SearchInside(interval);
         }
 
         if (_best is null) findings.Bar(ReasonCode.CheckNotEvaluated, "no stress field for the tapering section");
         return _best;
     }
 
-    private double Try(double x, in SectionForces forces, Cleaning clean)
+    private double Try(double x, in SectionForces forces)
     {
         var shape = taper.At(Math.Clamp((from + x) / subject.Length, 0, 1));
         if (!StressField.TryCreate(shape, model, subject.Poisson, out var field, out _)) return 0;
 
-        var cleaned = clean(forces, shape);
+        var cleaned = SituationChecker.Cleaned(forces, shape);
         if (!NumberRange.Holds(shape, field.Properties, cleaned)) return 0;
 
         var allowed = LimitInForce.Stress(limit, subject.Yield);
@@ -54,9 +51,9 @@ internal sealed class TaperSearch(Taper taper, ShearModel model, SituationChecke
         return point.Value;
     }
 
-    private void SearchInside(ForceInterval interval, Cleaning clean)
+    private void SearchInside(ForceInterval interval)
     {
-        double At(double share) => Try(interval.Start.X + share * (interval.End.X - interval.Start.X), interval.At(share), clean);
+        double At(double share) => Try(interval.Start.X + share * (interval.End.X - interval.Start.X), interval.At(share));
 
         var (best, largest) = (0.0, double.NegativeInfinity);
         for (var i = 0; i <= Parts; i++)
@@ -65,24 +62,6 @@ internal sealed class TaperSearch(Taper taper, ShearModel model, SituationChecke
             if (value > largest) (best, largest) = ((double)i / Parts, value);
         }
 
-        const double Golden = 0.6180339887498949;
-        var (a, b) = (Math.Max(0, best - 1.0 / Parts), Math.Min(1, best + 1.0 / Parts));
-        var (c, d) = (b - Golden * (b - a), a + Golden * (b - a));
-        var (fc, fd) = (At(c), At(d));
-        for (var i = 0; i < Steps; i++)
-        {
-            if (fc >= fd)
-            {
-                (b, d, fd) = (d, c, fc);
-                c = b - Golden * (b - a);
-                fc = At(c);
-            }
-            else
-            {
-                (a, c, fc) = (c, d, fd);
-                d = a + Golden * (b - a);
-                fd = At(d);
-            }
-        }
+        GoldenSection.CloseIn(At, Math.Max(0, best - 1.0 / Parts), Math.Min(1, best + 1.0 / Parts), Steps);
     }
 }
