@@ -1,3 +1,5 @@
+using MemberScan.Mechanics.Forces;
+
 namespace MemberScan.Statics;
 
 /// <summary>The least and largest value of a section force over a whole member, between stations too.</summary>

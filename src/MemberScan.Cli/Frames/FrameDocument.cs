@@ -2,6 +2,7 @@ using System.Collections.Immutable;
 using MemberScan.Foundation.Diagnostics;
 using MemberScan.Foundation.Geometry;
 using MemberScan.Inputs.Frames;
+using MemberScan.Mechanics.Forces;
 using MemberScan.Model.Forces;
 using MemberScan.Statics;
 

@@ -1,4 +1,5 @@
 using MemberScan.Foundation.Geometry;
+using MemberScan.Mechanics.Forces;
 using MemberScan.Model.Frames;
 using MemberScan.Model.Frames.Loads;
 

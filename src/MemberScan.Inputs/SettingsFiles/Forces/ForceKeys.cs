@@ -1,4 +1,5 @@
 using System.Collections.Immutable;
+using MemberScan.Mechanics.Forces;
 using MemberScan.Model.Forces;
 using MemberScan.Model.Rules.Combinations;
 using MemberScan.Model.Rules.PropertySets;

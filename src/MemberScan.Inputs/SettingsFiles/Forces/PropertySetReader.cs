@@ -3,6 +3,7 @@ using System.Collections.Immutable;
 using MemberScan.Foundation.Units;
 using MemberScan.Inputs.Json;
 using MemberScan.Inputs.Values;
+using MemberScan.Mechanics.Forces;
 using MemberScan.Model.Rules.PropertySets;
 
 namespace MemberScan.Inputs.SettingsFiles.Forces;

@@ -1,3 +1,5 @@
+using MemberScan.Mechanics.Forces;
+
 namespace MemberScan.Model.Rules.PropertySets;
 
 /// <summary>Which property holds one section force.</summary>

@@ -1,6 +1,7 @@
 using System.Text;
 using MemberScan.Foundation.Diagnostics;
 using MemberScan.Inputs.SettingsFiles;
+using MemberScan.Mechanics.Forces;
 using MemberScan.Model.Forces;
 using MemberScan.Model.Rules;
 using MemberScan.Model.Rules.Combinations;

@@ -1,4 +1,4 @@
-namespace MemberScan.Model.Rules.PropertySets;
+namespace MemberScan.Mechanics.Forces;
 
 /// <summary>One of the six section forces.</summary>
 public enum ForceComponent
