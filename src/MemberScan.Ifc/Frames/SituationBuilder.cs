@@ -2,8 +2,8 @@ using System.Collections.Immutable;
 using System.Globalization;
 using MemberScan.Foundation.Geometry;
 using MemberScan.Ifc.Analysis;
+using MemberScan.Ifc.Analysis.Loads;
 using MemberScan.Ifc.Frames.Loading;
-using MemberScan.Ifc.Frames.Stiffness;
 using MemberScan.Model;
 using MemberScan.Model.Forces;
 using MemberScan.Model.Frames.Loads;
@@ -96,7 +96,7 @@ internal sealed class SituationBuilder(Situation situation, Vector3 selfWeight)
         for (var i = 0; i < assembly.Pieces.Count; i++)
             if (assembly.Stiffness[i].Density is null)
                 Fail(new Reason(ReasonCode.ForcesIncomplete, $"self-weight acts, and the density of {assembly.Pieces[i].Name} is not known"));
-        Notes.Add(string.Create(CultureInfo.InvariantCulture, $"self-weight by the sections' areas, with g = {StiffnessReader.Gravity} m/s²"));
+        Notes.Add(string.Create(CultureInfo.InvariantCulture, $"self-weight by the sections' areas, with g = {MemberWeight.Gravity} m/s²"));
     }
 
     private void AddPoint(MemberLoad load, double factor, MemberAxes axes, IReadOnlyList<int> pieces, FrameAssembly assembly)

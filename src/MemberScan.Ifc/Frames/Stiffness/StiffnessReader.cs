@@ -2,6 +2,7 @@ using System.Collections.Immutable;
 using System.Globalization;
 using MemberScan.Foundation.Geometry;
 using MemberScan.Ifc.Analysis;
+using MemberScan.Ifc.Analysis.Loads;
 using MemberScan.Mechanics.Properties;
 using MemberScan.Mechanics.Sections;
 using MemberScan.Model;
@@ -17,12 +18,6 @@ internal sealed class StiffnessReader(Instances instances, Relations relations, 
 {
     /// <summary>Largest sine of the angle between an analytical member and the body whose section it takes.</summary>
     private const double Parallel = 0.02;
-
-    /// <summary>Acceleration of gravity by which a mass becomes a weight [m/s²]; the models name none.</summary>
-    public const double Gravity = 9.80665;
-
-    /// <summary>Density of steel where a model gives none [kg/m³].</summary>
-    public const double SteelDensity = 7850;
 
     /// <summary>Share of the second moments below which a product of inertia or an offset of the shear centre is nothing.</summary>
     private const double Nothing = 1e-9;
@@ -53,12 +48,12 @@ internal sealed class StiffnessReader(Instances instances, Relations relations, 
         var density = facts.Density;
         if (density is null && source.Material.IsSteel)
         {
-            density = SteelDensity;
-            notes.Add(string.Create(CultureInfo.InvariantCulture, $"{name}: density {SteelDensity} kg/m³ (EN 1991-1-1, Table A.4, from memory); the model gives none"));
+            density = MemberWeight.SteelDensity;
+            notes.Add(string.Create(CultureInfo.InvariantCulture, $"{name}: density {MemberWeight.SteelDensity} kg/m³ (EN 1991-1-1, Table A.4, from memory); the model gives none"));
         }
 
         var shear = facts.ShearModulus ?? modulus.Value / (2 * (1 + poisson.Value));
-        var material = new FrameMaterial(source.Material.Name, modulus.Value, shear, (density ?? 0) * Gravity, facts.Expansion ?? 0, (source.Material.Yield as Finding<double>.Found)?.Value);
+        var material = new FrameMaterial(source.Material.Name, modulus.Value, shear, (density ?? 0) * MemberWeight.Gravity, facts.Expansion ?? 0, (source.Material.Yield as Finding<double>.Found)?.Value);
         return new Finding<MemberStiffness>.Found(
             new MemberStiffness(constants, material, z, reversed, density, facts.Expansion, section.Value.Shape.ExtentY, section.Value.Shape.ExtentZ, notes.ToImmutable()),
             $"{section.Source}; E by {modulus.Source}");
