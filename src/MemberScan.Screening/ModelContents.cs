@@ -158,11 +158,15 @@ internal sealed class ModelContents
     private static HashSet<string> NamedInTables(ImmutableArray<ForcesTable> tables)
     {
         var named = new HashSet<string>(StringComparer.Ordinal);
+        var last = "";
         foreach (var table in tables)
             foreach (var row in table.Rows)
             {
-                named.Add(row.Member);
-                if (row.Member.LastIndexOf('/') is var slash and > 0) named.Add(row.Member[..slash]);
+                // Rows of one member mostly follow each other, and a table has one string for each name.
+                if (ReferenceEquals(row.Member, last)) continue;
+
+                last = row.Member;
+                if (named.Add(last) && last.LastIndexOf('/') is var slash and > 0) named.Add(last[..slash]);
             }
 
         return named;
