@@ -116,7 +116,7 @@ public sealed class IfcModel
         var profiles = new ProfileReader(_instances, _placements, curves, Units);
         var materials = new MaterialReader(_instances, _relations, new MaterialFactsReader(_instances, Units, _unitReader), profiles, _rules);
         var source = new AnalyticalSource(_instances, _relations, profiles, materials);
-        var stiffness = new StiffnessReader(_instances, _relations, source, new ElasticFactsReader(_instances, Units, _unitReader), members);
+        var stiffness = new StiffnessReader(_instances, _relations, source, new StatedConstantsReader(_instances, _relations, Units, _unitReader), new ElasticFactsReader(_instances, Units, _unitReader), members);
         var boundaries = new BoundaryReader(Units, Schema);
         var tree = new LoadTree(_instances, _rules.Forces);
         var memberLoads = new MemberLoadReader(_instances, _relations, new ActivityPlaces(_instances, _placements, Units), tree, Units, Schema);

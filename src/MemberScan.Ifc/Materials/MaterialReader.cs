@@ -45,6 +45,17 @@ internal sealed class MaterialReader(
     /// <summary>Whether the association names a profile set that tapers to another.</summary>
     public bool IsTapering(ulong id) => Levels(id).Any(level => level.Any(d => d.Keyword == "IFCMATERIALPROFILESETUSAGETAPERING"));
 
+    /// <summary>The one profile at the start and the one at the end of a tapering profile set; null where it does not name one each.</summary>
+    public (Finding<ProfileShape> Start, Finding<ProfileShape> End)? TaperOf(ulong id)
+    {
+        foreach (var level in Levels(id))
+            foreach (var usage in level)
+                if (usage.Keyword == "IFCMATERIALPROFILESETUSAGETAPERING" && instances.TryFollow(usage[0], out var first) && instances.TryFollow(usage[3], out var last)
+                    && Profiles(first, []).ToList() is [var start] && Profiles(last, []).ToList() is [var end])
+                    return (start, end);
+        return null;
+    }
+
     /// <summary>Whether the association says that the member's line is that of its section's centroid (cardinal point 10).</summary>
     public bool RunsAlongCentroid(ulong id) => Levels(id).Any(level => level.Any(d =>
         d.Keyword is "IFCMATERIALPROFILESETUSAGE" && d[1].TryInteger(out var point) && point == 10));

@@ -271,7 +271,10 @@ internal sealed class MemberReader(
     private Finding<SectionFinding> AnalyticalSection(Part21Record record, ref ImmutableArray<string> notes, out (double Y, double Z) offset)
     {
         offset = default;
-        foreach (var (properties, _) in relations.ProfilePropertiesOf(record.Id))
+        var related = relations.ProfilePropertiesOf(record.Id);
+        if (related.Count > 1) return NoSection(ReasonCode.SectionNotCovered, "several profile properties are related to the analytical member, so its section varies along its length");
+
+        foreach (var (properties, _) in related)
         {
             if (!instances.File.TryFind(properties, out var p) || !instances.TryFollow(p[1], out var profile)) continue;
             if (!profiles.Read(profile).TryGet(out var found, out var why)) return new Finding<SectionFinding>.Missing(why);

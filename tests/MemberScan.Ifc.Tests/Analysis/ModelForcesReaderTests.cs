@@ -240,10 +240,11 @@ public sealed class ModelForcesReaderTests
         Reading.AssertNear(isCovered ? s_length + beyond : s_length + 2 * beyond, forces.To!.Value, 1e-9);
     }
 
-    [Fact]
-    public void Without_an_Axis_a_round_bar_is_usable_and_a_flat_one_is_not()
+    [Theory]
+    [MemberData(nameof(Schemas.Later), MemberType = typeof(Schemas))]
+    public void Without_an_Axis_a_round_bar_is_usable_and_a_flat_one_is_not(Release release)
     {
-        var model = Bars.Model(Release.Ifc4);
+        var model = Bars.Model(release);
         var analysis = model.StartAnalysis("A", Transform3.Identity);
         var group = Combination(analysis);
         foreach (var (name, section) in new (string, CrossSection)[] { ("rail", Bars.Rail), ("flat", Bars.Flat) })
