@@ -14,7 +14,7 @@ public sealed class ScreenerTests
 {
     private static readonly Lazy<SampleModel[]> s_samples = new(() => [.. SampleModel.All()]);
 
-    public static TheoryData<string> Names => [GangwayRails.Name, DeckHangers.Name, MastStays.Name];
+    public static TheoryData<string> Names => [GangwayRails.Name, DeckHangers.Name, DeckTrapezes.Name, MastStays.Name];
 
     /// <summary>The calculation by hand shares no formula with the program: textbook formulas written apart (its own remarks name them).</summary>
     [Theory]
@@ -42,6 +42,7 @@ public sealed class ScreenerTests
     [InlineData(GangwayRails.Name, false, 22, 3, 9)]
     [InlineData(DeckHangers.Name, true, 11, 2, 3)]
     [InlineData(DeckHangers.Name, false, 0, 0, 16)]
+    [InlineData(DeckTrapezes.Name, false, 9, 3, 0)]
     [InlineData(MastStays.Name, false, 10, 1, 1)]
     public void The_three_counts_of_a_sample_add_up_to_its_candidates(string name, bool withTable, int within, int over, int open)
     {
