@@ -1,7 +1,5 @@
-using MemberScan.Foundation.Geometry;
 using MemberScan.Ifc.Materials;
 using MemberScan.Ifc.Sections;
-using MemberScan.Mechanics.Sections;
 using MemberScan.Model;
 using MemberScan.Model.Members;
 using MemberScan.Model.Verdicts;
@@ -41,15 +39,9 @@ internal sealed class AnalyticalSource(Instances instances, Relations relations,
     {
         if (!profile.TryGet(out var found, out var why)) return new Finding<SectionFinding>.Missing(why);
 
-        return IsMoved(found.Value)
+        return found.Value.IsMoved
             ? Missing(ReasonCode.SectionNotCovered, $"{found.Source} is turned or shifted by its position, and no body shows how it lies in the member")
             : new Finding<SectionFinding>.Found(found.Value.Section, $"{source}, {found.Source}");
-    }
-
-    private static bool IsMoved(ProfileShape profile)
-    {
-        var isTurned = (profile.Position.X - Vector3.UnitX).Length > 1e-6 && profile.Section.Shape is not (Round or Tube);
-        return isTurned || profile.Position.Origin.Length > 1e-6 * profile.LargestExtent;
     }
 
     private static Finding<SectionFinding> Missing(ReasonCode code, string message) => new Finding<SectionFinding>.Missing(new Reason(code, message));
