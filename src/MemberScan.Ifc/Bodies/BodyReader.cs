@@ -43,7 +43,7 @@ internal sealed class BodyReader(
         var walk = new Walk();
         foreach (var item in BodyItems(shape)) Flatten(item, Transform3.Identity, false, 0, walk);
 
-        var bodies = walk.Found.Take(MaxBodies).Select(item => ReadItem(item, toProject));
+        var bodies = walk.Found.Take(MaxBodies).SelectMany(item => IsMesh(item.Record) ? meshes.Read(item, toProject) : [ReadItem(item, toProject)]).Take(MaxBodies);
         return walk.IsOver
             ? [.. bodies, Missing(ReasonCode.SectionNotCovered, string.Create(CultureInfo.InvariantCulture, $"more than {MaxBodies} bodies or {MaxSteps} nested references in one element"))]
             : [.. bodies];
@@ -104,6 +104,10 @@ internal sealed class BodyReader(
         return null;
     }
 
+    private static bool IsMesh(Part21Record body) => !body.IsDamaged && body.Keyword is
+        "IFCFACETEDBREP" or "IFCFACETEDBREPWITHVOIDS" or "IFCADVANCEDBREP" or "IFCADVANCEDBREPWITHVOIDS" or "IFCTRIANGULATEDFACESET"
+        or "IFCPOLYGONALFACESET" or "IFCFACEBASEDSURFACEMODEL" or "IFCSHELLBASEDSURFACEMODEL" or "IFCTRIANGULATEDIRREGULARNETWORK";
+
     private Finding<BarBody> ReadItem(BodyItem item, Transform3 toProject)
     {
         if (item.Record.IsDamaged) return Missing(ReasonCode.DamagedRecord, $"the record of {item.Called} is damaged");
@@ -117,9 +121,6 @@ internal sealed class BodyReader(
             "IFCSWEPTDISKSOLID" or "IFCSWEPTDISKSOLIDPOLYGONAL" => disks.Read(item, toProject),
             "IFCBLOCK" => primitives.Block(item),
             "IFCRIGHTCIRCULARCYLINDER" => primitives.Cylinder(item),
-            "IFCFACETEDBREP" or "IFCFACETEDBREPWITHVOIDS" or "IFCADVANCEDBREP" or "IFCADVANCEDBREPWITHVOIDS" or "IFCTRIANGULATEDFACESET"
-                or "IFCPOLYGONALFACESET" or "IFCFACEBASEDSURFACEMODEL" or "IFCSHELLBASEDSURFACEMODEL" or "IFCTRIANGULATEDIRREGULARNETWORK" =>
-                meshes.Read(item, toProject),
             "IFCMAPPEDITEM" => Missing(ReasonCode.DamagedRecord, $"the mapped body {item.Called} is damaged or nested too deep"),
             _ => Missing(ReasonCode.SectionNotCovered, $"the body {item.Called} is not a sweep of a section, a swept disk, a block or a cylinder"),
         };

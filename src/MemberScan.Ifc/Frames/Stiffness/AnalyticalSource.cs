@@ -1,6 +1,5 @@
 using MemberScan.Ifc.Materials;
 using MemberScan.Ifc.Sections;
-using MemberScan.Mechanics.Sections;
 using MemberScan.Model;
 using MemberScan.Model.Members;
 using MemberScan.Model.Verdicts;
