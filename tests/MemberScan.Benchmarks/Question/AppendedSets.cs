@@ -3,6 +3,7 @@ using System.Text.Unicode;
 using MemberScan.Foundation.Diagnostics;
 using MemberScan.Part21;
 using MemberScan.Part21.Edits;
+using MemberScan.Part21.Streaming;
 
 namespace MemberScan.Benchmarks.Question;
 

@@ -1,4 +1,5 @@
 using MemberScan.Part21;
+using MemberScan.Part21.Streaming;
 
 namespace MemberScan.Benchmarks.Question;
 

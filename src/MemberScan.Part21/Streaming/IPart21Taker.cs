@@ -1,4 +1,4 @@
-namespace MemberScan.Part21;
+namespace MemberScan.Part21.Streaming;
 
 /// <summary>Takes the wanted instances of a stretch of the file while the pass goes over them, so that they need not be read again.</summary>
 /// <remarks>
