@@ -1,5 +1,6 @@
 using System.Collections.Immutable;
 using MemberScan.Foundation.Diagnostics;
+using MemberScan.Part21.Containers;
 using MemberScan.Part21.Findings;
 using MemberScan.Part21.Index;
 using MemberScan.Part21.Reading;
@@ -10,7 +11,7 @@ namespace MemberScan.Part21;
 
 /// <summary>An exchange structure of ISO 10303-21: its records, nothing of them decoded before it is asked for.</summary>
 /// <remarks>
-/// <see cref="Read(ReadOnlyMemory{byte}, string, DiagnosticList)"/> holds the text and a row for each instance. <see cref="Open"/> leaves the text on
+/// <see cref="Read(ReadOnlyMemory{byte}, string, DiagnosticList)"/> holds the text and a row for each instance. <see cref="Read(ModelText, IReadOnlyCollection{string}, DiagnosticList)"/> may leave the text on
 /// disk: an instance is read when it is met, the keywords that will be asked for are named beforehand, and references to nothing are told when they
 /// are followed (<see cref="TryFollow"/>), not before. Immutable after reading; safe for several threads.
 /// </remarks>
@@ -73,6 +74,9 @@ public sealed class Part21File : IDisposable
     /// <summary>Highest instance number met, also among references to nothing and in text that was passed over; 0 if none.</summary>
     public ulong HighestId { get; }
 
+    /// <summary>Highest number that a reader of this file finds again; instances must not be numbered above it.</summary>
+    public ulong HighestPossibleId => _streamed is null ? long.MaxValue : uint.MaxValue - 1UL;
+
     /// <summary>Offset of the <c>E</c> of the last data section's <c>ENDSEC</c>; −1 when the text has none.</summary>
     public long InsertionOffset { get; }
 
@@ -113,14 +117,15 @@ public sealed class Part21File : IDisposable
     public static Part21File Read(ReadOnlyMemory<byte> bytes, string name, DiagnosticList diagnostics) =>
         Read(bytes, name, diagnostics, ShippedLimits);
 
-    /// <summary>Opens a model file, or the one model in an archive, and leaves its text where it is.</summary>
-    /// <param name="path">Path of the file; it must not change while it is open.</param>
-    /// <param name="wanted">Keywords in upper case that <see cref="RecordsOf"/> will be asked for.</param>
-    /// <param name="diagnostics">Receives findings with codes <c>P21-…</c>, also later when references are followed.</param>
-    /// <exception cref="InvalidDataException">As <see cref="Part21Index.Open"/>.</exception>
-    /// <exception cref="IOException">The file cannot be read.</exception>
-    public static Part21File Open(string path, IReadOnlyCollection<string> wanted, DiagnosticList diagnostics) =>
-        Over(Part21Index.Open(path, wanted, diagnostics), wanted, diagnostics);
+    /// <summary>Reads the structure of a model's text; where that stays on disk, it must stay open for as long as the file is used.</summary>
+    /// <param name="text">The text.</param>
+    /// <param name="wanted">Keywords in upper case that <see cref="RecordsOf(string)"/> will be asked for; matters only for a text on disk.</param>
+    /// <param name="diagnostics">Receives findings with codes <c>P21-…</c>, of a text on disk also later when references are followed.</param>
+    public static Part21File Read(ModelText text, IReadOnlyCollection<string> wanted, DiagnosticList diagnostics)
+    {
+        ArgumentNullException.ThrowIfNull(text);
+        return text.IsOnDisk ? Over(Part21Index.Over(text, wanted, diagnostics), wanted, diagnostics) : Read(text.Held, text.Name, diagnostics);
+    }
 
     /// <summary>Instances of a keyword in file order; the keyword upper-case, exact (no subtypes).</summary>
     /// <exception cref="ArgumentException">The text stays on disk and the keyword was not named beforehand.</exception>
@@ -128,6 +133,16 @@ public sealed class Part21File : IDisposable
     {
         ArgumentNullException.ThrowIfNull(keyword);
         return _streamed is null ? Walk(_instances!.RowsOf(keyword)) : Walk(_streamed.Index.OffsetsOf(keyword).ToArray());
+    }
+
+    /// <summary>Instances of several keywords, and others with them, in file order, each once.</summary>
+    /// <param name="keywords">As for <see cref="RecordsOf(string)"/>.</param>
+    /// <param name="others">Instances of this file.</param>
+    public IEnumerable<Part21Record> InFileOrder(IEnumerable<string> keywords, IEnumerable<Part21Record> others)
+    {
+        ArgumentNullException.ThrowIfNull(keywords);
+        ArgumentNullException.ThrowIfNull(others);
+        return keywords.Distinct(StringComparer.Ordinal).SelectMany(RecordsOf).Concat(others).DistinctBy(r => r.Place).OrderBy(r => r.Place);
     }
 
     /// <summary>Finds an instance by its number; the first one when a number is used twice.</summary>

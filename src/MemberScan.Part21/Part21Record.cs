@@ -14,6 +14,8 @@ public readonly record struct Part21Record
 
     internal Part21Record(Part21File file, long place) => (_file, _place) = (file, place);
 
+    internal long Place => _place;
+
     /// <summary>The number after '#'; 0 for the default value.</summary>
     public ulong Id => _file is null ? 0 : _file.TextOf(_place).Id;
 

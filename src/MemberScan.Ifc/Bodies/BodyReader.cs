@@ -36,14 +36,15 @@ internal sealed class BodyReader(
     /// <summary>All bodies of a product in body order, each read or with the reason why not; empty when it has none.</summary>
     /// <param name="representation">Reference to the product's shape.</param>
     /// <param name="toProject">From object to project coordinates; identity where unknown.</param>
-    public ImmutableArray<Finding<BarBody>> Read(Part21Value representation, Transform3 toProject)
+    /// <param name="withMeshes">Whether meshes are looked into; if not, they are told as such, which is quick.</param>
+    public ImmutableArray<Finding<BarBody>> Read(Part21Value representation, Transform3 toProject, bool withMeshes = true)
     {
         if (representation.IsEmpty || !instances.TryFollow(representation, out var shape)) return [];
 
         var walk = new Walk();
         foreach (var item in BodyItems(shape)) Flatten(item, Transform3.Identity, false, 0, walk);
 
-        var bodies = walk.Found.Take(MaxBodies).Select(item => ReadItem(item, toProject));
+        var bodies = walk.Found.Take(MaxBodies).Select(item => ReadItem(item, toProject, withMeshes));
         return walk.IsOver
             ? [.. bodies, Missing(ReasonCode.SectionNotCovered, string.Create(CultureInfo.InvariantCulture, $"more than {MaxBodies} bodies or {MaxSteps} nested references in one element"))]
             : [.. bodies];
@@ -104,7 +105,7 @@ internal sealed class BodyReader(
         return null;
     }
 
-    private Finding<BarBody> ReadItem(BodyItem item, Transform3 toProject)
+    private Finding<BarBody> ReadItem(BodyItem item, Transform3 toProject, bool withMeshes)
     {
         if (item.Record.IsDamaged) return Missing(ReasonCode.DamagedRecord, $"the record of {item.Called} is damaged");
 
@@ -119,7 +120,7 @@ internal sealed class BodyReader(
             "IFCRIGHTCIRCULARCYLINDER" => primitives.Cylinder(item),
             "IFCFACETEDBREP" or "IFCFACETEDBREPWITHVOIDS" or "IFCADVANCEDBREP" or "IFCADVANCEDBREPWITHVOIDS" or "IFCTRIANGULATEDFACESET"
                 or "IFCPOLYGONALFACESET" or "IFCFACEBASEDSURFACEMODEL" or "IFCSHELLBASEDSURFACEMODEL" or "IFCTRIANGULATEDIRREGULARNETWORK" =>
-                meshes.Read(item, toProject),
+                withMeshes ? meshes.Read(item, toProject) : Missing(ReasonCode.SectionNotParametric, $"the body {item.Called} is a mesh"),
             "IFCMAPPEDITEM" => Missing(ReasonCode.DamagedRecord, $"the mapped body {item.Called} is damaged or nested too deep"),
             _ => Missing(ReasonCode.SectionNotCovered, $"the body {item.Called} is not a sweep of a section, a swept disk, a block or a cylinder"),
         };
