@@ -36,19 +36,32 @@ internal sealed class BodyReader(
     /// <summary>All bodies of a product in body order, each read or with the reason why not; empty when it has none.</summary>
     /// <param name="representation">Reference to the product's shape.</param>
     /// <param name="toProject">From object to project coordinates; identity where unknown.</param>
-    /// <param name="withMeshes">Whether meshes are looked into; if not, they are told as such, which is quick.</param>
-    public ImmutableArray<Finding<BarBody>> Read(Part21Value representation, Transform3 toProject, bool withMeshes = true)
+    public ImmutableArray<Finding<BarBody>> Read(Part21Value representation, Transform3 toProject)
     {
         if (representation.IsEmpty || !instances.TryFollow(representation, out var shape)) return [];
 
         var walk = new Walk();
         foreach (var item in BodyItems(shape)) Flatten(item, Transform3.Identity, false, 0, walk);
 
-        var bodies = walk.Found.Take(MaxBodies).Select(item => ReadItem(item, toProject, withMeshes));
+        var bodies = walk.Found.Take(MaxBodies).Select(item => ReadItem(item, toProject));
         return walk.IsOver
             ? [.. bodies, Missing(ReasonCode.SectionNotCovered, string.Create(CultureInfo.InvariantCulture, $"more than {MaxBodies} bodies or {MaxSteps} nested references in one element"))]
             : [.. bodies];
     }
+
+    /// <summary>Whether all bodies of a product are meshes, or it has none; looks into none of them.</summary>
+    /// <param name="representation">Reference to the product's shape.</param>
+    public bool AreMeshes(Part21Value representation)
+    {
+        if (representation.IsEmpty || !instances.TryFollow(representation, out var shape)) return true;
+
+        var walk = new Walk();
+        foreach (var item in BodyItems(shape)) Flatten(item, Transform3.Identity, false, 0, walk);
+        return !walk.IsOver && walk.Found.TrueForAll(item => IsMesh(item.Record.Keyword));
+    }
+
+    private static bool IsMesh(string keyword) => keyword is "IFCFACETEDBREP" or "IFCFACETEDBREPWITHVOIDS" or "IFCADVANCEDBREP" or "IFCADVANCEDBREPWITHVOIDS"
+        or "IFCTRIANGULATEDFACESET" or "IFCPOLYGONALFACESET" or "IFCFACEBASEDSURFACEMODEL" or "IFCSHELLBASEDSURFACEMODEL" or "IFCTRIANGULATEDIRREGULARNETWORK";
 
     private IEnumerable<Part21Record> BodyItems(Part21Record shape)
     {
@@ -105,7 +118,7 @@ internal sealed class BodyReader(
         return null;
     }
 
-    private Finding<BarBody> ReadItem(BodyItem item, Transform3 toProject, bool withMeshes)
+    private Finding<BarBody> ReadItem(BodyItem item, Transform3 toProject)
     {
         if (item.Record.IsDamaged) return Missing(ReasonCode.DamagedRecord, $"the record of {item.Called} is damaged");
 
@@ -118,9 +131,7 @@ internal sealed class BodyReader(
             "IFCSWEPTDISKSOLID" or "IFCSWEPTDISKSOLIDPOLYGONAL" => disks.Read(item, toProject),
             "IFCBLOCK" => primitives.Block(item),
             "IFCRIGHTCIRCULARCYLINDER" => primitives.Cylinder(item),
-            "IFCFACETEDBREP" or "IFCFACETEDBREPWITHVOIDS" or "IFCADVANCEDBREP" or "IFCADVANCEDBREPWITHVOIDS" or "IFCTRIANGULATEDFACESET"
-                or "IFCPOLYGONALFACESET" or "IFCFACEBASEDSURFACEMODEL" or "IFCSHELLBASEDSURFACEMODEL" or "IFCTRIANGULATEDIRREGULARNETWORK" =>
-                withMeshes ? meshes.Read(item, toProject) : Missing(ReasonCode.SectionNotParametric, $"the body {item.Called} is a mesh"),
+            var keyword when IsMesh(keyword) => meshes.Read(item, toProject),
             "IFCMAPPEDITEM" => Missing(ReasonCode.DamagedRecord, $"the mapped body {item.Called} is damaged or nested too deep"),
             _ => Missing(ReasonCode.SectionNotCovered, $"the body {item.Called} is not a sweep of a section, a swept disk, a block or a cylinder"),
         };

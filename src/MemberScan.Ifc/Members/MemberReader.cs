@@ -72,12 +72,17 @@ internal sealed class MemberReader(
             return;
         }
 
+        // Most elements of a building are meshes of classes that count only with a bar: they are passed over without a look into the mesh.
+        var isAsked = isAlways || relations.AnalyticalOf(record.Id).Count > 0 || relations.ActivitiesOn(record.Id).Count > 0 || isNamed(element);
+        if (!isAsked && !recognisesMeshes && bodies.AreMeshes(record[6]))
+        {
+            PassOver(element.Class, NoBar);
+            return;
+        }
+
         var placed = placements.Placement(record[5]);
         var toProject = placed is Finding<Transform3>.Found found ? found.Value : Transform3.Identity;
-
-        // Most elements of a building are meshes of classes that count only with a bar: they are looked into only where that changes something.
-        var isAsked = isAlways || relations.AnalyticalOf(record.Id).Count > 0 || relations.ActivitiesOn(record.Id).Count > 0 || isNamed(element);
-        var read = record.IsDamaged ? [] : bodies.Read(record[6], toProject, withMeshes: isAsked || recognisesMeshes);
+        var read = record.IsDamaged ? [] : bodies.Read(record[6], toProject);
         var sweeps = read.OfType<Finding<BarBody>.Found>().ToList();
 
         // Beside a bar, short pieces such as base plates are no items.
@@ -88,7 +93,6 @@ internal sealed class MemberReader(
             return;
         }
 
-        if (!isAsked && !recognisesMeshes) read = bodies.Read(record[6], toProject);
         var key = KeyOf(element, record);
         if (bars.Count >= 2)
         {
