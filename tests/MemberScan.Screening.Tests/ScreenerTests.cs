@@ -4,6 +4,7 @@ using MemberScan.Inputs.SettingsFiles;
 using MemberScan.Mechanics.Forces;
 using MemberScan.Mechanics.Sections;
 using MemberScan.Model.Verdicts;
+using MemberScan.Part21.Containers;
 using MemberScan.SampleModels.HandCalculation;
 using MemberScan.SampleModels.Scenario;
 using MemberScan.Screening.Record;
@@ -203,8 +204,7 @@ public sealed class ScreenerTests
 
     private static ScreeningRequest Request(SampleModel sample, bool withTable) => new()
     {
-        ModelName = sample.Name + ".ifc",
-        ModelBytes = sample.Model.AsMemory(),
+        Model = ModelText.Of(sample.Model.AsMemory(), sample.Name + ".ifc"),
         Settings = Settings.Default,
         Tables = withTable && !sample.ForcesTable.IsEmpty ? [ForcesTable.Read(sample.ForcesTable.AsMemory(), sample.Name + ".forces.csv", new DiagnosticList())!] : [],
         Timestamp = "2026-03-04T05:06:07Z",

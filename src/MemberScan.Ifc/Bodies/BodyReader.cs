@@ -49,6 +49,17 @@ internal sealed class BodyReader(
             : [.. bodies];
     }
 
+    /// <summary>Whether all bodies of a product are meshes, or it has none; looks into none of them.</summary>
+    /// <param name="representation">Reference to the product's shape.</param>
+    public bool AreMeshes(Part21Value representation)
+    {
+        if (representation.IsEmpty || !instances.TryFollow(representation, out var shape)) return true;
+
+        var walk = new Walk();
+        foreach (var item in BodyItems(shape)) Flatten(item, Transform3.Identity, false, 0, walk);
+        return !walk.IsOver && walk.Found.TrueForAll(item => IsMesh(item.Record));
+    }
+
     private IEnumerable<Part21Record> BodyItems(Part21Record shape)
     {
         var representations = instances.FollowAll(shape[2]).ToList();

@@ -19,7 +19,7 @@ namespace MemberScan.Ifc.Members;
 /// <summary>Finds the candidates of a model and reads each: section, length, axes, material, or the reason why not.</summary>
 internal sealed class MemberReader(
     Instances instances, Relations relations, PlacementReader placements, BodyReader bodies, ProfileReader profiles, MaterialReader materials,
-    AnalyticalMemberReader analytical, SchemaVersion schema, CandidateRules rules, RoleGuess roles, DiagnosticList diagnostics)
+    AnalyticalMemberReader analytical, SchemaVersion schema, CandidateRules rules, bool recognisesMeshes, RoleGuess roles, DiagnosticList diagnostics)
 {
     private const string NoBar = "no bar-like body of a covered section, and no forces";
 
@@ -35,13 +35,9 @@ internal sealed class MemberReader(
         if (always.Contains("IFCSTRUCTURALCURVEMEMBER")) always.Add("IFCSTRUCTURALCURVEMEMBERVARYING");
 
         var members = ImmutableArray.CreateBuilder<Member>();
-        foreach (var record in instances.File.Records)
+        foreach (var record in instances.File.InFileOrder(always.Concat(conditional), PartsOfRailings()))
         {
-            var isPartOfRailing = relations.WholeOf(record.Id) is var whole and not 0
-                && instances.File.TryFind(whole, out var parent) && parent.Keyword == "IFCRAILING";
-            var isAlways = always.Contains(record.Keyword) || isPartOfRailing;
-            if (!isAlways && !conditional.Contains(record.Keyword)) continue;
-
+            var isAlways = always.Contains(record.Keyword) || IsPartOfRailing(record);
             if (record.IsDuplicate)
                 PassOver(ClassNames.Spell(record.Keyword), "its instance number stands further up already; the first counts");
             else if (record.Keyword is "IFCSTRUCTURALCURVEMEMBER" or "IFCSTRUCTURALCURVEMEMBERVARYING")
@@ -55,12 +51,32 @@ internal sealed class MemberReader(
         return new MemberCatalog(members.ToImmutable(), [.. passed]);
     }
 
+    // Whatever their class, they are candidates.
+    private IEnumerable<Part21Record> PartsOfRailings()
+    {
+        foreach (var railing in instances.File.RecordsOf("IFCRAILING"))
+            foreach (var id in relations.PartsOf(railing.Id))
+                if (instances.File.TryFind(id, out var part))
+                    yield return part;
+    }
+
+    private bool IsPartOfRailing(Part21Record record) =>
+        relations.WholeOf(record.Id) is var whole and not 0 && instances.File.TryFind(whole, out var parent) && parent.Keyword == "IFCRAILING";
+
     private void AddPhysical(Part21Record record, bool isAlways, Func<ElementIdentity, bool> isNamed, ImmutableArray<Member>.Builder members)
     {
         var element = Identity(record);
         if (IsItsParts(record))
         {
             PassOver(element.Class, "its parts are the candidates");
+            return;
+        }
+
+        // Most elements of a building are meshes of classes that count only with a bar: they are passed over without a look into the mesh.
+        var isAsked = isAlways || relations.AnalyticalOf(record.Id).Count > 0 || relations.ActivitiesOn(record.Id).Count > 0 || isNamed(element);
+        if (!isAsked && !recognisesMeshes && bodies.AreMeshes(record[6]))
+        {
+            PassOver(element.Class, NoBar);
             return;
         }
 
@@ -71,9 +87,7 @@ internal sealed class MemberReader(
 
         // Beside a bar, short pieces such as base plates are no items.
         var bars = sweeps.FindAll(s => s.Value.IsBarLike) is { Count: > 0 } longer ? longer : sweeps;
-        var isCandidate = isAlways || bars.Exists(b => b.Value.IsBarLike) || read.Any(IsUnreadSweep)
-            || relations.AnalyticalOf(record.Id).Count > 0 || relations.ActivitiesOn(record.Id).Count > 0 || isNamed(element);
-        if (!isCandidate)
+        if (!isAsked && !bars.Exists(b => b.Value.IsBarLike) && !read.Any(IsUnreadSweep))
         {
             PassOver(element.Class, NoBar);
             return;
