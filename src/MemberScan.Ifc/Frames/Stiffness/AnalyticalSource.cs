@@ -1,5 +1,6 @@
 using MemberScan.Ifc.Materials;
 using MemberScan.Ifc.Sections;
+using MemberScan.Mechanics.Sections;
 using MemberScan.Model;
 using MemberScan.Model.Members;
 using MemberScan.Model.Verdicts;
