@@ -47,9 +47,11 @@ public sealed class ModelUnits
     internal static ModelUnits Read(Instances instances, UnitReader reader, ReadingRules rules, DiagnosticList diagnostics)
     {
         var units = new Dictionary<string, ModelUnit>(StringComparer.Ordinal);
-        if (Assignment(instances, diagnostics) is { } assignment)
-            foreach (var unit in instances.FollowAll(assignment[0]))
+        var assignments = Assignments(instances, diagnostics);
+        if (assignments.Count > 0)
+            foreach (var unit in instances.FollowAll(assignments[0][0]))
                 Add(units, unit, reader, diagnostics);
+        foreach (var further in assignments.Skip(1)) LeaveOutOther(units, further, instances, reader, diagnostics);
 
         foreach (var (type, factor) in rules.MissingUnits.OrderBy(pair => pair.Key, StringComparer.Ordinal))
         {
@@ -62,17 +64,33 @@ public sealed class ModelUnits
         return new ModelUnits(units);
     }
 
-    private static Part21Record? Assignment(Instances instances, DiagnosticList diagnostics)
+    /// <summary>The assignments of the projects, the first one first; a single assignment counts also where no project names it.</summary>
+    private static List<Part21Record> Assignments(Instances instances, DiagnosticList diagnostics)
     {
+        var named = new List<Part21Record>();
         foreach (var project in instances.File.RecordsOf("IFCPROJECT"))
-            if (instances.TryFollow(project[8], out var assignment))
-                return assignment;
+            if (instances.TryFollow(project[8], out var assignment) && !named.Exists(a => a.Id == assignment.Id))
+                named.Add(assignment);
+        if (named.Count > 0) return named;
 
         var all = instances.File.RecordsOf("IFCUNITASSIGNMENT").Take(2).ToList();
-        if (all.Count == 1) return all[0];
+        if (all.Count == 1) return all;
 
         diagnostics.Add("IFC-0003", Severity.Warning, "The project names no units; values whose unit is missing are not used.");
-        return null;
+        return [];
+    }
+
+    // Which project a value belongs to is not followed up: a unit that two projects name differently is no unit.
+    private static void LeaveOutOther(Dictionary<string, ModelUnit> units, Part21Record assignment, Instances instances, UnitReader reader, DiagnosticList diagnostics)
+    {
+        foreach (var unit in instances.FollowAll(assignment[0]))
+        {
+            var type = Instances.Literal(unit[1]);
+            if (!units.TryGetValue(type, out var first) || first.Factor is not { } factor || (reader.Factor(unit) is { } other && Math.Abs(other - factor) <= 1e-9 * factor)) continue;
+
+            diagnostics.Add("IFC-0007", Severity.Warning, $"Two projects in the file name different units for {type} ({first.Text}, {reader.Words(unit)}); values in this unit are not used. Export each project to a file of its own.", unit.Span);
+            units[type] = first with { Text = $"{first.Text} or {reader.Words(unit)}", Factor = null };
+        }
     }
 
     private static void Add(Dictionary<string, ModelUnit> units, Part21Record unit, UnitReader reader, DiagnosticList diagnostics)

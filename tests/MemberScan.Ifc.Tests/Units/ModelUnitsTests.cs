@@ -156,6 +156,18 @@ public sealed class ModelUnitsTests
     }
 
     [Fact]
+    public void A_unit_that_two_projects_name_differently_is_not_used_and_told()
+    {
+        var reading = Read("#3=IFCSIUNIT(*,.LENGTHUNIT.,.MILLI.,.METRE.);", "#4=IFCSIUNIT(*,.FORCEUNIT.,$,.NEWTON.);",
+            "#900=IFCPROJECT('2Landing0000000000900',$,'other',$,$,$,$,$,#901);", "#901=IFCUNITASSIGNMENT((#902,#903));",
+            "#902=IFCSIUNIT(*,.LENGTHUNIT.,$,.METRE.);", "#903=IFCSIUNIT(*,.FORCEUNIT.,$,.NEWTON.);");
+
+        Assert.Null(reading.Model.Units.Length);
+        Assert.Equal(1, reading.Model.Units.FactorOf("FORCEUNIT"));
+        reading.AssertTold("IFC-0007", Severity.Warning, "LENGTHUNIT");
+    }
+
+    [Fact]
     public void A_project_without_units_is_told_and_its_members_miss_their_unit()
     {
         var reading = Reading.Of(Reading.Text(Release.Ifc4, "#1=IFCPROJECT('0YvctVUKr0kugbFTf53O9L',$,'P',$,$,$,$,$,$);",
