@@ -46,6 +46,7 @@ need chromium chromium
 need node nodejs
 need npm npm
 need g++ g++
+need_file /usr/sbin/nats-server nats-server
 need_file /usr/include/ifcpp/reader/ReaderSTEP.h libifcplusplus-dev
 need_file /usr/include/boost/unordered_map.hpp libboost-dev
 

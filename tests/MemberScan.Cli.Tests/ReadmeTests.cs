@@ -50,11 +50,11 @@ public sealed partial class ReadmeTests
     {
         var text = await File.ReadAllTextAsync(Path.Combine(Memberscan.Root, "README.md"), TestContext.Current.CancellationToken);
         var help = "";
-        foreach (var command in new[] { "screen", "section", "members", "frame", "compare", "restore" }) help += (await Memberscan.Run(command, "--help")).Output;
+        foreach (var command in new[] { "screen", "section", "members", "frame", "compare", "restore", "enqueue", "work", "manual" }) help += (await Memberscan.Run(command, "--help")).Output;
 
         var options = LongOption().Matches(help).Select(m => m.Value).Except(["--help", "--version"]).Distinct(StringComparer.Ordinal).ToArray();
 
-        Assert.Equal(31, options.Length);
+        Assert.Equal(36, options.Length);
         Assert.All(options, option => Assert.Contains(option, text, StringComparison.Ordinal));
     }
 

@@ -15,12 +15,7 @@ internal static class ScreenCommand
             Description = "The model: .ifc, .ifczip or .gz (IFC2X3, IFC4, IFC4X3). Also several of them, folders (with all below), and patterns with *, ? and **.",
             Arity = ArgumentArity.OneOrMore,
         };
-        model.Validators.Add(result =>
-        {
-            // An argument that takes any number of names would swallow a misspelt option.
-            foreach (var token in result.Tokens)
-                if (token.Value.StartsWith('-') && !File.Exists(token.Value)) result.AddError($"Unrecognized option '{token.Value}'.");
-        });
+        RefuseOptions(model);
         var forces = new Option<string[]>("--forces") { Description = "A forces table (CSV or .xlsx, units in its header); may be given several times.", HelpName = "FILE" };
         var beside = new Option<bool>("--forces-beside") { Description = "Take the forces table beside each model: NAME.forces.csv or NAME.forces.xlsx for NAME.ifc." };
         var settings = new Option<string?>("--settings") { Description = "A settings file (JSON with comments).", HelpName = "FILE" };
@@ -66,6 +61,13 @@ internal static class ScreenCommand
         });
         return command;
     }
+
+    /// <summary>Lets no misspelt option pass for a model: an argument that takes any number of names would swallow it.</summary>
+    public static void RefuseOptions(Argument<string[]> models) => models.Validators.Add(result =>
+    {
+        foreach (var token in result.Tokens)
+            if (token.Value.StartsWith('-') && !File.Exists(token.Value)) result.AddError($"Unrecognized option '{token.Value}'.");
+    });
 
     private static bool IsOne(ManyRun.Options options) =>
         options is { Models.Count: 1, Resume: false, ForcesBeside: false, Workers: null } && !ModelList.IsSeveral(options.Models[0]);

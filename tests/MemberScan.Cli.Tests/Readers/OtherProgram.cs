@@ -7,11 +7,11 @@ namespace MemberScan.Cli.Tests.Readers;
 internal static class OtherProgram
 {
     /// <summary>Runs a script of <c>tests/web-ifc</c>; skips, saying so, where Node or its packages are absent.</summary>
-    public static async Task<Memberscan.Ran> Node(string package, string script, string path)
+    public static async Task<Memberscan.Ran> Node(string package, string script, params string[] arguments)
     {
         var folder = Path.Combine(Memberscan.Root, "tests", "web-ifc");
         Assert.SkipUnless(Directory.Exists(Path.Combine(folder, "node_modules", package)), $"{package} is not installed: run npm ci in tests/web-ifc");
-        return await Run("node", Path.Combine(folder, script), path) ?? Skipped("node is not installed");
+        return await Run("node", [Path.Combine(folder, script), .. arguments]) ?? Skipped("node is not installed");
     }
 
     /// <summary>Runs the program of <c>tests/ifcplusplus</c>; skips, saying so, where it is not built.</summary>
