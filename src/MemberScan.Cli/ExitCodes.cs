@@ -29,6 +29,17 @@ internal static class ExitCodes
     /// <summary>Interrupted.</summary>
     public const int Interrupted = 130;
 
+    // From the one that weighs most to the one that weighs least.
+    private static readonly int[] s_byWeight = [Internal, InputOutput, Interrupted, Usage, NotReadToEnd, Overstressed, NotChecked, WithinLimit];
+
+    /// <summary>The code that weighs most: 70, 74, 130, 64, 3, 1, 2, 0.</summary>
+    /// <exception cref="ArgumentException">There is none, or one that the program does not return.</exception>
+    public static int Worst(IEnumerable<int> codes)
+    {
+        var places = codes.Select(code => Array.IndexOf(s_byWeight, code)).ToList();
+        return places.Count > 0 && places.TrueForAll(p => p >= 0) ? s_byWeight[places.Min()] : throw new ArgumentException("none of the codes of this program", nameof(codes));
+    }
+
     /// <summary>The code of a finished screening; damage that was passed over is never 0.</summary>
     public static int Of(ScreeningRecord record) =>
         !record.Model.ReadToEnd ? NotReadToEnd

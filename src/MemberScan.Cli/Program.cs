@@ -3,7 +3,9 @@ using System.Reflection;
 using System.Text;
 using MemberScan.Cli.Comparing;
 using MemberScan.Cli.Frames;
+using MemberScan.Cli.Manual;
 using MemberScan.Cli.Members;
+using MemberScan.Cli.Queue;
 using MemberScan.Cli.Restoring;
 using MemberScan.Cli.Screening;
 using MemberScan.Cli.Sections;
@@ -22,13 +24,21 @@ internal static class Program
     /// <summary>How long an interrupted run may take to its next stopping place, so that no half-written files stay.</summary>
     private static readonly TimeSpan s_timeToStop = TimeSpan.FromSeconds(10);
 
+    /// <summary>The commands.</summary>
+    public static RootCommand Root()
+    {
+        var root = new RootCommand("Screens the secondary steel of building models for combined stress. A screening aid for qualified engineers; not a design, not a certificate.")
+        {
+            ScreenCommand.Build(), MembersCommand.Build(), SectionCommand.Build(), FrameCommand.Build(), CompareCommand.Build(), RestoreCommand.Build(), EnqueueCommand.Build(), WorkCommand.Build(),
+        };
+        root.Subcommands.Add(ManualCommand.Build(root));
+        return root;
+    }
+
     private static async Task<int> Main(string[] args)
     {
         Console.OutputEncoding = new UTF8Encoding(encoderShouldEmitUTF8Identifier: false);
-        var root = new RootCommand("Screens the secondary steel of building models for combined stress. A screening aid for qualified engineers; not a design, not a certificate.")
-        {
-            ScreenCommand.Build(), MembersCommand.Build(), SectionCommand.Build(), FrameCommand.Build(), CompareCommand.Build(), RestoreCommand.Build(),
-        };
+        var root = Root();
         var parsed = root.Parse(args);
         if (parsed.Errors.Count > 0 && parsed.Action is not (System.CommandLine.Help.HelpAction or null) && !args.Contains("--help"))
         {

@@ -30,6 +30,24 @@ public sealed class ExitCodesTests
         Assert.StartsWith("posts.ifc: " + counts, ran.Output, StringComparison.Ordinal);
     }
 
+    [Theory]
+    [InlineData(0, 0, 0)]
+    [InlineData(2, 0, 2)]
+    [InlineData(1, 2, 1, 0)]
+    [InlineData(3, 1, 3)]
+    [InlineData(64, 64, 3, 1)]
+    [InlineData(130, 64, 130)]
+    [InlineData(74, 130, 74)]
+    [InlineData(70, 74, 70, 0)]
+    public void Of_several_runs_the_code_that_weighs_most_counts(int worst, params int[] codes) => Assert.Equal(worst, ExitCodes.Worst(codes));
+
+    [Fact]
+    public void A_code_that_the_program_does_not_return_is_no_code()
+    {
+        Assert.Throws<ArgumentException>(() => ExitCodes.Worst([]));
+        Assert.Throws<ArgumentException>(() => ExitCodes.Worst([0, 5]));
+    }
+
     [Fact]
     public async Task A_model_without_candidates_ends_with_2()
     {
@@ -104,7 +122,9 @@ public sealed class ExitCodesTests
     [InlineData("", "Required command")]
     [InlineData("scren", "'scren'")]
     [InlineData("screen", "'MODEL'")]
-    [InlineData("screen a.ifc b.ifc", "'b.ifc'")]
+    [InlineData("screen a.ifc b.ifc --fast", "'--fast'")]
+    [InlineData("screen a.ifc --workers many", "'many'")]
+    [InlineData("members a.ifc b.ifc", "'b.ifc'")]
     [InlineData("screen a.ifc --kind both", "'both'")]
     [InlineData("screen a.ifc --out", "'--out'")]
     [InlineData("screen a.ifc --fast", "'--fast'")]

@@ -51,12 +51,12 @@ internal static class Posts
     }
 
     /// <summary>A model of one post of a tube with a wall [m], whose GlobalId derives from a key.</summary>
-    public static byte[] One(double wall, string key = "P-1", string name = "Gangway post")
+    public static byte[] One(double wall, string key = "P-1", string name = "Gangway post", string grade = "S235JR")
     {
         var writer = new ModelWriter(SchemaVersion.Ifc4, ModelUnits.MillimetreNewton, "posts");
         var shape = writer.Bodies.Shape("SweptSolid", writer.Bodies.Extrusion(writer.Profiles.Of(new Tube(24.15e-3, wall)), 1));
         var post = writer.Element("IFCMEMBER", name, writer.LocalPlacement(Transform3.Identity), shape, new ElementOptions { Key = key, Tag = "P-1" });
-        writer.Associate(writer.Materials.Material("S235JR"), post);
+        writer.Associate(writer.Materials.Material(grade), post);
         return writer.Build();
     }
 

@@ -1,3 +1,4 @@
+using System.Security.Cryptography;
 using MemberScan.Part21;
 using MemberScan.Part21.Containers;
 
@@ -16,6 +17,13 @@ internal static class InputFile
             throw new Failure(ExitCodes.InputOutput, $"'{Path.GetFileName(path)}' is larger than {MaxBytes} bytes; split it.");
 
         return File.ReadAllBytes(path);
+    });
+
+    /// <summary>SHA-256 of a file as it lies on the disk, in hexadecimal.</summary>
+    public static string Sha256(string path) => Guard(path, () =>
+    {
+        using var stream = new FileStream(path, FileMode.Open, FileAccess.Read, FileShare.Read, 1 << 20, FileOptions.SequentialScan);
+        return Convert.ToHexStringLower(SHA256.HashData(stream));
     });
 
     /// <summary>The text of a model, out of its container, with a note about the container.</summary>

@@ -1,3 +1,5 @@
+using System.Security.Cryptography;
+
 namespace MemberScan.Cli.Files;
 
 /// <summary>Files that appear together, whole or not at all: written beside their targets, flushed, then renamed.</summary>
@@ -7,6 +9,16 @@ internal sealed class OutputSet : IDisposable
     private const string EarlierEnding = ".memberscan-earlier";
 
     private readonly List<string> _targets = [];
+
+    /// <summary>The files added so far.</summary>
+    public IReadOnlyList<string> Targets => _targets;
+
+    /// <summary>SHA-256 of a file that was added, as it will stand under the target's name, in hexadecimal.</summary>
+    public static string Sha256OfAdded(string target)
+    {
+        using var stream = File.OpenRead(target + PartEnding);
+        return Convert.ToHexStringLower(SHA256.HashData(stream));
+    }
 
     /// <summary>Writes a file beside its target; nothing shows under the target's name yet.</summary>
     /// <exception cref="IOException">The folder or the disk does not take it.</exception>

@@ -10,10 +10,15 @@ namespace MemberScan.Cli.Screening;
 internal sealed class FindingLog : IDisposable
 {
     private readonly Logger _logger;
+    private readonly string _prefix;
     private int _written;
 
     /// <summary>A log of warnings and errors; of everything when verbose.</summary>
-    public FindingLog(bool verbose) => _logger = new LoggerConfiguration()
+    /// <param name="verbose">Whether notes are written too.</param>
+    /// <param name="about">What the findings are about, where several runs write side by side; empty for one.</param>
+    public FindingLog(bool verbose, string about = "") => (_prefix, _logger) = (about.Length > 0 ? about + ": " : "", Logger(verbose));
+
+    private static Logger Logger(bool verbose) => new LoggerConfiguration()
         .MinimumLevel.Is(verbose ? LogEventLevel.Verbose : LogEventLevel.Warning)
         .WriteTo.Console(
             outputTemplate: "{Level:w}: {Message:l}{NewLine}", standardErrorFromLevel: LogEventLevel.Verbose,
@@ -30,7 +35,7 @@ internal sealed class FindingLog : IDisposable
             var place = finding.Span is { } span ? $" [{span}]" : "";
             var count = diagnostics.CountOf(finding);
             var times = count > 1 ? string.Create(CultureInfo.InvariantCulture, $" ({count} times)") : "";
-            _logger.Write(level, "{Code:l} {Message:l}{Place:l}{Times:l}", finding.Code, finding.Message, place, times);
+            _logger.Write(level, "{About:l}{Code:l} {Message:l}{Place:l}{Times:l}", _prefix, finding.Code, finding.Message, place, times);
         }
     }
 

@@ -8,6 +8,7 @@ using MemberScan.Inputs.SettingsFiles;
 using MemberScan.Model.Forces;
 using MemberScan.Reporting;
 using MemberScan.Screening;
+using MemberScan.Screening.Record;
 
 namespace MemberScan.Cli.Screening;
 
@@ -29,7 +30,19 @@ internal static class ScreenRun
 
         /// <summary>Further outputs that were asked for.</summary>
         public FurtherOutputs Further { get; init; } = FurtherOutputs.None;
+
+        /// <summary>All files that the run reads.</summary>
+        public IReadOnlyList<string> Inputs => [.. NamedInputs.Select(i => i.Path)];
+
+        /// <summary>All files that the run reads, each with what it is for.</summary>
+        public IEnumerable<(string Name, string Path)> NamedInputs =>
+            new[] { ("model", Model) }.Concat(Forces.Select(f => ("forces", f))).Concat(new[] { ("settings", Settings), ("decisions", Decisions), ("decided-on", DecidedOn) }.Where(i => i.Item2 is not null).Select(i => (i.Item1, i.Item2!)));
     }
+
+    /// <summary>A finished run: its outputs are in place.</summary>
+    /// <param name="Record">The screening.</param>
+    /// <param name="ModelWritten">Whether there is a checked model.</param>
+    public sealed record Done(ScreeningRecord Record, bool ModelWritten);
 
     /// <summary>Runs and returns the exit code.</summary>
     public static int Execute(Options options, CancellationToken cancellation)
@@ -38,13 +51,32 @@ internal static class ScreenRun
         if (options.Output is { } given && string.IsNullOrWhiteSpace(given))
             throw new Failure(ExitCodes.Usage, "The path after --out is empty; give a folder.");
 
+        if (string.IsNullOrWhiteSpace(options.Model)) throw new Failure(ExitCodes.Usage, "A path is empty; give the model a name.");
+
+        var names = OutputNames.For(options.Model, options.Output);
+        var done = Run(options, names, log, ProgressDisplay.Start, (_, _) => { }, cancellation);
+        Summary.Print(done.Record, names, done.ModelWritten);
+        if (options.SetTemplate && done.Record.Model.ReadAs == "IFC2X3") Console.Out.WriteLine("no set template is written: IFC2X3 knows none");
+        foreach (var path in options.Further.Written(done.Record)) Console.Out.WriteLine($"wrote {path}");
+        foreach (var path in options.Further.NotWritten(done.Record)) Console.Out.WriteLine($"not written: {path}; nothing that was missing can be said in its format, see the list in .csv or .html");
+        return ExitCodes.Of(done.Record);
+    }
+
+    /// <summary>Screens one model and puts its outputs in place; prints nothing but findings.</summary>
+    /// <param name="options">What was asked for.</param>
+    /// <param name="names">Where the outputs go.</param>
+    /// <param name="log">Takes the findings.</param>
+    /// <param name="progress">Starts a display of how far the run is; null for none.</param>
+    /// <param name="more">Adds further files, which appear after all others.</param>
+    /// <param name="cancellation">Stops the run.</param>
+    /// <exception cref="Failure">The run cannot be made; nothing was written.</exception>
+    public static Done Run(Options options, OutputNames names, FindingLog log, Func<ProgressDisplay>? progress, Action<OutputSet, ScreeningRecord> more, CancellationToken cancellation)
+    {
         var diagnostics = new DiagnosticList();
         using var read = RunInputs.Read(options.Model, options.Forces, options.Settings, diagnostics, log.Write);
-        var names = OutputNames.For(options.Model, options.Output);
-        string[] inputs = [options.Model, .. options.Forces, .. new[] { options.Settings, options.Decisions, options.DecidedOn }.OfType<string>()];
-        if (names.Clashes(inputs).FirstOrDefault() is { } clash)
+        if (names.Clashes(options.Inputs).FirstOrDefault() is { } clash)
             throw new Failure(ExitCodes.Usage, $"The output '{clash}' would be an input of this run; give another folder with --out DIR.");
-        OutputNames.RefuseClashes(options.Further.Paths, [.. inputs, names.CheckedModel, names.Report, names.MembersTable, names.RunRecord]);
+        OutputNames.RefuseClashes(options.Further.Paths, [.. options.Inputs, names.CheckedModel, names.Report, names.MembersTable, names.RunRecord]);
         options.Further.RefuseUnknown();
 
         var decisions = Decisions(options, diagnostics, log);
@@ -63,17 +95,29 @@ internal static class ScreenRun
             Version = Program.Version,
         };
         ScreeningOutcome? outcome;
-        using (var progress = ProgressDisplay.Start()) outcome = Screener.Run(request, diagnostics, progress, cancellation);
+        using (var display = progress?.Invoke()) outcome = Screener.Run(request, diagnostics, display, cancellation);
         log.Write(diagnostics);
         if (outcome is null) throw new Failure(ExitCodes.Usage, "The forces table does not fit the model; nothing was written.");
 
         cancellation.ThrowIfCancellationRequested();
-        WriteOutputs(options, names, outcome);
-        Summary.Print(outcome.Record, names, outcome.CanWriteModel);
-        if (options.SetTemplate && outcome.Record.Model.ReadAs == "IFC2X3") Console.Out.WriteLine("no set template is written: IFC2X3 knows none");
-        foreach (var path in options.Further.Written(outcome.Record)) Console.Out.WriteLine($"wrote {path}");
-        foreach (var path in options.Further.NotWritten(outcome.Record)) Console.Out.WriteLine($"not written: {path}; nothing that was missing can be said in its format, see the list in .csv or .html");
-        return ExitCodes.Of(outcome.Record);
+        WriteOutputs(options, names, outcome, more);
+        return new Done(outcome.Record, outcome.CanWriteModel);
+    }
+
+    /// <summary>Refuses what would be wrong for every model of a run over several: the time, the settings, the folder.</summary>
+    /// <exception cref="Failure">Something is.</exception>
+    public static void RefuseWrong(Options options)
+    {
+        _ = Time(options);
+        if (options.Output is { } given && string.IsNullOrWhiteSpace(given)) throw new Failure(ExitCodes.Usage, "The path after --out is empty; give a folder.");
+        if (options.Settings is not { } settings) return;
+
+        using var log = new FindingLog(options.Verbose);
+        var diagnostics = new DiagnosticList();
+        if (SettingsFile.Read(InputFile.Read(settings), Path.GetFileName(settings), diagnostics) is not null) return;
+
+        log.Write(diagnostics);
+        throw new Failure(ExitCodes.Usage, "The settings file is wrong; nothing was read further.");
     }
 
     private static ImmutableArray<ReviewDecision> Decisions(Options options, DiagnosticList diagnostics, FindingLog log)
@@ -105,7 +149,7 @@ internal static class ScreenRun
         throw new Failure(ExitCodes.Usage, $"'{given}' is no time; write it as 2026-01-31T10:00:00Z.");
     }
 
-    private static void WriteOutputs(Options options, OutputNames names, ScreeningOutcome outcome)
+    private static void WriteOutputs(Options options, OutputNames names, ScreeningOutcome outcome, Action<OutputSet, ScreeningRecord> more)
     {
         try
         {
@@ -118,6 +162,7 @@ internal static class ScreenRun
             files.Add(names.MembersTable, MembersTable.Write(outcome.Record));
             files.Add(names.RunRecord, RunRecord.Write(outcome.Record));
             options.Further.AddTo(files, outcome.Record);
+            more(files, outcome.Record);
             files.Commit([outcome.CanWriteModel ? null : names.CheckedModel, .. options.Further.NotWritten(outcome.Record)]);
         }
         catch (Exception e) when (e is IOException or UnauthorizedAccessException)

@@ -8,6 +8,9 @@ namespace MemberScan.Reporting.Pictures;
 /// <param name="Most">Its greatest corner.</param>
 public sealed record Box(Vector3 Least, Vector3 Most)
 {
+    /// <summary>Least side of a room [m]: a row of members lies in a plane, and from within that plane each hides the next.</summary>
+    public const double LeastSide = 3;
+
     /// <summary>Its centre.</summary>
     public Vector3 Centre => 0.5 * (Least + Most);
 
@@ -23,6 +26,23 @@ public sealed record Box(Vector3 Least, Vector3 Most)
             box = (box ?? new Box(start, start)).With(start).With(end);
         return box;
     }
+
+    /// <summary>The box in which a person or a camera can stand: sides thinner than <see cref="LeastSide"/> are widened to it, about their middle.</summary>
+    public Box AsRoom()
+    {
+        var (x, y, z) = (Side(Least.X, Most.X), Side(Least.Y, Most.Y), Side(Least.Z, Most.Z));
+        return new Box(new Vector3(x.Least, y.Least, z.Least), new Vector3(x.Most, y.Most, z.Most));
+
+        static (double Least, double Most) Side(double least, double most) =>
+            most - least >= LeastSide ? (least, most) : (0.5 * (least + most - LeastSide), 0.5 * (least + most + LeastSide));
+    }
+
+    /// <summary>Whether a point lies in it or on its faces.</summary>
+    public bool Contains(Vector3 point) => Nearest(point) == point;
+
+    /// <summary>The point of the box that is nearest to another.</summary>
+    public Vector3 Nearest(Vector3 point) => new(
+        Math.Clamp(point.X, Least.X, Most.X), Math.Clamp(point.Y, Least.Y, Most.Y), Math.Clamp(point.Z, Least.Z, Most.Z));
 
     private Box With(Vector3 p) => new(
         new Vector3(Math.Min(Least.X, p.X), Math.Min(Least.Y, p.Y), Math.Min(Least.Z, p.Z)),

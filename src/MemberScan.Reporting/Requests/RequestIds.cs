@@ -9,19 +9,14 @@ namespace MemberScan.Reporting.Requests;
 
 /// <summary>The information request as an Information Delivery Specification (IDS 1.0): what it can express of what was missing, for exactly the members that lack it.</summary>
 /// <remarks>
-/// A missing strength becomes a demand for a material. A missing section becomes a demand for a text <c>Section</c> in a set <c>MemberScan_Input</c>, since the
-/// format knows no profiles. What it cannot express is told in the description and stands in the list.
+/// A missing strength becomes a demand for a material. The format knows neither profiles nor bodies nor forces, and a demand for a text that the reader of the
+/// next model does not take would be an empty promise: such gaps are told in the description and stand in the list.
 /// </remarks>
 public static class RequestIds
 {
-    /// <summary>Set that a modeler answers in.</summary>
-    public const string InputSet = "MemberScan_Input";
-
     private const string Namespace = "http://standards.buildingsmart.org/IDS", SchemaNamespace = "http://www.w3.org/2001/XMLSchema", InstanceNamespace = "http://www.w3.org/2001/XMLSchema-instance";
 
     private static readonly ReasonCode[] s_material = [ReasonCode.NoStrength, ReasonCode.StrengthImplausible];
-
-    private static readonly ReasonCode[] s_section = [ReasonCode.NoSection, ReasonCode.SectionNotParametric, ReasonCode.SectionInvalid, ReasonCode.MeshNotAllowed, ReasonCode.WallOverRadius];
 
     /// <summary>The file; null when nothing that was missing can be expressed, since the format demands a specification.</summary>
     public static byte[]? Write(ScreeningRecord record)
@@ -46,7 +41,7 @@ public static class RequestIds
         return stream.ToArray();
     }
 
-    private static bool IsExpressible(ReasonCode code) => s_material.Contains(code) || s_section.Contains(code);
+    private static bool IsExpressible(ReasonCode code) => s_material.Contains(code);
 
     private static void Info(XmlWriter xml, ScreeningRecord record, List<(ReasonCode Code, int Count)> groups)
     {
@@ -86,8 +81,7 @@ public static class RequestIds
         xml.WriteEndElement();
         xml.WriteEndElement();
         Start(xml, "requirements");
-        if (s_material.Contains(code)) Material(xml);
-        else Section(xml);
+        Material(xml);
         xml.WriteEndElement();
         xml.WriteEndElement();
     }
@@ -97,22 +91,6 @@ public static class RequestIds
         Start(xml, "material");
         xml.WriteAttributeString("cardinality", "required");
         xml.WriteAttributeString("instructions", "Name a known grade, or give the yield strength in the material's properties.");
-        xml.WriteEndElement();
-    }
-
-    private static void Section(XmlWriter xml)
-    {
-        Start(xml, "property");
-        xml.WriteAttributeString("dataType", "IFCLABEL");
-        xml.WriteAttributeString("cardinality", "required");
-        xml.WriteAttributeString("instructions", "The section with its dimensions, such as 'tube 48.3x3.2 mm'. Better still: export the member with a parametric profile; then the next request asks no more.");
-        foreach (var (element, value) in new[] { ("propertySet", InputSet), ("baseName", "Section") })
-        {
-            Start(xml, element);
-            Element(xml, "simpleValue", value);
-            xml.WriteEndElement();
-        }
-
         xml.WriteEndElement();
     }
 

@@ -39,7 +39,7 @@ public static class BcfFile
         Add(zip, ids.Topic + "/markup.bcf", BcfXml.Markup(record, topic, ids, index, version, hasPicture: box is not null));
         if (box is null) return;
 
-        var camera = Camera.On(box);
+        var camera = Camera.On(box, Box.Around(record.Members)!.AsRoom());
         Add(zip, ids.Topic + "/viewpoint.bcfv", BcfXml.Viewpoint(topic, ids.Viewpoint, camera, version));
         Add(zip, ids.Topic + "/snapshot.png", Snapshot.Draw(camera, box, topic.Members, record.Members));
     }

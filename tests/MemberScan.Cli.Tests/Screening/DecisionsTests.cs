@@ -27,12 +27,13 @@ public sealed class DecisionsTests
 
     [Theory]
     [InlineData("section")]
+    [InlineData("material")]
     [InlineData("forces")]
     [InlineData("limit")]
     public async Task A_decision_goes_stale_when_what_it_was_made_on_changes(string what)
     {
         using var folder = new TemporaryFolder();
-        var model = Posts.One(what == "section" ? 2.6e-3 : 3.2e-3);
+        var model = Posts.One(what == "section" ? 2.6e-3 : 3.2e-3, grade: what == "material" ? "S275JR" : "S235JR");
         var table = what == "forces" ? Table.Replace("700", "710", StringComparison.Ordinal) : Table;
         string[] more = what == "limit" ? ["--settings", folder.Write("s.json", """{ "basis": { "service": { "criterion": "allowable-von-mises", "omega": 1.5 }, "design": null } }""")] : [];
 
@@ -67,6 +68,22 @@ public sealed class DecisionsTests
         Assert.Equal(1, ran.ExitCode);
         Assert.Contains("SCR-0024", ran.Error, StringComparison.Ordinal);
         Assert.Contains("INPUTS NOT KNOWN: strengthen", Encoding.ASCII.GetString(await File.ReadAllBytesAsync(folder["a.checked.ifc"], TestContext.Current.CancellationToken)), StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public async Task A_second_decision_by_another_name_of_a_member_is_told_and_the_first_is_carried()
+    {
+        using var folder = new TemporaryFolder();
+        var model = Posts.One(3.2e-3);
+        var key = System.Text.RegularExpressions.Regex.Match(Encoding.ASCII.GetString(model), "IFCMEMBER\\('([^']{22})'").Groups[1].Value;
+        var decisions = folder.Write("d.csv", Decisions + key + ",keep,me,2026-02-04,\n");
+
+        var ran = await Memberscan.Run("screen", folder.Write("a.ifc", model), "--forces", folder.Write("t.csv", Table), "--decisions", decisions);
+
+        Assert.Equal(1, ran.ExitCode);
+        Assert.Matches($"SCR-0025 A second decision for '{System.Text.RegularExpressions.Regex.Escape(key)}'.*d.csv, line 3", ran.Error);
+        var member = JsonDocument.Parse(await File.ReadAllBytesAsync(folder["a.run.json"], TestContext.Current.CancellationToken)).RootElement.GetProperty("screening").GetProperty("members")[0];
+        Assert.Equal("strengthen, then tell 橋", member.GetProperty("decision").GetProperty("decision").GetString());
     }
 
     [Fact]

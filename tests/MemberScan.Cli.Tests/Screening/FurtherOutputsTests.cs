@@ -7,12 +7,13 @@ public sealed class FurtherOutputsTests
 {
     private const string Name = "O'Neill Geländer 橋 🛟 C:\\rail";
 
+    /// <summary>Every output of a run, on one processor and eight, in three languages and three time zones: a decimal comma or a local hour would be another byte.</summary>
     [Fact]
-    public async Task All_further_outputs_are_written_and_the_same_on_one_thread_and_eight_and_again()
+    public async Task All_outputs_are_the_same_bytes_whatever_threads_language_and_time_zone_and_again()
     {
         using var folder = new TemporaryFolder();
         var runs = new List<Dictionary<string, byte[]>>();
-        foreach (var threads in new[] { "1", "8", "8" })
+        foreach (var (threads, language, zone) in new[] { ("1", "C", "UTC"), ("8", "de_DE.UTF-8", "Pacific/Auckland"), ("8", "tr_TR.UTF-8", "America/St_Johns"), ("3", "C", "UTC") })
         {
             var output = folder[$"out{runs.Count}"];
             Directory.CreateDirectory(output);
@@ -20,6 +21,9 @@ public sealed class FurtherOutputsTests
             var start = Memberscan.Start(ScreenedSample.Arguments("gangway-rails", output,
                 "--bcf", Path("t.bcf"), "--xlsx", Path("m.xlsx"), "--parquet", Path("m.parquet"), "--request", Path("r.csv"), "--request", Path("r.html"), "--set-template"));
             start.Environment["DOTNET_PROCESSOR_COUNT"] = threads;
+            start.Environment["LC_ALL"] = start.Environment["LANG"] = language;
+            start.Environment["TZ"] = zone;
+            start.Environment.Remove("DOTNET_SYSTEM_GLOBALIZATION_INVARIANT");
             var ran = await Memberscan.Run(start);
             Assert.True(ran.ExitCode == 1, ran.All);
             runs.Add(Directory.EnumerateFiles(output).ToDictionary(f => System.IO.Path.GetFileName(f), File.ReadAllBytes));

@@ -129,7 +129,7 @@ public sealed class Part21EditsTests
     [Fact]
     public void A_file_is_saved_over_itself_as_a_whole_and_no_other_is_left()
     {
-        var folder = Directory.CreateTempSubdirectory();
+        var folder = Directory.CreateTempSubdirectory("memberscan-");
         var path = Path.Combine(folder.FullName, "landing.ifc");
         File.WriteAllText(path, s_text);
         using (var index = Part21Index.Open(path, [], new DiagnosticList()))
@@ -148,7 +148,7 @@ public sealed class Part21EditsTests
     [Fact]
     public void A_failed_save_leaves_nothing_behind()
     {
-        var folder = Directory.CreateTempSubdirectory();
+        var folder = Directory.CreateTempSubdirectory("memberscan-");
         var target = Path.Combine(folder.FullName, "landing.ifc");
         Directory.CreateDirectory(Path.Combine(target, "in the way"));
         using var index = Index(Encoding.ASCII.GetBytes(s_text));

@@ -15,9 +15,16 @@ public sealed class BcfFileTests
 
     [Theory]
     [MemberData(nameof(Versions))]
-    public void Forty_posts_of_one_cause_make_one_topic_with_forty_components_and_a_camera_on_them(BcfVersion version)
+    public void Forty_posts_of_one_cause_make_one_topic_with_forty_components_and_a_camera_within_the_box_of_the_model(BcfVersion version)
     {
-        var record = Posts(40);
+        // Forty posts on two sides of a landing of 28.5 m by 6 m, and two hangers of 8 m above it that are within their limit.
+        var posts = Posts(40).Members.Select((m, i) => m with { Axes = MemberAxes.From(new Vector3(1.5 * (i / 2), i % 2 == 0 ? -3.2 : 2.8, 4.05), Vector3.UnitZ, Vector3.UnitX) }).ToList();
+        var hangers = new[] { 0.0, 28.5 }.Select((x, i) => FerryLanding.Hanger(string.Create(CultureInfo.InvariantCulture, $"2O2Fr$t4X7Zf8NOew3H{i:D3}"), "Hanger", 1e3) with
+        {
+            Axes = MemberAxes.From(new Vector3(x, -0.2, 4.05), Vector3.UnitZ, Vector3.UnitX),
+            Length = 8,
+        });
+        var record = FerryLanding.Record([.. posts, .. hangers]);
 
         var files = Unzipped(BcfFile.Write(record, version));
 
@@ -25,9 +32,48 @@ public sealed class BcfFileTests
         Assert.Matches("^[0-9a-f]{8}-[0-9a-f]{4}-8[0-9a-f]{3}-[89ab][0-9a-f]{3}-[0-9a-f]{12}$", topic);      // RFC 9562: version 8, variant 10
         var view = Xml(files[topic + "/viewpoint.bcfv"]);
         var selected = view.Descendants("Selection").Elements("Component").Select(c => c.Attribute("IfcGuid")!.Value).ToList();
-        Assert.Equal(record.Members.Select(m => m.GlobalId).Order(StringComparer.Ordinal), selected.Order(StringComparer.Ordinal));
-        AssertSees(view.Descendants("PerspectiveCamera").Single(), record);
+        Assert.Equal(40, selected.Count);
+        Assert.Equal(posts.Select(m => m.GlobalId).Order(StringComparer.Ordinal), selected.Order(StringComparer.Ordinal));
+        AssertStandsIn(record.Members, posts, view.Descendants("PerspectiveCamera").Single(), leastSide: 0, leastSeen: 0.6);
         Assert.All(view.Descendants("PerspectiveCamera").Elements("FieldOfView"), f => Assert.InRange(double.Parse(f.Value, CultureInfo.InvariantCulture), 45, 60));
+        var folder = version == BcfVersion.Bcf21 ? "bcf-2.1" : "bcf-3.0";
+        Assert.Empty(SchemaFiles.Faults(files[topic + "/viewpoint.bcfv"], folder, "visinfo.xsd"));
+        Assert.Empty(SchemaFiles.Faults(files[topic + "/markup.bcf"], folder, "markup.xsd"));
+    }
+
+    [Fact]
+    public void A_row_in_one_plane_is_seen_from_beside_it_within_a_room_of_three_metres()
+    {
+        var record = Posts(40);
+
+        var camera = Xml(Unzipped(BcfFile.Write(record, BcfVersion.Bcf21)).Single(f => f.Key.EndsWith(".bcfv", StringComparison.Ordinal)).Value).Descendants("PerspectiveCamera").Single();
+
+        AssertStandsIn(record.Members, record.Members, camera, leastSide: 3, leastSeen: 0.9);
+        Assert.NotEqual(-3.2, Vector(camera.Element("CameraViewPoint")!).Y, 1.0);
+    }
+
+    [Fact]
+    public void Where_the_model_leaves_room_all_members_of_a_topic_are_seen()
+    {
+        var stay = FerryLanding.Hanger("2O2Fr$t4X7Zf8NOew3FH00", "Stay", 1e3) with { Axes = MemberAxes.From(new Vector3(-30, -60, 0), new Vector3(0.6, 0.8, 0), Vector3.UnitZ), Length = 150 };
+        var high = FerryLanding.Hanger("2O2Fr$t4X7Zf8NOew3FH01", "Stay", 1e3) with { Axes = MemberAxes.From(new Vector3(0, 0, 0), Vector3.UnitZ, Vector3.UnitX), Length = 40 };
+        var posts = Posts(5).Members;
+        var record = FerryLanding.Record([.. posts, stay, high]);
+
+        var camera = Xml(Unzipped(BcfFile.Write(record, BcfVersion.Bcf30)).Single(f => f.Key.EndsWith(".bcfv", StringComparison.Ordinal)).Value).Descendants("PerspectiveCamera").Single();
+
+        AssertStandsIn(record.Members, posts, camera, leastSide: 0, leastSeen: 1);
+    }
+
+    [Fact]
+    public void A_single_upright_post_has_a_camera_that_is_not_inside_it()
+    {
+        var record = Posts(1);
+
+        var camera = Xml(Unzipped(BcfFile.Write(record, BcfVersion.Bcf21)).Single(f => f.Key.EndsWith(".bcfv", StringComparison.Ordinal)).Value).Descendants("PerspectiveCamera").Single();
+
+        AssertStandsIn(record.Members, record.Members, camera, leastSide: 3, leastSeen: 1);
+        Assert.InRange((Vector(camera.Element("CameraViewPoint")!) - new Vector3(0, -3.2, 4.6)).Length, 1, 2.6);
     }
 
     [Theory]
@@ -141,25 +187,31 @@ public sealed class BcfFileTests
         return ~crc;
     }
 
-    // Metres in project coordinates: the camera looks at the middle of the model's box, from not further away than twice its diagonal, and all ends are before it and within its angle.
-    private static void AssertSees(XElement camera, ScreeningRecord record)
+    // Metres in project coordinates: the camera stands within the box around the axes of all candidates (thin sides widened to the least one about their middle), looks
+    // at the middle of the topic's box, has all its ends before it, and sees the share of them by its angle.
+    private static void AssertStandsIn(IEnumerable<MemberResult> model, IEnumerable<MemberResult> topic, XElement camera, double leastSide, double leastSeen)
     {
         var (position, direction, up) = (Vector(camera.Element("CameraViewPoint")!), Vector(camera.Element("CameraDirection")!), Vector(camera.Element("CameraUpVector")!));
         Assert.Equal(1, direction.Length, 1e-12);
         Assert.Equal(1, up.Length, 1e-12);
         Assert.Equal(0, direction.Dot(up), 1e-12);
-        var ends = record.Members.SelectMany(m => new[] { m.Axes!.Origin, m.Axes.Origin + m.Length!.Value * m.Axes.X }).ToList();
-        var (least, most) = (new Vector3(ends.Min(e => e.X), ends.Min(e => e.Y), ends.Min(e => e.Z)), new Vector3(ends.Max(e => e.X), ends.Max(e => e.Y), ends.Max(e => e.Z)));
-        var toCentre = 0.5 * (least + most) - position;
-        Assert.Equal(0, toCentre.Cross(direction).Length, 1e-9);
-        Assert.InRange(toCentre.Length, 0.1, 2 * (most - least).Length);
-        Assert.All(ends, end =>
+        var all = Ends(model).ToList();
+        Assert.All(new Func<Vector3, double>[] { v => v.X, v => v.Y, v => v.Z }, of =>
         {
-            var seen = end - position;
-            Assert.True(seen.Dot(direction) > 0);
-            Assert.True(Math.Abs(seen.Dot(up)) <= seen.Dot(direction) * Math.Tan(Math.PI / 6));
+            var (least, most) = (all.Min(of), all.Max(of));
+            var widened = Math.Max(0, leastSide - (most - least)) / 2;
+            Assert.InRange(of(position), least - widened, most + widened);
         });
+        var ends = Ends(topic).ToList();
+        var middle = 0.5 * new Vector3(ends.Min(e => e.X) + ends.Max(e => e.X), ends.Min(e => e.Y) + ends.Max(e => e.Y), ends.Min(e => e.Z) + ends.Max(e => e.Z));
+        Assert.Equal(0, (middle - position).Cross(direction).Length, 1e-9);
+        Assert.All(ends, end => Assert.True((end - position).Dot(direction) >= 0));
+        var seen = ends.Count(end => (end - position) is var to && to.Dot(direction) > 0 && Math.Abs(to.Dot(up)) <= to.Dot(direction) * Math.Tan(Math.PI / 6)
+            && Math.Abs(to.Dot(direction.Cross(up))) <= to.Dot(direction) * Math.Tan(Math.PI / 6) * 4 / 3);
+        Assert.InRange(seen, leastSeen * ends.Count, ends.Count);
     }
+
+    private static IEnumerable<Vector3> Ends(IEnumerable<MemberResult> members) => members.SelectMany(m => new[] { m.Axes!.Origin, m.Axes.Origin + m.Length!.Value * m.Axes.X });
 
     private static Vector3 Vector(XElement e) => new(Number(e, "X"), Number(e, "Y"), Number(e, "Z"));
 

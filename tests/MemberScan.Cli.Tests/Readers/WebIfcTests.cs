@@ -1,8 +1,7 @@
-using System.Diagnostics;
-using System.Text;
 using System.Text.Json;
+using MemberScan.Cli.Tests.Screening;
 
-namespace MemberScan.Cli.Tests.Screening;
+namespace MemberScan.Cli.Tests.Readers;
 
 /// <summary>The checked models as an independent parser (the npm package web-ifc) reads them.</summary>
 public sealed class WebIfcTests
@@ -82,21 +81,8 @@ public sealed class WebIfcTests
 
     private static async Task<JsonDocument> ReadSets(string path)
     {
-        var folder = Path.Combine(Memberscan.Root, "tests", "web-ifc");
-        Assert.SkipUnless(Directory.Exists(Path.Combine(folder, "node_modules", "web-ifc")), "web-ifc is not installed: run npm ci in tests/web-ifc");
-        var start = new ProcessStartInfo("node") { RedirectStandardOutput = true, RedirectStandardError = true, StandardOutputEncoding = Encoding.UTF8 };
-        start.ArgumentList.Add(Path.Combine(folder, "read-sets.mjs"));
-        start.ArgumentList.Add(path);
-        try
-        {
-            var ran = await Memberscan.Run(start);
-            Assert.True(ran.ExitCode == 0, ran.All);
-            return JsonDocument.Parse(ran.Output);
-        }
-        catch (System.ComponentModel.Win32Exception)
-        {
-            Assert.Skip("node is not installed");
-            throw;
-        }
+        var ran = await OtherProgram.Node("web-ifc", "read-sets.mjs", path);
+        Assert.True(ran.ExitCode == 0, ran.All);
+        return JsonDocument.Parse(ran.Output);
     }
 }
