@@ -29,7 +29,9 @@ need chromium chromium
 need node nodejs
 need npm npm
 
-(cd tests/web-ifc && npm ci --loglevel=error --no-audit --no-fund --no-update-notifier)
+for folder in tests/web-ifc tests/MemberScan.Browser.Tests/types; do
+  (cd "$folder" && npm ci --loglevel=error --no-audit --no-fund --no-update-notifier)
+done
 
 locked=()
 if [ "${CI:-}" = true ]; then locked=(--locked-mode); fi
