@@ -87,6 +87,20 @@ public sealed class PlainReadingTests(Chromium chromium) : IClassFixture<Chromiu
         Assert.Equal(0, await report.Page.Locator("canvas").CountAsync());
     }
 
+    [Fact]
+    public async Task Says_that_the_view_was_left_out_where_the_program_was_built_without_it()
+    {
+        var html = HtmlReport.Render(s_record);
+        var view = html.LastIndexOf("<script>", StringComparison.Ordinal);
+
+        await using var report = await chromium.OpenText(html[..view] + html[(html.LastIndexOf("</script>", StringComparison.Ordinal) + "</script>".Length)..]);
+
+        Assert.Contains("The view in space was left out of this report", await report.Page.InnerTextAsync("#space-note"), StringComparison.Ordinal);
+        Assert.True(await report.Page.IsVisibleAsync("#elevation > svg"));
+        Assert.True(await report.Page.IsVisibleAsync("#table-grid .row"));
+        Assert.Empty(report.Faults);
+    }
+
     [Theory]
     [InlineData("<script>document.title='taken'</script>")]
     [InlineData("</script><script>document.title='taken'</script>")]

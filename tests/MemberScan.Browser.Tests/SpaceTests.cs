@@ -106,6 +106,23 @@ public sealed class SpaceTests(Chromium chromium) : IClassFixture<Chromium>
         Assert.Empty(report.Faults);
     }
 
+    [Fact]
+    public async Task Draws_far_members_of_many_as_boxes_and_picks_them_all_the_same()
+    {
+        var record = GeneratedLanding.Of(3_000, 20, 20);
+        await using var report = await chromium.Open(record);
+        await report.Page.Locator("#space canvas").ScrollIntoViewIfNeededAsync();
+        await report.Page.WaitForTimeoutAsync(1500);
+        await report.Page.Locator(".spacePart").ScreenshotAsync(new LocatorScreenshotOptions { Path = Path.Combine(Chromium.Artifacts, "space-many.png") });
+
+        var index = record.Members.Select((m, i) => (m, i)).Last(p => p.m.Axes is not null && p.m.Role == "rail").i;
+        await report.Page.EvaluateAsync($"() => memberScan.view.fit([{index}])");
+
+        Assert.Equal(index, await Pick(report, index));
+        Assert.Contains("of more than 2000 members the far ones as boxes", await report.Page.InnerTextAsync("#space .scale"), StringComparison.Ordinal);
+        Assert.Empty(report.Faults);
+    }
+
     private static async Task<int> Fitted(OpenedReport report, Func<MemberResult, bool> wanted)
     {
         var index = s_record.Members.Select((m, i) => (m, i)).First(p => p.m.Axes is not null && wanted(p.m)).i;
@@ -119,7 +136,8 @@ public sealed class SpaceTests(Chromium chromium) : IClassFixture<Chromium>
 
     private static async Task<string> Pixels(OpenedReport report)
     {
-        await report.Page.WaitForTimeoutAsync(200);
+        await report.Page.Locator("#space canvas").ScrollIntoViewIfNeededAsync();
+        await report.Page.WaitForTimeoutAsync(500);
         return await report.Page.EvaluateAsync<string>("() => document.querySelector('#space canvas').toDataURL()");
     }
 }

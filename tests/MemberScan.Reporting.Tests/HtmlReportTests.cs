@@ -280,7 +280,7 @@ public sealed class HtmlReportTests
 
     // Scripts and packed data have tests of their own in a browser; here only that they are there.
     private static string WithoutScripts(string page) => Regex.Replace(
-        Regex.Replace(page, "(<script[^>]*>).*?</script>", "$1…</script>", RegexOptions.Singleline), "script-src [^;]*;", "script-src …;");
+        Regex.Replace(page, "(<script[^>]*>).*?</script>", "$1…</script>", RegexOptions.Singleline), "script-src .*?; base-uri", "script-src …; base-uri");
 
     private static IDocument Parse(ScreeningRecord record) => new HtmlParser().ParseDocument(HtmlReport.Render(record));
 }

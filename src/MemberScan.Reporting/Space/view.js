@@ -16,6 +16,13 @@ const ground = '#fbfaf6';
 // From afar true sections would be thinner than a pixel: they are drawn this many pixels thick at least, and the legend says so.
 const leastThickness = 3;
 
+// Sections that look smaller than this are drawn as boxes when more members are shown than the other number.
+const boxPixels = 6;
+const mostTrueSections = 2000;
+
+// Time that a change of the filters rests before it is drawn [ms].
+const showDelay = 100;
+
 const vertexShader = `
   const float leastThickness = ${leastThickness.toFixed(1)};
   in float number;
@@ -109,6 +116,21 @@ function barOf(rings) {
   return geometry;
 }
 
+/** @param {number[][]} rings */
+function sizeOf(rings) {
+  return 2 * Math.max(...rings[0].map(Math.abs));
+}
+
+/**
+ * The rectangle around an outline.
+ * @param {number[][]} rings
+ */
+function boxOf(rings) {
+  const [y, z] = [0, 1].map((k) => rings[0].filter((_, i) => i % 2 === k));
+  const [y0, y1, z0, z1] = [Math.min(...y), Math.max(...y), Math.min(...z), Math.max(...z)];
+  return [[y0, z0, y1, z0, y1, z1, y0, z1]];
+}
+
 /**
  * @param {string} tag
  * @param {string} style
@@ -140,6 +162,7 @@ class Space {
     this.camera.up.set(0, 0, 1);
     this.controls = new OrbitControls(this.camera, canvas);
     this.controls.addEventListener('change', () => this.draw());
+    this.controls.addEventListener('end', () => this.#moved());
     this.target = new WebGLRenderTarget(1, 1);
     this.picked = new Uint8Array(4);
     this.bars = new Group();
@@ -156,8 +179,11 @@ class Space {
     this.labels = [];
     this.labelBox = element('div', 'labels');
     this.isWaiting = false;
+    this.isSeen = false;
+    this.isStale = true;
     this.placed = this.#placed();
-    this.show(this.placed);
+    /** @type {ArrayLike<number>} */
+    this.wanted = this.placed;
     this.box = this.#boxOf(this.placed);
     this.cutAxis = 'none';
   }
@@ -191,10 +217,20 @@ class Space {
   }
 
   /**
-   * Draws these candidates and leaves the others out.
+   * Draws these candidates and leaves the others out; a moment later, so that typing into a filter does not wait for the picture.
    * @param {ArrayLike<number>} indices
    */
   show(indices) {
+    this.wanted = indices;
+    this.isStale = true;
+    clearTimeout(this.timer);
+    this.timer = setTimeout(() => this.draw(), showDelay);
+  }
+
+  // Bars are built when somebody looks. True sections for what is near or for few; far ones of many as boxes, which at a few pixels look alike.
+  #build() {
+    if (!this.isStale) return;
+    this.isStale = false;
     for (const mesh of [...this.bars.children]) {
       this.bars.remove(mesh);
       /** @type {InstancedMesh} */ (mesh).geometry.dispose();
@@ -202,17 +238,28 @@ class Space {
     }
 
     const outline = this.data.text('outline');
-    /** @type {Map<number, number[]>} */
-    const bySection = new Map();
-    for (let i = 0; i < indices.length; i++) {
-      const index = indices[i];
+    const sizes = this.data.outlines.map(sizeOf);
+    const isMany = this.wanted.length > mostTrueSections;
+    const place = new Vector3();
+    let left = mostTrueSections;
+    /** @type {Map<string, number[]>} */
+    const groups = new Map();
+    for (let i = 0; i < this.wanted.length; i++) {
+      const index = this.wanted[i];
       if (Number.isNaN(this.starts[0][index])) continue;
-      const list = bySection.get(outline[index]);
+      place.set(this.starts[0][index], this.starts[1][index], this.starts[2][index]);
+      const reach = sizes[outline[index]] / (boxPixels * this.material.uniforms.pixel.value) + this.lengths[index];
+      const isTrue = !isMany || (left > 0 && place.distanceTo(this.camera.position) < reach);
+      if (isTrue) left--;
+      const key = `${outline[index]} ${isTrue}`;
+      const list = groups.get(key);
       if (list) list.push(index);
-      else bySection.set(outline[index], [index]);
+      else groups.set(key, [index]);
     }
-    for (const [number, members] of bySection) this.bars.add(this.#mesh(this.data.outlines[number], members));
-    this.draw();
+    for (const [key, members] of groups) {
+      const rings = this.data.outlines[Number.parseInt(key)];
+      this.bars.add(this.#mesh(key.endsWith('true') ? rings : boxOf(rings), members));
+    }
   }
 
   /**
@@ -226,7 +273,7 @@ class Space {
     const verdicts = this.data.byte('verdict');
     const colours = this.data.scale.map((step) => new Color().setStyle(step.colour, '').toArray());
     const [tint, pattern, number] = [new Float32Array(3 * members.length), new Float32Array(members.length), new Float32Array(members.length)];
-    const size = new Float32Array(members.length).fill(2 * Math.max(...rings[0].map(Math.abs)));
+    const size = new Float32Array(members.length).fill(sizeOf(rings));
     const matrix = new Matrix4();
     members.forEach((index, place) => {
       const x = new Vector3(...this.along.map((a) => a[index]));
@@ -263,7 +310,7 @@ class Space {
     this.camera.far = distance * 100;
     this.camera.updateProjectionMatrix();
     this.controls.update();
-    this.draw();
+    this.#moved();
   }
 
   /**
@@ -321,6 +368,7 @@ class Space {
    * @param {number} y
    */
   pick(x, y) {
+    this.#build();
     const { width, height } = this.canvas.getBoundingClientRect();
     this.camera.setViewOffset(width, height, x, y, 1, 1);
     this.material.uniforms.picking.value = 1;
@@ -349,11 +397,18 @@ class Space {
     return { x: ((seen.x + 1) / 2) * width, y: ((1 - seen.y) / 2) * height };
   }
 
+  // After the camera has moved, other members are near.
+  #moved() {
+    if (this.wanted.length > mostTrueSections) this.isStale = true;
+    this.draw();
+  }
+
   draw() {
-    if (this.isWaiting) return;
+    if (this.isWaiting || !this.isSeen) return;
     this.isWaiting = true;
     requestAnimationFrame(() => {
       this.isWaiting = false;
+      this.#build();
       this.renderer.render(this.scene, this.camera);
       this.#placeLabels();
     });
@@ -421,6 +476,10 @@ class Space {
     stage.append(this.canvas, this.labelBox);
     this.container.replaceChildren(this.#toolbar(), stage, this.#legend());
     new ResizeObserver(() => this.resize()).observe(stage);
+    new IntersectionObserver((entries) => {
+      this.isSeen = entries[entries.length - 1].isIntersecting;
+      this.draw();
+    }, { rootMargin: '50px' }).observe(stage);
     this.resize();
     this.#labelMembers();
     this.fit(this.placed);
@@ -468,7 +527,7 @@ class Space {
       item.append(swatch, ` ${step.words}: ${memberScan.figures.count(counts[i])}`);
       list.append(item);
     });
-    list.append(element('li', '', `bars thinner than ${leastThickness} pixels are drawn ${leastThickness} pixels thick; curved members and tapers as straight bars of their first section`));
+    list.append(element('li', '', `bars thinner than ${leastThickness} pixels are drawn ${leastThickness} pixels thick; curved members and tapers as straight bars of one section; of more than ${memberScan.figures.count(mostTrueSections)} members the far ones as boxes`));
     const missing = this.data.count - this.placed.length;
     const outline = this.data.text('outline');
     const standIns = this.placed.filter((i) => outline[i] === 0).length;
@@ -499,7 +558,7 @@ class Space {
       this.camera.position.copy(this.controls.target).add(
         new Vector3(radius * Math.cos(height) * Math.cos(azimuth), radius * Math.cos(height) * Math.sin(azimuth), radius * Math.sin(height)));
       this.controls.update();
-      this.draw();
+      this.#moved();
       event.preventDefault();
     });
     memberScan.on('select', () => this.select(memberScan.selected));

@@ -39,6 +39,7 @@ internal static class PageTimes
         ("filter by verdict", "document.querySelectorAll('[name=filter-verdict]')[k % 3].click()"),
         ("sort", "document.querySelector('[data-sort=' + ['name', 'section', 'station', 'tag', 'utilization'][k % 5] + ']').click()"),
         ("selection", "memberScan.select(k * 1999)"),
+        ("filter by text with the view in sight", "part('space').scrollIntoView(); part('filter-text').value = ['rail', 'rod 1', '', 'deck', 'strut', '7', 'l-03', 'full', 'mast', ''][k]; part('filter-text').dispatchEvent(new Event('input'))"),
     ];
 
     /// <summary>Measures and prints; the page and its PDF stay in the folder.</summary>
