@@ -52,7 +52,9 @@ need_file /usr/include/boost/unordered_map.hpp libboost-dev
 
 bash tests/ifcplusplus/build.sh .artifacts/ifcplusplus
 
-(cd tests/web-ifc && npm ci --loglevel=error --no-audit --no-fund --no-update-notifier)
+for folder in tests/web-ifc tests/MemberScan.Browser.Tests/types; do
+  (cd "$folder" && npm ci --loglevel=error --no-audit --no-fund --no-update-notifier)
+done
 
 locked=()
 if [ "${CI:-}" = true ]; then locked=(--locked-mode); fi

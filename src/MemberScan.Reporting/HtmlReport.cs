@@ -2,6 +2,7 @@ using System.Text.Encodings.Web;
 using System.Text.Unicode;
 using MemberScan.Reporting.Page;
 using MemberScan.Reporting.Style;
+using MemberScan.Screening.Comparison;
 using MemberScan.Screening.Record;
 using Microsoft.AspNetCore.Components;
 using Microsoft.AspNetCore.Components.Web;
@@ -9,23 +10,25 @@ using Microsoft.Extensions.Logging.Abstractions;
 
 namespace MemberScan.Reporting;
 
-/// <summary>The report: one HTML page that needs no network, no script and no other file.</summary>
+/// <summary>The report: one HTML page that needs no network and no other file, and reads without script.</summary>
 /// <remarks>
 /// It shows the record and computes nothing. Text from the model is escaped, isolated against its own writing direction, freed of
-/// control characters and cut at <see cref="Display.ForeignText.LongestName"/>. Within-limit candidates get one row; sheets of overstressed
+/// control characters and cut at <see cref="Display.ForeignText.LongestName"/>. Every candidate has one row; sheets of overstressed
 /// ones stop at <see cref="ReportView.LargestNumberOfSheets"/>, and the page says so.
 /// </remarks>
 public static class HtmlReport
 {
-    /// <summary>The page as text, to be written as UTF-8; line ends are LF. The same record gives the same text.</summary>
+    /// <summary>The page as text, to be written as UTF-8; line ends are LF. The same records give the same text.</summary>
+    /// <param name="record">The finished screening.</param>
+    /// <param name="changes">What changed against an earlier run; null when none is given.</param>
     /// <exception cref="ArgumentException">The record contradicts itself: see <see cref="SoundRecord"/>.</exception>
     /// <exception cref="ArgumentOutOfRangeException">A number that is shown is not finite.</exception>
-    public static string Render(ScreeningRecord record)
+    public static string Render(ScreeningRecord record, ComparisonRecord? changes = null)
     {
         SoundRecord.ThrowUnlessSound(record);
         var parameters = ParameterView.FromDictionary(new Dictionary<string, object?>
         {
-            [nameof(ReportPage.View)] = new ReportView(record),
+            [nameof(ReportPage.View)] = new ReportView(record, changes),
             [nameof(ReportPage.Style)] = ReportStyle.For(record),
         });
 

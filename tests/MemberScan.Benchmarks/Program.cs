@@ -3,12 +3,13 @@ using BenchmarkDotNet.Running;
 using MemberScan.Benchmarks.Frames;
 using MemberScan.Benchmarks.Meshes;
 using MemberScan.Benchmarks.Models;
+using MemberScan.Benchmarks.Pages;
 using MemberScan.Benchmarks.Question;
 using MemberScan.Benchmarks.Tables;
 
 // generate NAME FILE | question FILE [THREADS] | checked FILE | pass FILE THREADS | scan FILE | append FILE TARGET [disk] | meshes |
 // forces-table generate FILE ROWS MEMBERS | forces-table read FILE ROUNDS | frame NX NY STOREYS SITUATIONS THREADS ROUNDS |
-// frame-matrix NX NY STOREYS FILE; anything else goes to BenchmarkDotNet. compare.sh measures some of them beside other programs.
+// frame-matrix NX NY STOREYS FILE | page FOLDER; anything else goes to BenchmarkDotNet. compare.sh measures some of them beside other programs.
 return args switch
 {
     ["generate", var name, var path] => Generate(name, path),
@@ -23,6 +24,7 @@ return args switch
     ["meshes"] => MeshRecognition.Run(),
     ["frame", var nx, var ny, var storeys, var situations, var threads, var rounds] => FrameTimes.Print(Int(nx), Int(ny), Int(storeys), Int(situations), Int(threads), Int(rounds)),
     ["frame-matrix", var nx, var ny, var storeys, var path] => FrameTimes.Export(Int(nx), Int(ny), Int(storeys), path),
+    ["page", var folder] => await PageTimes.Print(folder),
     ["checked", var path] => Print(CheckedQuestion.Ask(path)),
     _ => Benchmark(args),
 };

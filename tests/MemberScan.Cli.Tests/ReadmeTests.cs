@@ -54,7 +54,7 @@ public sealed partial class ReadmeTests
 
         var options = LongOption().Matches(help).Select(m => m.Value).Except(["--help", "--version"]).Distinct(StringComparer.Ordinal).ToArray();
 
-        Assert.Equal(36, options.Length);
+        Assert.Equal(38, options.Length);
         Assert.All(options, option => Assert.Contains(option, text, StringComparison.Ordinal));
     }
 

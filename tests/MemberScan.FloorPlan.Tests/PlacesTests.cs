@@ -29,10 +29,13 @@ public sealed class PlacesTests
         Assert.Empty(faults);
     }
 
-    [Fact]
-    public void The_node_lock_file_holds_no_address()
+    [Theory]
+    [InlineData("tests/web-ifc/package-lock.json")]
+    [InlineData("tests/MemberScan.Browser.Tests/types/package-lock.json")]
+    [InlineData("src/MemberScan.Reporting/Space/package-lock.json")]
+    public void A_node_lock_file_holds_no_address(string file)
     {
-        var text = SourceTree.Text("tests/web-ifc/package-lock.json");
+        var text = SourceTree.Text(file);
 
         Assert.DoesNotContain("resolved", text, StringComparison.Ordinal);
         Assert.Contains("integrity", text, StringComparison.Ordinal);

@@ -1,6 +1,7 @@
 using AngleSharp.Html.Parser;
 using MemberScan.Model.Verdicts;
 using MemberScan.Reporting.Display;
+using MemberScan.Reporting.Script;
 
 namespace MemberScan.Reporting.Tests;
 
@@ -24,7 +25,9 @@ public sealed class HostileTextTests
 
         var page = new HtmlParser().ParseDocument(HtmlReport.Render(record));
 
-        Assert.Empty(page.QuerySelectorAll("script, img, [src], [onmouseover], [onerror]"));
+        Assert.Empty(page.QuerySelectorAll("img, [src], [onmouseover], [onerror]"));
+        Assert.All(page.QuerySelectorAll("script:not([type])"), s => Assert.True(s.TextContent == PageScripts.Embedded.Main || s.TextContent == PageScripts.Embedded.View));
+        Assert.Matches("^[A-Za-z0-9+/=]+$", Assert.Single(page.QuerySelectorAll("script[type]")).TextContent);
         Assert.Single(page.QuerySelectorAll("style"));
         Assert.Equal(hostile, page.QuerySelector("#member-Rail summary h3 bdi")!.TextContent);
         Assert.Equal(hostile, page.QuerySelector("#member-Strut td bdi")!.TextContent);

@@ -31,6 +31,8 @@ internal static class ScreenCommand
         var request = new Option<string[]>("--request") { Description = "Also write what is missing as a request to the modeler: .csv, .html or .ids; may be given several times.", HelpName = "FILE" };
         var xlsx = new Option<string?>("--xlsx") { Description = "Also write the candidates as a workbook.", HelpName = "FILE" };
         var parquet = new Option<string?>("--parquet") { Description = "Also write the candidates as a Parquet file.", HelpName = "FILE" };
+        var earlier = new Option<string?>("--earlier") { Description = "The run record (.run.json) of an earlier run; the report tells what changed since.", HelpName = "FILE" };
+        var pdf = new Option<string?>("--pdf") { Description = "Also print the report to PDF (needs Chromium).", HelpName = "FILE" };
         var template = new Option<bool>("--set-template") { Description = "Explain the property set by a template in the checked model (IFC4 and later)." };
         var workers = new Option<int?>("--workers") { Description = "Several models: how many at a time; default 4, at most the number of processors.", HelpName = "N" };
         var resume = new Option<bool>("--resume") { Description = "Several models: pass over those whose outputs stand unchanged and were made from the same inputs." };
@@ -38,7 +40,7 @@ internal static class ScreenCommand
 
         var command = new Command("screen", "Read a model, find forces, check its members, write checked model, report and tables.")
         {
-            model, forces, beside, settings, kind, output, timestamp, decisions, decidedOn, bcf, bcfVersion, request, xlsx, parquet, template, workers, resume, verbose,
+            model, forces, beside, settings, kind, output, timestamp, decisions, decidedOn, bcf, bcfVersion, request, xlsx, parquet, earlier, pdf, template, workers, resume, verbose,
         };
 
         // On a thread of its own: the parser listens for an interruption only once the action has given its task back.
@@ -51,6 +53,8 @@ internal static class ScreenCommand
                 Decisions = parsed.GetValue(decisions),
                 DecidedOn = parsed.GetValue(decidedOn),
                 SetTemplate = parsed.GetValue(template),
+                Earlier = parsed.GetValue(earlier),
+                Pdf = parsed.GetValue(pdf),
                 Further = new FurtherOutputs(
                     parsed.GetValue(bcf), parsed.GetValue(bcfVersion) == "3.0" ? BcfVersion.Bcf30 : BcfVersion.Bcf21, parsed.GetValue(request) ?? [], parsed.GetValue(xlsx), parsed.GetValue(parquet)),
             };

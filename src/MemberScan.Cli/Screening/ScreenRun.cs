@@ -8,6 +8,7 @@ using MemberScan.Inputs.SettingsFiles;
 using MemberScan.Model.Forces;
 using MemberScan.Reporting;
 using MemberScan.Screening;
+using MemberScan.Screening.Comparison;
 using MemberScan.Screening.Record;
 
 namespace MemberScan.Cli.Screening;
@@ -28,6 +29,12 @@ internal static class ScreenRun
         /// <summary>Whether the checked model explains our set by a template.</summary>
         public bool SetTemplate { get; init; }
 
+        /// <summary>Run record of an earlier run that the report is compared with; null for none.</summary>
+        public string? Earlier { get; init; }
+
+        /// <summary>Path of the printed report; null for none.</summary>
+        public string? Pdf { get; init; }
+
         /// <summary>Further outputs that were asked for.</summary>
         public FurtherOutputs Further { get; init; } = FurtherOutputs.None;
 
@@ -36,7 +43,7 @@ internal static class ScreenRun
 
         /// <summary>All files that the run reads, each with what it is for.</summary>
         public IEnumerable<(string Name, string Path)> NamedInputs =>
-            new[] { ("model", Model) }.Concat(Forces.Select(f => ("forces", f))).Concat(new[] { ("settings", Settings), ("decisions", Decisions), ("decided-on", DecidedOn) }.Where(i => i.Item2 is not null).Select(i => (i.Item1, i.Item2!)));
+            new[] { ("model", Model) }.Concat(Forces.Select(f => ("forces", f))).Concat(new[] { ("settings", Settings), ("decisions", Decisions), ("decided-on", DecidedOn), ("earlier", Earlier) }.Where(i => i.Item2 is not null).Select(i => (i.Item1, i.Item2!)));
     }
 
     /// <summary>A finished run: its outputs are in place.</summary>
@@ -57,6 +64,7 @@ internal static class ScreenRun
         var done = Run(options, names, log, ProgressDisplay.Start, (_, _) => { }, cancellation);
         Summary.Print(done.Record, names, done.ModelWritten);
         if (options.SetTemplate && done.Record.Model.ReadAs == "IFC2X3") Console.Out.WriteLine("no set template is written: IFC2X3 knows none");
+        if (options.Pdf is { } printed) Console.Out.WriteLine($"wrote {printed}");
         foreach (var path in options.Further.Written(done.Record)) Console.Out.WriteLine($"wrote {path}");
         foreach (var path in options.Further.NotWritten(done.Record)) Console.Out.WriteLine($"not written: {path}; nothing that was missing can be said in its format, see the list in .csv or .html");
         return ExitCodes.Of(done.Record);
@@ -76,9 +84,11 @@ internal static class ScreenRun
         using var read = RunInputs.Read(options.Model, options.Forces, options.Settings, diagnostics, log.Write);
         if (names.Clashes(options.Inputs).FirstOrDefault() is { } clash)
             throw new Failure(ExitCodes.Usage, $"The output '{clash}' would be an input of this run; give another folder with --out DIR.");
-        OutputNames.RefuseClashes(options.Further.Paths, [.. options.Inputs, names.CheckedModel, names.Report, names.MembersTable, names.RunRecord]);
+        OutputNames.RefuseClashes([.. options.Further.Paths, .. options.Pdf is { } asked ? new[] { asked } : []], [.. options.Inputs, names.CheckedModel, names.Report, names.MembersTable, names.RunRecord]);
         options.Further.RefuseUnknown();
 
+        var browser = options.Pdf is null ? null : PdfPrinter.Find();
+        var earlier = options.Earlier is { } before ? RunRecordFile.Read(before) : null;
         var decisions = Decisions(options, diagnostics, log);
         var (timestamp, isGiven) = Time(options);
 
@@ -100,7 +110,7 @@ internal static class ScreenRun
         if (outcome is null) throw new Failure(ExitCodes.Usage, "The forces table does not fit the model; nothing was written.");
 
         cancellation.ThrowIfCancellationRequested();
-        WriteOutputs(options, names, outcome, more);
+        WriteOutputs(options, names, outcome, Report(outcome, earlier, browser, cancellation), more);
         return new Done(outcome.Record, outcome.CanWriteModel);
     }
 
@@ -149,7 +159,13 @@ internal static class ScreenRun
         throw new Failure(ExitCodes.Usage, $"'{given}' is no time; write it as 2026-01-31T10:00:00Z.");
     }
 
-    private static void WriteOutputs(Options options, OutputNames names, ScreeningOutcome outcome, Action<OutputSet, ScreeningRecord> more)
+    private static (byte[] Html, byte[]? Pdf) Report(ScreeningOutcome outcome, ScreeningRecord? earlier, string? browser, CancellationToken cancellation)
+    {
+        var html = HtmlReport.Render(outcome.Record, earlier is null ? null : RunComparison.Of(earlier, outcome.Record));
+        return (Encoding.UTF8.GetBytes(html), browser is null ? null : PdfPrinter.Print(browser, html, cancellation));
+    }
+
+    private static void WriteOutputs(Options options, OutputNames names, ScreeningOutcome outcome, (byte[] Html, byte[]? Pdf) report, Action<OutputSet, ScreeningRecord> more)
     {
         try
         {
@@ -158,7 +174,8 @@ internal static class ScreenRun
             using var files = new OutputSet();
             if (outcome.CanWriteModel) files.Add(names.CheckedModel, outcome.WriteModel);
 
-            files.Add(names.Report, Encoding.UTF8.GetBytes(HtmlReport.Render(outcome.Record)));
+            files.Add(names.Report, report.Html);
+            if (report.Pdf is { } pdf) files.Add(options.Pdf!, pdf);
             files.Add(names.MembersTable, MembersTable.Write(outcome.Record));
             files.Add(names.RunRecord, RunRecord.Write(outcome.Record));
             options.Further.AddTo(files, outcome.Record);

@@ -5,4 +5,7 @@ public enum DisplayUnits
 {
     /// <summary>mm, kN, kN·m, MPa.</summary>
     Si,
+
+    /// <summary>in, ft, kip, kip·ft, ksi.</summary>
+    Us,
 }

@@ -47,7 +47,7 @@ internal static class SettingKeys
     public static readonly WordTable<bool> MissingComponents = new(("refuse", false), ("zero", true));
     public static readonly WordTable<bool> UnknownMembers = new(("refuse", false), ("list", true));
     public static readonly WordTable<SituationKind> Kinds = new(("service", SituationKind.Service), ("design", SituationKind.Design));
-    public static readonly WordTable<DisplayUnits> Displays = new(("si", DisplayUnits.Si));
+    public static readonly WordTable<DisplayUnits> Displays = new(("si", DisplayUnits.Si), ("us", DisplayUnits.Us));
 
     /// <summary>Unit types that may be named for models that lack them, in a fixed order.</summary>
     public static readonly ImmutableArray<string> UnitTypes = ["LENGTHUNIT", "FORCEUNIT", "PRESSUREUNIT", "TORQUEUNIT", "MODULUSOFELASTICITYUNIT"];

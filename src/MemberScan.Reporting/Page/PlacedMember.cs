@@ -11,6 +11,9 @@ public sealed record PlacedMember(MemberResult Member, string Anchor)
     /// <summary>Largest utilization known [-]; null when nothing could be evaluated.</summary>
     public double? Utilization => Member.Governing?.Utilization;
 
+    /// <summary>Whether the page holds its full sheet.</summary>
+    public bool HasSheet { get; init; }
+
     /// <summary>Outline of the section that decides; empty where its designation tells the form.</summary>
     public ImmutableArray<ImmutableArray<RingPoint>> Rings { get; init; } = [];
 }

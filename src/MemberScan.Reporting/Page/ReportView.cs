@@ -3,6 +3,7 @@ using System.Globalization;
 using MemberScan.Model.Verdicts;
 using MemberScan.Reporting.Display;
 using MemberScan.Reporting.Drawing;
+using MemberScan.Screening.Comparison;
 using MemberScan.Screening.Record;
 
 namespace MemberScan.Reporting.Page;
@@ -16,6 +17,12 @@ public sealed class ReportView
     /// <summary>Overstressed candidates that get a sheet, the worst first; the others are rows of the list.</summary>
     public const int LargestNumberOfSheets = 500;
 
+    /// <summary>Sheets that are printed in full, the worst first; each other overstressed candidate is printed on a quarter of a page.</summary>
+    public const int SheetsPrintedInFull = 10;
+
+    /// <summary>Candidates that moved since an earlier run and are listed; the compare command tells of all.</summary>
+    public const int LargestNumberOfMovements = 200;
+
     /// <summary>Stations of a sheet's table of forces.</summary>
     public const int LargestNumberOfStations = 200;
 
@@ -26,10 +33,12 @@ public sealed class ReportView
     public const int LargestNumberOfTraceLines = 300;
 
     /// <summary>Orders a record.</summary>
-    public ReportView(ScreeningRecord record)
+    /// <param name="record">The record.</param>
+    /// <param name="changes">What changed against an earlier run; null when none is given.</param>
+    public ReportView(ScreeningRecord record, ComparisonRecord? changes = null)
     {
         ArgumentNullException.ThrowIfNull(record);
-        Record = record;
+        (Record, Changes, Units) = (record, changes, UnitSet.Of(record));
         var anchors = MemberAnchors.OfAll(record.Members.Select(m => m.Key));
         var rings = record.Sections.GroupBy(s => s.Designation, StringComparer.Ordinal).Where(g => g.Count() == 1).ToDictionary(g => g.Key, g => g.First().Rings, StringComparer.Ordinal);
         var placed = record.Members.Select((member, index) => new PlacedMember(member, anchors[index])
@@ -40,7 +49,7 @@ public sealed class ReportView
         // A stable sort keeps the order of the model where utilizations are equal.
         var ranked = placed.OrderByDescending(p => p.Utilization ?? double.NegativeInfinity).ToImmutableArray();
         Worst = [.. ranked.Where(p => p.Utilization is not null).Take(WorstShown)];
-        Overstressed = [.. ranked.Where(p => p.Member.Verdict == Verdict.Overstressed)];
+        Overstressed = [.. ranked.Where(p => p.Member.Verdict == Verdict.Overstressed).Select((p, rank) => p with { HasSheet = rank < LargestNumberOfSheets })];
         WithinLimit = [.. ranked.Where(p => p.Member.Verdict == Verdict.WithinLimit)];
         NotChecked =
         [
@@ -50,10 +59,21 @@ public sealed class ReportView
                 .Select(group => new ReasonGroup(group.Key, [.. group])),
         ];
         Spread = UtilizationSpread.Of(record.Members);
+        var withSheet = Overstressed.Where(p => p.HasSheet).ToDictionary(p => p.Anchor, StringComparer.Ordinal);
+        Placed = [.. placed.Select(p => withSheet.GetValueOrDefault(p.Anchor, p))];
     }
 
     /// <summary>The record.</summary>
     public ScreeningRecord Record { get; }
+
+    /// <summary>What changed against an earlier run; null when none is given.</summary>
+    public ComparisonRecord? Changes { get; }
+
+    /// <summary>Units in which the page shows the values of the record.</summary>
+    public UnitSet Units { get; }
+
+    /// <summary>All candidates in the order of the model.</summary>
+    public ImmutableArray<PlacedMember> Placed { get; }
 
     /// <summary>The candidates of largest utilization, whatever their verdict, worst first; at most <see cref="WorstShown"/>.</summary>
     public ImmutableArray<PlacedMember> Worst { get; }

@@ -2,19 +2,25 @@ using System.Globalization;
 using System.Security.Cryptography;
 using System.Text;
 using MemberScan.Reporting.Display;
+using MemberScan.Reporting.Script;
+using MemberScan.Reporting.Space;
 using MemberScan.Screening.Record;
 
 namespace MemberScan.Reporting.Style;
 
 /// <summary>The page's one style sheet, with what stands in the margins of each printed page, and its hash for the content policy.</summary>
 /// <param name="Text">The style sheet; line ends are LF, and it holds no <c>&lt;</c>, so that nothing in it can end its element.</param>
-/// <param name="Policy">The content security policy: nothing may be loaded, only this style sheet applies.</param>
+/// <param name="Policy">The content security policy: nothing may be loaded, only this style sheet applies and only the embedded scripts run.</param>
 public sealed record ReportStyle(string Text, string Policy)
 {
     /// <summary>Most UTF-16 units of the file name in the page margin.</summary>
     public const int LongestMarginText = 60;
 
-    private static readonly string s_sheet = ReadSheet();
+    /// <summary>Digits of the model's SHA-256 in the page margin.</summary>
+    public const int RevisionDigits = 12;
+
+    // The members' colours follow the sheet: they are data of the scale.
+    private static readonly string s_sheet = Read("report.css") + Read("members.css") + ScaleRules();
 
     /// <summary>The style sheet for a record.</summary>
     public static ReportStyle For(ScreeningRecord record)
@@ -22,16 +28,39 @@ public sealed record ReportStyle(string Text, string Policy)
         ArgumentNullException.ThrowIfNull(record);
         var text = s_sheet + Margins(record);
         var hash = Convert.ToBase64String(SHA256.HashData(Encoding.UTF8.GetBytes(text)));
-        return new ReportStyle(text, $"default-src 'none'; style-src 'sha256-{hash}'; base-uri 'none'; form-action 'none'");
+        return new ReportStyle(text, $"default-src 'none'; style-src 'sha256-{hash}'; script-src {PageScripts.Embedded.Sources}; base-uri 'none'; form-action 'none'");
     }
 
     private static string Margins(ScreeningRecord record) =>
         "\n@page {\n"
         + $"  @top-left {{ content: {Quoted(Short(record.Model.FileName))}; }}\n"
         + $"  @top-right {{ content: {Quoted("Run " + Short(record.RunId))}; }}\n"
-        + $"  @bottom-left {{ content: {Quoted("MemberScan " + Short(record.Version) + ", screening aid; see the cautions")}; }}\n"
+        + $"  @bottom-left {{ content: {Quoted("MemberScan " + Short(record.Version) + ", screening aid, see the cautions")}; }}\n"
+        + $"  @top-center {{ content: {Quoted(Revision(record))}; }}\n"
         + "  @bottom-right { content: \"Page \" counter(page) \" of \" counter(pages); }\n"
         + "}\n";
+
+    // Which state of the model was screened: the beginning of its hash and the time stamp of its header.
+    private static string Revision(ScreeningRecord record)
+    {
+        var (hash, time) = (record.Model.Sha256, record.Model.TimeStamp);
+        return $"Revision {Short(hash[..Math.Min(hash.Length, RevisionDigits)])}{(time.Length > 0 ? ", " + Short(time) : "")}";
+    }
+
+    private static string ScaleRules()
+    {
+        var rules = new StringBuilder();
+        for (var i = 0; i < UtilizationScale.All.Length; i++)
+        {
+            var (colour, isOver, isOpen) = (UtilizationScale.All[i].Colour, i >= UtilizationScale.UpToLimit.Length, i == UtilizationScale.All.Length - 1);
+            var stroke = isOpen ? "stroke: var(--open); stroke-dasharray: 3 2;" : isOver ? $"stroke: {colour}; stroke-width: 2.6;" : $"stroke: {colour};";
+            var ground = isOpen ? $"radial-gradient(circle, #5d5413 1.2px, {colour} 1.6px) 0 0 / 6px 6px"
+                : isOver ? $"repeating-linear-gradient(135deg, #ffeed9 0 2px, {colour} 2px 6px)" : colour;
+            rules.Append(CultureInfo.InvariantCulture, $"\n.step{i} {{ {stroke} }}\n.patch{i} {{ background: {ground}; }}");
+        }
+
+        return rules.Append('\n').ToString();
+    }
 
     private static string Short(string text)
     {
@@ -55,10 +84,10 @@ public sealed record ReportStyle(string Text, string Policy)
         return quoted.Append('"').ToString();
     }
 
-    private static string ReadSheet()
+    private static string Read(string name)
     {
-        using var stream = typeof(ReportStyle).Assembly.GetManifestResourceStream("report.css")
-            ?? throw new InvalidOperationException("The style sheet is missing from the assembly.");
+        using var stream = typeof(ReportStyle).Assembly.GetManifestResourceStream(name)
+            ?? throw new InvalidOperationException("A style sheet is missing from the assembly.");
         using var reader = new StreamReader(stream, Encoding.UTF8);
         return reader.ReadToEnd().ReplaceLineEndings("\n");
     }

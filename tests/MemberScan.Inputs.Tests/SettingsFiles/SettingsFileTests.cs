@@ -112,7 +112,7 @@ public sealed class SettingsFileTests
         { "{\"basis\": []}", "INP-0104", 1, 11, "basis is a list; give an object in braces" },
         { "{\"basis\": {\"service\": {\"omega\": \"1.67\"}}}", "INP-0104", 1, 33, "basis.service.omega is a text; give a number without quotes" },
         { "{\"basis\": {\"service\": {\"omega\": null}}}", "INP-0104", 1, 33, "basis.service.omega is null; give a number without quotes" },
-        { "{\"display\": 1}", "INP-0104", 1, 13, "display is a number; give the text \"si\"" },
+        { "{\"display\": 1}", "INP-0104", 1, 13, "display is a number; give one of the texts \"si\", \"us\"" },
         { "{\"candidates\": {\"always\": \"IfcBeam\"}}", "INP-0104", 1, 27, "candidates.always is a text; give a list in square brackets" },
         { "{\"candidates\": {\"always\": [7]}}", "INP-0104", 1, 28, "candidates.always is a number; give a text in quotes" },
         { "{\"forces\": {\"kinds\": [true]}}", "INP-0104", 1, 23, "forces.kinds[1] is true or false; give an object in braces" },

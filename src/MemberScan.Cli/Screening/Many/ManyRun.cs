@@ -28,6 +28,8 @@ internal static class ManyRun
     {
         if (options.Workers is < 1 or > MostWorkers)
             throw new Failure(ExitCodes.Usage, string.Create(CultureInfo.InvariantCulture, $"--workers {options.Workers} is out of range; give 1 to {MostWorkers}."));
+        if (options.Each.Earlier is not null || options.Each.Pdf is not null)
+            throw new Failure(ExitCodes.Usage, $"{(options.Each.Pdf is null ? "--earlier" : "--pdf")} goes with a single model; screen the models one by one for it.");
         ScreenRun.RefuseWrong(options.Each);
         var jobs = ModelJob.Of(ModelList.Of(options.Models), options.Each, options.ForcesBeside);
         var index = IndexFolder(options);
