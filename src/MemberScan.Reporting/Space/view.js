@@ -579,8 +579,8 @@ memberScan.startView = (container, data) => {
     return space;
   }
 
-  space.furnish();
   container.hidden = false;
+  space.furnish();
   document.getElementById('elevation')?.classList.add('replaced');
   return space;
 };
