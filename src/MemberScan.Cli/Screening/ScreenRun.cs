@@ -122,7 +122,7 @@ internal static class ScreenRun
                 files.Add(names.CheckedModel, model.WrittenSpan);
             }
 
-            files.Add(names.Report, Encoding.UTF8.GetBytes(HtmlReport.Render(outcome.Record)));
+            files.Add(names.Report, Encoding.UTF8.GetBytes(HtmlReport.Render(outcome.Record, outcome.Sheets)));
             files.Add(names.MembersTable, MembersTable.Write(outcome.Record));
             files.Add(names.RunRecord, RunRecord.Write(outcome.Record));
             options.Further.AddTo(files, outcome.Record);

@@ -1,5 +1,6 @@
 using System.Collections.Immutable;
 using MemberScan.Screening.Record;
+using MemberScan.Screening.Sheets;
 
 namespace MemberScan.Reporting.Page;
 
@@ -13,4 +14,7 @@ public sealed record PlacedMember(MemberResult Member, string Anchor)
 
     /// <summary>Outline of the section that decides; empty where its designation tells the form.</summary>
     public ImmutableArray<ImmutableArray<RingPoint>> Rings { get; init; } = [];
+
+    /// <summary>Makes what the sheet draws; null where only the record is at hand.</summary>
+    public SheetMaker? Sheets { get; init; }
 }

@@ -4,6 +4,7 @@ using MemberScan.Model.Verdicts;
 using MemberScan.Reporting.Display;
 using MemberScan.Reporting.Drawing;
 using MemberScan.Screening.Record;
+using MemberScan.Screening.Sheets;
 
 namespace MemberScan.Reporting.Page;
 
@@ -25,8 +26,12 @@ public sealed class ReportView
     /// <summary>Lines of a sheet's calculation.</summary>
     public const int LargestNumberOfTraceLines = 300;
 
+    private readonly ImmutableArray<PlacedMember> _placed;
+
     /// <summary>Orders a record.</summary>
-    public ReportView(ScreeningRecord record)
+    /// <param name="record">The record.</param>
+    /// <param name="sheets">Makes what sheets draw; null where only the record is at hand.</param>
+    public ReportView(ScreeningRecord record, SheetMaker? sheets = null)
     {
         ArgumentNullException.ThrowIfNull(record);
         Record = record;
@@ -35,7 +40,10 @@ public sealed class ReportView
         var placed = record.Members.Select((member, index) => new PlacedMember(member, anchors[index])
         {
             Rings = member.Governing is { } governing ? rings.GetValueOrDefault(governing.Section, []) : [],
+            Sheets = sheets,
         }).ToImmutableArray();
+
+        _placed = placed;
 
         // A stable sort keeps the order of the model where utilizations are equal.
         var ranked = placed.OrderByDescending(p => p.Utilization ?? double.NegativeInfinity).ToImmutableArray();
@@ -69,6 +77,13 @@ public sealed class ReportView
 
     /// <summary>How the utilizations spread.</summary>
     public UtilizationSpread Spread { get; }
+
+    /// <summary>The candidates with a known stress whose sheets are not written out.</summary>
+    public ImmutableArray<PlacedMember> WithoutSheet =>
+        [.. Overstressed.Skip(LargestNumberOfSheets), .. NotChecked.SelectMany(g => g.Members).Where(p => p.Member.Governing is not null), .. WithinLimit];
+
+    /// <summary>A candidate with its place; null when it is none of the record's.</summary>
+    public PlacedMember? Find(MemberResult member) => _placed.FirstOrDefault(p => ReferenceEquals(p.Member, member));
 
     /// <summary>The three counts and their sum, in words.</summary>
     public string SumLine

@@ -8,22 +8,26 @@ namespace MemberScan.Reporting.Style;
 
 /// <summary>The page's one style sheet, with what stands in the margins of each printed page, and its hash for the content policy.</summary>
 /// <param name="Text">The style sheet; line ends are LF, and it holds no <c>&lt;</c>, so that nothing in it can end its element.</param>
-/// <param name="Policy">The content security policy: nothing may be loaded, only this style sheet applies.</param>
+/// <param name="Policy">The content security policy: nothing may be loaded, only this style sheet and the page's own script, where it has one, apply.</param>
 public sealed record ReportStyle(string Text, string Policy)
 {
     /// <summary>Most UTF-16 units of the file name in the page margin.</summary>
     public const int LongestMarginText = 60;
 
-    private static readonly string s_sheet = ReadSheet();
+    private static readonly string s_sheet = Read("report.css") + "\n" + Read("sheet.css");
 
     /// <summary>The style sheet for a record.</summary>
-    public static ReportStyle For(ScreeningRecord record)
+    /// <param name="record">The record.</param>
+    /// <param name="script">The page's script; null where it has none.</param>
+    public static ReportStyle For(ScreeningRecord record, string? script = null)
     {
         ArgumentNullException.ThrowIfNull(record);
         var text = s_sheet + Margins(record);
-        var hash = Convert.ToBase64String(SHA256.HashData(Encoding.UTF8.GetBytes(text)));
-        return new ReportStyle(text, $"default-src 'none'; style-src 'sha256-{hash}'; base-uri 'none'; form-action 'none'");
+        var scripts = script is null ? "" : $"script-src {Hash(script)}; ";
+        return new ReportStyle(text, $"default-src 'none'; {scripts}style-src {Hash(text)}; base-uri 'none'; form-action 'none'");
     }
+
+    private static string Hash(string text) => $"'sha256-{Convert.ToBase64String(SHA256.HashData(Encoding.UTF8.GetBytes(text)))}'";
 
     private static string Margins(ScreeningRecord record) =>
         "\n@page {\n"
@@ -55,9 +59,9 @@ public sealed record ReportStyle(string Text, string Policy)
         return quoted.Append('"').ToString();
     }
 
-    private static string ReadSheet()
+    private static string Read(string name)
     {
-        using var stream = typeof(ReportStyle).Assembly.GetManifestResourceStream("report.css")
+        using var stream = typeof(ReportStyle).Assembly.GetManifestResourceStream(name)
             ?? throw new InvalidOperationException("The style sheet is missing from the assembly.");
         using var reader = new StreamReader(stream, Encoding.UTF8);
         return reader.ReadToEnd().ReplaceLineEndings("\n");
