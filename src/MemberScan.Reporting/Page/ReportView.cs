@@ -40,6 +40,7 @@ public sealed class ReportView
         var placed = record.Members.Select((member, index) => new PlacedMember(member, anchors[index])
         {
             Rings = member.Governing is { } governing ? rings.GetValueOrDefault(governing.Section, []) : [],
+            Contacts = record.Contacts,
             Sheets = sheets,
         }).ToImmutableArray();
 

@@ -23,6 +23,8 @@ internal sealed class MemberChecker(SectionLibrary library, Basis basis, double 
     /// <summary>Bend radius over depth below which a straight-bar stress supports no verdict within the limit.</summary>
     private const double SharpBend = 10;
 
+    private const string EitherEnd = "tapered: every place is checked with the section of either end, the less favourable decides; one end is smaller in every dimension, so that it bounds what lies between";
+
     private readonly SituationChecker _situations = new(library, basis, lengthFactor);
 
     /// <summary>Checks a candidate.</summary>
@@ -43,7 +45,7 @@ internal sealed class MemberChecker(SectionLibrary library, Basis basis, double 
             all.Add(string.Create(CultureInfo.InvariantCulture, $"Poisson's ratio {poisson.Value:0.0##} is the default; the model gives none"));
 
         Reason? first = (member.Section as Finding<SectionFinding>.Missing)?.Why
-            ?? OutOfRange(section)
+            ?? OutOfRange(section, member.EndSection)
             ?? (member.Material.Yield as Finding<double>.Missing)?.Why
             ?? (forces.Count == 0 ? new Reason(ReasonCode.NoForces, "no section forces for this member in any source") : null)
             ?? (member.Length as Finding<double>.Missing)?.Why
@@ -52,7 +54,15 @@ internal sealed class MemberChecker(SectionLibrary library, Basis basis, double 
         var findings = new List<SituationFindings>();
         if (first is null)
         {
-            var subject = new SituationChecker.Subject(section!.Value, length!.Value, strength!.Value, poisson.Value, member.Material) { Taper = TaperOf(section.Value, member.EndSection) };
+            var taper = TaperOf(section!.Value, member.EndSection);
+            var shapes = section.Value;
+            if (member.EndSection is { } atEnd && taper is null)
+            {
+                shapes = shapes with { Shapes = [.. shapes.Shapes, .. atEnd.Shapes] };
+                all.Add(EitherEnd);
+            }
+
+            var subject = new SituationChecker.Subject(shapes, length!.Value, strength!.Value, poisson.Value, member.Material) { Taper = taper };
             for (var i = 0; i < forces.Count; i++) findings.Add(_situations.Check(subject, forces[i], i));
             first = Barred(member, section.Value, findings);
         }
@@ -90,9 +100,9 @@ internal sealed class MemberChecker(SectionLibrary library, Basis basis, double 
     private static Taper? TaperOf(SectionFinding start, SectionFinding? end) => end is null ? null : Taper.Of(start.Shape, end.Shape);
 
     /// <summary>Dimensions of which a sound section is made, but whose powers leave the range of numbers.</summary>
-    private static Reason? OutOfRange(Finding<SectionFinding>.Found? section)
+    private static Reason? OutOfRange(Finding<SectionFinding>.Found? section, SectionFinding? end)
     {
-        var shape = section?.Value.Shapes.FirstOrDefault(s => !NumberRange.Holds(s));
+        var shape = section?.Value.Shapes.AddRange(end?.Shapes ?? []).FirstOrDefault(s => !NumberRange.Holds(s));
         return shape is null ? null : new Reason(ReasonCode.SectionInvalid, $"the section {shape.Designation} is so small or so large that its properties are beyond the range of numbers");
     }
 

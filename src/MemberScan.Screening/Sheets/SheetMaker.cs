@@ -91,7 +91,7 @@ public sealed class SheetMaker
 
         var taper = member.EndSection is { } end ? Taper.Of(section.Value.Shape, end.Shape) : null;
         return taper is null
-            ? section.Value.Shapes.FirstOrDefault(s => s.Designation == governing.Section)
+            ? section.Value.Shapes.Concat(member.EndSection?.Shapes ?? []).FirstOrDefault(s => s.Designation == governing.Section)
             : taper.At(Math.Clamp(governing.Station / result.Length!.Value, 0, 1));
     }
 

@@ -2,6 +2,7 @@ using System.Collections.Concurrent;
 using MemberScan.Foundation.Diagnostics;
 using MemberScan.Inputs.ForcesTables;
 using MemberScan.Inputs.SettingsFiles;
+using MemberScan.Part21.Containers;
 using MemberScan.Screening;
 
 namespace MemberScan.Reporting.Tests.Sheets;
@@ -22,8 +23,7 @@ internal static class Screened
         var outcome = Screener.Run(
             new ScreeningRequest
             {
-                ModelName = name + ".ifc",
-                ModelBytes = File.ReadAllBytes(Path.Combine(Folder(), name + ".ifc")),
+                Model = ModelText.Of(File.ReadAllBytes(Path.Combine(Folder(), name + ".ifc")), name + ".ifc"),
                 Settings = Settings.Default,
                 Tables = File.Exists(table) ? [ForcesTable.Read(File.ReadAllBytes(table), name + ".forces.csv", diagnostics)!] : [],
                 Timestamp = "2031-04-02T08:15:00Z",
