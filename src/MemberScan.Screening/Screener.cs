@@ -12,6 +12,7 @@ using MemberScan.Screening.Checking;
 using MemberScan.Screening.Decisions;
 using MemberScan.Screening.Record;
 using MemberScan.Screening.Record.Given;
+using MemberScan.Screening.Sheets;
 
 namespace MemberScan.Screening;
 
@@ -35,7 +36,11 @@ public static class Screener
         var library = new SectionLibrary();
         var results = DecisionCarrier.Carry(Check(request, contents, library, progress, cancellation), request.Decisions, request.DecidedOn, diagnostics);
         var record = Record(request, contents, results, library, diagnostics);
-        return new ScreeningOutcome(record, contents.MayWriteModel ? contents.Model : null, contents.Text, RunIdentity.CreationDate(request.TimestampIsGiven ? request.Timestamp : "", contents.File.Header.TimeStamp)) { WithSetTemplate = request.WithSetTemplate };
+        return new ScreeningOutcome(record, contents.MayWriteModel ? contents.Model : null, contents.Text, RunIdentity.CreationDate(request.TimestampIsGiven ? request.Timestamp : "", contents.File.Header.TimeStamp))
+        {
+            WithSetTemplate = request.WithSetTemplate,
+            Sheets = new SheetMaker(contents, library, request.Settings.Basis),
+        };
     }
 
     private static ImmutableArray<MemberResult> Check(

@@ -3,6 +3,7 @@ using System.Collections.Immutable;
 using MemberScan.Ifc;
 using MemberScan.Ifc.WriteBack;
 using MemberScan.Screening.Record;
+using MemberScan.Screening.Sheets;
 
 namespace MemberScan.Screening;
 
@@ -21,6 +22,9 @@ public sealed class ScreeningOutcome
 
     /// <summary>The record.</summary>
     public ScreeningRecord Record { get; }
+
+    /// <summary>Makes what member sheets draw, on demand.</summary>
+    public required SheetMaker Sheets { get; init; }
 
     /// <summary>Whether a checked model can be written: the text was read to its end, has a data section, and its numbers leave room for ours.</summary>
     public bool CanWriteModel => _model is { File: { ReadToEnd: true, InsertionOffset: >= 0 } file } && file.HighestId <= file.HighestPossibleId;

@@ -147,10 +147,10 @@ public sealed class HtmlReportTests
         var sheet = Parse(FerryLanding.Small()).GetElementById("member-" + FerryLanding.RailKey)!;
 
         var lines = sheet.QuerySelectorAll(".trace tbody tr").Select(r => string.Join(" | ", r.Children.Select(c => c.TextContent)));
-        Assert.Contains("A | input | 453.4\u00A0mm² | closed form of the section", lines);
-        Assert.Contains("Iy | input | 115\u202F900\u00A0mm⁴ | closed form of the section", lines);
-        Assert.Contains("σ | N/A + My·z/Iy − Mz·y/Iz | 273.4\u00A0MPa | beam theory", lines);
-        Assert.Contains("fy/Ω | fy/1.67 | 212.6\u00A0MPa | allowable stress", lines);
+        Assert.Contains("A | input | 453.4\u00A0mm² | closed form of the section | 0.7028\u00A0in²", lines);
+        Assert.Contains("Iy | input | 115\u202F900\u00A0mm⁴ | closed form of the section | 0.2784\u00A0in⁴", lines);
+        Assert.Contains("σ | N/A + My·z/Iy − Mz·y/Iz | 273.4\u00A0MPa | beam theory | 39.65\u00A0ksi", lines);
+        Assert.Contains("fy/Ω | fy/1.67 | 212.6\u00A0MPa | allowable stress | 30.83\u00A0ksi", lines);
         Assert.NotNull(sheet.QuerySelector("svg path.material"));
         Assert.True(sheet.QuerySelector("details")!.HasAttribute("open"));
     }

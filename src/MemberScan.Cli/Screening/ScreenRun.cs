@@ -161,7 +161,7 @@ internal static class ScreenRun
 
     private static (byte[] Html, byte[]? Pdf) Report(ScreeningOutcome outcome, ScreeningRecord? earlier, string? browser, CancellationToken cancellation)
     {
-        var html = HtmlReport.Render(outcome.Record, earlier is null ? null : RunComparison.Of(earlier, outcome.Record));
+        var html = HtmlReport.Render(outcome.Record, earlier is null ? null : RunComparison.Of(earlier, outcome.Record), outcome.Sheets);
         return (Encoding.UTF8.GetBytes(html), browser is null ? null : PdfPrinter.Print(browser, html, cancellation));
     }
 

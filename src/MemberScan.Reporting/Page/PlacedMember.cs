@@ -1,5 +1,7 @@
 using System.Collections.Immutable;
+using MemberScan.Screening.Contacts;
 using MemberScan.Screening.Record;
+using MemberScan.Screening.Sheets;
 
 namespace MemberScan.Reporting.Page;
 
@@ -16,4 +18,10 @@ public sealed record PlacedMember(MemberResult Member, string Anchor)
 
     /// <summary>Outline of the section that decides; empty where its designation tells the form.</summary>
     public ImmutableArray<ImmutableArray<RingPoint>> Rings { get; init; } = [];
+
+    /// <summary>The contacts of the run, which spans and supports of load presets come from.</summary>
+    public ImmutableArray<Contact> Contacts { get; init; } = [];
+
+    /// <summary>Makes what the sheet draws; null where only the record is at hand.</summary>
+    public SheetMaker? Sheets { get; init; }
 }

@@ -5,6 +5,7 @@ using MemberScan.Reporting.Display;
 using MemberScan.Reporting.Drawing;
 using MemberScan.Screening.Comparison;
 using MemberScan.Screening.Record;
+using MemberScan.Screening.Sheets;
 
 namespace MemberScan.Reporting.Page;
 
@@ -32,10 +33,13 @@ public sealed class ReportView
     /// <summary>Lines of a sheet's calculation.</summary>
     public const int LargestNumberOfTraceLines = 300;
 
+    private readonly ImmutableArray<PlacedMember> _placed;
+
     /// <summary>Orders a record.</summary>
     /// <param name="record">The record.</param>
     /// <param name="changes">What changed against an earlier run; null when none is given.</param>
-    public ReportView(ScreeningRecord record, ComparisonRecord? changes = null)
+    /// <param name="sheets">Makes what sheets draw; null where only the record is at hand.</param>
+    public ReportView(ScreeningRecord record, ComparisonRecord? changes = null, SheetMaker? sheets = null)
     {
         ArgumentNullException.ThrowIfNull(record);
         (Record, Changes, Units) = (record, changes, UnitSet.Of(record));
@@ -44,7 +48,11 @@ public sealed class ReportView
         var placed = record.Members.Select((member, index) => new PlacedMember(member, anchors[index])
         {
             Rings = member.Governing is { } governing ? rings.GetValueOrDefault(governing.Section, []) : [],
+            Contacts = record.Contacts,
+            Sheets = sheets,
         }).ToImmutableArray();
+
+        _placed = placed;
 
         // A stable sort keeps the order of the model where utilizations are equal.
         var ranked = placed.OrderByDescending(p => p.Utilization ?? double.NegativeInfinity).ToImmutableArray();
@@ -89,6 +97,13 @@ public sealed class ReportView
 
     /// <summary>How the utilizations spread.</summary>
     public UtilizationSpread Spread { get; }
+
+    /// <summary>The candidates with a known stress whose sheets are not written out.</summary>
+    public ImmutableArray<PlacedMember> WithoutSheet =>
+        [.. Overstressed.Skip(LargestNumberOfSheets), .. NotChecked.SelectMany(g => g.Members).Where(p => p.Member.Governing is not null), .. WithinLimit];
+
+    /// <summary>A candidate with its place; null when it is none of the record's.</summary>
+    public PlacedMember? Find(MemberResult member) => _placed.FirstOrDefault(p => ReferenceEquals(p.Member, member));
 
     /// <summary>The three counts and their sum, in words.</summary>
     public string SumLine

@@ -7,6 +7,7 @@
 
   globalThis.memberScan = /** @type {MemberScan} */ ({
     selected: -1,
+    ownsRows: true,
     columns: /** @type {TableColumn[]} */ ([]),
     words: {
       verdicts: ['WITHIN LIMIT', 'OVERSTRESSED', 'NOT CHECKED'],

@@ -94,8 +94,10 @@ interface MemberScan {
   startPanel(data: MemberData): void;
   /** Bundled apart; absent where it was built without Node. */
   startView?: (container: HTMLElement, data: MemberData) => SpaceView | undefined;
-  /** Draws the sheet of a candidate; absent where no drawing is embedded. */
-  showSheet?: (container: HTMLElement, memberKey: string, memberIndex: number) => unknown;
+  /** Whether the table gives rows their sheets; the sheets then add no buttons of their own. */
+  ownsRows: boolean;
+  /** Draws the sheet of a candidate and tells whether the page holds it; absent where no drawing is embedded. */
+  showSheet?: (container: HTMLElement, memberKey: string) => Promise<boolean>;
   /** Selects a candidate everywhere; −1 for none. */
   select(index: number): void;
   /** Index of a key; −1 if there is no such candidate. */

@@ -106,7 +106,9 @@
       }
 
       const place = element('div', 'drawnSheet');
-      if (memberScan.showSheet) memberScan.showSheet(place, data.textOf('key', index), index);
+      memberScan.showSheet?.(place, data.textOf('key', index)).then((has) => {
+        if (!has && data.textOf('situation', index)) place.textContent = 'The page holds no sheet of this member; its numbers stand above and in the run record.';
+      });
       return place;
     }
 

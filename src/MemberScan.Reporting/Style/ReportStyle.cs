@@ -2,7 +2,6 @@ using System.Globalization;
 using System.Security.Cryptography;
 using System.Text;
 using MemberScan.Reporting.Display;
-using MemberScan.Reporting.Script;
 using MemberScan.Reporting.Space;
 using MemberScan.Screening.Record;
 
@@ -10,7 +9,7 @@ namespace MemberScan.Reporting.Style;
 
 /// <summary>The page's one style sheet, with what stands in the margins of each printed page, and its hash for the content policy.</summary>
 /// <param name="Text">The style sheet; line ends are LF, and it holds no <c>&lt;</c>, so that nothing in it can end its element.</param>
-/// <param name="Policy">The content security policy: nothing may be loaded, only this style sheet applies and only the embedded scripts run.</param>
+/// <param name="Policy">The content security policy: nothing may be loaded, only this style sheet applies and only the embedded scripts run, where the page has any.</param>
 public sealed record ReportStyle(string Text, string Policy)
 {
     /// <summary>Most UTF-16 units of the file name in the page margin.</summary>
@@ -20,16 +19,20 @@ public sealed record ReportStyle(string Text, string Policy)
     public const int RevisionDigits = 12;
 
     // The members' colours follow the sheet: they are data of the scale.
-    private static readonly string s_sheet = Read("report.css") + Read("members.css") + ScaleRules();
+    private static readonly string s_sheet = Read("report.css") + Read("members.css") + Read("sheet.css") + ScaleRules();
 
     /// <summary>The style sheet for a record.</summary>
-    public static ReportStyle For(ScreeningRecord record)
+    /// <param name="record">The record.</param>
+    /// <param name="scripts">Sources of the page's scripts, as the policy names them; null where it has none.</param>
+    public static ReportStyle For(ScreeningRecord record, string? scripts = null)
     {
         ArgumentNullException.ThrowIfNull(record);
         var text = s_sheet + Margins(record);
-        var hash = Convert.ToBase64String(SHA256.HashData(Encoding.UTF8.GetBytes(text)));
-        return new ReportStyle(text, $"default-src 'none'; style-src 'sha256-{hash}'; script-src {PageScripts.Embedded.Sources}; base-uri 'none'; form-action 'none'");
+        var ofScripts = scripts is null ? "" : $"script-src {scripts}; ";
+        return new ReportStyle(text, $"default-src 'none'; style-src {Hash(text)}; {ofScripts}base-uri 'none'; form-action 'none'");
     }
+
+    private static string Hash(string text) => $"'sha256-{Convert.ToBase64String(SHA256.HashData(Encoding.UTF8.GetBytes(text)))}'";
 
     private static string Margins(ScreeningRecord record) =>
         "\n@page {\n"

@@ -1,6 +1,6 @@
 using System.Collections.Immutable;
 using MemberScan.Foundation.Geometry;
-using MemberScan.Reporting.Drawing;
+using MemberScan.Reporting.Drawing.Contacts;
 using MemberScan.Screening.Contacts;
 using MemberScan.Screening.Record;
 

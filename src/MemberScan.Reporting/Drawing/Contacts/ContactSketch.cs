@@ -2,7 +2,7 @@ using System.Collections.Immutable;
 using MemberScan.Screening.Contacts;
 using MemberScan.Screening.Record;
 
-namespace MemberScan.Reporting.Drawing;
+namespace MemberScan.Reporting.Drawing.Contacts;
 
 /// <summary>Where a member touches others, and what its assumed loads take for supports and ends.</summary>
 /// <param name="Length">Length of the member [m].</param>

@@ -1,4 +1,4 @@
-namespace MemberScan.Reporting.Drawing;
+namespace MemberScan.Reporting.Drawing.Contacts;
 
 /// <summary>A contact in a sketch.</summary>
 /// <param name="Letter">Its letter.</param>
