@@ -7,6 +7,7 @@ using MemberScan.Cli.Members;
 using MemberScan.Cli.Restoring;
 using MemberScan.Cli.Screening;
 using MemberScan.Cli.Sections;
+using MemberScan.Cli.SettingsFiles;
 
 namespace MemberScan.Cli;
 
@@ -27,7 +28,7 @@ internal static class Program
         Console.OutputEncoding = new UTF8Encoding(encoderShouldEmitUTF8Identifier: false);
         var root = new RootCommand("Screens the secondary steel of building models for combined stress. A screening aid for qualified engineers; not a design, not a certificate.")
         {
-            ScreenCommand.Build(), MembersCommand.Build(), SectionCommand.Build(), FrameCommand.Build(), CompareCommand.Build(), RestoreCommand.Build(),
+            ScreenCommand.Build(), MembersCommand.Build(), SectionCommand.Build(), FrameCommand.Build(), CompareCommand.Build(), RestoreCommand.Build(), SettingsCommand.Build(),
         };
         var parsed = root.Parse(args);
         if (parsed.Errors.Count > 0 && parsed.Action is not (System.CommandLine.Help.HelpAction or null) && !args.Contains("--help"))

@@ -41,7 +41,7 @@ public sealed partial class ReadmeTests
     {
         var commands = Lines().Select(l => l[Call.Length..].Split(' ')[0]).Distinct(StringComparer.Ordinal).Order(StringComparer.Ordinal);
 
-        Assert.Equal(["compare", "frame", "members", "restore", "screen", "section"], commands);
+        Assert.Equal(["compare", "frame", "members", "restore", "screen", "section", "settings"], commands);
     }
 
     [Fact]
@@ -49,11 +49,11 @@ public sealed partial class ReadmeTests
     {
         var text = await File.ReadAllTextAsync(Path.Combine(Memberscan.Root, "README.md"), TestContext.Current.CancellationToken);
         var help = "";
-        foreach (var command in new[] { "screen", "section", "members", "frame", "compare", "restore" }) help += (await Memberscan.Run(command, "--help")).Output;
+        foreach (var command in new[] { "screen", "section", "members", "frame", "compare", "restore", "settings" }) help += (await Memberscan.Run(command, "--help")).Output;
 
         var options = LongOption().Matches(help).Select(m => m.Value).Except(["--help", "--version"]).Distinct(StringComparer.Ordinal).ToArray();
 
-        Assert.Equal(26, options.Length);
+        Assert.Equal(27, options.Length);
         Assert.All(options, option => Assert.Contains(option, text, StringComparison.Ordinal));
     }
 

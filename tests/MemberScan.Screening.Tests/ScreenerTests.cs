@@ -197,6 +197,9 @@ public sealed class ScreenerTests
         return (writer.Build(), table);
     }
 
+    /// <summary>The record of a sample under its forces table and the default settings.</summary>
+    internal static ScreeningRecord Screen(string name) => Screen(s_samples.Value.Single(s => s.Name == name), withTable: true);
+
     private static ScreeningRecord Screen(SampleModel sample, bool withTable) =>
         Screener.Run(Request(sample, withTable), new DiagnosticList(), null, TestContext.Current.CancellationToken)!.Record;
 

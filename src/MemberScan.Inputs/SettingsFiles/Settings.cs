@@ -42,9 +42,24 @@ public sealed record Settings
     /// <summary>Keys that were given; the others are in force as defaults.</summary>
     public required ImmutableHashSet<string> Given { get; init; }
 
+    /// <summary>Line of each key of the file that was read, by its path; empty for the shipped settings.</summary>
+    public ImmutableDictionary<string, int> Places { get; init; } = ImmutableDictionary<string, int>.Empty;
+
     /// <summary>The limits of a member.</summary>
     /// <param name="member">The member.</param>
     public LimitSet LimitsOf(Member member) => LimitRules.FirstOrDefault(rule => rule.When.Fits(member))?.Limits ?? Limits;
+
+    /// <summary>Where a setting in force comes from, in words: "default", or a line of the file.</summary>
+    /// <param name="setting">One of <see cref="Effective"/>.</param>
+    /// <param name="fileName">Name of the file that was read.</param>
+    public string SourceOf(EffectiveSetting setting, string fileName)
+    {
+        ArgumentNullException.ThrowIfNull(setting);
+        if (setting.IsDefault) return "default";
+
+        var key = setting.Key.IndexOf('[', StringComparison.Ordinal) is var bracket and >= 0 ? setting.Key[..bracket] : setting.Key;
+        return Places.TryGetValue(key, out var line) ? string.Create(System.Globalization.CultureInfo.InvariantCulture, $"{fileName}, line {line}") : "command line";
+    }
 
     /// <summary>Every setting in force, in a stable order and as canonical text; computed anew from the values at each call.</summary>
     public ImmutableArray<EffectiveSetting> Effective => EffectiveSettings.Of(this);

@@ -70,7 +70,7 @@ internal sealed class MemberChecker(SectionLibrary library, Settings settings, L
         else
         {
             findings.AddRange(forces.Select(f => new SituationFindings(f)));
-            if (isCheckable && strength is null) required = RequiredYield(member, limits, section!, length!.Value, poisson.Value, forces, all);
+            if (isCheckable && first is { Code: ReasonCode.NoStrength or ReasonCode.StrengthImplausible }) required = RequiredYield(member, limits, section!, length!.Value, poisson.Value, forces, all);
         }
 
         var decisive = Decisive(findings, all, out var other);
@@ -99,6 +99,7 @@ internal sealed class MemberChecker(SectionLibrary library, Settings settings, L
             Governing = governing,
             Checks = CheckList.Of(findings, decisive, withTraces: verdict != Verdict.WithinLimit),
             NextWorst = CheckList.Next(findings, governing),
+            Deflection = CheckList.Deflection(limits, member.Role, findings),
             Margin = 1 - governing?.Utilization,
             RequiredYield = isOverStress ? Hints.RequiredYield(findings) : required,
             NearestSize = isOverStress ? Hints.NearestSize(findings, decisive!.Field.Section) : null,

@@ -38,7 +38,7 @@ internal static partial class ThreadChecks
         if (thread is Finding<ThreadDesignation>.Missing missing)
         {
             var isRod = s_rods.Contains(member.Role, StringComparer.OrdinalIgnoreCase);
-            if (SpeaksOfThread().IsMatch(member.Element.Name) || SpeaksOfThread().IsMatch(member.Element.TypeName) || (isRod && rules.Rule is not null))
+            if (rules.ByMember.Any(entry => MemberSelector.Names(entry.Members, member)) || SpeaksOfThread().IsMatch(member.Element.Name) || SpeaksOfThread().IsMatch(member.Element.TypeName) || (isRod && rules.Rule is not null))
                 findings.Bar(missing.Why);
             else if (isRod)
                 findings.Note("no thread is known; checked as a plain bar on its full section");

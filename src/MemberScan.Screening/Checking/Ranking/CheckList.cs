@@ -1,8 +1,11 @@
 using System.Collections.Immutable;
 using MemberScan.Checks;
 using MemberScan.Checks.Allowable;
+using MemberScan.Checks.Deflection;
 using MemberScan.Mechanics.Sections;
 using MemberScan.Model.Forces;
+using MemberScan.Model.Limits;
+using MemberScan.Model.Verdicts;
 using MemberScan.Screening.Record;
 using MemberScan.Screening.Record.Lines;
 
@@ -39,6 +42,30 @@ internal static class CheckList
             .Concat(findings.SelectMany(f => f.Further.All.Where(c => c is { Decides: true, Utilization: not null })
                 .Select(c => new RankedLine(c.Check.Key, c.Check.Name, f.Forces.Situation.Name, c.Station, c.Utilization!.Value))));
         return [.. all.Where(l => (l.Key, l.Situation) != (governing?.Check, governing?.Situation)).OrderByDescending(l => l.Utilization).Take(Kept)];
+    }
+
+    /// <summary>A limit of deflection that is named for a role: sources of forces give no deflections, so it says that it is not evaluated.</summary>
+    /// <param name="limits">The limits of the member.</param>
+    /// <param name="role">Its role.</param>
+    /// <param name="findings">The situations.</param>
+    public static CheckLine? Deflection(LimitSet limits, string role, IReadOnlyList<SituationFindings> findings)
+    {
+        if (limits.Deflection.FirstOrDefault(l => string.Equals(l.Role, role, StringComparison.OrdinalIgnoreCase)) is not { } limit) return null;
+
+        var situation = findings.Select(f => f.Forces.Situation).FirstOrDefault(s => s.Kind == SituationKind.Service);
+        return new CheckLine
+        {
+            Key = DeflectionNote.Key,
+            Name = $"deflection against {limit.Name}",
+            Decides = false,
+            Clause = $"deflection, {limit.Name}",
+            Situation = situation?.Name ?? "",
+            Kind = Word(SituationKind.Service),
+            Station = null,
+            Utilization = null,
+            Reason = new Reason(ReasonCode.CheckNotEvaluated, situation is null ? "no service situation; a deflection limit is held against service situations alone" : "the source of the forces gives no deflections"),
+            Trace = [],
+        };
     }
 
     private static IEnumerable<CheckLine> OfStress(SituationFindings finding, Found stress, bool withTraces)

@@ -10,6 +10,8 @@ namespace MemberScan.Screening.Checking.Strengths;
 /// <summary>The strength that a member is checked with: as read, beside welds of aluminium that of the welded zone.</summary>
 internal static class StrengthInForce
 {
+    private const string ByName = "by name";
+
     /// <summary>Whether the largest normal stress against given limits is the criterion of a member.</summary>
     public static bool IsBrittle(Material material, LimitSet limits) => limits.Brittle is not null
         && (MaterialFamilies.IsBrittle(MaterialFamilies.Of(material.Name))
@@ -24,6 +26,8 @@ internal static class StrengthInForce
 
         return limits.Welds.FirstOrDefault(rule => MemberSelector.Names(rule.Members, member)) switch
         {
+            // The shipped grades give the welded zone, unless the name itself says that there are no welds.
+            null when yield.Source.StartsWith(ByName, StringComparison.Ordinal) => yield,
             null => new Finding<double>.Missing(new Reason(ReasonCode.NoStrength, string.Create(CultureInfo.InvariantCulture,
                 $"'{material.Name}' is aluminium, whose strength falls beside welds: {yield.Value / 1e6:0.####} MPa ({yield.Source}) holds for the parent metal alone; say in materials.welds that there are no welds, or give the strength beside them"))),
             { WeldedYield: null } => yield with { Source = $"{yield.Source}; no welds, as stated in the settings" },
