@@ -62,6 +62,14 @@ public sealed class IfcModel
     /// <summary>Name of its project; empty if none.</summary>
     public string ProjectName => File.RecordsOf("IFCPROJECT").Select(p => Instances.Text(p[2])).FirstOrDefault() ?? "";
 
+    /// <summary>Keywords in upper case whose instances a model is asked for, for a text that stays on disk.</summary>
+    /// <param name="rules">How the model will be read.</param>
+    public static IReadOnlyCollection<string> KeywordsAsked(ReadingRules rules)
+    {
+        ArgumentNullException.ThrowIfNull(rules);
+        return AskedKeywords.For(rules);
+    }
+
     /// <summary>Opens a model; null, with an error in <paramref name="diagnostics"/>, when its schema is not read.</summary>
     public static IfcModel? Open(Part21File file, ReadingRules rules, DiagnosticList diagnostics)
     {
@@ -83,7 +91,7 @@ public sealed class IfcModel
         var bodies = new BodyReader(_instances, _placements, sweeps, new DiskBodyReader(directrices, Units), new PrimitiveReader(_placements, Units), meshes);
         var facts = new MaterialFactsReader(_instances, Units, _unitReader);
         var materials = new MaterialReader(_instances, _relations, facts, profiles, _rules);
-        return new MemberReader(_instances, _relations, _placements, bodies, profiles, materials, _analytical, Schema, _rules.Candidates, new RoleGuess(_rules.Roles), _diagnostics).Read(isNamed);
+        return new MemberReader(_instances, _relations, _placements, bodies, profiles, materials, _analytical, Schema, _rules.Candidates, _rules.RecogniseMeshes, new RoleGuess(_rules.Roles), _diagnostics).Read(isNamed);
     }
 
     /// <summary>Reads the section forces of candidates from the model's result groups.</summary>
@@ -116,7 +124,7 @@ public sealed class IfcModel
         var profiles = new ProfileReader(_instances, _placements, curves, Units);
         var materials = new MaterialReader(_instances, _relations, new MaterialFactsReader(_instances, Units, _unitReader), profiles, _rules);
         var source = new AnalyticalSource(_instances, _relations, profiles, materials);
-        var stiffness = new StiffnessReader(_instances, _relations, source, new ElasticFactsReader(_instances, Units, _unitReader), members);
+        var stiffness = new StiffnessReader(_instances, _relations, source, new StatedConstantsReader(_instances, _relations, Units, _unitReader), new ElasticFactsReader(_instances, Units, _unitReader), members);
         var boundaries = new BoundaryReader(Units, Schema);
         var tree = new LoadTree(_instances, _rules.Forces);
         var memberLoads = new MemberLoadReader(_instances, _relations, new ActivityPlaces(_instances, _placements, Units), tree, Units, Schema);

@@ -12,11 +12,7 @@ internal sealed class Instances(Part21File file)
     public Part21File File { get; } = file;
 
     /// <summary>Finds the instance that a reference names; false when it names none.</summary>
-    public bool TryFollow(Part21Value value, out Part21Record record)
-    {
-        record = default;
-        return value.TryReference(out var id) && File.TryFind(id, out record);
-    }
+    public bool TryFollow(Part21Value value, out Part21Record record) => File.TryFollow(value, out record);
 
     /// <summary>The instances that a list of references names, missing ones left out; a single reference counts as a list of one.</summary>
     public IEnumerable<Part21Record> FollowAll(Part21Value list)

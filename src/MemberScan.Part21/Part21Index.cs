@@ -1,6 +1,7 @@
 using System.Collections.Immutable;
 using MemberScan.Foundation.Diagnostics;
 using MemberScan.Part21.Blocks;
+using MemberScan.Part21.Containers;
 using MemberScan.Part21.Findings;
 using MemberScan.Part21.Index;
 using MemberScan.Part21.Reading;
@@ -126,6 +127,17 @@ public sealed class Part21Index : IDisposable
         }
     }
 
+    /// <summary>Indexes the text of a model; it stays open for as long as the index is used.</summary>
+    /// <param name="text">The text.</param>
+    /// <param name="wanted">As for <see cref="Open"/>.</param>
+    /// <param name="diagnostics">Receives findings with codes <c>P21-…</c>.</param>
+    /// <param name="threads">Threads that share the pass; 0 for one per processor.</param>
+    public static Part21Index Over(ModelText text, IReadOnlyCollection<string> wanted, DiagnosticList diagnostics, int threads = 0)
+    {
+        ArgumentNullException.ThrowIfNull(text);
+        return Over(text.Source, text.Name, wanted, diagnostics, Options.Shipped(threads));
+    }
+
     /// <summary>Indexes a text in memory.</summary>
     /// <param name="text">The whole text.</param>
     /// <param name="name">Name for spans.</param>
@@ -177,7 +189,7 @@ public sealed class Part21Index : IDisposable
         return wanted;
     }
 
-    private static void RefuseTooLong(long length, string name)
+    internal static void RefuseTooLong(long length, string name)
     {
         if (length > MaxBytes) throw new InvalidDataException($"{name} has {length} bytes, more than the {MaxBytes} that can be indexed; split the model.");
     }

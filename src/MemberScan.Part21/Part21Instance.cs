@@ -44,6 +44,18 @@ public readonly ref struct Part21Instance
         }
     }
 
+    /// <summary>The keyword as written, also of a damaged instance where it can be told.</summary>
+    internal ReadOnlySpan<byte> KeywordAsRead
+    {
+        get
+        {
+            if (IsComplex) return default;
+
+            var start = KeywordStart();
+            return start >= 0 && start < Text.Length && Words.Begins(Text[start]) ? Text[start..Words.End(Text, start)] : default;
+        }
+    }
+
     /// <summary>Whether it has exactly this keyword.</summary>
     /// <param name="keyword">In upper case.</param>
     public bool Is(ReadOnlySpan<byte> keyword) => System.Text.Ascii.EqualsIgnoreCase(Keyword, keyword);

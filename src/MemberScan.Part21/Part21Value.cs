@@ -26,6 +26,9 @@ public readonly struct Part21Value
     /// <summary>Offset of its first byte in the file [byte]; −1 for an argument beyond the last.</summary>
     public long Offset => _source is null ? -1 : _start;
 
+    /// <summary>Number of the instance that holds it, where the text stays on disk; else 0.</summary>
+    internal ulong InstanceId => _source?.InstanceId ?? 0;
+
     /// <summary>Keyword of a typed value, upper case; empty for others.</summary>
     public string TypeName => _kind == TokenKind.Typed ? Words.Upper(Text[..Words.End(Text, 0)]) : "";
 

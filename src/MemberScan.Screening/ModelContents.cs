@@ -3,7 +3,6 @@ using System.Globalization;
 using MemberScan.Foundation.Diagnostics;
 using MemberScan.Ifc;
 using MemberScan.Ifc.Members;
-using MemberScan.Ifc.WriteBack;
 using MemberScan.Ifc.WriteBack.Earlier;
 using MemberScan.Inputs.ForcesTables;
 using MemberScan.Model.Forces;
@@ -26,17 +25,19 @@ internal sealed class ModelContents
         ["SCR-0001", "SCR-0002", "SCR-0003", "SCR-0004", "SCR-0007", "SCR-0009", "SCR-0010", "SCR-0011"];
 
     private readonly ImmutableArray<ForcesSource> _sources;
-    private readonly ReadOnlyMemory<byte> _baseText;
 
     private ModelContents(
-        IfcModel? model, Part21File file, ReadOnlyMemory<byte> baseText, MemberCatalog catalog, ImmutableArray<ForcesSource> sources, ImmutableArray<ForcesFile> files, ContactList? contacts) =>
-        (Model, File, _baseText, Catalog, Files, _sources, Contacts) = (model, file, baseText, catalog, files, sources, contacts);
+        IfcModel? model, BaseText text, MemberCatalog catalog, ImmutableArray<ForcesSource> sources, ImmutableArray<ForcesFile> files, ContactList? contacts) =>
+        (Model, Text, Catalog, Files, _sources, Contacts) = (model, text, catalog, files, sources, contacts);
 
     /// <summary>The model; null when its schema is not read.</summary>
     public IfcModel? Model { get; }
 
     /// <summary>Its text, without a block of ours.</summary>
-    public Part21File File { get; }
+    public BaseText Text { get; }
+
+    /// <summary>The records of that text.</summary>
+    public Part21File File => Text.File;
 
     /// <summary>Its candidates, and what was passed over.</summary>
     public MemberCatalog Catalog { get; }
@@ -54,10 +55,10 @@ internal sealed class ModelContents
     public static ModelContents? Read(ScreeningRequest request, DiagnosticList diagnostics, IProgress<ScreeningProgress>? progress, CancellationToken cancellation)
     {
         progress?.Report(new("reading", 0));
-        var stripped = EarlierResults.Find(request.ModelBytes, request.ModelName);
+        var text = BaseText.Of(request.Model, IfcModel.KeywordsAsked(request.Settings.Reading), diagnostics);
+        var (file, stripped) = (text.File, text.Earlier);
         TellEarlier(stripped, diagnostics);
-        var file = Part21File.Read(stripped.Base, request.ModelName, diagnostics);
-        if (file.HighestId > ScreeningOutcome.MaxInstanceId)
+        if (file.HighestId > file.HighestPossibleId)
             diagnostics.Add("SCR-0008", Severity.Error, "The model numbers its instances so high that there is no room for ours; no checked model is written. Export it with smaller numbers.");
         cancellation.ThrowIfCancellationRequested();
         var model = IfcModel.Open(file, request.Settings.Reading, diagnostics);
@@ -71,7 +72,7 @@ internal sealed class ModelContents
         CaseCombinations.RefuseUnknown(rules, sources.SelectMany(s => s.All), diagnostics);
         return diagnostics.Items.Any(d => d.Severity == Severity.Error && s_faults.Contains(d.Code))
             ? null
-            : new ModelContents(model, file, stripped.Base, catalog, sources, files, contacts) { MayWriteModel = stripped.References.IsEmpty };
+            : new ModelContents(model, text, catalog, sources, files, contacts) { MayWriteModel = stripped.References.IsEmpty };
     }
 
     /// <summary>Results of the model are not used where they are tied to a line beside the section's centroid: about which they are is not said.</summary>
@@ -136,7 +137,7 @@ internal sealed class ModelContents
 
     /// <summary>What names the model and how it was read.</summary>
     public ModelFacts Facts(ScreeningRequest request) => new(
-        request.ModelName, request.Container, ResultBlock.Sha256(_baseText.Span), _baseText.Length, string.Join(", ", File.Header.Schemas), Model?.SchemaText ?? "not read",
+        request.Model.Name, request.Model.Note, Text.Sha256, Text.Text.Length, string.Join(", ", File.Header.Schemas), Model?.SchemaText ?? "not read",
         Model?.ProjectName ?? "", File.Header.OriginatingSystem, File.Header.TimeStamp, File.ReadToEnd && Model is not null,
         Model is null ? [] : [.. Model.Units.Reported.Select(u => new UnitLine(u.UnitType, u.Text, u.Factor ?? 0, u.Source))]);
 
@@ -158,11 +159,15 @@ internal sealed class ModelContents
     private static HashSet<string> NamedInTables(ImmutableArray<ForcesTable> tables)
     {
         var named = new HashSet<string>(StringComparer.Ordinal);
+        var last = "";
         foreach (var table in tables)
             foreach (var row in table.Rows)
             {
-                named.Add(row.Member);
-                if (row.Member.LastIndexOf('/') is var slash and > 0) named.Add(row.Member[..slash]);
+                // Rows of one member mostly follow each other, and a table has one string for each name.
+                if (ReferenceEquals(row.Member, last)) continue;
+
+                last = row.Member;
+                if (named.Add(last) && last.LastIndexOf('/') is var slash and > 0) named.Add(last[..slash]);
             }
 
         return named;

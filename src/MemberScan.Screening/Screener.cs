@@ -37,7 +37,7 @@ public static class Screener
         var library = new SectionLibrary();
         var results = DecisionCarrier.Carry(Check(request, contents, library, progress, cancellation), request.Decisions, request.DecidedOn, diagnostics);
         var record = Record(request, contents, results, library, diagnostics);
-        return new ScreeningOutcome(record, contents.MayWriteModel ? contents.Model : null, RunIdentity.CreationDate(request.TimestampIsGiven ? request.Timestamp : "", contents.File.Header.TimeStamp)) { WithSetTemplate = request.WithSetTemplate };
+        return new ScreeningOutcome(record, contents.MayWriteModel ? contents.Model : null, contents.Text, RunIdentity.CreationDate(request.TimestampIsGiven ? request.Timestamp : "", contents.File.Header.TimeStamp)) { WithSetTemplate = request.WithSetTemplate };
     }
 
     private static ImmutableArray<MemberResult> Check(

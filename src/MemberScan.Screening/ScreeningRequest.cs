@@ -2,6 +2,7 @@ using System.Collections.Immutable;
 using MemberScan.Inputs.Decisions;
 using MemberScan.Inputs.ForcesTables;
 using MemberScan.Inputs.SettingsFiles;
+using MemberScan.Part21.Containers;
 using MemberScan.Screening.Record;
 
 namespace MemberScan.Screening;
@@ -9,14 +10,8 @@ namespace MemberScan.Screening;
 /// <summary>Everything that one screening works from; no files, no clock.</summary>
 public sealed record ScreeningRequest
 {
-    /// <summary>Name of the model's file, without folder.</summary>
-    public required string ModelName { get; init; }
-
-    /// <summary>"out of x.ifczip", or empty.</summary>
-    public string Container { get; init; } = "";
-
-    /// <summary>The text of the model, with or without a block of ours.</summary>
-    public required ReadOnlyMemory<byte> ModelBytes { get; init; }
+    /// <summary>The text of the model, with or without a block of ours; it must stay open until the outcome is written.</summary>
+    public required ModelText Model { get; init; }
 
     /// <summary>The settings in force.</summary>
     public required Settings Settings { get; init; }

@@ -33,12 +33,21 @@ internal sealed class TableForces
     /// <summary>Forces of one table, and how many of its rows name no candidate.</summary>
     public (ImmutableArray<MemberForces> Forces, int UnknownRows) Read(ForcesTable table)
     {
-        var bySituation = new Dictionary<(string Key, string Situation), List<ForcesRow>>();
-        var order = new List<(string Key, string Situation)>();
+        // Numbers of rows are kept, not the rows: tables have millions of them.
+        var bySituation = new Dictionary<(string Key, string Situation), List<int>>();
+        var order = new List<(Member Member, List<int> Rows)>();
         var members = new Dictionary<string, Member?>(StringComparer.Ordinal);
         var unknownRows = 0;
-        foreach (var row in table.Rows)
+        (string Member, string Situation, List<int>? Rows) last = ("", "", null);
+        for (var i = 0; i < table.Rows.Length; i++)
         {
+            ref readonly var row = ref table.Rows.ItemRef(i);
+            if (last.Rows is { } same && ReferenceEquals(row.Member, last.Member) && ReferenceEquals(row.Situation, last.Situation))
+            {
+                same.Add(i);
+                continue;
+            }
+
             if (!members.TryGetValue(row.Member, out var member)) members[row.Member] = member = Find(row, table);
             if (member is null)
             {
@@ -50,13 +59,14 @@ internal sealed class TableForces
             if (!bySituation.TryGetValue(key, out var rows))
             {
                 bySituation[key] = rows = [];
-                order.Add(key);
+                order.Add((member, rows));
             }
 
-            rows.Add(row);
+            rows.Add(i);
+            last = (row.Member, row.Situation, rows);
         }
 
-        return ([.. order.Select(key => Of(_byKey[key.Key], bySituation[key], table))], unknownRows);
+        return ([.. order.Select(one => Of(one.Member, [.. one.Rows.Select(i => table.Rows[i])], table))], unknownRows);
     }
 
     private Member? Find(ForcesRow row, ForcesTable table)
@@ -85,7 +95,7 @@ internal sealed class TableForces
         return null;
     }
 
-    private MemberForces Of(Member member, List<ForcesRow> rows, ForcesTable table)
+    private MemberForces Of(Member member, ForcesRow[] rows, ForcesTable table)
     {
         var (first, last) = (rows.Min(r => r.Line), rows.Max(r => r.Line));
         var source = string.Create(CultureInfo.InvariantCulture, $"{table.FileName}, line{(first == last ? $" {first}" : $"s {first}-{last}")}");
@@ -100,7 +110,7 @@ internal sealed class TableForces
         if (!member.Length.TryGet(out var length, out var noLength))
             return forces with { Unusable = new Reason(noLength.Code, $"{noLength.Message}, so stations cannot be placed") };
 
-        var stations = ImmutableArray.CreateBuilder<ForceStation>(rows.Count);
+        var stations = ImmutableArray.CreateBuilder<ForceStation>(rows.Length);
         foreach (var row in rows)
         {
             var x = row.StationIsShare ? row.Station * length.Value : row.Station;
@@ -137,7 +147,7 @@ internal sealed class TableForces
         };
     }
 
-    private MemberForces FromEndForces(MemberForces forces, ImmutableArray<ForceStation>.Builder stations, List<ForcesRow> rows, double length, ForcesTable table)
+    private MemberForces FromEndForces(MemberForces forces, ImmutableArray<ForceStation>.Builder stations, ForcesRow[] rows, double length, ForcesTable table)
     {
         for (var i = 0; i < stations.Count; i++)
         {

@@ -2,6 +2,8 @@ using System.Globalization;
 using System.Text;
 using MemberScan.Foundation.Diagnostics;
 using MemberScan.OpenModels;
+using MemberScan.Part21.Sources;
+using MemberScan.Part21.Streaming;
 using MemberScan.Part21.Tests.Sources;
 
 namespace MemberScan.Part21.Tests;
@@ -40,6 +42,7 @@ public sealed class Part21IndexTests
     [InlineData("#9=A();#3=B();#9=C();#1=D();#3=E();#3=F();#10=G();")]
     [InlineData("#1=A('never closed);\n#2=B(1);\n#3=C('x');\n#4=D(2);")]
     [InlineData("#1=A(1);/* never closed #2=B();\n#3=C();")]
+    [InlineData("#1=\u007FA(1);\n#2=\tB(2);\n#3=_C(\u007F1,\0 2);\n#4= \u007FD();")]
     [InlineData("#1=A(1)\n#2=B(2);;#3=C(3);\nrubbish; #4=D(4);")]
     [InlineData("#1=A(1);ENDSEC;\nDATA;\n#2=B(2);\nENDSEC;\nREFERENCE;#5=<x>;ENDSEC;DATA;#3=C();")]
     [InlineData("#1=A();\nENDSEC;\nHEADER;\nFILE_SCHEMA(('IFC9'));ENDSEC;DATA;#2=B();")]
@@ -119,6 +122,29 @@ public sealed class Part21IndexTests
         var bytes = Encoding.ASCII.GetBytes(text + Sample.Footer);
 
         foreach (var threads in (int[])[1, 2, 5]) AssertAgrees(bytes, 4096, 4096, threads);
+    }
+
+    [Theory]
+    [InlineData(1)]
+    [InlineData(4)]
+    public void Wanted_instances_are_taken_as_they_pass_by(int threads)
+    {
+        var text = new StringBuilder(Sample.Header);
+        for (var id = 1; id < 2000; id++)
+        {
+            if (id % 40 == 0) text.Append(CultureInfo.InvariantCulture, $"/* ;\n#1=HANGER(); */#{id}=hanger('{id}');\n");
+            else if (id % 7 == 0) text.Append(CultureInfo.InvariantCulture, $"#{id}=HANGER('{id};');\n");
+            else text.Append(Filler(id));
+        }
+
+        var bytes = Encoding.ASCII.GetBytes(text + Sample.Footer);
+        using var index = Part21Index.Over(
+            new MemorySource(bytes), "landing.ifc", ["HANGER"], new DiagnosticList(), new Part21Index.Options(Part21File.ShippedLimits, 4096, 4096, threads), () => new Texts());
+
+        var taken = index.Takers.Cast<Texts>().SelectMany(t => t.Taken).ToList();
+        Assert.Equal(index.OffsetsOf("HANGER").ToArray(), taken.Select(t => t.Offset));
+        foreach (var (offset, instance) in taken) Assert.Equal(Encoding.ASCII.GetString(bytes, (int)offset, instance.Length), instance);
+        Assert.All(taken, t => Assert.EndsWith(");", t.Text, StringComparison.Ordinal));
     }
 
     [Fact]
@@ -288,5 +314,12 @@ public sealed class Part21IndexTests
         }
 
         Assert.False(cursor.MoveNext());
+    }
+
+    private sealed class Texts : IPart21Taker
+    {
+        public List<(long Offset, string Text)> Taken { get; } = [];
+
+        public void Take(in Part21Instance instance) => Taken.Add((instance.Offset, Encoding.ASCII.GetString(instance.Text)));
     }
 }

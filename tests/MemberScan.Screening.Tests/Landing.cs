@@ -6,6 +6,7 @@ using MemberScan.Inputs.ForcesTables;
 using MemberScan.Inputs.SettingsFiles;
 using MemberScan.Mechanics.Forces;
 using MemberScan.Mechanics.Sections;
+using MemberScan.Part21.Containers;
 using MemberScan.SampleModels.Units;
 using MemberScan.SampleModels.Writing;
 using MemberScan.Screening.Record;
@@ -70,8 +71,7 @@ internal static class Landing
         return Screener.Run(
             new ScreeningRequest
             {
-                ModelName = "landing.ifc",
-                ModelBytes = model,
+                Model = ModelText.Of(model, "landing.ifc"),
                 Settings = inForce,
                 Tables = [.. read.Select(t => t!)],
                 Timestamp = "2026-03-04T05:06:07Z",

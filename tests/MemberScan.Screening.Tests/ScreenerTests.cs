@@ -4,6 +4,7 @@ using MemberScan.Inputs.SettingsFiles;
 using MemberScan.Mechanics.Forces;
 using MemberScan.Mechanics.Sections;
 using MemberScan.Model.Verdicts;
+using MemberScan.Part21.Containers;
 using MemberScan.SampleModels.HandCalculation;
 using MemberScan.SampleModels.Scenario;
 using MemberScan.Screening.Record;
@@ -14,7 +15,7 @@ public sealed class ScreenerTests
 {
     private static readonly Lazy<SampleModel[]> s_samples = new(() => [.. SampleModel.All()]);
 
-    public static TheoryData<string> Names => [GangwayRails.Name, DeckHangers.Name, MastStays.Name];
+    public static TheoryData<string> Names => [GangwayRails.Name, DeckHangers.Name, DeckTrapezes.Name, MastStays.Name];
 
     /// <summary>The calculation by hand shares no formula with the program: textbook formulas written apart (its own remarks name them).</summary>
     [Theory]
@@ -42,6 +43,7 @@ public sealed class ScreenerTests
     [InlineData(GangwayRails.Name, false, 22, 3, 9)]
     [InlineData(DeckHangers.Name, true, 11, 2, 3)]
     [InlineData(DeckHangers.Name, false, 0, 0, 16)]
+    [InlineData(DeckTrapezes.Name, false, 9, 3, 0)]
     [InlineData(MastStays.Name, false, 10, 1, 1)]
     public void The_three_counts_of_a_sample_add_up_to_its_candidates(string name, bool withTable, int within, int over, int open)
     {
@@ -205,8 +207,7 @@ public sealed class ScreenerTests
 
     private static ScreeningRequest Request(SampleModel sample, bool withTable) => new()
     {
-        ModelName = sample.Name + ".ifc",
-        ModelBytes = sample.Model.AsMemory(),
+        Model = ModelText.Of(sample.Model.AsMemory(), sample.Name + ".ifc"),
         Settings = Settings.Default,
         Tables = withTable && !sample.ForcesTable.IsEmpty ? [ForcesTable.Read(sample.ForcesTable.AsMemory(), sample.Name + ".forces.csv", new DiagnosticList())!] : [],
         Timestamp = "2026-03-04T05:06:07Z",

@@ -43,12 +43,10 @@ internal static class CompareRun
     {
         using var log = new FindingLog(verbose: false);
         var diagnostics = new DiagnosticList();
-        var read = RunInputs.Read(path, forces, settings, diagnostics, log.Write);
+        using var read = RunInputs.Read(path, forces, settings, diagnostics, log.Write);
         var request = new ScreeningRequest
         {
-            ModelName = read.ModelName,
-            Container = read.Container,
-            ModelBytes = read.Model,
+            Model = read.Model,
             Settings = read.Settings,
             Tables = read.Tables,
             Timestamp = "",
@@ -56,7 +54,7 @@ internal static class CompareRun
         };
         var outcome = Screener.Run(request, diagnostics, null, cancellation);
         log.Write(diagnostics);
-        return outcome?.Record ?? throw new Failure(ExitCodes.Usage, $"A forces table does not fit '{read.ModelName}'; nothing was compared.");
+        return outcome?.Record ?? throw new Failure(ExitCodes.Usage, $"A forces table does not fit '{read.Model.Name}'; nothing was compared.");
     }
 
     private static void Write(Options options, ComparisonRecord record)

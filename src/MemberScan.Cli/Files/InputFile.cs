@@ -1,4 +1,5 @@
 using MemberScan.Part21;
+using MemberScan.Part21.Containers;
 
 namespace MemberScan.Cli.Files;
 
@@ -19,6 +20,9 @@ internal static class InputFile
 
     /// <summary>The text of a model, out of its container, with a note about the container.</summary>
     public static (byte[] Bytes, string Note) ReadModel(string path) => Guard(path, () => ModelContainer.Read(path));
+
+    /// <summary>A model's text, held in memory or left on disk where it is large.</summary>
+    public static ModelText OpenModel(string path) => Guard(path, () => ModelText.Open(path));
 
     private static T Guard<T>(string path, Func<T> read)
     {

@@ -12,11 +12,25 @@ internal sealed class OutputSet : IDisposable
     /// <exception cref="IOException">The folder or the disk does not take it.</exception>
     public void Add(string target, ReadOnlySpan<byte> content)
     {
-        File.Delete(target + EarlierEnding);                          // a killed run may have left it
-        using var stream = new FileStream(target + PartEnding, FileMode.Create, FileAccess.Write, FileShare.None);
-        _targets.Add(target);
+        using var stream = Begin(target);
         stream.Write(content);
         stream.Flush(flushToDisk: true);
+    }
+
+    /// <summary>As <see cref="Add(string, ReadOnlySpan{byte})"/>, written by a caller.</summary>
+    public void Add(string target, Action<FileStream> write)
+    {
+        using var stream = Begin(target);
+        write(stream);
+        stream.Flush(flushToDisk: true);
+    }
+
+    private FileStream Begin(string target)
+    {
+        File.Delete(target + EarlierEnding);                          // a killed run may have left it
+        var stream = new FileStream(target + PartEnding, FileMode.Create, FileAccess.Write, FileShare.None);
+        _targets.Add(target);
+        return stream;
     }
 
     /// <summary>Puts all files in place, each in one step: at no moment is there half a file or none. When one cannot be, those that were there before are put back and nothing new stays.</summary>

@@ -2,17 +2,19 @@ using System.Collections.Immutable;
 using MemberScan.Foundation.Diagnostics;
 using MemberScan.Inputs.ForcesTables;
 using MemberScan.Inputs.SettingsFiles;
+using MemberScan.Part21.Containers;
 
 namespace MemberScan.Cli.Files;
 
-/// <summary>The files that a run on a model works from, read whole.</summary>
-/// <param name="ModelName">Name of the model's file, without folder.</param>
-/// <param name="Model">Text of the model.</param>
-/// <param name="Container">Note about its container; empty for a plain file.</param>
+/// <summary>The files that a run on a model works from, read whole but for a large model.</summary>
+/// <param name="Model">Text of the model; a large one stays on disk and open.</param>
 /// <param name="Settings">The settings in force.</param>
 /// <param name="Tables">The forces tables, in the order given.</param>
-internal sealed record RunInputs(string ModelName, byte[] Model, string Container, Settings Settings, ImmutableArray<ForcesTable> Tables)
+internal sealed record RunInputs(ModelText Model, Settings Settings, ImmutableArray<ForcesTable> Tables) : IDisposable
 {
+    /// <inheritdoc />
+    public void Dispose() => Model.Dispose();
+
     /// <summary>Reads all files before any is looked into: one that cannot be read weighs more than one that is wrong.</summary>
     /// <param name="model">Path of the model.</param>
     /// <param name="forces">Paths of forces tables.</param>
@@ -25,7 +27,7 @@ internal sealed record RunInputs(string ModelName, byte[] Model, string Containe
         if (forces.Append(model).Append(settings ?? "-").Any(string.IsNullOrWhiteSpace))
             throw new Failure(ExitCodes.Usage, "A path is empty; give the model, and what follows --forces and --settings, a name.");
 
-        var (bytes, container) = InputFile.ReadModel(model);
+        var text = InputFile.OpenModel(model);
         var settingsText = settings is null ? null : InputFile.Read(settings);
         var tableTexts = forces.Select(path => (Name: Path.GetFileName(path), Text: InputFile.Read(path))).ToList();
 
@@ -35,7 +37,7 @@ internal sealed record RunInputs(string ModelName, byte[] Model, string Containe
         var tables = tableTexts.Select(table => ForcesTable.Read(table.Text, table.Name, diagnostics)).ToList();
         if (tables.Contains(null)) throw Wrong("A forces table is wrong; nothing was written.");
 
-        return new RunInputs(Path.GetFileName(model), bytes, container, inForce, [.. tables.OfType<ForcesTable>()]);
+        return new RunInputs(text, inForce, [.. tables.OfType<ForcesTable>()]);
 
         Failure Wrong(string message)
         {

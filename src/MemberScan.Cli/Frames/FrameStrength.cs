@@ -33,6 +33,7 @@ internal sealed class FrameStrength(Frame frame)
         var (section, material) = (frame.Members[number].Section, frame.Members[number].Material);
         if (section.Shape is not { } shape) return (null, null);
         if (material.Yield is not { } yield) return (null, null);
+        if (!frame.Members[number].Taper.IsEmpty) return Tapering(frame.Members[number], member, yield, kind);
         if (Field(shape, material) is not { } field) return (null, "the section has no elementary stress field");
 
         var states = States(member);
@@ -44,20 +45,48 @@ internal sealed class FrameStrength(Frame frame)
         return (largest[(int)StressMeasure.VonMises].Value * Limit(kind).Factor / yield, null);
     }
 
+    /// <summary>Of a tapering member: at each place the stress of the section there.</summary>
+    private static (double? Value, string? WhyNot) Tapering(FrameMember own, MemberResult member, double yield, SituationKind kind)
+    {
+        if (own.Taper[^1].Section.Shape is not { } last || Taper.Of(own.Taper[0].Section.Shape!, last) is not { } taper) return (null, "the section between the ends of the taper is not known");
+        if (taper.SlopeOver(member.Length) > Taper.LargestSlope) return (null, "the member tapers too steeply for the formulas of a straight bar");
+
+        var poisson = Poisson(own.Material);
+        var largest = 0.0;
+        foreach (var x in PlacesOf(member))
+        {
+            var shape = taper.At(Math.Clamp(x / member.Length, 0, 1));
+            if (!StressField.TryCreate(shape, ShearModel.Elementary, poisson, out var field, out _)) return (null, "the section has no elementary stress field");
+
+            foreach (var forces in (SectionForces[])[Clean(member.ForcesAt(x, false)), Clean(member.ForcesAt(x, true))])
+            {
+                if (!NumberRange.Holds(shape, field.Properties, forces)) return (null, "the numbers are beyond any structure");
+
+                largest = Math.Max(largest, field.Govern(forces, StressMeasure.VonMises).Value);
+            }
+        }
+
+        return (largest * Limit(kind).Factor / yield, null);
+    }
+
     private static StressLimit Limit(SituationKind kind) => kind == SituationKind.Design ? Model.Limits.Basis.Default.Design! : Model.Limits.Basis.Default.Service!;
 
     private StressField? Field(CrossSection shape, FrameMaterial material)
     {
         if (_fields.TryGetValue(shape, out var known)) return known;
 
-        var poisson = Math.Clamp(material.E / (2 * material.G) - 1, 0, 0.499);
-        return _fields[shape] = StressField.TryCreate(shape, ShearModel.Elementary, poisson, out var field, out _) ? field : null;
+        return _fields[shape] = StressField.TryCreate(shape, ShearModel.Elementary, Poisson(material), out var field, out _) ? field : null;
     }
+
+    private static double Poisson(FrameMaterial material) => Math.Clamp(material.E / (2 * material.G) - 1, 0, 0.499);
+
+    private static IEnumerable<double> PlacesOf(MemberResult member) =>
+        member.Places.Concat(Enumerable.Range(0, Places + 1).Select(i => i == Places ? member.Length : member.Length * i / Places));
 
     private static List<SectionForces> States(MemberResult member)
     {
         var states = member.Stations.Select(s => s.Forces).ToList();
-        foreach (var x in member.Places.Concat(Enumerable.Range(0, Places + 1).Select(i => i == Places ? member.Length : member.Length * i / Places)))
+        foreach (var x in PlacesOf(member))
             states.AddRange([member.ForcesAt(x, false), member.ForcesAt(x, true)]);
         return [.. states.Select(Clean)];
     }

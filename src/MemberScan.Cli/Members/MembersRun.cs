@@ -35,12 +35,10 @@ internal static class MembersRun
 
         using var log = new FindingLog(options.Verbose);
         var diagnostics = new DiagnosticList();
-        var read = RunInputs.Read(options.Model, options.Forces, options.Settings, diagnostics, log.Write);
+        using var read = RunInputs.Read(options.Model, options.Forces, options.Settings, diagnostics, log.Write);
         var request = new ScreeningRequest
         {
-            ModelName = read.ModelName,
-            Container = read.Container,
-            ModelBytes = read.Model,
+            Model = read.Model,
             Settings = read.Settings,
             Tables = read.Tables,
             Timestamp = "",

@@ -1,4 +1,3 @@
-using System.Buffers;
 using System.Collections.Immutable;
 using System.Globalization;
 using System.Text;
@@ -40,7 +39,7 @@ internal static class ScreenRun
             throw new Failure(ExitCodes.Usage, "The path after --out is empty; give a folder.");
 
         var diagnostics = new DiagnosticList();
-        var read = RunInputs.Read(options.Model, options.Forces, options.Settings, diagnostics, log.Write);
+        using var read = RunInputs.Read(options.Model, options.Forces, options.Settings, diagnostics, log.Write);
         var names = OutputNames.For(options.Model, options.Output);
         string[] inputs = [options.Model, .. options.Forces, .. new[] { options.Settings, options.Decisions, options.DecidedOn }.OfType<string>()];
         if (names.Clashes(inputs).FirstOrDefault() is { } clash)
@@ -53,9 +52,7 @@ internal static class ScreenRun
 
         var request = new ScreeningRequest
         {
-            ModelName = read.ModelName,
-            Container = read.Container,
-            ModelBytes = read.Model,
+            Model = read.Model,
             Settings = WithKind(read.Settings, options.Kind),
             Tables = read.Tables,
             Decisions = decisions,
@@ -115,12 +112,7 @@ internal static class ScreenRun
             if (options.Output is { } folder) Directory.CreateDirectory(folder);
 
             using var files = new OutputSet();
-            if (outcome.CanWriteModel)
-            {
-                var model = new ArrayBufferWriter<byte>();
-                outcome.WriteModel(model);
-                files.Add(names.CheckedModel, model.WrittenSpan);
-            }
+            if (outcome.CanWriteModel) files.Add(names.CheckedModel, outcome.WriteModel);
 
             files.Add(names.Report, Encoding.UTF8.GetBytes(HtmlReport.Render(outcome.Record)));
             files.Add(names.MembersTable, MembersTable.Write(outcome.Record));

@@ -14,7 +14,7 @@ namespace MemberScan.Ifc.Analysis;
 internal sealed record AnalyticalMember(
     ulong Id, string Name, string GlobalId, Finding<MemberAxes> Axes, Finding<(Vector3 Start, Vector3 End)> Line, Transform3 ToProject, Transform3 GlobalAxes)
 {
-    /// <summary>Cardinal point of its profile set usage where that is not the centroid of a doubly symmetric section; null otherwise.</summary>
+    /// <summary>Cardinal point of its profile set usage where that need not be the section's centroid; null otherwise.</summary>
     public long? EccentricCardinalPoint { get; init; }
 
     /// <summary>Its length [m], or why it is not known.</summary>

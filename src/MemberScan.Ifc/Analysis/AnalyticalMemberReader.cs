@@ -3,6 +3,7 @@ using MemberScan.Foundation.Diagnostics;
 using MemberScan.Foundation.Geometry;
 using MemberScan.Ifc.Geometry;
 using MemberScan.Ifc.Schema;
+using MemberScan.Ifc.Sections;
 using MemberScan.Ifc.Units;
 using MemberScan.Model;
 using MemberScan.Model.Verdicts;
@@ -33,18 +34,30 @@ internal sealed class AnalyticalMemberReader(
         var axes = placed.TryGet(out _, out var notPlaced) ? Axes(member, line, toProject) : new Finding<MemberAxes>.Missing(notPlaced);
         return new AnalyticalMember(member.Id, Instances.Text(member[2]), Instances.Text(member[0]), axes, line, toProject, schema == SchemaVersion.Ifc2x3 ? Transform3.Identity : toProject)
         {
-            EccentricCardinalPoint = CardinalPoint(member.Id) is { } point and not (5 or 10 or 15) ? point : null,
+            EccentricCardinalPoint = EccentricCardinalPoint(member.Id),
         };
     }
 
-    // 5 mid-depth centre, 10 geometric centroid and 15 shear centre are one point in the sections that are read.
-    private long? CardinalPoint(ulong member)
+    // 10 is the geometric centroid; 5 mid-depth centre and 15 shear centre are the same point in doubly symmetric sections alone.
+    private long? EccentricCardinalPoint(ulong member)
     {
         foreach (var id in relations.MaterialsOf(member))
             if (instances.File.TryFind(id, out var usage) && usage.Keyword.StartsWith("IFCMATERIALPROFILESETUSAGE", StringComparison.Ordinal) && usage[1].TryInteger(out var point))
-                return point;
+                return point == 10 || point is 5 or 15 && IsDoublySymmetric(usage) ? null : point;
         return null;
     }
+
+    private bool IsDoublySymmetric(Part21Record usage) =>
+        instances.TryFollow(usage[0], out var set) && instances.FollowEach(set[2]) is { Count: > 0 } parts
+        && parts.TrueForAll(part => instances.TryFollow(part[3], out var profile) && IsDoublySymmetric(profile, depth: 0));
+
+    private bool IsDoublySymmetric(Part21Record profile, int depth) => profile.Keyword switch
+    {
+        "IFCCIRCLEPROFILEDEF" or "IFCCIRCLEHOLLOWPROFILEDEF" or "IFCRECTANGLEPROFILEDEF" or "IFCROUNDEDRECTANGLEPROFILEDEF"
+            or "IFCRECTANGLEHOLLOWPROFILEDEF" or "IFCELLIPSEPROFILEDEF" or "IFCISHAPEPROFILEDEF" => true,
+        "IFCDERIVEDPROFILEDEF" or "IFCMIRROREDPROFILEDEF" => depth < ProfileReader.MaxNesting && instances.TryFollow(profile[2], out var parent) && IsDoublySymmetric(parent, depth + 1),
+        _ => false,
+    };
 
     private Finding<(Vector3 Start, Vector3 End)> Line(Part21Record member, Transform3 toProject)
     {

@@ -16,6 +16,7 @@ internal sealed class CombinedForces
     private readonly DiagnosticList _diagnostics;
     private readonly List<(Part21Record Combination, LoadFactors Cases, IReadOnlySet<ulong> Below)> _combinations = [];
     private readonly HashSet<ulong> _met = [];
+    private readonly bool _hasResults;
 
     public CombinedForces(Instances instances, LoadTree tree, SituationReader situations, DiagnosticList diagnostics)
     {
@@ -24,6 +25,7 @@ internal sealed class CombinedForces
         foreach (var group in instances.File.RecordsOf("IFCSTRUCTURALRESULTGROUP"))
             if (group[6].TryReference(out var loads))
                 _ = withResults.Add(loads);
+        _hasResults = withResults.Count > 0;
         foreach (var combination in tree.Combinations) _combinations.Add((combination, tree.CasesOf(combination.Id, withResults.Contains), tree.Below(combination.Id)));
     }
 
@@ -57,6 +59,9 @@ internal sealed class CombinedForces
     /// <summary>Tells of combinations that no candidate has forces of.</summary>
     public void ReportUnused()
     {
+        // A model without any results is one for our own analysis, which has the combinations from the loads.
+        if (!_hasResults) return;
+
         foreach (var (combination, cases, _) in _combinations)
             if (!_met.Contains(combination.Id))
                 _diagnostics.Add("IFC-0027", Severity.Warning, $"A combination has no results, nor have its cases on any candidate{(cases.Why is { } why ? $" ({why.Message})" : "")}; it is not checked.", combination.Span);

@@ -116,6 +116,7 @@ internal static class JoinedForces
         if (loads.Loads.IsEmpty || !line.Length.TryGet(out var length, out _))
         {
             allExplained = false;
+            if (loads.WhyNot.Length > 0 && stations.Count > 1) notes.Add($"the loads of the model are not used between stations of the analytical member #{line.Id}: {loads.WhyNot}");
             return stations;
         }
 

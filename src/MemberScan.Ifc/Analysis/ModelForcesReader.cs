@@ -60,7 +60,7 @@ internal sealed class ModelForcesReader(
 
     private JoinedForces.Part Part(Member member, AnalyticalMember line, Part21Record reaction, Part21Record group)
     {
-        var known = JoinedForces.LineAxes(line, member, out var axes, out _) ? loads.On(line, axes, group) : LineLoads.Unknown("the axes are not known");
+        var known = JoinedForces.LineAxes(line, member, out var axes, out _) ? loads.On(member, line, axes, group) : LineLoads.Unknown("");
         return new JoinedForces.Part(line, string.Create(CultureInfo.InvariantCulture, $"{reaction.Keyword} #{reaction.Id} on #{line.Id}"), reactions.Read(reaction, line, member.Element, member.Key, known.Loads), known);
     }
 

@@ -43,10 +43,21 @@ internal sealed class BodyReader(
         var walk = new Walk();
         foreach (var item in BodyItems(shape)) Flatten(item, Transform3.Identity, false, 0, walk);
 
-        var bodies = walk.Found.Take(MaxBodies).Select(item => ReadItem(item, toProject));
+        var bodies = walk.Found.Take(MaxBodies).SelectMany(item => IsMesh(item.Record) ? meshes.Read(item, toProject) : [ReadItem(item, toProject)]).Take(MaxBodies);
         return walk.IsOver
             ? [.. bodies, Missing(ReasonCode.SectionNotCovered, string.Create(CultureInfo.InvariantCulture, $"more than {MaxBodies} bodies or {MaxSteps} nested references in one element"))]
             : [.. bodies];
+    }
+
+    /// <summary>Whether all bodies of a product are meshes, or it has none; looks into none of them.</summary>
+    /// <param name="representation">Reference to the product's shape.</param>
+    public bool AreMeshes(Part21Value representation)
+    {
+        if (representation.IsEmpty || !instances.TryFollow(representation, out var shape)) return true;
+
+        var walk = new Walk();
+        foreach (var item in BodyItems(shape)) Flatten(item, Transform3.Identity, false, 0, walk);
+        return !walk.IsOver && walk.Found.TrueForAll(item => IsMesh(item.Record));
     }
 
     private IEnumerable<Part21Record> BodyItems(Part21Record shape)
@@ -104,6 +115,10 @@ internal sealed class BodyReader(
         return null;
     }
 
+    private static bool IsMesh(Part21Record body) => !body.IsDamaged && body.Keyword is
+        "IFCFACETEDBREP" or "IFCFACETEDBREPWITHVOIDS" or "IFCADVANCEDBREP" or "IFCADVANCEDBREPWITHVOIDS" or "IFCTRIANGULATEDFACESET"
+        or "IFCPOLYGONALFACESET" or "IFCFACEBASEDSURFACEMODEL" or "IFCSHELLBASEDSURFACEMODEL" or "IFCTRIANGULATEDIRREGULARNETWORK";
+
     private Finding<BarBody> ReadItem(BodyItem item, Transform3 toProject)
     {
         if (item.Record.IsDamaged) return Missing(ReasonCode.DamagedRecord, $"the record of {item.Called} is damaged");
@@ -117,9 +132,6 @@ internal sealed class BodyReader(
             "IFCSWEPTDISKSOLID" or "IFCSWEPTDISKSOLIDPOLYGONAL" => disks.Read(item, toProject),
             "IFCBLOCK" => primitives.Block(item),
             "IFCRIGHTCIRCULARCYLINDER" => primitives.Cylinder(item),
-            "IFCFACETEDBREP" or "IFCFACETEDBREPWITHVOIDS" or "IFCADVANCEDBREP" or "IFCADVANCEDBREPWITHVOIDS" or "IFCTRIANGULATEDFACESET"
-                or "IFCPOLYGONALFACESET" or "IFCFACEBASEDSURFACEMODEL" or "IFCSHELLBASEDSURFACEMODEL" or "IFCTRIANGULATEDIRREGULARNETWORK" =>
-                meshes.Read(item, toProject),
             "IFCMAPPEDITEM" => Missing(ReasonCode.DamagedRecord, $"the mapped body {item.Called} is damaged or nested too deep"),
             _ => Missing(ReasonCode.SectionNotCovered, $"the body {item.Called} is not a sweep of a section, a swept disk, a block or a cylinder"),
         };

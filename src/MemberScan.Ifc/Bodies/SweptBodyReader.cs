@@ -4,7 +4,6 @@ using MemberScan.Ifc.Curves;
 using MemberScan.Ifc.Geometry;
 using MemberScan.Ifc.Sections;
 using MemberScan.Ifc.Units;
-using MemberScan.Mechanics.Sections;
 using MemberScan.Model;
 using MemberScan.Model.Verdicts;
 
@@ -24,8 +23,8 @@ internal sealed class SweptBodyReader(
         Prepared(item, out var start) ?? Extruded(item, start);
 
     /// <summary>
-    /// Reads IfcExtrudedAreaSolidTapered: a bar where both ends are the same; a tapering bar where they are round, tubular or rectangular
-    /// about one axis and the slope is small; refused with both named where they are not.
+    /// Reads IfcExtrudedAreaSolidTapered: a bar where both ends are the same; a tapering bar where they make a taper that is evaluated,
+    /// about one axis; refused with both named where they do not.
     /// </summary>
     public Finding<BarBody> Tapered(BodyItem item)
     {
@@ -39,12 +38,9 @@ internal sealed class SweptBodyReader(
 
         var words = $"{item.Called} tapers from {first.Section.Shape.Designation} ({start.Profile.Source}) to {last.Section.Shape.Designation} ({end.Source})";
         if (moves) return Missing(ReasonCode.SectionNotCovered, $"{words}, shifted or turned; stress along such a taper is not evaluated");
-        if (Taper.Of(first.Section.Shape, last.Section.Shape) is not { } taper) return Missing(ReasonCode.SectionNotCovered, $"{words}; only tapers of one round, tubular or rectangular kind are evaluated");
         if (!Extruded(item, start).TryGet(out var bar, out var whyNot)) return new Finding<BarBody>.Missing(whyNot);
-
-        var slope = taper.SlopeOver(bar.Value.Length / start.Scale);
-        if (slope > Taper.LargestSlope)
-            return Missing(ReasonCode.SectionNotCovered, string.Create(CultureInfo.InvariantCulture, $"{words} with a slope of {slope:0.###}; over {Taper.LargestSlope} the formulas of a straight bar do not hold"));
+        if (TaperedEnds.WhyNot(first.Section.Shape, last.Section.Shape, bar.Value.Length / start.Scale) is { Length: > 0 } fault)
+            return Missing(ReasonCode.SectionNotCovered, $"{words}; {fault}");
 
         var scaled = (last with { Position = first.Position }).Scaled(start.Scale);
         return bar with { Value = bar.Value with { EndSection = scaled.Section, Notes = bar.Value.Notes.Add(words) } };

@@ -27,6 +27,7 @@ internal sealed class FrameAssembly
     private readonly List<FrameMember> _members = [];
     private readonly List<FramePiece> _pieces = [];
     private readonly List<MemberStiffness> _stiffness = [];
+    private readonly List<Vector3> _beside = [];
     private readonly List<Reason> _refusals = [];
     private readonly List<string> _notes = [];
 
@@ -58,6 +59,9 @@ internal sealed class FrameAssembly
 
     /// <summary>Numbers of the frame members of an analytical member, from its start to its end.</summary>
     public IReadOnlyList<int> PiecesOf(ulong line) => _piecesOf.GetValueOrDefault(line) ?? [];
+
+    /// <summary>From the line of a frame member to the axis through its centroids [m], project axes; loads act on the line.</summary>
+    public Vector3 BesideOf(int member) => _beside[member];
 
     /// <summary>Length of a frame member [m].</summary>
     public double LengthOf(int member)
@@ -131,20 +135,27 @@ internal sealed class FrameAssembly
             var endJoint = Release(end, i == ties.Count - 1, name, line, axes, releases);
             if (startJoint is null || endJoint is null) return;
 
+            if (TaperOf(stiffness, start, end, course, name) is not { } taper) return;
+
+            // A member that carries axial force alone is hinged on its line, since an arm beside the hinge would turn freely.
+            var beside = isTruss ? Vector3.Zero : stiffness.Beside.Y * axes.Y + stiffness.Beside.Z * axes.Z;
             numbers.Add(_members.Count);
+            _beside.Add(beside);
             _members.Add(new FrameMember
             {
                 Name = ties.Count == 2 ? name : string.Create(CultureInfo.InvariantCulture, $"{name}, part {i}"),
                 Start = start.Node,
                 End = end.Node,
-                Section = stiffness.Section,
+                Section = taper.IsEmpty ? stiffness.Section : taper[0].Section,
+                Taper = taper,
+                ShearFlexible = stiffness.ShearFlexible,
                 Material = stiffness.Material,
                 ZDirection = axes.Z,
                 TrussOnly = isTruss,
                 StartJoint = startJoint,
                 EndJoint = endJoint,
-                StartOffset = Offset(start.Node, from),
-                EndOffset = Offset(end.Node, AttachmentReader.PointAt(course, end.At)),
+                StartOffset = Offset(start.Node, from + beside),
+                EndOffset = Offset(end.Node, AttachmentReader.PointAt(course, end.At) + beside),
             });
             _pieces.Add(new FramePiece(record.Id, name, start.At, course.Length, sense, axes, course.Points.Length == 2));
             _stiffness.Add(stiffness);
@@ -155,6 +166,16 @@ internal sealed class FrameAssembly
     private static MemberAxes? AxesOf(Vector3 from, Vector3 along, Vector3? z) => z is { } given
         ? MemberAxes.From(from, along, given)
         : along.TryNormalize(out var x) && x.Cross(Vector3.UnitZ).Length < 1e-3 ? MemberAxes.From(from, along, Vector3.UnitX) : MemberAxes.From(from, along, Vector3.UnitZ);
+
+    /// <summary>The sections along a stretch; none for a member of one section, null where one has no torsion constant.</summary>
+    private ImmutableArray<TaperPoint>? TaperOf(MemberStiffness stiffness, Attachment start, Attachment end, Course course, string name)
+    {
+        if (stiffness.Course is not { } sections) return [];
+        if (sections.Between(start.At / course.Length, end.At / course.Length) is { } taper) return taper;
+
+        Refuse(new Reason(ReasonCode.SectionNotCovered, $"{name}: a section of its taper has no torsion constant"));
+        return null;
+    }
 
     /// <summary>From a node to a point; nothing where rounding alone parts them.</summary>
     private Vector3 Offset(int node, Vector3 point) => point - _nodes.Nodes[node].Position is var offset && offset.Length > Rounding ? offset : Vector3.Zero;

@@ -61,6 +61,7 @@ internal sealed class FrameLoadReader
     public (ImmutableArray<FrameSituation> Situations, ImmutableArray<FrameCase> Cases) Read(Part21Record model, StructuralItems items, FrameAssembly assembly, out bool hasLoads)
     {
         var acting = Gather(items, assembly);
+        var down = items.Members.Select(m => _analytical.Read(m.Id)!.GlobalAxes).FirstOrDefault() ?? Transform3.Identity;
         var groups = Groups(model, acting).ToList();
         var situations = ImmutableArray.CreateBuilder<FrameSituation>();
         var cases = ImmutableArray.CreateBuilder<FrameCase>();
@@ -71,7 +72,7 @@ internal sealed class FrameLoadReader
             var factors = _tree.ActionsOf(group.Id);
             hasLoads |= factors.SelfWeight != Vector3.Zero;
             var situation = _situations.OfLoads(group);
-            var builder = new SituationBuilder(situation, factors.SelfWeight);
+            var builder = new SituationBuilder(situation, down.Direction(factors.SelfWeight));
             if (factors.Why is { } why) builder.Fail(why);
             else Fill(builder, factors, acting, assembly);
             situations.Add(builder.Build());

@@ -37,7 +37,7 @@ internal static class LaidForces
     {
         var joined = JoinedForces.Of(member, situation, parts.ConvertAll(p => Part(p.Line, p.Forces)));
         var notes = parts.SelectMany(p => p.Forces.Notes).Distinct(StringComparer.Ordinal);
-        return joined with { Source = string.Join(", ", parts.Select(p => p.Forces.Source)), Notes = [.. notes], LoadsAreKnown = true };
+        return joined with { Source = string.Join(", ", parts.Select(p => p.Forces.Source)), Notes = [.. notes], LoadsAreKnown = true, TorsionAxis = TorsionAxis.ShearCentre };
     }
 
     private static JoinedForces.Part Part(AnalyticalMember line, LineForces forces)

@@ -2,8 +2,8 @@ using System.Collections.Immutable;
 using System.Globalization;
 using MemberScan.Foundation.Geometry;
 using MemberScan.Ifc.Analysis;
+using MemberScan.Ifc.Analysis.Loads;
 using MemberScan.Ifc.Frames.Loading;
-using MemberScan.Ifc.Frames.Stiffness;
 using MemberScan.Model;
 using MemberScan.Model.Forces;
 using MemberScan.Model.Frames.Loads;
@@ -96,7 +96,7 @@ internal sealed class SituationBuilder(Situation situation, Vector3 selfWeight)
         for (var i = 0; i < assembly.Pieces.Count; i++)
             if (assembly.Stiffness[i].Density is null)
                 Fail(new Reason(ReasonCode.ForcesIncomplete, $"self-weight acts, and the density of {assembly.Pieces[i].Name} is not known"));
-        Notes.Add(string.Create(CultureInfo.InvariantCulture, $"self-weight by the sections' areas, with g = {StiffnessReader.Gravity} m/s²"));
+        Notes.Add(string.Create(CultureInfo.InvariantCulture, $"self-weight by the sections' areas, with g = {MemberWeight.Gravity} m/s²"));
     }
 
     private void AddPoint(MemberLoad load, double factor, MemberAxes axes, IReadOnlyList<int> pieces, FrameAssembly assembly)
@@ -105,6 +105,7 @@ internal sealed class SituationBuilder(Situation situation, Vector3 selfWeight)
         var at = Math.Max(0, load.From);
         var piece = pieces.LastOrDefault(p => assembly.Pieces[p].From <= at, pieces[0]);
         var place = Math.Clamp(at - assembly.Pieces[piece].From, 0, assembly.LengthOf(piece));
+        vector = AboutAxis(vector, assembly.BesideOf(piece));
         _points.Add(new MemberPointLoad(piece, place, factor * vector.Force, factor * vector.Couple, FrameAxes.Global));
     }
 
@@ -131,7 +132,7 @@ internal sealed class SituationBuilder(Situation situation, Vector3 selfWeight)
             if (b - a <= 0) continue;
 
             LoadVector At(double x) => start + (x - from) / (to - from) * (end + -1 * start);
-            var (atA, atB) = (factor * At(a), factor * At(b));
+            var (atA, atB) = (factor * AboutAxis(At(a), assembly.BesideOf(piece)), factor * AboutAxis(At(b), assembly.BesideOf(piece)));
             _lines.Add(new MemberLineLoad(piece, Math.Max(0, a - first), Math.Min(length, b - first), atA.Force, atB.Force, FrameAxes.Global) { MomentFrom = atA.Couple, MomentTo = atB.Couple });
         }
     }
@@ -156,12 +157,22 @@ internal sealed class SituationBuilder(Situation situation, Vector3 selfWeight)
                 return;
             }
 
+            var isUneven = change.Y != 0 || change.Z != 0;
+            if (isUneven && (stiffness.Course is not null || !(stiffness.ExtentY > 0 && stiffness.ExtentZ > 0)))
+            {
+                Fail(new Reason(ReasonCode.ForcesIncomplete, $"the load {load.Source} differs across the section of {assembly.Pieces[piece].Name}, whose extents are not known all along it"));
+                return;
+            }
+
             var side = axes.Z.Dot(own.Z) < 0 ? -1 : 1;
-            _temperatures.Add(new MemberTemperature(piece, change.X, side * change.Y / stiffness.ExtentY, side * change.Z / stiffness.ExtentZ));
+            _temperatures.Add(new MemberTemperature(piece, change.X, isUneven ? side * change.Y / stiffness.ExtentY : 0, isUneven ? side * change.Z / stiffness.ExtentZ : 0));
         }
 
         if (load.Start.Force.Y != 0 || load.Start.Force.Z != 0) Notes.Add($"the load {load.Source}: differences of temperature are taken between the outer fibres");
     }
+
+    /// <summary>A load on the line as it acts on the axis beside it: with the couple of its arm.</summary>
+    private static LoadVector AboutAxis(in LoadVector load, Vector3 beside) => beside == Vector3.Zero ? load : load with { Couple = load.Couple - beside.Cross(load.Force) };
 
     private static LoadVector Global(in LoadVector local, MemberAxes axes)
     {

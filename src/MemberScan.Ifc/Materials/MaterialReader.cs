@@ -26,6 +26,8 @@ internal sealed class MaterialReader(
     private static readonly string[] s_notCovered =
         ["concrete", "beton", "hormig", "wood", "timber", "holz", "madera", "bois", "glass", "glas", "masonry", "mauerwerk", "brick", "gypsum", "plaster"];
 
+    private const string Tapering = "IFCMATERIALPROFILESETUSAGETAPERING";
+
     private static readonly char[] s_partMarks = ['/', ',', ';', ':', '|'];
 
     private readonly Dictionary<string, Grade?> _gradeOf = new(StringComparer.Ordinal);
@@ -43,11 +45,33 @@ internal sealed class MaterialReader(
     }
 
     /// <summary>Whether the association names a profile set that tapers to another.</summary>
-    public bool IsTapering(ulong id) => Levels(id).Any(level => level.Any(d => d.Keyword == "IFCMATERIALPROFILESETUSAGETAPERING"));
+    public bool IsTapering(ulong id) => !TaperingUsages(id).IsEmpty;
+
+    /// <summary>Profiles that the association names for the member's end; empty where it does not taper.</summary>
+    public ImmutableArray<Finding<ProfileShape>> EndProfilesOf(ulong id) =>
+        [.. TaperingUsages(id).SelectMany(usage => instances.TryFollow(usage[3], out var set) ? Profiles(set, []) : []).Distinct()];
+
+    /// <summary>Whether a tapering association lays both ends on the member's line by the same cardinal point.</summary>
+    public bool KeepsItsLine(ulong id) => TaperingUsages(id).All(usage => CardinalPoint(usage[1]) == CardinalPoint(usage[4]));
+
+    /// <summary>The one profile at the start and the one at the end of a tapering profile set; null where it does not name one each.</summary>
+    public (Finding<ProfileShape> Start, Finding<ProfileShape> End)? TaperOf(ulong id)
+    {
+        foreach (var level in Levels(id))
+            foreach (var usage in level)
+                if (usage.Keyword == "IFCMATERIALPROFILESETUSAGETAPERING" && instances.TryFollow(usage[0], out var first) && instances.TryFollow(usage[3], out var last)
+                    && Profiles(first, []).ToList() is [var start] && Profiles(last, []).ToList() is [var end])
+                    return (start, end);
+        return null;
+    }
 
     /// <summary>Whether the association says that the member's line is that of its section's centroid (cardinal point 10).</summary>
     public bool RunsAlongCentroid(ulong id) => Levels(id).Any(level => level.Any(d =>
-        d.Keyword is "IFCMATERIALPROFILESETUSAGE" && d[1].TryInteger(out var point) && point == 10));
+        d.Keyword is "IFCMATERIALPROFILESETUSAGE" or Tapering && CardinalPoint(d[1]) == 10));
+
+    private ImmutableArray<Part21Record> TaperingUsages(ulong id) => [.. Levels(id).SelectMany(level => level.Where(d => d.Keyword == Tapering)).Take(1)];
+
+    private static long? CardinalPoint(Part21Value value) => value.TryInteger(out var point) ? point : null;
 
     /// <summary>The material of an object and its values.</summary>
     /// <param name="id">STEP id of the object.</param>
@@ -205,7 +229,7 @@ internal sealed class MaterialReader(
 
         switch (definition.Keyword)
         {
-            case "IFCMATERIALPROFILESETUSAGE" or "IFCMATERIALPROFILESETUSAGETAPERING":
+            case "IFCMATERIALPROFILESETUSAGE" or Tapering:
                 return instances.TryFollow(definition[0], out var set) ? Profiles(set, visited) : [];
             case "IFCMATERIALPROFILESET":
                 return instances.FollowAll(definition[2]).SelectMany(part => Profiles(part, visited));
@@ -227,7 +251,7 @@ internal sealed class MaterialReader(
         return definition.Keyword switch
         {
             "IFCMATERIALLIST" => From(definition[0]),
-            "IFCMATERIALPROFILESETUSAGE" or "IFCMATERIALPROFILESETUSAGETAPERING" => From(definition[0]),
+            "IFCMATERIALPROFILESETUSAGE" or Tapering => From(definition[0]),
             "IFCMATERIALPROFILESET" or "IFCMATERIALCONSTITUENTSET" => From(definition[2]),
             "IFCMATERIALPROFILE" or "IFCMATERIALPROFILEWITHOFFSETS" or "IFCMATERIALCONSTITUENT" => From(definition[2]),
             "IFCMATERIALLAYERSETUSAGE" or "IFCMATERIALLAYERSET" or "IFCMATERIALLAYER" => From(definition[0]),

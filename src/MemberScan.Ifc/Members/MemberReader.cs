@@ -19,7 +19,7 @@ namespace MemberScan.Ifc.Members;
 /// <summary>Finds the candidates of a model and reads each: section, length, axes, material, or the reason why not.</summary>
 internal sealed class MemberReader(
     Instances instances, Relations relations, PlacementReader placements, BodyReader bodies, ProfileReader profiles, MaterialReader materials,
-    AnalyticalMemberReader analytical, SchemaVersion schema, CandidateRules rules, RoleGuess roles, DiagnosticList diagnostics)
+    AnalyticalMemberReader analytical, SchemaVersion schema, CandidateRules rules, bool recognisesMeshes, RoleGuess roles, DiagnosticList diagnostics)
 {
     private const string NoBar = "no bar-like body of a covered section, and no forces";
 
@@ -35,13 +35,9 @@ internal sealed class MemberReader(
         if (always.Contains("IFCSTRUCTURALCURVEMEMBER")) always.Add("IFCSTRUCTURALCURVEMEMBERVARYING");
 
         var members = ImmutableArray.CreateBuilder<Member>();
-        foreach (var record in instances.File.Records)
+        foreach (var record in instances.File.InFileOrder(always.Concat(conditional), PartsOfRailings()))
         {
-            var isPartOfRailing = relations.WholeOf(record.Id) is var whole and not 0
-                && instances.File.TryFind(whole, out var parent) && parent.Keyword == "IFCRAILING";
-            var isAlways = always.Contains(record.Keyword) || isPartOfRailing;
-            if (!isAlways && !conditional.Contains(record.Keyword)) continue;
-
+            var isAlways = always.Contains(record.Keyword) || IsPartOfRailing(record);
             if (record.IsDuplicate)
                 PassOver(ClassNames.Spell(record.Keyword), "its instance number stands further up already; the first counts");
             else if (record.Keyword is "IFCSTRUCTURALCURVEMEMBER" or "IFCSTRUCTURALCURVEMEMBERVARYING")
@@ -55,12 +51,32 @@ internal sealed class MemberReader(
         return new MemberCatalog(members.ToImmutable(), [.. passed]);
     }
 
+    // Whatever their class, they are candidates.
+    private IEnumerable<Part21Record> PartsOfRailings()
+    {
+        foreach (var railing in instances.File.RecordsOf("IFCRAILING"))
+            foreach (var id in relations.PartsOf(railing.Id))
+                if (instances.File.TryFind(id, out var part))
+                    yield return part;
+    }
+
+    private bool IsPartOfRailing(Part21Record record) =>
+        relations.WholeOf(record.Id) is var whole and not 0 && instances.File.TryFind(whole, out var parent) && parent.Keyword == "IFCRAILING";
+
     private void AddPhysical(Part21Record record, bool isAlways, Func<ElementIdentity, bool> isNamed, ImmutableArray<Member>.Builder members)
     {
         var element = Identity(record);
         if (IsItsParts(record))
         {
             PassOver(element.Class, "its parts are the candidates");
+            return;
+        }
+
+        // Most elements of a building are meshes of classes that count only with a bar: they are passed over without a look into the mesh.
+        var isAsked = isAlways || relations.AnalyticalOf(record.Id).Count > 0 || relations.ActivitiesOn(record.Id).Count > 0 || isNamed(element);
+        if (!isAsked && !recognisesMeshes && bodies.AreMeshes(record[6]))
+        {
+            PassOver(element.Class, NoBar);
             return;
         }
 
@@ -71,9 +87,7 @@ internal sealed class MemberReader(
 
         // Beside a bar, short pieces such as base plates are no items.
         var bars = sweeps.FindAll(s => s.Value.IsBarLike) is { Count: > 0 } longer ? longer : sweeps;
-        var isCandidate = isAlways || bars.Exists(b => b.Value.IsBarLike) || read.Any(IsUnreadSweep)
-            || relations.AnalyticalOf(record.Id).Count > 0 || relations.ActivitiesOn(record.Id).Count > 0 || isNamed(element);
-        if (!isCandidate)
+        if (!isAsked && !bars.Exists(b => b.Value.IsBarLike) && !read.Any(IsUnreadSweep))
         {
             PassOver(element.Class, NoBar);
             return;
@@ -91,7 +105,7 @@ internal sealed class MemberReader(
         }
         else
         {
-            members.Add(WithoutBar(record, element, key, read));
+            members.Add(WithTaper(record, WithoutBar(record, element, key, read)));
         }
     }
 
@@ -149,23 +163,24 @@ internal sealed class MemberReader(
     /// <summary>Adds the section of the material profile set where it differs from the body's: the less favourable decides.</summary>
     private Member WithProfileSet(Part21Record record, Member member)
     {
-        var sets = materials.ProfilesOf(record.Id);
+        var (sets, ends) = (materials.ProfilesOf(record.Id), materials.EndProfilesOf(record.Id));
         if (sets.IsEmpty || member.Section is not Finding<SectionFinding>.Found body) return member;
-        if (sets.Length > 1) return member with { Notes = member.Notes.Add("the material profile set has several profiles; the body's section is used") };
-        if (sets[0] is not Finding<ProfileShape>.Found set)
-            return member with { Notes = member.Notes.Add($"the profile of the material profile set is not read ({((Finding<ProfileShape>.Missing)sets[0]).Why.Message}); the body's section is used") };
+        if (sets.Length > 1 || ends.Length > 1) return member with { Notes = member.Notes.Add("the material profile set has several profiles; the body's section is used") };
+        if (sets.AddRange(ends).OfType<Finding<ProfileShape>.Missing>().FirstOrDefault() is { } unread)
+            return member with { Notes = member.Notes.Add($"the profile of the material profile set is not read ({unread.Why.Message}); the body's section is used") };
 
         if (member.EndSection is not null) return member with { Notes = member.Notes.Add("the body tapers; its sections are used, not those of the material profile set") };
 
         var own = body.Value.Shapes;
-        var different = set.Value.Section.Shapes.Where(s => !own.Any(o => SectionAlike.Of(s, o))).ToImmutableArray();
+        var named = sets.AddRange(ends).Cast<Finding<ProfileShape>.Found>().ToList();
+        var different = named.SelectMany(n => n.Value.Section.Shapes).Where(s => !own.Any(o => SectionAlike.Of(s, o))).ToImmutableArray();
         if (different.IsEmpty) return member with { Section = body with { Source = $"{body.Source}; material profile set agrees" } };
 
         var note = $"body and material profile set differ ({own[0].Designation} against {different[0].Designation}); the less favourable decides";
         var both = body.Value with { Shapes = own.AddRange(different), Notes = body.Value.Notes.Add(note) };
         return member with
         {
-            Section = new Finding<SectionFinding>.Found(both, $"{body.Source}; material profile set, {set.Source}"),
+            Section = new Finding<SectionFinding>.Found(both, $"{body.Source}; material profile set, {string.Join(" to ", named.Select(n => n.Source))}"),
             Material = materials.Read(record.Id, both),
             Notes = member.Notes.Add(note),
         };
@@ -199,7 +214,6 @@ internal sealed class MemberReader(
     {
         offset = default;
         var sets = materials.ProfilesOf(record.Id);
-        if (materials.IsTapering(record.Id)) return NoSection(ReasonCode.SectionNotCovered, "the material profile set tapers to another");
         if (sets.Length > 1) return NoSection(ReasonCode.SectionNotCovered, "the material profile set has several profiles");
         if (sets.Length == 1)
         {
@@ -217,6 +231,33 @@ internal sealed class MemberReader(
             : new Finding<SectionFinding>.Missing(((Finding<BarBody>.Missing)read[0]).Why);
 
         static string element(Part21Record record) => $"{ClassNames.Spell(record.Keyword)} #{record.Id}";
+    }
+
+    /// <summary>Adds the section at the end where the material profile set tapers and no body shows the member.</summary>
+    private Member WithTaper(Part21Record record, Member member)
+    {
+        if (!materials.IsTapering(record.Id) || member.Section is not Finding<SectionFinding>.Found start) return member;
+        if (materials.EndProfilesOf(record.Id) is not [var only]) return Refused("the material profile set tapers to none, or to several profiles");
+        if (!only.TryGet(out var end, out var why)) return member with { Section = new Finding<SectionFinding>.Missing(why) };
+        if (end.Value.IsMoved) return member with { Section = Moved(end) };
+        if (SectionAlike.Of(start.Value.Shape, end.Value.Section.Shape)) return member;
+
+        var words = $"the material profile set tapers from {start.Value.Shape.Designation} to {end.Value.Section.Shape.Designation} ({end.Source})";
+        var offset = materials.RunsAlongCentroid(record.Id) ? default : OffsetOf(end.Value);
+        if (!materials.KeepsItsLine(record.Id) || offset != member.CentroidOffset) return Refused($"{words}, shifted from the member's line otherwise than at its start");
+
+        // Without a length, which ends in a reason of its own, the slope is not known.
+        var length = (member.Length as Finding<double>.Found)?.Value ?? double.PositiveInfinity;
+        if (TaperedEnds.WhyNot(start.Value.Shape, end.Value.Section.Shape, length) is { Length: > 0 } fault) return Refused($"{words}; {fault}");
+
+        return member with
+        {
+            EndSection = end.Value.Section,
+            Material = materials.Read(record.Id, start.Value with { Shapes = [.. start.Value.Shapes, .. end.Value.Section.Shapes] }),
+            Notes = member.Notes.Add(words),
+        };
+
+        Member Refused(string message) => member with { Section = NoSection(ReasonCode.SectionNotCovered, message) };
     }
 
     /// <summary>A profile turned or shifted by its own position, which only a body can show in space.</summary>
@@ -247,7 +288,7 @@ internal sealed class MemberReader(
             ? NoSection(ReasonCode.DamagedRecord, $"the record of the analytical member #{record.Id} is damaged")
             : record.Keyword == "IFCSTRUCTURALCURVEMEMBERVARYING" ? NoSection(ReasonCode.SectionNotCovered, "the analytical member varies along its length")
             : AnalyticalSection(record, ref notes, out offset);
-        members.Add(new Member
+        members.Add(WithTaper(record, new Member
         {
             Key = KeyOf(element, record),
             Element = element,
@@ -260,7 +301,7 @@ internal sealed class MemberReader(
             Material = materials.Read(record.Id, (section as Finding<SectionFinding>.Found)?.Value),
             CentroidOffset = offset,
             Notes = notes,
-        });
+        }));
     }
 
     /// <summary>Whether an element is a railing without a body of its own, whose parts are the candidates.</summary>
@@ -271,7 +312,10 @@ internal sealed class MemberReader(
     private Finding<SectionFinding> AnalyticalSection(Part21Record record, ref ImmutableArray<string> notes, out (double Y, double Z) offset)
     {
         offset = default;
-        foreach (var (properties, _) in relations.ProfilePropertiesOf(record.Id))
+        var related = relations.ProfilePropertiesOf(record.Id);
+        if (related.Count > 1) return NoSection(ReasonCode.SectionNotCovered, "several profile properties are related to the analytical member, so its section varies along its length");
+
+        foreach (var (properties, _) in related)
         {
             if (!instances.File.TryFind(properties, out var p) || !instances.TryFollow(p[1], out var profile)) continue;
             if (!profiles.Read(profile).TryGet(out var found, out var why)) return new Finding<SectionFinding>.Missing(why);

@@ -1,5 +1,4 @@
 using System.Collections.Immutable;
-using System.Text.RegularExpressions;
 using MemberScan.Foundation.Geometry;
 using MemberScan.Model.Members;
 using MemberScan.Model.Rules;
@@ -15,16 +14,13 @@ internal sealed class RoleGuess
     /// <summary>Longest name that patterns are searched in [characters].</summary>
     private const int LongestName = 1_000;
 
-    // Patterns are matched in linear time; this only bounds what a settings file could ask for.
-    private static readonly TimeSpan s_patience = TimeSpan.FromSeconds(10);
+    /// <summary>Names whose patterns are kept.</summary>
+    private const int MostKept = 10_000;
 
-    private readonly ImmutableArray<(RoleRule Rule, Regex? Pattern)> _rules;
+    private readonly ImmutableArray<RoleRule> _rules;
+    private readonly Dictionary<string, bool[]> _fitting = new(StringComparer.Ordinal);
 
-    public RoleGuess(ImmutableArray<RoleRule> rules) => _rules =
-    [
-        .. rules.Select(rule => (rule, rule.NamePattern.Length == 0 ? null : new Regex(
-            rule.NamePattern, RegexOptions.IgnoreCase | RegexOptions.CultureInvariant | RegexOptions.NonBacktracking, s_patience))),
-    ];
+    public RoleGuess(ImmutableArray<RoleRule> rules) => _rules = rules;
 
     /// <summary>The role in one word.</summary>
     /// <param name="element">The element.</param>
@@ -34,16 +30,27 @@ internal sealed class RoleGuess
     {
         // The first of the element's own names that says something to any rule is the one that all rules search.
         string[] names = [Searched(element.Name), Searched(element.TypeName), Searched(element.Assembly), Searched(element.Layer)];
-        var name = Array.Find(names, n => _rules.Any(r => r.Pattern?.IsMatch(n) == true)) ?? names[1];
+        var name = Array.Find(names, n => Array.Exists(Fitting(n), fits => fits)) ?? names[1];
+        var fitting = Fitting(name);
 
         double? slope = axes is null ? null : Math.Asin(Math.Clamp(Math.Abs(axes.X.Z), 0, 1)) * 180 / Math.PI;
-        foreach (var (rule, pattern) in _rules)
+        for (var i = 0; i < _rules.Length; i++)
         {
-            if (pattern is not null && !pattern.IsMatch(name)) continue;
-            if (Fits(rule, element, slope, slenderness)) return rule.Role;
+            if (_rules[i].NamePattern.Length > 0 && !fitting[i]) continue;
+            if (Fits(_rules[i], element, slope, slenderness)) return _rules[i].Role;
         }
 
         return Otherwise;
+    }
+
+    // Which patterns a name fits; models give many elements the same few names.
+    private bool[] Fitting(string name)
+    {
+        if (_fitting.TryGetValue(name, out var known)) return known;
+
+        var fits = _rules.Select(rule => rule.NamePattern.Length > 0 && GradePattern.IsIn(rule.NamePattern, name)).ToArray();
+        if (_fitting.Count < MostKept) _fitting[name] = fits;
+        return fits;
     }
 
     private static bool Fits(RoleRule rule, ElementIdentity element, double? slope, double? slenderness)

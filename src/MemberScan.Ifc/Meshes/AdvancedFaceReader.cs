@@ -5,16 +5,27 @@ using MemberScan.Part21;
 
 namespace MemberScan.Ifc.Meshes;
 
-/// <summary>Edge loops of faces that are planes or cylinders, arcs in chords: an edge gives the same chords to both faces that it bounds.</summary>
+/// <summary>
+/// Edge loops of faces that are planes, cylinders or other surfaces of parallel straight lines, arcs in chords: an edge gives the same chords
+/// to both faces that it bounds. An edge that is a spline counts where it is a line or an arc.
+/// </summary>
 internal sealed class AdvancedFaceReader(Instances instances, PlacementReader placements, CurveReader curves)
 {
     /// <summary>Chords of a full circle.</summary>
     public const int ChordsPerTurn = 48;
 
     private readonly Dictionary<ulong, List<Vector3>> _known = [];
+    private readonly SplineEdge _splines = new(instances, placements);
+    private readonly RuledSurface _ruled = new(instances, placements);
 
-    /// <summary>Whether a face lies in a plane or on a cylinder.</summary>
-    public bool IsCovered(Part21Record face) => instances.TryFollow(face[1], out var surface) && surface.Keyword is "IFCPLANE" or "IFCCYLINDRICALSURFACE";
+    /// <summary>Whether a face lies in a plane, on a cylinder or on another surface of parallel straight lines.</summary>
+    public bool IsCovered(Part21Record face) => instances.TryFollow(face[1], out var surface)
+        && (surface.Keyword is "IFCPLANE" or "IFCCYLINDRICALSURFACE" or "IFCSURFACEOFLINEAREXTRUSION" || _ruled.IsOfParallelLines(surface));
+
+    /// <summary>Class and STEP id of the surface that a face lies on.</summary>
+    public string SurfaceOf(Part21Record face) => instances.TryFollow(face[1], out var surface)
+        ? string.Create(System.Globalization.CultureInfo.InvariantCulture, $"{surface.Keyword} #{surface.Id}")
+        : "a surface that is missing";
 
     /// <summary>Corners of an IfcEdgeLoop in order; null when an edge is damaged or neither straight nor circular.</summary>
     public List<Vector3>? Loop(Part21Record loop)
@@ -53,6 +64,8 @@ internal sealed class AdvancedFaceReader(Instances instances, PlacementReader pl
     {
         if (curve.Keyword == "IFCLINE" || (curve.Keyword == "IFCPOLYLINE" && curve[0].ItemCount == 2)) return [start, end];
         if (curve.Keyword == "IFCTRIMMEDCURVE" && instances.TryFollow(curve[0], out var basis)) return OnCurve(basis, start, end, isForward == (Instances.Literal(curve[3]) != "F"));
+        if (curve.Keyword.StartsWith("IFCBSPLINECURVE", StringComparison.Ordinal) || curve.Keyword == "IFCRATIONALBSPLINECURVEWITHKNOTS")
+            return _splines.Points(curve, start, end, isForward);
         if (curve.Keyword != "IFCCIRCLE" || curves.CircleOf(curve) is not { } circle) return null;
 
         var (axes, radius) = circle;

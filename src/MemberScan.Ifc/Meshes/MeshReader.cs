@@ -48,7 +48,7 @@ internal sealed class MeshReader(Instances instances, PlacementReader placements
         foreach (var face in faces)
         {
             var isPlain = face.Keyword is "IFCFACE" or "IFCFACESURFACE";
-            if (!isPlain && (face.Keyword != "IFCADVANCEDFACE" || !_advanced.IsCovered(face))) return "its faces are curved otherwise than a cylinder";
+            if (!isPlain && (face.Keyword != "IFCADVANCEDFACE" || !_advanced.IsCovered(face))) return $"its faces are curved otherwise than a cylinder ({(face.Keyword == "IFCADVANCEDFACE" ? _advanced.SurfaceOf(face) : face.Keyword)})";
             if (instances.FollowEach(face[0]) is not { Count: > 0 } bounds) return "a face of it has no bounds";
 
             var loops = new List<ImmutableArray<int>>();

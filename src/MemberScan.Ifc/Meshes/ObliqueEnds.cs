@@ -89,7 +89,7 @@ internal static class ObliqueEnds
     private static List<Vector3> Corners(Mesh mesh, ImmutableArray<bool> isEnd, bool end) => [.. mesh.Points.Where((_, i) => isEnd[i] == end)];
 
     /// <summary>Largest distance of points, along the axis, from the plane through their middle that fits them best [m].</summary>
-    private static double OutOfPlane(List<Vector3> points, Vector3 axis)
+    public static double OutOfPlane(List<Vector3> points, Vector3 axis)
     {
         var middle = 1.0 / points.Count * points.Aggregate(Vector3.Zero, (sum, p) => sum + p);
         _ = axis.Cross(Math.Abs(axis.X) < 0.9 ? Vector3.UnitX : Vector3.UnitY).TryNormalize(out var u);

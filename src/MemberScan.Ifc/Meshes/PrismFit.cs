@@ -183,7 +183,8 @@ internal static class PrismFit
         return new Prism(new Transform3(height * z, x, y, z), ends.Length, section, Math.Max(residual, ends.Deviation), ends.IsOblique);
     }
 
-    private static double Allowed(CrossSection shape) => shape switch
+    /// <summary>Largest distance of one end from the other, seen along the axis [m].</summary>
+    public static double Allowed(CrossSection shape) => shape switch
     {
         Tube tube => RecognisedSection.WallTolerance * tube.Wall,
         Box box => RecognisedSection.WallTolerance * box.Wall,

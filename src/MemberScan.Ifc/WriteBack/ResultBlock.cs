@@ -1,7 +1,7 @@
 using System.Buffers;
-using System.Globalization;
 using System.Security.Cryptography;
 using System.Text;
+using MemberScan.Part21.Containers;
 
 namespace MemberScan.Ifc.WriteBack;
 
@@ -13,7 +13,8 @@ public static class ResultBlock
     private const int HashLength = 64;
 
     // The words of a mark inside a string of the block would be taken for the mark; the escape decodes to the same text.
-    private const string OpeningWords = "/* MemberScan block", EscapedOpeningWords = @"\X2\002F\X0\* MemberScan block";
+    internal const string OpeningWords = "/* MemberScan block";
+    private const string EscapedOpeningWords = @"\X2\002F\X0\* MemberScan block";
 
     /// <summary>What stripping found.</summary>
     /// <param name="Base">The text without a block of ours; the text itself when it has none.</param>
@@ -92,15 +93,38 @@ public static class ResultBlock
         ArgumentOutOfRangeException.ThrowIfNegative(insertionOffset);
         var at = checked((int)insertionOffset);
         output.Write(baseText[..at]);
-        Line(string.Create(CultureInfo.InvariantCulture, $"{Begin}{Sha256(baseText)} */"));
-        foreach (var line in lines) Line(line.Replace(OpeningWords, EscapedOpeningWords, StringComparison.Ordinal));
-        Line(End);
-        output.Write(baseText[at..]);
-
-        void Line(string text)
+        foreach (var line in Block(Sha256(baseText), lines))
         {
-            output.Write(Encoding.ASCII.GetBytes(text));
+            output.Write(Encoding.ASCII.GetBytes(line));
             output.Write(Encoding.ASCII.GetBytes(lineEnd));
         }
+
+        output.Write(baseText[at..]);
     }
+
+    /// <summary>As <see cref="Write(IBufferWriter{byte}, ReadOnlySpan{byte}, long, IEnumerable{string}, string)"/>, to a file; a text on disk is not held in memory.</summary>
+    /// <param name="output">Receives the text.</param>
+    /// <param name="baseText">The text without a block.</param>
+    /// <param name="sha256">SHA-256 of the text without a block.</param>
+    /// <param name="insertionOffset">Offset of that <c>E</c>.</param>
+    /// <param name="lines">Instances, one per line, without line ends.</param>
+    /// <param name="lineEnd">Line end of the text.</param>
+    public static void Write(FileStream output, ModelText baseText, string sha256, long insertionOffset, IEnumerable<string> lines, string lineEnd)
+    {
+        ArgumentNullException.ThrowIfNull(output);
+        ArgumentNullException.ThrowIfNull(baseText);
+        ArgumentNullException.ThrowIfNull(lines);
+        ArgumentOutOfRangeException.ThrowIfNegative(insertionOffset);
+        baseText.CopyTo(0, insertionOffset, output);
+        foreach (var line in Block(sha256, lines))
+        {
+            output.Write(Encoding.ASCII.GetBytes(line));
+            output.Write(Encoding.ASCII.GetBytes(lineEnd));
+        }
+
+        baseText.CopyTo(insertionOffset, baseText.Length, output);
+    }
+
+    private static IEnumerable<string> Block(string sha256, IEnumerable<string> lines) =>
+        lines.Select(line => line.Replace(OpeningWords, EscapedOpeningWords, StringComparison.Ordinal)).Prepend($"{Begin}{sha256} */").Append(End);
 }

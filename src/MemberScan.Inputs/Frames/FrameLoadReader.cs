@@ -2,6 +2,7 @@ using System.Collections.Immutable;
 using MemberScan.Foundation.Geometry;
 using MemberScan.Inputs.Json;
 using MemberScan.Model.Forces;
+using MemberScan.Model.Frames;
 using MemberScan.Model.Frames.Loads;
 
 namespace MemberScan.Inputs.Frames;
@@ -30,7 +31,7 @@ internal sealed class FrameLoadReader(FrameValues values, FrameUnits units, Dict
     private FrameSituation Situation(JsonEntry entry)
     {
         var path = $"situations.{entry.Key}";
-        var e = values.Entries(entry.Value, path, [], ["kind", "selfWeight", "nodeLoads", "memberLoads", "temperature"]);
+        var e = values.Entries(entry.Value, path, [], ["kind", "selfWeight", "nodeLoads", "memberLoads", "temperature", "supportMovements"]);
         var (points, lines) = (ImmutableArray.CreateBuilder<MemberPointLoad>(), ImmutableArray.CreateBuilder<MemberLineLoad>());
         foreach (var (item, at) in Items(e, "memberLoads", path)) MemberLoad(item, at, points, lines);
         return new FrameSituation
@@ -42,7 +43,23 @@ internal sealed class FrameLoadReader(FrameValues values, FrameUnits units, Dict
             PointLoads = points.ToImmutable(),
             LineLoads = lines.ToImmutable(),
             Temperatures = [.. Items(e, "temperature", path).Select(pair => Temperature(pair.Item, pair.Path))],
+            Movements = e.TryGetValue("supportMovements", out var moved) ? [.. values.Json.Object(moved, $"{path}.supportMovements").SelectMany(support => Movements(support, $"{path}.supportMovements"))] : [],
         };
+    }
+
+    private IEnumerable<SupportMovement> Movements(JsonEntry support, string path)
+    {
+        if (!nodes.TryGetValue(support.Key, out var node))
+        {
+            values.UnknownKey(support.Value, support.Key, path, nodes, "node");
+            yield break;
+        }
+
+        foreach (var (key, value) in values.Entries(support.Value, $"{path}.{support.Key}", [], FrameValues.Directions))
+        {
+            var direction = (Direction)Array.IndexOf(FrameValues.Directions, key);
+            yield return new SupportMovement(node, direction, values.Number(value, $"{path}.{support.Key}.{key}") * (direction >= Direction.Rx ? 1 : units.Length.Factor));
+        }
     }
 
     private FrameSituation Combination(JsonEntry entry, Dictionary<string, int> numbers)

@@ -1,4 +1,5 @@
 using System.Collections.Immutable;
+using System.Text.Json;
 using MemberScan.Inputs.Json;
 using MemberScan.Mechanics.Stiffness;
 using MemberScan.Model.Frames;
@@ -27,7 +28,8 @@ internal sealed class FrameMemberReader(
         var path = $"members.{entry.Key}";
         var e = values.Entries(entry.Value, path, s_required, s_optional);
         var (start, end) = (Node(e, path, "start"), Node(e, path, "end"));
-        var (section, material) = (Named(e, path, "section", sections), Named(e, path, "material", materials));
+        var (section, last) = Section(e, path);
+        var material = Named(e, path, "material", materials);
         var shears = e.TryGetValue("shearFlexible", out var shear) && (values.Json.Flag(shear, $"{path}.shearFlexible") ?? false);
         var truss = e.TryGetValue("trussOnly", out var only) && (values.Json.Flag(only, $"{path}.trussOnly") ?? false);
         var (startJoint, endJoint) = Joints(e, path);
@@ -37,6 +39,8 @@ internal sealed class FrameMemberReader(
         var (startOffset, endOffset) = (values.Optional(offsets, "start", $"{path}.offsets") ?? default, values.Optional(offsets, "end", $"{path}.offsets") ?? default);
         if (section is null || material is null || start < 0 || end < 0) return null;
 
+        var taper = last is null ? [] : FrameTaper.Of(values, section, last, e["section"], $"{path}.section");
+        if (shears) taper = [.. taper.Select(point => point with { Section = Shearing(point.Section, material, entry, path) })];
         return new FrameMember
         {
             Name = entry.Key,
@@ -45,6 +49,7 @@ internal sealed class FrameMemberReader(
             Section = shears ? Shearing(section, material, entry, path) : section,
             Material = material,
             ZDirection = zDirection,
+            Taper = taper,
             ShearFlexible = shears,
             TrussOnly = truss,
             StartJoint = startJoint,
@@ -55,16 +60,26 @@ internal sealed class FrameMemberReader(
         };
     }
 
+    /// <summary>The section, and the one at the end where two are named.</summary>
+    private (FrameSection? Start, FrameSection? End) Section(Dictionary<string, JsonItem> entries, string path)
+    {
+        if (!entries.TryGetValue("section", out var item) || item.Kind != JsonValueKind.Object) return (Named(entries, path, "section", sections), null);
+
+        var both = values.Entries(item, $"{path}.section", ["start", "end"], []);
+        var (start, end) = (Named(both, $"{path}.section", "start", sections, "section"), Named(both, $"{path}.section", "end", sections, "section"));
+        return end is null ? (null, null) : (start, end);
+    }
+
     private int Node(Dictionary<string, JsonItem> entries, string path, string key) =>
         entries.TryGetValue(key, out var item) ? values.Reference(item, $"{path}.{key}", nodes, "node") : -1;
 
-    private T? Named<T>(Dictionary<string, JsonItem> entries, string path, string key, Dictionary<string, T> known)
+    private T? Named<T>(Dictionary<string, JsonItem> entries, string path, string key, Dictionary<string, T> known, string? what = null)
         where T : class
     {
         if (!entries.TryGetValue(key, out var item)) return null;
 
         var numbers = known.Keys.Select((name, number) => (name, number)).ToDictionary(pair => pair.name, pair => pair.number, StringComparer.Ordinal);
-        return values.Reference(item, $"{path}.{key}", numbers, key) >= 0 ? known[item.Text] : null;
+        return values.Reference(item, $"{path}.{key}", numbers, what ?? key) >= 0 ? known[item.Text] : null;
     }
 
     // Shear areas of a section text, for ν = E/2G − 1; those of constants stand in the file.

@@ -2,6 +2,7 @@ using System.Text.Json;
 using MemberScan.Inputs.Json;
 using MemberScan.Inputs.Values;
 using MemberScan.Mechanics.Properties;
+using MemberScan.Mechanics.Sections;
 using MemberScan.Model.Frames;
 
 namespace MemberScan.Inputs.Frames;
@@ -35,25 +36,28 @@ internal static class FrameSectionReader
             return null;
         }
 
-        var p = SectionProperties.Of(section);
-        if (p.J is { } j)
-        {
-            return new FrameSection
-            {
-                Name = entry.Key,
-                Shape = section,
-                Area = p.Area,
-                Iy = p.Iy,
-                Iz = p.Iz,
-                Iyz = p.Iyz,
-                J = j,
-                ShearCentreY = p.ShearCentreY,
-                ShearCentreZ = p.ShearCentreZ,
-            };
-        }
+        if (OfShape(entry.Key, section) is { } found) return found;
 
         values.Json.Fail(InputCodes.TextUnusable, entry.Value, $"{path}: there is no torsion constant for this section, whose dimensions are too far apart; give A, Iy, Iz and J");
         return null;
+    }
+
+    /// <summary>The constants of a section; null where it has no torsion constant.</summary>
+    public static FrameSection? OfShape(string name, CrossSection shape)
+    {
+        var p = SectionProperties.Of(shape);
+        return p.J is not { } j ? null : new FrameSection
+        {
+            Name = name,
+            Shape = shape,
+            Area = p.Area,
+            Iy = p.Iy,
+            Iz = p.Iz,
+            Iyz = p.Iyz,
+            J = j,
+            ShearCentreY = p.ShearCentreY,
+            ShearCentreZ = p.ShearCentreZ,
+        };
     }
 
     private static FrameSection OfConstants(FrameValues values, FrameUnits units, JsonEntry entry, string path)

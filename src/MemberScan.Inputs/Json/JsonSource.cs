@@ -10,6 +10,9 @@ internal sealed class JsonSource(ReadOnlyMemory<byte> bytes, string fileName, Di
 
     public ReadOnlySpan<byte> Bytes => bytes.Span;
 
+    /// <summary>Whether the text is one of the program's own, whose patterns the tests have tried: they cost far more to try than to use.</summary>
+    public bool IsShipped { get; init; }
+
     /// <summary>How many errors were added.</summary>
     public int ErrorCount { get; private set; }
 

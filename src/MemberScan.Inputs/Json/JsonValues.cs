@@ -1,6 +1,7 @@
 using System.Text.Json;
 using MemberScan.Foundation.Units;
 using MemberScan.Inputs.Values;
+using MemberScan.Model.Rules;
 
 namespace MemberScan.Inputs.Json;
 
@@ -9,6 +10,9 @@ internal sealed class JsonValues(JsonSource source)
 {
     /// <summary>Longest text of a setting [characters].</summary>
     public const int LongestText = 256;
+
+    /// <summary>What is wrong with a pattern over names; null when nothing is.</summary>
+    public string? PatternFault(string pattern) => source.IsShipped ? null : GradePattern.Fault(pattern);
 
     /// <summary>Adds an error at a value.</summary>
     public void Fail(string code, JsonItem at, string message) => source.Fail(code, at.Offset, message);

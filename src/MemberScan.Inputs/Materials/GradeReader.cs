@@ -69,7 +69,7 @@ internal static class GradeReader
     private static string? Pattern(JsonItem item, string path, JsonValues values)
     {
         if (values.Text(item, path) is not { } pattern) return null;
-        if (GradePattern.Fault(pattern) is not { } fault) return pattern;
+        if (values.PatternFault(pattern) is not { } fault) return pattern;
 
         values.Fail(InputCodes.PatternUnusable, item, $"{path}: {fault}");
         return null;

@@ -27,9 +27,9 @@ public sealed class GradeTable
         return Grades.FirstOrDefault(grade => grade.Fits(materialName));
     }
 
-    internal static ImmutableArray<Grade> Read(ReadOnlyMemory<byte> bytes, string fileName, DiagnosticList diagnostics)
+    internal static ImmutableArray<Grade> Read(ReadOnlyMemory<byte> bytes, string fileName, DiagnosticList diagnostics, bool isShipped = false)
     {
-        var source = new JsonSource(bytes, fileName, diagnostics);
+        var source = new JsonSource(bytes, fileName, diagnostics) { IsShipped = isShipped };
         if (StrictJson.Read(source) is not { } root) return [];
 
         var values = new JsonValues(source);
@@ -42,7 +42,7 @@ public sealed class GradeTable
     private static GradeTable ReadShipped()
     {
         var diagnostics = new DiagnosticList();
-        var grades = Read(ShippedFiles.Read(ShippedFiles.Grades), ShippedFiles.Grades, diagnostics);
+        var grades = Read(ShippedFiles.Read(ShippedFiles.Grades), ShippedFiles.Grades, diagnostics, isShipped: true);
         return diagnostics.HasErrors
             ? throw new InvalidOperationException($"the shipped grades are damaged: {diagnostics.Items[0]}")
             : new GradeTable(grades);

@@ -69,7 +69,7 @@ internal sealed class RoleRulesReader(JsonValues values)
     private string Pattern(JsonItem item, string path)
     {
         if (values.Text(item, path) is not { } pattern) return "";
-        if (GradePattern.Fault(pattern) is not { } fault) return pattern;
+        if (values.PatternFault(pattern) is not { } fault) return pattern;
 
         values.Fail(InputCodes.PatternUnusable, item, $"{path}: {fault}");
         return "";

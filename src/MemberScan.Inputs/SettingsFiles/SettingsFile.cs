@@ -17,7 +17,11 @@ public static class SettingsFile
     {
         ArgumentNullException.ThrowIfNull(fileName);
         ArgumentNullException.ThrowIfNull(diagnostics);
-        var source = new JsonSource(bytes, fileName, diagnostics);
+        return Read(new JsonSource(bytes, fileName, diagnostics));
+    }
+
+    private static Settings? Read(JsonSource source)
+    {
         if (StrictJson.Read(source) is not { } root) return null;
 
         var settings = new SettingsReader(new JsonValues(source)).Read(root);
@@ -27,7 +31,7 @@ public static class SettingsFile
     internal static Settings ReadShipped()
     {
         var diagnostics = new DiagnosticList();
-        return Read(ShippedFiles.Read(ShippedFiles.DefaultSettings), ShippedFiles.DefaultSettings, diagnostics) is { } settings
+        return Read(new JsonSource(ShippedFiles.Read(ShippedFiles.DefaultSettings), ShippedFiles.DefaultSettings, diagnostics) { IsShipped = true }) is { } settings
             ? AsDefaults(settings)
             : throw new InvalidOperationException($"the shipped settings are damaged: {diagnostics.Items[0]}");
     }

@@ -15,10 +15,15 @@ public static class GradePattern
     // Patterns are matched in linear time; this only bounds what a settings file could ask for.
     private static readonly TimeSpan s_patience = TimeSpan.FromSeconds(10);
 
-    // Linear in the length of the name whatever the pattern: material names come from models.
-    private const RegexOptions Options = RegexOptions.NonBacktracking | RegexOptions.IgnoreCase | RegexOptions.CultureInvariant;
+    // What is quick to make may be slow to match: a name that takes longer than this is matched in linear time.
+    private static readonly TimeSpan s_shortPatience = TimeSpan.FromMilliseconds(20);
 
-    private static readonly ConcurrentDictionary<string, Regex> s_made = new(StringComparer.Ordinal);
+    private const RegexOptions Options = RegexOptions.IgnoreCase | RegexOptions.CultureInvariant;
+
+    // Linear in the length of the name whatever the pattern: material names come from models.
+    private const RegexOptions Linear = Options | RegexOptions.NonBacktracking;
+
+    private static readonly ConcurrentDictionary<string, Matcher> s_made = new(StringComparer.Ordinal);
 
     /// <summary>Whether a whole name fits a pattern; blanks round it do not count.</summary>
     /// <exception cref="ArgumentException">The pattern has a <see cref="Fault"/>.</exception>
@@ -27,7 +32,16 @@ public static class GradePattern
         ArgumentNullException.ThrowIfNull(pattern);
         ArgumentNullException.ThrowIfNull(name);
         var trimmed = name.Trim();
-        return trimmed.Length is > 0 and <= LongestName && Whole(pattern).IsMatch(trimmed);
+        return trimmed.Length is > 0 and <= LongestName && For(Whole(pattern)).IsMatch(trimmed);
+    }
+
+    /// <summary>Whether a pattern fits any part of a text.</summary>
+    /// <exception cref="ArgumentException">The pattern has a <see cref="Fault"/>.</exception>
+    public static bool IsIn(string pattern, string text)
+    {
+        ArgumentNullException.ThrowIfNull(pattern);
+        ArgumentNullException.ThrowIfNull(text);
+        return For(pattern).IsMatch(text);
     }
 
     /// <summary>What is wrong with a pattern; null when nothing is.</summary>
@@ -36,8 +50,8 @@ public static class GradePattern
         ArgumentNullException.ThrowIfNull(pattern);
         try
         {
-            _ = new Regex(pattern, Options, s_patience);             // alone, so that brackets cannot pair up with ours
-            return Whole(pattern).IsMatch("") ? "it fits the empty name; let it demand at least one letter" : null;
+            _ = new Regex(pattern, Linear, s_patience);              // alone, so that brackets cannot pair up with ours
+            return For(Whole(pattern)).IsMatch("") ? "it fits the empty name; let it demand at least one letter" : null;
         }
         catch (RegexParseException fault)
         {
@@ -49,13 +63,35 @@ public static class GradePattern
         }
     }
 
-    // A pattern of linear matching time costs far more to make than to match.
-    private static Regex Whole(string pattern)
+    private static string Whole(string pattern) => $@"\A(?:{pattern})\z";
+
+    private static Matcher For(string pattern)
     {
         if (s_made.TryGetValue(pattern, out var known)) return known;
 
-        var made = new Regex($@"\A(?:{pattern})\z", Options, s_patience);
+        var made = new Matcher(pattern);
         if (s_made.Count < Kept) s_made[pattern] = made;
         return made;
+    }
+
+    /// <summary>A pattern as two expressions of the same meaning: one that is quick to make, one that is linear to match and costs far more to make.</summary>
+    private sealed class Matcher(string pattern)
+    {
+        private readonly Regex _quick = new(pattern, Options, s_shortPatience);
+        private readonly Lazy<Regex> _linear = new(() => new Regex(pattern, Linear, s_patience));
+
+        public bool IsMatch(string name)
+        {
+            if (_linear.IsValueCreated) return _linear.Value.IsMatch(name);
+
+            try
+            {
+                return _quick.IsMatch(name);
+            }
+            catch (RegexMatchTimeoutException)
+            {
+                return _linear.Value.IsMatch(name);
+            }
+        }
     }
 }

@@ -1,3 +1,5 @@
+using System.Buffers;
+
 namespace MemberScan.Part21.Sources;
 
 /// <summary>The lines that offsets lie in, counted in one pass up to the last of them.</summary>
@@ -11,22 +13,25 @@ internal static class LineCounter
     public static long[] LinesAt(ByteSource source, ReadOnlySpan<long> offsets)
     {
         var lines = new long[offsets.Length];
-        var piece = new byte[PieceLength + 1];
         var (line, at) = (1L, 0L);
-        for (var i = 0; i < offsets.Length; i++)
-        {
-            while (at < offsets[i])
-            {
-                var length = (int)Math.Min(PieceLength, offsets[i] - at);
-                var held = source.Read(at, piece.AsSpan(0, length + 1));
-                line += CountLineEnds(piece.AsSpan(0, held), length);
-                at += length;
-            }
+        for (var i = 0; i < offsets.Length; i++) lines[i] = line = LineAt(source, at, line, at = offsets[i]);
+        return lines;
+    }
 
-            lines[i] = line;
+    /// <summary>The line of an offset, counted on from the line of an earlier one.</summary>
+    public static long LineAt(ByteSource source, long from, long line, long offset)
+    {
+        var piece = ArrayPool<byte>.Shared.Rent(PieceLength + 1);
+        while (from < offset)
+        {
+            var length = (int)Math.Min(PieceLength, offset - from);
+            var held = source.Read(from, piece.AsSpan(0, length + 1));
+            line += CountLineEnds(piece.AsSpan(0, held), length);
+            from += length;
         }
 
-        return lines;
+        ArrayPool<byte>.Shared.Return(piece);
+        return line;
     }
 
     // Those in the first 'length' bytes; the byte behind tells whether a CR at the end is one of its own.

@@ -7,18 +7,33 @@ internal sealed class SourceText
 {
     private const int BlockLength = 16 * 1024;
 
-    private readonly Lazy<long[]> _linesBeforeBlock;
+    private readonly Lock _gate = new();
+    private long[]? _linesBeforeBlock;
 
+    /// <summary>A stretch of a file.</summary>
+    /// <param name="bytes">The stretch.</param>
+    /// <param name="name">Name of the file.</param>
+    /// <param name="origin">Where it begins in the file [byte].</param>
+    /// <param name="instanceId">Number of the instance that it is the text of.</param>
+    public SourceText(ReadOnlyMemory<byte> bytes, string name, long origin, ulong instanceId)
+        : this(bytes, name) => (Origin, InstanceId) = (origin, instanceId);
+
+    /// <summary>A whole file.</summary>
     public SourceText(ReadOnlyMemory<byte> bytes, string name)
     {
         Bytes = bytes;
         Name = name;
-        _linesBeforeBlock = new Lazy<long[]>(CountBlocks);
     }
 
     public ReadOnlyMemory<byte> Bytes { get; }
 
     public string Name { get; }
+
+    /// <summary>Where the bytes begin in the file [byte].</summary>
+    public long Origin { get; }
+
+    /// <summary>Number of the instance that it is the text of; 0 for a whole file.</summary>
+    public ulong InstanceId { get; }
 
     /// <summary>The first line end met; LF where there is none.</summary>
     public string LineEnd
@@ -32,7 +47,7 @@ internal sealed class SourceText
         }
     }
 
-    public ReadOnlySpan<byte> Slice(long start, int length) => Bytes.Span.Slice((int)start, length);
+    public ReadOnlySpan<byte> Slice(long start, int length) => Bytes.Span.Slice((int)(start - Origin), length);
 
     /// <summary>The place of an offset: its line and byte.</summary>
     public SourceSpan SpanAt(long offset, ulong instanceId)
@@ -41,8 +56,13 @@ internal sealed class SourceText
 
         var block = (int)(offset / BlockLength);
         var start = block * BlockLength;
-        var line = 1 + _linesBeforeBlock.Value[block] + CountLineEnds(start, (int)offset);
+        var line = 1 + LinesBeforeBlocks()[block] + CountLineEnds(start, (int)offset);
         return new SourceSpan(Name, offset, line, 0, instanceId);
+    }
+
+    private long[] LinesBeforeBlocks()
+    {
+        lock (_gate) return _linesBeforeBlock ??= CountBlocks();
     }
 
     private long[] CountBlocks()

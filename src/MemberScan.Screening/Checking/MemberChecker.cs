@@ -30,6 +30,8 @@ internal sealed class MemberChecker(SectionLibrary library, Settings settings, L
 
     private const double ProvisionalYield = 235e6;
 
+    private const string EitherEnd = "tapered: every place is checked with the section of either end, the less favourable decides; one end is smaller in every dimension, so that it bounds what lies between";
+
     private readonly SituationChecker _situations = new(library, new FurtherChecks(contacts));
 
     /// <summary>Checks a candidate.</summary>
@@ -52,13 +54,13 @@ internal sealed class MemberChecker(SectionLibrary library, Settings settings, L
             all.Add(string.Create(CultureInfo.InvariantCulture, $"Poisson's ratio {poisson.Value:0.0##} is the default; the model gives none"));
 
         Reason? first = (member.Section as Finding<SectionFinding>.Missing)?.Why
-            ?? OutOfRange(section)
+            ?? OutOfRange(section, member.EndSection)
             ?? (yield as Finding<double>.Missing)?.Why
             ?? (forces.Count == 0 ? new Reason(ReasonCode.NoForces, "no section forces for this member in any source") : null)
             ?? (member.Length as Finding<double>.Missing)?.Why
             ?? (double.IsFinite(length!.Value) ? null : new Reason(ReasonCode.LengthAmbiguous, $"the length ({length.Source}) is beyond the range of numbers"));
 
-        var isCheckable = section is not null && length is not null && double.IsFinite(length.Value) && forces.Count > 0 && OutOfRange(section) is null;
+        var isCheckable = section is not null && length is not null && double.IsFinite(length.Value) && forces.Count > 0 && OutOfRange(section, member.EndSection) is null;
         double? required = null;
         var findings = new List<SituationFindings>();
         if (first is null)
@@ -111,9 +113,9 @@ internal sealed class MemberChecker(SectionLibrary library, Settings settings, L
     private static Taper? TaperOf(SectionFinding start, SectionFinding? end) => end is null ? null : Taper.Of(start.Shape, end.Shape);
 
     /// <summary>Dimensions of which a sound section is made, but whose powers leave the range of numbers.</summary>
-    private static Reason? OutOfRange(Finding<SectionFinding>.Found? section)
+    private static Reason? OutOfRange(Finding<SectionFinding>.Found? section, SectionFinding? end)
     {
-        var shape = section?.Value.Shapes.FirstOrDefault(s => !NumberRange.Holds(s));
+        var shape = section?.Value.Shapes.AddRange(end?.Shapes ?? []).FirstOrDefault(s => !NumberRange.Holds(s));
         return shape is null ? null : new Reason(ReasonCode.SectionInvalid, $"the section {shape.Designation} is so small or so large that its properties are beyond the range of numbers");
     }
 
@@ -176,11 +178,18 @@ internal sealed class MemberChecker(SectionLibrary library, Settings settings, L
         var wall = new WallInForce(member, limits);
         var shapes = wall.Of(section.Value);
         var end = member.EndSection is { } other ? wall.Of(other) : null;
+        var taper = TaperOf(shapes, end);
+        if (end is not null && taper is null)
+        {
+            shapes = shapes with { Shapes = [.. shapes.Shapes, .. end.Shapes] };
+            if (!notes.Contains(EitherEnd)) notes.Add(EitherEnd);
+        }
+
         if (wall.IsReduced)
             foreach (var words in wall.All) if (!notes.Contains(words)) notes.Add(words);
         return new Subject(member, shapes, length, strength, poisson, limits)
         {
-            Taper = TaperOf(shapes, end),
+            Taper = taper,
             IsBrittle = StrengthInForce.IsBrittle(member.Material, limits),
             WallWords = wall.Words,
         };

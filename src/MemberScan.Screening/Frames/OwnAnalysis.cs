@@ -121,6 +121,12 @@ internal static class OwnAnalysis
             $"second-order effects are not covered: {read.Pieces[worst].Name} is compressed to {100 * share:0.#} % of its Euler load (hinged over its own length) in '{one.Situation.Name}'");
     }
 
+    private static string Shear(AnalysisFrame read, ulong line)
+    {
+        var number = read.Frame is null ? -1 : Array.FindIndex([.. read.Pieces], p => p.Line == line);
+        return number >= 0 && read.Frame!.Members[number].ShearFlexible ? "member flexible in shear" : "member stiff in shear";
+    }
+
     private static string Source(AnalysisFrame read, ulong line) =>
-        string.Create(CultureInfo.InvariantCulture, $"own frame analysis of {read.Name}, linear, first order, members stiff in shear; on #{line}");
+        string.Create(CultureInfo.InvariantCulture, $"own frame analysis of {read.Name}, linear, first order, {Shear(read, line)}; on #{line}");
 }

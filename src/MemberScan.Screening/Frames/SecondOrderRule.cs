@@ -16,8 +16,11 @@ internal static class SecondOrderRule
     {
         if (axial >= 0) return 0;
 
-        var section = member.Section;
-        var least = 0.5 * (section.Iy + section.Iz) - Math.Sqrt(0.25 * (section.Iy - section.Iz) * (section.Iy - section.Iz) + section.Iyz * section.Iyz);
+        // Of a tapering member the thinnest section counts for its whole length, which tells too early.
+        var least = member.Taper.Select(t => t.Section).Append(member.Section).Min(Least);
         return -axial * length * length / (Math.PI * Math.PI * member.Material.E * least);
     }
+
+    private static double Least(FrameSection section) =>
+        0.5 * (section.Iy + section.Iz) - Math.Sqrt(0.25 * (section.Iy - section.Iz) * (section.Iy - section.Iz) + section.Iyz * section.Iyz);
 }

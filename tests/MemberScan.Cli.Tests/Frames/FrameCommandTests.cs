@@ -48,6 +48,40 @@ public sealed class FrameCommandTests
         Near(stress * factor / 235, json.RootElement.GetProperty("situations").GetProperty("S1").GetProperty("members").GetProperty("m1").GetProperty("utilization").GetDouble(), 1e-3);
     }
 
+    /// <summary>
+    /// 40 mm wide, 150 mm deep at the root and 60 mm at the tip, by hand with ξ from the tip, h = 60 + 0.045ξ and M = Pξ: the deflection is
+    /// 12P/(E·b)·∫ξ²/h³ dξ = 12P/(E·b·k³)·[ln(h₁/h₂) + 2h₂/h₁ − h₂²/(2h₁²) − 3/2]; the bending stress 6Pξ/(b·h²) is largest where h = 120 mm, ξ = 1333.3 mm,
+    /// 13.889 MPa for 1 kN, not at the root (13.333 MPa).
+    /// </summary>
+    [Fact]
+    public async Task A_member_that_tapers_has_the_section_of_each_place()
+    {
+        var text = Cantilever.Replace("\"MEMBER_SECTION\"", "{ \"start\": \"thick\", \"end\": \"thin\" }", StringComparison.Ordinal).Replace("KIND", "service", StringComparison.Ordinal)
+            .Replace("\"rod\":", "\"thick\": \"rectangle 40x150 mm\", \"thin\": \"rectangle 40x60 mm\", \"rod\":", StringComparison.Ordinal).Replace("-100]", "-1000]", StringComparison.Ordinal);
+
+        using var json = await Solve(text, 0);
+
+        var s = json.RootElement.GetProperty("situations").GetProperty("S1");
+        var k = 0.045;
+        var bracket = Math.Log(2.5) + 2 * 60 / 150.0 - 60 * 60 / (2 * 150.0 * 150) - 1.5;
+        Near(-12 * 1000 / (210000 * 40 * k * k * k) * bracket, s.GetProperty("displacements").GetProperty("B")[2].GetDouble(), 1e-3);
+        Near(13.889 * 1.67 / 235, s.GetProperty("members").GetProperty("m1").GetProperty("utilization").GetDouble(), 1e-3);
+    }
+
+    /// <summary>A cantilever whose support sinks by 8 mm and turns by 0.001 rad about y moves as a rigid body: the end by −8 − 0.001·2000 mm.</summary>
+    [Fact]
+    public async Task A_support_moves_in_one_situation_and_not_in_the_other()
+    {
+        var text = Cantilever.Replace("MEMBER_SECTION", "bare", StringComparison.Ordinal).Replace("KIND", "service", StringComparison.Ordinal)
+            .Replace("\"situations\": {", "\"situations\": { \"S0\": { \"supportMovements\": { \"A\": { \"uz\": -8, \"ry\": 0.001 } } },", StringComparison.Ordinal);
+
+        using var json = await Solve(text, 0);
+
+        var situations = json.RootElement.GetProperty("situations");
+        Near(-10, situations.GetProperty("S0").GetProperty("displacements").GetProperty("B")[2].GetDouble());
+        Near(-100 * 8e9 / (3 * 210000 * 2.2e7), situations.GetProperty("S1").GetProperty("displacements").GetProperty("B")[2].GetDouble());
+    }
+
     [Fact]
     public async Task The_whole_format_is_read()
     {

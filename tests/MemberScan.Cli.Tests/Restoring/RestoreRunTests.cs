@@ -1,6 +1,7 @@
 using System.Text;
 using MemberScan.Cli.Tests.Screening;
 using MemberScan.OpenModels;
+using MemberScan.Part21.Containers;
 
 namespace MemberScan.Cli.Tests.Restoring;
 
@@ -33,7 +34,7 @@ public sealed class RestoreRunTests
         var (text, _) = MemberScan.Part21.ModelContainer.Read(OpenModel.Path(name));
         var diagnostics = new MemberScan.Foundation.Diagnostics.DiagnosticList();
         var outcome = MemberScan.Screening.Screener.Run(
-            new MemberScan.Screening.ScreeningRequest { ModelName = name, ModelBytes = text, Settings = MemberScan.Inputs.SettingsFiles.Settings.Default, Timestamp = "", Version = "0" }, diagnostics);
+            new MemberScan.Screening.ScreeningRequest { Model = ModelText.Of(text, name), Settings = MemberScan.Inputs.SettingsFiles.Settings.Default, Timestamp = "", Version = "0" }, diagnostics);
         Assert.NotNull(outcome);
         Assert.SkipUnless(outcome.CanWriteModel, "the model is not read to its end");
         using var folder = new TemporaryFolder();

@@ -4,6 +4,7 @@ using MemberScan.Ifc.WriteBack;
 using MemberScan.Inputs.SettingsFiles;
 using MemberScan.OpenModels;
 using MemberScan.Part21;
+using MemberScan.Part21.Containers;
 using MemberScan.Screening;
 
 namespace MemberScan.Cli.Tests.Screening;
@@ -52,7 +53,7 @@ public sealed class AppendedInstancesTests
     private static (Part21File File, ulong First, string Schema) Screened(string path)
     {
         var (text, _) = ModelContainer.Read(path);
-        var request = new ScreeningRequest { ModelName = Path.GetFileName(path), ModelBytes = text, Settings = Settings.Default, Timestamp = "", Version = "0", WithSetTemplate = true };
+        var request = new ScreeningRequest { Model = ModelText.Of(text, Path.GetFileName(path)), Settings = Settings.Default, Timestamp = "", Version = "0", WithSetTemplate = true };
         var outcome = Screener.Run(request, new DiagnosticList());
         Assert.NotNull(outcome);
         Assert.SkipUnless(outcome.CanWriteModel, "the model is not read to its end");

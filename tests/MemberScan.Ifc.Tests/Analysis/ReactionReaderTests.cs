@@ -48,20 +48,22 @@ public sealed class ReactionReaderTests
         Assert.Equal([0, 0.75, 3], forces.Stations.Select(s => Math.Round(s.X, 12)));
     }
 
-    [Fact]
-    public void A_place_named_twice_is_a_jump_in_the_order_of_the_file()
+    [Theory]
+    [MemberData(nameof(Schemas.Later), MemberType = typeof(Schemas))]
+    public void A_place_named_twice_is_a_jump_in_the_order_of_the_file(Release release)
     {
-        var forces = Read(model => (Lines.Samples(model, Loads(model, 1, 2, 3, 4), "0.", "1500.", "1500.", "3000."), "DISCRETE"));
+        var forces = Read(model => (Lines.Samples(model, Loads(model, 1, 2, 3, 4), "0.", "1500.", "1500.", "3000."), "DISCRETE"), release: release);
 
         Assert.Equal([1, 2, 3, 4], forces.Stations.Select(s => s.Forces.N));
     }
 
     [Theory]
-    [InlineData("0.", "1500.", "3001.")]
-    [InlineData("-1.", "1500.", "3000.")]
-    public void A_location_beyond_the_line_is_not_used(params string[] locations)
+    [InlineData(Release.Ifc4, "0.", "1500.", "3001.")]
+    [InlineData(Release.Ifc4, "-1.", "1500.", "3000.")]
+    [InlineData(Release.Ifc4X3, "0.", "1500.", "3001.")]
+    public void A_location_beyond_the_line_is_not_used(Release release, params string[] locations)
     {
-        var why = Read(model => (Lines.Samples(model, Loads(model, 1, 2, 3), locations), "DISCRETE")).Unusable!;
+        var why = Read(model => (Lines.Samples(model, Loads(model, 1, 2, 3), locations), "DISCRETE"), release: release).Unusable!;
 
         Assert.Equal(ReasonCode.ForcesIncomplete, why.Code);
         Assert.Contains("on an analytical member of 3 m", why.Message, StringComparison.Ordinal);

@@ -101,6 +101,41 @@ public sealed class OtherBodiesTests
 
     [Theory]
     [MemberData(nameof(Schemas.Later), MemberType = typeof(Schemas))]
+    public void Ends_of_boxes_letters_and_outlines_taper_where_one_is_smaller_in_every_dimension(Release release)
+    {
+        var model = Bars.Model(release);
+        int Triangle(double y, double z) => model.Outlines.Profile(model.Outlines.Polygon([new(-y, -z, 0), new(y, -z, 0), new(0, 2 * z, 0)]));
+        var (box, beam) = (model.Profiles.RectangleHollow(0.1, 0.06, 0.005, 0.005, 0.01), model.Profiles.IShape(0.1, 0.2, 0.006, 0.01));
+        Bars.Add(model, "box", Tapered(model, box, model.Profiles.RectangleHollow(0.06, 0.06, 0.004, 0.004, 0.008)));
+        Bars.Add(model, "I", Tapered(model, beam, model.Profiles.IShape(0.1, 0.12, 0.006, 0.01)));
+        Bars.Add(model, "outline", Tapered(model, Triangle(0.04, 0.03), Triangle(0.03, 0.015)));
+        Bars.Add(model, "rounded", Tapered(model, model.Profiles.RoundedRectangle(0.04, 0.03, 0.005), model.Profiles.RoundedRectangle(0.03, 0.03, 0.004)));
+        Bars.Add(model, "crossing", Tapered(model, box, model.Profiles.RectangleHollow(0.06, 0.08, 0.005, 0.005, 0.01)));
+        Bars.Add(model, "thicker", Tapered(model, beam, model.Profiles.IShape(0.1, 0.12, 0.008, 0.01)));
+        Bars.Add(model, "other shape", Tapered(model, Triangle(0.04, 0.03), model.Outlines.Profile(model.Outlines.Polygon([new(-0.02, 0, 0), new(-0.01, -0.02, 0), new(0.01, -0.02, 0), new(0.02, 0, 0), new(0.01, 0.02, 0), new(-0.01, 0.02, 0)]))));
+        Bars.Add(model, "steep", Tapered(model, model.Profiles.IShape(0.1, 1.2, 0.006, 0.01), model.Profiles.IShape(0.1, 0.12, 0.006, 0.01)));
+
+        var reading = Reading.Of(model);
+
+        foreach (var name in new[] { "box", "I", "outline", "rounded" })
+        {
+            var end = reading.Named(name).EndSection;
+            Assert.NotNull(end);
+            Assert.Equal(Reading.Value(reading.Named(name).Section).Shape.Kind, end.Shape.Kind);
+            Assert.True(end.Shape.ExtentY <= Reading.Value(reading.Named(name).Section).Shape.ExtentY);
+        }
+
+        foreach (var (name, words) in new[] { ("crossing", "smaller in every dimension"), ("thicker", "smaller in every dimension"), ("other shape", "smaller in every dimension"), ("steep", "its slope is 0.27") })
+        {
+            var why = Reading.Why(reading.Named(name).Section);
+            Assert.Equal(ReasonCode.SectionNotCovered, why.Code);
+            Assert.Contains("tapers from", why.Message, StringComparison.Ordinal);
+            Assert.Contains(words, why.Message, StringComparison.Ordinal);
+        }
+    }
+
+    [Theory]
+    [MemberData(nameof(Schemas.Later), MemberType = typeof(Schemas))]
     public void A_fixed_reference_sweep_lays_profile_x_along_the_reference(Release release)
     {
         var model = Bars.Model(release);

@@ -196,47 +196,6 @@ public sealed class MeshRecognitionTests
         Reading.AssertNear(Math.Sqrt(1.09), Reading.Value(member.Length), 1e-9);
     }
 
-    [Theory]
-    [MemberData(nameof(Schemas.Later), MemberType = typeof(Schemas))]
-    public void A_body_of_planes_and_cylinders_is_recognised_by_its_edges(Release release)
-    {
-        var model = Bars.Model(release);
-        Bars.Add(model, "tube", CylinderBody(model, 1.5, 0.02415, 0.02095));
-        Bars.Add(model, "bar", CylinderBody(model, 0.8, 0.008));
-
-        var reading = Reading.Of(model, s_asked);
-
-        ProfileReaderTests.AssertAlike(new Tube(0.02415, 0.0032), Reading.Value(reading.Named("tube").Section).Shape, 1e-6);
-        Reading.AssertNear(1.5, Reading.Value(reading.Named("tube").Length), 1e-9);
-        ProfileReaderTests.AssertAlike(new Round(0.008), Reading.Value(reading.Named("bar").Section).Shape, 1e-6);
-    }
-
-    // IfcAdvancedBrep of two plane ends and a cylinder for each radius, whose seam runs up at angle 0.
-    private static int CylinderBody(ModelWriter model, double length, params double[] radii)
-    {
-        var (low, high) = (model.AxisPlacement(Transform3.Identity), model.AxisPlacement(Transform3.Identity with { Origin = length * Vector3.UnitZ }));
-        var rings = new List<(int Low, int High)>();
-        var faces = new List<int>();
-        int Oriented(int edge, bool forward) => model.Add("IFCORIENTEDEDGE", "*", "*", Bars.Ref(edge), forward ? ".T." : ".F.");
-        int Bound(bool isOuter, params int[] edges) => model.Add(isOuter ? "IFCFACEOUTERBOUND" : "IFCFACEBOUND", Bars.Ref(model.Add("IFCEDGELOOP", Bars.Refs(edges))), ".T.");
-        foreach (var radius in radii)
-        {
-            var text = model.Units.LengthText(radius);
-            int Vertex(double z) => model.Add("IFCVERTEXPOINT", Bars.Ref(model.Point(new Vector3(radius, 0, z))));
-            var (v0, v1) = (Vertex(0), Vertex(length));
-            var ring = (Low: model.Add("IFCEDGECURVE", Bars.Ref(v0), Bars.Ref(v0), Bars.Ref(model.Add("IFCCIRCLE", Bars.Ref(low), text)), ".T."),
-                High: model.Add("IFCEDGECURVE", Bars.Ref(v1), Bars.Ref(v1), Bars.Ref(model.Add("IFCCIRCLE", Bars.Ref(high), text)), ".T."));
-            var seam = model.Add("IFCEDGE", Bars.Ref(v0), Bars.Ref(v1));
-            rings.Add(ring);
-            var bound = Bound(true, Oriented(ring.Low, true), Oriented(seam, true), Oriented(ring.High, false), Oriented(seam, false));
-            faces.Add(model.Add("IFCADVANCEDFACE", Bars.Refs(bound), Bars.Ref(model.Add("IFCCYLINDRICALSURFACE", Bars.Ref(low), text)), ".T."));
-        }
-
-        foreach (var (place, end) in new[] { (low, rings.ConvertAll(r => r.Low)), (high, rings.ConvertAll(r => r.High)) })
-            faces.Add(model.Add("IFCADVANCEDFACE", Bars.Refs([.. end.Select((edge, i) => Bound(i == 0, Oriented(edge, true)))]), Bars.Ref(model.Add("IFCPLANE", Bars.Ref(place))), ".T."));
-        return model.Add("IFCADVANCEDBREP", Bars.Ref(model.Add("IFCCLOSEDSHELL", Bars.Refs([.. faces]))));
-    }
-
     [Fact]
     public void A_mesh_beyond_the_limits_or_with_missing_or_curved_faces_is_refused_with_its_reason()
     {

@@ -22,7 +22,7 @@ public sealed class CandidateTests
         { "beams-six-profiles-ifc4.ifc", "IfcBeam I profile 2, IfcBeam L profile 2, IfcBeam T profile 2, IfcBeam U profile 2, IfcBeam box 2, IfcBeam tube 2", "" },
         {
             "carwash-steel-ifc2x3.ifc",
-            "IfcBeam I profile 6, IfcBeam L profile 68, IfcBeam box 322, IfcBeam mesh-not-allowed 3, IfcBeam outline 62, IfcBeam rectangle 1134, IfcBeam round 48, IfcBeam section-not-parametric 106, IfcBeam tube 200, "
+            "IfcBeam I profile 6, IfcBeam L profile 68, IfcBeam box 322, IfcBeam mesh-not-allowed 10, IfcBeam outline 62, IfcBeam rectangle 1134, IfcBeam round 48, IfcBeam section-not-parametric 99, IfcBeam tube 200, "
             + "IfcColumn L profile 2, IfcColumn section-not-parametric 18, IfcColumn tube 6, IfcDiscreteAccessory box 2, IfcDiscreteAccessory rectangle 11, IfcMember rectangle 228",
             "IfcDiscreteAccessory 396"
         },
@@ -34,7 +34,7 @@ public sealed class CandidateTests
         { "members-mirrored-profiles-inch-ifc4.ifc", "IfcMember I profile 2, IfcMember T profile 1, IfcMember box 1, IfcMember outline 1, IfcMember rectangle 1", "" },
         { "newlines-in-strings-inch-ifc2x3.ifc", "IfcMember outline 1", "" },
         { "rounded-rectangle-csg-ifc4.ifc", "", "" },
-        { "stair-railings-ifc2x3.ifczip", "IfcRailing section-not-parametric 13", "IfcBuildingElementProxy 1" },
+        { "stair-railings-ifc2x3.ifczip", "IfcRailing mesh-not-allowed 13", "IfcBuildingElementProxy 1" },
         { "steel-frame-drawn-sections-ifc2x3.ifc", "IfcBeam U profile 1, IfcBeam box 17, IfcBeam outline 25, IfcColumn outline 37, IfcColumn rectangle 5", "IfcBuildingElementProxy 4" },
         { "structural-beams-linked-ifc4.ifc", "IfcBeam I profile 2, IfcBeam L profile 2, IfcBeam T profile 2, IfcBeam U profile 2, IfcBeam box 2, IfcBeam tube 2", "IfcStructuralCurveMember 12" },
         { "structural-portal-frame-results-ifc4.ifc", "IfcStructuralCurveMember I profile 3", "" },
@@ -51,12 +51,12 @@ public sealed class CandidateTests
     public static TheoryData<string, int, int, int, int> Shares => new()
     {
         { "balcony-railings-ifc2x3.ifc", 37, 37, 37, 37 },
-        { "carwash-steel-ifc2x3.ifc", 2089, 2216, 2092, 2216 },
+        { "carwash-steel-ifc2x3.ifc", 2089, 2216, 2099, 2216 },
         { "columns-on-grid-ifc4x3.ifc", 35, 35, 35, 35 },
         { "concrete-frame-spanish-ifc2x3.ifc", 34, 34, 34, 34 },
         { "house-german-ifc4.ifc", 1, 48, 70, 70 },
         { "members-mirrored-profiles-inch-ifc4.ifc", 6, 6, 6, 6 },
-        { "stair-railings-ifc2x3.ifczip", 0, 13, 0, 13 },
+        { "stair-railings-ifc2x3.ifczip", 0, 13, 187, 187 },
         { "steel-frame-drawn-sections-ifc2x3.ifc", 85, 85, 85, 85 },
     };
 
@@ -193,13 +193,19 @@ public sealed class CandidateTests
         var compared = reading.Catalog.Members.Where(m => m.ItemNumber == 0 && m.Section.TryGet(out _, out _) && lengths.ContainsKey(m.Element.StepId))
             .Select(m => (Read: Reading.Value(m.Length), Written: 1e-3 * lengths[m.Element.StepId])).ToList();
 
-        Assert.Equal(2079, compared.Count);
+        Assert.Equal(2086, compared.Count);
         Assert.Equal(3, compared.Count(c => c.Written == 0));
         var off = compared.Where(c => c.Written > 0 && Math.Abs(c.Read - c.Written) > 1e-4 * c.Written).ToList();
 
         // Four bars that end in a cut: the quantity is that of the cut body, up to 9 mm of 8.3 m shorter than the sweep.
-        Assert.Equal(4, off.Count);
-        Assert.All(off, c => Assert.InRange(c.Read - c.Written, 0.007, 0.0095));
+        var cut = off.FindAll(c => c.Read > c.Written);
+        Assert.Equal(4, cut.Count);
+        Assert.All(cut, c => Assert.InRange(c.Read - c.Written, 0.007, 0.0095));
+
+        // Seven pipes with a bend at one end: the quantity is that of the whole pipe, beyond the straight run by bend and short leg, some three diameters (160 and 110 mm) at most.
+        var bent = off.FindAll(c => c.Read < c.Written);
+        Assert.Equal(7, bent.Count);
+        Assert.All(bent, c => Assert.InRange(c.Written - c.Read, 0.15, 0.5));
     }
 
     [Theory]

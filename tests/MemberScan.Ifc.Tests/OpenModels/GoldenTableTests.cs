@@ -18,7 +18,10 @@ namespace MemberScan.Ifc.Tests.OpenModels;
 /// 100x6.0SHS, HSS6x6x.375, 25x200 in cm), and the first keys of these rows were followed from the element's line to profile, depth and
 /// material: KOKER L120/12 and POORTDORPEL of the steel job, Strip 70x10, BMR, P10, L6x4x1/2. The rafters of the house: extents of the file's own bounding box
 /// 5.5 × 3.360 m give a slope of 30°, 5.5/cos 30° = 6.351 m, and 6.351·sin 30° + 0.16/cos 30° = 3.360 m. Lengths of the steel job are compared with its
-/// quantity sets, sizes with names, in <see cref="CandidateTests"/>.
+/// quantity sets, sizes with names, in <see cref="CandidateTests"/>. The railings of the stairs were counted on their four different meshes: rails of twelve sides
+/// (chord 10.9 mm, 42 mm across corners) and bars of eight (chord 8.4 mm, 22 mm), 6 + 16, 6 + 16, 4 + 1 and 5 + 10, in 4, 3, 5 and 1 railings; the
+/// mesh of 4 + 1 has rails of 883 mm between mitres at middle lines 883 mm apart, so its bar too is 883 mm long. One rail of seven railings is 126 mm, less than three
+/// times its section. The pipes spell their sizes: BUIS160/1, BUIS110/1.
 /// </remarks>
 public sealed partial class GoldenTableTests
 {
@@ -67,7 +70,7 @@ public sealed partial class GoldenTableTests
         return least == most ? string.Create(CultureInfo.InvariantCulture, $"{least} m") : string.Create(CultureInfo.InvariantCulture, $"{least} to {most} m");
     }
 
-    private static string[] Reviewed(string file)
+    internal static string[] Reviewed(string file)
     {
         using var stream = typeof(GoldenTableTests).Assembly.GetManifestResourceStream($"Golden/{file}.txt");
         if (stream is null) return [];
@@ -76,7 +79,7 @@ public sealed partial class GoldenTableTests
         return reader.ReadToEnd().Split('\n', StringSplitOptions.RemoveEmptyEntries);
     }
 
-    private static void Keep(string file, IEnumerable<string> lines)
+    internal static void Keep(string file, IEnumerable<string> lines)
     {
         var folder = Directory.CreateDirectory(Path.Combine(AppContext.BaseDirectory, "golden-found"));
         File.WriteAllText(Path.Combine(folder.FullName, file + ".txt"), string.Join('\n', lines) + "\n");

@@ -31,6 +31,50 @@ public sealed class FrameFileTests
           "stations": 7 }
         """;
 
+    /// <summary>Bare constants change linearly from end to end; of rounds the diameter does: π·15⁴/4 = 39,761 mm⁴ half way from 20 mm to 40 mm.</summary>
+    [Fact]
+    public void A_section_at_each_end_is_a_taper()
+    {
+        var text = Text.Replace("\"rod\": \"round 20 mm\"", "\"rod\": \"round 20 mm\", \"thick\": \"round 40 mm\", \"more\": { \"A\": 5000, \"Iy\": 3e7, \"Iz\": 8e6, \"J\": 2e7, \"Asy\": 10, \"Asz\": 20 }", StringComparison.Ordinal)
+            .Replace("\"section\": \"rod\"", "\"section\": { \"start\": \"rod\", \"end\": \"thick\" }", StringComparison.Ordinal)
+            .Replace("\"section\": \"bare\"", "\"section\": { \"start\": \"bare\", \"end\": \"more\" }", StringComparison.Ordinal);
+
+        var members = Good(text).Frame.Members;
+
+        Assert.Equal([0.0, 1.0], members[0].Taper.Select(t => t.Share));
+        Assert.Equal(3e-5, members[0].Taper[1].Section.Iy, 1e-15);
+        Assert.Equal(65, members[1].Taper.Length);
+        Assert.Equal(Math.PI * Math.Pow(0.015, 4) / 4, members[1].Taper[32].Section.Iy, 1e-15);
+        Assert.True(members[1].Taper[32].Section.ShearAreaZ > 0);
+    }
+
+    [Theory]
+    [InlineData("\"section\": { \"start\": \"rod\", \"end\": \"bare\" }", "members.m2.section: a member tapers between two rounds")]
+    [InlineData("\"section\": { \"start\": \"rod\", \"end\": \"rad\" }", "members.m2.section.end: there is no section 'rad'; did you mean 'rod'?")]
+    [InlineData("\"section\": { \"start\": \"rod\" }", "members.m2.section")]
+    public void A_taper_that_is_none_is_told(string section, string message)
+    {
+        var diagnostics = new DiagnosticList();
+
+        Assert.Null(FrameFile.Read(Encoding.UTF8.GetBytes(Text.Replace("\"section\": \"rod\"", section, StringComparison.Ordinal)), "f.json", diagnostics));
+
+        Assert.Contains(diagnostics.Items, d => d.Message.StartsWith(message, StringComparison.Ordinal));
+    }
+
+    [Fact]
+    public void Movements_of_supports_belong_to_a_situation()
+    {
+        var text = Text.Replace("\"S2\": {}", "\"S2\": { \"supportMovements\": { \"A\": { \"uz\": -8, \"ry\": 0.5 } } }", StringComparison.Ordinal);
+
+        var frame = Good(text).Frame;
+
+        Assert.Equal([new SupportMovement(0, Direction.Uz, -0.008), new SupportMovement(0, Direction.Ry, 0.5)], frame.Situations[1].Movements);
+        Assert.Empty(frame.Situations[0].Movements);
+        var diagnostics = new DiagnosticList();
+        Assert.Null(FrameFile.Read(Encoding.UTF8.GetBytes(text.Replace("\"A\": { \"uz\": -8, \"ry\": 0.5 } }", "\"Z\": { \"uz\": -8 } }", StringComparison.Ordinal)), "f.json", diagnostics));
+        Assert.Contains("there is no node 'Z'", Assert.Single(diagnostics.Items).Message, StringComparison.Ordinal);
+    }
+
     [Fact]
     public void Everything_is_turned_into_SI()
     {

@@ -12,7 +12,7 @@ public sealed record SampleModel(
     string Name, ImmutableArray<byte> Model, ImmutableArray<byte> ForcesTable, ImmutableArray<byte> Description, ImmutableArray<SampleMember> Members)
 {
     /// <summary>All samples, written anew.</summary>
-    public static ImmutableArray<SampleModel> All() => [GangwayRails.Write(), DeckHangers.Write(), MastStays.Write()];
+    public static ImmutableArray<SampleModel> All() => [GangwayRails.Write(), DeckHangers.Write(), DeckTrapezes.Write(), MastStays.Write()];
 
     /// <summary>The files of the sample: name and bytes.</summary>
     public IEnumerable<(string FileName, ImmutableArray<byte> Bytes)> Files()

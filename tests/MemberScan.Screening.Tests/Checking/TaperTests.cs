@@ -51,11 +51,42 @@ public sealed class TaperTests
         Assert.Equal(ReasonCode.SectionNotCovered, Screen(0.420, 0.030, new(1e3, 0, 0, 0, 0, 0), new(1e3, 0, 0, 0, 0, 0)).Reason!.Code);
     }
 
-    private static MemberResult Screen(double foot, double head, SectionForces start, SectionForces end)
+    [Fact]
+    public void A_tapering_box_is_held_against_either_end_along_its_whole_length()
+    {
+        // Box 100 × 60 × 5 mm (radii 10 and 5) to 60 × 40 × 4 mm (radii 8 and 4); area of the smaller: 60·40 − (4 − π)·8² − (52·32 − (4 − π)·4²) = 694.797 mm².
+        // The moment is largest at the thicker foot; with the smaller section everywhere it governs there.
+        var area = (60 * 40 - (4 - Math.PI) * 64 - (52 * 32 - (4 - Math.PI) * 16)) * 1e-6;
+
+        var pulled = Screen(w => (w.Profiles.RectangleHollow(0.1, 0.06, 0.005, 0.005, 0.01), w.Profiles.RectangleHollow(0.06, 0.04, 0.004, 0.004, 0.008)), new(60e3, 0, 0, 0, 0, 0), new(60e3, 0, 0, 0, 0, 0));
+        var bent = Screen(w => (w.Profiles.RectangleHollow(0.1, 0.06, 0.005, 0.005, 0.01), w.Profiles.RectangleHollow(0.06, 0.04, 0.004, 0.004, 0.008)), new(0, 0, 300, 0, -300, 0), new(0, 0, 300, 0, 0, 0));
+
+        // S235 up to 16 mm: 235 MPa.
+        Assert.Equal(60e3 / area / (235e6 / 1.67), pulled.Governing!.Utilization, 1e-4);
+        Assert.Equal(Verdict.WithinLimit, pulled.Verdict);
+        Assert.Equal("box 100x60x5 mm ro 10 ri 5 to box 60x40x4 mm ro 8 ri 4", pulled.Section);
+        Assert.Contains(pulled.Notes, n => n.Contains("section of either end", StringComparison.Ordinal));
+        Assert.Equal(0, bent.Governing!.Station, 1e-9);
+    }
+
+    [Fact]
+    public void A_tapering_I_of_constant_plates_is_held_against_its_shallower_end()
+    {
+        // Flanges 100 × 10 mm, web 6 mm, depth 200 to 120 mm; N = 100 kN over the shallower end's 2·100·10 + 100·6 = 2600 mm².
+        var member = Screen(w => (w.Profiles.IShape(0.1, 0.2, 0.006, 0.01), w.Profiles.IShape(0.1, 0.12, 0.006, 0.01)), new(100e3, 0, 0, 0, 0, 0), new(100e3, 0, 0, 0, 0, 0));
+
+        Assert.Equal(100e3 / 2600e-6 / (235e6 / 1.67), member.Governing!.Utilization, 1e-4);
+    }
+
+    private static MemberResult Screen(double foot, double head, SectionForces start, SectionForces end) =>
+        Screen(w => (w.Profiles.Circle(foot / 2), w.Profiles.Circle(head / 2)), start, end);
+
+    private static MemberResult Screen(Func<ModelWriter, (int Foot, int Head)> profiles, SectionForces start, SectionForces end)
     {
         var writer = Landing.Writer();
-        var solid = writer.Add("IFCEXTRUDEDAREASOLIDTAPERED", Spelling.Reference(writer.Profiles.Circle(foot / 2)), Spelling.Reference(writer.AxisPlacement(Transform3.Identity)),
-            Spelling.Reference(writer.Direction(Vector3.UnitZ)), writer.Units.LengthText(1), Spelling.Reference(writer.Profiles.Circle(head / 2)));
+        var (foot, head) = profiles(writer);
+        var solid = writer.Add("IFCEXTRUDEDAREASOLIDTAPERED", Spelling.Reference(foot), Spelling.Reference(writer.AxisPlacement(Transform3.Identity)),
+            Spelling.Reference(writer.Direction(Vector3.UnitZ)), writer.Units.LengthText(1), Spelling.Reference(head));
         Landing.Add(writer, writer.Bodies.Shape("AdvancedSweptSolid", solid));
         return Landing.ScreenOne(writer.Build(), Landing.Table(("S1", "service", 0, start), ("S1", "service", 1, end)));
     }

@@ -93,6 +93,71 @@ public sealed class OwnAnalysisTests
         Assert.Contains("'Soft'", record.Members.Single(m => m.Name == "Strut").Reason!.Message, StringComparison.Ordinal);
     }
 
+    /// <summary>
+    /// The post's tube by hand: π(24.15² − 20.95²) = 453.39 mm², × 7850 kg/m³ × 9.80665 m/s² = 34.903 N/m; on a cantilever of 2 m w·L = 69.807 N and
+    /// w·L²/2 = 69.807 N·m.
+    /// </summary>
+    [Theory]
+    [InlineData(SchemaVersion.Ifc4)]
+    [InlineData(SchemaVersion.Ifc4X3)]
+    public void Self_weight_of_a_cantilever(SchemaVersion schema)
+    {
+        var record = Landing.Screen(Built(schema, null, isHeldAtBothEnds: false, (frame, _) => frame.Combination("Service", "SLS", (frame.Case("Dead", new(0, 0, -1), onTop: false), 1))));
+
+        var root = Assert.Single(record.Members).Situations.Single(s => s.Situation == "Service").Stations[0].Forces;
+        Assert.Equal(-69.807, root.Vz, 1e-3);
+        Assert.Equal(69.807, root.My, 1e-3);
+        Assert.Contains("7850 kg/m³", string.Join(' ', record.Members[0].Notes), StringComparison.Ordinal);
+    }
+
+    /// <summary>
+    /// Held at both ends, by hand: N = −E·A·α·ΔT = −210e9 × 453.39e-6 × 1.2e-5 × 30 = −34,277 N; M = E·I·α·ΔT/h = 210e9 × 11.586e-8 × 1.2e-5 × 20/0.0483 = 120.89 N·m.
+    /// Signs as the documentation of IfcStructuralLoadTemperature has them: a restrained ΔT in z makes a negative My, one in y a positive Mz.
+    /// </summary>
+    [Theory]
+    [InlineData(30, 0, 0, -34_277, 0, 0)]
+    [InlineData(0, 20, 0, 0, 0, 120.89)]
+    [InlineData(0, 0, 20, 0, -120.89, 0)]
+    public void A_restrained_change_of_temperature(double uniform, double acrossY, double acrossZ, double axial, double my, double mz)
+    {
+        var record = Landing.Screen(Built(SchemaVersion.Ifc4, 1.2e-5, isHeldAtBothEnds: true, (frame, bar) =>
+        {
+            var summer = frame.Case("Summer", onTop: false);
+            frame.Temperature(bar, summer, uniform, acrossY, acrossZ);
+            frame.Combination("Service", "SLS", (summer, 1));
+        }));
+
+        Assert.All(Assert.Single(record.Members).Situations.Single(s => s.Situation == "Service").Stations, station =>
+        {
+            Assert.Equal(axial, station.Forces.N, 1e-4 * 34_277);
+            Assert.Equal(my, station.Forces.My, 1e-4 * 120.89);
+            Assert.Equal(mz, station.Forces.Mz, 1e-4 * 120.89);
+        });
+    }
+
+    /// <summary>The tube of 2 m, fixed at its start or at both ends; its thermal expansion [1/K] where one is given.</summary>
+    private static byte[] Built(SchemaVersion schema, double? expansion, bool isHeldAtBothEnds, Action<FrameWriter, int> load)
+    {
+        var writer = Landing.Writer(schema);
+        var frame = new FrameWriter(writer, "Landing");
+        var condition = frame.Condition("fixed", "fixed", "fixed", "fixed", "fixed", "fixed");
+        var (a, b) = (frame.Node("A", Vector3.Zero, condition), frame.Node("B", s_end, isHeldAtBothEnds ? condition : null));
+        var bar = frame.Member("Strut", Vector3.Zero, s_end, Vector3.UnitZ);
+        var steel = writer.Materials.Material("S235JR", 235e6, null, 210e9, 0.3);
+        if (expansion is { } alpha)
+        {
+            var property = writer.Add("IFCPROPERTYSINGLEVALUE", "'ThermalExpansionCoefficient'", "$", Spelling.Typed("IFCTHERMALEXPANSIONCOEFFICIENTMEASURE", Spelling.Real(alpha)), "$");
+            writer.Add("IFCMATERIALPROPERTIES", "'Pset_MaterialThermal'", "$", Spelling.References([property]), Spelling.Reference(steel));
+        }
+
+        frame.Section(steel, writer.Profiles.Of(Landing.PostTube), bar);
+        frame.Join(bar, a);
+        frame.Join(bar, b);
+        load(frame, bar);
+        frame.Finish();
+        return writer.Build();
+    }
+
     [Fact]
     public void A_load_that_is_not_covered_leaves_its_situation_unchecked()
     {

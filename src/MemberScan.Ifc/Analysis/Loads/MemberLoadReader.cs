@@ -42,6 +42,7 @@ internal sealed class MemberLoadReader(
         {
             "IFCSTRUCTURALPOINTACTION" => [Point(load, action, applied, member)],
             "IFCSTRUCTURALLINEARACTION" => [Whole(load, action, applied, member, length.Value, LoadShape.Linear)],
+            "IFCSTRUCTURALLINEARACTIONVARYING" => Varying(load, action, applied, member, length.Value),
             "IFCSTRUCTURALCURVEACTION" => Curve(load, action, applied, member, length.Value),
             _ => [Unusable(load, ReasonCode.ForcesIncomplete, "is of a class that is not read")],
         };
@@ -52,7 +53,7 @@ internal sealed class MemberLoadReader(
         var isLocal = Instances.Literal(action[8]) == "LOCAL_COORDS";
         var projected = action.Keyword switch
         {
-            "IFCSTRUCTURALLINEARACTION" or "IFCSTRUCTURALCURVEACTION" => Instances.Literal(action[schema == SchemaVersion.Ifc2x3 ? 11 : 10]) == "PROJECTED_LENGTH",
+            "IFCSTRUCTURALLINEARACTION" or "IFCSTRUCTURALLINEARACTIONVARYING" or "IFCSTRUCTURALCURVEACTION" => Instances.Literal(action[schema == SchemaVersion.Ifc2x3 ? 11 : 10]) == "PROJECTED_LENGTH",
             _ => false,
         };
         return new MemberLoad
@@ -112,6 +113,18 @@ internal sealed class MemberLoadReader(
             "LINEAR" or "POLYGONAL" => Pieces(load, samples, locations, member),
             _ => [Unusable(load, ReasonCode.ForcesIncomplete, $"is of type {type}, which says nothing of the load between its samples")],
         };
+    }
+
+    /// <summary>IFC2X3: the applied load and the subsequent ones, each at its point of the shape aspect, linear in between.</summary>
+    private IEnumerable<MemberLoad> Varying(MemberLoad load, Part21Record action, Part21Record applied, AnalyticalMember member, double length)
+    {
+        if (action[13].ItemCount >= MaxSamples) return [Unusable(load, ReasonCode.ForcesIncomplete, $"has more than {MaxSamples} samples")];
+        if (instances.FollowEach(action[13]) is not { Count: > 0 } subsequent) return [Unusable(load, ReasonCode.DamagedRecord, "has lost a sample")];
+        if (places.OfAspect(action, action[12], member) is not { } locations) return [Unusable(load, ReasonCode.ForcesIncomplete, "has a location that is no point on a line")];
+        if (locations.Length != subsequent.Count + 1 || !locations.All(x => Within(x, length)))
+            return [Unusable(load, ReasonCode.ForcesIncomplete, $"has {subsequent.Count + 1} samples at {locations.Length} locations, or a location beyond its member")];
+
+        return Pieces(load, [applied, .. subsequent], locations, member);
     }
 
     private IEnumerable<MemberLoad> Samples(MemberLoad load, List<Part21Record> samples, double[] locations, AnalyticalMember member)

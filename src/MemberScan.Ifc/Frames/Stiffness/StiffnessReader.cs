@@ -2,6 +2,7 @@ using System.Collections.Immutable;
 using System.Globalization;
 using MemberScan.Foundation.Geometry;
 using MemberScan.Ifc.Analysis;
+using MemberScan.Ifc.Analysis.Loads;
 using MemberScan.Mechanics.Properties;
 using MemberScan.Mechanics.Sections;
 using MemberScan.Model;
@@ -13,16 +14,11 @@ using MemberScan.Part21;
 namespace MemberScan.Ifc.Frames.Stiffness;
 
 /// <summary>Section and material of analytical members: their own, else those of the physical element that they stand for.</summary>
-internal sealed class StiffnessReader(Instances instances, Relations relations, AnalyticalSource analytical, ElasticFactsReader elastic, ImmutableArray<Member> candidates)
+internal sealed class StiffnessReader(Instances instances, Relations relations, AnalyticalSource analytical, StatedConstantsReader stated, ElasticFactsReader elastic,
+    ImmutableArray<Member> candidates)
 {
     /// <summary>Largest sine of the angle between an analytical member and the body whose section it takes.</summary>
     private const double Parallel = 0.02;
-
-    /// <summary>Acceleration of gravity by which a mass becomes a weight [m/s²]; the models name none.</summary>
-    public const double Gravity = 9.80665;
-
-    /// <summary>Density of steel where a model gives none [kg/m³].</summary>
-    public const double SteelDensity = 7850;
 
     /// <summary>Share of the second moments below which a product of inertia or an offset of the shear centre is nothing.</summary>
     private const double Nothing = 1e-9;
@@ -30,7 +26,17 @@ internal sealed class StiffnessReader(Instances instances, Relations relations, 
     private readonly ILookup<ulong, Member> _candidates = candidates.ToLookup(m => m.Element.StepId);
     private readonly Dictionary<CrossSection, SectionProperties> _properties = [];
 
-    private sealed record Source(Finding<SectionFinding> Section, Material Material, Finding<MemberAxes> Axes, ulong Element, bool IsBody);
+    private sealed record Source(Finding<SectionFinding> Section, Material Material, Finding<MemberAxes> Axes, ulong Element, bool IsBody)
+    {
+        /// <summary>How the section changes, and the shares of that at the start and at the end of the analytical member; null for one section.</summary>
+        public (Taper Taper, double From, double To)? Taper { get; init; }
+
+        /// <summary>Why a change of the section cannot be followed; null when it can.</summary>
+        public Reason? NoTaper { get; init; }
+
+        /// <summary>How far the centroid lies from the line [m].</summary>
+        public (double Y, double Z) Beside { get; init; }
+    }
 
     /// <summary>Reads a member; the reason names it.</summary>
     /// <param name="member">The record of the analytical member.</param>
@@ -40,39 +46,107 @@ internal sealed class StiffnessReader(Instances instances, Relations relations, 
     public Finding<MemberStiffness> Read(Part21Record member, AnalyticalMember line, Vector3? axis, string name)
     {
         var source = Find(member, line);
-        if (!source.Section.TryGet(out var section, out var noSection)) return Missing(noSection.Code, $"{name} has no section that can be used: {noSection.Message}");
+        var constants = stated.Of(member.Id);
+        if (!source.Section.TryGet(out var section, out var noSection)) return OfConstants(source, noSection, constants, line, axis, name);
+        if (source.NoTaper is { } noTaper) return Missing(noTaper.Code, $"{name}: {noTaper.Message}");
         if (!source.Material.Modulus.TryGet(out var modulus, out var noModulus)) return Missing(ReasonCode.NoForces, $"{name} has no modulus of elasticity: {noModulus.Message}");
-        if (!Direction(source, line, axis, section.Value.Shape, out var z, out var reversed, out var noAxes)) return Missing(noAxes!.Code, $"{name}: {noAxes.Message}");
-        if (Constants(section.Value.Shape, reversed) is not { } constants) return Missing(ReasonCode.SectionNotCovered, $"{name}: the section {section.Value.Shape.Designation} has no torsion constant");
+
+        var shape = source.Taper is { } taper ? taper.Taper.At(taper.From) : section.Value.Shape;
+        if (!Direction(source, line, axis, shape, out var z, out var reversed, out var noAxes)) return Missing(noAxes!.Code, $"{name}: {noAxes.Message}");
+        if (Constants(shape, reversed) is not { } own) return Missing(ReasonCode.SectionNotCovered, $"{name}: the section {shape.Designation} has no torsion constant");
 
         var notes = ImmutableArray.CreateBuilder<string>();
-        if (section.Value.Shapes.Length > 1) notes.Add($"{name}: stiffness of the first of {section.Value.Shapes.Length} readings of the section, {section.Value.Shape.Designation}");
+        if (section.Value.Shapes.Length > 1) notes.Add($"{name}: stiffness of the first of {section.Value.Shapes.Length} readings of the section, {shape.Designation}");
+        if (source.Beside != default)
+            notes.Add(string.Create(CultureInfo.InvariantCulture, $"the centroid of {name} lies at y {source.Beside.Y * 1e3:0.##} mm, z {source.Beside.Z * 1e3:0.##} mm from its line, by the profile; joints and loads are on the line"));
+        var course = source.Taper is { } change ? new SectionCourse(change.Taper, change.From, change.To, place => Constants(place, reversed)) : null;
+        var shears = course is null && constants is { ShearAreaY: not null, ShearAreaZ: not null };
+        if (course is not null) notes.Add($"{name} tapers and is taken in {SectionCourse.Steps} steps of linear stiffness");
+        if (shears) own = Shearing(own, constants!, name, notes);
+        var (material, facts) = MaterialOf(source, modulus.Value, name, notes);
+        return new Finding<MemberStiffness>.Found(
+            new MemberStiffness(own, material, z, reversed, facts.Density, facts.Expansion, shape.ExtentY, shape.ExtentZ, notes.ToImmutable()) { Course = course, ShearFlexible = shears, Beside = source.Beside },
+            $"{section.Source}; E by {modulus.Source}");
+    }
+
+    /// <summary>A member whose section is known by stated constants alone: it has a stiffness, and no stresses.</summary>
+    private Finding<MemberStiffness> OfConstants(Source source, Reason noSection, StatedConstants? constants, AnalyticalMember line, Vector3? axis, string name)
+    {
+        var why = constants is null ? "" : constants.WhyNoSection;
+        if (why is not null) return Missing(noSection.Code, $"{name} has no section that can be used: {noSection.Message}{(why.Length > 0 ? $"; {why}" : "")}");
+        if (!source.Material.Modulus.TryGet(out var modulus, out var noModulus)) return Missing(ReasonCode.NoForces, $"{name} has no modulus of elasticity: {noModulus.Message}");
+
+        var z = axis;
+        if (line.Line is Finding<(Vector3 Start, Vector3 End)>.Found)
+        {
+            if (!line.Axes.TryGet(out var axes, out var noAxes)) return Missing(noAxes.Code, $"{name}: {noAxes.Message}");
+
+            z = axes.Value.Z;
+        }
+
+        if (z is null) return Missing(ReasonCode.AxesUnknown, $"{name} has no Axis, so its y and z are not known");
+
+        var notes = ImmutableArray.CreateBuilder<string>();
+        notes.Add($"{name}: stiffness by {constants!.Source}, since its section is not read ({noSection.Message}); the centroid is taken on its line");
+        var own = new FrameSection { Name = constants.Source, Area = constants.Area!.Value, Iy = constants.Iy!.Value, Iz = constants.Iz!.Value, J = constants.J!.Value };
+        var shears = constants is { ShearAreaY: not null, ShearAreaZ: not null };
+        if (shears) own = Shearing(own, constants, name, notes);
+        var (material, facts) = MaterialOf(source, modulus.Value, name, notes);
+        return new Finding<MemberStiffness>.Found(
+            new MemberStiffness(own, material, z, ReversedY: false, facts.Density, facts.Expansion, 0, 0, notes.ToImmutable()) { ShearFlexible = shears },
+            $"{constants.Source}; E by {modulus.Source}");
+    }
+
+    private static FrameSection Shearing(FrameSection section, StatedConstants constants, string name, ImmutableArray<string>.Builder notes)
+    {
+        var (y, z) = (constants.ShearAreaY!.Value, constants.ShearAreaZ!.Value);
+        notes.Add(string.Create(CultureInfo.InvariantCulture, $"{name} is flexible in shear: {constants.Source} state shear areas, {y * 1e6:0.#} mm² for Vy and {z * 1e6:0.#} mm² for Vz"));
+        return section with { ShearAreaY = y, ShearAreaZ = z };
+    }
+
+    /// <summary>The material with G, weight and expansion; what is taken for want of a value is noted.</summary>
+    private (FrameMaterial Material, ElasticFacts Facts) MaterialOf(Source source, double modulus, string name, ImmutableArray<string>.Builder notes)
+    {
         var facts = MaterialsOf(source.Element).Select(elastic.Of).FirstOrDefault(f => f != ElasticFacts.None) ?? ElasticFacts.None;
         var poisson = (Finding<double>.Found)source.Material.Poisson;
         if (facts.ShearModulus is null && poisson.Source == "default") notes.Add(string.Create(CultureInfo.InvariantCulture, $"{name}: G by the default Poisson's ratio {poisson.Value:0.0##}"));
-        var density = facts.Density;
-        if (density is null && source.Material.IsSteel)
+        if (facts.Density is null && source.Material.IsSteel)
         {
-            density = SteelDensity;
-            notes.Add(string.Create(CultureInfo.InvariantCulture, $"{name}: density {SteelDensity} kg/m³ (EN 1991-1-1, Table A.4, from memory); the model gives none"));
+            facts = facts with { Density = MemberWeight.SteelDensity };
+            notes.Add(string.Create(CultureInfo.InvariantCulture, $"{name}: density {MemberWeight.SteelDensity} kg/m³ (EN 1991-1-1, Table A.4, from memory); the model gives none"));
         }
 
-        var shear = facts.ShearModulus ?? modulus.Value / (2 * (1 + poisson.Value));
-        var material = new FrameMaterial(source.Material.Name, modulus.Value, shear, (density ?? 0) * Gravity, facts.Expansion ?? 0, (source.Material.Yield as Finding<double>.Found)?.Value);
-        return new Finding<MemberStiffness>.Found(
-            new MemberStiffness(constants, material, z, reversed, density, facts.Expansion, section.Value.Shape.ExtentY, section.Value.Shape.ExtentZ, notes.ToImmutable()),
-            $"{section.Source}; E by {modulus.Source}");
+        var shear = facts.ShearModulus ?? modulus / (2 * (1 + poisson.Value));
+        var material = new FrameMaterial(
+            source.Material.Name, modulus, shear, (facts.Density ?? 0) * MemberWeight.Gravity, facts.Expansion ?? 0, (source.Material.Yield as Finding<double>.Found)?.Value);
+        return (material, facts);
     }
 
     /// <summary>What gives section and material: the analytical member itself where it has a section, else the body that it runs along.</summary>
     private Source Find(Part21Record member, AnalyticalMember line)
     {
-        var (section, material) = analytical.Read(member);
-        if (section is Finding<SectionFinding>.Found) return new Source(section, material, line.Axes, member.Id, IsBody: false);
+        var own = analytical.Read(member);
+        var plain = new Source(own.Section, own.Material, line.Axes, member.Id, IsBody: false) { Beside = own.Beside, Taper = own.Taper is { } taper ? (taper, 0, 1) : null };
+        if (own.Section is Finding<SectionFinding>.Found) return plain;
 
         var bodies = relations.PhysicalOf(member.Id).SelectMany(id => _candidates[id]).ToList();
         var body = bodies.Count == 1 ? bodies[0] : bodies.Find(b => RunsAlong(b, line));
-        return body is null ? new Source(section, material, line.Axes, member.Id, IsBody: false) : new Source(body.Section, body.Material, body.Axes, body.Element.StepId, IsBody: true);
+        return body is null ? plain : WithTaper(new Source(body.Section, body.Material, body.Axes, body.Element.StepId, IsBody: true), body, line);
+    }
+
+    /// <summary>The sections of a tapering body, from where the analytical member begins along it to where it ends.</summary>
+    private static Source WithTaper(Source source, Member body, AnalyticalMember line)
+    {
+        if (body.EndSection is not { } last || body.Section is not Finding<SectionFinding>.Found first) return source;
+
+        var isPlaced = body.Axes is Finding<MemberAxes>.Found && body.Length is Finding<double>.Found && line.Line is Finding<(Vector3 Start, Vector3 End)>.Found;
+        if (!isPlaced || Taper.Of(first.Value.Shape, last.Shape) is not { } taper)
+            return source with { NoTaper = new Reason(ReasonCode.SectionNotCovered, "the body that it stands for tapers in a way that is not followed") };
+
+        var (axes, length) = (((Finding<MemberAxes>.Found)body.Axes).Value, ((Finding<double>.Found)body.Length).Value);
+        var (start, end) = ((Finding<(Vector3 Start, Vector3 End)>.Found)line.Line).Value;
+        double Share(Vector3 point) => Math.Clamp((point - axes.Origin).Dot(axes.X) / length, 0, 1);
+        return source with { Taper = (taper, Share(start), Share(end)) };
     }
 
     private static bool RunsAlong(Member body, AnalyticalMember line)

@@ -2,6 +2,7 @@ using System.Collections.Immutable;
 using System.Text;
 using MemberScan.Foundation.Diagnostics;
 using MemberScan.Part21;
+using MemberScan.Part21.Containers;
 
 namespace MemberScan.Ifc.WriteBack.Earlier;
 
@@ -26,6 +27,13 @@ public sealed record EarlierResults(EarlierKind Kind, ReadOnlyMemory<byte> Base,
         var own = OwnInstances.Recognised(Part21File.Read(text, name, new DiagnosticList()));
         var kind = own.Records.Any() ? EarlierKind.Rewritten : EarlierKind.None;
         return Without(text, kind, [], own);
+    }
+
+    /// <summary>Whether a text may hold any: none of the words that they carry stands in a text that does not.</summary>
+    public static bool MayBeIn(ModelText text)
+    {
+        ArgumentNullException.ThrowIfNull(text);
+        return text.Contains(Encoding.ASCII.GetBytes(ResultBlock.OpeningWords), Encoding.ASCII.GetBytes(StressCheckSet.SetName));
     }
 
     private static EarlierResults OfBlock(ReadOnlyMemory<byte> text, string name, Range block)

@@ -32,6 +32,10 @@ internal static class Actions
     public static int Curve(ModelWriter model, int member, int group, int load, string kind, string flag = ".LOCAL_COORDS.") =>
         Add(model, "IFCSTRUCTURALCURVEACTION", member, group, load, "$", flag, "$", "$", $".{kind}.");
 
+    /// <summary>A varying line load of IFC2X3: the first value, the places of all as a shape aspect, and the further values.</summary>
+    public static int Varying(ModelWriter model, int member, int group, int load, int aspect, params int[] subsequent) =>
+        Add(model, "IFCSTRUCTURALLINEARACTIONVARYING", member, group, load, "$", ".LOCAL_COORDS.", ".F.", "$", ".TRUE_LENGTH.", Bars.Ref(aspect), Bars.Refs(subsequent));
+
     public static int LinearForce(ModelWriter model, params string[] components) => model.Add("IFCSTRUCTURALLOADLINEARFORCE", ["$", .. components]);
 
     /// <summary>A point action at a vertex, or without a place.</summary>

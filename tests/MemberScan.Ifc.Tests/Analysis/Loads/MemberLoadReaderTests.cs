@@ -73,6 +73,40 @@ public sealed class MemberLoadReaderTests
         Assert.Equal(4, loads.Count(l => l.Unusable is not null));
     }
 
+    [Theory]
+    [InlineData("line")]
+    [InlineData("polyline")]
+    [InlineData("points")]
+    [InlineData("vertices")]
+    public void A_varying_line_load_of_IFC2X3_is_linear_between_the_points_of_its_aspect(string kind)
+    {
+        var model = Bars.Model(Release.Ifc2X3);
+        var (rail, live) = Rail(model);
+        Actions.Varying(model, rail, live, Down(model, "-2."), Aspect(model, kind, 0, 1, 3), Down(model, "-4."), Down(model, "0."));
+
+        var loads = new ReadLoads(model).On(rail);
+
+        Assert.All(loads, l => Assert.Null(l.Unusable));
+        Assert.Equal([(0, 1, -2000, -4000), (1, 3, -4000, 0)], loads.Select(l => (Math.Round(l.From, 9), Math.Round(l.To, 9), Math.Round(l.Start.Force.Z, 6), Math.Round(l.End.Force.Z, 6))));
+    }
+
+    [Fact]
+    public void A_varying_line_load_without_a_place_for_each_value_is_told()
+    {
+        var model = Bars.Model(Release.Ifc2X3);
+        var (rail, live) = Rail(model);
+        Actions.Varying(model, rail, live, Down(model, "-2."), Aspect(model, "points", 0, 1, 3), Down(model, "-4."));
+        Actions.Varying(model, rail, live, Down(model, "-2."), Aspect(model, "points", 0, 4), Down(model, "-4."));
+        Actions.Varying(model, rail, live, Down(model, "-2."), Aspect(model, "points", 3, 0), Down(model, "-4."));
+        Actions.Varying(model, rail, live, Down(model, "-2."), model.Add("IFCSHAPEASPECT", Bars.Refs(model.Add("IFCSHAPEREPRESENTATION",
+            Bars.Ref(model.ReferenceContext), "'Reference'", "'Curve'", Bars.Refs(model.Direction(Vector3.UnitX)))), "$", "$", ".F.", "$"), Down(model, "-4."));
+
+        var loads = new ReadLoads(model).On(rail);
+
+        Assert.Equal(4, loads.Length);
+        Assert.All(loads, l => Assert.Equal(ReasonCode.ForcesIncomplete, l.Unusable!.Code));
+    }
+
     [Fact]
     public void A_projected_load_on_an_inclined_member_is_less_per_length_of_it()
     {
@@ -100,6 +134,25 @@ public sealed class MemberLoadReaderTests
         var loads = new ReadLoads(model).On(rail);
 
         Assert.Equal([ReasonCode.UnitMissing, ReasonCode.ForcesIncomplete], loads.Select(l => l.Unusable!.Code));
+    }
+
+    private static int Down(ModelWriter model, string z) => Actions.LinearForce(model, "$", "$", z, "$", "$", "$");
+
+    /// <summary>A shape aspect of places along X [m]: points on a line in file units, on a polyline of 1 m and 2 m, plain points, or vertices.</summary>
+    private static int Aspect(ModelWriter model, string kind, params double[] places)
+    {
+        int Point(double x) => model.Point(new Vector3(x, 0, 0));
+        var line = model.Add("IFCLINE", Bars.Ref(Point(0)), Bars.Ref(model.Add("IFCVECTOR", Bars.Ref(model.Direction(Vector3.UnitX)), "1.")));
+        var polyline = model.Add("IFCPOLYLINE", Bars.Refs(Point(0), Point(1), Point(3)));
+        int[] items = [.. places.Select(x => kind switch
+        {
+            "line" => model.Add("IFCPOINTONCURVE", Bars.Ref(line), Spelling.Real(1000 * x)),
+            "polyline" => model.Add("IFCPOINTONCURVE", Bars.Ref(polyline), Spelling.Real(x <= 1 ? x : 1 + (x - 1) / 2)),
+            "points" => Point(x),
+            _ => Lines.Vertex(model, new Vector3(x, 0, 0)),
+        })];
+        var representation = model.Add(kind == "vertices" ? "IFCTOPOLOGYREPRESENTATION" : "IFCSHAPEREPRESENTATION", Bars.Ref(model.ReferenceContext), "'Reference'", "'Point'", Bars.Refs(items));
+        return model.Add("IFCSHAPEASPECT", Bars.Refs(representation), "$", "$", ".F.", "$");
     }
 
     private static (int Rail, int Case) Rail(ModelWriter model) =>
