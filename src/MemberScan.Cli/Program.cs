@@ -9,6 +9,7 @@ using MemberScan.Cli.Queue;
 using MemberScan.Cli.Restoring;
 using MemberScan.Cli.Screening;
 using MemberScan.Cli.Sections;
+using MemberScan.Cli.SettingsFiles;
 using MemberScan.Cli.Sheets;
 
 namespace MemberScan.Cli;
@@ -30,7 +31,7 @@ internal static class Program
     {
         var root = new RootCommand("Screens the secondary steel of building models for combined stress. A screening aid for qualified engineers; not a design, not a certificate.")
         {
-            ScreenCommand.Build(), MembersCommand.Build(), SectionCommand.Build(), FrameCommand.Build(), CompareCommand.Build(), RestoreCommand.Build(), SheetCommand.Build(), EnqueueCommand.Build(), WorkCommand.Build(),
+            ScreenCommand.Build(), MembersCommand.Build(), SectionCommand.Build(), FrameCommand.Build(), CompareCommand.Build(), RestoreCommand.Build(), SheetCommand.Build(), SettingsCommand.Build(), EnqueueCommand.Build(), WorkCommand.Build(),
         };
         root.Subcommands.Add(ManualCommand.Build(root));
         return root;

@@ -26,8 +26,14 @@ public static class ShippedFiles
     /// <summary>Pipe sizes by schedule, and densities of contents.</summary>
     public const string Pipes = "loads/pipes.json";
 
+    /// <summary>Ready bases: allowable stress, EN 1993-1-1, AISC 360-22 by its two methods.</summary>
+    public const string AllowableStressBasis = "basis/allowable-stress.json", En1993Basis = "basis/en-1993.json", AiscAsd = "basis/aisc-360-asd.json", AiscLrfd = "basis/aisc-360-lrfd.json";
+
+    /// <summary>Names of the ready bases.</summary>
+    public static ImmutableArray<string> Bases { get; } = [AllowableStressBasis, En1993Basis, AiscAsd, AiscLrfd];
+
     /// <summary>Names of all of them, with '/' between folder and file.</summary>
-    public static ImmutableArray<string> Names { get; } = [DefaultSettings, SettingsSchema, Grades, GuardLoads, HangerLoads, MaintenanceLoads, Pipes];
+    public static ImmutableArray<string> Names { get; } = [DefaultSettings, SettingsSchema, Grades, GuardLoads, HangerLoads, MaintenanceLoads, Pipes, .. Bases];
 
     /// <summary>The bytes of one of them.</summary>
     /// <exception cref="ArgumentException">There is no such file.</exception>

@@ -9,6 +9,8 @@ using MemberScan.Model.Limits;
 using MemberScan.Model.Members;
 using MemberScan.Model.Verdicts;
 using MemberScan.Screening.Checking;
+using MemberScan.Screening.Checking.Rules;
+using MemberScan.Screening.Contacts;
 using MemberScan.Screening.Decisions;
 using MemberScan.Screening.Record;
 using MemberScan.Screening.Record.Given;
@@ -39,7 +41,7 @@ public static class Screener
         return new ScreeningOutcome(record, contents.MayWriteModel ? contents.Model : null, contents.Text, RunIdentity.CreationDate(request.TimestampIsGiven ? request.Timestamp : "", contents.File.Header.TimeStamp))
         {
             WithSetTemplate = request.WithSetTemplate,
-            Sheets = new SheetMaker(contents, library, request.Settings.Basis),
+            Sheets = new SheetMaker(contents, library, request.Settings),
         };
     }
 
@@ -47,7 +49,8 @@ public static class Screener
         ScreeningRequest request, ModelContents contents, SectionLibrary library, IProgress<ScreeningProgress>? progress, CancellationToken cancellation)
     {
         var members = contents.Catalog.Members;
-        var checker = new MemberChecker(library, request.Settings.Basis, request.Settings.LengthFactor);
+        var contacts = new Lazy<ContactList?>(() => contents.Contacts ?? ContactFinder.Find(members, request.Settings.Loads.ContactTolerance));
+        var checker = new MemberChecker(library, request.Settings, contacts);
         var marker = new InputMarker(request.Settings);
         var results = new MemberResult[members.Length];
         var done = 0;
@@ -89,7 +92,7 @@ public static class Screener
     }
 
     private static BasisLine BasisLine(string kind, StressLimit? limit, StressLimit? standard) =>
-        new(kind, LimitInForce.Words(limit), LimitInForce.Clause(limit), limit == standard);
+        new(kind, LimitWords.Of(limit), LimitWords.Clause(limit), limit == standard);
 
     /// <summary>Sections that stresses were found in; those of members without forces or strength are not solved for the sake of a table.</summary>
     private static ImmutableArray<SectionFacts> SectionsInUse(ImmutableArray<Member> members, ImmutableArray<MemberResult> results, SectionLibrary library)

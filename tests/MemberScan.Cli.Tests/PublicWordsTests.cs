@@ -27,6 +27,8 @@ public sealed partial class PublicWordsTests
     [InlineData("--help")]
     [InlineData("screen --help")]
     [InlineData("section --help")]
+    [InlineData("settings --help")]
+    [InlineData("settings --explain")]
     public async Task No_help_text_uses_them(string arguments)
     {
         var ran = await Memberscan.Run(arguments.Split(' '));

@@ -42,7 +42,7 @@ public sealed partial class ReadmeTests
     {
         var commands = Lines().Select(l => l[Call.Length..].Split(' ')[0]).Distinct(StringComparer.Ordinal).Order(StringComparer.Ordinal);
 
-        Assert.Equal(["compare", "frame", "members", "restore", "screen", "section", "sheet"], commands);
+        Assert.Equal(["compare", "frame", "members", "restore", "screen", "section", "settings", "sheet"], commands);
     }
 
     [Fact]
@@ -50,11 +50,11 @@ public sealed partial class ReadmeTests
     {
         var text = await File.ReadAllTextAsync(Path.Combine(Memberscan.Root, "README.md"), TestContext.Current.CancellationToken);
         var help = "";
-        foreach (var command in new[] { "screen", "section", "members", "frame", "compare", "restore", "sheet", "enqueue", "work", "manual" }) help += (await Memberscan.Run(command, "--help")).Output;
+        foreach (var command in new[] { "screen", "section", "members", "frame", "compare", "restore", "sheet", "settings", "enqueue", "work", "manual" }) help += (await Memberscan.Run(command, "--help")).Output;
 
         var options = LongOption().Matches(help).Select(m => m.Value).Except(["--help", "--version"]).Distinct(StringComparer.Ordinal).ToArray();
 
-        Assert.Equal(39, options.Length);
+        Assert.Equal(41, options.Length);
         Assert.All(options, option => Assert.Contains(option, text, StringComparison.Ordinal));
     }
 

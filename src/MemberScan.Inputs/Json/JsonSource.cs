@@ -16,13 +16,16 @@ internal sealed class JsonSource(ReadOnlyMemory<byte> bytes, string fileName, Di
     /// <summary>How many errors were added.</summary>
     public int ErrorCount { get; private set; }
 
+    /// <summary>Line of a byte, from 1.</summary>
+    public int LineOf(int offset) => bytes.Span[..Math.Clamp(offset, 0, bytes.Length)].Count((byte)'\n') + 1;
+
     /// <summary>Adds an error at a byte of the file.</summary>
     public void Fail(string code, int offset, string message)
     {
         if (++ErrorCount > MostErrors) return;
 
         var before = bytes.Span[..Math.Clamp(offset, 0, bytes.Length)];
-        var line = before.Count((byte)'\n') + 1;
+        var line = LineOf(offset);
         var inLine = before[(before.LastIndexOf((byte)'\n') + 1)..];
         if (line == 1 && inLine.StartsWith("\uFEFF"u8)) inLine = inLine[3..];
         var column = 1;

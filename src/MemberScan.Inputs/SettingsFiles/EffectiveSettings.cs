@@ -5,8 +5,8 @@ using System.Text.Json;
 using MemberScan.Foundation.Units;
 using MemberScan.Inputs.Materials;
 using MemberScan.Inputs.SettingsFiles.Forces;
+using MemberScan.Inputs.SettingsFiles.Limits;
 using MemberScan.Model.Forces;
-using MemberScan.Model.Limits;
 using MemberScan.Model.Presets;
 using MemberScan.Model.Rules;
 
@@ -21,8 +21,7 @@ internal static class EffectiveSettings
     {
         var lines = ImmutableArray.CreateBuilder<EffectiveSetting>();
         var forces = settings.Reading.Forces;
-        AddLimit("basis.service", "omega", settings.Basis.Service, SettingKeys.ServiceCriteria);
-        AddLimit("basis.design", "gammaM0", settings.Basis.Design, SettingKeys.DesignCriteria);
+        foreach (var (key, value) in LimitLines.Basis(settings.Limits)) Add(key, value);
         Add("candidates.always", Listed(settings.Reading.Candidates.Always));
         Add("candidates.withBarBodyOrForces", Listed(settings.Reading.Candidates.WithBarBodyOrForces));
         Add("sections.recogniseMeshes", settings.Reading.RecogniseMeshes ? "true" : "false");
@@ -52,23 +51,12 @@ internal static class EffectiveSettings
         AddAll("materials.grades", settings.Reading.Grades.Where(grade => !GradeTable.Shipped.Grades.Contains(grade))
             .Select((grade, i) => ($"[{i + 1}]", OfGrade(grade))));
         Add("materials.poisson", Number(settings.Reading.DefaultPoisson));
-        Add("stability.lengthFactor", Number(settings.LengthFactor));
+        foreach (var (key, value) in LimitLines.Further(settings.Limits)) Add(key, value);
+        AddAll("rules", settings.LimitRules.Select((rule, i) => ($"[{i + 1}]", LimitLines.Of(rule, settings.Limits))));
         Add("display", SettingKeys.Displays.WordOf(settings.Display));
         return lines.ToImmutable();
 
         void Add(string key, string value) => lines.Add(new EffectiveSetting(key, value, !settings.Given.Contains(key)));
-
-        void AddLimit(string key, string factor, StressLimit? limit, WordTable<Criterion> criteria)
-        {
-            if (limit is null)
-            {
-                Add(key, None);
-                return;
-            }
-
-            Add($"{key}.criterion", criteria.WordOf(limit.Criterion));
-            Add($"{key}.{factor}", Number(limit.Factor));
-        }
 
         void AddAll(string key, IEnumerable<(string Suffix, string Value)> entries)
         {

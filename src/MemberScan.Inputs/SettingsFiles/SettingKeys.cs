@@ -10,8 +10,8 @@ namespace MemberScan.Inputs.SettingsFiles;
 /// <summary>The keys of a settings file and the words and ranges of their values; the published schema says the same.</summary>
 internal static class SettingKeys
 {
-    public static readonly ImmutableArray<string> Root = ["$schema", "basis", "candidates", "sections", "roles", "forces", "loads", "units", "materials", "stability", "display"];
-    public static readonly ImmutableArray<string> Basis = ["service", "design"];
+    public static readonly ImmutableArray<string> Root = ["$schema", "basis", "candidates", "sections", "roles", "forces", "loads", "units", "materials", "checks", "stability", "threads", "deflection", "rules", "display"];
+    public static readonly ImmutableArray<string> Basis = ["service", "design", "wall", "brittle", "gammaM1", "gammaM2"];
     public static readonly ImmutableArray<string> Service = ["criterion", "omega"];
     public static readonly ImmutableArray<string> Design = ["criterion", "gammaM0"];
     public static readonly ImmutableArray<string> Candidates = ["always", "withBarBodyOrForces"];
@@ -24,8 +24,8 @@ internal static class SettingKeys
         "torsion", "missingCoefficients", "caseCoefficients", "combinations", "combinationSets", "caseTags", "propertySets",
     ];
     public static readonly ImmutableArray<string> KindEntry = ["pattern", "kind"];
-    public static readonly ImmutableArray<string> Materials = ["grades", "poisson"];
-    public static readonly ImmutableArray<string> Stability = ["lengthFactor"];
+    public static readonly ImmutableArray<string> Materials = ["grades", "poisson", "welds"];
+    public static readonly ImmutableArray<string> Stability = ["lengthFactor", "factorByRole", "ends", "hollowForming"];
 
     public static readonly (double Least, double Most) Factor = (1, 100);
     public static readonly (double Least, double Most) Turn = (-360, 360);
@@ -34,8 +34,10 @@ internal static class SettingKeys
     public static readonly (double Least, double Most) LengthFactor = (0.5, 100);
 
     public static readonly WordTable<Criterion> ServiceCriteria =
-        new(("allowable-von-mises", Criterion.AllowableVonMises), ("allowable-tresca", Criterion.AllowableTresca));
-    public static readonly WordTable<Criterion> DesignCriteria = new(("en-1993-1-1-elastic", Criterion.En1993Elastic));
+        new(("allowable-von-mises", Criterion.AllowableVonMises), ("allowable-tresca", Criterion.AllowableTresca),
+            ("aisc-360-asd", Criterion.Aisc360Asd), ("largest-normal-stress", Criterion.LargestNormalStress));
+    public static readonly WordTable<Criterion> DesignCriteria =
+        new(("en-1993-1-1-elastic", Criterion.En1993Elastic), ("aisc-360-lrfd", Criterion.Aisc360Lrfd), ("largest-normal-stress", Criterion.LargestNormalStress));
     public static readonly WordTable<ForceConvention> Conventions =
         new(("positive-face", ForceConvention.PositiveFace), ("end-forces", ForceConvention.EndForces), ("detect", ForceConvention.Detect));
     public static readonly WordTable<ForceConvention> StatedConventions =

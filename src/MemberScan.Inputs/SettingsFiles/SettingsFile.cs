@@ -1,5 +1,7 @@
+using System.Collections.Immutable;
 using MemberScan.Foundation.Diagnostics;
 using MemberScan.Inputs.Json;
+using MemberScan.Inputs.SettingsFiles.Limits;
 
 namespace MemberScan.Inputs.SettingsFiles;
 
@@ -23,14 +25,20 @@ public static class SettingsFile
         if (StrictJson.Read(source) is not { } root) return null;
 
         var settings = new SettingsReader(new JsonValues(source)).Read(root);
-        return source.ErrorCount == 0 ? settings : null;
+        return source.ErrorCount == 0 ? settings with { Places = SettingPlaces.Of(root, source) } : null;
     }
 
     internal static Settings ReadShipped()
     {
         var diagnostics = new DiagnosticList();
         return Read(new JsonSource(ShippedFiles.Read(ShippedFiles.DefaultSettings), ShippedFiles.DefaultSettings, diagnostics) { IsShipped = true }) is { } settings
-            ? settings with { Given = [] }
+            ? AsDefaults(settings)
             : throw new InvalidOperationException($"the shipped settings are damaged: {diagnostics.Items[0]}");
+    }
+
+    private static Settings AsDefaults(Settings settings)
+    {
+        var limits = settings.Limits with { Stability = settings.Limits.Stability with { IsLengthFactorGiven = false } };
+        return settings with { Given = [], Places = ImmutableDictionary<string, int>.Empty, Limits = limits };
     }
 }

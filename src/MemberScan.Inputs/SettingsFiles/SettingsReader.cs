@@ -1,10 +1,10 @@
 using System.Collections.Frozen;
 using System.Collections.Immutable;
-using System.Text.Json;
 using MemberScan.Inputs.Json;
 using MemberScan.Inputs.Materials;
 using MemberScan.Inputs.Presets;
 using MemberScan.Inputs.SettingsFiles.Forces;
+using MemberScan.Inputs.SettingsFiles.Limits;
 using MemberScan.Inputs.Values;
 using MemberScan.Model.Limits;
 using MemberScan.Model.Presets;
@@ -15,67 +15,59 @@ namespace MemberScan.Inputs.SettingsFiles;
 /// <summary>Turns the JSON of a settings file into settings, beginning with the defaults.</summary>
 internal sealed class SettingsReader(JsonValues values)
 {
-    /// <summary>Buckling length over member length of a cantilever: the cautious choice for a rail post or bracket [-].</summary>
-    public const double DefaultLengthFactor = 2.0;
-
     private readonly ImmutableHashSet<string>.Builder _given = ImmutableHashSet.CreateBuilder<string>(StringComparer.Ordinal);
-    private Basis _basis = Basis.Default;
+    private LimitSet _limits = new();
+    private ImmutableArray<LimitRule> _rules = [];
     private ReadingRules _reading = new() { Grades = GradeTable.Shipped.Grades };
-    private double _lengthFactor = DefaultLengthFactor;
     private LoadRules _loads = new();
     private DisplayUnits _display = DisplayUnits.Si;
 
     /// <summary>Reads the settings; of meaning only when no error was added.</summary>
     public Settings Read(JsonItem root)
     {
+        var limits = new LimitSetReader(values, _given, "");
+        JsonItem? rules = null;
         foreach (var (key, _, item) in values.Object(root, "", SettingKeys.Root))
         {
             switch (key)
             {
                 case "$schema": _ = values.Text(item, key); break;
-                case "basis": ReadBasis(item); break;
+                case "basis": _limits = limits.Basis(item, _limits); break;
                 case "candidates": ReadCandidates(item); break;
                 case "sections": ReadSections(item); break;
                 case "roles": ReadRoles(item); break;
                 case "forces": _reading = _reading with { Forces = new ForceRulesReader(values, _given).Read(item, _reading.Forces) }; break;
                 case "loads": _loads = new LoadRulesReader(values, _given).Read(item, _loads); break;
                 case "units": ReadUnits(item); break;
-                case "materials": ReadMaterials(item); break;
-                case "stability": ReadStability(item); break;
+                case "materials": ReadMaterials(item, limits); break;
+                case "checks": _limits = limits.Checks(item, _limits); break;
+                case "stability": _limits = limits.Stability(item, _limits); break;
+                case "threads": _limits = limits.Threads(item, _limits); break;
+                case "deflection": _limits = limits.Deflection(item, key, _limits); break;
+                case "rules": rules = item; break;
                 default: _display = Choose(item, key, SettingKeys.Displays, _display); break;
             }
         }
 
-        return new Settings { Basis = _basis, Reading = _reading, LengthFactor = _lengthFactor, Loads = _loads, Display = _display, Given = _given.ToImmutable() };
+        // A rule begins with the limits of all, wherever it stands in the file.
+        if (rules is not null) ReadRules(rules);
+        return new Settings
+        {
+            Basis = _limits.Basis,
+            LengthFactor = _limits.Stability.LengthFactor,
+            Limits = _limits,
+            LimitRules = _rules,
+            Reading = _reading,
+            Loads = _loads,
+            Display = _display,
+            Given = _given.ToImmutable(),
+        };
     }
 
-    private void ReadBasis(JsonItem item)
+    private void ReadRules(JsonItem list)
     {
-        foreach (var (key, _, value) in values.Object(item, "basis", SettingKeys.Basis))
-        {
-            _basis = key == "service"
-                ? _basis with { Service = Limit(value, "basis.service", Basis.Default.Service!, SettingKeys.Service, SettingKeys.ServiceCriteria) }
-                : _basis with { Design = Limit(value, "basis.design", Basis.Default.Design!, SettingKeys.Design, SettingKeys.DesignCriteria) };
-        }
-    }
-
-    // Null switches the limit off: situations of that kind are then not checked.
-    private StressLimit? Limit(JsonItem item, string path, StressLimit limit, ImmutableArray<string> keys, WordTable<Criterion> criteria)
-    {
-        if (item.Kind == JsonValueKind.Null)
-        {
-            _given.Add(path);
-            return null;
-        }
-
-        foreach (var (key, _, value) in values.Object(item, path, keys))
-        {
-            limit = key == "criterion"
-                ? limit with { Criterion = Choose(value, $"{path}.{key}", criteria, limit.Criterion) }
-                : limit with { Factor = Number(value, $"{path}.{key}", SettingKeys.Factor, limit.Factor) };
-        }
-
-        return limit;
+        _given.Add("rules");
+        _rules = new LimitRulesReader(values).Read(list, _limits);
     }
 
     private void ReadCandidates(JsonItem item)
@@ -149,7 +141,7 @@ internal sealed class SettingsReader(JsonValues values)
         _reading = _reading with { MissingUnits = factors.ToFrozenDictionary(StringComparer.Ordinal) };
     }
 
-    private void ReadMaterials(JsonItem item)
+    private void ReadMaterials(JsonItem item, LimitSetReader limits)
     {
         foreach (var (key, _, value) in values.Object(item, "materials", SettingKeys.Materials))
         {
@@ -159,17 +151,15 @@ internal sealed class SettingsReader(JsonValues values)
                 _reading = _reading with { Grades = [.. GradeReader.Read(value, path, values), .. GradeTable.Shipped.Grades] };
                 _given.Add(path);
             }
+            else if (key == "welds")
+            {
+                _limits = limits.Welds(value, path, _limits);
+            }
             else
             {
                 _reading = _reading with { DefaultPoisson = Number(value, path, (0, GradeReader.LargestPoisson), _reading.DefaultPoisson) };
             }
         }
-    }
-
-    private void ReadStability(JsonItem item)
-    {
-        foreach (var (key, _, value) in values.Object(item, "stability", SettingKeys.Stability))
-            _lengthFactor = Number(value, $"stability.{key}", SettingKeys.LengthFactor, _lengthFactor);
     }
 
     private double Number(JsonItem item, string path, (double Least, double Most) range, double otherwise)

@@ -3,6 +3,7 @@ using MemberScan.Mechanics.Forces;
 using MemberScan.Mechanics.Stress;
 using MemberScan.Model.Forces;
 using MemberScan.Model.Verdicts;
+using MemberScan.Screening.Checking.Rules;
 
 namespace MemberScan.Screening.Checking;
 
@@ -21,10 +22,9 @@ internal static class EnvelopeSearch
     /// <param name="findings">Takes what bars a verdict.</param>
     /// <param name="envelope">The stations, in rising order; at least one.</param>
     /// <param name="field">Field of the section.</param>
-    /// <param name="measure">Stress that is held against the limit.</param>
-    /// <param name="allowed">The limit [Pa].</param>
+    /// <param name="rule">The criterion.</param>
     /// <param name="index">Number of the situation.</param>
-    public static Found? Largest(SituationFindings findings, IReadOnlyList<EnvelopeStation> envelope, StressField field, StressMeasure measure, double allowed, int index)
+    public static Found? Largest(SituationFindings findings, IReadOnlyList<EnvelopeStation> envelope, StressField field, StressRule rule, int index)
     {
         Found? best = null;
         foreach (var station in envelope)
@@ -52,8 +52,8 @@ internal static class EnvelopeSearch
             }
 
             var usable = SituationChecker.Usable(told, field, field.Section, forces);
-            var point = field.Govern(usable, measure);
-            return new Found(point.Value / allowed, x, usable, point, field, index);
+            var (utilization, point) = rule.Govern(field, usable);
+            return new Found(utilization, x, usable, point, field, index, rule);
         }
     }
 

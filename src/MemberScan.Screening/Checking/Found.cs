@@ -1,5 +1,6 @@
 using MemberScan.Mechanics.Forces;
 using MemberScan.Mechanics.Stress;
+using MemberScan.Screening.Checking.Rules;
 
 namespace MemberScan.Screening.Checking;
 
@@ -10,7 +11,8 @@ namespace MemberScan.Screening.Checking;
 /// <param name="Point">Governing point.</param>
 /// <param name="Field">The field that it was found in.</param>
 /// <param name="Situation">Index of the situation among the member's.</param>
-internal sealed record Found(double Utilization, double X, SectionForces Forces, GoverningPoint Point, StressField Field, int Situation)
+/// <param name="Rule">The criterion that it is held against.</param>
+internal sealed record Found(double Utilization, double X, SectionForces Forces, GoverningPoint Point, StressField Field, int Situation, StressRule Rule)
 {
     /// <summary>The one of larger utilization; the earlier one when they are alike.</summary>
     public static Found? Larger(Found? first, Found? second) =>

@@ -1,18 +1,23 @@
 using System.Collections.Immutable;
 using System.Globalization;
 using MemberScan.Foundation.Geometry;
+using MemberScan.Inputs.SettingsFiles;
 using MemberScan.Mechanics.Sections;
 using MemberScan.Model;
 using MemberScan.Model.Forces;
 using MemberScan.Model.Limits;
 using MemberScan.Model.Members;
 using MemberScan.Model.Verdicts;
+using MemberScan.Screening.Checking.Further;
+using MemberScan.Screening.Checking.Ranking;
+using MemberScan.Screening.Checking.Strengths;
+using MemberScan.Screening.Contacts;
 using MemberScan.Screening.Record;
 
 namespace MemberScan.Screening.Checking;
 
 /// <summary>The verdict of one candidate out of its section, material and forces.</summary>
-internal sealed class MemberChecker(SectionLibrary library, Basis basis, double lengthFactor)
+internal sealed class MemberChecker(SectionLibrary library, Settings settings, Lazy<ContactList?> contacts)
 {
     /// <summary>Utilizations above this are over the limit.</summary>
     public const double OverLimit = 1 + 1e-9;
@@ -23,9 +28,11 @@ internal sealed class MemberChecker(SectionLibrary library, Basis basis, double 
     /// <summary>Bend radius over depth below which a straight-bar stress supports no verdict within the limit.</summary>
     private const double SharpBend = 10;
 
+    private const double ProvisionalYield = 235e6;
+
     private const string EitherEnd = "tapered: every place is checked with the section of either end, the less favourable decides; one end is smaller in every dimension, so that it bounds what lies between";
 
-    private readonly SituationChecker _situations = new(library, basis, lengthFactor);
+    private readonly SituationChecker _situations = new(library, new FurtherChecks(contacts));
 
     /// <summary>Checks a candidate.</summary>
     /// <param name="member">The candidate.</param>
@@ -37,8 +44,10 @@ internal sealed class MemberChecker(SectionLibrary library, Basis basis, double 
         all.AddRange(member.Notes);
         all.AddRange(notes);
 
+        var limits = settings.LimitsOf(member);
         var section = member.Section as Finding<SectionFinding>.Found;
-        var strength = member.Material.Yield as Finding<double>.Found;
+        var yield = StrengthInForce.Of(member, limits);
+        var strength = yield as Finding<double>.Found;
         var length = member.Length as Finding<double>.Found;
         var poisson = (Finding<double>.Found)member.Material.Poisson;
         if (strength is not null && poisson.Source == "default")
@@ -46,38 +55,36 @@ internal sealed class MemberChecker(SectionLibrary library, Basis basis, double 
 
         Reason? first = (member.Section as Finding<SectionFinding>.Missing)?.Why
             ?? OutOfRange(section, member.EndSection)
-            ?? (member.Material.Yield as Finding<double>.Missing)?.Why
+            ?? (yield as Finding<double>.Missing)?.Why
             ?? (forces.Count == 0 ? new Reason(ReasonCode.NoForces, "no section forces for this member in any source") : null)
             ?? (member.Length as Finding<double>.Missing)?.Why
             ?? (double.IsFinite(length!.Value) ? null : new Reason(ReasonCode.LengthAmbiguous, $"the length ({length.Source}) is beyond the range of numbers"));
 
+        var isCheckable = section is not null && length is not null && double.IsFinite(length.Value) && forces.Count > 0 && OutOfRange(section, member.EndSection) is null;
+        double? required = null;
         var findings = new List<SituationFindings>();
         if (first is null)
         {
-            var taper = TaperOf(section!.Value, member.EndSection);
-            var shapes = section.Value;
-            if (member.EndSection is { } atEnd && taper is null)
-            {
-                shapes = shapes with { Shapes = [.. shapes.Shapes, .. atEnd.Shapes] };
-                all.Add(EitherEnd);
-            }
-
-            var subject = new SituationChecker.Subject(shapes, length!.Value, strength!.Value, poisson.Value, member.Material) { Taper = taper };
+            var subject = SubjectOf(member, limits, section!, length!.Value, strength!, poisson.Value, all);
             for (var i = 0; i < forces.Count; i++) findings.Add(_situations.Check(subject, forces[i], i));
-            first = Barred(member, section.Value, findings);
+            first = Barred(member, section!.Value, findings);
         }
         else
         {
             findings.AddRange(forces.Select(f => new SituationFindings(f)));
+            if (isCheckable && first is { Code: ReasonCode.NoStrength or ReasonCode.StrengthImplausible }) required = RequiredYield(member, limits, section!, length!.Value, poisson.Value, forces, all);
         }
 
         var decisive = Decisive(findings, all, out var other);
-        if (first is null && decisive is null) first = new Reason(ReasonCode.CheckNotEvaluated, "no stress was found for the member");
-        var overstressed = decisive is { Utilization: > OverLimit };
+        var worst = findings.Where(f => f.Further.Worst is not null).MaxBy(f => f.Further.Worst!.Utilization);
+        var governing = GoverningCheck(decisive, other, worst, findings, strength?.Source ?? "");
+        if (first is null && governing is null) first = new Reason(ReasonCode.CheckNotEvaluated, "no stress was found for the member");
+        var overstressed = governing is { Utilization: > OverLimit };
         var verdict = overstressed ? Verdict.Overstressed : first is not null ? Verdict.NotChecked : Verdict.WithinLimit;
         if (overstressed && first is not null) all.Add($"beside the verdict: {first.Message}");
         foreach (var note in findings.SelectMany(f => f.Notes)) if (!all.Contains(note)) all.Add(note);
 
+        var isOverStress = decisive is { Utilization: > OverLimit };
         return new MemberResult
         {
             Identity = MemberIdentity.Of(member),
@@ -91,7 +98,13 @@ internal sealed class MemberChecker(SectionLibrary library, Basis basis, double 
             Axes = (member.Axes as Finding<MemberAxes>.Found)?.Value,
             Verdict = verdict,
             Reason = verdict == Verdict.NotChecked ? first : null,
-            Governing = decisive is null ? null : Governing(decisive, other, findings, strength!.Value, strength.Source),
+            Governing = governing,
+            Checks = CheckList.Of(findings, decisive, withTraces: verdict != Verdict.WithinLimit),
+            NextWorst = CheckList.Next(findings, governing),
+            Deflection = CheckList.Deflection(limits, member.Role, findings),
+            Margin = 1 - governing?.Utilization,
+            RequiredYield = isOverStress ? Hints.RequiredYield(findings) : required,
+            NearestSize = isOverStress ? Hints.NearestSize(findings, decisive!.Field.Section) : null,
             Situations = Ranked(findings),
             Notes = all.ToImmutable(),
         };
@@ -150,39 +163,60 @@ internal sealed class MemberChecker(SectionLibrary library, Basis basis, double 
         return decisive;
     }
 
-    private static Governing Governing(Found decisive, Found? other, List<SituationFindings> findings, double yield, string yieldSource)
+    private static Governing? GoverningCheck(Found? decisive, Found? other, SituationFindings? worst, List<SituationFindings> findings, string yieldSource)
     {
-        var finding = findings[decisive.Situation];
-        var limit = finding.Limit!;
-        var check = LimitInForce.Check(limit, decisive.Point.State, yield);
-        return new Governing
+        if (decisive is null) return null;
+
+        return worst is { Largest: { } stress, Further.Worst: { } further } && further.Utilization > decisive.Utilization * OverLimit
+            ? GoverningOf.Further(further, stress, worst)
+            : GoverningOf.Stress(decisive, other, findings[decisive.Situation], yieldSource);
+    }
+
+    private static Subject SubjectOf(
+        Member member, LimitSet limits, Finding<SectionFinding>.Found section, double length, Finding<double>.Found strength, double poisson, ImmutableArray<string>.Builder notes)
+    {
+        var wall = new WallInForce(member, limits);
+        var shapes = wall.Of(section.Value);
+        var end = member.EndSection is { } other ? wall.Of(other) : null;
+        var taper = TaperOf(shapes, end);
+        if (end is not null && taper is null)
         {
-            Utilization = check.Utilization,
-            Criterion = LimitInForce.Words(limit),
-            Clause = LimitInForce.Clause(limit),
-            Limit = LimitInForce.Stress(limit, yield),
-            Stress = decisive.Point.Value,
-            Situation = finding.Forces.Situation.Name,
-            Kind = KindWord(finding.Forces.Situation.Kind),
-            Station = decisive.X,
-            Forces = decisive.Forces,
-            ForcesSource = finding.Forces.Source,
-            Point = decisive.Point,
-            Section = decisive.Field.Section.Designation,
-            ShearModel = decisive.Field.Model.ToString().ToLowerInvariant(),
-            OtherModelUtilization = other?.Utilization,
-            Trace = [.. Derivation.Lines(decisive, finding.Forces.Source), .. check.Trace.Select(line => Derivation.Completed(line, decisive, yieldSource))],
+            shapes = shapes with { Shapes = [.. shapes.Shapes, .. end.Shapes] };
+            if (!notes.Contains(EitherEnd)) notes.Add(EitherEnd);
+        }
+
+        if (wall.IsReduced)
+            foreach (var words in wall.All) if (!notes.Contains(words)) notes.Add(words);
+        return new Subject(member, shapes, length, strength, poisson, limits)
+        {
+            Taper = taper,
+            IsBrittle = StrengthInForce.IsBrittle(member.Material, limits),
+            WallWords = wall.Words,
         };
+    }
+
+    /// <summary>The yield strength that the stress criterion needs of a member whose strength is missing; noted as well.</summary>
+    private double? RequiredYield(
+        Member member, LimitSet limits, Finding<SectionFinding>.Found section, double length, double poisson, IReadOnlyList<MemberForces> forces, ImmutableArray<string>.Builder notes)
+    {
+        // The strength does not change the stress; any will do.
+        var subject = SubjectOf(member, limits, section, length, new Finding<double>.Found(ProvisionalYield, "provisional"), poisson, notes);
+        var findings = forces.Select((f, i) => _situations.Check(subject, f, i)).ToList();
+        if (Hints.RequiredYield(findings) is not { } required || !double.IsFinite(required)) return null;
+
+        notes.Add($"{Checks.Ranking.RequiredYield.Words(required)} by the stress criterion, were the strength known; stability and walls not looked at");
+        return required;
     }
 
     private static ImmutableArray<SituationResult> Ranked(List<SituationFindings> findings) =>
     [
         .. findings.Select(f => new SituationResult(
-                f.Forces.Situation.Name, KindWord(f.Forces.Situation.Kind), f.Forces.Situation.ActsInFull, f.Largest?.Utilization,
+                f.Forces.Situation.Name, CheckList.Word(f.Forces.Situation.Kind), f.Forces.Situation.ActsInFull, LargestOf(f),
                 string.Join("; ", f.Blockers.Select(b => $"{b.Code.Text()}: {b.Message}").Concat(f.Notes)),
                 f.Forces.Source, f.Forces.Conversion, f.Forces.Stations))
             .OrderByDescending(s => s.Utilization ?? -1),
     ];
 
-    private static string KindWord(SituationKind kind) => kind.ToString().ToLowerInvariant();
+    private static double? LargestOf(SituationFindings findings) =>
+        findings.Further.Worst?.Utilization is { } further && further > (findings.Largest?.Utilization ?? double.PositiveInfinity) ? further : findings.Largest?.Utilization;
 }

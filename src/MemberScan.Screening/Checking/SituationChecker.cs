@@ -1,7 +1,6 @@
 using System.Collections.Immutable;
 using System.Globalization;
 using MemberScan.Checks;
-using MemberScan.Checks.Stability;
 using MemberScan.Checks.Walls;
 using MemberScan.Mechanics.Forces;
 using MemberScan.Mechanics.Profiles;
@@ -11,13 +10,14 @@ using MemberScan.Mechanics.Stress;
 using MemberScan.Model;
 using MemberScan.Model.Forces;
 using MemberScan.Model.Limits;
-using MemberScan.Model.Members;
 using MemberScan.Model.Verdicts;
+using MemberScan.Screening.Checking.Further;
+using MemberScan.Screening.Checking.Rules;
 
 namespace MemberScan.Screening.Checking;
 
 /// <summary>Checks one situation on one member: all stations, all readings of the section, both shear models.</summary>
-internal sealed class SituationChecker(SectionLibrary library, Basis basis, double lengthFactor)
+internal sealed class SituationChecker(SectionLibrary library, FurtherChecks further)
 {
     /// <summary>Forces below this share of the others are rounding of zero.</summary>
     private const double ZeroShare = 1e-9;
@@ -33,18 +33,6 @@ internal sealed class SituationChecker(SectionLibrary library, Basis basis, doub
 
     private const double SteelModulus = 210e9;
 
-    /// <summary>What is the same for all situations of a member.</summary>
-    /// <param name="Section">The section with its readings.</param>
-    /// <param name="Length">Length [m].</param>
-    /// <param name="Yield">Yield strength [Pa].</param>
-    /// <param name="Poisson">ν [-].</param>
-    /// <param name="Material">The material.</param>
-    public sealed record Subject(SectionFinding Section, double Length, double Yield, double Poisson, Material Material)
-    {
-        /// <summary>How the section changes along the member; null where it does not.</summary>
-        public Taper? Taper { get; init; }
-    }
-
     /// <summary>Checks a situation.</summary>
     public SituationFindings Check(Subject subject, MemberForces forces, int index)
     {
@@ -56,7 +44,7 @@ internal sealed class SituationChecker(SectionLibrary library, Basis basis, doub
             return findings;
         }
 
-        ChooseLimit(findings, forces.Situation);
+        ChooseLimit(findings, forces.Situation, subject);
         if (forces.Stations.IsEmpty)
         {
             findings.Bar(ReasonCode.NoForces, "the source has no stations");
@@ -75,20 +63,43 @@ internal sealed class SituationChecker(SectionLibrary library, Basis basis, doub
         if (!line.ReachesBothEnds) findings.Bar(ReasonCode.StationsTooCoarse, $"the stations of '{forces.Situation.Name}' do not reach both ends of the member");
         if (shape is OpenProfile or OutlineSection && forces.Stations.Any(s => s.Forces is not { My: 0, Mz: 0 }))
             findings.Note("bending of an open or general section: lateral-torsional buckling is not covered");
-        CheckStability(findings, line, properties, subject, Math.Max(subject.Length, (forces.To ?? 0) - forces.From));
+        var compression = new Compression(findings, line, properties, subject, Math.Max(subject.Length, (forces.To ?? 0) - forces.From));
+        if (!FurtherChecks.ChecksStability(findings.Limit, subject, shape)) compression.Bar();
         var isEnvelope = !forces.Envelope.IsEmpty;
         if (isEnvelope) findings.Note(EnvelopeSearch.Note);
         var states = isEnvelope ? forces.Envelope.SelectMany(e => e.Corners()) : line.Stations.Select(s => s.Forces);
         foreach (var state in states) CheckWalls(findings, shape, properties, Cleaned(state, shape), subject);
         if (findings.Limit is not { } limit || isEnvelope && !shearIsKnown) return;
 
-        var search = new SearchIn(line, shape, subject, forces.From, limit, index, shearIsKnown);
+        var search = new SearchIn(line, shape, subject, forces.From, subject.RuleOf(limit, shape), index, shearIsKnown);
         Found? Largest(ShearModel model) => isEnvelope ? SearchEnvelope(findings, search, model) : Search(findings, search, model);
         var (elementary, elasticity) = (Largest(ShearModel.Elementary), Largest(ShearModel.Elasticity));
         if (elementary is null && elasticity is null)
             findings.Bar(ReasonCode.CheckNotEvaluated, $"no stress field for {shape.Designation}: {library.Field(shape, ShearModel.Elasticity, subject.Poisson).WhyNot}");
         findings.Elementary = Found.Larger(findings.Elementary, elementary);
         findings.Elasticity = Found.Larger(findings.Elasticity, elasticity);
+        if (subject.IsBrittle || (elementary ?? elasticity) is null) return;
+
+        further.Make(findings, new CheckedLine(subject, limit, shape, properties, States(line, forces, shape, elementary, elasticity), compression));
+    }
+
+    /// <summary>The states that checks beside the stress criterion are made for: all stations, and where the stress is largest.</summary>
+    private static List<(double X, SectionForces Forces)> States(ForceLine line, MemberForces forces, CrossSection shape, params ReadOnlySpan<Found?> found)
+    {
+        var states = new List<(double X, SectionForces Forces)>();
+        if (forces.Envelope.IsEmpty)
+            foreach (var station in line.Stations) Add(forces.From + station.X, Cleaned(station.Forces, shape));
+        else
+            foreach (var station in forces.Envelope)
+                foreach (var corner in station.Corners()) Add(station.X, Cleaned(corner, shape));
+        foreach (var place in found)
+            if (place is not null) Add(place.X, place.Forces);
+        return states;
+
+        void Add(double x, SectionForces state)
+        {
+            if (!states.Exists(s => s.Forces == state)) states.Add((x, state));
+        }
     }
 
     /// <summary>
@@ -108,24 +119,33 @@ internal sealed class SituationChecker(SectionLibrary library, Basis basis, doub
         if (!line.ReachesBothEnds) findings.Bar(ReasonCode.StationsTooCoarse, $"the stations of '{forces.Situation.Name}' do not reach both ends of the member");
         var ends = new[] { taper.Start, taper.End };
         var weakest = ends.MinBy(shape => library.Properties(shape, subject.Poisson).IMin)!;
-        CheckStability(findings, line, library.Properties(weakest, subject.Poisson), subject, Math.Max(subject.Length, (forces.To ?? 0) - forces.From));
+        new Compression(findings, line, library.Properties(weakest, subject.Poisson), subject, Math.Max(subject.Length, (forces.To ?? 0) - forces.From)).Bar();
         foreach (var station in line.Stations)
             foreach (var shape in ends) CheckWalls(findings, shape, library.Properties(shape, subject.Poisson), Cleaned(station.Forces, shape), subject);
         if (findings.Limit is not { } limit) return;
+        if (limit.Criterion is Criterion.Aisc360Asd or Criterion.Aisc360Lrfd)
+            findings.Bar(ReasonCode.CheckNotEvaluated, "the strength of a tapering member by AISC 360-22, chapters D to H, is not evaluated");
 
         foreach (var model in new[] { ShearModel.Elementary, ShearModel.Elasticity })
         {
-            var found = new TaperSearch(taper, model, subject, forces.From, limit, index).Of(findings, line);
+            var found = new TaperSearch(taper, model, subject, forces.From, subject.RuleOf(limit, taper.Start), index).Of(findings, line);
             if (model == ShearModel.Elementary) findings.Elementary = Found.Larger(findings.Elementary, found);
             else findings.Elasticity = Found.Larger(findings.Elasticity, found);
         }
     }
 
     /// <summary>What a search for the largest stress works on.</summary>
-    private sealed record SearchIn(ForceLine Line, CrossSection Shape, Subject Subject, double From, StressLimit Limit, int Index, bool ShearIsKnown);
+    private sealed record SearchIn(ForceLine Line, CrossSection Shape, Subject Subject, double From, StressRule Rule, int Index, bool ShearIsKnown);
 
-    private void ChooseLimit(SituationFindings findings, Situation situation)
+    private static void ChooseLimit(SituationFindings findings, Situation situation, Subject subject)
     {
+        if (subject.IsBrittle)
+        {
+            ChooseBrittle(findings, situation, subject.Limits.Brittle!);
+            return;
+        }
+
+        var basis = subject.Limits.Basis;
         switch (situation.Kind)
         {
             case SituationKind.Service or SituationKind.Design:
@@ -143,30 +163,25 @@ internal sealed class SituationChecker(SectionLibrary library, Basis basis, doub
         }
     }
 
+    private static void ChooseBrittle(SituationFindings findings, Situation situation, BrittleLimits limits)
+    {
+        if (situation.Kind == limits.Kind || (situation.Kind == SituationKind.Unknown && limits.Kind == SituationKind.Service))
+            findings.Limit = new StressLimit(Criterion.LargestNormalStress, 1);
+        else
+            findings.Bar(ReasonCode.KindWithoutLimit, $"'{situation.Name}' is of kind {situation.Kind.ToString().ToLowerInvariant()}; the limits of brittle materials are for {limits.Kind.ToString().ToLowerInvariant()} situations");
+    }
+
     private static ForceLine Line(MemberForces forces, ImmutableArray<ForceStation> stations, double length)
     {
         var to = forces.To ?? length;
         return ForceLine.Build(stations.Select(s => s with { X = s.X - forces.From }), to - forces.From);
     }
 
-    private void CheckStability(SituationFindings findings, ForceLine line, SectionProperties properties, Subject subject, double length)
-    {
-        var least = line.Stations.Min(s => Cleaned(s.Forces, subject.Section.Shape).N);
-        var (modulus, why) = subject.Material.Modulus.TryGet(out var found, out var reason) ? (found.Value, "") : ((double?)null, reason.Message);
-        switch (CompressionRule.Check(least, modulus, why, properties.IMin, length, lengthFactor))
-        {
-            case CheckResult.NotEvaluated barred:
-                findings.Bar(barred.Why);
-                break;
-            case CheckResult.Evaluated within:
-                findings.Note(string.Create(CultureInfo.InvariantCulture, $"compression is {4 * within.Utilization:0.00} % of the Euler load for a buckling length of {lengthFactor:0.##} × the member length; up to 4 % no stability check is needed ({within.Clause})"));
-                break;
-        }
-    }
-
     /// <summary>Slender walls by the limits of steel; of other materials with the strength scaled by the modulus, as ε asks.</summary>
     private static void CheckWalls(SituationFindings findings, CrossSection shape, SectionProperties properties, in SectionForces forces, Subject subject)
     {
+        if (subject.IsBrittle) return;
+
         var yield = subject.Yield;
         if (!subject.Material.IsSteel && subject.Material.Modulus is Finding<double>.Found { Value: < SteelModulus } modulus)
             yield *= SteelModulus / modulus.Value;
@@ -175,16 +190,14 @@ internal sealed class SituationChecker(SectionLibrary library, Basis basis, doub
 
     private Found? SearchEnvelope(SituationFindings findings, SearchIn given, ShearModel model) =>
         library.Field(given.Shape, model, given.Subject.Poisson).Field is { } field
-            ? EnvelopeSearch.Largest(findings, findings.Forces.Envelope, field, LimitInForce.Measure(given.Limit), LimitInForce.Stress(given.Limit, given.Subject.Yield), given.Index)
+            ? EnvelopeSearch.Largest(findings, findings.Forces.Envelope, field, given.Rule, given.Index)
             : null;
 
     private Found? Search(SituationFindings findings, SearchIn given, ShearModel model)
     {
-        var (line, shape, subject, from, limit, index, shearIsKnown) = given;
+        var (line, shape, subject, from, rule, index, shearIsKnown) = given;
         if (library.Field(shape, model, subject.Poisson).Field is not { } field) return null;
 
-        var measure = LimitInForce.Measure(limit);
-        var allowed = LimitInForce.Stress(limit, subject.Yield);
         Found? best = null;
 
         double Try(double x, in SectionForces forces)
@@ -196,9 +209,9 @@ internal sealed class SituationChecker(SectionLibrary library, Basis basis, doub
             }
 
             var usable = Usable(findings, field, shape, shearIsKnown ? forces : new SectionForces(forces.N, 0, 0, 0, forces.My, forces.Mz));
-            var point = field.Govern(usable, measure);
-            if (best is null || point.Value / allowed > best.Utilization) best = new Found(point.Value / allowed, from + x, usable, point, field, index);
-            return point.Value;
+            var (utilization, point) = rule.Govern(field, usable);
+            if (best is null || utilization > best.Utilization) best = new Found(utilization, from + x, usable, point, field, index, rule);
+            return utilization;
         }
 
         // The round bar's shear parabola follows the resultant and is not convex in Vy and Vz; every other field is linear in the forces.
@@ -213,7 +226,7 @@ internal sealed class SituationChecker(SectionLibrary library, Basis basis, doub
         double Bound(in SectionForces forces)
         {
             var cleaned = Cleaned(forces, shape);
-            return NumberRange.Holds(shape, field.Properties, cleaned) ? field.Govern(cleaned, measure).Value / allowed : double.PositiveInfinity;
+            return NumberRange.Holds(shape, field.Properties, cleaned) ? rule.Govern(field, cleaned).Utilization : double.PositiveInfinity;
         }
 
         foreach (var station in line.Stations) Try(station.X, station.Forces);

@@ -1,6 +1,7 @@
 using MemberScan.Model.Forces;
 using MemberScan.Model.Limits;
 using MemberScan.Model.Verdicts;
+using MemberScan.Screening.Checking.Further;
 
 namespace MemberScan.Screening.Checking;
 
@@ -12,6 +13,9 @@ internal sealed class SituationFindings(MemberForces forces)
 
     /// <summary>The limit that it was held against; null for none.</summary>
     public StressLimit? Limit { get; set; }
+
+    /// <summary>The checks beside the stress criterion, each where it is worst.</summary>
+    public FurtherFindings Further { get; } = new();
 
     /// <summary>Largest stress by the elementary model.</summary>
     public Found? Elementary { get; set; }

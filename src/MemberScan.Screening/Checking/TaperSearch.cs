@@ -1,13 +1,13 @@
 using MemberScan.Mechanics.Forces;
 using MemberScan.Mechanics.Sections;
 using MemberScan.Mechanics.Stress;
-using MemberScan.Model.Limits;
 using MemberScan.Model.Verdicts;
+using MemberScan.Screening.Checking.Rules;
 
 namespace MemberScan.Screening.Checking;
 
 /// <summary>Seeks the largest stress along a tapering member: the section is taken at each place.</summary>
-internal sealed class TaperSearch(Taper taper, ShearModel model, SituationChecker.Subject subject, double from, StressLimit limit, int index)
+internal sealed class TaperSearch(Taper taper, ShearModel model, Subject subject, double from, StressRule rule, int index)
 {
     /// <summary>Parts into which a stretch between stations is cut before its largest value is closed in upon.</summary>
     private const int Parts = 16;
@@ -45,10 +45,9 @@ internal sealed class TaperSearch(Taper taper, ShearModel model, SituationChecke
         var cleaned = SituationChecker.Cleaned(forces, shape);
         if (!NumberRange.Holds(shape, field.Properties, cleaned)) return 0;
 
-        var allowed = LimitInForce.Stress(limit, subject.Yield);
-        var point = field.Govern(cleaned, LimitInForce.Measure(limit));
-        if (_best is null || point.Value / allowed > _best.Utilization) _best = new Found(point.Value / allowed, from + x, cleaned, point, field, index);
-        return point.Value;
+        var (utilization, point) = rule.Govern(field, cleaned);
+        if (_best is null || utilization > _best.Utilization) _best = new Found(utilization, from + x, cleaned, point, field, index, rule);
+        return utilization;
     }
 
     private void SearchInside(ForceInterval interval)

@@ -17,11 +17,18 @@ internal sealed class InputMarker
     // Magnitudes below are rounding of a turn of axes [N], [N·m].
     private const double Nothing = 1e-6;
 
+    private static readonly string[] s_limits = ["basis.", "checks.", "stability.", "threads.", "materials.welds", "rules"];
+
     private readonly string _limit;
 
     /// <summary>A marker for one run.</summary>
-    public InputMarker(Settings settings) =>
-        _limit = Mark($"{Words(settings.Basis.Service)}|{Words(settings.Basis.Design)}|{settings.LengthFactor.ToString("R", CultureInfo.InvariantCulture)}");
+    public InputMarker(Settings settings)
+    {
+        var standard = Settings.Default.Effective.Select(s => (s.Key, s.Value)).ToHashSet();
+        var others = settings.Effective.Where(s => s_limits.Any(key => s.Key.StartsWith(key, StringComparison.Ordinal)) && !standard.Contains((s.Key, s.Value)));
+        _limit = Mark($"{Words(settings.Basis.Service)}|{Words(settings.Basis.Design)}|{settings.LengthFactor.ToString("R", CultureInfo.InvariantCulture)}"
+            + string.Concat(others.Select(s => $"|{s.Key}={s.Value}")));
+    }
 
     /// <summary>The marks of a candidate under its forces.</summary>
     public InputMarks Of(Member member, IReadOnlyList<MemberForces> forces) => new(Mark(Section(member)), Mark(Material(member.Material)), Mark(Forces(forces)), _limit);

@@ -2,6 +2,7 @@ using System.Collections.Immutable;
 using MemberScan.Foundation.Geometry;
 using MemberScan.Model.Verdicts;
 using MemberScan.Screening.Marks;
+using MemberScan.Screening.Record.Lines;
 
 namespace MemberScan.Screening.Record;
 
@@ -85,4 +86,25 @@ public sealed record MemberResult
 
     /// <summary>What a person decided about it; null if nobody did.</summary>
     public MemberDecision? Decision { get; init; }
+
+    /// <summary>Every check, each where it is worst: those that decide first, by falling utilization, those not made after them; then what informs.</summary>
+    public ImmutableArray<CheckLine> Checks { get; init; } = [];
+
+    /// <summary>The three next-worst of the deciding checks, behind the one that governs; each check once in a situation.</summary>
+    public ImmutableArray<RankedLine> NextWorst { get; init; } = [];
+
+    /// <summary>Share of the limit that is left, <c>1 − utilization</c> [-]; below zero over the limit, null without a utilization.</summary>
+    public double? Margin { get; init; }
+
+    /// <summary>
+    /// Yield strength that the stress criterion needs [Pa]; given where the strength is missing or too small. No verdict: stability and walls
+    /// are not looked at.
+    /// </summary>
+    public double? RequiredYield { get; init; }
+
+    /// <summary>Nearest size at which the stress criterion holds; null unless overstressed, and where no size is known.</summary>
+    public SizeHint? NearestSize { get; init; }
+
+    /// <summary>Deflection beside its named limit; null where none is named for the role. Never part of the verdict.</summary>
+    public CheckLine? Deflection { get; init; }
 }

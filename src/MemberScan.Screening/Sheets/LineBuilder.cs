@@ -34,8 +34,9 @@ internal sealed class LineBuilder(Basis basis)
         var isKnown = true;
         var stations = field is null ? forces.Stations : TorsionMove.Of(forces, field.Properties, findings, out isKnown);
         var line = ForceLine.Build(stations.Select(s => s with { X = s.X - forces.From }), (forces.To ?? length) - forces.From);
+        var station = governing.StressStation ?? governing.Station;
         var isGoverning = situation.Situation == governing.Situation && situation.Kind == governing.Kind;
-        var points = Points(line, forces.From, isGoverning ? governing.Station : null);
+        var points = Points(line, forces.From, isGoverning ? station : null);
         var allowed = isGoverning ? governing.Limit : Allowed(situation.Kind, result);
         return new SituationLine(situation.Situation, situation.Kind, [isKnown && withUtilization ? WithUtilization(points, field, governing, allowed, isGoverning) : points])
         {
@@ -44,7 +45,9 @@ internal sealed class LineBuilder(Basis basis)
     }
 
     private double? Allowed(string kind, MemberResult result) =>
-        (kind == "design" ? basis.Design : basis.Service) is { } limit && result.Strength is { } strength ? LimitInForce.Stress(limit, strength) : null;
+        (kind == "design" ? basis.Design : basis.Service) is { Criterion: Criterion.AllowableVonMises or Criterion.AllowableTresca or Criterion.En1993Elastic } limit && result.Strength is { } strength
+            ? strength / limit.Factor
+            : null;
 
     private static ImmutableArray<LinePoint> Points(ForceLine line, double from, double? governing)
     {
@@ -71,6 +74,8 @@ internal sealed class LineBuilder(Basis basis)
             if (a * b < 0) yield return a / (a - b);
     }
 
+    private static double StressOf(Governing governing) => governing.Check == Governing.StressKey ? governing.Utilization : governing.StressUtilization;
+
     private static ImmutableArray<LinePoint> WithUtilization(ImmutableArray<LinePoint> points, StressField? field, Governing governing, double? allowed, bool isGoverning)
     {
         if (field is null || allowed is not { } limit) return points;
@@ -80,6 +85,6 @@ internal sealed class LineBuilder(Basis basis)
 
         var values = new double[forces.Length];
         field.GovernEach(forces, governing.Point.Measure, values);
-        return [.. points.Select((p, i) => p with { Utilization = isGoverning && p.X == governing.Station ? Math.Max(governing.Utilization, Math.Abs(values[i]) / limit) : Math.Abs(values[i]) / limit })];
+        return [.. points.Select((p, i) => p with { Utilization = isGoverning && p.X == (governing.StressStation ?? governing.Station) ? Math.Max(StressOf(governing), Math.Abs(values[i]) / limit) : Math.Abs(values[i]) / limit })];
     }
 }

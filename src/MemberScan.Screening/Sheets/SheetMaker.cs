@@ -1,11 +1,11 @@
 using System.Collections.Concurrent;
 using System.Collections.Immutable;
+using MemberScan.Inputs.SettingsFiles;
 using MemberScan.Mechanics.Forces;
 using MemberScan.Mechanics.Sections;
 using MemberScan.Mechanics.States;
 using MemberScan.Mechanics.Stress;
 using MemberScan.Model;
-using MemberScan.Model.Limits;
 using MemberScan.Model.Members;
 using MemberScan.Screening.Checking;
 using MemberScan.Screening.Record;
@@ -22,13 +22,13 @@ public sealed class SheetMaker
     private readonly SectionLibrary _library;
     private readonly Dictionary<string, Member> _members;
     private readonly ConcurrentDictionary<StressField, Lazy<SectionSamples>> _samples = new(ReferenceEqualityComparer.Instance);
-    private readonly LineBuilder _lines;
+    private readonly Settings _settings;
 
-    internal SheetMaker(ModelContents contents, SectionLibrary library, Basis basis)
+    internal SheetMaker(ModelContents contents, SectionLibrary library, Settings settings)
     {
         (_contents, _library) = (contents, library);
         _members = contents.Catalog.Members.DistinctBy(m => m.Key, StringComparer.Ordinal).ToDictionary(m => m.Key, StringComparer.Ordinal);
-        _lines = new LineBuilder(basis);
+        _settings = settings;
     }
 
     /// <summary>The samples of the section that decides a candidate; null where no stress was found or the field is not at hand.</summary>
@@ -47,7 +47,7 @@ public sealed class SheetMaker
         if (result.Governing is not { } governing || FieldOf(result) is not { } field) return null;
 
         var samples = Samples(field);
-        var forces = governing.Forces;
+        var forces = governing.StressForces ?? governing.Forces;
         return new SheetData
         {
             Samples = samples,
@@ -92,7 +92,7 @@ public sealed class SheetMaker
         var taper = member.EndSection is { } end ? Taper.Of(section.Value.Shape, end.Shape) : null;
         return taper is null
             ? section.Value.Shapes.Concat(member.EndSection?.Shapes ?? []).FirstOrDefault(s => s.Designation == governing.Section)
-            : taper.At(Math.Clamp(governing.Station / result.Length!.Value, 0, 1));
+            : taper.At(Math.Clamp((governing.StressStation ?? governing.Station) / result.Length!.Value, 0, 1));
     }
 
     private ImmutableArray<SituationLine> Lines(MemberResult result, Governing governing, StressField field, bool isWhole)
@@ -101,11 +101,12 @@ public sealed class SheetMaker
         var forces = _contents.ForcesOf(member, out _);
         var isPrismatic = member.EndSection is null;
         var lines = ImmutableArray.CreateBuilder<SituationLine>();
+        var builder = new LineBuilder(_settings.LimitsOf(member).Basis);
         foreach (var situation in result.Situations.OrderByDescending(s => s.Situation == governing.Situation && s.Kind == governing.Kind))
         {
             if (lines.Count == (isWhole ? MostLines : 1)) break;
             if (forces.FirstOrDefault(f => f.Situation.Name == situation.Situation) is not { Unusable: null } found || found.Stations.IsEmpty) continue;
-            if (_lines.Of(found, situation, result, governing, isPrismatic ? field : null, isWhole) is { } line) lines.Add(line);
+            if (builder.Of(found, situation, result, governing, isPrismatic ? field : null, isWhole) is { } line) lines.Add(line);
         }
 
         return lines.ToImmutable();

@@ -117,7 +117,7 @@ public sealed class SettingsFileTests
         { "{\"candidates\": {\"always\": [7]}}", "INP-0104", 1, 28, "candidates.always is a number; give a text in quotes" },
         { "{\"forces\": {\"kinds\": [true]}}", "INP-0104", 1, 23, "forces.kinds[1] is true or false; give an object in braces" },
         { "{\"materials\": {\"grades\": [" + Grade("\"isSteel\": true", "\"isSteel\": \"yes\"") + "]}}", "INP-0104", 1, 160, "materials.grades[1].isSteel is a text; give true or false" },
-        { "{\"basis\": {\"service\": {\"criterion\": \"en-1993-1-1-elastic\"}}}", "INP-0105", 1, 37, "basis.service.criterion is 'en-1993-1-1-elastic'; known are allowable-von-mises, allowable-tresca" },
+        { "{\"basis\": {\"service\": {\"criterion\": \"en-1993-1-1-elastic\"}}}", "INP-0105", 1, 37, "basis.service.criterion is 'en-1993-1-1-elastic'; known are allowable-von-mises, allowable-tresca, aisc-360-asd, largest-normal-stress" },
         { "{\"forces\": {\"convention\": \"endforces\"}}", "INP-0105", 1, 27, "forces.convention is 'endforces'; did you mean 'end-forces'?" },
         { "{\"forces\": {\"kinds\": [{\"pattern\": \"a\", \"kind\": \"unknown\"}]}}", "INP-0105", 1, 48, "forces.kinds[1].kind is 'unknown'; known are service, design" },
         { "{\"display\": \"SI\"}", "INP-0105", 1, 13, "display is 'SI'; did you mean 'si'?" },

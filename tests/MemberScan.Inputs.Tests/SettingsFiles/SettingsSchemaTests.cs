@@ -5,6 +5,8 @@ using MemberScan.Inputs.Materials;
 using MemberScan.Inputs.Presets;
 using MemberScan.Inputs.SettingsFiles;
 using MemberScan.Inputs.SettingsFiles.Forces;
+using MemberScan.Inputs.SettingsFiles.Limits;
+using MemberScan.Model.Limits.Keys;
 
 namespace MemberScan.Inputs.Tests.SettingsFiles;
 
@@ -37,6 +39,14 @@ public sealed class SettingsSchemaTests
         Assert.Equal(GradeReader.Keys, Keys("materials", "grades"));
         Assert.Equal(GradeReader.YieldKeys, Keys("materials", "grades", "yields"));
         Assert.Equal(SettingKeys.Stability, Keys("stability"));
+        Assert.Equal(LimitKeys.Brittle, Keys("basis", "brittle"));
+        Assert.Equal(LimitKeys.Checks, Keys("checks"));
+        Assert.Equal(LimitKeys.Threads, Keys("threads"));
+        Assert.Equal(LimitKeys.Rule, Keys("rules"));
+        Assert.Equal(LimitKeys.When, Keys("rules", "when"));
+        Assert.Equal(LimitKeys.Set, Keys("rules", "set"));
+        Assert.Equal(LimitKeys.Weld, Definition("weld").GetProperty("properties").EnumerateObject().Select(key => key.Name));
+        Assert.Equal(LimitKeys.Deflection, Definition("deflection").GetProperty("properties").EnumerateObject().Select(key => key.Name));
     }
 
     [Fact]
@@ -44,6 +54,13 @@ public sealed class SettingsSchemaTests
     {
         Assert.Equal(SettingKeys.ServiceCriteria.Words, Words("basis", "service", "criterion"));
         Assert.Equal(SettingKeys.DesignCriteria.Words, Words("basis", "design", "criterion"));
+        Assert.Equal(LimitKeys.Walls.Words, Words("basis", "wall"));
+        Assert.Equal(SettingKeys.Kinds.Words, Words("basis", "brittle", "situations"));
+        Assert.Equal(CheckKeys.All, At("checks", "off").GetProperty("items").GetProperty("enum").EnumerateArray().Select(word => word.GetString()!));
+        Assert.Equal(LimitKeys.Ends.Words, Words("stability", "ends"));
+        Assert.Equal(LimitKeys.Forming.Words, Words("stability", "hollowForming"));
+        Assert.Equal(LimitKeys.ThreadRules.Words, Words("threads", "rule"));
+        Assert.Equal(LimitKeys.Areas.Words, Words("threads", "area"));
         Assert.Equal(SettingKeys.Conventions.Words, Words("forces", "convention"));
         Assert.Equal(SettingKeys.Components.Words, Words("forces", "components"));
         Assert.Equal(SettingKeys.MissingComponents.Words, Words("forces", "missingComponents"));
@@ -70,6 +87,12 @@ public sealed class SettingsSchemaTests
     {
         Assert.Equal(SettingKeys.Factor, Range(At("basis", "service", "omega")));
         Assert.Equal(SettingKeys.Factor, Range(At("basis", "design", "gammaM0")));
+        Assert.Equal(SettingKeys.Factor, Range(At("basis", "gammaM1")));
+        Assert.Equal(SettingKeys.Factor, Range(At("basis", "gammaM2")));
+        Assert.Equal(SettingKeys.LengthFactor, Range(At("stability", "factorByRole").GetProperty("additionalProperties")));
+        Assert.Equal(LimitKeys.TemperatureFactor, Range(At("threads", "temperatureFactor")));
+        Assert.Equal(LimitKeys.SpanOver, Range(Definition("deflection").GetProperty("properties").GetProperty("spanOver")));
+        foreach (var list in new[] { At("rules"), At("deflection"), At("materials", "welds") }) Assert.Equal(LimitKeys.MostEntries, list.GetProperty("maxItems").GetInt32());
         Assert.Equal(SettingKeys.Turn, Range(At("forces", "turnDegrees")));
         Assert.Equal(SettingKeys.Turn, Range(At("forces", "turnDegreesByMember").GetProperty("additionalProperties")));
         Assert.Equal((0, GradeReader.LargestPoisson), Range(At("materials", "poisson")));
@@ -138,6 +161,8 @@ public sealed class SettingsSchemaTests
         JsonValueKind.Array => node.EnumerateArray().SelectMany(All),
         _ => [],
     };
+
+    private JsonElement Definition(string name) => _schema.GetProperty("$defs").GetProperty(name);
 
     private IEnumerable<string> Keys(params string[] path) =>
         Inside(At(path)).GetProperty("properties").EnumerateObject().Select(key => key.Name);

@@ -39,6 +39,7 @@ public sealed class SettingsTests
         [
             "basis.service.criterion=allowable-von-mises", "basis.service.omega=1.67",
             "basis.design.criterion=en-1993-1-1-elastic", "basis.design.gammaM0=1",
+            "basis.wall=automatic", "basis.brittle=none", "basis.gammaM1=1", "basis.gammaM2=1.25", "checks.off=none",
             "candidates.always=IfcBeam, IfcColumn, IfcMember, IfcRailing, IfcStructuralCurveMember",
             "candidates.withBarBodyOrForces=IfcBuildingElementProxy, IfcDiscreteAccessory, IfcMechanicalFastener, IfcReinforcingBar, IfcTendon, IfcFlowSegment, IfcPipeSegment, IfcCableSegment",
             "sections.recogniseMeshes=false", "roles=the shipped rules",
@@ -48,7 +49,10 @@ public sealed class SettingsTests
             "forces.propertySets=none", "forces.kindOfAll=none",
             "loads.presets=none", "loads.contactTolerance=0.025 m",
             "units.LENGTHUNIT=none", "units.FORCEUNIT=none", "units.PRESSUREUNIT=none", "units.TORQUEUNIT=none", "units.MODULUSOFELASTICITYUNIT=none",
-            "materials.grades=none", "materials.poisson=0.3", "stability.lengthFactor=2", "display=si",
+            "materials.grades=none", "materials.poisson=0.3", "materials.welds=none",
+            "stability.lengthFactor=2", "stability.factorByRole=none", "stability.ends=from-contacts", "stability.hollowForming=unknown",
+            "threads.rule=automatic", "threads.area=root", "threads.allowable=none", "threads.fu=none", "threads.cutThread=true", "threads.temperatureFactor=1", "threads.byMember=none",
+            "deflection=none", "rules=none", "display=si",
         ], lines.Select(line => $"{line.Key}={line.Value}"));
         Assert.All(lines, line => Assert.True(line.IsDefault));
     }

@@ -4,6 +4,7 @@ using System.Text.RegularExpressions;
 using AngleSharp.Dom;
 using AngleSharp.Html.Parser;
 using MemberScan.Model.Verdicts;
+using MemberScan.Reporting.Sheets;
 using MemberScan.Reporting.Sheets.Packed;
 using MemberScan.Screening.Record;
 
