@@ -406,7 +406,8 @@
   let opened;
 
   const open = () => opened ??= (async () => {
-    const source = document.getElementById('sheet-data')?.textContent?.trim() ?? '';
+    const source = document.getElementById('sheet-data')?.textContent?.trim();
+    if (!source) return { packed: { texts: [], shapes: [], sections: [] }, places: new Map() };
     const bytes = Uint8Array.from(atob(source), ch => ch.charCodeAt(0));
     const stream = new Blob([bytes]).stream().pipeThrough(new DecompressionStream('deflate'));
     /** @type {Packed} */
