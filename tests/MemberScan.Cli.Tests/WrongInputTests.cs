@@ -71,7 +71,7 @@ public sealed class WrongInputTests
     }
 
     [Theory]
-    [InlineData("settings", "{\"display\": \"metric\"}", "error: INP-0105 display is 'metric'; known are si [input, line 1, column 13, byte 12]", "The settings file is wrong")]
+    [InlineData("settings", "{\"display\": \"metric\"}", "error: INP-0105 display is 'metric'; known are si, us [input, line 1, column 13, byte 12]", "The settings file is wrong")]
     [InlineData("table", "", "error: INP-", "A forces table is wrong; nothing was written.")]
     [InlineData("table", Header + "P-1,S,service,0,1,0,0,0,0,x\n", "line 2", "A forces table is wrong; nothing was written.")]
     [InlineData("table", Header + "P-9,S,service,0,1,0,0,0,0,0\n", "error: SCR-0001 'P-9' is the key or tag of no candidate; correct it, or set forces.unknownMembers to \"list\".", "The forces table does not fit the model; nothing was written.")]

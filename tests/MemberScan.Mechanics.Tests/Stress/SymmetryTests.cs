@@ -120,9 +120,11 @@ public sealed class SymmetryTests
 
                 var (first, second, both) = (field.At(a, y, z), field.At(b, y, z), field.At(a + b, y, z));
 
+                // In the middle of a rounded mesh a side of each patch is a point: derivatives are taken a hair off it and lose digits.
+                var digits = Math.Max(Math.Abs(u), Math.Abs(v)) < 1e-6 ? 1e-5 : 1e-8;
                 Near(first.Sigma + second.Sigma, both.Sigma, field, a);
-                Near(first.TauXY + second.TauXY, both.TauXY, field, a);
-                Near(first.TauXZ + second.TauXZ, both.TauXZ, field, a);
+                Near(first.TauXY + second.TauXY, both.TauXY, field, a, digits);
+                Near(first.TauXZ + second.TauXZ, both.TauXZ, field, a, digits);
             }
         }, iter: 100);
 
