@@ -1,6 +1,3 @@
-using System.Security.Cryptography;
-using System.Text;
-
 namespace MemberScan.Reporting.Script;
 
 /// <summary>The scripts of the page as embedded in the program, with their hashes for the content policy.</summary>
@@ -18,7 +15,7 @@ public sealed record PageScripts(string Main, string? View)
     public static PageScripts Embedded { get; } = new(string.Concat(s_order.Select(Read)), Read(ViewName) is { Length: > 0 } view ? view : null);
 
     /// <summary>The policy's list of sources for scripts.</summary>
-    public string Sources => string.Join(' ', new[] { Main, View }.OfType<string>().Select(HashOf));
+    public string Sources => string.Join(' ', new[] { Main, View }.OfType<string>().Select(EmbeddedText.PolicySource));
 
     /// <summary>The element of a script, as it stands in the page.</summary>
     /// <exception cref="InvalidOperationException">The script holds text that would end its element.</exception>
@@ -30,14 +27,5 @@ public sealed record PageScripts(string Main, string? View)
         return "<script>" + script + "</script>";
     }
 
-    // Content Security Policy Level 3, hash-source: over the element's text, UTF-8.
-    private static string HashOf(string script) => $"'sha256-{Convert.ToBase64String(SHA256.HashData(Encoding.UTF8.GetBytes(script)))}'";
-
-    private static string Read(string name)
-    {
-        using var stream = typeof(PageScripts).Assembly.GetManifestResourceStream(Folder + name);
-        if (stream is null) return "";
-        using var reader = new StreamReader(stream, Encoding.UTF8);
-        return reader.ReadToEnd().ReplaceLineEndings("\n");
-    }
+    private static string Read(string name) => EmbeddedText.Find(Folder + name) ?? "";
 }

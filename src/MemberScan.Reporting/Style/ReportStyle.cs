@@ -1,5 +1,4 @@
 using System.Globalization;
-using System.Security.Cryptography;
 using System.Text;
 using MemberScan.Reporting.Display;
 using MemberScan.Reporting.Space;
@@ -29,10 +28,8 @@ public sealed record ReportStyle(string Text, string Policy)
         ArgumentNullException.ThrowIfNull(record);
         var text = s_sheet + Margins(record);
         var ofScripts = scripts is null ? "" : $"script-src {scripts}; ";
-        return new ReportStyle(text, $"default-src 'none'; style-src {Hash(text)}; {ofScripts}base-uri 'none'; form-action 'none'");
+        return new ReportStyle(text, $"default-src 'none'; style-src {EmbeddedText.PolicySource(text)}; {ofScripts}base-uri 'none'; form-action 'none'");
     }
-
-    private static string Hash(string text) => $"'sha256-{Convert.ToBase64String(SHA256.HashData(Encoding.UTF8.GetBytes(text)))}'";
 
     private static string Margins(ScreeningRecord record) =>
         "\n@page {\n"
@@ -87,11 +84,5 @@ public sealed record ReportStyle(string Text, string Policy)
         return quoted.Append('"').ToString();
     }
 
-    private static string Read(string name)
-    {
-        using var stream = typeof(ReportStyle).Assembly.GetManifestResourceStream(name)
-            ?? throw new InvalidOperationException("A style sheet is missing from the assembly.");
-        using var reader = new StreamReader(stream, Encoding.UTF8);
-        return reader.ReadToEnd().ReplaceLineEndings("\n");
-    }
+    private static string Read(string name) => EmbeddedText.Find(name) ?? throw new InvalidOperationException("A style sheet is missing from the assembly.");
 }

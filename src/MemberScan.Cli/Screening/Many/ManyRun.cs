@@ -12,7 +12,7 @@ internal static class ManyRun
     /// <summary>Most models at a time.</summary>
     public const int MostWorkers = 64;
 
-    /// <summary>Models at a time when nothing is said: each holds its text in memory.</summary>
+    /// <summary>Models at a time when nothing is said: each holds its text in memory; a plain file over 64 MiB stays on disk.</summary>
     private const int MostWorkersByDefault = 4;
 
     /// <summary>What was asked for on the command line.</summary>

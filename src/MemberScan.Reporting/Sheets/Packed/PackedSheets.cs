@@ -1,6 +1,5 @@
 using System.Collections.Immutable;
 using System.IO.Compression;
-using System.Text;
 using System.Text.Json;
 using System.Text.RegularExpressions;
 using MemberScan.Reporting.Page;
@@ -32,9 +31,6 @@ internal static partial class PackedSheets
 
         public List<List<string>> Columns { get; } = [];
     }
-
-    /// <summary>The script that draws them.</summary>
-    public static string Script { get; } = ReadScript();
 
     /// <summary>Packs the sheets of some candidates.</summary>
     public static string Pack(ImmutableArray<PlacedMember> members, SheetMaker sheets)
@@ -134,13 +130,6 @@ internal static partial class PackedSheets
         foreach (var column in shape.Columns) json.WriteStringValue(string.Join('\t', column));
         json.WriteEndArray();
         json.WriteEndObject();
-    }
-
-    private static string ReadScript()
-    {
-        using var stream = typeof(PackedSheets).Assembly.GetManifestResourceStream("script/sheet.js") ?? throw new InvalidOperationException("The script is missing from the assembly.");
-        using var reader = new StreamReader(stream, Encoding.UTF8);
-        return reader.ReadToEnd().ReplaceLineEndings("\n");
     }
 
     [GeneratedRegex("(?<=</tr>|</div>|</figure>|</h4>|</p>|</caption>|</li>|</summary>|</thead>)", RegexOptions.CultureInvariant)]

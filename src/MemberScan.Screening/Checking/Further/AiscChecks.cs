@@ -25,7 +25,7 @@ internal static class AiscChecks
 
         FurtherChecks.BarIfOff(findings, line, "aisc-e3");
         var method = line.Limit.Criterion == Criterion.Aisc360Asd ? DesignMethod.Asd : DesignMethod.Lrfd;
-        var length = line.Compression.NeedsStability ? lengths.Of(line) : lengths.OrCautious(line);
+        var length = lengths.Of(line);
         foreach (var (x, forces) in line.States)
         {
             if (forces == default) continue;

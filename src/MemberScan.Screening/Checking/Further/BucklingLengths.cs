@@ -8,9 +8,11 @@ namespace MemberScan.Screening.Checking.Further;
 /// <remarks>That an end meets another member does not say that the other one holds it; such lengths are marked assumed.</remarks>
 internal sealed class BucklingLengths(Lazy<ContactList?> contacts)
 {
-    /// <summary>The buckling length for bending about both axes, or why it is not known.</summary>
+    /// <summary>The buckling length for bending about both axes, or why it is not known; where the compression is too small to need one, as long as the rule of 4 % takes it.</summary>
     /// <param name="line">The member.</param>
-    public Finding<BucklingLength> Of(CheckedLine line)
+    public Finding<BucklingLength> Of(CheckedLine line) => line.Compression.NeedsStability ? Ruled(line) : OrCautious(line);
+
+    private Finding<BucklingLength> Ruled(CheckedLine line)
     {
         var (member, stability) = (line.Subject.Member, line.Subject.Limits.Stability);
         var factor = stability.FactorOf(member.Role);
@@ -18,11 +20,9 @@ internal sealed class BucklingLengths(Lazy<ContactList?> contacts)
         return BucklingLengthRule.Find(member.Role, hold, line.Compression.Length, factor);
     }
 
-    /// <summary>The length that serves where the compression is too small to need one: as long as the rule of 4 % takes it.</summary>
-    /// <param name="line">The member.</param>
-    public Finding<BucklingLength> OrCautious(CheckedLine line)
+    private Finding<BucklingLength> OrCautious(CheckedLine line)
     {
-        if (Of(line) is Finding<BucklingLength>.Found found) return found;
+        if (Ruled(line) is Finding<BucklingLength>.Found found) return found;
 
         const string source = "assumed: as long as in the rule of 4 % of the Euler load";
         var length = line.Compression.AssumedLength;

@@ -66,7 +66,7 @@ internal static class EnChecks
     private static MemberCase MemberOf(CheckedLine line, BucklingLengths lengths, SituationFindings findings)
     {
         var needs = line.Compression.NeedsStability;
-        var length = needs ? lengths.Of(line) : lengths.OrCautious(line);
+        var length = lengths.Of(line);
         var actions = MemberActions.Of(line.States.Select(s => s.Forces));
         return new MemberCase
         {
